@@ -1,0 +1,2 @@
+namespace BladeLoads.Batch;
+internal static class Placeholder;

@@ -1,0 +1,2 @@
+namespace BladeLoads.Results;
+internal static class Placeholder;

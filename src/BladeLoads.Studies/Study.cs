@@ -1,0 +1,37 @@
+using System.Collections.Immutable;
+using BladeLoads.Rotor.Operation;
+
+namespace BladeLoads.Studies;
+
+/// <summary>A study as read: the cases that can be solved, those that cannot, and everything found on the way.</summary>
+/// <param name="Name">The name of the study's folder; results lie under it.</param>
+/// <param name="Folder">Absolute path.</param>
+/// <param name="Baseline">The case that others are compared with, by name; null for none.</param>
+/// <param name="Cases">In the order of their names (ordinal).</param>
+/// <param name="Rejected">Cases that an error keeps from running, by name or by file where the name is not known.</param>
+/// <param name="Errors">In file order: by file, line, column.</param>
+/// <param name="Doubts">In file order; nothing is kept from running by a doubt.</param>
+public sealed record Study(
+    string Name, string Folder, string? Baseline, ImmutableArray<StudyCase> Cases, ImmutableArray<string> Rejected,
+    ImmutableArray<InputFinding> Errors, ImmutableArray<InputFinding> Doubts);
+
+/// <summary>An error or a doubt about an input, at its place. Lines and columns count from 1; 0 means the whole file.</summary>
+/// <param name="File">Relative to the study folder, with forward slashes.</param>
+/// <param name="Text">What was found and what would do, without the place.</param>
+public sealed record InputFinding(string File, int Line, int Column, string Text);
+
+/// <summary>A validated rotor case or variant of a sweep.</summary>
+/// <param name="Name">The case's file name without its ending; variants add <c>~key-value</c>. Safe as a folder name.</param>
+/// <param name="File">The case file, relative to the study folder.</param>
+/// <param name="Spanwise">The wind speeds whose elements are written; null for all, empty for none.</param>
+/// <param name="Fingerprint">SHA-256, 64 lower-case hexadecimal digits, over every value that determines the result.</param>
+/// <param name="Inputs">Every file that was read for it, the case file first.</param>
+public sealed record StudyCase(
+    string Name, string Title, string File, RotorCase Rotor, ImmutableArray<double>? Spanwise, string Fingerprint,
+    ImmutableArray<InputFile> Inputs);
+
+/// <summary>A file that a case was read from.</summary>
+/// <param name="File">Relative to the study folder, with forward slashes.</param>
+/// <param name="Sha256">Of the very bytes that were parsed, 64 lower-case hexadecimal digits.</param>
+/// <param name="Contents">One phrase: <c>3 Reynolds numbers from 1e6 to 9e6, 330 rows, -180 to 180 deg</c>.</param>
+public sealed record InputFile(string File, string Sha256, string Contents);

@@ -1,0 +1,15 @@
+namespace BladeLoads.Studies;
+
+/// <summary>Reads a study folder or one case file.</summary>
+public static class StudyReader
+{
+    /// <summary>
+    /// Reads everything and reports every error and doubt at once; a case with an error is rejected, the others are kept.
+    /// </summary>
+    /// <param name="path">A study folder, or one case file: then only that case and its variants are read.</param>
+    /// <exception cref="StudyNotFoundException">There is nothing at the path that could be a study.</exception>
+    public static Study Read(string path) => throw new NotSupportedException();
+}
+
+/// <summary>The message says what was looked for and what was there, in the user's words.</summary>
+public sealed class StudyNotFoundException(string message) : Exception(message);
