@@ -57,5 +57,10 @@ internal readonly record struct Balance(
     public bool IsBalanced => !double.IsNaN(InflowAngle);
 
     /// <summary>A rotor at rest: the wind meets the blade square to its way, and is not slowed.</summary>
-    public static Balance AtRest { get; } = new(Math.PI / 2, 0, 0, new Induction(0, 0, 1, IsFlow: true), SeveralBalances: false);
+    public static Balance AtRest(in Annulus annulus)
+    {
+        const double Square = Math.PI / 2;
+        var coefficients = annulus.CoefficientsAt(annulus.AngleOfAttack(Square));
+        return new(Square, 0, 0, new Induction(0, 0, 1, coefficients, 1, 0, IsFlow: true), SeveralBalances: false);
+    }
 }

@@ -1,3 +1,5 @@
+using BladeLoads.Rotor.Sections;
+
 namespace BladeLoads.Rotor.Momentum;
 
 /// <summary>
@@ -45,7 +47,7 @@ internal static class Residual
         var throughDisc = inflowAngle > 0 ? 1 / HighThrust.InverseSpeedRatio(k, F, annulus.HeavyLoading) : 1 / (1 - k);
         var isFlow = throughDisc / sin > 0 && cos - swirl >= 0 && (inflowAngle > 0 || k > 1);
         // a' = k'/(1 - k') with k' = swirl / cos phi, written so that it stands at cos phi = 0.
-        return new Induction(1 - throughDisc, swirl / (cos - swirl), F, isFlow);
+        return new Induction(1 - throughDisc, swirl / (cos - swirl), F, new Coefficients(cl, cd), sin, cos, isFlow);
     }
 }
 
@@ -55,5 +57,9 @@ internal readonly record struct Probe(double InflowAngle, double Sine, double Co
 /// <param name="Axial">a; refers to the undisturbed wind along the normal of the coned blade.</param>
 /// <param name="Tangential">a'.</param>
 /// <param name="LossFactor">F.</param>
+/// <param name="Coefficients">Of the section at the inflow angle.</param>
+/// <param name="Sine">Of the inflow angle.</param>
+/// <param name="Cosine">Of the inflow angle.</param>
 /// <param name="IsFlow">Whether such a flow can exist.</param>
-internal readonly record struct Induction(double Axial, double Tangential, double LossFactor, bool IsFlow);
+internal readonly record struct Induction(
+    double Axial, double Tangential, double LossFactor, Coefficients Coefficients, double Sine, double Cosine, bool IsFlow);

@@ -34,8 +34,20 @@ internal ref struct SignChanges
     public static SignChanges Between(double from, double to, ref readonly Annulus annulus, Span<Bracket> found)
     {
         var search = new SignChanges(in annulus, from, to, found);
-        search.Visit(0, search.ProbeAt(0), Steps, search.ProbeAt(Steps));
+        var (first, last) = (search.ProbeAt(0), search.ProbeAt(Steps));
+        var start = search.FirstSplit();
+        var middle = search.ProbeAt(start);
+        search.Visit(0, first, start, middle);
+        search.Visit(start, middle, Steps, last);
         return search;
+    }
+
+    // Just beyond the undisturbed inflow angle: from there up a lifting element has no balance, and below there is one, as a rule.
+    private readonly int FirstSplit()
+    {
+        var undisturbed = Math.Atan(_annulus.SpeedRatio);
+        var node = (int)((undisturbed - _from) / (_to - _from) * Steps) + 1;
+        return node is > 1 and < Steps ? node : Steps / 2;
     }
 
     private void Visit(int first, in Probe a, int last, in Probe b)

@@ -88,7 +88,7 @@ public sealed class RotorModel
             HeavyLoading = _model.HeavyLoading,
             DragInBalance = _model.BalanceWith == BalanceWith.LiftAndDrag ? 1 : 0,
         };
-        var balance = tangentialSpeed > 0 ? MomentumBalance.Solve(annulus) : Balance.AtRest;
+        var balance = tangentialSpeed > 0 ? MomentumBalance.Solve(annulus) : Balance.AtRest(annulus);
         return StateOf(e, annulus, balance, normalSpeed, tangentialSpeed, _air.Density * undisturbed / _air.DynamicViscosity);
     }
 
@@ -105,8 +105,7 @@ public sealed class RotorModel
                 marks | ElementMarks.Unbalanced);
 
         var angleOfAttack = annulus.AngleOfAttack(phi);
-        var (cl, cd) = annulus.CoefficientsAt(angleOfAttack);
-        var (sin, cos) = Math.SinCos(phi);
+        var ((cl, cd), sin, cos) = (induction.Coefficients, induction.Sine, induction.Cosine);
         var axialSpeed = normalSpeed * (1 - induction.Axial);
         var rotationalSpeed = tangentialSpeed * (1 + induction.Tangential);
         var pressure = 0.5 * _air.Density * ((axialSpeed * axialSpeed) + (rotationalSpeed * rotationalSpeed)) * e.Geometry.Chord;
