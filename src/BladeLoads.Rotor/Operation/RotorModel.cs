@@ -48,6 +48,9 @@ public sealed class RotorModel
     /// <summary>The elements of the operating point solved last, root to tip; overwritten by the next.</summary>
     public ReadOnlySpan<ElementState> Elements => _states;
 
+    /// <summary>The annuli of the operating point solved last.</summary>
+    internal ReadOnlySpan<Annulus> Annuli => _annuli;
+
     /// <summary>Solves one operating point. At rest there is no induction; the undisturbed wind loads the blades.</summary>
     /// <param name="point">Wind speed above 0, rotor speed 0 or above.</param>
     /// <returns>The loads; null where an element is unbalanced. <see cref="Elements"/> holds the elements.</returns>

@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using System.Runtime.Intrinsics;
 
 namespace BladeLoads.Rotor.Momentum.Lanes;
@@ -27,12 +28,14 @@ internal static class BalanceLanes
 
         // The rest is filled up with copies of the last, so that an annulus meets the same arithmetic wherever it stands.
         var rest = annuli[whole..];
-        var filled = new Annulus[AnnulusLanes.Count];
-        var solved = new Balance[AnnulusLanes.Count];
-        rest.CopyTo(filled);
-        filled.AsSpan(rest.Length).Fill(rest[^1]);
-        SolveEight(filled, solved);
-        solved.AsSpan(0, rest.Length).CopyTo(balances[whole..]);
+        var filled = default(EightAnnuli);
+        var solved = default(EightBalances);
+        Span<Annulus> eight = filled;
+        Span<Balance> eightBalances = solved;
+        rest.CopyTo(eight);
+        eight[rest.Length..].Fill(rest[^1]);
+        SolveEight(eight, eightBalances);
+        eightBalances[..rest.Length].CopyTo(balances[whole..]);
     }
 
     private static void SolveEight(ReadOnlySpan<Annulus> eight, Span<Balance> balances)
@@ -114,5 +117,17 @@ internal static class BalanceLanes
         public int Half => Split / 2;
 
         public int Beyond => Math.Min(Split + (Split / 2) + 1, SignChanges.Steps);
+    }
+
+    [InlineArray(AnnulusLanes.Count)]
+    private struct EightAnnuli
+    {
+        private Annulus _first;
+    }
+
+    [InlineArray(AnnulusLanes.Count)]
+    private struct EightBalances
+    {
+        private Balance _first;
     }
 }
