@@ -36,11 +36,11 @@ Section[] sections =
 
 PolarSet[] sets =
 [
-    new("clean", "smooth blades of the large rotors", sections, [0.5e6, 3e6, 15e6],
+    new("clean", "smooth blades of the large rotors", sections, [0.3e6, 3e6, 15e6],
         LaminarShare: 0.62, SlopeFactor: 1.00, StallLossDeg: 0.0, WidthFactor: 1.0),
-    new("soiled", "the blades of the large rotors after a summer of insects and dust", sections, [0.5e6, 3e6, 15e6],
-        LaminarShare: 1.05, SlopeFactor: 0.96, StallLossDeg: 3.0, WidthFactor: 1.4),
-    new("small", "the blades of the 10 m rotor", [sections[0], sections[2], sections[3], sections[4]], [0.1e6, 0.5e6, 1.5e6],
+    new("soiled", "the blades of the large rotors after a summer of insects and dust", sections, [0.3e6, 3e6, 15e6],
+        LaminarShare: 1.05, SlopeFactor: 0.96, StallLossDeg: 2.0, WidthFactor: 1.2),
+    new("small", "the blades of the 10 m rotor", [sections[0], sections[2], sections[3], sections[4]], [0.075e6, 0.5e6, 1.5e6],
         LaminarShare: 0.75, SlopeFactor: 0.98, StallLossDeg: -3.0, WidthFactor: 2.6),
 ];
 
