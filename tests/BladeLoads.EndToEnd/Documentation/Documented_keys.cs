@@ -29,7 +29,7 @@ public sealed class Documented_keys : IDisposable
         _studies.Write("example/cases/defaults-left-out.toml", CaseText(needed));
         var study = StudyReader.Read(_studies.PathOf("example"));
 
-        Assert.Equal([], study.Errors);
+        Assert.Empty(study.Errors);
         Assert.Equal(Fingerprint(study, "defaults-left-out"), Fingerprint(study, "defaults-stated"));
     }
 
@@ -67,7 +67,7 @@ public sealed class Documented_keys : IDisposable
     {
         "rotor" => ["blade_count = 3"],
         "wind" => ["speeds_m_s = [8.0]"],
-        "control" => ["strategy = \"variable-speed\"", "tip_speed_ratio = 7.0"],
+        "control" => ["strategy = \"variable-speed\"", "tip_speed_ratio = 7.0", "fine_pitch_deg = 0.0", "rated_power_kW = 400.0"],
         _ => [],
     };
 
