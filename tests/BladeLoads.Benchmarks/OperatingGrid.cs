@@ -1,6 +1,5 @@
 using System.Diagnostics;
 using System.Globalization;
-using BladeLoads.Rotor.Momentum;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Studies;
 
