@@ -5,6 +5,7 @@ using BladeLoads.Rotor.Momentum;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Rotor.Sections;
 using CsCheck;
+using static BladeLoads.Rotor.Tests.Properties.PlausibleSections;
 
 namespace BladeLoads.Rotor.Tests.Properties;
 
@@ -50,27 +51,71 @@ internal static class PlausibleRotors
         select new BalanceModel(elements, spacing, tip, hub, heavy, balance);
 
     private static readonly Gen<Planform> _planforms =
-        from logRadius in Gen.Double[0, 2]
-        from hub in Gen.Double[0.02, 0.2]
-        from chord in Gen.Double[0.04, 0.2]
-        from taper in Gen.Double[0.15, 1]
-        from twist in Gen.Double[0, 40]
-        from tipTwist in Gen.Double[-4, 6]
+        from logRadius in Between(0, 2)
+        from hub in Between(0.02, 0.2)
+        from chord in Between(0.04, 0.2)
+        from taper in Between(0.15, 1)
+        from twist in Between(0, 40)
+        from tipTwist in Between(-4, 6)
         from stations in Gen.Int[2, 8]
         select new Planform(Math.Pow(10, logRadius), hub, chord, taper, twist, tipTwist, stations);
 
-    public static Gen<Trial> Trials { get; } =
+    private static readonly Gen<Trial> _ordinary =
         from planform in _planforms
         from blades in Gen.Int[1, 4]
         from shapes in PlausibleSections.Shapes.Array[1, 4]
-        from cone in Gen.OneOf(Gen.Const(0.0), Gen.Double[-6, 10])
-        from pitch in Gen.OneOf(Gen.Double[-10, 30], Gen.Double[-10, 90])
-        from tipSpeedRatio in Gen.OneOf(Gen.Double[0.5, 12], Gen.Double[0.5, 25])
-        from wind in Gen.Double[2, 28]
-        from density in Gen.Double[0.9, 1.35]
+        from cone in Gen.OneOf(Gen.Const(0.0), Between(-6, 10))
+        from pitch in Gen.OneOf(Between(-10, 30), Between(-10, 90))
+        from tipSpeedRatio in Gen.OneOf(Between(0.5, 12), Between(0.5, 25))
+        from wind in Between(2, 28)
+        from density in Between(0.9, 1.35)
         from model in Models
         from pick in Gen.Int[0, 1_000_000]
         select Build(planform, blades, shapes, cone * Degree, pitch * Degree, tipSpeedRatio, wind, density, model, pick);
+
+    // Pitched so that a place along the blade works within some degrees of a stall that drops lift within a degree: several balances.
+    private static readonly Gen<Trial> _nearSharpStall =
+        from trial in _ordinary
+        from drop in Between(0.3, 0.75)
+        from width in Between(0.1, 1)
+        from tipSpeedRatio in Between(1, 7)
+        from place in Between(0.2, 1)
+        from away in Between(-4, 4)
+        from wide in Between(1, 2.5)
+        select NearStall(trial, drop, width, tipSpeedRatio, place, away * Degree, wide);
+
+    // Broad blades turned far towards feather or past it, hardly turning: lift drives the air faster than the blade, beyond a right angle.
+    private static readonly Gen<Trial> _slowAndFeathered =
+        from trial in _ordinary
+        from pitch in Between(50, 130)
+        from tipSpeedRatio in Gen.OneOf(Between(0.02, 0.5), Between(0.5, 2))
+        from wide in Between(1, 4)
+        select Widened(trial, wide).At(new OperatingPoint(
+            trial.Operation.WindSpeed, tipSpeedRatio * trial.Operation.WindSpeed / trial.Rotor.Blade.TipRadius, pitch * Degree), rotor => rotor);
+
+    /// <summary>Most of them ordinary; the others chosen for what is rare and hard.</summary>
+    public static Gen<Trial> Trials { get; } = Gen.Frequency((2, (IGen<Trial>)_ordinary), (1, _nearSharpStall), (1, _slowAndFeathered));
+
+    private static Trial NearStall(
+        Trial trial, double drop, double width, double tipSpeedRatio, double place, double away, double wide)
+    {
+        var shapes = trial.Shapes.Select(shape => shape with { StallDrop = drop, StallWidth = width }).ToArray();
+        var blade = trial.Rotor.Blade;
+        var station = blade.Stations[(int)(place * (blade.Stations.Length - 1))];
+        var inflow = Math.Atan(0.75 * blade.TipRadius / (tipSpeedRatio * station.Radius));
+        var stall = shapes[int.Parse(station.Section.AsSpan(1), CultureInfo.InvariantCulture)].StallAngle * Degree;
+        var point = new OperatingPoint(
+            trial.Operation.WindSpeed, tipSpeedRatio * trial.Operation.WindSpeed / blade.TipRadius, inflow - stall - station.Twist + away);
+        return Widened(trial, wide).At(point, rotor => rotor with
+        {
+            Sections = SectionSet.Of(shapes.Select((shape, i) => PlausibleSections.Build("s" + i, shape))),
+        }) with { Shapes = shapes };
+    }
+
+    private static Trial Widened(Trial trial, double factor) => trial.At(trial.Operation, rotor => rotor with
+    {
+        Blade = Blade.FromStations(rotor.Blade.Stations.Select(s => s with { Chord = factor * s.Chord })),
+    });
 
     private static Trial Build(
         Planform planform, int blades, PlausibleSections.Shape[] shapes, double cone, double pitch, double tipSpeedRatio, double wind,

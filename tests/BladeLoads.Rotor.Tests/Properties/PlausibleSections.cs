@@ -19,29 +19,33 @@ internal static class PlausibleSections
     internal sealed record Range(double From, double To);
 
     private static readonly Gen<Range?> _ranges = Gen.OneOf(
-        Gen.Const((Range?)null), Gen.Select(Gen.Double[-40, -4], Gen.Double[12, 90], (low, high) => (Range?)new Range(low, high)));
+        Gen.Const((Range?)null), Gen.Select(Between(-40, -4), Between(12, 90), (low, high) => (Range?)new Range(low, high)));
 
     private static readonly Gen<double[]> _reynoldsNumbers = Gen.OneOf(
         Gen.Const(new[] { double.NaN }),
-        Gen.Double[5, 7].Select(log => new[] { Math.Pow(10, log) }),
-        Gen.Select(Gen.Double[4.7, 5.8], Gen.Double[5.9, 7.2], (a, b) => new[] { Math.Pow(10, a), Math.Pow(10, b) }),
-        Gen.Select(Gen.Double[4.7, 5.6], Gen.Double[5.7, 6.3], Gen.Double[6.4, 7.2],
+        Between(5, 7).Select(log => new[] { Math.Pow(10, log) }),
+        Gen.Select(Between(4.7, 5.8), Between(5.9, 7.2), (a, b) => new[] { Math.Pow(10, a), Math.Pow(10, b) }),
+        Gen.Select(Between(4.7, 5.6), Between(5.7, 6.3), Between(6.4, 7.2),
             (a, b, c) => new[] { Math.Pow(10, a), Math.Pow(10, b), Math.Pow(10, c) }));
 
     public static Gen<Shape> Shapes { get; } =
-        from slope in Gen.Double[0.85, 1.1]
-        from zeroLift in Gen.Double[-6, 0]
-        from stall in Gen.Double[7, 20]
-        from drop in Gen.Double[0, 0.65]
-        from width in Gen.OneOf(Gen.Double[0.1, 1.0], Gen.Double[1, 10])
-        from drag in Gen.Double[0.005, 0.03]
-        from across in Gen.Double[1.1, 2.1]
-        from noise in Gen.OneOf(Gen.Const(0.0), Gen.Double[0, 0.8])
+        from slope in Between(0.85, 1.1)
+        from zeroLift in Between(-6, 0)
+        from stall in Between(7, 20)
+        from drop in Between(0, 0.65)
+        from width in Gen.OneOf(Between(0.1, 1.0), Between(1, 10))
+        from drag in Between(0.005, 0.03)
+        from across in Between(1.1, 2.1)
+        from noise in Gen.OneOf(Gen.Const(0.0), Between(0, 0.8))
         from seed in Gen.Int[0, 1_000_000]
-        from step in Gen.Double[0.5, 2.5]
+        from step in Between(0.5, 2.5)
         from range in _ranges
         from reynolds in _reynoldsNumbers
         select new Shape(slope, zeroLift, stall, drop, width, drag, across, noise, seed, step, range, reynolds);
+
+    /// <summary>Anywhere between, and as often a number with few digits or an end, which is where faults like to hide.</summary>
+    public static Gen<double> Between(double from, double to)
+        => Gen.OneOf(Gen.Double[from, to], Gen.Double.Unit.Select(unit => from + (to - from) * unit));
 
     public static Section Build(string name, Shape shape)
         => Section.FromPolars(name, shape.Reynolds.Select((reynolds, i) => Table(shape, reynolds, i)));
