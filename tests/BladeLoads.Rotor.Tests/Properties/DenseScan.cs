@@ -26,7 +26,7 @@ internal static class DenseScan
             {
                 var next = from + (to - from) * i / Steps;
                 var nextResidual = annulus.Residual(next);
-                if (residual < 0 != nextResidual < 0 && annulus.IsFlow(Close(annulus, angle, next)))
+                if (residual < 0 != nextResidual < 0 && IsBalance(annulus, Close(annulus, angle, next)))
                     found.Add((angle, next));
                 (angle, residual) = (next, nextResidual);
             }
@@ -35,6 +35,10 @@ internal static class DenseScan
         }
         return [];
     }
+
+    // Where the angle of attack passes a half turn and a table does not go round, the residual jumps; nothing is in balance there.
+    private static bool IsBalance(IndependentAnnulus annulus, double angle)
+        => Math.Abs(annulus.Residual(angle)) < 1e-6 && annulus.IsFlow(angle);
 
     private static double Close(IndependentAnnulus annulus, double low, double high)
     {
