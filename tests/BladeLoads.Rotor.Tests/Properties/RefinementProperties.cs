@@ -17,7 +17,7 @@ namespace BladeLoads.Rotor.Tests.Properties;
 public sealed class RefinementProperties(ITestOutputHelper output)
 {
     private const double Degree = Math.PI / 180;
-    private const int Rotors = 1_000;
+    private const int Rotors = 10_000;
 
     private sealed record Design(
         int Blades, double HubShare, double DesignRatio, double Ratio, double Lift, double LargestChord, double Pitch,
