@@ -71,7 +71,7 @@ public sealed class MomentumTheoryTests(ITestOutputHelper output)
         var (power, induction) = MostPowerOfAnAnnulus(HeavyLoading.Glauert1935);
 
         output.WriteLine($"reached {power:F6}, {100 * (power / Betz - 1):F3} % above Betz, at a = {induction:F4}");
-        // The curve is 4a(1 - a(5 - 3a)/4)(1 - a), whose largest value is 0.5969 at a = 0.371 (by hand, from the printed relation).
+        // By hand from the printed relation: 4a(1 - a(5 - 3a)/4)(1 - a) is largest, 0.5969, at a = 0.3735.
         Assert.Equal(0.7, 100 * (power / Betz - 1), 0.05);
         Assert.Equal(0.37, induction, 0.01);
     }
@@ -92,7 +92,7 @@ public sealed class MomentumTheoryTests(ITestOutputHelper output)
         const double x = 1000;
         for (var loading = 0.1; loading < 2; loading *= 1.005)
         {
-            // Lift without drag at a constant coefficient of 1 would balance twice; a steep line through the design point balances once.
+            // A steep lift line through the design point of simple momentum theory: one balance a loading, near that point.
             var induction = loading / (1 + loading);
             var inflow = (1 - induction) / x;
             var chord = 2 * Math.PI * loading * 4 * inflow * inflow;
