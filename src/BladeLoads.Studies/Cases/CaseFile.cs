@@ -30,7 +30,7 @@ internal sealed record CaseFile(
     public static CaseFile Read(StudyFolder folder, string fullPath, Findings findings)
     {
         var file = folder.RelativePath(fullPath);
-        if (folder.Read(fullPath, findings.Error) is not { } input || TomlText.Parse(input, findings) is not { } top)
+        if (folder.Read(fullPath, StudyFolder.LargestCase, findings.Error) is not { } input || TomlText.Parse(input, findings) is not { } top)
             return Empty(file, isSound: false);
         return new Sorting(file, findings).Sort(top, new InputFile(file, input.Sha256, "case file"));
     }

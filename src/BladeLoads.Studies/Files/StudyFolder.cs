@@ -1,9 +1,17 @@
+using System.Globalization;
+
 namespace BladeLoads.Studies.Files;
 
 /// <summary>The files of one study. Nothing outside the study folder is read, whatever a reference or a link says.</summary>
 internal sealed class StudyFolder
 {
-    private const int LargestFile = 32 * 1024 * 1024;
+    /// <summary>MiB. A table of a million rows is smaller.</summary>
+    public const int LargestTable = 32;
+
+    /// <summary>MiB. A case of ten thousand wind speeds and as many variants is smaller.</summary>
+    public const int LargestCase = 1;
+
+    private const int BytesPerMebibyte = 1024 * 1024;
 
     private readonly IStudyFiles _files;
     private readonly string _realRoot;
@@ -37,7 +45,8 @@ internal sealed class StudyFolder
     }
 
     /// <summary>Reads a text file within the study; what keeps it from being read is reported at the file.</summary>
-    public InputText? Read(string fullPath, Action<InputFinding> report)
+    /// <param name="largest">MiB; of a larger file no more than this is read.</param>
+    public InputText? Read(string fullPath, int largest, Action<InputFinding> report)
     {
         var file = RelativePath(fullPath);
         if (LinkProblem(fullPath) is { } link)
@@ -52,9 +61,9 @@ internal sealed class StudyFolder
             });
         try
         {
-            var bytes = _files.Read(fullPath, LargestFile + 1);
-            return bytes.Length > LargestFile
-                ? Refuse("is larger than 32 MiB; no case or table is, so this is another file")
+            var bytes = _files.Read(fullPath, largest * BytesPerMebibyte + 1);
+            return bytes.Length > largest * BytesPerMebibyte
+                ? Refuse($"is larger than {largest.ToString(CultureInfo.InvariantCulture)} MiB, the most that is read; it seems to be another kind of file")
                 : InputText.FromBytes(file, bytes, report);
         }
         catch (UnauthorizedAccessException)
@@ -142,7 +151,8 @@ internal sealed class StudyFolder
         var folder = Path.GetDirectoryName(missing)!;
         if (!IsWithin(Root, folder) || !_files.Kind(folder).Equals(EntryKind.Folder))
             return $"there is no folder {RelativePath(folder)}/ in the study";
-        var names = Names(folder).Where(name => name[0] != '.' && _files.Kind(Path.Combine(folder, name)) == wanted);
+        var names = Names(folder).Where(name => name[0] != '.' && LinkProblem(Path.Combine(folder, name)) is null
+            && _files.Kind(Path.Combine(folder, name)) == wanted);
         var place = folder == Root ? "the study folder" : RelativePath(folder) + "/";
         return $"{place} holds {VisibleText.Enumerate(names, wanted == EntryKind.Folder ? "no folder" : "no file")}";
     }

@@ -52,7 +52,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
     {
         if (known.TryGetValue(fullPath, out var table))
             return table;
-        table = folder.Read(fullPath, findings.Error) is { } input ? parse(input) : null;
+        table = folder.Read(fullPath, StudyFolder.LargestTable, findings.Error) is { } input ? parse(input) : null;
         known.Add(fullPath, table);
         return table;
     }
