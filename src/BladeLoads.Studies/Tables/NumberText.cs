@@ -15,9 +15,11 @@ internal static partial class NumberText
     public static bool TryParse(ReadOnlySpan<byte> text, out double value)
     {
         value = double.NaN;
-        // The framework also takes NaN, Infinity and NULs at the end: neither has one of these characters only.
-        return text.IndexOfAnyExcept(PartsOfNumbers) < 0
+        // The framework also takes NaN, Infinity and NULs at the end: none is made of these characters only.
+        var isNumber = text.IndexOfAnyExcept(PartsOfNumbers) < 0
             && double.TryParse(text, Plain, CultureInfo.InvariantCulture, out value) && double.IsFinite(value);
+        value += 0.0; // -0 is 0: one fingerprint, one result
+        return isNumber;
     }
 
     /// <summary>What is wrong with a text that <see cref="TryParse"/> refused, and what would do.</summary>

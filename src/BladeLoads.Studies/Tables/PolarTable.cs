@@ -46,12 +46,9 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         }
         var block = blocks[^1];
 
-        var angle = rows.Number("alpha_deg");
-        if (Math.Abs(angle) > 180 + AngleSlack)
-            rows.Error("alpha_deg", $"alpha_deg is {CanonicalText.Of(angle)}; give an angle from -180 to 180");
-        angle = Math.Clamp(angle, -180, 180);
-        // Asked in radians too: two angles that differ in their last digit may be one there.
-        if (block.Rows > 0 && double.DegreesToRadians(angle) <= double.DegreesToRadians(block.Angles[^1]))
+        var angle = AngleOf(rows);
+        // Asked in radians: two angles that differ in their last digit may be one there.
+        if (block.Angles.Count > 0 && double.DegreesToRadians(angle) <= double.DegreesToRadians(block.Angles[^1]))
             rows.Error("alpha_deg", Falls("alpha_deg", block.Angles[^1], angle, block.LastLine, rows.Line, "angles must rise within one Reynolds number"));
         var lift = rows.Number("cl");
         var drag = rows.Number("cd");
@@ -65,6 +62,16 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         block.Add(angle, lift, drag, rows.Line);
         if (angle is -180 or 180)
             block.LiftAtEnd.Add((lift, rows.Cell("cl")));
+    }
+
+    // NaN where it is wrong.
+    private static double AngleOf(CsvRows rows)
+    {
+        var angle = rows.Number("alpha_deg");
+        if (!(Math.Abs(angle) > 180 + AngleSlack))
+            return Math.Clamp(angle, -180, 180);
+        rows.Error("alpha_deg", $"alpha_deg is {CanonicalText.Of(angle)}; give an angle from -180 to 180");
+        return double.NaN;
     }
 
     private static void CheckReynolds(CsvRows rows, List<Block> blocks, double reynolds)

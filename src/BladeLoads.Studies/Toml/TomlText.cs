@@ -16,51 +16,50 @@ internal static class TomlText
     public static TomlValue.Table? Parse(InputText input, Findings findings)
     {
         var text = input.Text;
-        if (!HasSoundSyntax(input.File, text, findings))
-            return null;
-        var document = SyntaxParser.Parse(text, input.File, false);
-        var reading = new Reading(input.File, findings);
-        reading.Read(document);
-        if (reading.Failed)
-            return null;
+        try
+        {
+            var document = SyntaxParser.Parse(text, input.File, validate: true);
+            var isSound = !document.HasErrors;
+            if (!isSound && HasSyntaxErrors(input.File, text, findings))
+                return null;
+            var reading = new Reading(input.File, findings);
+            reading.Read(document);
+            if (reading.Failed)
+                return null;
 
-        // What the tree above does not refuse and TOML does: rare, and told in the parser's own words.
-        var validated = SyntaxParser.Parse(text, input.File, true).Diagnostics.Where(d => d.Kind == DiagnosticMessageKind.Error).ToList();
-        foreach (var diagnostic in validated)
-            findings.Error(PlaceOf(input.File, diagnostic.Span), SyntaxSentence.Of(diagnostic.Message, ""));
-        return validated.Count == 0 ? reading.Top : null;
+            // What the tree does not refuse and TOML does: rare, and told in the parser's own words.
+            foreach (var diagnostic in document.Diagnostics.Where(d => d.Kind == DiagnosticMessageKind.Error))
+                findings.Error(PlaceOf(input.File, diagnostic.Span), SyntaxSentence.Of(diagnostic.Message, ""));
+            return isSound ? reading.Top : null;
+        }
+        catch (TomlException e)
+        {
+            findings.Error(new Place(input.File, 0, 0), $"cannot be read as TOML: {e.Message}");
+            return null;
+        }
     }
 
     // A line whose mistake we can name is taken out and reading goes on, so that one mistake never shows as five, nor five as one.
-    private static bool HasSoundSyntax(string file, string text, Findings findings)
+    private static bool HasSyntaxErrors(string file, string text, Findings findings)
     {
         var lines = text.Split('\n');
         for (var errors = 0; errors < MostSyntaxErrors; errors++)
         {
-            DiagnosticMessage? first;
-            try
-            {
-                first = SyntaxParser.Parse(string.Join('\n', lines), file, false).Diagnostics
-                    .Where(d => d.Kind == DiagnosticMessageKind.Error)
-                    .OrderBy(d => d.Span.Start.Line).ThenBy(d => d.Span.Start.Column).FirstOrDefault();
-            }
-            catch (TomlException e)
-            {
-                findings.Error(new Place(file, 0, 0), $"cannot be read as TOML: {e.Message}");
-                return false;
-            }
+            var first = SyntaxParser.Parse(string.Join('\n', lines), file, validate: false).Diagnostics
+                .Where(d => d.Kind == DiagnosticMessageKind.Error)
+                .OrderBy(d => d.Span.Start.Line).ThenBy(d => d.Span.Start.Column).FirstOrDefault();
             if (first is null)
-                return errors == 0;
+                return errors > 0;
             var line = Math.Clamp(first.Span.Start.Line, 0, lines.Length - 1);
             if (SyntaxSentence.ForLine(lines[line]) is not { } known)
             {
                 findings.Error(PlaceOf(file, first.Span), SyntaxSentence.Of(first.Message, lines[line]));
-                return false;
+                return true;
             }
             findings.Error(new Place(file, line + 1, known.Column), known.Sentence);
             lines[line] = "";
         }
-        return false;
+        return true;
     }
 
     private static Place PlaceOf(string file, SourceSpan span) => new(file, span.Start.Line + 1, span.Start.Column + 1);
@@ -137,7 +136,7 @@ internal static class TomlText
                 case IntegerValueSyntax whole:
                     return new TomlValue.Number(at, whole.Value, true);
                 case FloatValueSyntax number:
-                    return new TomlValue.Number(at, number.Value, false);
+                    return new TomlValue.Number(at, number.Value + 0.0, false);
                 case StringValueSyntax text:
                     return new TomlValue.Text(at, text.Value ?? "");
                 case BooleanValueSyntax truth:
