@@ -16,7 +16,7 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
         if (string.IsNullOrWhiteSpace(path) || path.Contains('\0'))
             throw new StudyNotFoundException("no study named; name a study folder or a case file");
         var fullPath = Path.TrimEndingDirectorySeparator(Path.GetFullPath(path));
-        var shown = VisibleText.Escape($"'{path}'");
+        var shown = VisibleText.Escape(VisibleText.Quote(path));
         return files.Kind(fullPath) switch
         {
             EntryKind.Folder => WholeStudy(fullPath, shown, files),

@@ -35,11 +35,14 @@ internal sealed record CaseFile(
         return new Sorting(file, findings).Sort(top, new InputFile(file, input.Sha256, "case file"));
     }
 
-    /// <summary>The case with what it leaves out taken from the study's starting values, key by key.</summary>
+    /// <summary>
+    /// The case with what it leaves out taken from the study's starting values, key by key. One value in the case takes the place of a
+    /// sweep over the same key there.
+    /// </summary>
     public CaseFile StartingFrom(CaseFile start) => this with
     {
         Entries = start.Entries.SetItems(Entries),
-        Sweep = [.. start.Sweep.Where(s => Sweep.All(own => own.Known != s.Known)), .. Sweep],
+        Sweep = [.. start.Sweep.Where(s => !Entries.ContainsKey(s.Known.Path) && Sweep.All(own => own.Known != s.Known)), .. Sweep],
         DoubtfulTables = DoubtfulTables.Union(start.DoubtfulTables),
     };
 

@@ -25,6 +25,9 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
 
     public bool Has(string path) => entries.ContainsKey(path);
 
+    /// <summary>The value is not the case's own but one that every case starts from.</summary>
+    public bool IsStartingValue(CaseEntry entry) => entry.Key.File != file.File;
+
     /// <summary>Every value noted so far.</summary>
     public ImmutableSortedDictionary<string, string> Determining => _determining.ToImmutable();
 

@@ -104,7 +104,8 @@ internal static class ControlReader
             foreach (var key in keys.Where(_ => other != strategy))
                 if (values.Find($"control.{key}") is { } entry && !ChangesNothing(entry.Value))
                     values.RefuseKey($"control.{key}",
-                        $"'{key}' does not go with strategy '{strategy}', which takes {string.Join(", ", KeysOf[strategy])}; leave it out");
+                        $"'{key}' does not go with strategy '{strategy}', which takes {string.Join(", ", KeysOf[strategy])}; "
+                        + (values.IsStartingValue(entry) ? "write it in the cases that it goes with" : "leave it out"));
     }
 
     private static bool ChangesNothing(TomlValue value) => value is TomlValue.Text { Value: "hold" or "none" };

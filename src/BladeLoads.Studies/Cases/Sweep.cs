@@ -44,8 +44,7 @@ internal static class Sweep
         return null;
     }
 
-    // Names of variants coincide exactly where those of two values of one key do: keys and '~' keep the parts apart. Two keys with one
-    // last part ("control.pitch_deg" has no namesake today) would still differ in their order.
+    // Names of two variants coincide only where those of two values of one key do: '~', which no value holds, keeps the parts apart.
     private static bool HaveDistinctNames(CaseFile file, Findings findings)
     {
         var distinct = true;

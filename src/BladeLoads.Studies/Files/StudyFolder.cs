@@ -70,6 +70,10 @@ internal sealed class StudyFolder
         {
             return Refuse("cannot be read: no permission");
         }
+        catch (Exception e) when (e is FileNotFoundException or DirectoryNotFoundException)
+        {
+            return Refuse("was there and is gone; read the study again");
+        }
         catch (IOException e)
         {
             return Refuse($"cannot be read: {e.Message}");
@@ -144,13 +148,17 @@ internal sealed class StudyFolder
         {
             return "is a link that leads round in a circle";
         }
+        catch (UnauthorizedAccessException)
+        {
+            return "cannot be reached: no permission";
+        }
     }
 
     private string WhatIsBeside(string missing, EntryKind wanted)
     {
         var folder = Path.GetDirectoryName(missing)!;
         if (!IsWithin(Root, folder) || !_files.Kind(folder).Equals(EntryKind.Folder))
-            return $"there is no folder {RelativePath(folder)}/ in the study";
+            return $"there is no folder {VisibleText.Quote(RelativePath(folder))} in the study";
         var names = Names(folder).Where(name => name[0] != '.' && LinkProblem(Path.Combine(folder, name)) is null
             && _files.Kind(Path.Combine(folder, name)) == wanted);
         var place = folder == Root ? "the study folder" : RelativePath(folder) + "/";

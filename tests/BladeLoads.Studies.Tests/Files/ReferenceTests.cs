@@ -5,7 +5,7 @@ public class ReferenceTests
 {
     [Theory]
     [InlineData("../blades/fel.csv", "no file '../blades/fel.csv'; blades/ holds fell.csv")]
-    [InlineData("../wings/fell.csv", "no file '../wings/fell.csv'; there is no folder wings/ in the study")]
+    [InlineData("../wings/fell.csv", "no file '../wings/fell.csv'; there is no folder 'wings' in the study")]
     [InlineData("../fell.csv", "no file '../fell.csv'; the study folder holds no file")]
     [InlineData("../blades", "'../blades' is a folder; name a file")]
     [InlineData("", "the name is empty; name a file")]

@@ -56,6 +56,21 @@ public class StartingValuesTests
             new FellStudy().With("study.toml", "polars = \"polars/soild\"\n").Change("cases/clean.toml", "polars = \"../polars/clean\"", "").Read().Errors);
 
     [Fact]
+    public void A_value_of_a_case_takes_the_place_of_a_sweep_in_the_starting_values()
+    {
+        var study = new FellStudy().With("study.toml", "[sweep]\n\"control.pitch_deg\" = [1, 2]\n\"air.density_kg_m3\" = [1.1]\n");
+
+        Assert.Equal(["clean~density_kg_m3-1.1"], study.SoundCases().Select(c => c.Name));
+    }
+
+    [Fact]
+    public void A_starting_value_of_another_strategy_is_told_where_it_belongs()
+        => Told.Exactly(
+            ["study.toml:2:1: 'tip_speed_ratio' does not go with strategy 'fixed-speed', which takes rotor_speed_rpm, pitch_deg; "
+                + "write it in the cases that it goes with"],
+            new FellStudy().With("study.toml", "[control]\ntip_speed_ratio = 7\n").Read().Errors);
+
+    [Fact]
     public void The_baseline_is_a_case_by_name()
         => Assert.Equal("clean", new FellStudy().With("study.toml", "baseline = \"clean\"\n").Read().Baseline);
 
