@@ -64,9 +64,12 @@ internal sealed class StudyReading
         _variantNames.Add(name, [.. variants.Select(variant => variant.Name)]);
         var ownInput = complete.Sweep.IsEmpty ? own.Input
             : own.Input with { Contents = string.Create(CultureInfo.InvariantCulture, $"case file, {variants.Length} variants") };
-        ImmutableArray<InputFile> inputs = start.Input is null ? [ownInput] : [ownInput, start.Input with { Contents = "starting values" }];
+        ImmutableArray<InputFile> inputs = [ownInput];
+        if (start.Input is not null)
+            inputs = inputs.Add(start.Input with { Contents = "starting values" });
         foreach (var variant in variants)
-            if (_builder.Build(variant.Name, variant.Title, complete, variant.Entries, inputs) is { } studyCase && own.IsSound && start.IsSound)
+            if (_builder.Build(variant.Name, variant.Title, complete, variant.Entries, inputs) is { } studyCase
+                && own.IsSound && start.IsSound)
                 _cases.Add(studyCase);
             else
                 _rejected.Add(variant.Name);

@@ -15,7 +15,8 @@ internal sealed class StudyFolder
 
     private readonly IStudyFiles _files;
     private readonly string _realRoot;
-    private readonly Dictionary<(string Folder, string Reference, EntryKind Wanted), (string? FullPath, string Problem)> _located = [];
+    private readonly Dictionary<(string Folder, string Reference, EntryKind Wanted), (string? Path, string Problem)> _located
+        = [];
 
     /// <param name="root">Absolute path of the study folder, which exists.</param>
     public StudyFolder(IStudyFiles files, string root)
@@ -41,7 +42,7 @@ internal sealed class StudyFolder
             _located.Add((fromFolder, reference, wanted), located);
         }
         problem = located.Problem;
-        return located.FullPath;
+        return located.Path;
     }
 
     /// <summary>Reads a text file within the study; what keeps it from being read is reported at the file.</summary>
@@ -63,7 +64,8 @@ internal sealed class StudyFolder
         {
             var bytes = _files.Read(fullPath, largest * BytesPerMebibyte + 1);
             return bytes.Length > largest * BytesPerMebibyte
-                ? Refuse($"is larger than {largest.ToString(CultureInfo.InvariantCulture)} MiB, the most that is read; it seems to be another kind of file")
+                ? Refuse($"is larger than {largest.ToString(CultureInfo.InvariantCulture)} MiB, the most that is read; "
+                    + "it seems to be another kind of file")
                 : InputText.FromBytes(file, bytes, report);
         }
         catch (UnauthorizedAccessException)
@@ -167,5 +169,6 @@ internal sealed class StudyFolder
 
     // With the separator: "/data/inputs-evil" begins with "/data/inputs" too.
     private static bool IsWithin(string root, string path)
-        => path == root || path.StartsWith(Path.EndsInDirectorySeparator(root) ? root : root + Path.DirectorySeparatorChar, StringComparison.Ordinal);
+        => path == root || path.StartsWith(
+            Path.EndsInDirectorySeparator(root) ? root : root + Path.DirectorySeparatorChar, StringComparison.Ordinal);
 }

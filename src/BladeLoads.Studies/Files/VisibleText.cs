@@ -3,7 +3,7 @@ using System.Text;
 
 namespace BladeLoads.Studies.Files;
 
-/// <summary>Text of a user's file, made fit to be shown: nothing in it can move a cursor, turn the direction of writing or run on.</summary>
+/// <summary>Text of a user's file, made fit to be shown: it moves no cursor, turns no direction of writing, does not run on.</summary>
 internal static class VisibleText
 {
     private const int LongestQuote = 80;

@@ -35,7 +35,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
             if (!names.Contains(name + ".csv"))
                 findings.Error(at, $"no table for section {VisibleText.Quote(name)} in {folder.RelativePath(setFolder)}/; "
                     + $"it holds {VisibleText.Enumerate(names.Where(IsTable).Select(n => n[..^4]), "no table")}");
-            else if (Once(_polars, Path.Combine(setFolder, name + ".csv"), input => PolarTable.Parse(name, input, findings)) is { } table)
+            else if (Polar(name, Path.Combine(setFolder, name + ".csv")) is { } table)
                 tables.Add(table);
         }
         var complete = tables.Count == blade.Sections.Length && tables.All(table => table.Section is not null);
@@ -44,6 +44,9 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
         _sections.Add((blade.Input.File, setFolder), sections);
         return sections;
     }
+
+    private PolarTable? Polar(string section, string fullPath)
+        => Once(_polars, fullPath, input => PolarTable.Parse(section, input, findings));
 
     private static bool IsTable(string name) => name.EndsWith(".csv", StringComparison.Ordinal) && name[0] != '.';
 

@@ -39,7 +39,7 @@ internal static class TomlText
         }
     }
 
-    // A line whose mistake we can name is taken out and reading goes on, so that one mistake never shows as five, nor five as one.
+    // A line whose mistake can be named is taken out and reading goes on: one mistake never shows as five, nor five as one.
     private static bool HasSyntaxErrors(string file, string text, Findings findings)
     {
         var lines = text.Split('\n');
@@ -83,15 +83,14 @@ internal static class TomlText
                 var at = At(tableSyntax.Name!);
                 if (tableSyntax.Kind == SyntaxKind.TableArray)
                 {
-                    var plain = string.Join('.', names.Select(n => n.Name));
-                    Refuse(at, $"[[{plain}]] is a list of tables; write [{plain}], once");
+                    Refuse(at, $"[[{Dotted(names)}]] is a list of tables; write [{Dotted(names)}], once");
                     continue;
                 }
                 if (Descend(Top, names) is not { } table)
                     continue;
                 if (_headers.TryGetValue(table, out var first))
-                    Refuse(at, $"table [{string.Join('.', names.Select(n => n.Name))}] is there twice, first in line {Number(first.Line)}; "
-                        + "put its keys together");
+                    Refuse(at,
+                        $"table [{Dotted(names)}] is there twice, first in line {Number(first.Line)}; put its keys together");
                 _headers.TryAdd(table, at);
                 foreach (var keyValue in tableSyntax.Items)
                     Add(table, keyValue);
@@ -156,6 +155,9 @@ internal static class TomlText
 
         private ImmutableArray<(string Name, Place At)> NamesOf(KeySyntax key)
             => [(NameOf(key.Key!), At(key.Key!)), .. key.DotKeys.Select(dot => (NameOf(dot.Key!), At(dot.Key!)))];
+
+        private static string Dotted(ImmutableArray<(string Name, Place At)> names)
+            => string.Join('.', names.Select(n => n.Name));
 
         private static string NameOf(BareKeyOrStringValueSyntax key)
             => key is StringValueSyntax quoted ? quoted.Value ?? "" : ((BareKeySyntax)key).Key!.Text ?? "";

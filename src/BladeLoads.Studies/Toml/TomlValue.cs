@@ -21,7 +21,8 @@ internal abstract class TomlValue
 
         public bool IsWhole { get; } = isWhole;
 
-        public override string Found => double.IsNaN(Value) ? "nan" : double.IsInfinity(Value) ? "infinite" : CanonicalText.Of(Value);
+        public override string Found
+            => double.IsNaN(Value) ? "nan" : double.IsInfinity(Value) ? "infinite" : CanonicalText.Of(Value);
     }
 
     public sealed class Text(Place at, string value) : TomlValue(at)

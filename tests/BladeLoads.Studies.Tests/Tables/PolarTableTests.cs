@@ -63,7 +63,7 @@ public class PolarTableTests
     [InlineData(Tip, "cm", "ct", "1:17: unknown column 'ct'; did you mean 'cl'?")]
     [InlineData(Root, "3e6,180,0.0,0.02\n", "", "5:1: Reynolds number 3e6 has two rows; a polar needs three or more")]
     [InlineData(Root, "3e6,-180,0.0,0.02\n3e6,0,0.4,0.009\n3e6,180,0.0,0.02", "1e5,-180,0,0\n1e5,0,0,0\n1e5,180,0,0",
-        "5:1: reynolds falls from 1e6 to 1e5 (row 4 to 5); Reynolds numbers must rise")]
+        "5:1: reynolds falls from 1000000 to 100000 (row 4 to 5); Reynolds numbers must rise")]
     [InlineData(Root, "3e6,180,0.0,0.02\n", "3e6,180,0.0,0.02\n1e6,-20,0,0\n1e6,0,0,0\n1e6,20,0,0\n",
         "8:1: reynolds returns to 1e6; keep the rows of one Reynolds number together")]
     [InlineData(Root, "1e6,-180,0.0,0.02\n1e6,0,0.3,0.01\n1e6,180,0.0,0.02", "1,-180,0,0\n1,0,0,0\n1,180,0,0",

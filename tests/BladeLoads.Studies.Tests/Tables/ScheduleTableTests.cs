@@ -5,8 +5,8 @@ public class ScheduleTableTests
     private const string File = "schedules/gentle.csv";
 
     [Theory]
-    [InlineData("8,70,3", "3,70,3", "3:1: wind_speed_m_s goes from 4 to 3 (row 2 to 3); wind speeds must rise")]
-    [InlineData("8,70,3", "4,70,3", "3:1: wind_speed_m_s goes from 4 to 4 (row 2 to 3); wind speeds must rise")]
+    [InlineData("8,70,3", "3,70,3", "3:1: wind_speed_m_s falls from 4 to 3 (row 2 to 3); wind speeds must rise")]
+    [InlineData("8,70,3", "4,70,3", "3:1: wind_speed_m_s is 4 again (row 2 to 3); wind speeds must rise")]
     [InlineData("8,70,3", "8,-70,3", "3:3: rotor_speed_rpm is -70; it must be 0 or more")]
     [InlineData("8,70,3", "8,70,181", "3:6: pitch_deg is 181; give an angle from -180 to 180")]
     [InlineData("8,70,3", "8,70,", "3:6: pitch_deg is empty; give a number")]
