@@ -16,27 +16,54 @@ internal static class TomlText
     public static TomlValue.Table? Parse(InputText input, Findings findings)
     {
         var text = input.Text;
-        try
+        if (Document(input.File, text, validate: true) is not { } document)
         {
-            var document = SyntaxParser.Parse(text, input.File, validate: true);
-            var isSound = !document.HasErrors;
-            if (!isSound && HasSyntaxErrors(input.File, text, findings))
-                return null;
-            var reading = new Reading(input.File, findings);
-            reading.Read(document);
-            if (reading.Failed)
-                return null;
-
-            // What the tree does not refuse and TOML does: rare, and told in the parser's own words.
-            foreach (var diagnostic in document.Diagnostics.Where(d => d.Kind == DiagnosticMessageKind.Error))
-                findings.Error(PlaceOf(input.File, diagnostic.Span), SyntaxSentence.Of(diagnostic.Message, ""));
-            return isSound ? reading.Top : null;
-        }
-        catch (TomlException e)
-        {
-            findings.Error(new Place(input.File, 0, 0), $"cannot be read as TOML: {e.Message}");
+            findings.Error(new Place(input.File, LineThatBreaksTheParser(input.File, text), 0),
+                "cannot be read as TOML; look at the quotes, backslashes and brackets here");
             return null;
         }
+        var isSound = !document.HasErrors;
+        if (!isSound && HasSyntaxErrors(input.File, text, findings))
+            return null;
+        var reading = new Reading(input.File, findings);
+        reading.Read(document);
+        if (reading.Failed)
+            return null;
+
+        // What the tree does not refuse and TOML does: rare, and told in the parser's own words.
+        foreach (var diagnostic in document.Diagnostics.Where(d => d.Kind == DiagnosticMessageKind.Error))
+            findings.Error(PlaceOf(input.File, diagnostic.Span), SyntaxSentence.Of(diagnostic.Message, ""));
+        return isSound ? reading.Top : null;
+    }
+
+    // Null where the parser throws, which Tomlyn 2.10.2 does at nesting beyond its limit and at some unfinished escapes.
+    private static DocumentSyntax? Document(string file, string text, bool validate)
+    {
+        try
+        {
+            return SyntaxParser.Parse(text, file, validate);
+        }
+        catch (Exception e) when (e is TomlException or ArgumentException or InvalidOperationException or NullReferenceException
+            or IndexOutOfRangeException or FormatException or OverflowException)
+        {
+            return null;
+        }
+    }
+
+    // The parser reads forward, so the text up to a line breaks it if and only if that line or one before it does.
+    private static int LineThatBreaksTheParser(string file, string text)
+    {
+        var lines = text.Split('\n');
+        var (sound, broken) = (0, lines.Length);
+        while (broken - sound > 1)
+        {
+            var middle = (sound + broken) / 2;
+            if (Document(file, string.Join('\n', lines[..middle]), validate: false) is null)
+                broken = middle;
+            else
+                sound = middle;
+        }
+        return broken;
     }
 
     // A line whose mistake can be named is taken out and reading goes on: one mistake never shows as five, nor five as one.
@@ -45,7 +72,8 @@ internal static class TomlText
         var lines = text.Split('\n');
         for (var errors = 0; errors < MostSyntaxErrors; errors++)
         {
-            var first = SyntaxParser.Parse(string.Join('\n', lines), file, validate: false).Diagnostics
+            // Null: taking out a line has made what follows unreadable; what was found before stands.
+            var first = Document(file, string.Join('\n', lines), validate: false)?.Diagnostics
                 .Where(d => d.Kind == DiagnosticMessageKind.Error)
                 .OrderBy(d => d.Span.Start.Line).ThenBy(d => d.Span.Start.Column).FirstOrDefault();
             if (first is null)
