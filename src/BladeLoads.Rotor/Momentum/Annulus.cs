@@ -1,0 +1,85 @@
+using BladeLoads.Rotor.Sections;
+
+namespace BladeLoads.Rotor.Momentum;
+
+/// <summary>
+/// The annulus of one blade element at one operating point: all that its momentum balance depends on but the inflow angle.
+/// </summary>
+internal readonly struct Annulus
+{
+    /// <summary>Blade chords over the circumference: <c>B c / (2 pi r cos cone)</c>.</summary>
+    public double Solidity { get; init; }
+
+    /// <summary>Undisturbed wind across the element over its speed of rotation: Vn / Vt, above 0.</summary>
+    public double SpeedRatio { get; init; }
+
+    /// <summary>Twist and pitch, rad: angle of attack = inflow angle - this.</summary>
+    public double SectionAngle { get; init; }
+
+    /// <summary>See <see cref="LossFactor.TipExponent"/>; minus infinity where the loss is left out.</summary>
+    public double TipExponent { get; init; }
+
+    /// <summary>See <see cref="LossFactor.HubExponent"/>; minus infinity where the loss is left out.</summary>
+    public double HubExponent { get; init; }
+
+    public SectionTable Inner { get; init; }
+
+    public SectionTable Outer { get; init; }
+
+    /// <summary>Weight of <see cref="Outer"/>, 0 to 1; 0 where one section serves alone.</summary>
+    public double OuterWeight { get; init; }
+
+    public ReynoldsPlace InnerPlace { get; init; }
+
+    public ReynoldsPlace OuterPlace { get; init; }
+
+    public HeavyLoading HeavyLoading { get; init; }
+
+    /// <summary>1 where drag counts in the axial balance, 0 where lift alone does.</summary>
+    public double DragInBalance { get; init; }
+
+    /// <summary>Angle of attack, rad, wrapped into +-pi.</summary>
+    public double AngleOfAttack(double inflowAngle)
+    {
+        var angle = inflowAngle - SectionAngle;
+        if (Math.Abs(angle) <= Math.PI)
+            return angle;
+        return Math.Clamp(Math.IEEERemainder(angle, 2 * Math.PI), -Math.PI, Math.PI);
+    }
+
+    public Coefficients CoefficientsAt(double angleOfAttack)
+    {
+        var inner = Inner.At(angleOfAttack, InnerPlace);
+        if (OuterWeight == 0)
+            return inner;
+        var outer = Outer.At(angleOfAttack, OuterPlace);
+        return new Coefficients(
+            inner.Lift + (OuterWeight * (outer.Lift - inner.Lift)), inner.Drag + (OuterWeight * (outer.Drag - inner.Drag)));
+    }
+
+    /// <summary>Bounds of the coefficients over inflow angles from one to another, rad, not falling.</summary>
+    public CoefficientRange CoefficientRange(double fromInflowAngle, double toInflowAngle)
+    {
+        var (from, to) = (AngleOfAttack(fromInflowAngle), AngleOfAttack(toInflowAngle));
+        // The range passes from pi to -pi: two ranges, that meet there.
+        return from <= to
+            ? BlendedRange(from, to)
+            : Sections.CoefficientRange.Hull(BlendedRange(from, Math.PI), BlendedRange(-Math.PI, to));
+    }
+
+    public double LossAt(double absoluteSine) => LossFactor.Of(TipExponent, absoluteSine) * LossFactor.Of(HubExponent, absoluteSine);
+
+    public bool IsOutsideAngles(double angleOfAttack)
+        => Inner.IsOutsideAngles(angleOfAttack, InnerPlace)
+            || (OuterWeight > 0 && Outer.IsOutsideAngles(angleOfAttack, OuterPlace));
+
+    public bool IsOutsideReynolds => InnerPlace.Outside || (OuterWeight > 0 && OuterPlace.Outside);
+
+    private CoefficientRange BlendedRange(double from, double to)
+    {
+        var inner = Inner.Range(from, to, InnerPlace);
+        return OuterWeight == 0
+            ? inner
+            : Sections.CoefficientRange.Blend(inner, Outer.Range(from, to, OuterPlace), OuterWeight);
+    }
+}

@@ -1,0 +1,97 @@
+namespace BladeLoads.Rotor.Momentum;
+
+/// <summary>
+/// Finds the sign changes of the residual that a scan of <see cref="Steps"/> equal steps over an interval would show, in rising order,
+/// without making most of the scan: a stretch of it is left out only where the residual is proved to keep its sign there, or to rise.
+/// </summary>
+internal ref struct SignChanges
+{
+    /// <summary>Steps of the scan that defines the answer.</summary>
+    public const int Steps = 2000;
+
+    /// <summary>The most sign changes that are kept; what lies beyond is counted as seen.</summary>
+    public const int Kept = 8;
+
+    private readonly ref readonly Annulus _annulus;
+    private readonly double _from;
+    private readonly double _to;
+    private readonly Span<Bracket> _found;
+
+    private SignChanges(ref readonly Annulus annulus, double from, double to, Span<Bracket> found)
+    {
+        _annulus = ref annulus;
+        (_from, _to) = (from, to);
+        _found = found;
+    }
+
+    public int Count { get; private set; }
+
+    public int Evaluations { get; private set; }
+
+    /// <param name="from">rad; the interval lies on one side of 0 and of pi/2.</param>
+    /// <param name="to">rad, above <paramref name="from"/>.</param>
+    /// <param name="found">Receives the brackets; <see cref="Kept"/> long.</param>
+    public static SignChanges Between(double from, double to, ref readonly Annulus annulus, Span<Bracket> found)
+    {
+        var search = new SignChanges(in annulus, from, to, found);
+        var (first, last) = (search.ProbeAt(0), search.ProbeAt(Steps));
+        var start = search.FirstSplit();
+        var middle = search.ProbeAt(start);
+        search.Visit(0, first, start, middle);
+        search.Visit(start, middle, Steps, last);
+        return search;
+    }
+
+    // Just beyond the undisturbed inflow angle: from there up a lifting element has no balance, and below there is one, as a rule.
+    private readonly int FirstSplit()
+    {
+        var undisturbed = Math.Atan(_annulus.SpeedRatio);
+        var node = (int)((undisturbed - _from) / (_to - _from) * Steps) + 1;
+        return node is > 1 and < Steps ? node : Steps / 2;
+    }
+
+    private void Visit(int first, in Probe a, int last, in Probe b)
+    {
+        var changes = a.Residual > 0 != b.Residual > 0;
+        if (last - first == 1)
+        {
+            if (changes)
+                Keep(new Bracket(a, b));
+            return;
+        }
+        var range = _annulus.CoefficientRange(a.InflowAngle, b.InflowAngle);
+        if (changes)
+        {
+            if (ResidualBounds.Rises(a, b, _annulus, range))
+            {
+                Keep(new Bracket(a, b));
+                return;
+            }
+        }
+        else if (ResidualBounds.KeepOneSign(a, b, _annulus, range) || ResidualBounds.Rises(a, b, _annulus, range))
+            return;
+
+        var middle = (first + last) / 2;
+        var m = ProbeAt(middle);
+        Visit(first, a, middle, m);
+        Visit(middle, m, last, b);
+    }
+
+    private void Keep(in Bracket bracket)
+    {
+        if (Count < Kept)
+            _found[Count] = bracket;
+        Count++;
+    }
+
+    private Probe ProbeAt(int node)
+    {
+        Evaluations++;
+        // The last node is the end itself, so that no rounding carries it past pi/2.
+        var angle = node == Steps ? _to : _from + (node * ((_to - _from) / Steps));
+        return Residual.At(angle, _annulus);
+    }
+}
+
+/// <summary>Two inflow angles between which the residual changes sign.</summary>
+internal readonly record struct Bracket(Probe Lower, Probe Upper);

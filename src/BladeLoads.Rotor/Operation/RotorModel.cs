@@ -1,0 +1,149 @@
+using BladeLoads.Rotor.Air;
+using BladeLoads.Rotor.Blades;
+using BladeLoads.Rotor.Loads;
+using BladeLoads.Rotor.Momentum;
+using BladeLoads.Rotor.Sections;
+
+namespace BladeLoads.Rotor.Operation;
+
+/// <summary>
+/// A rotor divided into elements, its section tables at hand: made once a case, solved at many operating points. Not to be shared
+/// between threads.
+/// </summary>
+public sealed class RotorModel
+{
+    private readonly Element[] _elements;
+    private readonly ElementState[] _states;
+    private readonly AirProperties _air;
+    private readonly int _bladeCount;
+    private readonly double _cosCone;
+    private readonly double _tipRadius;
+    private readonly double _hubRadius;
+    private readonly double _logReynoldsFactor;
+    private readonly BalanceModel _model;
+
+    public RotorModel(RotorCase rotorCase)
+    {
+        var blade = rotorCase.Blade;
+        (_air, _bladeCount, _model) = (rotorCase.Air, rotorCase.BladeCount, rotorCase.Model);
+        _cosCone = Math.Cos(rotorCase.Cone);
+        (_hubRadius, _tipRadius) = (blade.HubRadius, blade.TipRadius);
+        _logReynoldsFactor = Math.Log(_air.Density / _air.DynamicViscosity);
+        _elements = [.. BladeElements.Of(blade, _model.Elements, _model.Spacing).Select(e => Prepare(e, rotorCase.Sections))];
+        _states = new ElementState[_elements.Length];
+    }
+
+    /// <summary>Operating points solved so far.</summary>
+    public int Solves { get; private set; }
+
+    /// <summary>Area swept by the coned rotor, m2: <c>pi (R cos cone)^2</c>.</summary>
+    public double Area => Math.PI * _tipRadius * _cosCone * _tipRadius * _cosCone;
+
+    /// <summary>Radius swept by the coned rotor, m: <c>R cos cone</c>.</summary>
+    public double SweptRadius => _tipRadius * _cosCone;
+
+    /// <summary>The elements of the operating point solved last, root to tip; overwritten by the next.</summary>
+    public ReadOnlySpan<ElementState> Elements => _states;
+
+    /// <summary>Solves one operating point. At rest there is no induction; the undisturbed wind loads the blades.</summary>
+    /// <param name="point">Wind speed above 0, rotor speed 0 or above.</param>
+    /// <returns>The loads; null where an element is unbalanced. <see cref="Elements"/> holds the elements.</returns>
+    public RotorLoads? Solve(in OperatingPoint point)
+    {
+        Solves++;
+        for (var i = 0; i < _elements.Length; i++)
+            _states[i] = SolveElement(_elements[i], point);
+        return Sum(point);
+    }
+
+    private Element Prepare(in BladeElement e, SectionSet sections)
+    {
+        var sameSection = e.OuterWeight == 0;
+        return new Element(
+            e, sections[e.InnerSection].Table, sections[e.OuterSection].Table,
+            sameSection ? e.InnerSection : $"{e.InnerSection}/{e.OuterSection}",
+            _bladeCount * e.Chord / (2 * Math.PI * e.Radius * _cosCone),
+            _model.TipLoss ? LossFactor.TipExponent(_bladeCount, e.Radius, _tipRadius) : double.NegativeInfinity,
+            _model.HubLoss ? LossFactor.HubExponent(_bladeCount, e.Radius, _hubRadius) : double.NegativeInfinity);
+    }
+
+    private ElementState SolveElement(in Element e, in OperatingPoint point)
+    {
+        var normalSpeed = point.WindSpeed * _cosCone;
+        var tangentialSpeed = point.RotorSpeed * e.Geometry.Radius * _cosCone;
+        var undisturbed = Math.Sqrt((normalSpeed * normalSpeed) + (tangentialSpeed * tangentialSpeed)) * e.Geometry.Chord;
+        var logReynolds = _logReynoldsFactor + Math.Log(undisturbed);
+        var annulus = new Annulus
+        {
+            Solidity = e.Solidity,
+            SpeedRatio = normalSpeed / tangentialSpeed,
+            SectionAngle = e.Geometry.Twist + point.Pitch,
+            TipExponent = e.TipExponent,
+            HubExponent = e.HubExponent,
+            Inner = e.Inner,
+            Outer = e.Outer,
+            OuterWeight = e.Geometry.OuterWeight,
+            InnerPlace = e.Inner.Place(logReynolds),
+            OuterPlace = e.Outer.Place(logReynolds),
+            HeavyLoading = _model.HeavyLoading,
+            DragInBalance = _model.BalanceWith == BalanceWith.LiftAndDrag ? 1 : 0,
+        };
+        var balance = tangentialSpeed > 0 ? MomentumBalance.Solve(annulus) : Balance.AtRest(annulus);
+        return StateOf(e, annulus, balance, normalSpeed, tangentialSpeed, _air.Density * undisturbed / _air.DynamicViscosity);
+    }
+
+    private ElementState StateOf(
+        in Element e, in Annulus annulus, in Balance balance, double normalSpeed, double tangentialSpeed, double reynolds)
+    {
+        var (induction, phi) = (balance.Induction, balance.InflowAngle);
+        var marks = (balance.SeveralBalances ? ElementMarks.SeveralBalances : 0)
+            | (annulus.IsOutsideReynolds ? ElementMarks.OutsideReynolds : 0);
+        if (!balance.IsBalanced)
+            return new ElementState(
+                e.Geometry.Radius, e.Geometry.Chord, e.Geometry.Twist, e.Section, double.NaN, double.NaN, reynolds, double.NaN,
+                double.NaN, double.NaN, double.NaN, double.NaN, double.NaN, double.NaN, double.NaN, balance.Evaluations,
+                marks | ElementMarks.Unbalanced);
+
+        var angleOfAttack = annulus.AngleOfAttack(phi);
+        var ((cl, cd), sin, cos) = (induction.Coefficients, induction.Sine, induction.Cosine);
+        var axialSpeed = normalSpeed * (1 - induction.Axial);
+        var rotationalSpeed = tangentialSpeed * (1 + induction.Tangential);
+        var pressure = 0.5 * _air.Density * ((axialSpeed * axialSpeed) + (rotationalSpeed * rotationalSpeed)) * e.Geometry.Chord;
+        return new ElementState(
+            e.Geometry.Radius, e.Geometry.Chord, e.Geometry.Twist, e.Section, phi, angleOfAttack, reynolds, induction.Axial,
+            induction.Tangential, induction.LossFactor, cl, cd, pressure * ((cl * cos) + (cd * sin)), pressure * ((cl * sin) - (cd * cos)),
+            balance.Residual, balance.Evaluations,
+            marks | (annulus.IsOutsideAngles(angleOfAttack) ? ElementMarks.OutsideAngles : 0));
+    }
+
+    private RotorLoads? Sum(in OperatingPoint point)
+    {
+        double normal = 0, driving = 0, outOfPlane = 0, inPlane = 0;
+        // Root to tip, always: another order gives other last digits, and results would seem to have moved.
+        for (var i = 0; i < _states.Length; i++)
+        {
+            var s = _states[i];
+            if ((s.Marks & ElementMarks.Unbalanced) != 0)
+                return null;
+            var (fn, ft) = (s.NormalForcePerLength * _elements[i].Geometry.Length, s.TangentialForcePerLength * _elements[i].Geometry.Length);
+            normal += fn;
+            driving += ft * s.Radius;
+            outOfPlane += fn * (s.Radius - _hubRadius);
+            inPlane += ft * (s.Radius - _hubRadius);
+        }
+        var thrust = _bladeCount * normal * _cosCone;
+        var torque = _bladeCount * driving * _cosCone;
+        var power = torque * point.RotorSpeed;
+        var tipSpeed = point.RotorSpeed * SweptRadius;
+        var force = 0.5 * _air.Density * point.WindSpeed * point.WindSpeed * Area;
+        var (sinPitch, cosPitch) = Math.SinCos(point.Pitch);
+        return new RotorLoads(
+            thrust, torque, power, tipSpeed, tipSpeed / point.WindSpeed, power / (force * point.WindSpeed), thrust / force,
+            torque / (force * SweptRadius), outOfPlane, inPlane, (outOfPlane * cosPitch) + (inPlane * sinPitch),
+            (inPlane * cosPitch) - (outOfPlane * sinPitch));
+    }
+
+    private sealed record Element(
+        BladeElement Geometry, SectionTable Inner, SectionTable Outer, string Section, double Solidity, double TipExponent,
+        double HubExponent);
+}
