@@ -26,9 +26,13 @@ public sealed record InputFinding(string File, int Line, int Column, string Text
 /// <param name="Spanwise">The wind speeds whose elements are written; null for all, empty for none.</param>
 /// <param name="Fingerprint">SHA-256, 64 lower-case hexadecimal digits, over every value that determines the result.</param>
 /// <param name="Inputs">Every file that was read for it, the case file first.</param>
+/// <param name="Values">
+/// Every value that determines the result, defaults filled in: key as in a case file, value as canonical text (ordinal order). Tables
+/// stand as the SHA-256 of their parsed values: <c>blade</c>, <c>section.NAME</c>. The fingerprint is over these and nothing else.
+/// </param>
 public sealed record StudyCase(
     string Name, string Title, string File, RotorCase Rotor, ImmutableArray<double>? Spanwise, string Fingerprint,
-    ImmutableArray<InputFile> Inputs);
+    ImmutableArray<InputFile> Inputs, ImmutableSortedDictionary<string, string> Values);
 
 /// <summary>A file that a case was read from.</summary>
 /// <param name="File">Relative to the study folder, with forward slashes.</param>

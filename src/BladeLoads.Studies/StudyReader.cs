@@ -1,14 +1,27 @@
+using BladeLoads.Studies.Files;
+
 namespace BladeLoads.Studies;
 
 /// <summary>Reads a study folder or one case file.</summary>
 public static class StudyReader
 {
+    internal const string StartingValuesFile = "study.toml";
+    internal const string CasesFolder = "cases";
+
     /// <summary>
     /// Reads everything and reports every error and doubt at once; a case with an error is rejected, the others are kept.
     /// </summary>
     /// <param name="path">A study folder, or one case file: then only that case and its variants are read.</param>
     /// <exception cref="StudyNotFoundException">There is nothing at the path that could be a study.</exception>
-    public static Study Read(string path) => throw new NotSupportedException();
+    public static Study Read(string path) => Read(path, new DiskFiles());
+
+    /// <inheritdoc cref="Read(string)"/>
+    /// <param name="files">Where the study lies.</param>
+    public static Study Read(string path, IStudyFiles files)
+    {
+        var place = StudyPlace.Find(path, files);
+        return new StudyReading(place, files).Read();
+    }
 }
 
 /// <summary>The message says what was looked for and what was there, in the user's words.</summary>

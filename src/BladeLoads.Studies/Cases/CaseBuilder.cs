@@ -1,0 +1,129 @@
+using System.Collections.Immutable;
+using BladeLoads.Rotor.Air;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Fingerprints;
+using BladeLoads.Studies.Tables;
+using BladeLoads.Studies.Toml;
+
+namespace BladeLoads.Studies.Cases;
+
+/// <summary>Makes a validated rotor case from the values of a case file, or reports everything that stands against it.</summary>
+internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findings findings)
+{
+    private const int MostBlades = 20;
+
+    private readonly Dictionary<TomlValue, (ImmutableArray<double> Speeds, string Text)> _windSpeeds = [];
+
+    /// <summary>Null when an error keeps the case from running; every error is reported.</summary>
+    /// <param name="entries">The case's values, those of a variant in their place.</param>
+    /// <param name="inputs">The case file and the starting values.</param>
+    public StudyCase? Build(
+        string name, string variantTitle, CaseFile file, ImmutableDictionary<string, CaseEntry> entries, ImmutableArray<InputFile> inputs)
+    {
+        var values = new CaseValues(file, entries, findings);
+        var title = ReadTitle(values, name);
+        var (blade, sections) = ReadBlade(values);
+        var bladeCount = values.WholeNumber("rotor.blade_count", null, 1, MostBlades);
+        var coneDeg = values.Number("rotor.cone_deg", CaseDefaults.ConeDeg, Bounds.Within(80));
+        var density = values.Number("air.density_kg_m3", CaseDefaults.Density, Bounds.AboveZero);
+        var viscosity = values.Number("air.dynamic_viscosity_Pa_s", CaseDefaults.DynamicViscosity, Bounds.AboveZero);
+        var windSpeeds = ReadWindSpeeds(values);
+        var control = ControlReader.Read(values, windSpeeds, folder, tables);
+        var model = ModelReader.Read(values);
+        var spanwise = SpanwiseReader.Read(values, windSpeeds);
+        CheckTheRest(values);
+        values.Note("solver", CanonicalText.Of(SolverVersion.Number));
+        if (!values.IsSound || blade?.Blade is null || sections?.Sections is null || control.Strategy is null)
+            return null;
+
+        var rotor = new RotorCase(
+            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), new AirProperties(density, viscosity), windSpeeds,
+            control.Strategy, control.CutIn, control.CutOut, control.DrivetrainEfficiency, model);
+        var determining = values.Determining;
+        ImmutableArray<InputFile> all =
+            [.. inputs, blade.Input, .. sections.Tables.Select(t => t.Input), .. control.Schedule is { } schedule ? [schedule] : Array.Empty<InputFile>()];
+        return new StudyCase(name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), all, determining);
+    }
+
+    private static string ReadTitle(CaseValues values, string name)
+    {
+        var title = values.Text("title");
+        if (title is not null && VisibleText.HasHidden(title))
+            values.RefuseValue("title", $"is {VisibleText.Quote(title)}; write it in one line, without control characters");
+        return string.IsNullOrWhiteSpace(title) ? name.Split('~')[0] : title;
+    }
+
+    private (BladeTable? Blade, BladeSections? Sections) ReadBlade(CaseValues values)
+    {
+        var blade = Reference(values, "blade", EntryKind.File) is { } bladePath ? tables.Blade(bladePath) : null;
+        var set = Reference(values, "polars", EntryKind.Folder);
+        if (blade is null || set is null)
+        {
+            values.Spoil();
+            return (blade, null);
+        }
+        var sections = tables.Sections(blade, set);
+        if (blade.Blade is null || sections.Sections is null)
+            values.Spoil();
+        values.Note("blade", blade.Hash);
+        foreach (var table in sections.Tables)
+            if (table.Section is { } section)
+                values.Note($"section.{section.Name}", table.Hash);
+        return (blade, sections);
+    }
+
+    private string? Reference(CaseValues values, string path, EntryKind wanted)
+    {
+        if (!values.Has(path))
+            values.Missing(path, null);
+        if (values.Text(path) is not { } reference)
+            return null;
+        // Relative to the file that makes it: the case's own, or study.toml.
+        var at = values.Find(path)!.Value.At;
+        if (folder.Locate(at.File, reference, wanted, out var problem) is { } fullPath)
+            return fullPath;
+        values.Refuse(at, problem);
+        return null;
+    }
+
+    private ImmutableArray<double> ReadWindSpeeds(CaseValues values)
+    {
+        const string path = "wind.speeds_m_s";
+        if (values.Find(path) is not { } entry)
+        {
+            values.Missing(path, null);
+            return [];
+        }
+        if (!_windSpeeds.TryGetValue(entry.Value, out var known))
+        {
+            var speeds = WindSpeeds.Read(entry.Value, findings.Error);
+            known = (speeds, CanonicalText.Of(speeds));
+            _windSpeeds.Add(entry.Value, known);
+        }
+        if (known.Speeds.IsEmpty)
+            values.Spoil();
+        values.Note(path, known.Text);
+        return known.Speeds;
+    }
+
+    // Keys that change no number yet are still keys: their values are checked like all others.
+    private static void CheckTheRest(CaseValues values)
+    {
+        values.Check("rotor.tilt_deg", Bounds.Within(90));
+        values.Check("rotor.hub_height_m", Bounds.AboveZero);
+        values.Check("air.altitude_m", Bounds.FromTo(-500, 11_000));
+        values.Check("air.temperature_C", Bounds.FromTo(-100, 100));
+        values.Check("air.pressure_Pa", Bounds.AboveZero);
+        values.Check("air.relative_humidity", Bounds.Share);
+        values.Check("wind.shear_exponent", Bounds.Within(2));
+        values.Check("wind.yaw_deg", Bounds.Within(180));
+        values.Check("wind.turbulence_intensity", Bounds.Share);
+        values.Check("control.thrust_limit_kN", Bounds.AboveZero);
+        values.Check("site.mean_wind_speed_m_s", Bounds.AboveZero);
+        values.Check("site.weibull_shape", Bounds.AboveZero);
+        values.Check("site.availability", Bounds.Share);
+        values.CheckedChoice("sections.extend", "viterna-1982");
+        values.CheckedChoice("sections.augment", "snel-1993", "du-selig-1998");
+    }
+}

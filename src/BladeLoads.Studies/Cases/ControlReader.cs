@@ -1,0 +1,125 @@
+using System.Collections.Immutable;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Fingerprints;
+using BladeLoads.Studies.Tables;
+using BladeLoads.Studies.Toml;
+
+namespace BladeLoads.Studies.Cases;
+
+/// <summary>What [control] says: the strategy, the wind speeds of operation, the drivetrain.</summary>
+/// <param name="Strategy">Null when an error keeps it from being known.</param>
+internal sealed record ControlValues(Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, InputFile? Schedule);
+
+/// <summary>Reads [control].</summary>
+internal static class ControlReader
+{
+    private const string VariableSpeed = "variable-speed", FixedSpeed = "fixed-speed", BySchedule = "schedule";
+
+    private static readonly ImmutableDictionary<string, string[]> KeysOf = new Dictionary<string, string[]>
+    {
+        [VariableSpeed] =
+        [
+            "tip_speed_ratio", "fine_pitch_deg", "min_rotor_speed_rpm", "max_rotor_speed_rpm", "speed_limited_pitch", "above_rated",
+            "thrust_limit_kN",
+        ],
+        [FixedSpeed] = ["rotor_speed_rpm", "pitch_deg"],
+        [BySchedule] = ["schedule"],
+    }.ToImmutableDictionary(StringComparer.Ordinal);
+
+    /// <param name="windSpeeds">m/s; empty when they are not known.</param>
+    public static ControlValues Read(CaseValues values, ImmutableArray<double> windSpeeds, StudyFolder folder, StudyTables tables)
+    {
+        var cutIn = values.Number("control.cut_in_wind_speed_m_s", CaseDefaults.CutInWindSpeed, Bounds.ZeroOrMore);
+        var cutOut = values.Number("control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Bounds.AboveZero);
+        RefuseExchanged(values, "control.cut_in_wind_speed_m_s", cutIn, "control.cut_out_wind_speed_m_s", cutOut);
+        var efficiency = values.Number("control.drivetrain_efficiency", CaseDefaults.DrivetrainEfficiency, Bounds.AboveZeroToOne);
+        var ratedPower = values.OptionalNumber("control.rated_power_kW", Bounds.AboveZero) * 1e3;
+
+        if (!values.Has("control.strategy"))
+            values.Missing("control.strategy", null);
+        var strategy = values.Choice("control.strategy", "", VariableSpeed, FixedSpeed, BySchedule);
+        if (strategy is null or "")
+            return new ControlValues(null, cutIn, cutOut, efficiency, null);
+        RefuseKeysOfOthers(values, strategy);
+        if (strategy == BySchedule)
+            return ReadSchedule(values, windSpeeds, ratedPower, new ControlValues(null, cutIn, cutOut, efficiency, null), folder, tables);
+        Control control = strategy == VariableSpeed ? ReadVariableSpeed(values, ratedPower) : ReadFixedSpeed(values, ratedPower);
+        return new ControlValues(control, cutIn, cutOut, efficiency, null);
+    }
+
+    private static Control.VariableSpeed ReadVariableSpeed(CaseValues values, double? ratedPower)
+    {
+        var tipSpeedRatio = values.RequiredNumber("control.tip_speed_ratio", Bounds.AboveZero, NotYet.TipSpeedRatioLeftOut);
+        var finePitch = values.RequiredNumber("control.fine_pitch_deg", Bounds.Within(90), NotYet.FinePitchLeftOut);
+        var slowest = values.Number("control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Bounds.ZeroOrMore);
+        var fastest = values.Number("control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Bounds.AboveZero);
+        RefuseExchanged(values, "control.min_rotor_speed_rpm", slowest, "control.max_rotor_speed_rpm", fastest);
+        values.CheckedChoice("control.speed_limited_pitch", "hold", "best");
+        var aboveRated = values.Choice("control.above_rated", CaseDefaults.AboveRated(values.Has("control.rated_power_kW")),
+            "pitch-to-feather", "pitch-to-stall", "none");
+        if (aboveRated == "pitch-to-feather" && !values.Has("control.rated_power_kW"))
+            values.RefuseValue("control.above_rated", "is 'pitch-to-feather' without a rated power; give rated_power_kW or leave above_rated out");
+        return new Control.VariableSpeed(tipSpeedRatio, double.DegreesToRadians(finePitch), RadiansPerSecond(slowest), RadiansPerSecond(fastest),
+            ratedPower, aboveRated == "pitch-to-feather" ? AboveRated.PitchToFeather : AboveRated.None);
+    }
+
+    private static Control.FixedSpeed ReadFixedSpeed(CaseValues values, double? ratedPower)
+    {
+        var rotorSpeed = values.RequiredNumber("control.rotor_speed_rpm", Bounds.ZeroOrMore);
+        var pitch = values.RequiredNumber("control.pitch_deg", Bounds.Within(180));
+        return new Control.FixedSpeed(RadiansPerSecond(rotorSpeed), double.DegreesToRadians(pitch), ratedPower);
+    }
+
+    private static ControlValues ReadSchedule(
+        CaseValues values, ImmutableArray<double> windSpeeds, double? ratedPower, ControlValues rest, StudyFolder folder, StudyTables tables)
+    {
+        const string path = "control.schedule";
+        if (!values.Has(path))
+            values.Missing(path, null);
+        if (values.Text(path) is not { } reference)
+            return rest;
+        var at = values.Find(path)!.Value.At;
+        if (folder.Locate(at.File, reference, EntryKind.File, out var problem) is not { } fullPath)
+        {
+            values.Refuse(at, problem);
+            return rest;
+        }
+        if (tables.Schedule(fullPath) is not { Points.IsEmpty: false } schedule)
+        {
+            values.Spoil();
+            return rest;
+        }
+        values.Note(path, schedule.Hash);
+        var (lowest, highest) = (schedule.Points[0].WindSpeed, schedule.Points[^1].WindSpeed);
+        if (windSpeeds.Where(v => v >= rest.CutIn && v <= rest.CutOut).Where(v => v < lowest || v > highest).ToList() is { Count: > 0 } bare)
+            values.RefuseValue(path, $"{VisibleText.Quote(reference)} runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} m/s "
+                + $"and does not cover {CanonicalText.Of(bare[0])} m/s; add rows, or set cut-in and cut-out within it");
+        return rest with { Strategy = new Control.Schedule(schedule.Points, ratedPower), Schedule = schedule.Input };
+    }
+
+    private static void RefuseKeysOfOthers(CaseValues values, string strategy)
+    {
+        foreach (var (other, keys) in KeysOf)
+            foreach (var key in keys.Where(_ => other != strategy))
+                if (values.Find($"control.{key}") is { } entry && !ChangesNothing(entry.Value))
+                    values.RefuseKey($"control.{key}",
+                        $"'{key}' does not go with strategy '{strategy}', which takes {string.Join(", ", KeysOf[strategy])}; leave it out");
+    }
+
+    private static bool ChangesNothing(TomlValue value) => value is TomlValue.Text { Value: "hold" or "none" };
+
+    // Told at the one that a sweep varies: the other is the same in every variant.
+    private static void RefuseExchanged(CaseValues values, string lowPath, double low, string highPath, double high)
+    {
+        if (!(low > high))
+            return;
+        var (lowKey, highKey) = (values.Find(lowPath), values.Find(highPath)!);
+        if (lowKey is null || highKey.IsSwept)
+            values.RefuseValue(highPath, $"is {CanonicalText.Of(high)}, below {KnownKeys.Find(lowPath)!.Name} {CanonicalText.Of(low)}; exchange them");
+        else
+            values.RefuseValue(lowPath, $"is {CanonicalText.Of(low)}, above {highKey.Known.Name} {CanonicalText.Of(high)}; exchange them");
+    }
+
+    private static double RadiansPerSecond(double revolutionsPerMinute) => revolutionsPerMinute * Math.Tau / 60;
+}

@@ -1,0 +1,32 @@
+using BladeLoads.Studies.Files;
+
+namespace BladeLoads.Studies.Cases;
+
+/// <summary>What to say about a key or table that no case file has.</summary>
+internal static class UnknownKey
+{
+    /// <param name="table">The table it stands in; empty at the top of the file.</param>
+    public static string InTable(string name, string table)
+    {
+        var found = $"unknown key {VisibleText.Quote(name)} {(table.Length == 0 ? "at the top of the file" : $"in [{table}]")}";
+        var elsewhere = KnownKeys.All.FirstOrDefault(key => key.Name == name && key.Table != table);
+        if (elsewhere is not null)
+            return elsewhere.Table.Length == 0 ? $"{found}; it belongs at the top of the file" : $"{found}; it belongs in [{elsewhere.Table}]";
+        if (Nearest.Of(name, KnownKeys.NamesIn(table)) is { } near)
+            return $"{found}; did you mean '{near}'?";
+        return table.Length == 0 && Nearest.Of(name, KnownKeys.Tables) is { } nearTable
+            ? $"{found}; did you mean the table [{nearTable}]?"
+            : $"{found}; known are {string.Join(", ", KnownKeys.NamesIn(table))}";
+    }
+
+    public static string Table(string name) => Nearest.Of(name, KnownKeys.Tables) is { } near
+        ? $"unknown table [{Short(name)}]; did you mean [{near}]?"
+        : $"unknown table [{Short(name)}]; known are {string.Join(", ", KnownKeys.Tables.Select(table => $"[{table}]"))}";
+
+    /// <param name="path">As a sweep names it.</param>
+    public static string InSweep(string path) => Nearest.Of(path, KnownKeys.All.Select(key => key.Path)) is { } near
+        ? $"unknown key {VisibleText.Quote(path)} in [sweep]; did you mean '{near}'?"
+        : $"unknown key {VisibleText.Quote(path)} in [sweep]; name table and key, such as \"air.density_kg_m3\"";
+
+    private static string Short(string name) => VisibleText.Quote(name)[1..^1];
+}

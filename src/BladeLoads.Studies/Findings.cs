@@ -1,0 +1,56 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using BladeLoads.Studies.Files;
+
+namespace BladeLoads.Studies;
+
+/// <summary>A place in an input: lines and columns count from 1, 0 means the whole file.</summary>
+internal readonly record struct Place(string File, int Line, int Column);
+
+/// <summary>Everything found while a study is read, each finding once, however many cases meet it.</summary>
+internal sealed class Findings
+{
+    private const int MostShownOfAFile = 50;
+
+    private readonly HashSet<InputFinding> _errors = [];
+    private readonly HashSet<InputFinding> _doubts = [];
+
+    public void Error(InputFinding finding) => _errors.Add(Visible(finding));
+
+    public void Error(Place at, string text) => Error(new InputFinding(at.File, at.Line, at.Column, text));
+
+    public void Doubt(InputFinding finding) => _doubts.Add(Visible(finding));
+
+    public ImmutableArray<InputFinding> Errors => InFileOrder(_errors, "errors");
+
+    public ImmutableArray<InputFinding> Doubts => InFileOrder(_doubts, "doubts");
+
+    private static InputFinding Visible(InputFinding finding)
+        => finding with { File = VisibleText.Escape(finding.File), Text = VisibleText.Escape(finding.Text) };
+
+    private static ImmutableArray<InputFinding> InFileOrder(IEnumerable<InputFinding> findings, string noun) =>
+        [.. findings
+            .GroupBy(f => f.File, StringComparer.Ordinal)
+            .OrderBy(file => Rank(file.Key)).ThenBy(file => file.Key, StringComparer.Ordinal)
+            .SelectMany(file => FirstOf(
+                [.. file.OrderBy(f => f.Line).ThenBy(f => f.Column).ThenBy(f => f.Text, StringComparer.Ordinal)], noun))];
+
+    // A table of rubbish must not push every other finding off the screen.
+    private static IEnumerable<InputFinding> FirstOf(List<InputFinding> ofOneFile, string noun)
+    {
+        if (ofOneFile.Count <= MostShownOfAFile)
+            return ofOneFile;
+        var next = ofOneFile[MostShownOfAFile];
+        var rest = (ofOneFile.Count - MostShownOfAFile).ToString(CultureInfo.InvariantCulture);
+        return ofOneFile.Take(MostShownOfAFile).Append(next with { Column = 0, Text = $"and {rest} more {noun} from here on" });
+    }
+
+    private static int Rank(string file) => file switch
+    {
+        StudyReader.StartingValuesFile => 0,
+        _ when file.StartsWith("cases/", StringComparison.Ordinal) => 1,
+        _ when file.StartsWith("blades/", StringComparison.Ordinal) => 2,
+        _ when file.StartsWith("polars/", StringComparison.Ordinal) => 3,
+        _ => 4,
+    };
+}

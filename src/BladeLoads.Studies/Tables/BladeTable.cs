@@ -1,0 +1,111 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using BladeLoads.Rotor.Blades;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Fingerprints;
+
+namespace BladeLoads.Studies.Tables;
+
+/// <summary>A blade table as read.</summary>
+/// <param name="Blade">Null when an error keeps the table from being used.</param>
+/// <param name="Sections">Every section named, with the place of its first row; those of a table with errors too.</param>
+/// <param name="Hash">Over the parsed values.</param>
+internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Place At)> Sections, string Hash, InputFile Input)
+{
+    private static readonly ImmutableArray<Column> Columns =
+    [
+        new("radius_m", true), new("chord_m", true), new("twist_deg", true), new("section", false),
+        new("thickness_ratio", false), new("mass_kg_per_m", false),
+    ];
+
+    public static BladeTable Parse(InputText input, Findings findings)
+    {
+        using var rows = new CsvRows(input, findings);
+        var stations = new List<BladeStation>();
+        var lines = new List<string>();
+        var sections = new List<(string Name, Place At)>();
+        var known = new HashSet<string>(StringComparer.Ordinal);
+        if (rows.ReadHeader(Columns) && HasSections(rows, input.File))
+        {
+            if (rows.Has("mass_kg_per_m"))
+                findings.Doubt(new InputFinding(input.File, rows.Line, rows.Cell("mass_kg_per_m").Column,
+                    "mass_kg_per_m is not used yet; moments are aerodynamic only"));
+            var previous = (Radius: 0.0, Line: 0);
+            while (rows.Read())
+            {
+                var radius = Positive(rows, "radius_m");
+                if (radius <= previous.Radius)
+                    rows.Error("radius_m", Falls(previous.Radius, radius, previous.Line, rows.Line));
+                var chord = Positive(rows, "chord_m");
+                var twist = rows.Number("twist_deg");
+                if (Math.Abs(twist) > 180)
+                    rows.Error("twist_deg", $"twist_deg is {CanonicalText.Of(twist)}; give an angle from -180 to 180");
+                var section = SectionOf(rows);
+                CheckUnused(rows);
+                if (!double.IsNaN(radius))
+                    previous = (radius, rows.Line);
+                if (section is not null && known.Add(section))
+                    sections.Add((section, rows.Cell("section")));
+                stations.Add(new BladeStation(radius, chord, double.DegreesToRadians(twist), section ?? ""));
+                lines.Add($"{CanonicalText.Of([radius, chord, twist])},{section}");
+            }
+            if (!rows.HasErrors && stations.Count < 2)
+                rows.Error(new Place(input.File, 0, 0), $"has {(stations.Count == 0 ? "no row" : "one row")}; a blade needs two or more, root first");
+        }
+        var blade = rows.HasErrors ? null : Blade.FromStations(stations);
+        var contents = blade is null ? "blade table with errors" : string.Create(CultureInfo.InvariantCulture,
+            $"{stations.Count} rows from {CanonicalText.Of(blade.HubRadius)} to {CanonicalText.Of(blade.TipRadius)} m, {sections.Count} section{(sections.Count == 1 ? "" : "s")}");
+        return new BladeTable(blade, [.. sections], Fingerprint.OfLines(lines), new InputFile(input.File, input.Sha256, contents));
+    }
+
+    private static bool HasSections(CsvRows rows, string file)
+    {
+        if (rows.Has("section"))
+            return true;
+        rows.Error(new Place(file, rows.Line, 1), rows.Has("thickness_ratio")
+            ? "sections from thickness_ratio are not supported yet; add a column 'section'"
+            : "no column 'section'; name the section of each row");
+        return false;
+    }
+
+    private static string? SectionOf(CsvRows rows)
+    {
+        var section = rows.Text("section");
+        if (section.Length == 0)
+            rows.Error("section", rows.Has("thickness_ratio") && rows.Text("thickness_ratio").Length > 0
+                ? "a section from thickness_ratio is not supported yet; name a section"
+                : "section is empty; name a section");
+        else if (SafeName.Problem(section) is { } problem)
+            rows.Error("section", $"section {VisibleText.Quote(section)} {problem}; a section's name is also that of its polar file");
+        else
+            return section;
+        return null;
+    }
+
+    private static double Positive(CsvRows rows, string column)
+    {
+        var value = rows.Number(column);
+        if (!(value <= 0))
+            return value;
+        rows.Error(column, $"{column} is {CanonicalText.Of(value)}; it must be above 0");
+        return double.NaN;
+    }
+
+    private static void CheckUnused(CsvRows rows)
+    {
+        if (rows.Has("thickness_ratio") && rows.Text("thickness_ratio").Length > 0)
+        {
+            var thickness = rows.Number("thickness_ratio");
+            if (thickness is <= 0 or > 1)
+                rows.Error("thickness_ratio", $"thickness_ratio is {CanonicalText.Of(thickness)}; it is thickness over chord, above 0 to 1");
+        }
+        if (rows.Has("mass_kg_per_m") && rows.Number("mass_kg_per_m") is < 0 and var mass)
+            rows.Error("mass_kg_per_m", $"mass_kg_per_m is {CanonicalText.Of(mass)}; it must be 0 or more");
+    }
+
+    private static string Falls(double from, double to, int fromLine, int toLine)
+    {
+        var verb = from == to ? $"is {CanonicalText.Of(to)} again" : $"falls from {CanonicalText.Of(from)} to {CanonicalText.Of(to)}";
+        return string.Create(CultureInfo.InvariantCulture, $"radius_m {verb} (row {fromLine} to {toLine}); radii must rise from root to tip");
+    }
+}

@@ -1,0 +1,160 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using BladeLoads.Rotor.Sections;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Fingerprints;
+
+namespace BladeLoads.Studies.Tables;
+
+/// <summary>A section's polar table as read, prepared once for all cases that use it.</summary>
+/// <param name="Section">Null when an error keeps the table from being used.</param>
+/// <param name="Hash">Over the parsed values; moment coefficients, which nothing uses, are not in it.</param>
+internal sealed record PolarTable(Section? Section, string Hash, InputFile Input)
+{
+    private const int FewestRows = 3;
+    private const double AngleSlack = 1e-9;       // deg
+    private const double LargestRadian = 3.2;     // a little more than pi: angles that all lie within are hardly degrees
+    private const double LowestReynolds = 1e4;
+    private const double LiftClosure = 0.05;
+
+    private static readonly ImmutableArray<Column> Columns =
+        [new("reynolds", false), new("alpha_deg", true), new("cl", true), new("cd", true), new("cm", false)];
+
+    public static PolarTable Parse(string sectionName, InputText input, Findings findings)
+    {
+        using var rows = new CsvRows(input, findings);
+        var blocks = new List<Block>();
+        if (rows.ReadHeader(Columns))
+        {
+            while (rows.Read())
+                ReadRow(rows, blocks);
+            CheckWhole(rows, blocks, findings, input.File);
+        }
+        var section = rows.HasErrors ? null : Section.FromPolars(sectionName, blocks.Select(block => block.ToPolar()));
+        return new PolarTable(section, Fingerprint.OfLines(blocks.SelectMany(block => block.Lines())),
+            new InputFile(input.File, input.Sha256, section is null ? "polar table with errors" : Contents(blocks)));
+    }
+
+    private static void ReadRow(CsvRows rows, List<Block> blocks)
+    {
+        var reynolds = rows.Has("reynolds") ? rows.Number("reynolds") : double.NaN;
+        if (blocks.Count == 0 || rows.Has("reynolds") && !double.IsNaN(reynolds) && reynolds != blocks[^1].Reynolds)
+        {
+            if (rows.Has("reynolds"))
+                CheckReynolds(rows, blocks, reynolds);
+            blocks.Add(new Block(reynolds, rows.Cell(rows.Has("reynolds") ? "reynolds" : "alpha_deg")));
+        }
+        var block = blocks[^1];
+
+        var angle = rows.Number("alpha_deg");
+        if (Math.Abs(angle) > 180 + AngleSlack)
+            rows.Error("alpha_deg", $"alpha_deg is {CanonicalText.Of(angle)}; give an angle from -180 to 180");
+        angle = Math.Clamp(angle, -180, 180);
+        // Asked in radians too: two angles that differ in their last digit may be one there.
+        if (block.Rows > 0 && double.DegreesToRadians(angle) <= double.DegreesToRadians(block.Angles[^1]))
+            rows.Error("alpha_deg", Falls("alpha_deg", block.Angles[^1], angle, block.LastLine, rows.Line, "angles must rise within one Reynolds number"));
+        var lift = rows.Number("cl");
+        var drag = rows.Number("cd");
+        if (drag < 0)
+            rows.Error("cd", $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0");
+        if (rows.Has("cm"))
+            rows.Number("cm");
+        block.Rows++;
+        if (double.IsNaN(angle))
+            return;
+        block.Add(angle, lift, drag, rows.Line);
+        if (angle is -180 or 180)
+            block.LiftAtEnd.Add((lift, rows.Cell("cl")));
+    }
+
+    private static void CheckReynolds(CsvRows rows, List<Block> blocks, double reynolds)
+    {
+        if (reynolds < LowestReynolds)
+            rows.Error("reynolds", $"reynolds is {CanonicalText.Of(reynolds)}; Reynolds numbers of blades are 1e4 and more, three million is 3e6");
+        else if (blocks.Any(block => block.Reynolds == reynolds))
+            rows.Error("reynolds", $"reynolds returns to {Reynolds(reynolds)}; keep the rows of one Reynolds number together");
+        else if (blocks.Count > 0 && reynolds < blocks[^1].Reynolds)
+            rows.Error("reynolds", string.Create(CultureInfo.InvariantCulture,
+                $"reynolds falls from {Reynolds(blocks[^1].Reynolds)} to {Reynolds(reynolds)} (row {blocks[^1].LastLine} to {rows.Line}); Reynolds numbers must rise"));
+    }
+
+    private static void CheckWhole(CsvRows rows, List<Block> blocks, Findings findings, string file)
+    {
+        if (blocks.Count == 0 && !rows.HasErrors)
+            rows.Error(new Place(file, 0, 0), "has no row; a polar needs three or more");
+        foreach (var block in blocks.Where(block => block.Rows < FewestRows))
+        {
+            var of = double.IsNaN(block.Reynolds) ? "the table" : $"Reynolds number {Reynolds(block.Reynolds)}";
+            rows.Error(block.At, $"{of} has {(block.Rows == 1 ? "one row" : "two rows")}; a polar needs three or more");
+        }
+        if (rows.HasErrors)
+            return;
+        var (lowest, highest) = (blocks.Min(block => block.Angles[0]), blocks.Max(block => block.Angles[^1]));
+        if (lowest >= -LargestRadian && highest <= LargestRadian)
+            rows.Error(blocks[0].At, $"alpha_deg runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} only; "
+                + "these look like radians, angles are in degrees");
+        foreach (var block in blocks)
+            if (block.LiftAtEnd is [var (low, _), var (high, at)] && Math.Abs(high - low) > LiftClosure)
+                findings.Doubt(new InputFinding(at.File, at.Line, at.Column,
+                    $"cl is {CanonicalText.Of(high)} at 180 deg and {CanonicalText.Of(low)} at -180 deg; these are one angle and should have one lift"));
+    }
+
+    private static string Falls(string column, double from, double to, int fromLine, int toLine, string rule)
+    {
+        var verb = from == to ? $"is {CanonicalText.Of(to)} again" : $"falls from {CanonicalText.Of(from)} to {CanonicalText.Of(to)}";
+        return string.Create(CultureInfo.InvariantCulture, $"{column} {verb} (row {fromLine} to {toLine}); {rule}");
+    }
+
+    private static string Contents(List<Block> blocks)
+    {
+        var rowCount = blocks.Sum(block => block.Rows);
+        var reynolds = blocks switch
+        {
+            [{ Reynolds: double.NaN }] => "no Reynolds number",
+            [var only] => $"Reynolds number {Reynolds(only.Reynolds)}",
+            _ => string.Create(CultureInfo.InvariantCulture,
+                $"{blocks.Count} Reynolds numbers from {Reynolds(blocks[0].Reynolds)} to {Reynolds(blocks[^1].Reynolds)}"),
+        };
+        return string.Create(CultureInfo.InvariantCulture,
+            $"{reynolds}, {rowCount} rows, {CanonicalText.Of(blocks.Min(b => b.Angles[0]))} to {CanonicalText.Of(blocks.Max(b => b.Angles[^1]))} deg");
+    }
+
+    private static string Reynolds(double value) => value.ToString("0.######e0", CultureInfo.InvariantCulture);
+
+    /// <summary>The rows of one Reynolds number.</summary>
+    private sealed class Block(double reynolds, Place at)
+    {
+        private readonly List<double> _lift = [];
+        private readonly List<double> _drag = [];
+
+        public double Reynolds { get; } = reynolds;
+
+        public Place At { get; } = at;
+
+        public int Rows { get; set; }
+
+        public int LastLine { get; private set; } = at.Line;
+
+        public List<double> Angles { get; } = [];
+
+        public List<(double Lift, Place At)> LiftAtEnd { get; } = [];
+
+        public void Add(double angle, double lift, double drag, int line)
+        {
+            Angles.Add(angle);
+            _lift.Add(lift);
+            _drag.Add(drag);
+            LastLine = line;
+        }
+
+        public Polar ToPolar() => Polar.FromRows(
+            Reynolds, [.. Angles.Select(angle => Math.Clamp(double.DegreesToRadians(angle), -Math.PI, Math.PI))], [.. _lift], [.. _drag]);
+
+        public IEnumerable<string> Lines()
+        {
+            var reynolds = double.IsNaN(Reynolds) ? "-" : CanonicalText.Of(Reynolds);
+            for (var i = 0; i < Angles.Count; i++)
+                yield return $"{reynolds},{CanonicalText.Of([Angles[i], _lift[i], _drag[i]])}";
+        }
+    }
+}

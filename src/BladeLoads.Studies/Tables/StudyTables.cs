@@ -1,0 +1,59 @@
+using System.Collections.Immutable;
+using BladeLoads.Rotor.Sections;
+using BladeLoads.Studies.Files;
+
+namespace BladeLoads.Studies.Tables;
+
+/// <summary>The sections of a blade from one set of polars.</summary>
+/// <param name="Sections">Null when a table is missing or has an error.</param>
+/// <param name="Tables">In the order in which the blade names them.</param>
+internal sealed record BladeSections(SectionSet? Sections, ImmutableArray<PolarTable> Tables);
+
+/// <summary>The tables of a study, each read, hashed and prepared once, however many cases share it.</summary>
+internal sealed class StudyTables(StudyFolder folder, Findings findings)
+{
+    private readonly Dictionary<string, BladeTable?> _blades = new(StringComparer.Ordinal);
+    private readonly Dictionary<string, PolarTable?> _polars = new(StringComparer.Ordinal);
+    private readonly Dictionary<string, ScheduleTable?> _schedules = new(StringComparer.Ordinal);
+    private readonly Dictionary<(string Blade, string Set), BladeSections> _sections = [];
+
+    /// <summary>Null when the file cannot be read at all, which is reported.</summary>
+    public BladeTable? Blade(string fullPath) => Once(_blades, fullPath, input => BladeTable.Parse(input, findings));
+
+    public ScheduleTable? Schedule(string fullPath) => Once(_schedules, fullPath, input => ScheduleTable.Parse(input, findings));
+
+    /// <param name="blade">Names the sections; those of the set that it does not name are not read.</param>
+    /// <param name="setFolder">Full path of the folder of polar tables.</param>
+    public BladeSections Sections(BladeTable blade, string setFolder)
+    {
+        if (_sections.TryGetValue((blade.Input.File, setFolder), out var known))
+            return known;
+        var names = folder.Names(setFolder).ToHashSet(StringComparer.Ordinal);
+        var tables = ImmutableArray.CreateBuilder<PolarTable>();
+        foreach (var (name, at) in blade.Sections)
+        {
+            if (!names.Contains(name + ".csv"))
+                findings.Error(at, $"no table for section {VisibleText.Quote(name)} in {folder.RelativePath(setFolder)}/; "
+                    + $"it holds {VisibleText.Enumerate(names.Where(IsTable).Select(n => n[..^4]), "no table")}");
+            else if (Once(_polars, Path.Combine(setFolder, name + ".csv"), input => PolarTable.Parse(name, input, findings)) is { } table)
+                tables.Add(table);
+        }
+        var complete = tables.Count == blade.Sections.Length && tables.All(table => table.Section is not null);
+        var sections = new BladeSections(
+            complete ? SectionSet.Of(tables.Select(table => table.Section!)) : null, tables.ToImmutable());
+        _sections.Add((blade.Input.File, setFolder), sections);
+        return sections;
+    }
+
+    private static bool IsTable(string name) => name.EndsWith(".csv", StringComparison.Ordinal) && name[0] != '.';
+
+    private T? Once<T>(Dictionary<string, T?> known, string fullPath, Func<InputText, T> parse)
+        where T : class
+    {
+        if (known.TryGetValue(fullPath, out var table))
+            return table;
+        table = folder.Read(fullPath, findings.Error) is { } input ? parse(input) : null;
+        known.Add(fullPath, table);
+        return table;
+    }
+}
