@@ -10,6 +10,9 @@ internal static class Differences
 {
     private static readonly SearchValues<char> HexDigits = SearchValues.Create("0123456789abcdef");
 
+    // Told from the receipt's own field, in words of its own.
+    private const string SolverKey = "solver";
+
     /// <summary>All reasons, the solver first, then values by key, then files; none for a current result.</summary>
     public static ImmutableArray<StaleReason> Between(Receipt receipt, StudyCase now, string folder, int solverVersion)
     {
@@ -20,7 +23,7 @@ internal static class Differences
         {
             var before = reasons.Count;
             reasons.AddRange(OfValues(receipt.Values, now.Values));
-            if (reasons.Count == before)
+            if (reasons.Count == before && receipt.SolverVersion == solverVersion)
                 reasons.Add(new StaleReason.FingerprintChanged());
         }
         reasons.AddRange(OfFiles(receipt.Files, folder));
@@ -33,20 +36,23 @@ internal static class Differences
         {
             var from = was.GetValueOrDefault(key);
             var to = now.GetValueOrDefault(key);
-            if (from != to)
+            if (from != to && key != SolverKey)
                 yield return OfValue(key, from, to);
         }
     }
 
     private static StaleReason OfValue(string key, string? from, string? to) => (from, to) switch
     {
-        (null, { } value) when IsTable(value) => new StaleReason.TableAdded(key),
+        (null, { } value) when IsTable(value) => new StaleReason.TableAdded(TableName(key)),
         (null, { } value) => new StaleReason.ValueAdded(key, value),
-        ({ } value, null) when IsTable(value) => new StaleReason.TableRemoved(key),
+        ({ } value, null) when IsTable(value) => new StaleReason.TableRemoved(TableName(key)),
         ({ } value, null) => new StaleReason.ValueRemoved(key, value),
-        ({ } old, { } value) when IsTable(old) && IsTable(value) => new StaleReason.TableChanged(key),
+        ({ } old, { } value) when IsTable(old) && IsTable(value) => new StaleReason.TableChanged(TableName(key)),
         _ => new StaleReason.ValueChanged(key, from!, to!),
     };
+
+    private static string TableName(string key)
+        => key.StartsWith("section.", StringComparison.Ordinal) ? "section " + key["section.".Length..] : key;
 
     // Tables stand in the values as their SHA-256.
     private static bool IsTable(string value) => value.Length == 64 && !value.AsSpan().ContainsAnyExcept(HexDigits);

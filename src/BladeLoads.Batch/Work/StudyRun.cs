@@ -1,5 +1,6 @@
 using System.Collections.Concurrent;
 using System.Collections.Immutable;
+using BladeLoads.Batch.Logs;
 using BladeLoads.Batch.Queue;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Studies;
@@ -59,7 +60,7 @@ public static class StudyRun
         log.Information(
             "Run ended: {Solved} solved, {Failed} failed, {NotRun} not run", result.Solved, result.Failed, result.NotRun);
         foreach (var fault in faults)
-            log.Error(fault, "Fault outside any case: {Message}", fault.Message);
+            log.Fault(fault);
         return result;
     }
 }

@@ -29,7 +29,10 @@ public sealed record CaseSummary(
     int UnbalancedPoints,
     IReadOnlyDictionary<string, int> Marks)
 {
-    /// <summary>Where several points share the largest value, the lowest wind speed among them is named.</summary>
+    // Power held at rated is the same at many wind speeds but for the last digits of a root finder.
+    private const double SameWithin = 1e-9;
+
+    /// <summary>Where several points share the largest value, to 1e-9 of it, the first of them is taken.</summary>
     public static CaseSummary Of(PowerCurve curve)
     {
         var best = Largest(curve, (loads, _) => loads.PowerCoefficient, value => value);
@@ -56,16 +59,15 @@ public sealed record CaseSummary(
 
     private static Extreme? Largest(PowerCurve curve, Func<RotorLoads, double, double> figure, Func<double, double> size)
     {
-        Extreme? largest = null;
-        foreach (var point in curve.Points)
-        {
-            if (point.Loads is null)
-                continue;
-            var value = figure(point.Loads, point.ElectricalPower);
-            if (double.IsFinite(value) && (largest is null || size(value) > size(largest.Value)))
-                largest = new Extreme(value, point.Operation.WindSpeed);
-        }
-        return largest;
+        var found = curve.Points
+            .Where(point => point.Loads is not null)
+            .Select(point => new Extreme(figure(point.Loads!, point.ElectricalPower), point.Operation.WindSpeed))
+            .Where(extreme => double.IsFinite(extreme.Value))
+            .ToList();
+        if (found.Count == 0)
+            return null;
+        var largest = found.Max(extreme => size(extreme.Value));
+        return found.First(extreme => size(extreme.Value) >= largest - SameWithin * Math.Abs(largest));
     }
 
     private static ImmutableSortedDictionary<string, int> CountMarks(PowerCurve curve)

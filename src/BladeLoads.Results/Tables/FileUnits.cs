@@ -4,7 +4,7 @@ namespace BladeLoads.Results.Tables;
 internal static class FileUnits
 {
     /// <summary>rad/s -> rpm.</summary>
-    public static double Rpm(double rotorSpeed) => rotorSpeed * 30 / Math.PI;
+    public static double Rpm(double rotorSpeed) => rotorSpeed / (Math.PI / 30);
 
     /// <summary>rad -> deg.</summary>
     public static double Deg(double angle) => double.RadiansToDegrees(angle);

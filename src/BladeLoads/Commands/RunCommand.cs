@@ -5,7 +5,6 @@ using BladeLoads.Batch.Queue;
 using BladeLoads.Batch.Work;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Tables;
-using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Screen;
 using BladeLoads.Studies;
@@ -73,8 +72,8 @@ internal static class RunCommand
         }
         catch (Exception e)
         {
-            log.Logger.Error(e, "Fault in BladeLoads: {Message}", e.Message);
-            throw;
+            log.Logger.Fault(e);
+            return NothingRun with { Faults = [e] };
         }
     }
 
@@ -91,10 +90,7 @@ internal static class RunCommand
         RunResult run, ImmutableArray<SummaryRow> rows, Study study, StopSignals signals, Surroundings surroundings)
     {
         if (!run.Faults.IsEmpty)
-        {
-            surroundings.Error.WriteLine($"fault in BladeLoads, please report: {Printable.Of(run.Faults[0].Message)}");
-            return ExitCode.Fault;
-        }
+            return ExitCode.Fault;   // told by the log
         if (run.NoRoom is not null)
         {
             surroundings.Error.WriteLine($"{run.NoRoom}; {Count.Of(run.NotRun, "case")} not run");

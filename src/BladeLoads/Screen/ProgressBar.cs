@@ -18,7 +18,7 @@ internal static class ProgressBar
                 .Columns(new ProgressBarColumn(), new TaskDescriptionColumn { Alignment = Justify.Left })
                 .Start(context =>
                 {
-                    var bar = context.AddTask("", maxValue: progress.Cases);
+                    var bar = context.AddTask(Markup.Escape(progress.Read().Sentence), maxValue: progress.Cases);
                     var running = Task.Factory.StartNew(run, CancellationToken.None, TaskCreationOptions.LongRunning, TaskScheduler.Default);
                     do
                     {

@@ -9,7 +9,7 @@ namespace BladeLoads.Screen;
 /// <summary>The summary on the screen: the most useful columns, each row within about 110 characters.</summary>
 internal static class SummaryLines
 {
-    private const int WidestName = 34;
+    private const int WidestName = 40;
     private const int RowsShown = 100;
 
     /// <param name="baseline">The row that others are compared with; null for a study without one.</param>
@@ -36,7 +36,7 @@ internal static class SummaryLines
         output.WriteLine();
         if (baseline.Summary is null)
         {
-            output.WriteLine(Printable.Of($"no comparison: the baseline {baseline.Case} has no current result"));
+            output.WriteLine(Printable.Of($"no comparison: the baseline '{baseline.Case}' has no current result"));
             return;
         }
         output.WriteLine(Printable.Of($"difference to {baseline.Case}, %"));
@@ -82,12 +82,7 @@ internal static class SummaryLines
         return row;
     }
 
-    // Variants differ at their ends, studies at their beginnings: the middle goes.
-    private static string Name(string name)
-    {
-        var text = Printable.Of(name);
-        return text.Length <= WidestName ? text : $"{text[..(WidestName / 2 - 1)]}..{text[^(WidestName / 2 - 1)..]}";
-    }
+    private static string Name(string name) => ShortName.Of(Printable.Of(name), WidestName);
 
     private static string Figure(double? value) => value is not { } number
         ? "-"
