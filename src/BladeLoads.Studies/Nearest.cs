@@ -18,19 +18,25 @@ internal static class Nearest
             && (x.name.Contains(text, StringComparison.OrdinalIgnoreCase) || text.Contains(x.name, StringComparison.OrdinalIgnoreCase))).name;
     }
 
-    // Levenshtein's distance, one row at a time; what is longer than any name of ours is far from all of them.
+    // Letters put in, left out, changed, or two exchanged, each counts 1. What is longer than any name of ours is far from all of them.
     private static int Changes(string a, string b)
     {
         if (a.Length > 100 || b.Length > 300)
             return int.MaxValue;
-        var row = Enumerable.Range(0, b.Length + 1).ToArray();
-        for (var i = 1; i <= a.Length; i++)
-        {
-            var diagonal = row[0];
-            row[0] = i;
-            for (var j = 1; j <= b.Length; j++)
-                (diagonal, row[j]) = (row[j], Math.Min(Math.Min(row[j] + 1, row[j - 1] + 1), diagonal + (a[i - 1] == b[j - 1] ? 0 : 1)));
-        }
-        return row[^1];
+        var changes = new int[a.Length + 1, b.Length + 1];
+        for (var i = 0; i <= a.Length; i++)
+            for (var j = 0; j <= b.Length; j++)
+            {
+                if (i == 0 || j == 0)
+                {
+                    changes[i, j] = i + j;
+                    continue;
+                }
+                var best = Math.Min(Math.Min(changes[i - 1, j], changes[i, j - 1]) + 1, changes[i - 1, j - 1] + (a[i - 1] == b[j - 1] ? 0 : 1));
+                if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1])
+                    best = Math.Min(best, changes[i - 2, j - 2] + 1);
+                changes[i, j] = best;
+            }
+        return changes[a.Length, b.Length];
     }
 }

@@ -121,14 +121,12 @@ internal sealed class FellStudy
 
     public IEnumerable<string> Errors() => Read().Errors.Select(FindingText.Format);
 
-    public IEnumerable<string> Doubts() => Read().Doubts.Select(FindingText.Format);
-
     public StudyCase OnlyCase() => Assert.Single(SoundCases());
 
     public IReadOnlyList<StudyCase> SoundCases()
     {
         var study = Read();
-        Assert.Equal([], study.Errors.Select(FindingText.Format));
+        Told.Exactly([], study.Errors);
         return study.Cases;
     }
 

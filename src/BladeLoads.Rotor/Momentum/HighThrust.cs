@@ -11,10 +11,10 @@ namespace BladeLoads.Rotor.Momentum;
 public static class HighThrust
 {
     /// <summary>Loading beyond which the relation of glauert-1935 holds: a = 1/3.</summary>
-    private const double GlauertLoading = 0.5;
+    internal const double GlauertLoading = 0.5;
 
     /// <summary>Loading beyond which the relation of buhl-2005 holds: a = 0.4.</summary>
-    private const double BuhlLoading = 2.0 / 3;
+    internal const double BuhlLoading = 2.0 / 3;
 
     /// <summary>
     /// Thrust coefficient of an annulus. Momentum theory <c>4 F a (1 - a)</c>; beyond a = 1/3, glauert-1935:

@@ -28,6 +28,9 @@ public static class LossFactor
     public static double Hub(int bladeCount, double radius, double hubRadius, double inflowAngle)
         => Of(HubExponent(bladeCount, radius, hubRadius), Math.Abs(Math.Sin(inflowAngle)));
 
+    /// <summary>Below this the exponential is lost beside 1 in the factor's last digit.</summary>
+    internal const double NegligibleExponent = -40;
+
     /// <summary>What is divided by <c>abs(sin phi)</c> in the tip's exponential; 0 or less.</summary>
     internal static double TipExponent(int bladeCount, double radius, double tipRadius)
         => -bladeCount * (tipRadius - radius) / (2 * radius);
@@ -39,8 +42,7 @@ public static class LossFactor
     internal static double Of(double exponent, double sine)
     {
         var f = exponent / sine;
-        // Below this the exponential is lost beside 1 in the factor's last digit.
-        if (!(f > -37))
+        if (!(f > NegligibleExponent))
             return 1;
         return 2 / Math.PI * Math.Acos(Math.Exp(f));
     }

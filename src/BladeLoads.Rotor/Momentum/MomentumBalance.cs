@@ -6,7 +6,8 @@ internal static class MomentumBalance
     /// <summary>rad; a root is closed until its bracket is no wider than this.</summary>
     public const double Tolerance = 1e-12;
 
-    private const double Edge = 1e-6;
+    /// <summary>rad; how near to 0 and to pi an inflow angle is looked for.</summary>
+    public const double Edge = 1e-6;
 
     /// <summary>
     /// The balance of an annulus: the first sign change of the residual that a scan of 2,000 equal steps shows on [1e-6, pi/2], else the one

@@ -35,20 +35,27 @@ internal ref struct SignChanges
     {
         var search = new SignChanges(in annulus, from, to, found);
         var (first, last) = (search.ProbeAt(0), search.ProbeAt(Steps));
-        var start = search.FirstSplit();
+        var start = FirstSplit(from, to, annulus);
         var middle = search.ProbeAt(start);
         search.Visit(0, first, start, middle);
         search.Visit(start, middle, Steps, last);
         return search;
     }
 
-    // Just beyond the undisturbed inflow angle: from there up a lifting element has no balance, and below there is one, as a rule.
-    private readonly int FirstSplit()
+    /// <summary>
+    /// A node just beyond the undisturbed inflow angle: from there up a lifting element has no balance, and below there is one, as a rule.
+    /// </summary>
+    public static int FirstSplit(double from, double to, in Annulus annulus)
     {
-        var undisturbed = Math.Atan(_annulus.SpeedRatio);
-        var node = (int)((undisturbed - _from) / (_to - _from) * Steps) + 1;
+        var undisturbed = Math.Atan(annulus.SpeedRatio);
+        var node = (int)((undisturbed - from) / (to - from) * Steps) + 1;
         return node is > 1 and < Steps ? node : Steps / 2;
     }
+
+    /// <summary>The inflow angle of a node of the scan, rad.</summary>
+    public static double Node(double from, double to, int node)
+        // The last node is the end itself, so that no rounding carries it past pi/2.
+        => node == Steps ? to : from + (node * ((to - from) / Steps));
 
     private void Visit(int first, in Probe a, int last, in Probe b)
     {
@@ -87,9 +94,7 @@ internal ref struct SignChanges
     private Probe ProbeAt(int node)
     {
         Evaluations++;
-        // The last node is the end itself, so that no rounding carries it past pi/2.
-        var angle = node == Steps ? _to : _from + (node * ((_to - _from) / Steps));
-        return Residual.At(angle, _annulus);
+        return Residual.At(Node(_from, _to, node), _annulus);
     }
 }
 

@@ -2,6 +2,7 @@ using BladeLoads.Rotor.Air;
 using BladeLoads.Rotor.Blades;
 using BladeLoads.Rotor.Loads;
 using BladeLoads.Rotor.Momentum;
+using BladeLoads.Rotor.Momentum.Lanes;
 using BladeLoads.Rotor.Sections;
 
 namespace BladeLoads.Rotor.Operation;
@@ -13,13 +14,14 @@ namespace BladeLoads.Rotor.Operation;
 public sealed class RotorModel
 {
     private readonly Element[] _elements;
+    private readonly Annulus[] _annuli;
+    private readonly Balance[] _balances;
     private readonly ElementState[] _states;
     private readonly AirProperties _air;
     private readonly int _bladeCount;
     private readonly double _cosCone;
     private readonly double _tipRadius;
     private readonly double _hubRadius;
-    private readonly double _logReynoldsFactor;
     private readonly BalanceModel _model;
 
     public RotorModel(RotorCase rotorCase)
@@ -28,8 +30,9 @@ public sealed class RotorModel
         (_air, _bladeCount, _model) = (rotorCase.Air, rotorCase.BladeCount, rotorCase.Model);
         _cosCone = Math.Cos(rotorCase.Cone);
         (_hubRadius, _tipRadius) = (blade.HubRadius, blade.TipRadius);
-        _logReynoldsFactor = Math.Log(_air.Density / _air.DynamicViscosity);
         _elements = [.. BladeElements.Of(blade, _model.Elements, _model.Spacing).Select(e => Prepare(e, rotorCase.Sections))];
+        _annuli = new Annulus[_elements.Length];
+        _balances = new Balance[_elements.Length];
         _states = new ElementState[_elements.Length];
     }
 
@@ -45,6 +48,9 @@ public sealed class RotorModel
     /// <summary>The elements of the operating point solved last, root to tip; overwritten by the next.</summary>
     public ReadOnlySpan<ElementState> Elements => _states;
 
+    /// <summary>The annuli of the operating point solved last.</summary>
+    internal ReadOnlySpan<Annulus> Annuli => _annuli;
+
     /// <summary>Solves one operating point. At rest there is no induction; the undisturbed wind loads the blades.</summary>
     /// <param name="point">Wind speed above 0, rotor speed 0 or above.</param>
     /// <returns>The loads; null where an element is unbalanced. <see cref="Elements"/> holds the elements.</returns>
@@ -52,7 +58,14 @@ public sealed class RotorModel
     {
         Solves++;
         for (var i = 0; i < _elements.Length; i++)
-            _states[i] = SolveElement(_elements[i], point);
+            _annuli[i] = AnnulusOf(_elements[i], point);
+        if (point.RotorSpeed > 0)
+            BalanceLanes.Solve(_annuli, _balances);
+        else
+            for (var i = 0; i < _elements.Length; i++)
+                _balances[i] = Balance.AtRest(_annuli[i]);
+        for (var i = 0; i < _elements.Length; i++)
+            _states[i] = StateOf(_elements[i], _annuli[i], _balances[i], point);
         return Sum(point);
     }
 
@@ -67,13 +80,18 @@ public sealed class RotorModel
             _model.HubLoss ? LossFactor.HubExponent(_bladeCount, e.Radius, _hubRadius) : double.NegativeInfinity);
     }
 
-    private ElementState SolveElement(in Element e, in OperatingPoint point)
+    private (double Normal, double Tangential) UndisturbedSpeeds(in Element e, in OperatingPoint point)
+        => (point.WindSpeed * _cosCone, point.RotorSpeed * e.Geometry.Radius * _cosCone);
+
+    private double Reynolds(in Element e, double normalSpeed, double tangentialSpeed)
+        => _air.Density * Math.Sqrt((normalSpeed * normalSpeed) + (tangentialSpeed * tangentialSpeed)) * e.Geometry.Chord
+            / _air.DynamicViscosity;
+
+    private Annulus AnnulusOf(in Element e, in OperatingPoint point)
     {
-        var normalSpeed = point.WindSpeed * _cosCone;
-        var tangentialSpeed = point.RotorSpeed * e.Geometry.Radius * _cosCone;
-        var undisturbed = Math.Sqrt((normalSpeed * normalSpeed) + (tangentialSpeed * tangentialSpeed)) * e.Geometry.Chord;
-        var logReynolds = _logReynoldsFactor + Math.Log(undisturbed);
-        var annulus = new Annulus
+        var (normalSpeed, tangentialSpeed) = UndisturbedSpeeds(e, point);
+        var logReynolds = Math.Log(Reynolds(e, normalSpeed, tangentialSpeed));
+        return new Annulus
         {
             Solidity = e.Solidity,
             SpeedRatio = normalSpeed / tangentialSpeed,
@@ -88,13 +106,12 @@ public sealed class RotorModel
             HeavyLoading = _model.HeavyLoading,
             DragInBalance = _model.BalanceWith == BalanceWith.LiftAndDrag ? 1 : 0,
         };
-        var balance = tangentialSpeed > 0 ? MomentumBalance.Solve(annulus) : Balance.AtRest(annulus);
-        return StateOf(e, annulus, balance, normalSpeed, tangentialSpeed, _air.Density * undisturbed / _air.DynamicViscosity);
     }
 
-    private ElementState StateOf(
-        in Element e, in Annulus annulus, in Balance balance, double normalSpeed, double tangentialSpeed, double reynolds)
+    private ElementState StateOf(in Element e, in Annulus annulus, in Balance balance, in OperatingPoint point)
     {
+        var (normalSpeed, tangentialSpeed) = UndisturbedSpeeds(e, point);
+        var reynolds = Reynolds(e, normalSpeed, tangentialSpeed);
         var (induction, phi) = (balance.Induction, balance.InflowAngle);
         var marks = (balance.SeveralBalances ? ElementMarks.SeveralBalances : 0)
             | (annulus.IsOutsideReynolds ? ElementMarks.OutsideReynolds : 0);

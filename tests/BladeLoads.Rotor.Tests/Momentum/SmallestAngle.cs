@@ -1,5 +1,4 @@
 using BladeLoads.Rotor.Momentum;
-using BladeLoads.Rotor.Sections;
 
 namespace BladeLoads.Rotor.Tests.Momentum;
 
@@ -22,7 +21,7 @@ public sealed class SmallestAngle
         var other = InventedRotor.SectionByFormula("other", stallDeg + 1, dropWidthDeg / 2).Table;
         for (var i = 0; i < 500; i++)
         {
-            var annulus = RandomAnnulus(random, table, other);
+            var annulus = RandomAnnuli.One(random, table, other);
             foreach (var (from, to) in new[] { (1e-6, Math.PI / 2), (-Math.PI / 4, -1e-6), (Math.PI / 2, Math.PI - 1e-6) })
             {
                 var expected = ScanWhole(annulus, from, to);
@@ -50,7 +49,7 @@ public sealed class SmallestAngle
         var (kept, rose) = (0, 0);
         for (var i = 0; i < 20_000; i++)
         {
-            var annulus = RandomAnnulus(random, table, table);
+            var annulus = RandomAnnuli.One(random, table, table);
             var branch = random.Next(3);
             var (lo, hi) = branch == 0 ? (1e-4, Math.PI / 2) : branch == 1 ? (-Math.PI / 4, -1e-4) : (Math.PI / 2, Math.PI - 1e-4);
             var from = lo + (random.NextDouble() * (hi - lo));
@@ -88,27 +87,5 @@ public sealed class SmallestAngle
             before = residual;
         }
         return found;
-    }
-
-    private static Annulus RandomAnnulus(Random random, SectionTable inner, SectionTable outer)
-    {
-        var radius = 0.1 + (0.89 * random.NextDouble());
-        var tipSpeedRatio = 0.3 * Math.Exp(random.NextDouble() * Math.Log(80));
-        var weight = random.Next(2) * random.NextDouble();
-        return new Annulus
-        {
-            Solidity = 0.01 + (0.6 * random.NextDouble() * random.NextDouble()),
-            SpeedRatio = 1 / (tipSpeedRatio * radius),
-            SectionAngle = double.DegreesToRadians(-15 + (random.NextDouble() * (random.Next(3) == 0 ? 105 : 30))),
-            TipExponent = random.Next(4) == 0 ? double.NegativeInfinity : LossFactor.TipExponent(3, radius, 1),
-            HubExponent = random.Next(4) == 0 ? double.NegativeInfinity : LossFactor.HubExponent(3, radius, 0.08),
-            Inner = inner,
-            Outer = outer,
-            OuterWeight = weight,
-            InnerPlace = inner.Place(Math.Log(1e6)),
-            OuterPlace = outer.Place(Math.Log(1e6)),
-            HeavyLoading = random.Next(2) == 0 ? HeavyLoading.Glauert1935 : HeavyLoading.Buhl2005,
-            DragInBalance = random.Next(2),
-        };
     }
 }
