@@ -46,6 +46,10 @@ public sealed record ProgressReading(int Done, int Cases, TimeSpan Elapsed, Time
     /// <summary><c>7 of 12 cases, 0:03 left, 21000 solves/s</c>.</summary>
     public string Sentence => string.Create(CultureInfo.InvariantCulture, $"{Done} of {Cases} cases, {LeftText}{SolvesPerSecond:0} solves/s");
 
+    /// <summary>The last word on a run: <c>12 of 12 cases, 21000 solves/s, 3.2 s</c>.</summary>
+    public string ClosingSentence
+        => string.Create(CultureInfo.InvariantCulture, $"{(this with { Left = null }).Sentence}, {Elapsed.TotalSeconds:0.0} s");
+
     private string LeftText => Left is not { } left || Done == Cases
         ? ""
         : string.Create(CultureInfo.InvariantCulture, $"{(long)left.TotalMinutes}:{left.Seconds:00} left, ");

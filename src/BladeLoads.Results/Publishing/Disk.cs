@@ -40,11 +40,18 @@ public sealed partial class Disk : IDisk
     {
         if (Directory.Exists(to))
             return false;
-        if (File.Exists(from))
-            File.Move(from, to, overwrite: true);
-        else
-            Directory.Move(from, to);
-        return true;
+        try
+        {
+            if (File.Exists(from))
+                File.Move(from, to, overwrite: true);
+            else
+                Directory.Move(from, to);
+            return true;
+        }
+        catch (IOException) when (Directory.Exists(to))
+        {
+            return false;   // another run was faster by a moment
+        }
     }
 
     public bool TryExchange(string one, string other)

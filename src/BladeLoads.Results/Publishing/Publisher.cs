@@ -39,6 +39,20 @@ public sealed class Publisher : IDisposable
         }
     }
 
+    /// <summary>Removes what killed runs left unfinished, where there is any and the system lets us; otherwise touches nothing.</summary>
+    public static void TidyIfPossible(ResultsFolder folder, IDisk disk)
+    {
+        try
+        {
+            if (RunMark.IsAnyIn(folder.Study))
+                Open(folder, disk).Dispose();
+        }
+        catch (Exception e) when (e is NoRoomForResultsException or IOException or UnauthorizedAccessException)
+        {
+            // Looking at results needs no permission to write.
+        }
+    }
+
     /// <summary>Publishes the folder of a case; one that was there before is replaced.</summary>
     /// <exception cref="IOException">The system refused; what was there before is there still, or else the new result is, whole.</exception>
     /// <exception cref="UnauthorizedAccessException">As above.</exception>

@@ -37,6 +37,10 @@ internal sealed partial class RunMark : IDisposable
     public string HiddenPath(string name, string ending)
         => Path.Join(_folder, string.Create(CultureInfo.InvariantCulture, $".{Shortened(name)}.{_run}-{Interlocked.Increment(ref _names)}.{ending}"));
 
+    /// <summary>Whether a run, living or dead, has something hidden in the folder.</summary>
+    public static bool IsAnyIn(string folder)
+        => Directory.Exists(folder) && Directory.EnumerateFileSystemEntries(folder, ".*").Any(path => OwnedName().IsMatch(Path.GetFileName(path)));
+
     /// <summary>
     /// Removes what runs left that were killed: their unfinished writes, and their locks. A replaced result whose successor never came
     /// into its place is put back. What belongs to a living run is left alone.

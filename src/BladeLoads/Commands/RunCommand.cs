@@ -37,13 +37,15 @@ internal static class RunCommand
         if (!request.Quiet)
             surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, due.Length));
 
+        if (due.IsEmpty)
+            Publisher.TidyIfPossible(results, surroundings.Disk);
         using var publisher = new PublisherWhenNeeded(results, surroundings.Disk);
         var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, signals, surroundings);
         var rows = StudySummary.Rows(wholePlan, run.Outcomes);
+        var shown = RowsOf(plan, rows);
         if (run.NoRoom is null)
             StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
-        var shown = RowsOf(plan, rows);
-        if (!request.Quiet)
+        if (run.NoRoom is null && !request.Quiet)
             SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
         return Tell(run, shown, study.Asked, signals, surroundings);
     }

@@ -1,4 +1,3 @@
-using System.Globalization;
 using BladeLoads.Batch.Work;
 
 namespace BladeLoads.Screen;
@@ -21,8 +20,7 @@ internal static class PlainProgress
             error.WriteLine(progress.Read().Sentence);
             told = time.GetTimestamp();
         }
-        var end = progress.Read();
-        error.WriteLine(string.Create(CultureInfo.InvariantCulture, $"{end.Sentence}, {end.Elapsed.TotalSeconds:0.0} s"));
+        error.WriteLine(progress.Read().ClosingSentence);
         return running.GetAwaiter().GetResult();
     }
 }

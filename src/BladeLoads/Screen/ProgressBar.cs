@@ -29,7 +29,7 @@ internal static class ProgressBar
                     while (Task.WaitAny([running], Look) < 0);
                     var end = progress.Read();
                     bar.Value = end.Done;
-                    bar.Description = Markup.Escape(end.Sentence);
+                    bar.Description = Markup.Escape(end.ClosingSentence);
                     return running.GetAwaiter().GetResult();
                 });
         }

@@ -37,9 +37,17 @@ public class SpanwiseTableTests
     {
         var element = FellRotor.Element(0) with
         {
-            Twist = 0, InflowAngle = double.NaN, AngleOfAttack = double.NaN, AxialInduction = double.NaN, TangentialInduction = double.NaN,
-            LossFactor = double.NaN, LiftCoefficient = double.NaN, DragCoefficient = double.NaN, NormalForcePerLength = double.NaN,
-            TangentialForcePerLength = double.NaN, Marks = ElementMarks.Unbalanced | ElementMarks.OutsideReynolds,
+            Twist = 0,
+            InflowAngle = double.NaN,
+            AngleOfAttack = double.NaN,
+            AxialInduction = double.NaN,
+            TangentialInduction = double.NaN,
+            LossFactor = double.NaN,
+            LiftCoefficient = double.NaN,
+            DragCoefficient = double.NaN,
+            NormalForcePerLength = double.NaN,
+            TangentialForcePerLength = double.NaN,
+            Marks = ElementMarks.Unbalanced | ElementMarks.OutsideReynolds,
         };
         var point = FellRotor.Point(2) with { Elements = [element] };
         Assert.Equal(

@@ -99,7 +99,9 @@ public class SummaryTableTests
 
     private static CaseSummary Summary(double cp, double flapwise, double? rated) => CaseSummary.Of(FellRotor.Curve(FellRotor.Rotor())) with
     {
-        BestPowerCoefficient = new Extreme(cp, 8), LargestFlapwiseMoment = new Extreme(flapwise, 8), RatedWindSpeed = rated,
+        BestPowerCoefficient = new Extreme(cp, 8),
+        LargestFlapwiseMoment = new Extreme(flapwise, 8),
+        RatedWindSpeed = rated,
     };
 
     private static string[] Lines(string? baseline, params SummaryRow[] rows)

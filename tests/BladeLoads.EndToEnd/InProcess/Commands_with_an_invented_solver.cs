@@ -69,9 +69,10 @@ public sealed class Commands_with_an_invented_solver : IDisposable
     [InlineData(5, "the disk reports an input/output error")]
     public void A_disk_that_takes_no_more_is_told_in_one_line_with_exit_code_3(int errno, string reason)
     {
-        var (code, _, error) = Run(Study("a", "b", "c"), disk: new FailingDisk(1, () => new IOException("x", errno)));
+        var (code, text, error) = Run(Study("a", "b", "c"), disk: new FailingDisk(1, () => new IOException("x", errno)));
         Assert.Equal(3, code);
         Assert.EndsWith($"\ncannot write results into {Path.Join(_folder.Path, "fell")}: {reason}; 3 cases not run\n", error, StringComparison.Ordinal);
+        Assert.Equal("3 cases: 3 missing; solving 3\n", text);
         Assert.False(File.Exists(Path.Join(_folder.Path, "fell", "summary.csv")));
     }
 
@@ -123,7 +124,9 @@ public sealed class Commands_with_an_invented_solver : IDisposable
         File.WriteAllText(Path.Join(_folder.Path, "bad.toml"), "[control]\n\ttip_speed = 7\e # much too fast\n");
         var study = FellRotor.Study() with
         {
-            Folder = _folder.Path, Rejected = ["bad"], Errors = [new("bad.toml", 2, 2, "unknown key 'tip_speed' in [control]")],
+            Folder = _folder.Path,
+            Rejected = ["bad"],
+            Errors = [new("bad.toml", 2, 2, "unknown key 'tip_speed' in [control]")],
         };
         var (code, text, _) = Run(() => study, "check", isTerminal: true);
         Assert.Equal(2, code);

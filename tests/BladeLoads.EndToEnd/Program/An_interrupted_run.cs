@@ -44,6 +44,26 @@ public sealed class An_interrupted_run : IDisposable
         Assert.Empty(Hidden());
     }
 
+    [Fact]
+    public void Leaves_nothing_hidden_behind_once_all_is_current()
+    {
+        Assert.Equal(0, Started.Run(_folder.Path, "run", "beck", "--only", "clean").ExitCode);
+        Directory.CreateDirectory(Path.Join(_results, ".slow.0123456789ab-1.new"));   // as a killed run leaves it
+        Assert.Equal(0, Started.Run(_folder.Path, "run", "beck", "--only", "clean").ExitCode);
+        Assert.Empty(Hidden());
+    }
+
+    [Fact]
+    public void Two_runs_at_once_spoil_nothing()
+    {
+        string[] command = ["run", "beck", "--all", "--only", "long~density_kg_m3-1.00*"];   // 19 variants
+        using var one = Started.With(_folder.Path, new Dictionary<string, string>(), command);
+        using var other = Started.With(_folder.Path, new Dictionary<string, string>(), command);
+        Assert.Equal((0, 0), (one.Wait().ExitCode, other.Wait().ExitCode));
+        Assert.Empty(Hidden());
+        AssertOnlyWholeResults();
+    }
+
     private bool HasResults() => Directory.Exists(_results) && Directory.EnumerateDirectories(_results, "long~*").Skip(2).Any();
 
     private IEnumerable<string> Hidden() => Directory.EnumerateFileSystemEntries(_results, ".*");
