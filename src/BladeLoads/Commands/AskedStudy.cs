@@ -15,10 +15,17 @@ internal sealed record AskedStudy(Study Asked, Study Whole)
     /// <exception cref="StudyNotFoundException">There is nothing at the path that could be a study, or it cannot be read.</exception>
     public static AskedStudy Read(string path, Surroundings surroundings)
     {
+        var asked = ReadAlone(path, surroundings);
+        return new AskedStudy(asked, File.Exists(path) ? WholeOf(asked, surroundings) : asked);
+    }
+
+    /// <summary>What a user pointed at, without the study around it.</summary>
+    /// <exception cref="StudyNotFoundException">As for <see cref="Read"/>.</exception>
+    public static Study ReadAlone(string path, Surroundings surroundings)
+    {
         try
         {
-            var asked = ReservedNames.Rejected(surroundings.ReadStudy(path));
-            return new AskedStudy(asked, File.Exists(path) ? WholeOf(asked, surroundings) : asked);
+            return ReservedNames.Rejected(surroundings.ReadStudy(path));
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
@@ -39,7 +46,7 @@ internal sealed record AskedStudy(Study Asked, Study Whole)
     {
         try
         {
-            var whole = ReservedNames.Rejected(surroundings.ReadStudy(asked.Folder));
+            var whole = ReadAlone(asked.Folder, surroundings);
             var names = whole.Cases.Select(c => c.Name).ToHashSet(StringComparer.Ordinal);
             return asked.Cases.All(c => names.Contains(c.Name)) ? whole : asked;
         }

@@ -7,7 +7,7 @@ internal static class CheckCommand
 {
     public static int Run(string path, Surroundings surroundings)
     {
-        var study = AskedStudy.Read(path, surroundings).Asked;
+        var study = AskedStudy.ReadAlone(path, surroundings);
         FindingLines.Write(study, surroundings.Out, withSource: surroundings.OutIsTerminal);
         surroundings.Out.WriteLine(FindingLines.Closing(study));
         if (study.Cases.IsEmpty)

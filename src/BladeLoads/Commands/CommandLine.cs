@@ -39,6 +39,11 @@ internal static class CommandLine
             surroundings.Error.WriteLine(e.Message);
             return ExitCode.NoRoom;
         }
+        catch (IOException e) when (DiskTrouble.StopsTheRun(e))
+        {
+            surroundings.Error.WriteLine($"cannot write the output: {DiskTrouble.Reason(e)}");   // redirected to a full disk
+            return ExitCode.NoRoom;
+        }
         catch (Exception e)
         {
             surroundings.Error.WriteLine($"fault in BladeLoads, please report: {Printable.Of(e.Message)}");

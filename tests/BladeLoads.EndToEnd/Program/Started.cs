@@ -26,8 +26,21 @@ internal sealed class Started : IDisposable
     }
 
     public static Started With(string workingFolder, IReadOnlyDictionary<string, string> environment, params string[] arguments)
+        => With(workingFolder, environment, "dotnet", [Program, .. arguments]);
+
+    /// <summary>The program with its arguments and redirections as a shell reads them.</summary>
+    public static Finished RunInShell(string workingFolder, string line)
     {
-        var start = new ProcessStartInfo("dotnet", [Path.Join(AppContext.BaseDirectory, "bladeloads.dll"), .. arguments])
+        using var started = With(workingFolder, new Dictionary<string, string>(), "sh", ["-c", $"exec dotnet '{Program}' {line}"]);
+        return started.Wait();
+    }
+
+    private static string Program { get; } = Path.Join(AppContext.BaseDirectory, "bladeloads.dll");
+
+    private static Started With(
+        string workingFolder, IReadOnlyDictionary<string, string> environment, string command, IReadOnlyList<string> arguments)
+    {
+        var start = new ProcessStartInfo(command, arguments)
         {
             WorkingDirectory = workingFolder,
             RedirectStandardOutput = true,

@@ -180,6 +180,13 @@ public sealed class The_program : IDisposable
         Assert.Single(run.Error.TrimEnd('\n').Split('\n'));
     }
 
+    [Fact]
+    public void Tells_in_one_line_that_its_output_cannot_be_written()
+    {
+        var full = Started.RunInShell(_folder.Path, "plan beck > /dev/full");
+        Assert.Equal(new Finished(3, "", "cannot write the output: no room left on the disk\n"), full);
+    }
+
     [Theory]
     [InlineData]
     [InlineData("run")]
