@@ -63,15 +63,7 @@ public static class HighThrust
         return v;
     }
 
-    // The published root a = (2Fk - 4/9)/(g1 + sqrt g2), g1 = 2Fk - (10/9 - F), g2 = 2Fk - F(4/3 - F), is 0/0 at 2Fk = 4/9 when F < 1/3;
-    // its other form (g1 - sqrt g2)/(2Fk - 25/9 + 2F) is 0/0 at 2Fk = 25/9 - 2F. Each serves where it is sound.
-    private static double InverseByBuhl(double k, double F)
-    {
-        var x = 2 * F * k;
-        var g1 = x - ((10.0 / 9) - F);
-        var root = Math.Sqrt(x - (F * ((4.0 / 3) - F)));
-        return g1 >= 0
-            ? (g1 + root) / (root + F - (2.0 / 3))
-            : ((25.0 / 9) - (2 * F) - x) / ((5.0 / 3) - F - root);
-    }
+    // The relation with v = 1/(1 - a) is 2v^2 + (4F - 20/3)v + 50/9 - 4F = 4Fk. Of the published root, a = (2Fk - 4/9)/(g1 + sqrt g2), this
+    // is another way to write 1/(1 - a), without its 0/0 at 2Fk = 4/9.
+    private static double InverseByBuhl(double k, double F) => (5.0 / 3) - F + Math.Sqrt((2 * F * k) - (F * ((4.0 / 3) - F)));
 }

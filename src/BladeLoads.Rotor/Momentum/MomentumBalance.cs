@@ -18,32 +18,29 @@ internal static class MomentumBalance
     {
         var evaluations = 0;
         Span<Bracket> found = stackalloc Bracket[SignChanges.Kept];
-        return TryInterval(Edge, Math.PI / 2, nearestZeroIsLast: false, annulus, found, ref evaluations)
-            ?? TryInterval(-Math.PI / 4, -Edge, nearestZeroIsLast: true, annulus, found, ref evaluations)
-            ?? TryInterval(Math.PI / 2, Math.PI - Edge, nearestZeroIsLast: false, annulus, found, ref evaluations)
+        return TryInterval(Edge, Math.PI / 2, downwards: false, annulus, found, ref evaluations)
+            ?? TryInterval(-Math.PI / 4, -Edge, downwards: true, annulus, found, ref evaluations)
+            ?? TryInterval(Math.PI / 2, Math.PI - Edge, downwards: false, annulus, found, ref evaluations)
             ?? new Balance(double.NaN, double.NaN, evaluations, default, SeveralBalances: false);
     }
 
     private static Balance? TryInterval(
-        double from, double to, bool nearestZeroIsLast, in Annulus annulus, Span<Bracket> found, ref int evaluations)
+        double from, double to, bool downwards, in Annulus annulus, Span<Bracket> found, ref int evaluations)
     {
-        var changes = SignChanges.Between(from, to, in annulus, found);
+        var changes = SignChanges.Between(from, to, downwards, in annulus, found);
         evaluations += changes.Evaluations;
-        Balance? answer = null;
-        var flows = 0;
+        Balance? first = null;
         for (var i = 0; i < Math.Min(changes.Count, SignChanges.Kept); i++)
         {
             var root = RootBracket.Close(found[i], annulus, Tolerance, ref evaluations);
             var induction = Residual.InductionAt(root.InflowAngle, annulus);
-            if (!induction.IsFlow)
+            if (root.IsJump(annulus) || !induction.IsFlow)
                 continue;
-            flows++;
-            if (answer is null || nearestZeroIsLast)
-                answer = new Balance(root.InflowAngle, root.Residual, 0, induction, SeveralBalances: false);
+            if (first is { } answer)
+                return answer with { Evaluations = evaluations, SeveralBalances = true };
+            first = new Balance(root.InflowAngle, root.Residual, 0, induction, SeveralBalances: false);
         }
-        if (answer is not { } balance)
-            return null;
-        return balance with { Evaluations = evaluations, SeveralBalances = flows > 1 };
+        return first is { } only ? only with { Evaluations = evaluations } : null;
     }
 }
 

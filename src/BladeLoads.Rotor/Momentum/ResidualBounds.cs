@@ -69,10 +69,13 @@ internal static class ResidualBounds
         }
     }
 
-    /// <summary>True where the residual is proved to rise all the way from <paramref name="a"/> to <paramref name="b"/>, both in (0, pi/2].</summary>
+    /// <summary>
+    /// True where the residual is proved to rise all the way from <paramref name="a"/> to <paramref name="b"/>, both in (0, pi/2]. Never
+    /// where the angle of attack passes +-180 degrees between them: lift may jump there.
+    /// </summary>
     public static bool Rises(in Probe a, in Probe b, in Annulus annulus, in Sections.CoefficientRange range)
     {
-        if (!(a.InflowAngle > 0) || b.Cosine < 0)
+        if (!(a.InflowAngle > 0) || b.Cosine < 0 || annulus.AngleOfAttack(a.InflowAngle) > annulus.AngleOfAttack(b.InflowAngle))
             return false;
         var lambda = annulus.SpeedRatio;
         // The logarithmic derivative of each of the two losses by the angle lies between -cot(phi)/2 and 0, that of 1/F within this.

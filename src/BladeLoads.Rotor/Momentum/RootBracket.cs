@@ -40,4 +40,11 @@ internal static class RootBracket
 }
 
 /// <summary>An inflow angle, rad, and what is left of the balance there.</summary>
-internal readonly record struct Root(double InflowAngle, double Residual);
+internal readonly record struct Root(double InflowAngle, double Residual)
+{
+    /// <summary>
+    /// Whether the residual jumps across 0 here instead of vanishing: where a table does not go round, its ends meet at +-180 degrees with
+    /// different lift. That is no balance.
+    /// </summary>
+    public bool IsJump(in Annulus annulus) => Math.Abs(Residual * Math.Sin(InflowAngle)) > 1e-8 * (1 + annulus.SpeedRatio);
+}

@@ -1,8 +1,7 @@
 namespace BladeLoads.Rotor.Momentum;
 
 /// <summary>
-/// Finds the sign changes of the residual that a scan of <see cref="Steps"/> equal steps over an interval would show, in rising order,
-/// without making most of the scan: a stretch of it is left out only where the residual is proved to keep its sign there, or to rise.
+/// Finds the sign changes of the residual that a scan of <see cref="Steps"/> equal steps over an interval would show, without making most of the scan: a stretch of it is left out only where the residual is proved to keep its sign there, or to rise.
 /// </summary>
 internal ref struct SignChanges
 {
@@ -15,12 +14,13 @@ internal ref struct SignChanges
     private readonly ref readonly Annulus _annulus;
     private readonly double _from;
     private readonly double _to;
+    private readonly bool _downwards;
     private readonly Span<Bracket> _found;
 
-    private SignChanges(ref readonly Annulus annulus, double from, double to, Span<Bracket> found)
+    private SignChanges(ref readonly Annulus annulus, double from, double to, bool downwards, Span<Bracket> found)
     {
         _annulus = ref annulus;
-        (_from, _to) = (from, to);
+        (_from, _to, _downwards) = (from, to, downwards);
         _found = found;
     }
 
@@ -30,15 +30,16 @@ internal ref struct SignChanges
 
     /// <param name="from">rad; the interval lies on one side of 0 and of pi/2.</param>
     /// <param name="to">rad, above <paramref name="from"/>.</param>
+    /// <param name="downwards">Whether the brackets are wanted in falling order; else in rising.</param>
     /// <param name="found">Receives the brackets; <see cref="Kept"/> long.</param>
-    public static SignChanges Between(double from, double to, ref readonly Annulus annulus, Span<Bracket> found)
+    public static SignChanges Between(
+        double from, double to, bool downwards, ref readonly Annulus annulus, Span<Bracket> found)
     {
-        var search = new SignChanges(in annulus, from, to, found);
+        var search = new SignChanges(in annulus, from, to, downwards, found);
         var (first, last) = (search.ProbeAt(0), search.ProbeAt(Steps));
         var start = FirstSplit(from, to, annulus);
         var middle = search.ProbeAt(start);
-        search.Visit(0, first, start, middle);
-        search.Visit(start, middle, Steps, last);
+        search.VisitHalves(0, first, start, middle, Steps, last);
         return search;
     }
 
@@ -80,8 +81,16 @@ internal ref struct SignChanges
 
         var middle = (first + last) / 2;
         var m = ProbeAt(middle);
+        VisitHalves(first, a, middle, m, last, b);
+    }
+
+    private void VisitHalves(int first, in Probe a, int middle, in Probe m, int last, in Probe b)
+    {
+        if (_downwards)
+            Visit(middle, m, last, b);
         Visit(first, a, middle, m);
-        Visit(middle, m, last, b);
+        if (!_downwards)
+            Visit(middle, m, last, b);
     }
 
     private void Keep(in Bracket bracket)

@@ -25,7 +25,7 @@ public sealed class SmallestAngle
             foreach (var (from, to) in new[] { (1e-6, Math.PI / 2), (-Math.PI / 4, -1e-6), (Math.PI / 2, Math.PI - 1e-6) })
             {
                 var expected = ScanWhole(annulus, from, to);
-                var changes = SignChanges.Between(from, to, in annulus, found);
+                var changes = SignChanges.Between(from, to, downwards: false, in annulus, found);
                 Assert.Equal(expected.Count, changes.Count);
                 for (var j = 0; j < expected.Count; j++)
                 {

@@ -78,7 +78,7 @@ internal static class BalanceLanes
         for (var i = 0; i < AnnulusLanes.Count; i++)
         {
             var induction = plain[i] != 0 ? Residual.InductionAt(roots[i], eight[i]) : default;
-            balances[i] = induction.IsFlow
+            balances[i] = induction.IsFlow && !new Root(roots[i], residuals[i]).IsJump(eight[i])
                 ? new Balance(roots[i], residuals[i], Probes + rounds, induction, SeveralBalances: false)
                 : MomentumBalance.Solve(eight[i]);
         }

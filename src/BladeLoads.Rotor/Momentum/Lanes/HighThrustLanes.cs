@@ -38,13 +38,5 @@ internal static class HighThrustLanes
     }
 
     private static Vector512<double> InverseByBuhl(Vector512<double> k, Vector512<double> F)
-    {
-        var x = 2 * F * k;
-        var g1 = x - (Vector512.Create(10.0 / 9) - F);
-        var root = Vector512.Sqrt(x - (F * (Vector512.Create(4.0 / 3) - F)));
-        return Vector512.ConditionalSelect(
-            Vector512.GreaterThanOrEqual(g1, Vector512<double>.Zero),
-            (g1 + root) / (root + F - Vector512.Create(2.0 / 3)),
-            (Vector512.Create(25.0 / 9) - (2 * F) - x) / (Vector512.Create(5.0 / 3) - F - root));
-    }
+        => Vector512.Create(5.0 / 3) - F + Vector512.Sqrt((2 * F * k) - (F * (Vector512.Create(4.0 / 3) - F)));
 }
