@@ -4,21 +4,23 @@ namespace BladeLoads.Studies;
 internal static class Nearest
 {
     /// <summary>
-    /// Within a third of its length in letters changed, else the closest that contains it or is contained in it; letter case does not
-    /// count. Null when nothing is near.
+    /// Within a third of its length in letters changed, else the closest that contains it or is contained in it; letter case does
+    /// not count. Null when nothing is near.
     /// </summary>
     public static string? Of(string found, IEnumerable<string> known)
     {
         var text = found.ToLowerInvariant();
-        var ranked = known.Select(name => (name, changes: Changes(text, name.ToLowerInvariant()))).OrderBy(x => x.changes).ToList();
+        var ranked = known
+            .Select(name => (name, lower: name.ToLowerInvariant(), changes: Changes(text, name.ToLowerInvariant())))
+            .OrderBy(x => x.changes).ToList();
         var close = ranked.FirstOrDefault(x => x.changes <= Math.Max(1, Math.Min(x.name.Length, found.Length) / 3));
         if (close.name is not null)
             return close.name;
         return ranked.FirstOrDefault(x => found.Length >= 3 && x.name.Length >= 3
-            && (x.name.Contains(text, StringComparison.OrdinalIgnoreCase) || text.Contains(x.name, StringComparison.OrdinalIgnoreCase))).name;
+            && (x.lower.Contains(text, StringComparison.Ordinal) || text.Contains(x.lower, StringComparison.Ordinal))).name;
     }
 
-    // Letters put in, left out, changed, or two exchanged, each counts 1. What is longer than any name of ours is far from all of them.
+    // Letters put in, left out, changed, or two exchanged: each counts 1. What is longer than any name of ours is far from all.
     private static int Changes(string a, string b)
     {
         if (a.Length > 100 || b.Length > 300)
@@ -32,7 +34,8 @@ internal static class Nearest
                     changes[i, j] = i + j;
                     continue;
                 }
-                var best = Math.Min(Math.Min(changes[i - 1, j], changes[i, j - 1]) + 1, changes[i - 1, j - 1] + (a[i - 1] == b[j - 1] ? 0 : 1));
+                var putInOrLeftOut = Math.Min(changes[i - 1, j], changes[i, j - 1]) + 1;
+                var best = Math.Min(putInOrLeftOut, changes[i - 1, j - 1] + (a[i - 1] == b[j - 1] ? 0 : 1));
                 if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1])
                     best = Math.Min(best, changes[i - 2, j - 2] + 1);
                 changes[i, j] = best;

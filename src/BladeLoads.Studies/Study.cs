@@ -27,8 +27,9 @@ public sealed record InputFinding(string File, int Line, int Column, string Text
 /// <param name="Fingerprint">SHA-256, 64 lower-case hexadecimal digits, over every value that determines the result.</param>
 /// <param name="Inputs">Every file that was read for it, the case file first.</param>
 /// <param name="Values">
-/// Every value that determines the result, defaults filled in: key as in a case file, value as canonical text (ordinal order). Tables
-/// stand as the SHA-256 of their parsed values: <c>blade</c>, <c>section.NAME</c>. The fingerprint is over these and nothing else.
+/// Every value that determines the result, defaults filled in: key as in a case file, value as canonical text (ordinal order).
+/// Tables stand as the SHA-256 of their parsed values: <c>blade</c>, <c>section.NAME</c>, <c>control.schedule</c>. The
+/// fingerprint is over these and nothing else.
 /// </param>
 public sealed record StudyCase(
     string Name, string Title, string File, RotorCase Rotor, ImmutableArray<double>? Spanwise, string Fingerprint,

@@ -16,12 +16,13 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
         if (string.IsNullOrWhiteSpace(path) || path.Contains('\0'))
             throw new StudyNotFoundException("no study named; name a study folder or a case file");
         var fullPath = Path.TrimEndingDirectorySeparator(Path.GetFullPath(path));
-        var shown = VisibleText.Escape($"'{path}'");
+        var shown = VisibleText.Escape(VisibleText.Quote(path));
         return files.Kind(fullPath) switch
         {
             EntryKind.Folder => WholeStudy(fullPath, shown, files),
             EntryKind.File => OneCase(fullPath, shown),
-            EntryKind.Missing => throw new StudyNotFoundException($"no study folder or case file {shown}; {Beside(fullPath, files)}"),
+            EntryKind.Missing => throw new StudyNotFoundException(
+                $"no study folder or case file {shown}; {Beside(fullPath, files)}"),
             _ => throw new StudyNotFoundException($"{shown} is not a regular file; name a study folder or a case file (.toml)"),
         };
     }
@@ -29,15 +30,13 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
     private static StudyPlace WholeStudy(string folder, string shown, IStudyFiles files)
     {
         var casesFolder = Path.Combine(folder, StudyReader.CasesFolder);
-        if (files.Kind(casesFolder) != EntryKind.Folder)
+        if (!IsStudy(folder, files))
         {
-            var studies = NamesIn(folder, files).Where(name => files.Kind(Path.Combine(folder, name, StudyReader.CasesFolder)) == EntryKind.Folder);
-            throw new StudyNotFoundException(
-                $"{shown} has no folder 'cases' and so is no study; {VisibleText.Escape(VisibleText.Enumerate(studies, "nor is any folder in it")) switch
-                {
-                    "nor is any folder in it" => "a study keeps its cases in cases/<case>.toml",
-                    var names => $"studies in it: {names}",
-                }}");
+            var studies = NamesIn(folder, files).Where(name => IsStudy(Path.Combine(folder, name), files)).ToList();
+            var hint = studies.Count == 0
+                ? "a study keeps its cases in cases/<case>.toml"
+                : $"studies in it: {VisibleText.Escape(VisibleText.Enumerate(studies, ""))}";
+            throw new StudyNotFoundException($"{shown} has no folder 'cases' and so is no study; {hint}");
         }
         var cases = NamesIn(casesFolder, files).Where(IsCaseFile).Order(StringComparer.Ordinal).ToImmutableArray();
         return cases.IsEmpty
@@ -45,11 +44,15 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
             : new StudyPlace(folder, [.. cases.Select(name => Path.Combine(casesFolder, name))], true);
     }
 
+    private static bool IsStudy(string folder, IStudyFiles files)
+        => files.Kind(Path.Combine(folder, StudyReader.CasesFolder)) == EntryKind.Folder;
+
     private static StudyPlace OneCase(string file, string shown)
     {
         var name = Path.GetFileName(file);
         if (name == StudyReader.StartingValuesFile)
-            throw new StudyNotFoundException($"{shown} holds the starting values of a study and is no case; name its folder or a case file");
+            throw new StudyNotFoundException(
+                $"{shown} holds the starting values of a study and is no case; name its folder or a case file");
         if (!IsCaseFile(name))
             throw new StudyNotFoundException($"{shown} is no case file; a case file ends in .toml");
         var folder = Path.GetDirectoryName(file)!;
@@ -59,7 +62,8 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
 
     // Hidden files are an editor's, not a user's; "..toml" is told, since someone meant it.
     private static bool IsCaseFile(string name)
-        => name.EndsWith(CaseName.Ending, StringComparison.Ordinal) && (name[0] != '.' || name.StartsWith("..", StringComparison.Ordinal) || name == CaseName.Ending);
+        => name.EndsWith(CaseName.Ending, StringComparison.Ordinal)
+            && (name[0] != '.' || name.StartsWith("..", StringComparison.Ordinal) || name == CaseName.Ending);
 
     private static string Beside(string missing, IStudyFiles files)
     {

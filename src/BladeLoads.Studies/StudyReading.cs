@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Globalization;
 using BladeLoads.Studies.Cases;
 using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Tables;
@@ -61,9 +62,14 @@ internal sealed class StudyReading
             return;
         }
         _variantNames.Add(name, [.. variants.Select(variant => variant.Name)]);
-        ImmutableArray<InputFile> inputs = start.Input is null ? [own.Input] : [own.Input, start.Input with { Contents = "starting values" }];
+        var ownInput = complete.Sweep.IsEmpty ? own.Input
+            : own.Input with { Contents = string.Create(CultureInfo.InvariantCulture, $"case file, {variants.Length} variants") };
+        ImmutableArray<InputFile> inputs = [ownInput];
+        if (start.Input is not null)
+            inputs = inputs.Add(start.Input with { Contents = "starting values" });
         foreach (var variant in variants)
-            if (_builder.Build(variant.Name, variant.Title, complete, variant.Entries, inputs) is { } studyCase && own.IsSound && start.IsSound)
+            if (_builder.Build(variant.Name, variant.Title, complete, variant.Entries, inputs) is { } studyCase
+                && own.IsSound && start.IsSound)
                 _cases.Add(studyCase);
             else
                 _rejected.Add(variant.Name);

@@ -60,7 +60,15 @@ internal sealed class MemoryFiles : IStudyFiles
 
     public EntryKind Kind(string path)
     {
-        var real = RealPath(path);
+        string real;
+        try
+        {
+            real = RealPath(path);
+        }
+        catch (IOException)
+        {
+            return EntryKind.Missing;
+        }
         return _files.ContainsKey(real) ? EntryKind.File
             : _folders.Contains(real) ? EntryKind.Folder
             : _others.Contains(real) ? EntryKind.Other : EntryKind.Missing;

@@ -19,7 +19,8 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
     /// <param name="entries">The case's values, those of a variant in their place.</param>
     /// <param name="inputs">The case file and the starting values.</param>
     public StudyCase? Build(
-        string name, string variantTitle, CaseFile file, ImmutableDictionary<string, CaseEntry> entries, ImmutableArray<InputFile> inputs)
+        string name, string variantTitle, CaseFile file, ImmutableDictionary<string, CaseEntry> entries,
+        ImmutableArray<InputFile> inputs)
     {
         var values = new CaseValues(file, entries, findings);
         var title = ReadTitle(values, name);
@@ -38,12 +39,14 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             return null;
 
         var rotor = new RotorCase(
-            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), new AirProperties(density, viscosity), windSpeeds,
-            control.Strategy, control.CutIn, control.CutOut, control.DrivetrainEfficiency, model);
+            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), new AirProperties(density, viscosity),
+            windSpeeds, control.Strategy, control.CutIn, control.CutOut, control.DrivetrainEfficiency, model);
         var determining = values.Determining;
-        ImmutableArray<InputFile> all =
-            [.. inputs, blade.Input, .. sections.Tables.Select(t => t.Input), .. control.Schedule is { } schedule ? [schedule] : Array.Empty<InputFile>()];
-        return new StudyCase(name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), all, determining);
+        inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
+        if (control.Schedule is { } schedule)
+            inputs = inputs.Add(schedule);
+        return new StudyCase(
+            name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), inputs, determining);
     }
 
     private static string ReadTitle(CaseValues values, string name)

@@ -30,23 +30,29 @@ internal sealed record CaseFile(
     public static CaseFile Read(StudyFolder folder, string fullPath, Findings findings)
     {
         var file = folder.RelativePath(fullPath);
-        if (folder.Read(fullPath, findings.Error) is not { } input || TomlText.Parse(input, findings) is not { } top)
+        if (folder.Read(fullPath, StudyFolder.LargestCase, findings.Error) is not { } input
+            || TomlText.Parse(input, findings) is not { } top)
             return Empty(file, isSound: false);
         return new Sorting(file, findings).Sort(top, new InputFile(file, input.Sha256, "case file"));
     }
 
-    /// <summary>The case with what it leaves out taken from the study's starting values, key by key.</summary>
+    /// <summary>
+    /// The case with what it leaves out taken from the study's starting values, key by key. One value in the case takes the place
+    /// of a sweep over the same key there.
+    /// </summary>
     public CaseFile StartingFrom(CaseFile start) => this with
     {
         Entries = start.Entries.SetItems(Entries),
-        Sweep = [.. start.Sweep.Where(s => Sweep.All(own => own.Known != s.Known)), .. Sweep],
+        Sweep = [.. start.Sweep.Where(s => !HasOwn(s.Known)), .. Sweep],
         DoubtfulTables = DoubtfulTables.Union(start.DoubtfulTables),
     };
 
+    private bool HasOwn(KnownKey known) => Entries.ContainsKey(known.Path) || Sweep.Any(own => own.Known == known);
+
     private sealed class Sorting(string file, Findings findings)
     {
-        private readonly ImmutableDictionary<string, CaseEntry>.Builder _entries = ImmutableDictionary.CreateBuilder<string, CaseEntry>(StringComparer.Ordinal);
-        private readonly ImmutableDictionary<string, Place>.Builder _tables = ImmutableDictionary.CreateBuilder<string, Place>(StringComparer.Ordinal);
+        private readonly Dictionary<string, CaseEntry> _entries = new(StringComparer.Ordinal);
+        private readonly Dictionary<string, Place> _tables = new(StringComparer.Ordinal);
         private readonly List<SweepEntry> _sweep = [];
         private readonly HashSet<string> _doubtful = new(StringComparer.Ordinal);
         private bool _isSound = true;
@@ -73,7 +79,9 @@ internal sealed record CaseFile(
                 }
             if (baseline is not null && file != StudyReader.StartingValuesFile)
                 Refuse(baseline.Key, $"baseline is a matter of the whole study; write it in {StudyReader.StartingValuesFile}");
-            return new CaseFile(file, _isSound, input, _entries.ToImmutable(), [.. _sweep], _tables.ToImmutable(), [.. _doubtful], baseline);
+            return new CaseFile(
+                file, _isSound, input, _entries.ToImmutableDictionary(StringComparer.Ordinal), [.. _sweep],
+                _tables.ToImmutableDictionary(StringComparer.Ordinal), [.. _doubtful], baseline);
         }
 
         private void SortTable(TomlEntry tableEntry)
@@ -115,7 +123,8 @@ internal sealed record CaseFile(
                 else if (!known.CanSweep)
                     Refuse(entry.Key, $"'{path}' cannot be swept; write a case for each value");
                 else if (entry.Value is not TomlValue.List list)
-                    Refuse(entry.Value.At, $"'{path}' is {entry.Value.Found}; give the values of a sweep as a list: [{entry.Value.Found.Replace('\'', '"')}]");
+                    Refuse(entry.Value.At, $"'{path}' is {entry.Value.Found}; give the values of a sweep as a list: "
+                        + $"[{entry.Value.Found.Replace('\'', '"')}]");
                 else if (list.Items.IsEmpty)
                     Refuse(list.At, $"'{path}' has no values; give at least one, or leave the key out");
                 else if (_sweep.Any(s => s.Known == known))
@@ -125,7 +134,8 @@ internal sealed record CaseFile(
             }
         }
 
-        private void Add(KnownKey known, TomlEntry entry) => _entries.Add(known.Path, new CaseEntry(known, entry.Key, entry.Value, false));
+        private void Add(KnownKey known, TomlEntry entry)
+            => _entries.Add(known.Path, new CaseEntry(known, entry.Key, entry.Value, IsSwept: false));
 
         private void Refuse(Place at, string text)
         {

@@ -8,7 +8,7 @@ internal static class CaseName
 {
     public const string Ending = ".toml";
 
-    private static readonly string[] Reserved = ["logs", "failures"];
+    private static readonly string[] Reserved = ["logs", "failures", "summary.csv", "changes.csv", "report.html"];
 
     public static string Of(string fullPath) => Path.GetFileName(fullPath)[..^Ending.Length];
 
@@ -18,7 +18,7 @@ internal static class CaseName
         if (SafeName.Problem(name) is { } problem)
             return $"the case name {VisibleText.Quote(name)} {problem}; rename the file, its results get a folder of this name";
         return Reserved.Contains(name, StringComparer.OrdinalIgnoreCase)
-            ? $"the case name '{name}' is kept for a folder of the results; rename the file"
+            ? $"the case name '{name}' is kept for another part of the results; rename the file"
             : null;
     }
 }

@@ -8,8 +8,8 @@ using BladeLoads.Studies.Toml;
 namespace BladeLoads.Studies.Cases;
 
 /// <summary>
-/// The values of one case, read key by key, each checked, reported when wrong, and noted when it determines the result. A value that
-/// is wrong reads as NaN or null; the case is then not sound and is not built.
+/// The values of one case, read key by key, each checked, reported when wrong, and noted when it determines the result. A value
+/// that is wrong reads as NaN or null; the case is then not sound and is not built.
 /// </summary>
 internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, CaseEntry> entries, Findings findings)
 {
@@ -24,6 +24,9 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
     public CaseEntry? Find(string path) => entries.GetValueOrDefault(path);
 
     public bool Has(string path) => entries.ContainsKey(path);
+
+    /// <summary>The value is not the case's own but one that every case starts from.</summary>
+    public bool IsStartingValue(CaseEntry entry) => entry.Key.File != file.File;
 
     /// <summary>Every value noted so far.</summary>
     public ImmutableSortedDictionary<string, string> Determining => _determining.ToImmutable();
@@ -75,7 +78,9 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         if (Find(path) is not { } entry)
             return double.NaN;
         if (entry.Value is not TomlValue.Number number)
-            return NotYet.Sentence(path, entry.Value) is { } sentence ? RefuseYet(entry, sentence) : RefuseValue(path, NotANumber(entry));
+            return NotYet.Sentence(path, entry.Value) is { } sentence
+                ? RefuseYet(entry, sentence)
+                : RefuseValue(path, NotANumber(entry));
         if (!double.IsFinite(number.Value))
             return RefuseValue(path, $"is {number.Found}; give a finite number");
         if (!bounds.Contain(number.Value))

@@ -9,7 +9,8 @@ namespace BladeLoads.Studies.Cases;
 
 /// <summary>What [control] says: the strategy, the wind speeds of operation, the drivetrain.</summary>
 /// <param name="Strategy">Null when an error keeps it from being known.</param>
-internal sealed record ControlValues(Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, InputFile? Schedule);
+internal sealed record ControlValues(
+    Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, InputFile? Schedule);
 
 /// <summary>Reads [control].</summary>
 internal static class ControlReader
@@ -20,8 +21,8 @@ internal static class ControlReader
     {
         [VariableSpeed] =
         [
-            "tip_speed_ratio", "fine_pitch_deg", "min_rotor_speed_rpm", "max_rotor_speed_rpm", "speed_limited_pitch", "above_rated",
-            "thrust_limit_kN",
+            "tip_speed_ratio", "fine_pitch_deg", "min_rotor_speed_rpm", "max_rotor_speed_rpm", "speed_limited_pitch",
+            "above_rated", "thrust_limit_kN",
         ],
         [FixedSpeed] = ["rotor_speed_rpm", "pitch_deg"],
         [BySchedule] = ["schedule"],
@@ -39,13 +40,16 @@ internal static class ControlReader
         if (!values.Has("control.strategy"))
             values.Missing("control.strategy", null);
         var strategy = values.Choice("control.strategy", "", VariableSpeed, FixedSpeed, BySchedule);
+        var read = new ControlValues(null, cutIn, cutOut, efficiency, null);
         if (strategy is null or "")
-            return new ControlValues(null, cutIn, cutOut, efficiency, null);
+            return read;
         RefuseKeysOfOthers(values, strategy);
-        if (strategy == BySchedule)
-            return ReadSchedule(values, windSpeeds, ratedPower, new ControlValues(null, cutIn, cutOut, efficiency, null), folder, tables);
-        Control control = strategy == VariableSpeed ? ReadVariableSpeed(values, ratedPower) : ReadFixedSpeed(values, ratedPower);
-        return new ControlValues(control, cutIn, cutOut, efficiency, null);
+        return strategy switch
+        {
+            VariableSpeed => read with { Strategy = ReadVariableSpeed(values, ratedPower) },
+            FixedSpeed => read with { Strategy = ReadFixedSpeed(values, ratedPower) },
+            _ => ReadSchedule(values, windSpeeds, ratedPower, read, folder, tables),
+        };
     }
 
     private static Control.VariableSpeed ReadVariableSpeed(CaseValues values, double? ratedPower)
@@ -59,8 +63,10 @@ internal static class ControlReader
         var aboveRated = values.Choice("control.above_rated", CaseDefaults.AboveRated(values.Has("control.rated_power_kW")),
             "pitch-to-feather", "pitch-to-stall", "none");
         if (aboveRated == "pitch-to-feather" && !values.Has("control.rated_power_kW"))
-            values.RefuseValue("control.above_rated", "is 'pitch-to-feather' without a rated power; give rated_power_kW or leave above_rated out");
-        return new Control.VariableSpeed(tipSpeedRatio, double.DegreesToRadians(finePitch), RadiansPerSecond(slowest), RadiansPerSecond(fastest),
+            values.RefuseValue("control.above_rated",
+                "is 'pitch-to-feather' without a rated power; give rated_power_kW or leave above_rated out");
+        return new Control.VariableSpeed(
+            tipSpeedRatio, double.DegreesToRadians(finePitch), RadiansPerSecond(slowest), RadiansPerSecond(fastest),
             ratedPower, aboveRated == "pitch-to-feather" ? AboveRated.PitchToFeather : AboveRated.None);
     }
 
@@ -72,7 +78,8 @@ internal static class ControlReader
     }
 
     private static ControlValues ReadSchedule(
-        CaseValues values, ImmutableArray<double> windSpeeds, double? ratedPower, ControlValues rest, StudyFolder folder, StudyTables tables)
+        CaseValues values, ImmutableArray<double> windSpeeds, double? ratedPower, ControlValues rest, StudyFolder folder,
+        StudyTables tables)
     {
         const string path = "control.schedule";
         if (!values.Has(path))
@@ -92,9 +99,11 @@ internal static class ControlReader
         }
         values.Note(path, schedule.Hash);
         var (lowest, highest) = (schedule.Points[0].WindSpeed, schedule.Points[^1].WindSpeed);
-        if (windSpeeds.Where(v => v >= rest.CutIn && v <= rest.CutOut).Where(v => v < lowest || v > highest).ToList() is { Count: > 0 } bare)
-            values.RefuseValue(path, $"{VisibleText.Quote(reference)} runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} m/s "
-                + $"and does not cover {CanonicalText.Of(bare[0])} m/s; add rows, or set cut-in and cut-out within it");
+        var operating = windSpeeds.Where(v => v >= rest.CutIn && v <= rest.CutOut);
+        if (operating.Where(v => v < lowest || v > highest).ToList() is [var bare, ..])
+            values.RefuseValue(path, $"{VisibleText.Quote(reference)} runs from {CanonicalText.Of(lowest)} to "
+                + $"{CanonicalText.Of(highest)} m/s and does not cover {CanonicalText.Of(bare)} m/s; "
+                + "add rows, or set cut-in and cut-out within it");
         return rest with { Strategy = new Control.Schedule(schedule.Points, ratedPower), Schedule = schedule.Input };
     }
 
@@ -104,7 +113,8 @@ internal static class ControlReader
             foreach (var key in keys.Where(_ => other != strategy))
                 if (values.Find($"control.{key}") is { } entry && !ChangesNothing(entry.Value))
                     values.RefuseKey($"control.{key}",
-                        $"'{key}' does not go with strategy '{strategy}', which takes {string.Join(", ", KeysOf[strategy])}; leave it out");
+                        $"'{key}' does not go with strategy '{strategy}', which takes {string.Join(", ", KeysOf[strategy])}; "
+                        + (values.IsStartingValue(entry) ? "write it in the cases that it goes with" : "leave it out"));
     }
 
     private static bool ChangesNothing(TomlValue value) => value is TomlValue.Text { Value: "hold" or "none" };
@@ -114,11 +124,11 @@ internal static class ControlReader
     {
         if (!(low > high))
             return;
-        var (lowKey, highKey) = (values.Find(lowPath), values.Find(highPath)!);
-        if (lowKey is null || highKey.IsSwept)
-            values.RefuseValue(highPath, $"is {CanonicalText.Of(high)}, below {KnownKeys.Find(lowPath)!.Name} {CanonicalText.Of(low)}; exchange them");
+        var (lowName, highName) = (KnownKeys.Find(lowPath)!.Name, KnownKeys.Find(highPath)!.Name);
+        if (values.Find(highPath)!.IsSwept)
+            values.RefuseValue(highPath, $"is {CanonicalText.Of(high)}, below {lowName} {CanonicalText.Of(low)}; exchange them");
         else
-            values.RefuseValue(lowPath, $"is {CanonicalText.Of(low)}, above {highKey.Known.Name} {CanonicalText.Of(high)}; exchange them");
+            values.RefuseValue(lowPath, $"is {CanonicalText.Of(low)}, above {highName} {CanonicalText.Of(high)}; exchange them");
     }
 
     private static double RadiansPerSecond(double revolutionsPerMinute) => revolutionsPerMinute * Math.Tau / 60;

@@ -68,7 +68,8 @@ internal static class KnownKeys
         new("outputs.spanwise", "\"all\"", false),
     ];
 
-    private static readonly ImmutableDictionary<string, KnownKey> ByPath = All.ToImmutableDictionary(key => key.Path, StringComparer.Ordinal);
+    private static readonly ImmutableDictionary<string, KnownKey> ByPath
+        = All.ToImmutableDictionary(key => key.Path, StringComparer.Ordinal);
 
     /// <summary>Tables of a case file, <c>sweep</c> included.</summary>
     public static ImmutableArray<string> Tables { get; } =

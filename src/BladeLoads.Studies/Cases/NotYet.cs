@@ -3,8 +3,8 @@ using BladeLoads.Studies.Toml;
 namespace BladeLoads.Studies.Cases;
 
 /// <summary>
-/// What the formats know and the solver does not do yet. A line is removed here when its work is done; a value that changes nothing
-/// (0, "hold") is accepted already.
+/// What the formats know and the solver does not do yet. A line is removed here when its work is done; a value that changes
+/// nothing (0, "hold") is accepted already.
 /// </summary>
 internal static class NotYet
 {
@@ -34,10 +34,12 @@ internal static class NotYet
     ];
 
     /// <summary>What a left-out key would ask for that is not there yet.</summary>
-    public static string TipSpeedRatioLeftOut => "control.tip_speed_ratio is left out, which asks for the best one; it is not searched for yet, give a number";
+    public static string TipSpeedRatioLeftOut
+        => "control.tip_speed_ratio is left out, which asks for the best one; it is not searched for yet, give a number";
 
     /// <inheritdoc cref="TipSpeedRatioLeftOut"/>
-    public static string FinePitchLeftOut => "control.fine_pitch_deg is left out, which asks for the best one; it is not searched for yet, give a number";
+    public static string FinePitchLeftOut
+        => "control.fine_pitch_deg is left out, which asks for the best one; it is not searched for yet, give a number";
 
     /// <summary>The sentence for a value that asks for what is not there yet, or null.</summary>
     public static string? Sentence(string path, TomlValue value)

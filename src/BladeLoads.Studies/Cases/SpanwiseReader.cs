@@ -41,7 +41,8 @@ internal static class SpanwiseReader
         else if (windSpeeds.Where(v => Math.Abs(v - wanted) <= Closeness * v).ToList() is [var windSpeed, ..])
             return [windSpeed];
         else if (!windSpeeds.IsEmpty)
-            values.Refuse(item.At, $"spanwise holds {item.Found}, which is no wind speed of the case; the nearest is {CanonicalText.Of(windSpeeds.MinBy(v => Math.Abs(v - wanted)))}");
+            values.Refuse(item.At, $"spanwise holds {item.Found}, which is no wind speed of the case; "
+                + $"the nearest is {CanonicalText.Of(windSpeeds.MinBy(v => Math.Abs(v - wanted)))}");
         return [];
     }
 }

@@ -18,7 +18,7 @@ internal static class Sweep
     private const int MostVariants = 10_000;
     private const int LongestName = 200; // a folder name holds 255 bytes, and results add to it
 
-    /// <summary>The case alone where it sweeps nothing; null, with the reason reported, where its variants cannot be told apart.</summary>
+    /// <summary>The case alone where it sweeps nothing; null, with the reason reported, where variants cannot be named.</summary>
     public static ImmutableArray<Variant>? Variants(string caseName, CaseFile file, Findings findings)
     {
         if (file.Sweep.IsEmpty)
@@ -39,13 +39,13 @@ internal static class Sweep
         var all = variants.Select(variant => variant with { Title = $" ({variant.Title})" }).ToImmutableArray();
         if (all.FirstOrDefault(variant => Encoding.UTF8.GetByteCount(variant.Name) > LongestName) is not { } tooLong)
             return all;
-        findings.Error(file.Sweep[0].Key, $"[sweep] makes folder names of {tooLong.Name.Length.ToString(CultureInfo.InvariantCulture)} characters; "
-            + "sweep fewer keys at once, or shorten names");
+        var length = tooLong.Name.Length.ToString(CultureInfo.InvariantCulture);
+        findings.Error(file.Sweep[0].Key,
+            $"[sweep] makes folder names of {length} characters; sweep fewer keys at once, or shorten names");
         return null;
     }
 
-    // Names of variants coincide exactly where those of two values of one key do: keys and '~' keep the parts apart. Two keys with one
-    // last part ("control.pitch_deg" has no namesake today) would still differ in their order.
+    // Names of two variants coincide only where those of two values of one key do: '~', which no value holds, parts them.
     private static bool HaveDistinctNames(CaseFile file, Findings findings)
     {
         var distinct = true;
@@ -61,7 +61,8 @@ internal static class Sweep
                     distinct = false;
                     findings.Error(value.At, first.Found == value.Found
                         ? $"{sweep.Known.Name} has {value.Found} twice; each value once"
-                        : $"{sweep.Known.Name} has {first.Found} and {value.Found}, whose variants would both be named '{sweep.Known.Name}-{name}'; rename one");
+                        : $"{sweep.Known.Name} has {first.Found} and {value.Found}, "
+                            + $"whose variants would both be named '{sweep.Known.Name}-{name}'; rename one");
                 }
                 seen.TryAdd(name, value);
             }

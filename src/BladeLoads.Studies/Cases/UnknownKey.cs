@@ -11,7 +11,7 @@ internal static class UnknownKey
         var found = $"unknown key {VisibleText.Quote(name)} {(table.Length == 0 ? "at the top of the file" : $"in [{table}]")}";
         var elsewhere = KnownKeys.All.FirstOrDefault(key => key.Name == name && key.Table != table);
         if (elsewhere is not null)
-            return elsewhere.Table.Length == 0 ? $"{found}; it belongs at the top of the file" : $"{found}; it belongs in [{elsewhere.Table}]";
+            return $"{found}; it belongs {(elsewhere.Table.Length == 0 ? "at the top of the file" : $"in [{elsewhere.Table}]")}";
         if (Nearest.Of(name, KnownKeys.NamesIn(table)) is { } near)
             return $"{found}; did you mean '{near}'?";
         return table.Length == 0 && Nearest.Of(name, KnownKeys.Tables) is { } nearTable

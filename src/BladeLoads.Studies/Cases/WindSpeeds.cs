@@ -50,7 +50,8 @@ internal static class WindSpeeds
             if (!RangeKeys.Contains(entry.Name))
                 return Refuse(entry.Key, $"has an unknown key {VisibleText.Quote(entry.Name)}; known are from, to, step", refuse);
             if (entry.Value is not TomlValue.Number { Value: var number } || !double.IsFinite(number))
-                return Refuse(entry.Value.At, $"has {entry.Name} = {entry.Value.Found}; give a finite number, without quotes", refuse);
+                return Refuse(entry.Value.At,
+                    $"has {entry.Name} = {entry.Value.Found}; give a finite number, without quotes", refuse);
             if (number <= 0)
                 return Refuse(entry.Value.At, $"has {entry.Name} = {entry.Value.Found}; it must be above 0", refuse);
         }
@@ -59,16 +60,20 @@ internal static class WindSpeeds
 
         var (from, to, step) = (Of("from"), Of("to"), Of("step"));
         if (from > to)
-            return Refuse(range.Find("from")!.Value.At, $"runs from {CanonicalText.Of(from)} to {CanonicalText.Of(to)}; from must not exceed to", refuse);
+            return Refuse(range.Find("from")!.Value.At,
+                $"runs from {CanonicalText.Of(from)} to {CanonicalText.Of(to)}; from must not exceed to", refuse);
         var steps = Math.Floor((to - from) / step + StepSlack);
         if (!(steps < Most))
-            return Refuse(range.Find("step")!.Value.At, $"has step = {CanonicalText.Of(step)}, which gives more than {Limit} wind speeds; give a larger step", refuse);
+            return RefuseStep($"which gives more than {Limit} wind speeds");
         // Multiplied, not added up: the error of a sum would grow with the number of steps.
         var speeds = Enumerable.Range(0, (int)steps + 1).Select(i => from + i * step).ToImmutableArray();
         for (var i = 1; i < speeds.Length; i++)
             if (!(speeds[i] > speeds[i - 1]))
-                return Refuse(range.Find("step")!.Value.At, $"has step = {CanonicalText.Of(step)}, too small beside {CanonicalText.Of(from)}; give a larger step", refuse);
+                return RefuseStep($"too small beside {CanonicalText.Of(from)}");
         return speeds;
+
+        ImmutableArray<double> RefuseStep(string why) => Refuse(
+            range.Find("step")!.Value.At, $"has step = {CanonicalText.Of(step)}, {why}; give a larger step", refuse);
 
         double Of(string key) => ((TomlValue.Number)range.Find(key)!.Value).Value;
     }

@@ -1,13 +1,22 @@
+using System.Globalization;
+
 namespace BladeLoads.Studies.Files;
 
 /// <summary>The files of one study. Nothing outside the study folder is read, whatever a reference or a link says.</summary>
 internal sealed class StudyFolder
 {
-    private const int LargestFile = 32 * 1024 * 1024;
+    /// <summary>MiB. A table of a million rows is smaller.</summary>
+    public const int LargestTable = 32;
+
+    /// <summary>MiB. A case of ten thousand wind speeds and as many variants is smaller.</summary>
+    public const int LargestCase = 1;
+
+    private const int BytesPerMebibyte = 1024 * 1024;
 
     private readonly IStudyFiles _files;
     private readonly string _realRoot;
-    private readonly Dictionary<(string Folder, string Reference, EntryKind Wanted), (string? FullPath, string Problem)> _located = [];
+    private readonly Dictionary<(string Folder, string Reference, EntryKind Wanted), (string? Path, string Problem)> _located
+        = [];
 
     /// <param name="root">Absolute path of the study folder, which exists.</param>
     public StudyFolder(IStudyFiles files, string root)
@@ -33,11 +42,12 @@ internal sealed class StudyFolder
             _located.Add((fromFolder, reference, wanted), located);
         }
         problem = located.Problem;
-        return located.FullPath;
+        return located.Path;
     }
 
     /// <summary>Reads a text file within the study; what keeps it from being read is reported at the file.</summary>
-    public InputText? Read(string fullPath, Action<InputFinding> report)
+    /// <param name="largest">MiB; of a larger file no more than this is read.</param>
+    public InputText? Read(string fullPath, int largest, Action<InputFinding> report)
     {
         var file = RelativePath(fullPath);
         if (LinkProblem(fullPath) is { } link)
@@ -52,14 +62,19 @@ internal sealed class StudyFolder
             });
         try
         {
-            var bytes = _files.Read(fullPath, LargestFile + 1);
-            return bytes.Length > LargestFile
-                ? Refuse("is larger than 32 MiB; no case or table is, so this is another file")
+            var bytes = _files.Read(fullPath, largest * BytesPerMebibyte + 1);
+            return bytes.Length > largest * BytesPerMebibyte
+                ? Refuse($"is larger than {largest.ToString(CultureInfo.InvariantCulture)} MiB, the most that is read; "
+                    + "it seems to be another kind of file")
                 : InputText.FromBytes(file, bytes, report);
         }
         catch (UnauthorizedAccessException)
         {
             return Refuse("cannot be read: no permission");
+        }
+        catch (Exception e) when (e is FileNotFoundException or DirectoryNotFoundException)
+        {
+            return Refuse("was there and is gone; read the study again");
         }
         catch (IOException e)
         {
@@ -135,19 +150,25 @@ internal sealed class StudyFolder
         {
             return "is a link that leads round in a circle";
         }
+        catch (UnauthorizedAccessException)
+        {
+            return "cannot be reached: no permission";
+        }
     }
 
     private string WhatIsBeside(string missing, EntryKind wanted)
     {
         var folder = Path.GetDirectoryName(missing)!;
         if (!IsWithin(Root, folder) || !_files.Kind(folder).Equals(EntryKind.Folder))
-            return $"there is no folder {RelativePath(folder)}/ in the study";
-        var names = Names(folder).Where(name => name[0] != '.' && _files.Kind(Path.Combine(folder, name)) == wanted);
+            return $"there is no folder {VisibleText.Quote(RelativePath(folder))} in the study";
+        var names = Names(folder).Where(name => name[0] != '.' && LinkProblem(Path.Combine(folder, name)) is null
+            && _files.Kind(Path.Combine(folder, name)) == wanted);
         var place = folder == Root ? "the study folder" : RelativePath(folder) + "/";
         return $"{place} holds {VisibleText.Enumerate(names, wanted == EntryKind.Folder ? "no folder" : "no file")}";
     }
 
     // With the separator: "/data/inputs-evil" begins with "/data/inputs" too.
     private static bool IsWithin(string root, string path)
-        => path == root || path.StartsWith(Path.EndsInDirectorySeparator(root) ? root : root + Path.DirectorySeparatorChar, StringComparison.Ordinal);
+        => path == root || path.StartsWith(
+            Path.EndsInDirectorySeparator(root) ? root : root + Path.DirectorySeparatorChar, StringComparison.Ordinal);
 }

@@ -3,10 +3,10 @@ using System.Text;
 
 namespace BladeLoads.Studies.Files;
 
-/// <summary>Text of a user's file, made fit to be shown: nothing in it can move a cursor, turn the direction of writing or run on.</summary>
+/// <summary>Text of a user's file, made fit to be shown: it moves no cursor, turns no direction of writing, does not run on.</summary>
 internal static class VisibleText
 {
-    private const int LongestQuote = 60;
+    private const int LongestQuote = 80;
 
     /// <summary>Every control, format, line-separating or broken character as <c>\u001B</c>.</summary>
     public static string Escape(string text)

@@ -35,7 +35,8 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
             {
                 var radius = Positive(rows, "radius_m");
                 if (radius <= previous.Radius)
-                    rows.Error("radius_m", Falls(previous.Radius, radius, previous.Line, rows.Line));
+                    rows.Error("radius_m",
+                        Rising.Problem("radius_m", previous, radius, rows.Line, "radii must rise from root to tip"));
                 var chord = Positive(rows, "chord_m");
                 var twist = rows.Number("twist_deg");
                 if (Math.Abs(twist) > 180)
@@ -50,13 +51,19 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
                 lines.Add($"{CanonicalText.Of([radius, chord, twist])},{section}");
             }
             if (!rows.HasErrors && stations.Count < 2)
-                rows.Error(new Place(input.File, 0, 0), $"has {(stations.Count == 0 ? "no row" : "one row")}; a blade needs two or more, root first");
+                rows.Error(new Place(input.File, 0, 0),
+                    $"has {(stations.Count == 0 ? "no row" : "one row")}; a blade needs two or more, root first");
         }
         var blade = rows.HasErrors ? null : Blade.FromStations(stations);
-        var contents = blade is null ? "blade table with errors" : string.Create(CultureInfo.InvariantCulture,
-            $"{stations.Count} rows from {CanonicalText.Of(blade.HubRadius)} to {CanonicalText.Of(blade.TipRadius)} m, {sections.Count} section{(sections.Count == 1 ? "" : "s")}");
-        return new BladeTable(blade, [.. sections], Fingerprint.OfLines(lines), new InputFile(input.File, input.Sha256, contents));
+        return new BladeTable(
+            blade, [.. sections], Fingerprint.OfLines(lines),
+            new InputFile(input.File, input.Sha256, Contents(blade, sections.Count)));
     }
+
+    private static string Contents(Blade? blade, int sections) => blade is null ? "blade table with errors" : string.Create(
+        CultureInfo.InvariantCulture,
+        $"{blade.Stations.Length} rows from {CanonicalText.Of(blade.HubRadius)} to {CanonicalText.Of(blade.TipRadius)} m, "
+        + $"{sections} section{(sections == 1 ? "" : "s")}");
 
     private static bool HasSections(CsvRows rows, string file)
     {
@@ -76,7 +83,8 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
                 ? "a section from thickness_ratio is not supported yet; name a section"
                 : "section is empty; name a section");
         else if (SafeName.Problem(section) is { } problem)
-            rows.Error("section", $"section {VisibleText.Quote(section)} {problem}; a section's name is also that of its polar file");
+            rows.Error("section",
+                $"section {VisibleText.Quote(section)} {problem}; a section's name is also that of its polar file");
         else
             return section;
         return null;
@@ -97,15 +105,10 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
         {
             var thickness = rows.Number("thickness_ratio");
             if (thickness is <= 0 or > 1)
-                rows.Error("thickness_ratio", $"thickness_ratio is {CanonicalText.Of(thickness)}; it is thickness over chord, above 0 to 1");
+                rows.Error("thickness_ratio",
+                    $"thickness_ratio is {CanonicalText.Of(thickness)}; it is thickness over chord, above 0 to 1");
         }
         if (rows.Has("mass_kg_per_m") && rows.Number("mass_kg_per_m") is < 0 and var mass)
             rows.Error("mass_kg_per_m", $"mass_kg_per_m is {CanonicalText.Of(mass)}; it must be 0 or more");
-    }
-
-    private static string Falls(double from, double to, int fromLine, int toLine)
-    {
-        var verb = from == to ? $"is {CanonicalText.Of(to)} again" : $"falls from {CanonicalText.Of(from)} to {CanonicalText.Of(to)}";
-        return string.Create(CultureInfo.InvariantCulture, $"radius_m {verb} (row {fromLine} to {toLine}); radii must rise from root to tip");
     }
 }

@@ -50,7 +50,8 @@ internal sealed class CsvRows : IDisposable
     {
         if (!ReadRow())
         {
-            Error(new Place(_input.File, 0, 0), $"has no row of column names; begin with {Names(columns.Where(c => c.IsRequired))}");
+            Error(new Place(_input.File, 0, 0),
+                $"has no row of column names; begin with {Names(columns.Where(c => c.IsRequired))}");
             return false;
         }
         _header = [.. Enumerable.Range(0, _reader.FieldCount).Select(_reader.GetString)];

@@ -15,9 +15,11 @@ internal static partial class NumberText
     public static bool TryParse(ReadOnlySpan<byte> text, out double value)
     {
         value = double.NaN;
-        // The framework also takes NaN, Infinity and NULs at the end: neither has one of these characters only.
-        return text.IndexOfAnyExcept(PartsOfNumbers) < 0
+        // The framework also takes NaN, Infinity and NULs at the end: none is made of these characters only.
+        var isNumber = text.IndexOfAnyExcept(PartsOfNumbers) < 0
             && double.TryParse(text, Plain, CultureInfo.InvariantCulture, out value) && double.IsFinite(value);
+        value += 0.0; // -0 is 0: one fingerprint, one result
+        return isNumber;
     }
 
     /// <summary>What is wrong with a text that <see cref="TryParse"/> refused, and what would do.</summary>
@@ -27,17 +29,20 @@ internal static partial class NumberText
             return $"{name} is empty; give a number";
         var quoted = VisibleText.Quote(text);
         if (AmbiguousComma().IsMatch(text))
-            return $"{name} is {quoted}; write decimals with a point, thousands without a separator: {text.Replace(',', '.')} or {text.Replace(",", "", StringComparison.Ordinal)}";
+            return $"{name} is {quoted}; write decimals with a point, thousands without a separator: "
+                + $"{text.Replace(',', '.')} or {text.Replace(",", "", StringComparison.Ordinal)}";
         if (DecimalComma().IsMatch(text))
             return $"{name} is {quoted}; write decimals with a point: {text.Replace(',', '.')}";
         if (Thousands().IsMatch(text))
             return $"{name} is {quoted}; write it without separators: {text.Replace(",", "", StringComparison.Ordinal)}";
-        if (double.TryParse(text, Plain, CultureInfo.InvariantCulture, out var value) && double.IsInfinity(value) && char.IsDigit(text[^1]))
+        if (char.IsDigit(text[^1])
+            && double.TryParse(text, Plain, CultureInfo.InvariantCulture, out var value) && double.IsInfinity(value))
             return $"{name} is {quoted}, beyond all numbers that can be kept; give a smaller one";
-        return NotFinite().IsMatch(text) ? $"{name} is {quoted}; give a finite number" : $"{name} is {quoted}; give a number, such as 0.8";
+        return $"{name} is {quoted}; {(NotFinite().IsMatch(text) ? "give a finite number" : "give a number, such as 0.8")}";
     }
 
-    private const NumberStyles Plain = NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
+    private const NumberStyles Plain
+        = NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
 
     [GeneratedRegex(@"^[+-]?[1-9]\d{0,2},\d{3}$")]
     private static partial Regex AmbiguousComma();

@@ -46,13 +46,11 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         }
         var block = blocks[^1];
 
-        var angle = rows.Number("alpha_deg");
-        if (Math.Abs(angle) > 180 + AngleSlack)
-            rows.Error("alpha_deg", $"alpha_deg is {CanonicalText.Of(angle)}; give an angle from -180 to 180");
-        angle = Math.Clamp(angle, -180, 180);
-        // Asked in radians too: two angles that differ in their last digit may be one there.
-        if (block.Rows > 0 && double.DegreesToRadians(angle) <= double.DegreesToRadians(block.Angles[^1]))
-            rows.Error("alpha_deg", Falls("alpha_deg", block.Angles[^1], angle, block.LastLine, rows.Line, "angles must rise within one Reynolds number"));
+        var angle = AngleOf(rows);
+        // Asked in radians: two angles that differ in their last digit may be one there.
+        if (block.Angles.Count > 0 && double.DegreesToRadians(angle) <= double.DegreesToRadians(block.Angles[^1]))
+            rows.Error("alpha_deg", Rising.Problem("alpha_deg",
+                (block.Angles[^1], block.LastLine), angle, rows.Line, "angles must rise within one Reynolds number"));
         var lift = rows.Number("cl");
         var drag = rows.Number("cd");
         if (drag < 0)
@@ -67,15 +65,26 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
             block.LiftAtEnd.Add((lift, rows.Cell("cl")));
     }
 
+    // NaN where it is wrong.
+    private static double AngleOf(CsvRows rows)
+    {
+        var angle = rows.Number("alpha_deg");
+        if (!(Math.Abs(angle) > 180 + AngleSlack))
+            return Math.Clamp(angle, -180, 180);
+        rows.Error("alpha_deg", $"alpha_deg is {CanonicalText.Of(angle)}; give an angle from -180 to 180");
+        return double.NaN;
+    }
+
     private static void CheckReynolds(CsvRows rows, List<Block> blocks, double reynolds)
     {
         if (reynolds < LowestReynolds)
-            rows.Error("reynolds", $"reynolds is {CanonicalText.Of(reynolds)}; Reynolds numbers of blades are 1e4 and more, three million is 3e6");
+            rows.Error("reynolds",
+                $"reynolds is {CanonicalText.Of(reynolds)}; Reynolds numbers of blades are 1e4 and more, three million is 3e6");
         else if (blocks.Any(block => block.Reynolds == reynolds))
             rows.Error("reynolds", $"reynolds returns to {Reynolds(reynolds)}; keep the rows of one Reynolds number together");
         else if (blocks.Count > 0 && reynolds < blocks[^1].Reynolds)
-            rows.Error("reynolds", string.Create(CultureInfo.InvariantCulture,
-                $"reynolds falls from {Reynolds(blocks[^1].Reynolds)} to {Reynolds(reynolds)} (row {blocks[^1].LastLine} to {rows.Line}); Reynolds numbers must rise"));
+            rows.Error("reynolds", Rising.Problem("reynolds",
+                (blocks[^1].Reynolds, blocks[^1].LastLine), reynolds, rows.Line, "Reynolds numbers must rise"));
     }
 
     private static void CheckWhole(CsvRows rows, List<Block> blocks, Findings findings, string file)
@@ -96,13 +105,8 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         foreach (var block in blocks)
             if (block.LiftAtEnd is [var (low, _), var (high, at)] && Math.Abs(high - low) > LiftClosure)
                 findings.Doubt(new InputFinding(at.File, at.Line, at.Column,
-                    $"cl is {CanonicalText.Of(high)} at 180 deg and {CanonicalText.Of(low)} at -180 deg; these are one angle and should have one lift"));
-    }
-
-    private static string Falls(string column, double from, double to, int fromLine, int toLine, string rule)
-    {
-        var verb = from == to ? $"is {CanonicalText.Of(to)} again" : $"falls from {CanonicalText.Of(from)} to {CanonicalText.Of(to)}";
-        return string.Create(CultureInfo.InvariantCulture, $"{column} {verb} (row {fromLine} to {toLine}); {rule}");
+                    $"cl is {CanonicalText.Of(high)} at 180 deg and {CanonicalText.Of(low)} at -180 deg; "
+                    + "these are one angle and should have one lift"));
     }
 
     private static string Contents(List<Block> blocks)
@@ -115,8 +119,8 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
             _ => string.Create(CultureInfo.InvariantCulture,
                 $"{blocks.Count} Reynolds numbers from {Reynolds(blocks[0].Reynolds)} to {Reynolds(blocks[^1].Reynolds)}"),
         };
-        return string.Create(CultureInfo.InvariantCulture,
-            $"{reynolds}, {rowCount} rows, {CanonicalText.Of(blocks.Min(b => b.Angles[0]))} to {CanonicalText.Of(blocks.Max(b => b.Angles[^1]))} deg");
+        var (lowest, highest) = (CanonicalText.Of(blocks.Min(b => b.Angles[0])), CanonicalText.Of(blocks.Max(b => b.Angles[^1])));
+        return string.Create(CultureInfo.InvariantCulture, $"{reynolds}, {rowCount} rows, {lowest} to {highest} deg");
     }
 
     private static string Reynolds(double value) => value.ToString("0.######e0", CultureInfo.InvariantCulture);
@@ -148,7 +152,8 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         }
 
         public Polar ToPolar() => Polar.FromRows(
-            Reynolds, [.. Angles.Select(angle => Math.Clamp(double.DegreesToRadians(angle), -Math.PI, Math.PI))], [.. _lift], [.. _drag]);
+            Reynolds, [.. Angles.Select(angle => Math.Clamp(double.DegreesToRadians(angle), -Math.PI, Math.PI))],
+            [.. _lift], [.. _drag]);
 
         public IEnumerable<string> Lines()
         {

@@ -26,8 +26,8 @@ internal sealed record ScheduleTable(ImmutableArray<OperatingPoint> Points, stri
             {
                 var windSpeed = NotNegative(rows, "wind_speed_m_s");
                 if (windSpeed <= previous.WindSpeed)
-                    rows.Error("wind_speed_m_s", string.Create(CultureInfo.InvariantCulture,
-                        $"wind_speed_m_s goes from {CanonicalText.Of(previous.WindSpeed)} to {CanonicalText.Of(windSpeed)} (row {previous.Line} to {rows.Line}); wind speeds must rise"));
+                    rows.Error("wind_speed_m_s",
+                        Rising.Problem("wind_speed_m_s", previous, windSpeed, rows.Line, "wind speeds must rise"));
                 var rotorSpeedRpm = NotNegative(rows, "rotor_speed_rpm");
                 var pitchDeg = rows.Number("pitch_deg");
                 if (Math.Abs(pitchDeg) > 180)
@@ -41,7 +41,8 @@ internal sealed record ScheduleTable(ImmutableArray<OperatingPoint> Points, stri
                 rows.Error(new Place(input.File, 0, 0), "has no row; a schedule needs one or more");
         }
         var contents = rows.HasErrors ? "schedule with errors" : string.Create(CultureInfo.InvariantCulture,
-            $"{points.Count} wind speeds from {CanonicalText.Of(points[0].WindSpeed)} to {CanonicalText.Of(points[^1].WindSpeed)} m/s");
+            $"{points.Count} wind speeds from {CanonicalText.Of(points[0].WindSpeed)} "
+            + $"to {CanonicalText.Of(points[^1].WindSpeed)} m/s");
         return new ScheduleTable(rows.HasErrors ? [] : [.. points], Fingerprint.OfLines(lines),
             new InputFile(input.File, input.Sha256, contents));
     }

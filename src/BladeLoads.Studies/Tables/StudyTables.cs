@@ -35,7 +35,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
             if (!names.Contains(name + ".csv"))
                 findings.Error(at, $"no table for section {VisibleText.Quote(name)} in {folder.RelativePath(setFolder)}/; "
                     + $"it holds {VisibleText.Enumerate(names.Where(IsTable).Select(n => n[..^4]), "no table")}");
-            else if (Once(_polars, Path.Combine(setFolder, name + ".csv"), input => PolarTable.Parse(name, input, findings)) is { } table)
+            else if (Polar(name, Path.Combine(setFolder, name + ".csv")) is { } table)
                 tables.Add(table);
         }
         var complete = tables.Count == blade.Sections.Length && tables.All(table => table.Section is not null);
@@ -45,6 +45,9 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
         return sections;
     }
 
+    private PolarTable? Polar(string section, string fullPath)
+        => Once(_polars, fullPath, input => PolarTable.Parse(section, input, findings));
+
     private static bool IsTable(string name) => name.EndsWith(".csv", StringComparison.Ordinal) && name[0] != '.';
 
     private T? Once<T>(Dictionary<string, T?> known, string fullPath, Func<InputText, T> parse)
@@ -52,7 +55,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
     {
         if (known.TryGetValue(fullPath, out var table))
             return table;
-        table = folder.Read(fullPath, findings.Error) is { } input ? parse(input) : null;
+        table = folder.Read(fullPath, StudyFolder.LargestTable, findings.Error) is { } input ? parse(input) : null;
         known.Add(fullPath, table);
         return table;
     }

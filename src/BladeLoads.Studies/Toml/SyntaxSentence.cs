@@ -10,8 +10,8 @@ internal static partial class SyntaxSentence
     /// <returns>The column, from 1, and the sentence.</returns>
     public static (int Column, string Sentence)? ForLine(string line)
     {
-        if (OpenHeader().Match(line) is { Success: true } header)
-            return (header.Groups["name"].Index, $"[{header.Groups["name"].Value} has no closing bracket; write [{header.Groups["name"].Value}]");
+        if (OpenHeader().Match(line).Groups["name"] is { Success: true } table)
+            return (table.Index, $"[{table.Value} has no closing bracket; write [{table.Value}]");
         if (KeyAndRest().Match(line) is not { Success: true } parts)
             return null;
         var key = parts.Groups["key"].Value.Trim('"');
@@ -41,7 +41,8 @@ internal static partial class SyntaxSentence
     {
         if (parserMessage.Contains("closing `]`", StringComparison.Ordinal))
             return "a list that was opened before is not closed here; close it with ]";
-        if (parserMessage.Contains("string", StringComparison.OrdinalIgnoreCase) && parserMessage.StartsWith("Invalid", StringComparison.Ordinal))
+        if (parserMessage.StartsWith("Invalid", StringComparison.Ordinal)
+            && parserMessage.Contains("string", StringComparison.OrdinalIgnoreCase))
             return "a text is not closed; close it with the quote that opened it, in the same line";
         if (parserMessage.StartsWith("Unable to parse integer", StringComparison.Ordinal))
             return "a whole number is too large here; write a smaller one";

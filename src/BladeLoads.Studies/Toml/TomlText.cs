@@ -16,51 +16,78 @@ internal static class TomlText
     public static TomlValue.Table? Parse(InputText input, Findings findings)
     {
         var text = input.Text;
-        if (!HasSoundSyntax(input.File, text, findings))
+        if (Document(input.File, text, validate: true) is not { } document)
+        {
+            findings.Error(new Place(input.File, LineThatBreaksTheParser(input.File, text), 0),
+                "cannot be read as TOML; look at the quotes, backslashes and brackets here");
             return null;
-        var document = SyntaxParser.Parse(text, input.File, false);
+        }
+        var isSound = !document.HasErrors;
+        if (!isSound && HasSyntaxErrors(input.File, text, findings))
+            return null;
         var reading = new Reading(input.File, findings);
         reading.Read(document);
         if (reading.Failed)
             return null;
 
-        // What the tree above does not refuse and TOML does: rare, and told in the parser's own words.
-        var validated = SyntaxParser.Parse(text, input.File, true).Diagnostics.Where(d => d.Kind == DiagnosticMessageKind.Error).ToList();
-        foreach (var diagnostic in validated)
+        // What the tree does not refuse and TOML does: rare, and told in the parser's own words.
+        foreach (var diagnostic in document.Diagnostics.Where(d => d.Kind == DiagnosticMessageKind.Error))
             findings.Error(PlaceOf(input.File, diagnostic.Span), SyntaxSentence.Of(diagnostic.Message, ""));
-        return validated.Count == 0 ? reading.Top : null;
+        return isSound ? reading.Top : null;
     }
 
-    // A line whose mistake we can name is taken out and reading goes on, so that one mistake never shows as five, nor five as one.
-    private static bool HasSoundSyntax(string file, string text, Findings findings)
+    // Null where the parser throws, which Tomlyn 2.10.2 does at nesting beyond its limit and at some unfinished escapes.
+    private static DocumentSyntax? Document(string file, string text, bool validate)
+    {
+        try
+        {
+            return SyntaxParser.Parse(text, file, validate);
+        }
+        catch (Exception e) when (e is TomlException or ArgumentException or InvalidOperationException or NullReferenceException
+            or IndexOutOfRangeException or FormatException or OverflowException)
+        {
+            return null;
+        }
+    }
+
+    // The parser reads forward, so the text up to a line breaks it if and only if that line or one before it does.
+    private static int LineThatBreaksTheParser(string file, string text)
+    {
+        var lines = text.Split('\n');
+        var (sound, broken) = (0, lines.Length);
+        while (broken - sound > 1)
+        {
+            var middle = (sound + broken) / 2;
+            if (Document(file, string.Join('\n', lines[..middle]), validate: false) is null)
+                broken = middle;
+            else
+                sound = middle;
+        }
+        return broken;
+    }
+
+    // A line whose mistake can be named is taken out and reading goes on: one mistake never shows as five, nor five as one.
+    private static bool HasSyntaxErrors(string file, string text, Findings findings)
     {
         var lines = text.Split('\n');
         for (var errors = 0; errors < MostSyntaxErrors; errors++)
         {
-            DiagnosticMessage? first;
-            try
-            {
-                first = SyntaxParser.Parse(string.Join('\n', lines), file, false).Diagnostics
-                    .Where(d => d.Kind == DiagnosticMessageKind.Error)
-                    .OrderBy(d => d.Span.Start.Line).ThenBy(d => d.Span.Start.Column).FirstOrDefault();
-            }
-            catch (TomlException e)
-            {
-                findings.Error(new Place(file, 0, 0), $"cannot be read as TOML: {e.Message}");
-                return false;
-            }
+            // Null: taking out a line has made what follows unreadable; what was found before stands.
+            var first = Document(file, string.Join('\n', lines), validate: false)?.Diagnostics
+                .Where(d => d.Kind == DiagnosticMessageKind.Error)
+                .OrderBy(d => d.Span.Start.Line).ThenBy(d => d.Span.Start.Column).FirstOrDefault();
             if (first is null)
-                return errors == 0;
+                return errors > 0;
             var line = Math.Clamp(first.Span.Start.Line, 0, lines.Length - 1);
             if (SyntaxSentence.ForLine(lines[line]) is not { } known)
             {
                 findings.Error(PlaceOf(file, first.Span), SyntaxSentence.Of(first.Message, lines[line]));
-                return false;
+                return true;
             }
             findings.Error(new Place(file, line + 1, known.Column), known.Sentence);
             lines[line] = "";
         }
-        return false;
+        return true;
     }
 
     private static Place PlaceOf(string file, SourceSpan span) => new(file, span.Start.Line + 1, span.Start.Column + 1);
@@ -84,15 +111,14 @@ internal static class TomlText
                 var at = At(tableSyntax.Name!);
                 if (tableSyntax.Kind == SyntaxKind.TableArray)
                 {
-                    var plain = string.Join('.', names.Select(n => n.Name));
-                    Refuse(at, $"[[{plain}]] is a list of tables; write [{plain}], once");
+                    Refuse(at, $"[[{Dotted(names)}]] is a list of tables; write [{Dotted(names)}], once");
                     continue;
                 }
                 if (Descend(Top, names) is not { } table)
                     continue;
                 if (_headers.TryGetValue(table, out var first))
-                    Refuse(at, $"table [{string.Join('.', names.Select(n => n.Name))}] is there twice, first in line {Number(first.Line)}; "
-                        + "put its keys together");
+                    Refuse(at,
+                        $"table [{Dotted(names)}] is there twice, first in line {Number(first.Line)}; put its keys together");
                 _headers.TryAdd(table, at);
                 foreach (var keyValue in tableSyntax.Items)
                     Add(table, keyValue);
@@ -137,7 +163,7 @@ internal static class TomlText
                 case IntegerValueSyntax whole:
                     return new TomlValue.Number(at, whole.Value, true);
                 case FloatValueSyntax number:
-                    return new TomlValue.Number(at, number.Value, false);
+                    return new TomlValue.Number(at, number.Value + 0.0, false);
                 case StringValueSyntax text:
                     return new TomlValue.Text(at, text.Value ?? "");
                 case BooleanValueSyntax truth:
@@ -157,6 +183,9 @@ internal static class TomlText
 
         private ImmutableArray<(string Name, Place At)> NamesOf(KeySyntax key)
             => [(NameOf(key.Key!), At(key.Key!)), .. key.DotKeys.Select(dot => (NameOf(dot.Key!), At(dot.Key!)))];
+
+        private static string Dotted(ImmutableArray<(string Name, Place At)> names)
+            => string.Join('.', names.Select(n => n.Name));
 
         private static string NameOf(BareKeyOrStringValueSyntax key)
             => key is StringValueSyntax quoted ? quoted.Value ?? "" : ((BareKeySyntax)key).Key!.Text ?? "";

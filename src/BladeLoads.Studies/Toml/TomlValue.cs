@@ -14,14 +14,15 @@ internal abstract class TomlValue
     /// <summary>As a message says what was found.</summary>
     public abstract string Found { get; }
 
-    /// <param name="value">May be NaN or infinite: TOML knows both.</param>
+    /// <param name="value">May be NaN or infinite: TOML knows both. Zero has no sign: one fingerprint, one result.</param>
     public sealed class Number(Place at, double value, bool isWhole) : TomlValue(at)
     {
         public double Value { get; } = value;
 
         public bool IsWhole { get; } = isWhole;
 
-        public override string Found => double.IsNaN(Value) ? "nan" : double.IsInfinity(Value) ? "infinite" : CanonicalText.Of(Value);
+        public override string Found
+            => double.IsNaN(Value) ? "nan" : double.IsInfinity(Value) ? "infinite" : CanonicalText.Of(Value);
     }
 
     public sealed class Text(Place at, string value) : TomlValue(at)

@@ -135,8 +135,8 @@ public class CaseErrorTests
         "cases/clean.toml:1:9: title is 'a\\u001B[2Jb'; write it in one line, without control characters")]
     [InlineData("strategy        = \"fixed-speed\"", "strategy = \"\\u202Efixed\"",
         "cases/clean.toml:12:12: strategy is '\\u202Efixed'; write \"variable-speed\", \"fixed-speed\" or \"schedule\"")]
-    [InlineData("strategy        = \"fixed-speed\"", "strategy = \"a very long word indeed, longer than anyone would want to see again in a message\"",
-        "cases/clean.toml:12:12: strategy is 'a very long word indeed, longer than anyone would want to...'; write \"variable-speed\", \"fixed-speed\" or \"schedule\"")]
+    [InlineData("strategy        = \"fixed-speed\"", "strategy = \"a very long word indeed, longer than anyone would want to see again in a message of ours\"",
+        "cases/clean.toml:12:12: strategy is 'a very long word indeed, longer than anyone would want to see again in a mess...'; write \"variable-speed\", \"fixed-speed\" or \"schedule\"")]
     public void A_wrong_case_is_told_where_what_and_what_would_do(string text, string by, params string[] expected)
     {
         var study = new FellStudy().Change("cases/clean.toml", text, by).Read();
@@ -208,6 +208,7 @@ public class CaseErrorTests
     [InlineData("a\u001bb")]
     [InlineData("logs")]
     [InlineData("Failures")]
+    [InlineData("summary.csv")]
     [InlineData("nul")]
     public void A_case_name_that_is_no_safe_folder_name_is_refused(string name)
     {
@@ -221,7 +222,7 @@ public class CaseErrorTests
             "a\\b" => "cases/a/b.toml: the case name 'a\\b' holds '\\'" + end,
             "a\u001bb" => "cases/a\\u001Bb.toml: the case name 'a\\u001Bb' holds a control character" + end,
             "nul" => "cases/nul.toml: the case name 'nul' is the name of a device on some systems" + end,
-            _ => $"cases/{name}.toml: the case name '{name}' is kept for a folder of the results; rename the file",
+            _ => $"cases/{name}.toml: the case name '{name}' is kept for another part of the results; rename the file",
         };
 
         Told.Exactly([expected], new FellStudy().With($"cases/{name}.toml", FellStudy.Case).Read().Errors);
@@ -233,7 +234,7 @@ public class CaseErrorTests
         var errors = new FellStudy().With($"cases/{new string('x', 101)}.toml", FellStudy.Case).Errors();
 
         Assert.Equal(
-            [$"cases/{new string('x', 101)}.toml: the case name '{new string('x', 57)}...' is longer than 100 characters; rename the file, its results get a folder of this name"],
+            [$"cases/{new string('x', 101)}.toml: the case name '{new string('x', 77)}...' is longer than 100 characters; rename the file, its results get a folder of this name"],
             errors);
     }
 }

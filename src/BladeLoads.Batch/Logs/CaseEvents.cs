@@ -1,0 +1,54 @@
+using BladeLoads.Batch.Work;
+using BladeLoads.Results.Receipts;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies;
+using Serilog;
+
+namespace BladeLoads.Batch.Logs;
+
+/// <summary>What a case's log tells: what was read, how the balance went, what came out and how long it took.</summary>
+internal static class CaseEvents
+{
+    public static void Read(this ILogger log, StudyCase studyCase)
+    {
+        log.Information("Case {Case}: {Title}; fingerprint {Fingerprint}", studyCase.Name, studyCase.Title, studyCase.Fingerprint);
+        foreach (var input in studyCase.Inputs)
+            log.Information("Case {Case} read {File}: {Contents} (SHA-256 {Sha256})", studyCase.Name, input.File, input.Contents, input.Sha256);
+        log.Information(
+            "Case {Case} asks for {Points} wind speeds, {Elements} elements each",
+            studyCase.Name, studyCase.Rotor.WindSpeeds.Length, studyCase.Rotor.Model.Elements);
+    }
+
+    public static void Balanced(this ILogger log, StudyCase studyCase, PowerCurve curve)
+    {
+        var balance = BalanceStatistics.Of(curve);
+        log.Information(
+            "Case {Case} balanced {Elements} elements: worst residual {WorstResidual:0.0e+0} at {WindSpeed} m/s, r = {Radius:0.###} m; "
+            + "most evaluations {MostEvaluations}, mean {MeanEvaluations:0.0}; {RotorSolves} rotor solves",
+            studyCase.Name, balance.Elements - balance.Unbalanced, balance.WorstResidual, balance.WorstWindSpeed, balance.WorstRadius,
+            balance.MostEvaluations, balance.MeanEvaluations, curve.RotorSolves);
+        log.Information(
+            "Case {Case} marked elements: {SeveralBalances} at several balances, {OutsideAngles} outside the angles of their table, "
+            + "{OutsideReynolds} outside its Reynolds numbers, {Unbalanced} unbalanced",
+            studyCase.Name, balance.SeveralBalances, balance.OutsideAngles, balance.OutsideReynolds, balance.Unbalanced);
+    }
+
+    public static void Solved(this ILogger log, StudyCase studyCase, CaseSummary summary, double seconds)
+    {
+        if (summary.RatedWindSpeed is { } rated)
+            log.Information("Case {Case} reaches rated power at {RatedWindSpeed:0.###} m/s", studyCase.Name, rated);
+        else
+            log.Information("Case {Case} has no rated wind speed", studyCase.Name);
+        log.Information(
+            "Case {Case} solved: {Points} points, {Unbalanced} unbalanced, {Seconds:0.000} s",
+            studyCase.Name, summary.Points, summary.UnbalancedPoints, seconds);
+        if (summary.UnbalancedPoints > 0)
+            log.Warning(
+                "Case {Case}: no inflow angle balances blade force and momentum at {Unbalanced} of {Points} points; "
+                + "they are marked 'unbalanced' and left blank",
+                studyCase.Name, summary.UnbalancedPoints, summary.Points);
+    }
+
+    public static void Failed(this ILogger log, StudyCase studyCase, string reason, Exception? details)
+        => log.Error(details, "Case {Case} failed: {Reason}", studyCase.Name, reason);
+}

@@ -1,2 +1,0 @@
-namespace BladeLoads.Batch;
-internal static class Placeholder;

@@ -1,0 +1,19 @@
+using BladeLoads.Results.Receipts;
+
+namespace BladeLoads.Batch.Work;
+
+/// <summary>What became of a case in a run.</summary>
+public abstract record CaseOutcome
+{
+    private CaseOutcome() { }
+
+    /// <summary>Its result is published.</summary>
+    public sealed record Solved(CaseSummary Summary, int RotorSolves) : CaseOutcome;
+
+    /// <summary>It alone could not be solved or published.</summary>
+    /// <param name="Reason">One sentence, fit for a terminal.</param>
+    public sealed record Failed(string Reason) : CaseOutcome;
+
+    /// <summary>The run ended before it was done; nothing of it was published.</summary>
+    public sealed record NotRun : CaseOutcome;
+}

@@ -1,0 +1,115 @@
+using BladeLoads.Batch.Logs;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Results.Receipts;
+using BladeLoads.Results.Tables;
+using BladeLoads.Results.Wording;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies;
+using Serilog;
+
+namespace BladeLoads.Batch.Work;
+
+/// <summary>The physics, as the batch knows it.</summary>
+public delegate PowerCurve SolveCase(RotorCase rotorCase, CancellationToken cancellation);
+
+/// <summary>Solves one case and publishes its result: tables, log and receipt. What goes wrong with it stays with it.</summary>
+/// <param name="waitForFile">Waits between two tries at a file in use; the argument counts the tries made, from 1.</param>
+public sealed class CaseWork(
+    SolveCase solve, Publisher publisher, ResultsFolder results, RunIdentity identity, ILogger runLog, TimeProvider time,
+    Action<int> waitForFile)
+{
+    private const int TriesAtABusyFile = 4;
+
+    /// <exception cref="NoRoomForResultsException">Nothing more can be written; the case counts as not run.</exception>
+    public CaseOutcome Do(StudyCase studyCase, CancellationToken stopping)
+    {
+        using var log = new CaseLog(runLog, studyCase.Name);
+        try
+        {
+            stopping.ThrowIfCancellationRequested();
+            var outcome = SolveAndPublish(studyCase, log, stopping);
+            publisher.Remove(results.Failure(studyCase.Name));
+            return outcome;
+        }
+        catch (OperationCanceledException) when (stopping.IsCancellationRequested)
+        {
+            return new CaseOutcome.NotRun();
+        }
+        catch (Exception e) when (DiskTrouble.StopsTheRun(e))
+        {
+            throw new NoRoomForResultsException(results.Study, e);
+        }
+        // Whatever it is, it must not take the neighbours of this case with it.
+        catch (Exception e)
+        {
+            return Fail(studyCase, e, log);
+        }
+    }
+
+    private CaseOutcome.Solved SolveAndPublish(StudyCase studyCase, CaseLog log, CancellationToken stopping)
+    {
+        var started = time.GetTimestamp();
+        log.Logger.Read(studyCase);
+        var curve = solve(studyCase.Rotor, stopping);
+        var summary = CaseSummary.Of(curve);
+        log.Logger.Balanced(studyCase, curve);
+        List<ResultContent> files = [new(CurveTable.FileName, CurveTable.Write(curve))];
+        if (SpanwiseTable.Write(curve, studyCase.Spanwise) is { } spanwise)
+            files.Add(new(SpanwiseTable.FileName, spanwise));
+        var seconds = time.GetElapsedTime(started).TotalSeconds;
+        log.Logger.Solved(studyCase, summary, seconds);
+        files.Add(new(CaseLog.FileName, log.ToBytes()));
+        files.Add(new(Receipt.FileName, ReceiptFile.Write(ReceiptOf(studyCase, summary, files, seconds))));
+        WithPatience(() => publisher.PublishCase(studyCase.Name, files));
+        return new CaseOutcome.Solved(summary, curve.RotorSolves);
+    }
+
+    private Receipt ReceiptOf(StudyCase studyCase, CaseSummary summary, IEnumerable<ResultContent> files, double seconds) => new(
+        Receipt.CurrentFormat, results.StudyName, studyCase.Name, studyCase.Title, studyCase.Fingerprint, identity.SolverVersion,
+        identity.ToolVersion, time.GetUtcNow(), seconds, studyCase.Values, studyCase.Inputs,
+        [.. files.Select(file => ResultFile.Of(file.Name, file.Bytes.Span))], summary, Caution.Text);
+
+    private CaseOutcome.Failed Fail(StudyCase studyCase, Exception trouble, CaseLog log)
+    {
+        var isOfTheDisk = trouble is IOException or UnauthorizedAccessException;
+        var reason = isOfTheDisk
+            ? $"its result cannot be written: {DiskTrouble.Reason(trouble)}"
+            : $"fault in BladeLoads, please report: {Printable.Of(trouble.Message)}";
+        log.Logger.Failed(studyCase, reason, isOfTheDisk ? null : trouble);
+        var record = new FailureRecord(
+            studyCase.Name, studyCase.Title, studyCase.Fingerprint, identity.SolverVersion, time.GetUtcNow(), reason, log.Lines);
+        try
+        {
+            WithPatience(() => publisher.PublishFile(results.Failure(studyCase.Name), ReceiptFile.Write(record)));
+        }
+        catch (Exception e) when (DiskTrouble.StopsTheRun(e))
+        {
+            throw new NoRoomForResultsException(results.Study, e);
+        }
+        catch (IOException e)
+        {
+            log.Logger.Warning("Case {Case}: its failure could not be recorded: {Reason}", studyCase.Name, DiskTrouble.Reason(e));
+        }
+        return new CaseOutcome.Failed(reason);
+    }
+
+    // Only a file in use is worth another try: a bad table stays bad.
+    private void WithPatience(Action publish)
+    {
+        for (var tries = 1; ; tries++)
+        {
+            try
+            {
+                publish();
+                return;
+            }
+            catch (IOException e) when (tries < TriesAtABusyFile && DiskTrouble.IsBusy(e))
+            {
+                waitForFile(tries);
+            }
+        }
+    }
+}
+
+/// <summary>What of the program itself a receipt names.</summary>
+public sealed record RunIdentity(int SolverVersion, string ToolVersion);

@@ -1,2 +1,0 @@
-namespace BladeLoads.Results;
-internal static class Placeholder;

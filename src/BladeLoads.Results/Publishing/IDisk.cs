@@ -1,0 +1,32 @@
+namespace BladeLoads.Results.Publishing;
+
+/// <summary>
+/// What publishing asks of the file system. Every member throws <see cref="IOException"/> or <see cref="UnauthorizedAccessException"/>
+/// where the system refuses; nothing fails silently.
+/// </summary>
+public interface IDisk
+{
+    /// <summary>Creates the folder and those above it; one that is there already is no error.</summary>
+    void CreateFolder(string path);
+
+    /// <summary>Writes a file that is not there yet.</summary>
+    void Write(string path, ReadOnlySpan<byte> bytes);
+
+    /// <summary>Returns when the file's bytes, or the folder's entries, would survive a power cut.</summary>
+    void Sync(string path);
+
+    /// <summary>Renames; a file replaces a file. False where a folder stands at the new place.</summary>
+    bool TryRename(string from, string to);
+
+    /// <summary>Exchanges two folders in one step. False where the file system cannot.</summary>
+    bool TryExchange(string one, string other);
+
+    /// <summary>Deletes a file, or a folder with all that is in it; what is not there is no error.</summary>
+    void Delete(string path);
+
+    /// <summary>
+    /// Takes the lock of a file, created if need be, until the returned value is disposed or the process dies: no lock outlives its
+    /// owner. Null while another holds it.
+    /// </summary>
+    IDisposable? TryLock(string path);
+}

@@ -1,0 +1,40 @@
+namespace BladeLoads.Results.Publishing;
+
+/// <summary>Where the results of a study lie. Absolute paths; nothing is created by asking.</summary>
+/// <param name="Root">The folder that <c>--results</c> names, absolute.</param>
+/// <param name="StudyName">The name of the study, safe as a folder name.</param>
+public sealed record ResultsFolder(string Root, string StudyName)
+{
+    /// <summary>The folder of the study: everything else lies in it.</summary>
+    public string Study => Path.Join(Root, StudyName);
+
+    public string Logs => Path.Join(Study, LogsName);
+
+    public string Summary => Path.Join(Study, Tables.SummaryTable.FileName);
+
+    public string Case(string name) => Path.Join(Study, name);
+
+    public string Failure(string name) => Path.Join(Study, FailuresName, name + ".json");
+
+    public string Failures => Path.Join(Study, FailuresName);
+
+    /// <summary>
+    /// Why no result folder can have this name, or null where it can: the study's folder needs some names itself, and a name beginning
+    /// with a point marks what is being written.
+    /// </summary>
+    public static string? Objection(string caseName)
+    {
+        if (caseName.Length == 0 || caseName[0] == '.' || caseName.AsSpan().ContainsAny('/', '\\', '\0'))
+            return "a case name may not be empty, begin with a point or hold a slash; rename the case file";
+        return OwnNames.Contains(caseName)
+            ? $"the results folder needs the name '{caseName}' itself; rename the case file" : null;
+    }
+
+    private const string LogsName = "logs";
+    private const string FailuresName = "failures";
+
+    private static readonly HashSet<string> OwnNames = new(StringComparer.OrdinalIgnoreCase)
+    {
+        LogsName, FailuresName, Tables.SummaryTable.FileName, "report.html", "changes.csv",
+    };
+}

@@ -1,0 +1,55 @@
+using System.CommandLine;
+using System.CommandLine.Help;
+using System.CommandLine.Invocation;
+
+namespace BladeLoads.Commands;
+
+/// <summary>The usual help, with examples of the command below it.</summary>
+internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLineAction
+{
+    private static readonly Dictionary<string, (string Line, string What)[]> Examples = new(StringComparer.Ordinal)
+    {
+        ["check"] =
+        [
+            ("bladeloads check inputs/tarn-valley", "every error and doubt of a study, by file, line and column"),
+            ("bladeloads check inputs/tarn-valley/cases/clean.toml", "those of one case alone"),
+        ],
+        ["plan"] =
+        [
+            ("bladeloads plan inputs/tarn-valley", "what a run would solve, and why"),
+            ("bladeloads plan inputs/tarn-valley --only 'soiled*'", "the same for some of the cases"),
+        ],
+        ["run"] =
+        [
+            ("bladeloads run inputs/tarn-valley", "solve what is not current; results go to ./results/tarn-valley"),
+            ("bladeloads run inputs/tarn-valley/cases/clean.toml", "one case file and its variants"),
+            ("bladeloads run inputs/tarn-valley --only 'clean*' --only '*fixed*'", "some of the cases"),
+            ("bladeloads run inputs/tarn-valley --all --results /data/results", "solve all again, results elsewhere"),
+            ("bladeloads run inputs/tarn-valley --workers 1 --quiet", "one case at a time, errors and warnings alone"),
+        ],
+        [""] =
+        [
+            ("bladeloads check inputs/tarn-valley", "is the input right?"),
+            ("bladeloads plan inputs/tarn-valley", "what would be solved, and why?"),
+            ("bladeloads run inputs/tarn-valley", "solve it"),
+            ("bladeloads run --help", "the options of a command"),
+        ],
+    };
+
+    public override bool ClearsParseErrors => true;
+
+    public override int Invoke(ParseResult parseResult)
+    {
+        usual.Invoke(parseResult);
+        var command = parseResult.CommandResult.Command;
+        var output = parseResult.InvocationConfiguration.Output;
+        output.WriteLine("Examples:");
+        foreach (var (line, what) in Examples[command is RootCommand ? "" : command.Name])
+        {
+            output.WriteLine($"  {line}");
+            output.WriteLine($"      {what}");
+        }
+        output.WriteLine();
+        return ExitCode.Good;
+    }
+}

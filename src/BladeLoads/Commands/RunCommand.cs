@@ -1,0 +1,121 @@
+using System.Collections.Immutable;
+using BladeLoads.Batch.Logs;
+using BladeLoads.Batch.Plan;
+using BladeLoads.Batch.Queue;
+using BladeLoads.Batch.Work;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Results.Tables;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Screen;
+using BladeLoads.Studies;
+
+namespace BladeLoads.Commands;
+
+/// <param name="Path">A study's folder, or a case file.</param>
+/// <param name="All">Solve current cases too.</param>
+internal sealed record RunRequest(string Path, string Results, int Workers, string[] Only, bool All, bool Quiet);
+
+/// <summary><c>bladeloads run</c>: solves what is not current and shows the summary.</summary>
+internal static class RunCommand
+{
+    public static int Run(RunRequest request, Surroundings surroundings)
+    {
+        using var signals = new StopSignals(surroundings);
+        var study = AskedStudy.Read(request.Path, surroundings);
+        FindingLines.Write(study.Asked, surroundings.Error, withSource: surroundings.ErrorIsTerminal);
+        var results = new ResultsFolder(Path.GetFullPath(request.Results), study.Asked.Name);
+        var (wholePlan, plan) = study.Plan(results, request.Only);
+        if (NothingMeant.Tell(plan, study.Asked, request.Only, surroundings))
+            return ExitCode.NothingCouldRun;
+        if (plan.Cases.IsEmpty)
+        {
+            surroundings.Error.WriteLine(FindingLines.Closing(study.Asked));
+            return ExitCode.NothingCouldRun;
+        }
+
+        var due = plan.Cases.Where(c => request.All || c.IsDue).Select(c => c.Case).ToImmutableArray();
+        if (!request.Quiet)
+            surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, due.Length));
+
+        using var publisher = new PublisherWhenNeeded(results, surroundings.Disk);
+        var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, signals, surroundings);
+        var rows = StudySummary.Rows(wholePlan, run.Outcomes);
+        if (run.NoRoom is null)
+            StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
+        var shown = RowsOf(plan, rows);
+        if (!request.Quiet)
+            SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
+        return Tell(run, shown, study.Asked, signals, surroundings);
+    }
+
+    private static RunResult NothingRun { get; } = new(ImmutableSortedDictionary<string, CaseOutcome>.Empty, null, []);
+
+    private static RunResult Solve(
+        ImmutableArray<StudyCase> due, RunRequest request, ResultsFolder results, PublisherWhenNeeded publisher, StopSignals signals,
+        Surroundings surroundings)
+    {
+        var screen = new ScreenLog(surroundings.Error);
+        publisher.Get();   // a folder that cannot be written to is told before a log file in it is tried
+        using var log = RunLog.Open(results.Logs, screen, surroundings.Time, screen.Line);
+        var work = new CaseWork(
+            surroundings.Solve, publisher.Get(), results, new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion), log.Logger,
+            surroundings.Time, surroundings.WaitForFile);
+        var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
+        RunResult Run() => StudyRun.Solve(due, work, request.Workers, progress, log.Logger, signals.Stopping);
+        try
+        {
+            if (request.Quiet)
+                return Run();
+            return surroundings.ErrorIsTerminal
+                ? ProgressBar.Show(Run, progress, screen)
+                : PlainProgress.Show(Run, progress, request.Workers, surroundings.Error, surroundings.Time);
+        }
+        catch (Exception e)
+        {
+            log.Logger.Fault(e);
+            return NothingRun with { Faults = [e] };
+        }
+    }
+
+    private static ImmutableArray<SummaryRow> RowsOf(StudyPlan plan, ImmutableArray<SummaryRow> rows)
+    {
+        var names = plan.Cases.Select(c => c.Case.Name).Concat(plan.Rejected).ToHashSet(StringComparer.Ordinal);
+        return [.. rows.Where(r => names.Contains(r.Case))];
+    }
+
+    private static SummaryRow? BaselineOf(Study study, ImmutableArray<SummaryRow> rows)
+        => study.Baseline is null ? null : rows.FirstOrDefault(r => r.Case == study.Baseline);
+
+    private static int Tell(
+        RunResult run, ImmutableArray<SummaryRow> rows, Study study, StopSignals signals, Surroundings surroundings)
+    {
+        if (!run.Faults.IsEmpty)
+            return ExitCode.Fault;   // told by the log
+        if (run.NoRoom is not null)
+        {
+            surroundings.Error.WriteLine($"{run.NoRoom}; {Count.Of(run.NotRun, "case")} not run");
+            return ExitCode.NoRoom;
+        }
+        if (signals.Code is { } code)
+        {
+            surroundings.Error.WriteLine(
+                $"stopped: {Count.Of(run.Solved, "case")} solved, {run.NotRun} not run; the same command goes on from here");
+            return code;
+        }
+        if (!study.Errors.IsEmpty)
+            surroundings.Error.WriteLine(FindingLines.Closing(study));
+        var allGood = run.Failed == 0 && run.NotRun == 0 && study.Errors.IsEmpty
+            && rows.All(r => r.State == "current" && r.Summary is { UnbalancedPoints: 0 });
+        return allGood ? ExitCode.Good : ExitCode.SomeNotGood;
+    }
+
+    /// <summary>Opens the results folder for writing when there is something to write: looking at current results needs no permission.</summary>
+    private sealed class PublisherWhenNeeded(ResultsFolder results, IDisk disk) : IDisposable
+    {
+        private Publisher? _publisher;
+
+        public Publisher Get() => _publisher ??= Publisher.Open(results, disk);
+
+        public void Dispose() => _publisher?.Dispose();
+    }
+}

@@ -1,0 +1,18 @@
+using BladeLoads.Batch.Work;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies;
+
+namespace BladeLoads.Commands;
+
+/// <summary>All that the commands touch outside themselves.</summary>
+/// <param name="OutIsTerminal">Whether someone looks at <paramref name="Out"/> just now.</param>
+/// <param name="ErrorIsTerminal">Whether someone looks at <paramref name="Error"/> just now.</param>
+internal sealed record Surroundings(
+    TextWriter Out, TextWriter Error, bool OutIsTerminal, bool ErrorIsTerminal, Func<string, Study> ReadStudy, SolveCase Solve,
+    IDisk Disk, TimeProvider Time, Action<int> WaitForFile)
+{
+    public static Surroundings OfThisProcess() => new(
+        Console.Out, Console.Error, !Console.IsOutputRedirected, !Console.IsErrorRedirected, StudyReader.Read, CaseSolver.Solve,
+        new Disk(), TimeProvider.System, tries => Thread.Sleep(TimeSpan.FromMilliseconds(50 << tries)));
+}

@@ -1,0 +1,52 @@
+using System.Globalization;
+using BladeLoads.Results.Wording;
+using BladeLoads.Studies;
+
+namespace BladeLoads.Screen;
+
+/// <summary>Errors and doubts of a study: the one place that gives them their shape.</summary>
+internal static class FindingLines
+{
+    private const int NamesShown = 3;
+
+    /// <summary>All of them in file order, each beginning with its place; the source line and a caret below it where asked for.</summary>
+    public static void Write(Study study, TextWriter output, bool withSource)
+    {
+        var all = study.Errors.Select(e => (Finding: e, Word: ""))
+            .Concat(study.Doubts.Select(d => (Finding: d, Word: "doubt: ")))
+            .OrderBy(f => f.Finding.File, StringComparer.Ordinal).ThenBy(f => f.Finding.Line).ThenBy(f => f.Finding.Column);
+        foreach (var (finding, word) in all)
+        {
+            output.WriteLine(Printable.Of($"{Place(finding)}: {word}{finding.Text}"));
+            if (withSource)
+                foreach (var line in SourceExcerpt.Of(study.Folder, finding))
+                    output.WriteLine(line);
+        }
+    }
+
+    /// <summary><c>3 errors in 2 files; clean-sea-level not run, 7 others can run</c>.</summary>
+    public static string Closing(Study study)
+    {
+        var errors = study.Errors.IsEmpty
+            ? "no errors"
+            : $"{Count.Of(study.Errors.Length, "error")} in {Count.Of(study.Errors.Select(e => e.File).Distinct().Count(), "file")}";
+        var doubts = study.Doubts.IsEmpty ? "" : $", {Count.Of(study.Doubts.Length, "doubt")}";
+        return Printable.Of($"{errors}{doubts}; {WhatRuns(study)}");
+    }
+
+    private static string Place(InputFinding finding) => finding switch
+    {
+        { Line: 0 } => finding.File,
+        { Column: 0 } => string.Create(CultureInfo.InvariantCulture, $"{finding.File}:{finding.Line}"),
+        _ => string.Create(CultureInfo.InvariantCulture, $"{finding.File}:{finding.Line}:{finding.Column}"),
+    };
+
+    private static string WhatRuns(Study study)
+    {
+        if (study.Rejected.IsEmpty)
+            return study.Cases.IsEmpty ? "nothing can run" : $"{Count.Of(study.Cases.Length, "case")} can run";
+        var more = study.Rejected.Length - NamesShown;
+        var names = string.Join(", ", study.Rejected.Take(NamesShown)) + (more > 0 ? $" and {more} more" : "");
+        return study.Cases.IsEmpty ? $"{names} not run, nothing can run" : $"{names} not run, {Count.Of(study.Cases.Length, "other")} can run";
+    }
+}

@@ -1,0 +1,92 @@
+using System.Globalization;
+using BladeLoads.Results.Comparison;
+using BladeLoads.Results.Receipts;
+using BladeLoads.Results.Tables;
+using BladeLoads.Results.Wording;
+
+namespace BladeLoads.Screen;
+
+/// <summary>The summary on the screen: the most useful columns, each row within about 110 characters.</summary>
+internal static class SummaryLines
+{
+    private const int WidestName = 40;
+    private const int RowsShown = 100;
+
+    /// <param name="baseline">The row that others are compared with; null for a study without one.</param>
+    /// <param name="folder">Where the results lie, told last.</param>
+    public static void Write(IReadOnlyCollection<SummaryRow> rows, SummaryRow? baseline, string folder, TextWriter output)
+    {
+        var shown = rows.Take(RowsShown).ToList();
+        var width = Math.Max("case".Length, shown.Select(r => Name(r.Case).Length).DefaultIfEmpty(0).Max());
+        output.WriteLine();
+        output.WriteLine(Row("case", width, ("best cp", 7), ("at TSR", 7), ("power kW", 9), ("rated m/s", 10), ("thrust kN", 10), ("at m/s", 7), ("flapwise kNm", 13)));
+        foreach (var row in shown)
+            output.WriteLine(Figures(row, width));
+        if (rows.Count > shown.Count)
+            output.WriteLine($"... and {rows.Count - shown.Count} more in {SummaryTable.FileName}");
+        if (baseline is not null)
+            WriteDifferences(shown, baseline, width, output);
+        output.WriteLine();
+        output.WriteLine("steady, characteristic, unfactored, without weight; no design envelope (each receipt.json says more)");
+        output.WriteLine(Printable.Of($"results: {folder}"));
+    }
+
+    private static void WriteDifferences(List<SummaryRow> rows, SummaryRow baseline, int width, TextWriter output)
+    {
+        output.WriteLine();
+        if (baseline.Summary is null)
+        {
+            output.WriteLine(Printable.Of($"no comparison: the baseline '{baseline.Case}' has no current result"));
+            return;
+        }
+        output.WriteLine(Printable.Of($"difference to {baseline.Case}, %"));
+        output.WriteLine(Row("case", width, ("best cp", 8), ("power", 9), ("rated", 9), ("thrust", 9), ("flapwise", 9)));
+        foreach (var row in rows)
+            if (row.Summary is not null && row.Case != baseline.Case)
+            {
+                var difference = BaselineDifference.Between(row.Summary, baseline.Summary);
+                output.WriteLine(Row(
+                    Name(row.Case), width, (Percent(difference.BestPowerCoefficient), 8), (Percent(difference.LargestElectricalPower), 9),
+                    (Percent(difference.RatedWindSpeed), 9), (Percent(difference.LargestThrust), 9),
+                    (Percent(difference.LargestFlapwiseMoment), 9)));
+            }
+    }
+
+    private static string Figures(SummaryRow row, int width)
+    {
+        if (row.Summary is not { } summary)
+            return $"{Name(row.Case).PadRight(width)}  {row.State}";
+        var figures = Row(
+            Name(row.Case), width,
+            (summary.BestPowerCoefficient is { } best ? best.Value.ToString("0.0000", CultureInfo.InvariantCulture) : "-", 7),
+            (Figure(summary.BestTipSpeedRatio), 7),
+            (Figure(summary.LargestElectricalPower?.Value / 1000), 9),
+            (Figure(summary.RatedWindSpeed), 10),
+            (Figure(summary.LargestThrust?.Value / 1000), 10),
+            (Figure(summary.LargestThrust?.WindSpeed), 7),
+            (Figure(summary.LargestFlapwiseMoment?.Value / 1000), 13));
+        return figures + Notes(row, summary);
+    }
+
+    private static string Notes(SummaryRow row, CaseSummary summary)
+    {
+        var state = row.State == "current" ? "" : $"  {row.State}";
+        return summary.UnbalancedPoints == 0 ? state : $"{state}  {summary.UnbalancedPoints} unbalanced";
+    }
+
+    private static string Row(string name, int width, params ReadOnlySpan<(string Text, int Width)> cells)
+    {
+        var row = name.PadRight(width);
+        foreach (var (text, cellWidth) in cells)
+            row += "  " + text.PadLeft(cellWidth - 1);
+        return row;
+    }
+
+    private static string Name(string name) => ShortName.Of(Printable.Of(name), WidestName);
+
+    private static string Figure(double? value) => value is not { } number
+        ? "-"
+        : number.ToString(Math.Abs(number) switch { >= 1000 => "0", >= 100 => "0.0", >= 10 => "0.00", _ => "0.000" }, CultureInfo.InvariantCulture);
+
+    private static string Percent(double? value) => value?.ToString("+0.00;-0.00;0.00", CultureInfo.InvariantCulture) ?? "-";
+}

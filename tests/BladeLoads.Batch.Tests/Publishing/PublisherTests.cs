@@ -1,0 +1,146 @@
+using BladeLoads.Batch.Tests.Building;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Results.Receipts;
+
+namespace BladeLoads.Batch.Tests.Publishing;
+
+public class PublisherTests
+{
+    private static readonly ResultContent[] Old =
+        [new("a.csv", "old a"u8.ToArray()), new("b.csv", "old b"u8.ToArray()), new("c.csv", "old c"u8.ToArray()), Receipt("old")];
+
+    private static readonly ResultContent[] New = [new("a.csv", "new a"u8.ToArray()), new("b.csv", "new b"u8.ToArray()), Receipt("new")];
+
+    [Theory]
+    [InlineData(true, true)]
+    [InlineData(true, false)]
+    [InlineData(false, true)]
+    [InlineData(false, false)]
+    public void Whichever_step_the_disk_refuses_the_old_result_or_the_new_one_is_there_whole(bool hasOld, bool canExchange)
+    {
+        var hasSucceeded = false;
+        for (var n = 1; !hasSucceeded; n++)
+        {
+            using var folder = new TemporaryFolder();
+            var results = Runs.Results(folder);
+            if (hasOld)
+                Publish(results, Old, new Disk());
+            var disk = new FailingDisk(n, canExchange: canExchange);
+            try
+            {
+                Publish(results, New, disk);
+                Assert.False(disk.HasRefused);
+                hasSucceeded = true;
+            }
+            catch (IOException)
+            {
+                Assert.True(disk.HasRefused);
+            }
+            // The next run tidies up, and finds what a person would find.
+            using (Publisher.Open(results, new Disk())) { }
+            var found = TemporaryFolder.Contents(results.Case("clean"));
+            var whole = hasSucceeded ? [New] : new[] { hasOld ? Old : [], New };
+            Assert.Contains(found, whole.Select(Contents));
+            Assert.All(Directory.EnumerateFileSystemEntries(results.Study), e => Assert.False(Path.GetFileName(e).StartsWith('.'), e));
+            Assert.True(n < 50, "never succeeds");
+        }
+    }
+
+    [Fact]
+    public void Steps_that_are_refused_once_alone_leave_a_whole_result_too()
+    {
+        for (var n = 1; n <= 9; n++)
+        {
+            using var folder = new TemporaryFolder();
+            var results = Runs.Results(folder);
+            Publish(results, Old, new Disk());
+            try
+            {
+                Publish(results, New, new FailingDisk(n, canExchange: n % 2 == 0, only: true));
+            }
+            catch (IOException)
+            {
+            }
+            Assert.Contains(TemporaryFolder.Contents(results.Case("clean")), new[] { Old, New }.Select(Contents));
+        }
+    }
+
+    [Fact]
+    public void What_a_killed_run_left_unfinished_is_removed_by_the_next()
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        var left = Path.Join(results.Study, ".clean.0123456789ab-1.new");
+        Directory.CreateDirectory(left);
+        File.WriteAllText(Path.Join(left, "a.csv"), "half");
+        File.WriteAllText(Path.Join(results.Study, ".run-0123456789ab.lock"), "");
+        using (Publisher.Open(results, new Disk())) { }
+        Assert.Empty(Directory.EnumerateFileSystemEntries(results.Study));
+    }
+
+    [Fact]
+    public void What_a_living_run_is_writing_is_left_alone()
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        Directory.CreateDirectory(results.Study);
+        using var held = new Disk().TryLock(Path.Join(results.Study, ".run-0123456789ab.lock"));
+        var left = Path.Join(results.Study, ".clean.0123456789ab-1.new");
+        Directory.CreateDirectory(left);
+        using (Publisher.Open(results, new Disk())) { }
+        Assert.True(Directory.Exists(left));
+    }
+
+    [Fact]
+    public void Hidden_files_that_are_not_ours_are_left_alone()
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        Directory.CreateDirectory(results.Study);
+        var theirs = Path.Join(results.Study, ".notes.new");
+        File.WriteAllText(theirs, "mine");
+        using (Publisher.Open(results, new Disk())) { }
+        Assert.True(File.Exists(theirs));
+    }
+
+    [Fact]
+    public void A_case_name_as_long_as_the_file_system_takes_can_be_published()
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        using var publisher = Publisher.Open(results, new Disk());
+        var name = string.Concat(Enumerable.Repeat("ø", 127));   // 254 bytes of the 255 there are
+        publisher.PublishCase(name, New);
+        Assert.Equal(Contents(New), TemporaryFolder.Contents(results.Case(name)));
+    }
+
+    [Theory]
+    [InlineData("logs")]
+    [InlineData("Failures")]
+    [InlineData("summary.csv")]
+    [InlineData(".hidden")]
+    [InlineData("../out")]
+    public void A_name_that_the_results_folder_needs_itself_is_refused(string name)
+    {
+        using var folder = new TemporaryFolder();
+        using var publisher = Publisher.Open(Runs.Results(folder), new Disk());
+        Assert.Throws<ArgumentException>(() => publisher.PublishCase(name, New));
+    }
+
+    [Fact]
+    public void A_flush_that_the_system_refuses_is_an_error()
+        => Assert.Equal(2, Assert.Throws<IOException>(() => new Disk().Sync("/no/such/place")).HResult);   // 2: ENOENT
+
+    private static void Publish(ResultsFolder results, ResultContent[] files, IDisk disk)
+    {
+        using var publisher = Publisher.Open(results, disk);
+        publisher.PublishCase("clean", files);
+    }
+
+    private static ResultContent Receipt(string title) => new("receipt.json", ReceiptFile.Write(new Receipt(
+        1, "fell", "clean", title, "f", 1, "0.0.0", DateTimeOffset.UnixEpoch, 0, new Dictionary<string, string>(), [], [],
+        CaseSummary.Of(FellRotor.Curve(FellRotor.Rotor())), "")));
+
+    private static Dictionary<string, string> Contents(IEnumerable<ResultContent> files)
+        => files.ToDictionary(f => f.Name, f => System.Text.Encoding.UTF8.GetString(f.Bytes.Span), StringComparer.Ordinal);
+}

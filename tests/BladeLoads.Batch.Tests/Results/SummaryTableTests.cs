@@ -1,0 +1,107 @@
+using System.Text;
+using BladeLoads.Batch.Tests.Building;
+using BladeLoads.Results.Comparison;
+using BladeLoads.Results.Receipts;
+using BladeLoads.Results.Tables;
+using BladeLoads.Rotor.Operation;
+
+namespace BladeLoads.Batch.Tests.Results;
+
+public class SummaryTableTests
+{
+    [Fact]
+    public void The_figures_of_a_curve_stand_with_the_wind_speeds_where_they_were_found()
+    {
+        var summary = CaseSummary.Of(FellRotor.Curve(FellRotor.Rotor(windSpeeds: 3)));
+        Assert.Equal(new Extreme(0.39, 1), summary.BestPowerCoefficient);
+        Assert.Equal(31, summary.BestTipSpeedRatio);
+        Assert.Equal(new Extreme(2700, 3), summary.LargestElectricalPower);
+        Assert.Equal(new Extreme(6000, 3), summary.LargestThrust);
+        Assert.Equal(2.5, summary.RatedWindSpeed);
+        Assert.Equal(new Extreme(-100, 1), summary.LargestInPlaneMoment);
+        Assert.Equal(new Extreme(5900, 1), summary.LargestFlapwiseMoment);
+        Assert.Equal((3, 0), (summary.Points, summary.UnbalancedPoints));
+    }
+
+    [Fact]
+    public void Power_held_at_rated_is_found_at_the_lowest_wind_speed_that_has_it()
+    {
+        var points = new[] { (11.0, 1.9e6), (12.0, 2e6), (13.0, 2e6 + 1e-5) }
+            .Select(p => FellRotor.Point(p.Item1) with { ElectricalPower = p.Item2 });
+        Assert.Equal(12, CaseSummary.Of(new PowerCurve([.. points], 11.5, PointMarks.None, 3)).LargestElectricalPower!.WindSpeed);
+    }
+
+    [Fact]
+    public void A_curve_without_a_balanced_point_has_no_figures()
+    {
+        var summary = CaseSummary.Of(FellRotor.Curve(FellRotor.Rotor(windSpeeds: 2), PointMarks.Unbalanced));
+        Assert.Null(summary.BestPowerCoefficient);
+        Assert.Null(summary.LargestThrust);
+        Assert.Equal(2, summary.UnbalancedPoints);
+        Assert.Equal("unbalanced:2", summary.MarksText);
+    }
+
+    [Fact]
+    public void Marks_are_counted_and_a_mark_of_the_curve_alone_has_no_count()
+    {
+        var curve = FellRotor.Curve(FellRotor.Rotor(windSpeeds: 2), PointMarks.OutsideReynolds | PointMarks.SeveralBalances);
+        Assert.Equal(
+            "several-balances:2 outside-reynolds:2 pitch-jump",
+            CaseSummary.Of(curve with { Marks = PointMarks.PitchJump }).MarksText);
+    }
+
+    [Fact]
+    public void A_case_without_a_current_result_keeps_its_row_and_has_no_figures()
+    {
+        var lines = Lines(null, new SummaryRow("clean", "Clean", "abc", "out of date", null));
+        Assert.Equal("clean,Clean,abc,,,,,,,,,,,,,,,,,,,,out of date", lines[1]);
+    }
+
+    [Fact]
+    public void Each_case_is_compared_with_the_baseline_in_percent()
+    {
+        var one = Summary(cp: 0.45, flapwise: -5500, rated: 11);
+        var difference = BaselineDifference.Between(one, Summary(cp: 0.5, flapwise: 5000, rated: null));
+        Assert.Equal(-10, difference.BestPowerCoefficient!.Value, 1e-12);
+        Assert.Equal(10, difference.LargestFlapwiseMoment!.Value, 1e-12);
+        Assert.Equal(0, difference.LargestThrust);
+        Assert.Null(difference.RatedWindSpeed);
+    }
+
+    [Fact]
+    public void A_study_with_a_baseline_has_five_columns_more()
+    {
+        var row = new SummaryRow("clean", "", "", "current", Summary(0.5, 1, 1));
+        Assert.Equal(SummaryTable.Columns.Length, Lines(null, row)[0].Split(',').Length);
+        var compared = Lines("clean", row);
+        Assert.EndsWith(
+            ",state,best_power_coefficient_difference_percent,largest_electrical_power_difference_percent,"
+            + "largest_thrust_difference_percent,rated_wind_speed_difference_percent,largest_aero_root_flapwise_moment_difference_percent",
+            compared[0], StringComparison.Ordinal);
+        Assert.EndsWith(",current,0,0,0,0,0", compared[1], StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("=1+1", "\"'=1+1\"")]
+    [InlineData("-2", "\"'-2\"")]
+    [InlineData("+2", "\"'+2\"")]
+    [InlineData("@x", "\"'@x\"")]
+    [InlineData("\tx", "\"'\tx\"")]
+    [InlineData("\rx", "\"'\rx\"")]
+    [InlineData("\nx", "\"'\nx\"")]
+    [InlineData("a \"b\", c", "\"a \"\"b\"\", c\"")]
+    [InlineData("<script>", "<script>")]
+    public void A_title_stays_text_in_a_spreadsheet(string title, string cell)
+    {
+        var table = Encoding.UTF8.GetString(SummaryTable.Write([new SummaryRow("clean", title, "", "missing", null)], null));
+        Assert.Contains($"\nclean,{cell},,", table, StringComparison.Ordinal);
+    }
+
+    private static CaseSummary Summary(double cp, double flapwise, double? rated) => CaseSummary.Of(FellRotor.Curve(FellRotor.Rotor())) with
+    {
+        BestPowerCoefficient = new Extreme(cp, 8), LargestFlapwiseMoment = new Extreme(flapwise, 8), RatedWindSpeed = rated,
+    };
+
+    private static string[] Lines(string? baseline, params SummaryRow[] rows)
+        => Encoding.UTF8.GetString(SummaryTable.Write(rows, baseline)).TrimEnd('\n').Split('\n');
+}
