@@ -1,0 +1,43 @@
+using BladeLoads.Results.Tables;
+using BladeLoads.Results.Wording;
+using BladeLoads.Rotor.Loads;
+using BladeLoads.Rotor.Operation;
+
+namespace BladeLoads.EndToEnd.Documentation;
+
+public sealed class Documented_columns
+{
+    [Fact]
+    public void Of_the_power_curve_are_those_written_in_their_order()
+        => Assert.Equal<string>(CurveTable.Columns, DocumentedTable.Names("### power-curve.csv"));
+
+    [Fact]
+    public void Of_the_spanwise_table_are_those_written_in_their_order()
+        => Assert.Equal<string>(SpanwiseTable.Columns, DocumentedTable.Names("### spanwise.csv"));
+
+    [Fact]
+    public void Of_the_summary_are_those_written_in_their_order()
+        => Assert.Equal<string>(SummaryTable.Columns, DocumentedTable.Names("### summary.csv"));
+
+    [Fact]
+    public void Of_the_baseline_are_those_written_in_their_order()
+        => Assert.Equal<string>(SummaryTable.BaselineColumns, DocumentedTable.Names(
+            "With a `baseline` in study.toml, five columns follow: how far the case lies from the baseline, in percent of the baseline's value."));
+
+    [Fact]
+    public void Hold_every_region_by_its_word()
+        => Assert.Equal(Enum.GetValues<Region>().Select(StatusWords.Of), DocumentedTable.Names("### Regions"));
+
+    [Fact]
+    public void Hold_every_mark_of_a_point_by_its_word()
+        => Assert.Equal(
+            Enum.GetValues<PointMarks>().Where(mark => mark != PointMarks.None).Select(StatusWords.Of), MarksIn("P"));
+
+    [Fact]
+    public void Hold_every_mark_of_an_element_by_its_word()
+        => Assert.Equal(
+            Enum.GetValues<ElementMarks>().Where(mark => mark != ElementMarks.None).Select(StatusWords.Of), MarksIn("S"));
+
+    private static IEnumerable<string> MarksIn(string table)
+        => DocumentedTable.Rows("### Marks").Where(row => row[1].Split(' ').Contains(table)).Select(row => row[0].Trim('`'));
+}
