@@ -109,7 +109,8 @@ internal static class PlausibleRotors
         return Widened(trial, wide).At(point, rotor => rotor with
         {
             Sections = SectionSet.Of(shapes.Select((shape, i) => PlausibleSections.Build("s" + i, shape))),
-        }) with { Shapes = shapes };
+        }) with
+        { Shapes = shapes };
     }
 
     private static Trial Widened(Trial trial, double factor) => trial.At(trial.Operation, rotor => rotor with

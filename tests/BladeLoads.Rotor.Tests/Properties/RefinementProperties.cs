@@ -36,7 +36,12 @@ public sealed class RefinementProperties(ITestOutputHelper output)
         from shape in PlausibleSections.Shapes
         select new Design(blades, hub, designRatio, ratio, lift, chord, pitch, spacing, heavy, shape with
         {
-            StallAngle = Math.Max(11, shape.StallAngle), StallDrop = 0.2, StallWidth = 8, DragNoise = 0, Range = null, Reynolds = [double.NaN],
+            StallAngle = Math.Max(11, shape.StallAngle),
+            StallDrop = 0.2,
+            StallWidth = 8,
+            DragNoise = 0,
+            Range = null,
+            Reynolds = [double.NaN],
         });
 
     [Fact]
