@@ -16,6 +16,8 @@ internal sealed class StudyReading
     private readonly CaseBuilder _builder;
     private readonly List<StudyCase> _cases = [];
     private readonly SortedSet<string> _rejected = new(StringComparer.Ordinal);
+    // Some file systems take capitals for small letters.
+    private readonly Dictionary<string, string> _fileNames = new(StringComparer.OrdinalIgnoreCase);
     private readonly Dictionary<string, ImmutableArray<string>> _variantNames = new(StringComparer.Ordinal);
 
     public StudyReading(StudyPlace place, IStudyFiles files)
@@ -30,6 +32,8 @@ internal sealed class StudyReading
         var start = ReadStartingValues();
         foreach (var caseFile in _place.CaseFiles)
             ReadCase(caseFile, start);
+        if (_place.IsWhole)
+            PassedOver.Doubt(_folder, _findings);
         var baseline = ReadBaseline(start);
         return new Study(
             Path.GetFileName(_place.Folder) is { Length: > 0 } name ? name : "study", _place.Folder, baseline,
@@ -52,6 +56,14 @@ internal sealed class StudyReading
         {
             _findings.Error(new InputFinding(file, 0, 0, problem));
             _rejected.Add(VisibleText.Escape(file));
+            return;
+        }
+        var fileName = Path.GetFileName(fullPath);
+        if (!_fileNames.TryAdd(fileName, fileName))
+        {
+            _findings.Error(new InputFinding(file, 0, 0,
+                $"the name differs from {_fileNames[fileName]} in letter case only, and some systems take both for one; rename one"));
+            _rejected.Add(name);
             return;
         }
         var own = CaseFile.Read(_folder, fullPath, _findings);

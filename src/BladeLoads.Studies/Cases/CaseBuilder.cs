@@ -27,10 +27,15 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         var (blade, sections) = ReadBlade(values);
         var bladeCount = values.WholeNumber("rotor.blade_count", null, 1, MostBlades);
         var coneDeg = values.Number("rotor.cone_deg", CaseDefaults.ConeDeg, Bounds.Within(80));
-        var density = values.Number("air.density_kg_m3", CaseDefaults.Density, Bounds.AboveZero);
-        var viscosity = values.Number("air.dynamic_viscosity_Pa_s", CaseDefaults.DynamicViscosity, Bounds.AboveZero);
+        var density = values.Number("air.density_kg_m3", CaseDefaults.Density, Bounds.AboveZeroTo(Limits.Density));
+        UsualRanges.Check(values, "air.density_kg_m3", density);
+        var viscosity = values.Number(
+            "air.dynamic_viscosity_Pa_s", CaseDefaults.DynamicViscosity, Bounds.AboveZeroTo(Limits.DynamicViscosity));
+        UsualRanges.Check(values, "air.dynamic_viscosity_Pa_s", viscosity);
         var windSpeeds = ReadWindSpeeds(values);
         var control = ControlReader.Read(values, windSpeeds, folder, tables);
+        if (control.Strategy is { } strategy && blade?.Blade is { } shape)
+            UsualRanges.CheckTipSpeed(values, strategy, shape, double.DegreesToRadians(coneDeg));
         var model = ModelReader.Read(values);
         var spanwise = SpanwiseReader.Read(values, windSpeeds);
         CheckTheRest(values);
@@ -63,6 +68,9 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         var set = Reference(values, "polars", EntryKind.Folder);
         if (blade is null || set is null)
         {
+            // Which tables the blade would name is not known; what is wrong in any of them is told with the rest.
+            if (set is not null)
+                tables.ReadAll(set);
             values.Spoil();
             return (blade, null);
         }
@@ -100,7 +108,7 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         }
         if (!_windSpeeds.TryGetValue(entry.Value, out var known))
         {
-            var speeds = WindSpeeds.Read(entry.Value, findings.Error);
+            var speeds = WindSpeeds.Read(entry.Value, findings);
             known = (speeds, CanonicalText.Of(speeds));
             _windSpeeds.Add(entry.Value, known);
         }

@@ -141,6 +141,13 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         return double.NaN;
     }
 
+    /// <summary>Raises a doubt at the value of a key; the text goes on after the key's name.</summary>
+    public void Doubt(string path, string found)
+    {
+        var entry = Find(path)!;
+        findings.Doubt(entry.Value.At, $"{entry.Known.Name} {found}");
+    }
+
     /// <summary>Reports at a key.</summary>
     public void RefuseKey(string path, string text) => Refuse(Find(path)!.Key, text);
 
@@ -169,9 +176,8 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         var trimmed = text.Trim();
         if (NumberText.TryParse(Encoding.UTF8.GetBytes(trimmed), out _))
             return $"is {quoted.Found} in quotes, which is text; write the number without quotes: {trimmed}";
-        var withPoint = trimmed.Replace(',', '.');
-        return trimmed.Count(c => c == ',') == 1 && NumberText.TryParse(Encoding.UTF8.GetBytes(withPoint), out _)
-            ? $"is {quoted.Found}; write decimals with a point and no quotes: {withPoint}"
+        return NumberText.Misprint(trimmed) is { } misprint
+            ? $"is {quoted.Found}{misprint}, without quotes"
             : $"is {quoted.Found}; give a number, such as {entry.Known.Example}";
     }
 

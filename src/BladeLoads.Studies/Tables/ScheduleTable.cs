@@ -24,11 +24,11 @@ internal sealed record ScheduleTable(ImmutableArray<OperatingPoint> Points, stri
             var previous = (WindSpeed: double.NegativeInfinity, Line: 0);
             while (rows.Read())
             {
-                var windSpeed = NotNegative(rows, "wind_speed_m_s");
+                var windSpeed = UpTo(Limits.WindSpeed, rows, "wind_speed_m_s");
                 if (windSpeed <= previous.WindSpeed)
                     rows.Error("wind_speed_m_s",
                         Rising.Problem("wind_speed_m_s", previous, windSpeed, rows.Line, "wind speeds must rise"));
-                var rotorSpeedRpm = NotNegative(rows, "rotor_speed_rpm");
+                var rotorSpeedRpm = UpTo(Limits.RotorSpeedRpm, rows, "rotor_speed_rpm");
                 var pitchDeg = rows.Number("pitch_deg");
                 if (Math.Abs(pitchDeg) > 180)
                     rows.Error("pitch_deg", $"pitch_deg is {CanonicalText.Of(pitchDeg)}; give an angle from -180 to 180");
@@ -47,12 +47,12 @@ internal sealed record ScheduleTable(ImmutableArray<OperatingPoint> Points, stri
             new InputFile(input.File, input.Sha256, contents));
     }
 
-    private static double NotNegative(CsvRows rows, string column)
+    private static double UpTo(double limit, CsvRows rows, string column)
     {
         var value = rows.Number(column);
-        if (!(value < 0))
+        if (!(value < 0 || value > limit))
             return value;
-        rows.Error(column, $"{column} is {CanonicalText.Of(value)}; it must be 0 or more");
+        rows.Error(column, $"{column} is {CanonicalText.Of(value)}; it must be from 0 to {CanonicalText.Of(limit)}");
         return double.NaN;
     }
 }
