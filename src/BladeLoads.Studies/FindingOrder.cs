@@ -1,8 +1,8 @@
 namespace BladeLoads.Studies;
 
 /// <summary>
-/// The order in which findings are told: study.toml, cases, blades, polars, everything else; then by name of the file (ordinal), line
-/// and column. What concerns a whole file comes first in it, what concerns a whole line last in that.
+/// The order in which findings are told: study.toml, cases, blades, polars, everything else; then by name of the file
+/// (ordinal), line and column. What concerns a whole file comes first in it, what concerns a whole line last in that.
 /// </summary>
 public sealed class FindingOrder : IComparer<InputFinding>
 {

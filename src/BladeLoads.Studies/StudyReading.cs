@@ -10,14 +10,14 @@ namespace BladeLoads.Studies;
 /// <summary>One reading of a study, from its files to its cases.</summary>
 internal sealed class StudyReading
 {
+    // Some file systems take capitals for small letters.
+    private readonly Dictionary<string, string> _fileNames = new(StringComparer.OrdinalIgnoreCase);
     private readonly StudyPlace _place;
     private readonly StudyFolder _folder;
     private readonly Findings _findings = new();
     private readonly CaseBuilder _builder;
     private readonly List<StudyCase> _cases = [];
     private readonly SortedSet<string> _rejected = new(StringComparer.Ordinal);
-    // Some file systems take capitals for small letters.
-    private readonly Dictionary<string, string> _fileNames = new(StringComparer.OrdinalIgnoreCase);
     private readonly Dictionary<string, ImmutableArray<string>> _variantNames = new(StringComparer.Ordinal);
 
     public StudyReading(StudyPlace place, IStudyFiles files)
@@ -62,7 +62,8 @@ internal sealed class StudyReading
         if (!_fileNames.TryAdd(fileName, fileName))
         {
             _findings.Error(new InputFinding(file, 0, 0,
-                $"the name differs from {_fileNames[fileName]} in letter case only, and some systems take both for one; rename one"));
+                $"the name differs from {_fileNames[fileName]} in letter case only, "
+                + "and some systems take both for one; rename one"));
             _rejected.Add(name);
             return;
         }

@@ -31,8 +31,10 @@ internal static class ControlReader
     /// <param name="windSpeeds">m/s; empty when they are not known.</param>
     public static ControlValues Read(CaseValues values, ImmutableArray<double> windSpeeds, StudyFolder folder, StudyTables tables)
     {
-        var cutIn = values.Number("control.cut_in_wind_speed_m_s", CaseDefaults.CutInWindSpeed, Bounds.FromTo(0, Limits.WindSpeed));
-        var cutOut = values.Number("control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Bounds.AboveZeroTo(Limits.WindSpeed));
+        var cutIn = values.Number(
+            "control.cut_in_wind_speed_m_s", CaseDefaults.CutInWindSpeed, Bounds.FromTo(0, Limits.WindSpeed));
+        var cutOut = values.Number(
+            "control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Bounds.AboveZeroTo(Limits.WindSpeed));
         RefuseExchanged(values, "control.cut_in_wind_speed_m_s", cutIn, "control.cut_out_wind_speed_m_s", cutOut);
         var efficiency = values.Number("control.drivetrain_efficiency", CaseDefaults.DrivetrainEfficiency, Bounds.AboveZeroToOne);
         var ratedPowerKiloWatt = values.OptionalNumber("control.rated_power_kW", Bounds.AboveZeroTo(Limits.RatedPowerKiloWatt));
@@ -58,8 +60,10 @@ internal static class ControlReader
     {
         var tipSpeedRatio = values.RequiredNumber("control.tip_speed_ratio", Bounds.AboveZero, NotYet.TipSpeedRatioLeftOut);
         var finePitch = values.RequiredNumber("control.fine_pitch_deg", Bounds.Within(90), NotYet.FinePitchLeftOut);
-        var slowest = values.Number("control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Bounds.FromTo(0, Limits.RotorSpeedRpm));
-        var fastest = values.Number("control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Bounds.AboveZeroTo(Limits.RotorSpeedRpm));
+        var slowest = values.Number(
+            "control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Bounds.FromTo(0, Limits.RotorSpeedRpm));
+        var fastest = values.Number(
+            "control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Bounds.AboveZeroTo(Limits.RotorSpeedRpm));
         RefuseExchanged(values, "control.min_rotor_speed_rpm", slowest, "control.max_rotor_speed_rpm", fastest);
         values.CheckedChoice("control.speed_limited_pitch", "hold", "best");
         var aboveRated = values.Choice("control.above_rated", CaseDefaults.AboveRated(values.Has("control.rated_power_kW")),

@@ -21,7 +21,7 @@ internal static class PassedOver
     private static bool LooksLikeCase(string name)
     {
         var ending = name[(name.LastIndexOf('.') + 1)..];
-        return name.Contains('.', StringComparison.Ordinal) && ending.All(char.IsAsciiLetter) && Nearest.Of(ending, Endings) is not null
+        return ending != name && ending.All(char.IsAsciiLetter) && Nearest.Of(ending, Endings) is not null
             || name.EndsWith(CaseName.Ending + ".txt", StringComparison.OrdinalIgnoreCase);
     }
 }

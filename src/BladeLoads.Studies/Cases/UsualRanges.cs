@@ -4,7 +4,9 @@ using BladeLoads.Studies.Fingerprints;
 
 namespace BladeLoads.Studies.Cases;
 
-/// <summary>Values that can be, but are more likely in another unit than meant: each is raised as a doubt. Common practice, no source.</summary>
+/// <summary>
+/// Values that can be, but are more likely in another unit than meant: each is raised as a doubt. Common practice, no source.
+/// </summary>
 internal static class UsualRanges
 {
     private const double SlowestTip = 5, FastestTip = 150; // m/s
@@ -40,7 +42,8 @@ internal static class UsualRanges
         if (!values.Has(path) || !(tipSpeed is > 0 and < SlowestTip or > FastestTip))
             return;
         var rpm = CanonicalText.Of(Math.Round(rotorSpeed * 60 / Math.Tau, 6));
-        values.Doubt(path, $"{(strategy is Control.Schedule ? "goes up to" : "is")} {rpm}{(strategy is Control.Schedule ? " rpm" : "")}, "
-            + $"a tip speed of {CanonicalText.Of(Math.Round(tipSpeed, 2))} m/s; 5 to 150 m/s are usual, and rotor speeds are in rpm");
+        var found = strategy is Control.Schedule ? $"goes up to {rpm} rpm" : $"is {rpm}";
+        values.Doubt(path, $"{found}, a tip speed of {CanonicalText.Of(Math.Round(tipSpeed, 2))} m/s; "
+            + "5 to 150 m/s are usual, and rotor speeds are in rpm");
     }
 }

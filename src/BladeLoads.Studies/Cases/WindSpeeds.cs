@@ -36,7 +36,8 @@ internal static class WindSpeeds
             if (speed <= 0)
                 return Refuse(item.At, $"holds {item.Found}; wind speeds must be above 0", findings);
             if (speed > Limits.WindSpeed)
-                return Refuse(item.At, $"holds {item.Found}; wind speeds must be at most {CanonicalText.Of(Limits.WindSpeed)} m/s", findings);
+                return Refuse(item.At,
+                    $"holds {item.Found}; wind speeds must be at most {CanonicalText.Of(Limits.WindSpeed)} m/s", findings);
             if (speeds.Count > 0 && speed <= speeds[^1])
                 return Refuse(item.At, speed == speeds[^1]
                     ? $"holds {item.Found} twice; each wind speed once"
@@ -51,7 +52,8 @@ internal static class WindSpeeds
         foreach (var entry in range.Entries)
         {
             if (!RangeKeys.Contains(entry.Name))
-                return Refuse(entry.Key, $"has an unknown key {VisibleText.Quote(entry.Name)}; known are from, to, step", findings);
+                return Refuse(entry.Key,
+                    $"has an unknown key {VisibleText.Quote(entry.Name)}; known are from, to, step", findings);
             if (entry.Value is not TomlValue.Number { Value: var number } || !double.IsFinite(number))
                 return Refuse(entry.Value.At,
                     $"has {entry.Name} = {entry.Value.Found}; give a finite number, without quotes", findings);
@@ -77,7 +79,8 @@ internal static class WindSpeeds
             if (!(speeds[i] > speeds[i - 1]))
                 return RefuseStep($"too small beside {CanonicalText.Of(from)}");
         if (to - speeds[^1] > StepSlack * step)
-            findings.Doubt(range.Find("to")!.Value.At, $"{CanonicalText.Of(to)} is not reached in steps of {CanonicalText.Of(step)}; "
+            findings.Doubt(range.Find("to")!.Value.At,
+                $"{CanonicalText.Of(to)} is not reached in steps of {CanonicalText.Of(step)}; "
                 + $"the last wind speed is {CanonicalText.Of(speeds[^1])}");
         return speeds;
 

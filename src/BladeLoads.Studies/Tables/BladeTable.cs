@@ -46,8 +46,8 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
                     rows.Error("radius_m",
                         Rising.Problem("radius_m", previous, radius, rows.Line, "radii must rise from root to tip"));
                 if (radius > Limits.Radius)
-                    rows.Error("radius_m",
-                        $"radius_m is {CanonicalText.Of(radius)}; it must be at most {CanonicalText.Of(Limits.Radius)}, in metres");
+                    rows.Error("radius_m", $"radius_m is {CanonicalText.Of(radius)}; "
+                        + $"it must be at most {CanonicalText.Of(Limits.Radius)}, in metres");
                 var chord = Positive(rows, "chord_m");
                 var twist = rows.Number("twist_deg");
                 if (Math.Abs(twist) > 180)

@@ -78,7 +78,8 @@ internal sealed class CsvRows : IDisposable
     }
 
     /// <summary>
-    /// Goes to the next row with one value a column; rows with more or fewer are passed over, and reported where the header is sound.
+    /// Goes to the next row with one value a column; rows with more or fewer are passed over, and reported where the header is
+    /// sound.
     /// </summary>
     public bool Read()
     {

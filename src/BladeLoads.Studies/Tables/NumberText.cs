@@ -37,7 +37,9 @@ internal static partial class NumberText
         return $"{name} is {quoted}; {(NotFinite().IsMatch(text) ? "give a finite number" : "give a number, such as 0.8")}";
     }
 
-    /// <summary>How a number that is written in another way than ours goes on after <c>name is 'text'</c>; null for any other text.</summary>
+    /// <summary>
+    /// What to say after <c>name is 'text'</c> of a number that is written in another way than ours; null for any other text.
+    /// </summary>
     public static string? Misprint(string text)
     {
         if (ForeignSigns(text) is { } signs)
@@ -66,7 +68,7 @@ internal static partial class NumberText
 
     // A digit before the point: case files ask for one.
     private static string WithPoint(string text)
-        => text.Replace(',', '.') is var plain && text.TrimStart('+', '-')[0] == ',' ? plain.Replace(".", "0.", StringComparison.Ordinal) : plain;
+        => text.Replace(",", text.TrimStart('+', '-')[0] == ',' ? "0." : ".", StringComparison.Ordinal);
 
     private static string WithoutCommas(string text) => text.Replace(",", "", StringComparison.Ordinal);
 

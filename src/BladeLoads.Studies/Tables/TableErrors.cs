@@ -3,7 +3,9 @@ using System.Text.RegularExpressions;
 
 namespace BladeLoads.Studies.Tables;
 
-/// <summary>The errors of one table. Of one kind in one column the first are told one by one, the others by their number.</summary>
+/// <summary>
+/// The errors of one table. Of one kind in one column the first are told one by one, the others by their number.
+/// </summary>
 internal sealed partial class TableErrors(Findings findings)
 {
     private const int MostToldOfAKind = 3;
@@ -11,7 +13,6 @@ internal sealed partial class TableErrors(Findings findings)
 
     private readonly Dictionary<(string Column, string Kind), (int Count, Place FirstUntold)> _kinds = [];
     private readonly Dictionary<string, string> _questions = new(StringComparer.Ordinal);
-
     private int _total;
 
     public bool Any => _total > 0;
@@ -39,8 +40,9 @@ internal sealed partial class TableErrors(Findings findings)
     {
         foreach (var ((column, _), (count, firstUntold)) in _kinds)
             if (count > MostToldOfAKind)
-                findings.Error(firstUntold, string.Create(CultureInfo.InvariantCulture,
-                    $"and {(AreTooMany ? "at least " : "")}{count - MostToldOfAKind} more like it{(column.Length == 0 ? "" : $" in column {column}")}")
+                findings.Error(firstUntold, $"and {(AreTooMany ? "at least " : "")}"
+                    + $"{(count - MostToldOfAKind).ToString(CultureInfo.InvariantCulture)} more like it"
+                    + (column.Length == 0 ? "" : $" in column {column}")
                     + (_questions.TryGetValue(column, out var question) ? $"; {question}" : ""));
     }
 

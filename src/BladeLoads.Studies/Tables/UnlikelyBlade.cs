@@ -22,8 +22,9 @@ internal static class UnlikelyBlade
         for (var i = 0; i < cells.Count; i++)
             if (blade.Stations[i].Chord > WideChord * blade.TipRadius)
             {
-                findings.Doubt(cells[i].Chord, $"chord_m is {CanonicalText.Of(blade.Stations[i].Chord)}, more than half the tip radius "
-                    + $"of {CanonicalText.Of(blade.TipRadius)} m; radius and chord are both in metres");
+                findings.Doubt(cells[i].Chord, $"chord_m is {CanonicalText.Of(blade.Stations[i].Chord)}, "
+                    + $"more than half the tip radius of {CanonicalText.Of(blade.TipRadius)} m; "
+                    + "radius and chord are both in metres");
                 return;
             }
     }
