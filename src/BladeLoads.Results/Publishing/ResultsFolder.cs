@@ -1,3 +1,4 @@
+using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Tables;
 
 namespace BladeLoads.Results.Publishing;
@@ -36,7 +37,7 @@ public sealed record ResultsFolder(string Root, string StudyName)
     public string KeptAs(string name) => Path.Join(Kept, name);
 
     /// <summary>What moved in the last run.</summary>
-    public string Changes => Path.Join(Study, ChangesName);
+    public string Changes => Path.Join(Study, ChangesTable.FileName);
 
     /// <summary>
     /// Why no result folder can have this name, or null where it can: the study's folder needs some names itself, and a name beginning
@@ -55,10 +56,9 @@ public sealed record ResultsFolder(string Root, string StudyName)
     private const string TablesName = "tables";
     private const string ReplacedName = "replaced";
     private const string KeptName = "kept";
-    private const string ChangesName = "changes.csv";
 
     private static readonly HashSet<string> OwnNames = new(StringComparer.OrdinalIgnoreCase)
     {
-        LogsName, FailuresName, TablesName, ReplacedName, KeptName, SummaryTable.FileName, "report.html", ChangesName,
+        LogsName, FailuresName, TablesName, ReplacedName, KeptName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
     };
 }
