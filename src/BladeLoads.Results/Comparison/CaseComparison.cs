@@ -10,8 +10,13 @@ namespace BladeLoads.Results.Comparison;
 public sealed record FigureChange(
     string Name, string Unit, FigureValue? Old, FigureValue? New, double? Difference, double? Percent, bool HasTurned)
 {
-    /// <summary>Whether there is anything to tell: another number, or one that came or went.</summary>
-    public bool IsChange => Difference is { } difference ? difference != 0 || HasTurned : Old is not null || New is not null;
+    // Rated power and whatever hangs on it differ in the last digits of a root finder between any two solutions.
+    private const double SameWithin = 1e-9;
+
+    /// <summary>Whether there is anything to tell: a number that differs by more than its last digits, or one that came or went.</summary>
+    public bool IsChange => Difference is { } difference
+        ? HasTurned || Math.Abs(difference) > SameWithin * Math.Max(Math.Abs(Old?.Value ?? 0), Math.Abs(New?.Value ?? 0))
+        : Old is not null || New is not null;
 
     /// <summary>Whether it moved by more than so many percent; what has no percentage counts as moved if it changed at all.</summary>
     public bool IsMoreThan(double percent) => IsChange && (HasTurned || Percent is not { } moved || Math.Abs(moved) > percent);

@@ -23,6 +23,7 @@ public static class ComparisonJson
             foreach (var comparison in comparisons)
                 Case(json, comparison);
             json.WriteEndArray();
+            json.WriteString("caution", Wording.Caution.Text);
             json.WriteEndObject();
         }
         return Encoding.UTF8.GetString(bytes.ToArray());

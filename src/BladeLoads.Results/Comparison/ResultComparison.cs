@@ -71,7 +71,7 @@ public static class ResultComparison
             return new FigureChange(name, unit, null, null, null, null, false);
         var (old, now) = both.MaxBy(p => Math.Abs(p.New[column]!.Value - p.Old[column]!.Value));
         var change = Change(name, unit, false, new(old[column]!.Value, old.WindSpeed), new(now[column]!.Value, now.WindSpeed));
-        return change.Difference == 0 ? new FigureChange(name, unit, null, null, 0, 0, false) : change;
+        return change.IsChange ? change : new FigureChange(name, unit, null, null, 0, 0, false);
     }
 
     private static (List<(StoredPoint Old, StoredPoint New)> Common, CommonWindSpeeds WindSpeeds) Match(StoredCurve old, StoredCurve now)

@@ -48,7 +48,7 @@ public sealed record ResultSet(string Name, string Folder, bool IsSingle, Immuta
             (_, true) => [CaseOf(now)],
             _ => old.Cases.Concat(now.Cases).Select(c => c.Case).Distinct(StringComparer.Ordinal).Order(StringComparer.Ordinal).ToList(),
         };
-        return [.. names.Select(n => Compare(n, old.IsSingle ? old.Folder : old.Of(n), now.IsSingle ? now.Folder : now.Of(n), why))];
+        return [.. names.AsParallel().AsOrdered().Select(n => Compare(n, old.IsSingle ? old.Folder : old.Of(n), now.IsSingle ? now.Folder : now.Of(n), why))];
     }
 
     private static CaseComparison Compare(string name, string? old, string? now, Func<Receipt, Receipt, string> why) => (old, now) switch

@@ -47,9 +47,16 @@ internal sealed partial class RunMark : IDisposable
         foreach (var path in Directory.EnumerateFiles(_folder, ".run-*.lock"))
             if (OwnedName().Match(Path.GetFileName(path)) is { Success: true } name && name.Groups["run"].Value != _run)
             {
-                using var held = _disk.TryLock(path);
-                if (held is null)
+                try
+                {
+                    using var held = _disk.TryLock(path);
+                    if (held is null)
+                        return true;
+                }
+                catch (IOException e) when (DiskTrouble.IsBusy(e))
+                {
                     return true;
+                }
             }
         return false;
     }

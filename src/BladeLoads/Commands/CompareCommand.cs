@@ -63,7 +63,7 @@ internal static class CompareCommand
                 meant,
                 new ChangesShown(
                     $"what moved from {old.Name} to {now.Name}, %", request.MoreThan, TablesShown, !surroundings.OutIsTerminal,
-                    request.Csv ?? "--csv <file> writes all, --only <pattern> shows some"),
+                    request.Csv ?? "--csv <file> writes all, --only <pattern> shows some", SummaryLines.Caution),
                 surroundings.Out);
         return meant.Any(c => c is CaseComparison.Compared)
             && !meant.Any(c => c is CaseComparison.NotCompared { Reason: NoComparison.Unreadable })

@@ -10,7 +10,7 @@ namespace BladeLoads.Commands;
 internal static class NamedResults
 {
     private const string CasesFolder = "cases";
-    private const int NamesShown = 12;
+    private const int NamesShown = 6;
 
     /// <param name="root">The folder of results, as given.</param>
     /// <exception cref="WrongUseException">There is nothing of that name, or more than one.</exception>

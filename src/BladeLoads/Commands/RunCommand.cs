@@ -6,7 +6,6 @@ using BladeLoads.Batch.Work;
 using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Tables;
-using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Screen;
 using BladeLoads.Studies;
@@ -65,7 +64,7 @@ internal static class RunCommand
     }
 
     private static ChangesShown ChangesOf(ResultsFolder results, Surroundings surroundings) => new(
-        "what moved, % of the result before", 0, TablesShown, !surroundings.OutIsTerminal, Printable.Of(results.Changes));
+        "what moved, % of the result before", 0, TablesShown, !surroundings.OutIsTerminal, results.Changes, $"changes: {results.Changes}");
 
     private static RunResult NothingRun { get; } = new(ImmutableSortedDictionary<string, CaseOutcome>.Empty, null, []);
 

@@ -76,7 +76,7 @@ internal static class VerifyCommand
         {
             DamagedResults.SetAside(study!, current, surroundings.Disk);
             surroundings.Out.WriteLine(
-                $"{Count.Of(current.Count, "damaged result")} moved to replaced/, as they are; the next run solves their cases again");
+                $"{Count.Of(current.Count, "damaged result")} moved to replaced/ with what is left of {(current.Count == 1 ? "it; the next run solves its case" : "them; the next run solves their cases")} again");
         }
         else if (current.Count > 0)
             surroundings.Out.WriteLine(Printable.Of(

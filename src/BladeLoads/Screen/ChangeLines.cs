@@ -10,7 +10,8 @@ namespace BladeLoads.Screen;
 /// <param name="Tables">For how many cases, at most, every figure is shown: those that moved most.</param>
 /// <param name="WholeNames">No name is shortened: nobody's screen is too narrow for it.</param>
 /// <param name="Rest">Where what is not shown can be read; a phrase.</param>
-internal sealed record ChangesShown(string Title, double MoreThan, int Tables, bool WholeNames, string Rest);
+/// <param name="Closing">The last line.</param>
+internal sealed record ChangesShown(string Title, double MoreThan, int Tables, bool WholeNames, string Rest, string Closing);
 
 /// <summary>What moved, on the screen: a row of percentages a case, then every figure of the cases that moved most.</summary>
 internal static class ChangeLines
@@ -28,7 +29,7 @@ internal static class ChangeLines
         var moved = compared.Where(c => HasMoved(c, shown.MoreThan)).ToList();
         output.WriteLine();
         output.WriteLine(Printable.Of(shown.Title));
-        if (moved.Count > 0)
+        if (moved.Count > 1)   // one alone is told by its table
             WriteOverview(moved, shown, output);
         if (compared.Count > moved.Count)
             output.WriteLine(shown.MoreThan > 0
@@ -36,6 +37,8 @@ internal static class ChangeLines
                 : $"{Count.Of(compared.Count - moved.Count, "case")} compared: no figure, no mark and no wind speed differs");
         WriteNotCompared(comparisons.OfType<CaseComparison.NotCompared>().ToList(), output);
         WriteTables(moved, shown, output);
+        output.WriteLine();
+        output.WriteLine(Printable.Of(shown.Closing));
     }
 
     private static bool HasMoved(CaseComparison.Compared c, double moreThan) => c.Changes.Any(f => f.IsMoreThan(moreThan))

@@ -29,7 +29,7 @@ internal static class TidyLines
             ? "" : $" and {Count.Of(tidying.Tables.Length, "table")} that no result names ({Room.Of(tidying.Tables.Sum(t => t.Bytes))})";
         output.WriteLine(
             $"this would free {Room.Of(tidying.Bytes)}: {Count.Of(tidying.Results.Length, "replaced result")}{tables}; "
-            + $"{Count.Of(tidying.Staying, "replaced result")} and everything current or kept {(tidying.Staying == 0 ? "stays" : "stay")}");
+            + (tidying.Staying == 0 ? "none stays" : $"{tidying.Staying} {(tidying.Staying == 1 ? "stays" : "stay")}"));
     }
 
     private static string Days(IEnumerable<DateTime> times)
