@@ -30,7 +30,8 @@ public sealed record KeptRecord(
         }
     }
 
-    internal byte[] ToBytes() => [.. JsonSerializer.SerializeToUtf8Bytes(this, KeptJson.Default.KeptRecord), (byte)'\n'];
+    /// <summary>The file, UTF-8.</summary>
+    public byte[] ToBytes() => [.. JsonSerializer.SerializeToUtf8Bytes(this, KeptJson.Default.KeptRecord), (byte)'\n'];
 }
 
 [JsonSourceGenerationOptions(

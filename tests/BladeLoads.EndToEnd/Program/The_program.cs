@@ -198,6 +198,11 @@ public sealed class The_program : IDisposable
     [InlineData("run", "nowhere")]
     [InlineData("check", "nowhere/clean.toml")]
     [InlineData("plan", "")]
+    [InlineData("compare", "one")]
+    [InlineData("compare", "one", "other")]
+    [InlineData("keep", "beck", "signed")]
+    [InlineData("verify", "beck")]
+    [InlineData("tidy", "beck", "--keep-last", "some")]
     public void Refuses_wrong_use(params string[] arguments)
     {
         var finished = Run(arguments);
@@ -212,6 +217,10 @@ public sealed class The_program : IDisposable
     [InlineData("bladeloads plan ", "plan", "--help")]
     [InlineData("bladeloads run ", "run", "--help")]
     [InlineData("bladeloads run ", "run", "-h")]
+    [InlineData("bladeloads compare ", "compare", "--help")]
+    [InlineData("bladeloads keep ", "keep", "--help")]
+    [InlineData("bladeloads verify ", "verify", "--help")]
+    [InlineData("bladeloads tidy ", "tidy", "--help")]
     public void Helps_with_examples(string example, params string[] arguments)
     {
         var help = Run(arguments);
