@@ -63,7 +63,8 @@ public abstract record CaseComparison(string Case, string? OldCase)
         /// <summary>Only what moved by more than so many percent; marks and wind speeds that came or went are kept.</summary>
         public Compared MovedMoreThan(double percent) => this with
         {
-            Figures = [.. Figures.Where(f => f.IsMoreThan(percent))], Curves = [.. Curves.Where(f => f.IsMoreThan(percent))],
+            Figures = [.. Figures.Where(f => f.IsMoreThan(percent))],
+            Curves = [.. Curves.Where(f => f.IsMoreThan(percent))],
         };
     }
 

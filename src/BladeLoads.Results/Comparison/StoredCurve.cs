@@ -32,7 +32,10 @@ public sealed record StoredCurve(ImmutableArray<StoredPoint> Points)
 
     private static readonly CsvReaderOptions Options = new()
     {
-        Separator = ',', HasHeader = false, TrackLineNumbers = true, AllowLineBreaksInQuotes = false,
+        Separator = ',',
+        HasHeader = false,
+        TrackLineNumbers = true,
+        AllowLineBreaksInQuotes = false,
     };
 
     /// <summary>Reads the curve in the folder of a result.</summary>

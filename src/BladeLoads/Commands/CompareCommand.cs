@@ -28,7 +28,9 @@ internal static class CompareCommand
         var only = CommandLine.OnlyOption();
         var moreThan = new Option<double>("--more-than")
         {
-            Description = "only what moved by more than so many percent", HelpName = "percent", DefaultValueFactory = _ => 0,
+            Description = "only what moved by more than so many percent",
+            HelpName = "percent",
+            DefaultValueFactory = _ => 0,
             CustomParser = ParsePercent,
         };
         var json = new Option<bool>("--json") { Description = "as JSON, for scripts" };

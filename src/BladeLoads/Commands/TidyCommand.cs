@@ -19,11 +19,15 @@ internal static class TidyCommand
         var results = CommandLine.ResultsOption();
         var olderThan = new Option<TimeSpan?>("--older-than")
         {
-            Description = "only results that were replaced longer ago than this: 30d, 2w, 12h", HelpName = "age", CustomParser = ParseAge,
+            Description = "only results that were replaced longer ago than this: 30d, 2w, 12h",
+            HelpName = "age",
+            CustomParser = ParseAge,
         };
         var keepLast = new Option<int?>("--keep-last")
         {
-            Description = "so many replaced results of each case stay, those solved last", HelpName = "number", CustomParser = ParseNumber,
+            Description = "so many replaced results of each case stay, those solved last",
+            HelpName = "number",
+            CustomParser = ParseNumber,
         };
         var yes = new Option<bool>("--yes") { Description = "remove without asking" };
         var command = new Command(

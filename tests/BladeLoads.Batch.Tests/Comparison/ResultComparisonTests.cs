@@ -162,7 +162,8 @@ public sealed class ResultComparisonTests : IDisposable
 
         static Dictionary<string, string> Values(string density, string digit) => new()
         {
-            ["air.density_kg_m3"] = density, ["section.fell-30"] = string.Concat(Enumerable.Repeat(digit, 64)),
+            ["air.density_kg_m3"] = density,
+            ["section.fell-30"] = string.Concat(Enumerable.Repeat(digit, 64)),
         };
     }
 
