@@ -30,7 +30,8 @@ internal static class Differences
         return reasons.ToImmutable();
     }
 
-    private static IEnumerable<StaleReason> OfValues(IReadOnlyDictionary<string, string> was, ImmutableSortedDictionary<string, string> now)
+    /// <summary>Every value that differs, by key; the solver's version apart.</summary>
+    internal static IEnumerable<StaleReason> OfValues(IReadOnlyDictionary<string, string> was, IReadOnlyDictionary<string, string> now)
     {
         foreach (var key in was.Keys.Union(now.Keys, StringComparer.Ordinal).Order(StringComparer.Ordinal))
         {

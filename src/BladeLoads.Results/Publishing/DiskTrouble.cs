@@ -38,6 +38,14 @@ public static class DiskTrouble
             or Errno.QuotaExceeded or WindowsDiskFull
     };
 
+    /// <summary>Why something could not be read, in a user's words, without the path.</summary>
+    public static string ReadingReason(Exception trouble) => trouble switch
+    {
+        UnauthorizedAccessException or IOException { HResult: Errno.NotPermitted or Errno.AccessDenied } => "no permission to read",
+        FileNotFoundException or DirectoryNotFoundException => "it is not there",
+        _ => Reason(trouble),
+    };
+
     /// <summary>The reason in a user's words, without the path.</summary>
     public static string Reason(Exception trouble) => trouble switch
     {

@@ -25,7 +25,7 @@ public sealed class Publisher : IDisposable
             var mark = RunMark.Take(disk, folder.Study);
             try
             {
-                mark.TidyAfterTheDead();
+                mark.TidyAfterTheDead(folder);
             }
             catch (Exception e) when (e is IOException or UnauthorizedAccessException)
             {
@@ -53,7 +53,7 @@ public sealed class Publisher : IDisposable
         }
     }
 
-    /// <summary>Publishes the folder of a case; one that was there before is replaced.</summary>
+    /// <summary>Publishes the folder of a case; one that was there before moves to the replaced results, whole.</summary>
     /// <exception cref="IOException">The system refused; what was there before is there still, or else the new result is, whole.</exception>
     /// <exception cref="UnauthorizedAccessException">As above.</exception>
     /// <exception cref="ArgumentException">The name cannot be that of a result folder.</exception>
@@ -82,7 +82,7 @@ public sealed class Publisher : IDisposable
         // Without this the rename itself could be lost. Only after it may the old result go.
         _disk.Sync(_folder.Study);
         if (replaced is not null)
-            DeleteIfPossible(replaced);
+            SetAsideIfPossible(replaced, caseName);
     }
 
     /// <summary>Publishes a single file, replacing one that was there.</summary>
@@ -152,6 +152,18 @@ public sealed class Publisher : IDisposable
         // Another run has put its result there meanwhile: the same case gives the same bytes, so ours is not missed.
         DeleteIfPossible(hidden);
         return old;
+    }
+
+    private void SetAsideIfPossible(string replaced, string caseName)
+    {
+        try
+        {
+            ReplacedResult.SetAside(replaced, caseName, _folder, _disk);
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            // The new result stands. The replaced one keeps its hidden name, under which the next run finds it and sets it aside.
+        }
     }
 
     private void DeleteIfPossible(string path)

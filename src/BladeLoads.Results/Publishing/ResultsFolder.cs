@@ -1,3 +1,6 @@
+using BladeLoads.Results.Comparison;
+using BladeLoads.Results.Tables;
+
 namespace BladeLoads.Results.Publishing;
 
 /// <summary>Where the results of a study lie. Absolute paths; nothing is created by asking.</summary>
@@ -10,13 +13,31 @@ public sealed record ResultsFolder(string Root, string StudyName)
 
     public string Logs => Path.Join(Study, LogsName);
 
-    public string Summary => Path.Join(Study, Tables.SummaryTable.FileName);
+    public string Summary => Path.Join(Study, SummaryTable.FileName);
 
     public string Case(string name) => Path.Join(Study, name);
 
     public string Failure(string name) => Path.Join(Study, FailuresName, name + ".json");
 
     public string Failures => Path.Join(Study, FailuresName);
+
+    /// <summary>Parsed tables that results were made from, once each by their SHA-256.</summary>
+    public string Tables => Path.Join(Study, TablesName);
+
+    /// <summary>What reruns replaced: a folder a case, and in it a folder a result.</summary>
+    public string Replaced => Path.Join(Study, ReplacedName);
+
+    /// <summary>The folder of the results that were replaced of a case.</summary>
+    public string ReplacedOf(string caseName) => Path.Join(Replaced, caseName);
+
+    /// <summary>Result sets set aside under a name, a folder each.</summary>
+    public string Kept => Path.Join(Study, KeptName);
+
+    /// <summary>The folder of a result set that was set aside.</summary>
+    public string KeptAs(string name) => Path.Join(Kept, name);
+
+    /// <summary>What moved in the last run.</summary>
+    public string Changes => Path.Join(Study, ChangesTable.FileName);
 
     /// <summary>
     /// Why no result folder can have this name, or null where it can: the study's folder needs some names itself, and a name beginning
@@ -32,9 +53,12 @@ public sealed record ResultsFolder(string Root, string StudyName)
 
     private const string LogsName = "logs";
     private const string FailuresName = "failures";
+    private const string TablesName = "tables";
+    private const string ReplacedName = "replaced";
+    private const string KeptName = "kept";
 
     private static readonly HashSet<string> OwnNames = new(StringComparer.OrdinalIgnoreCase)
     {
-        LogsName, FailuresName, Tables.SummaryTable.FileName, "report.html", "changes.csv",
+        LogsName, FailuresName, TablesName, ReplacedName, KeptName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
     };
 }

@@ -41,11 +41,31 @@ internal sealed partial class RunMark : IDisposable
     public static bool IsAnyIn(string folder)
         => Directory.Exists(folder) && Directory.EnumerateFileSystemEntries(folder, ".*").Any(path => OwnedName().IsMatch(Path.GetFileName(path)));
 
+    /// <summary>Whether another run, alive just now, writes into the folder.</summary>
+    public bool IsAnotherAlive()
+    {
+        foreach (var path in Directory.EnumerateFiles(_folder, ".run-*.lock"))
+            if (OwnedName().Match(Path.GetFileName(path)) is { Success: true } name && name.Groups["run"].Value != _run)
+            {
+                try
+                {
+                    using var held = _disk.TryLock(path);
+                    if (held is null)
+                        return true;
+                }
+                catch (IOException e) when (DiskTrouble.IsBusy(e))
+                {
+                    return true;
+                }
+            }
+        return false;
+    }
+
     /// <summary>
     /// Removes what runs left that were killed: their unfinished writes, and their locks. A replaced result whose successor never came
-    /// into its place is put back. What belongs to a living run is left alone.
+    /// into its place is put back, other whole results go to the replaced ones. What belongs to a living run is left alone.
     /// </summary>
-    public void TidyAfterTheDead()
+    public void TidyAfterTheDead(ResultsFolder results)
     {
         var byRun = Directory.EnumerateFileSystemEntries(_folder, ".*")
             .Select(path => (Path: path, Name: OwnedName().Match(Path.GetFileName(path))))
@@ -58,7 +78,7 @@ internal sealed partial class RunMark : IDisposable
             if (held is null)
                 continue;
             foreach (var (path, _) in left.Where(entry => entry.Path != lockFile))
-                Tidy(path);
+                Tidy(path, results);
             _disk.Delete(lockFile);
         }
     }
@@ -76,13 +96,17 @@ internal sealed partial class RunMark : IDisposable
         _lock.Dispose();
     }
 
-    private void Tidy(string path)
+    // A hidden folder with a whole result holds one that was replaced, or a new one that never came into its place: neither is thrown away.
+    private void Tidy(string path, ResultsFolder results)
     {
-        if (path.EndsWith(".old", StringComparison.Ordinal)
-            && Receipts.ReceiptFile.Read(path) is Receipts.ReceiptReading.Readable { Receipt.Case: var name }
-            && ResultsFolder.Objection(name) is null
-            && _disk.TryRename(path, Path.Join(_folder, name)))
+        if (Receipts.ReceiptFile.Read(path) is Receipts.ReceiptReading.Readable { Receipt: var receipt }
+            && ResultsFolder.Objection(receipt.Case) is null && Receipts.ResultCheck.IsWhole(path, receipt))
+        {
+            if (path.EndsWith(".old", StringComparison.Ordinal) && _disk.TryRename(path, results.Case(receipt.Case)))
+                return;
+            ReplacedResult.SetAside(path, receipt.Case, results, _disk);
             return;
+        }
         _disk.Delete(path);
     }
 

@@ -3,6 +3,7 @@ using BladeLoads.Batch.Logs;
 using BladeLoads.Batch.Plan;
 using BladeLoads.Batch.Queue;
 using BladeLoads.Batch.Work;
+using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Tables;
 using BladeLoads.Rotor.Operation;
@@ -18,6 +19,8 @@ internal sealed record RunRequest(string Path, string Results, int Workers, stri
 /// <summary><c>bladeloads run</c>: solves what is not current and shows the summary.</summary>
 internal static class RunCommand
 {
+    private const int TablesShown = 6;
+
     public static int Run(RunRequest request, Surroundings surroundings)
     {
         using var signals = new StopSignals(surroundings);
@@ -40,15 +43,28 @@ internal static class RunCommand
         if (due.IsEmpty)
             Publisher.TidyIfPossible(results, surroundings.Disk);
         using var publisher = new PublisherWhenNeeded(results, surroundings.Disk);
+        var changes = RunChanges.Before(wholePlan, due.Select(c => c.Name), results);
+        if (!due.IsEmpty)
+            changes.Remember(publisher.Get());
         var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, signals, surroundings);
         var rows = StudySummary.Rows(wholePlan, run.Outcomes);
         var shown = RowsOf(plan, rows);
         if (run.NoRoom is null)
             StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
+        var moved = run.NoRoom is null && !changes.IsEmpty ? changes.Compare(run.Outcomes) : [];
+        if (run.NoRoom is null && !changes.IsEmpty)
+            changes.Publish(moved, run.Outcomes, publisher.Get());
         if (run.NoRoom is null && !request.Quiet)
+        {
             SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
+            if (moved.Any(c => c is not CaseComparison.NotCompared { Reason: NoComparison.NoEarlierResult }))
+                ChangeLines.Write(moved, ChangesOf(results, surroundings), surroundings.Out);
+        }
         return Tell(run, shown, study.Asked, signals, surroundings);
     }
+
+    private static ChangesShown ChangesOf(ResultsFolder results, Surroundings surroundings) => new(
+        "what moved, % of the result before", 0, TablesShown, !surroundings.OutIsTerminal, results.Changes, $"changes: {results.Changes}");
 
     private static RunResult NothingRun { get; } = new(ImmutableSortedDictionary<string, CaseOutcome>.Empty, null, []);
 

@@ -39,6 +39,12 @@ internal static class FellRotor
     public static PowerCurve Curve(RotorCase rotor, PointMarks marks = PointMarks.None) => new(
         [.. rotor.WindSpeeds.Select(v => Point(v, rotor.Model.Elements, marks))], 2.5, PointMarks.None, rotor.WindSpeeds.Length);
 
+    /// <summary>The same curve with every thrust so many times as large.</summary>
+    public static PowerCurve Scaled(PowerCurve curve, double factor) => curve with
+    {
+        Points = [.. curve.Points.Select(p => p.Loads is { } loads ? p with { Loads = loads with { Thrust = loads.Thrust * factor } } : p)],
+    };
+
     public static CurvePoint Point(double windSpeed, int elements = 2, PointMarks marks = PointMarks.None) => new(
         new OperatingPoint(windSpeed, Math.PI, Math.PI / 180),
         marks.HasFlag(PointMarks.Unbalanced) ? null : Loads(windSpeed),

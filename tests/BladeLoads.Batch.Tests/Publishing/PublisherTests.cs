@@ -11,6 +11,9 @@ public class PublisherTests
 
     private static readonly ResultContent[] New = [new("a.csv", "new a"u8.ToArray()), new("b.csv", "new b"u8.ToArray()), Receipt("new")];
 
+    private static readonly ResultContent[] WholeOld =
+        [new("a.csv", "old a"u8.ToArray()), Receipt("old", ResultFile.Of("a.csv", "old a"u8))];
+
     [Theory]
     [InlineData(true, true)]
     [InlineData(true, false)]
@@ -26,11 +29,12 @@ public class PublisherTests
             if (hasOld)
                 Publish(results, Old, new Disk());
             var disk = new FailingDisk(n, canExchange: canExchange);
+            var isPublished = false;
             try
             {
                 Publish(results, New, disk);
-                Assert.False(disk.HasRefused);
-                hasSucceeded = true;
+                isPublished = true;   // setting the old result aside may have been refused: the next run does that
+                hasSucceeded = !disk.HasRefused;
             }
             catch (IOException)
             {
@@ -39,8 +43,10 @@ public class PublisherTests
             // The next run tidies up, and finds what a person would find.
             using (Publisher.Open(results, new Disk())) { }
             var found = TemporaryFolder.Contents(results.Case("clean"));
-            var whole = hasSucceeded ? [New] : new[] { hasOld ? Old : [], New };
+            var whole = isPublished ? [New] : new[] { hasOld ? Old : [], New };
             Assert.Contains(found, whole.Select(Contents));
+            if (hasOld)
+                Assert.Contains(Contents(Old), ReplacedResult.All(results).Select(r => TemporaryFolder.Contents(r.Folder)).Append(found));
             Assert.All(Directory.EnumerateFileSystemEntries(results.Study), e => Assert.False(Path.GetFileName(e).StartsWith('.'), e));
             Assert.True(n < 50, "never succeeds");
         }
@@ -76,6 +82,42 @@ public class PublisherTests
         File.WriteAllText(Path.Join(results.Study, ".run-0123456789ab.lock"), "");
         using (Publisher.Open(results, new Disk())) { }
         Assert.Empty(Directory.EnumerateFileSystemEntries(results.Study));
+    }
+
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public void What_a_rerun_replaces_moves_to_the_replaced_results_whole(bool canExchange)
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        Publish(results, Old, new Disk());
+        Publish(results, New, new FailingDisk(0, canExchange: canExchange));
+        Publish(results, Old, new FailingDisk(0, canExchange: canExchange));
+        var replaced = ReplacedResult.Of(results, "clean");
+        Assert.Equal(["19700101-000000~f-2", "19700101-000000~f"], replaced.Select(r => Path.GetFileName(r.Folder)));
+        Assert.All(replaced, r => Assert.Equal(("clean", DateTime.UnixEpoch, "f"), (r.Case, r.SolvedAt, r.FingerprintStart)));
+        Assert.Equal([Contents(New), Contents(Old)], replaced.Select(r => TemporaryFolder.Contents(r.Folder)));
+        Assert.Equal(["clean", "replaced"], Directory.EnumerateFileSystemEntries(results.Study).Select(e => Path.GetFileName(e)).Order());
+    }
+
+    [Fact]
+    public void A_whole_result_under_a_hidden_name_of_a_killed_run_goes_to_the_replaced_ones_and_half_a_one_is_removed()
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        Publish(results, New, new Disk());
+        foreach (var (number, cut) in new[] { (1, 0), (2, 1) })
+        {
+            var left = Path.Join(results.Study, $".clean.0123456789ab-{number}.new");
+            Directory.CreateDirectory(left);
+            foreach (var file in WholeOld)
+                File.WriteAllBytes(Path.Join(left, file.Name), file.Name == "a.csv" ? file.Bytes[..^cut].ToArray() : file.Bytes.ToArray());
+        }
+        using (Publisher.Open(results, new Disk())) { }
+        Assert.Equal(Contents(New), TemporaryFolder.Contents(results.Case("clean")));
+        Assert.Equal(Contents(WholeOld), TemporaryFolder.Contents(Assert.Single(ReplacedResult.All(results)).Folder));
+        Assert.DoesNotContain(Directory.EnumerateFileSystemEntries(results.Study), e => Path.GetFileName(e).StartsWith('.'));
     }
 
     [Fact]
@@ -117,6 +159,9 @@ public class PublisherTests
     [Theory]
     [InlineData("logs")]
     [InlineData("Failures")]
+    [InlineData("tables")]
+    [InlineData("Replaced")]
+    [InlineData("kept")]
     [InlineData("summary.csv")]
     [InlineData(".hidden")]
     [InlineData("../out")]
@@ -137,8 +182,8 @@ public class PublisherTests
         publisher.PublishCase("clean", files);
     }
 
-    private static ResultContent Receipt(string title) => new("receipt.json", ReceiptFile.Write(new Receipt(
-        1, "fell", "clean", title, "f", 1, "0.0.0", DateTimeOffset.UnixEpoch, 0, new Dictionary<string, string>(), [], [],
+    private static ResultContent Receipt(string title, params ResultFile[] files) => new("receipt.json", ReceiptFile.Write(new Receipt(
+        1, "fell", "clean", title, "f", 1, "0.0.0", DateTimeOffset.UnixEpoch, 0, new Dictionary<string, string>(), [], files,
         CaseSummary.Of(FellRotor.Curve(FellRotor.Rotor())), "")));
 
     private static Dictionary<string, string> Contents(IEnumerable<ResultContent> files)

@@ -1,4 +1,5 @@
 using BladeLoads.Batch.Tests.Building;
+using BladeLoads.Results.Publishing;
 
 namespace BladeLoads.EndToEnd.Program;
 
@@ -197,6 +198,11 @@ public sealed class The_program : IDisposable
     [InlineData("run", "nowhere")]
     [InlineData("check", "nowhere/clean.toml")]
     [InlineData("plan", "")]
+    [InlineData("compare", "one")]
+    [InlineData("compare", "one", "other")]
+    [InlineData("keep", "beck", "signed")]
+    [InlineData("verify", "beck")]
+    [InlineData("tidy", "beck", "--keep-last", "some")]
     public void Refuses_wrong_use(params string[] arguments)
     {
         var finished = Run(arguments);
@@ -211,6 +217,10 @@ public sealed class The_program : IDisposable
     [InlineData("bladeloads plan ", "plan", "--help")]
     [InlineData("bladeloads run ", "run", "--help")]
     [InlineData("bladeloads run ", "run", "-h")]
+    [InlineData("bladeloads compare ", "compare", "--help")]
+    [InlineData("bladeloads keep ", "keep", "--help")]
+    [InlineData("bladeloads verify ", "verify", "--help")]
+    [InlineData("bladeloads tidy ", "tidy", "--help")]
     public void Helps_with_examples(string example, params string[] arguments)
     {
         var help = Run(arguments);
@@ -223,6 +233,9 @@ public sealed class The_program : IDisposable
 
     private Finished Run(params string[] arguments) => Started.Run(_folder.Path, arguments);
 
+    /// <summary>The summary and the tables of current results, by relative path.</summary>
     private static Dictionary<string, string> Tables(string results) => TemporaryFolder.Contents(results)
-        .Where(f => f.Key.EndsWith(".csv", StringComparison.Ordinal)).ToDictionary(StringComparer.Ordinal);
+        .Where(f => f.Key.EndsWith(".csv", StringComparison.Ordinal))
+        .Where(f => f.Key == "summary.csv" || ResultsFolder.Objection(f.Key.Split(Path.DirectorySeparatorChar)[0]) is null)
+        .ToDictionary(StringComparer.Ordinal);
 }

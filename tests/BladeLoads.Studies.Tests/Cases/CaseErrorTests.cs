@@ -252,6 +252,9 @@ public class CaseErrorTests
     [InlineData("a\u001bb")]
     [InlineData("logs")]
     [InlineData("Failures")]
+    [InlineData("tables")]
+    [InlineData("replaced")]
+    [InlineData("Kept")]
     [InlineData("summary.csv")]
     [InlineData("nul")]
     public void A_case_name_that_is_no_safe_folder_name_is_refused(string name)
