@@ -8,8 +8,9 @@ namespace BladeLoads.Batch.Plan;
 
 /// <summary>The results that are there, each receipt opened once at most, and not at all where the index knows it.</summary>
 /// <param name="index">What an earlier plan found; null for none.</param>
-internal sealed class KnownResults(ResultsFolder results, PlanIndex? index, TimeProvider time)
+internal sealed class KnownResults(ResultsFolder results, PlanIndex? index, TimeProvider time) : IDisposable
 {
+    private readonly FolderStamps? _stamps = FolderStamps.Open(results.Study);
     private readonly Dictionary<string, (ResultFacts? Facts, string? Why)> _seen = new(StringComparer.Ordinal);
     private readonly Dictionary<string, Receipt> _opened = new(StringComparer.Ordinal);
     private ILookup<string, string>? _byFingerprint;
@@ -22,6 +23,8 @@ internal sealed class KnownResults(ResultsFolder results, PlanIndex? index, Time
     /// <summary>The facts by folder, relative to the study's results.</summary>
     public IEnumerable<KeyValuePair<string, ResultFacts>> Facts
         => _seen.Where(s => s.Value.Facts is not null).Select(s => KeyValuePair.Create(s.Key, s.Value.Facts!));
+
+    public void Dispose() => _stamps?.Dispose();
 
     /// <summary>What is known of a result; null where there is no receipt that can be read, with the reason in <paramref name="why"/>.</summary>
     /// <param name="folder">Relative to the study's results.</param>
@@ -49,11 +52,10 @@ internal sealed class KnownResults(ResultsFolder results, PlanIndex? index, Time
     /// <summary>Whether a file of a result is not there or not of the size it was written with.</summary>
     public bool IsDamaged(string folder, ResultFacts facts)
     {
-        if (!FileStamp.IsSupported)
+        if (_stamps is null)
             return Damage(folder, facts).Any();
-        var path = Path.Join(results.Study, folder);
         foreach (var (name, size) in facts.Files)
-            if (FileStamp.Of(Path.Join(path, name)) is not { Type: EntryType.File, Size: var found } || found != size)
+            if (_stamps.Of(folder, name) is not { Type: EntryType.File, Size: var found } || found != size)
                 return true;
         return false;
     }
@@ -99,13 +101,12 @@ internal sealed class KnownResults(ResultsFolder results, PlanIndex? index, Time
 
     private (ResultFacts? Facts, string? Why) LookAnew(string folder)
     {
-        var path = Path.Join(results.Study, folder);
         // Before reading: what changes in between has another stamp.
         var taken = FileStamp.Now(time);
-        var stamp = FileStamp.IsSupported ? FileStamp.Of(Path.Join(path, Receipt.FileName)) : default;
+        var stamp = _stamps?.Of(folder, Receipt.FileName) ?? default;
         if (index?.Find(folder) is { IsSettled: true } known && known.Stamp == stamp)
             return (known, null);
-        switch (ReceiptFile.Read(path))
+        switch (ReceiptFile.Read(Path.Join(results.Study, folder)))
         {
             case ReceiptReading.Readable { Receipt: var receipt }:
                 HasLearned = true;

@@ -29,7 +29,10 @@ public sealed record StudyPlan(ImmutableArray<PlannedCase> Cases, ImmutableArray
     /// <summary>Looks at the results; nothing is written.</summary>
     /// <param name="solverVersion">The version of the physics at hand.</param>
     public static StudyPlan Make(Study study, ResultsFolder results, int solverVersion)
-        => Make(study, new KnownResults(results, null, TimeProvider.System), solverVersion);
+    {
+        using var known = new KnownResults(results, null, TimeProvider.System);
+        return Make(study, known, solverVersion);
+    }
 
     internal static StudyPlan Make(Study study, KnownResults known, int solverVersion)
         => new([.. study.Cases.Select(c => new PlannedCase(c, StateOf(c, known, solverVersion)))], study.Rejected) { Blocking = study.Blocking };

@@ -1,6 +1,8 @@
 using System.Buffers.Binary;
+using System.Runtime.CompilerServices;
 using System.Runtime.InteropServices;
 using System.Text;
+using Microsoft.Win32.SafeHandles;
 
 namespace BladeLoads.Studies.Files;
 
@@ -36,20 +38,23 @@ public readonly partial record struct FileStamp(EntryType Type, ulong Inode, ulo
 
     public static long Now(TimeProvider time) => (time.GetUtcNow().UtcTicks - DateTime.UnixEpoch.Ticks) * 100;
 
-    public static FileStamp Of(string path) => Of(Encoding.UTF8.GetBytes(path + '\0'));
+    public static FileStamp Of(string path) => Of(CurrentFolder, Encoding.UTF8.GetBytes(path + '\0'));
 
-    /// <param name="path">UTF-8, ended by a NUL.</param>
-    public static unsafe FileStamp Of(ReadOnlySpan<byte> path)
+    /// <param name="path">Relative to the folder; UTF-8, ended by a NUL.</param>
+    internal static FileStamp Of(SafeFileHandle folder, ReadOnlySpan<byte> path) => Of((int)folder.DangerousGetHandle(), path);
+
+    [SkipLocalsInit]
+    private static unsafe FileStamp Of(int folder, ReadOnlySpan<byte> path)
     {
-        const int currentFolder = -100, noFollow = 0x100;
+        const int noFollow = 0x100, length = 256;
         const uint typeInodeSizeTimes = 0x1 | 0x100 | 0x200 | 0x40 | 0x80;
-        var status = stackalloc byte[256];
+        var status = stackalloc byte[length];
         int result;
         fixed (byte* name = path)
-            result = Statx(currentFolder, name, noFollow, typeInodeSizeTimes, status);
+            result = Statx(folder, name, noFollow, typeInodeSizeTimes, status);
         if (result != 0)
             return Marshal.GetLastPInvokeError() is NoEntry or NotFolder ? default : new FileStamp(EntryType.Other, 0, 0, 0, 0, 0);
-        var s = new ReadOnlySpan<byte>(status, 256);
+        var s = new ReadOnlySpan<byte>(status, length);
         return new FileStamp(
             (BinaryPrimitives.ReadUInt16LittleEndian(s[28..]) & 0xF000) switch
             {
@@ -64,6 +69,7 @@ public readonly partial record struct FileStamp(EntryType Type, ulong Inode, ulo
     private static long Nanoseconds(ReadOnlySpan<byte> time)
         => BinaryPrimitives.ReadInt64LittleEndian(time) * 1_000_000_000 + BinaryPrimitives.ReadUInt32LittleEndian(time[8..]);
 
+    private const int CurrentFolder = -100;
     private const int NoEntry = 2;
     private const int NotFolder = 20;
 

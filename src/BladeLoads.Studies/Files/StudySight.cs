@@ -25,17 +25,15 @@ public sealed record StudySight(string Root, string RealRoot, ImmutableArray<See
     {
         try
         {
-            if (!FileStamp.IsSupported || files.RealPath(Root) != RealRoot)
+            using var stamps = FolderStamps.Open(Root);
+            if (stamps is null || files.RealPath(Root) != RealRoot)
                 return null;
             var taken = FileStamp.Now(time);
-            var name = new List<byte>(Encoding.UTF8.GetBytes(Root + "/"));
-            var (prefix, renewed) = (name.Count, (ImmutableArray<SeenEntry>.Builder?)null);
+            ImmutableArray<SeenEntry>.Builder? renewed = null;
             for (var i = 0; i < Entries.Length; i++)
             {
                 var entry = Entries[i];
-                name.RemoveRange(prefix, name.Count - prefix);
-                name.AddRange(Encoding.UTF8.GetBytes(entry.Path + '\0'));
-                var stamp = FileStamp.Of(System.Runtime.InteropServices.CollectionsMarshal.AsSpan(name));
+                var stamp = stamps.Of(entry.Path);
                 if (stamp.Type != entry.Stamp.Type)
                     return null;
                 if (entry.Contents.IsEmpty || entry.IsSettled && stamp == entry.Stamp)

@@ -1,16 +1,19 @@
+using System.Buffers.Binary;
 using System.Collections.Immutable;
 using System.Globalization;
+using System.Numerics;
 using System.Security.Cryptography;
 using System.Text;
 using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Batch.Plan.Index;
 
-/// <summary>The file of the index: everything in it, and then the SHA-256 of that, so that a cut or changed file is known for one.</summary>
+/// <summary>The file of the index: everything in it, and then its length and bytes summed up, so that a cut or changed file is known for one.</summary>
 internal static class IndexFile
 {
     private const string Form = "bladeloads plan index 1";
     private const long Largest = 1 << 30;
+    private const int ChecksumBytes = 4;
 
     /// <summary>Null where there is none, or none that is whole.</summary>
     public static PlanIndex? Read(string path)
@@ -65,24 +68,24 @@ internal static class IndexFile
             }
             WriteResults(writer, index.Results);
         }
-        stream.Write(SHA256.HashData(stream.GetBuffer().AsSpan(0, (int)stream.Length)));
+        stream.Write(ChecksumOf(stream.GetBuffer().AsSpan(0, (int)stream.Length)));
         return stream.ToArray();
     }
 
     /// <summary>Null for anything that is not a whole index of this form.</summary>
     internal static PlanIndex? FromBytes(byte[] bytes)
     {
-        var length = bytes.Length - SHA256.HashSizeInBytes;
-        if (length <= 0 || !SHA256.HashData(bytes.AsSpan(0, length)).AsSpan().SequenceEqual(bytes.AsSpan(length)))
+        var length = bytes.Length - ChecksumBytes;
+        if (length <= 0 || !ChecksumOf(bytes.AsSpan(0, length)).AsSpan().SequenceEqual(bytes.AsSpan(length)))
             return null;
         try
         {
-            using var reader = new BinaryReader(new MemoryStream(bytes, 0, length, writable: false), Encoding.UTF8);
-            return reader.ReadString() != Form ? null : new PlanIndex(
-                reader.ReadString(), reader.ReadInt32(), ReadSight(reader),
-                ReadMany(reader, r => new IndexedCase(r.ReadString(), r.ReadString(), r.ReadString())), ReadResults(reader));
+            var reader = new IndexReader(bytes.AsMemory(0, length));
+            return reader.Text() != Form ? null : new PlanIndex(
+                reader.Text(), reader.Whole(), ReadSight(reader), reader.Many(r => new IndexedCase(r.Text(), r.Text(), r.Text())),
+                ReadResults(reader));
         }
-        catch (Exception e) when (e is IOException or FormatException or ArgumentException or OverflowException)
+        catch (Exception e) when (e is ArgumentException or IndexOutOfRangeException)
         {
             return null;   // whole, and yet no index: someone else's
         }
@@ -106,10 +109,9 @@ internal static class IndexFile
         }
     }
 
-    private static StudySight? ReadSight(BinaryReader reader)
-        => !reader.ReadBoolean() ? null : new StudySight(
-            reader.ReadString(), reader.ReadString(),
-            ReadMany(reader, r => new SeenEntry(r.ReadString(), ReadStamp(r), r.ReadBoolean(), [.. r.ReadBytes(r.ReadByte())])));
+    private static StudySight? ReadSight(IndexReader reader)
+        => !reader.Truth() ? null : new StudySight(
+            reader.Text(), reader.Text(), reader.Many(r => new SeenEntry(r.Text(), r.Stamp(), r.Truth(), r.Bytes(r.Byte()))));
 
     private static void WriteResults(BinaryWriter writer, IReadOnlyDictionary<string, ResultFacts> results)
     {
@@ -137,20 +139,21 @@ internal static class IndexFile
         }
     }
 
-    private static Dictionary<string, ResultFacts> ReadResults(BinaryReader reader)
+    private static Dictionary<string, ResultFacts> ReadResults(IndexReader reader)
     {
-        var names = ReadMany(reader, r => r.ReadString());
-        var count = reader.ReadInt32();
-        var results = new Dictionary<string, ResultFacts>(Math.Min(count, 1 << 20), StringComparer.Ordinal);
-        for (var i = 0; i < count; i++)
-        {
-            var folder = reader.ReadString();
-            var (title, fingerprint, solverVersion) = (reader.ReadString(), reader.ReadString(), reader.ReadInt32());
-            var (stamp, isSettled) = (ReadStamp(reader), reader.ReadBoolean());
-            results.Add(folder, new ResultFacts(
-                title, fingerprint, solverVersion, ReadMany(reader, r => (names[r.ReadInt32()], r.ReadInt64())), stamp, isSettled));
-        }
+        var names = reader.Many(r => r.Text());
+        var all = reader.Many(r => KeyValuePair.Create(r.Text(), ReadFacts(r, names)));
+        var results = new Dictionary<string, ResultFacts>(all.Length, StringComparer.Ordinal);
+        foreach (var (folder, facts) in all)
+            results.Add(folder, facts);
         return results;
+    }
+
+    private static ResultFacts ReadFacts(IndexReader reader, ImmutableArray<string> names)
+    {
+        var (title, fingerprint, solverVersion) = (reader.Text(), reader.Text(), reader.Whole());
+        var (stamp, isSettled) = (reader.Stamp(), reader.Truth());
+        return new ResultFacts(title, fingerprint, solverVersion, reader.Many(r => (names[r.Whole()], r.Long())), stamp, isSettled);
     }
 
     private static void WriteStamp(BinaryWriter writer, in FileStamp stamp)
@@ -163,16 +166,16 @@ internal static class IndexFile
         writer.Write(stamp.Changed);
     }
 
-    private static FileStamp ReadStamp(BinaryReader reader) => new(
-        (EntryType)reader.ReadByte(), reader.ReadUInt64(), reader.ReadUInt64(), reader.ReadInt64(), reader.ReadInt64(), reader.ReadInt64());
-
-    private static ImmutableArray<T> ReadMany<T>(BinaryReader reader, Func<BinaryReader, T> read)
+    // Against cuts and accidents, not against intent: whoever may write here may also write results. Part of the framework, and without
+    // the start of a library for cryptography, which would take longer than all else.
+    internal static byte[] ChecksumOf(ReadOnlySpan<byte> bytes)
     {
-        var count = reader.ReadInt32();
-        var items = ImmutableArray.CreateBuilder<T>(Math.Clamp(count, 0, 1 << 20));
-        for (var i = 0; i < count; i++)
-            items.Add(read(reader));
-        return items.DrainToImmutable();
+        var sum = (uint)bytes.Length;
+        for (; bytes.Length >= 8; bytes = bytes[8..])
+            sum = BitOperations.Crc32C(sum, BinaryPrimitives.ReadUInt64LittleEndian(bytes));
+        foreach (var b in bytes)
+            sum = BitOperations.Crc32C(sum, b);
+        return BitConverter.GetBytes(sum);
     }
 
     private static void DeleteIfPossible(string path)

@@ -9,6 +9,8 @@ namespace BladeLoads.Batch.Plan.Index;
 /// <param name="time">Tells how long ago a file was changed: see <see cref="FileStamp"/>.</param>
 public sealed class StudyLook(ResultsFolder results, string toolVersion, int solverVersion, TimeProvider time)
 {
+    private static readonly CaseState.Current CurrentUnread = new(() => null);
+
     private PlanIndex? _index = PlanIndex.Read(results, toolVersion, solverVersion);
 
     /// <summary>
@@ -20,14 +22,14 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
     {
         if (_index is not { Sight: { } sight } index || sight.Root != studyFolder || sight.LookAgain(files, time) is not { } again)
             return null;
-        var known = new KnownResults(results, index, time);
+        using var known = new KnownResults(results, index, time);
         var standings = ImmutableArray.CreateBuilder<CaseStanding>(index.Cases.Length);
         foreach (var indexed in index.Cases)
         {
             if (known.Look(indexed.Name, out _) is not { } facts || !facts.IsOf(indexed.Fingerprint, solverVersion)
                 || facts.Title != indexed.Title || known.IsDamaged(indexed.Name, facts))
                 return null;
-            standings.Add(new CaseStanding(indexed.Name, indexed.Title, indexed.Fingerprint, new CaseState.Current(() => null)));
+            standings.Add(new CaseStanding(indexed.Name, indexed.Title, indexed.Fingerprint, CurrentUnread));
         }
         if (known.HasLearned || !ReferenceEquals(again, sight))
             IndexFile.Write(results.Index, index with { Sight = again, Results = Merged(index, known) });
@@ -37,7 +39,7 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
     /// <summary>The plan of a study that was read.</summary>
     public StudyPlan Plan(Study study)
     {
-        var known = new KnownResults(results, _index, time);
+        using var known = new KnownResults(results, _index, time);
         var plan = StudyPlan.Make(study, known, solverVersion);
         Keep(study, known);
         return plan;
@@ -46,7 +48,7 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
     /// <summary>After a run: what it has published is known to the next plan.</summary>
     public void LookAfterRun(Study study)
     {
-        var known = new KnownResults(results, _index, time);
+        using var known = new KnownResults(results, _index, time);
         foreach (var studyCase in study.Cases)
             known.Look(studyCase.Name, out _);
         Keep(study, known);
