@@ -13,7 +13,7 @@ public static class MadeFrom
     /// </summary>
     public static string Difference(Receipt old, Receipt now)
     {
-        var reasons = Differences.OfValues(old.Values, now.Values).ToList();
+        var reasons = Differences.OfValues(old.Values, now.Values, [], _ => null).ToList();
         if (old.SolverVersion != now.SolverVersion)
             reasons.Insert(0, new StaleReason.SolverChanged(old.SolverVersion, now.SolverVersion));
         return string.Join("; ", reasons.Take(Shown).Select(r => r.Sentence))

@@ -10,6 +10,10 @@ public abstract record CaseOutcome
     /// <summary>Its result is published.</summary>
     public sealed record Solved(CaseSummary Summary, int RotorSolves) : CaseOutcome;
 
+    /// <summary>A result of its very values was there, and is in its place now.</summary>
+    /// <param name="From">Where it was, relative to the study's results; the case's own folder where only the title was another.</param>
+    public sealed record Reused(CaseSummary Summary, string From) : CaseOutcome;
+
     /// <summary>It alone could not be solved or published.</summary>
     /// <param name="Reason">One sentence, fit for a terminal.</param>
     public sealed record Failed(string Reason) : CaseOutcome;

@@ -18,6 +18,9 @@ public sealed record RunResult(ImmutableSortedDictionary<string, CaseOutcome> Ou
 
     public int Solved => Outcomes.Values.Count(o => o is CaseOutcome.Solved);
 
+    /// <summary>Cases that a result was there for already.</summary>
+    public int Reused => Outcomes.Values.Count(o => o is CaseOutcome.Reused);
+
     public int Failed => Outcomes.Values.Count(o => o is CaseOutcome.Failed);
 }
 

@@ -24,6 +24,16 @@ public sealed record ResultsFolder(string Root, string StudyName)
     /// <summary>Parsed tables that results were made from, once each by their SHA-256.</summary>
     public string Tables => Path.Join(Study, TablesName);
 
+    /// <summary>The file of a parsed table.</summary>
+    /// <param name="hash">64 lower-case hexadecimal digits.</param>
+    public string Table(string hash) => Path.Join(Tables, hash + ".csv");
+
+    /// <summary>What the last plan found, so that the next need not open what has not changed since; its loss costs only time.</summary>
+    public string Index => Path.Join(Study, ".index");
+
+    /// <summary>Whether the folder needs this name itself: no result lies under it.</summary>
+    public static bool IsOwn(string name) => OwnNames.Contains(name);
+
     /// <summary>What reruns replaced: a folder a case, and in it a folder a result.</summary>
     public string Replaced => Path.Join(Study, ReplacedName);
 

@@ -18,11 +18,13 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
     /// <summary>Null when an error keeps the case from running; every error is reported.</summary>
     /// <param name="entries">The case's values, those of a variant in their place.</param>
     /// <param name="inputs">The case file and the starting values.</param>
+    /// <param name="used">The files that the case was read from as far as it came, its own first.</param>
     public StudyCase? Build(
         string name, string variantTitle, CaseFile file, ImmutableDictionary<string, CaseEntry> entries,
-        ImmutableArray<InputFile> inputs)
+        ImmutableArray<InputFile> inputs, out IReadOnlyList<string> used)
     {
         var values = new CaseValues(file, entries, findings);
+        used = values.Used;
         var title = ReadTitle(values, name);
         var (blade, sections) = ReadBlade(values);
         var bladeCount = values.WholeNumber("rotor.blade_count", null, 1, MostBlades);
@@ -48,10 +50,17 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             windSpeeds, control.Strategy, control.CutIn, control.CutOut, control.DrivetrainEfficiency, model);
         var determining = values.Determining;
         inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
+        ImmutableArray<CanonicalTable> canonical = [blade.Canonical, .. sections.Tables.Select(table => table.Canonical)];
         if (control.Schedule is { } schedule)
-            inputs = inputs.Add(schedule);
+        {
+            inputs = inputs.Add(schedule.Input);
+            canonical = canonical.Add(schedule.Canonical);
+        }
         return new StudyCase(
-            name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), inputs, determining);
+            name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), inputs, determining)
+        {
+            Tables = canonical,
+        };
     }
 
     private static string ReadTitle(CaseValues values, string name)
@@ -74,13 +83,15 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             values.Spoil();
             return (blade, null);
         }
+        foreach (var (section, _) in blade.Sections)
+            values.Uses(folder.RelativePath(Path.Combine(set, section + ".csv")));
         var sections = tables.Sections(blade, set);
         if (blade.Blade is null || sections.Sections is null)
             values.Spoil();
-        values.Note("blade", blade.Hash);
+        values.Note("blade", blade.Canonical.Hash);
         foreach (var table in sections.Tables)
             if (table.Section is { } section)
-                values.Note($"section.{section.Name}", table.Hash);
+                values.Note($"section.{section.Name}", table.Canonical.Hash);
         return (blade, sections);
     }
 
@@ -93,7 +104,10 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         // Relative to the file that makes it: the case's own, or study.toml.
         var at = values.Find(path)!.Value.At;
         if (folder.Locate(at.File, reference, wanted, out var problem) is { } fullPath)
+        {
+            values.Uses(folder.RelativePath(fullPath));
             return fullPath;
+        }
         values.Refuse(at, problem);
         return null;
     }

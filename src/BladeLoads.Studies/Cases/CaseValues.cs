@@ -17,6 +17,7 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         = ImmutableSortedDictionary.CreateBuilder<string, string>(StringComparer.Ordinal);
 
     private readonly HashSet<string> _saidNotYet = new(StringComparer.Ordinal);
+    private readonly List<string> _used = [file.File];
 
     /// <summary>Nothing was wrong so far.</summary>
     public bool IsSound { get; private set; } = true;
@@ -156,6 +157,11 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         IsSound = false;
         findings.Error(at, text);
     }
+
+    /// <summary>The files whose errors are errors of this case, its own first; relative to the study folder.</summary>
+    public IReadOnlyList<string> Used => _used;
+
+    public void Uses(string usedFile) => _used.Add(usedFile);
 
     /// <summary>Something was wrong that is reported already.</summary>
     public void Spoil() => IsSound = false;

@@ -10,7 +10,7 @@ namespace BladeLoads.Studies.Cases;
 /// <summary>What [control] says: the strategy, the wind speeds of operation, the drivetrain.</summary>
 /// <param name="Strategy">Null when an error keeps it from being known.</param>
 internal sealed record ControlValues(
-    Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, InputFile? Schedule);
+    Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, ScheduleTable? Schedule);
 
 /// <summary>Reads [control].</summary>
 internal static class ControlReader
@@ -98,19 +98,20 @@ internal static class ControlReader
             values.Refuse(at, problem);
             return rest;
         }
+        values.Uses(folder.RelativePath(fullPath));
         if (tables.Schedule(fullPath) is not { Points.IsEmpty: false } schedule)
         {
             values.Spoil();
             return rest;
         }
-        values.Note(path, schedule.Hash);
+        values.Note(path, schedule.Canonical.Hash);
         var (lowest, highest) = (schedule.Points[0].WindSpeed, schedule.Points[^1].WindSpeed);
         var operating = windSpeeds.Where(v => v >= rest.CutIn && v <= rest.CutOut);
         if (operating.Where(v => v < lowest || v > highest).ToList() is [var bare, ..])
             values.RefuseValue(path, $"{VisibleText.Quote(reference)} runs from {CanonicalText.Of(lowest)} to "
                 + $"{CanonicalText.Of(highest)} m/s and does not cover {CanonicalText.Of(bare)} m/s; "
                 + "add rows, or set cut-in and cut-out within it");
-        return rest with { Strategy = new Control.Schedule(schedule.Points, ratedPower), Schedule = schedule.Input };
+        return rest with { Strategy = new Control.Schedule(schedule.Points, ratedPower), Schedule = schedule };
     }
 
     private static void RefuseKeysOfOthers(CaseValues values, string strategy)

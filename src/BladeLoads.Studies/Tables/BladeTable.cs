@@ -9,8 +9,9 @@ namespace BladeLoads.Studies.Tables;
 /// <summary>A blade table as read.</summary>
 /// <param name="Blade">Null when an error keeps the table from being used.</param>
 /// <param name="Sections">Every section named, with the place of its first row; those of a table with errors too.</param>
-/// <param name="Hash">Over the parsed values.</param>
-internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Place At)> Sections, string Hash, InputFile Input)
+/// <param name="Canonical">The parsed values.</param>
+internal sealed record BladeTable(
+    Blade? Blade, ImmutableArray<(string Name, Place At)> Sections, CanonicalTable Canonical, InputFile Input)
 {
     private static readonly ImmutableArray<Column> Columns =
     [
@@ -70,7 +71,7 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
         if (blade is not null)
             UnlikelyBlade.Doubt(blade, cells, findings);
         return new BladeTable(
-            blade, [.. sections], Fingerprint.OfLines(lines),
+            blade, [.. sections], Fingerprint.OfTable("blade", input.File, () => lines),
             new InputFile(input.File, input.Sha256, Contents(blade, sections.Count)));
     }
 

@@ -8,8 +8,8 @@ namespace BladeLoads.Studies.Tables;
 
 /// <summary>A section's polar table as read, prepared once for all cases that use it.</summary>
 /// <param name="Section">Null when an error keeps the table from being used.</param>
-/// <param name="Hash">Over the parsed values; moment coefficients, which nothing uses, are not in it.</param>
-internal sealed record PolarTable(Section? Section, string Hash, InputFile Input)
+/// <param name="Canonical">The parsed values; moment coefficients, which nothing uses, are not in it.</param>
+internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, InputFile Input)
 {
     private const int FewestRows = 3;
     private const double AngleSlack = 1e-9;       // deg
@@ -36,7 +36,8 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
                 rows.Ask("cd", "are cl and cd exchanged?");
         }
         var section = rows.HasErrors ? null : Section.FromPolars(sectionName, blocks.Select(block => block.ToPolar()));
-        return new PolarTable(section, Fingerprint.OfLines(blocks.SelectMany(block => block.Lines())),
+        return new PolarTable(
+            section, Fingerprint.OfTable($"section.{sectionName}", input.File, () => blocks.SelectMany(block => block.Lines())),
             new InputFile(input.File, input.Sha256, section is null ? "polar table with errors" : Contents(blocks)))
         {
             Doubts = section is null ? [] : [.. DoubtsOf(blocks)],

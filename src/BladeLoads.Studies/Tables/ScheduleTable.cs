@@ -8,8 +8,8 @@ namespace BladeLoads.Studies.Tables;
 
 /// <summary>A control schedule as read.</summary>
 /// <param name="Points">Wind speeds rising; empty when an error keeps the table from being used.</param>
-/// <param name="Hash">Over the parsed values.</param>
-internal sealed record ScheduleTable(ImmutableArray<OperatingPoint> Points, string Hash, InputFile Input)
+/// <param name="Canonical">The parsed values.</param>
+internal sealed record ScheduleTable(ImmutableArray<OperatingPoint> Points, CanonicalTable Canonical, InputFile Input)
 {
     private static readonly ImmutableArray<Column> Columns =
         [new("wind_speed_m_s", true), new("rotor_speed_rpm", true), new("pitch_deg", true)];
@@ -43,7 +43,7 @@ internal sealed record ScheduleTable(ImmutableArray<OperatingPoint> Points, stri
         var contents = rows.HasErrors ? "schedule with errors" : string.Create(CultureInfo.InvariantCulture,
             $"{points.Count} wind speeds from {CanonicalText.Of(points[0].WindSpeed)} "
             + $"to {CanonicalText.Of(points[^1].WindSpeed)} m/s");
-        return new ScheduleTable(rows.HasErrors ? [] : [.. points], Fingerprint.OfLines(lines),
+        return new ScheduleTable(rows.HasErrors ? [] : [.. points], Fingerprint.OfTable("control.schedule", input.File, () => lines),
             new InputFile(input.File, input.Sha256, contents));
     }
 

@@ -101,12 +101,13 @@ internal static class CommandLine
         var study = StudyArgument("the study's folder, or one case file");
         var results = ResultsOption();
         var only = OnlyOption();
-        var command = new Command("plan", "Tells how the results of each case stand, what a run would solve, and why; writes nothing.")
+        var json = new Option<bool>("--json") { Description = "the same for scripts, as JSON" };
+        var command = new Command("plan", "Tells how the results of each case stand, what a run would solve, and why; solves nothing.")
         {
-            study, results, only,
+            study, results, only, json,
         };
         command.SetAction(result => PlanCommand.Run(
-            result.GetRequiredValue(study), result.GetRequiredValue(results), result.GetValue(only) ?? [], surroundings));
+            result.GetRequiredValue(study), result.GetRequiredValue(results), result.GetValue(only) ?? [], result.GetValue(json), surroundings));
         return command;
     }
 

@@ -18,6 +18,7 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
         [
             ("bladeloads plan inputs/tarn-valley", "what a run would solve, and why"),
             ("bladeloads plan inputs/tarn-valley --only 'soiled*'", "the same for some of the cases"),
+            ("bladeloads plan inputs/tarn-valley --json", "the same for scripts; docs/formats.md has its keys"),
         ],
         ["run"] =
         [

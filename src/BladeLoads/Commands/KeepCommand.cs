@@ -1,11 +1,13 @@
 using System.Collections.Immutable;
 using System.CommandLine;
 using BladeLoads.Batch.Plan;
+using BladeLoads.Batch.Plan.Index;
 using BladeLoads.Batch.Work;
 using BladeLoads.Results.Keeping;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Tables;
 using BladeLoads.Results.Wording;
+using BladeLoads.Rotor.Operation;
 using BladeLoads.Screen;
 
 namespace BladeLoads.Commands;
@@ -42,7 +44,8 @@ internal static class KeepCommand
     {
         var study = AskedStudy.Read(asked.Study, surroundings);
         var results = new ResultsFolder(Path.GetFullPath(asked.Results), study.Whole.Name);
-        var (plan, _) = study.Plan(results, []);
+        var look = new StudyLook(results, CommandLine.ToolVersion, SolverVersion.Number, surroundings.Time);
+        var (plan, _) = study.Plan(look, []);
         if (KeptSet.Objection(asked.Name) is { } objection)
             throw new WrongUseException($"'{asked.Name}' cannot be the name of a kept set: {objection}");
         if (plan.Cases.Any(c => c.Case.Name == asked.Name))
@@ -52,7 +55,7 @@ internal static class KeepCommand
         if (!asked.Replace && Path.Exists(results.KeptAs(asked.Name)))
             throw new WrongUseException($"there is a set '{asked.Name}' already; keep under another name, or put this one in its place with --replace");
         var notCurrent = plan.Cases.Where(c => c.State.Word != "current").Select(c => $"{c.Case.Name}: {c.State.Word}")
-            .Concat(plan.Rejected.Select(r => $"{r}: rejected")).ToImmutableArray();
+            .Concat(plan.Rejected.Select(r => $"{r}: blocked")).ToImmutableArray();
         if (!notCurrent.IsEmpty && !asked.AsItIs)
             return Refuse(
                 $"not kept: {Count.Of(notCurrent.Length, "case")} of {plan.Cases.Length + plan.Rejected.Length} not current; "

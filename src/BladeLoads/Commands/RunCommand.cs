@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using BladeLoads.Batch.Logs;
 using BladeLoads.Batch.Plan;
+using BladeLoads.Batch.Plan.Index;
 using BladeLoads.Batch.Queue;
 using BladeLoads.Batch.Work;
 using BladeLoads.Results.Comparison;
@@ -27,7 +28,8 @@ internal static class RunCommand
         var study = AskedStudy.Read(request.Path, surroundings);
         FindingLines.Write(study.Asked, surroundings.Error, withSource: surroundings.ErrorIsTerminal);
         var results = new ResultsFolder(Path.GetFullPath(request.Results), study.Asked.Name);
-        var (wholePlan, plan) = study.Plan(results, request.Only);
+        var look = new StudyLook(results, CommandLine.ToolVersion, SolverVersion.Number, surroundings.Time);
+        var (wholePlan, plan) = study.Plan(look, request.Only);
         if (NothingMeant.Tell(plan, study.Asked, request.Only, surroundings))
             return ExitCode.NothingCouldRun;
         if (plan.Cases.IsEmpty)
@@ -38,7 +40,7 @@ internal static class RunCommand
 
         var due = plan.Cases.Where(c => request.All || c.IsDue).Select(c => c.Case).ToImmutableArray();
         if (!request.Quiet)
-            surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, due.Length));
+            surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, request.All));
 
         if (due.IsEmpty)
             Publisher.TidyIfPossible(results, surroundings.Disk);
@@ -46,7 +48,7 @@ internal static class RunCommand
         var changes = RunChanges.Before(wholePlan, due.Select(c => c.Name), results);
         if (!due.IsEmpty)
             changes.Remember(publisher.Get());
-        var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, signals, surroundings);
+        var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, plan, signals, surroundings);
         var rows = StudySummary.Rows(wholePlan, run.Outcomes);
         var shown = RowsOf(plan, rows);
         if (run.NoRoom is null)
@@ -54,6 +56,8 @@ internal static class RunCommand
         var moved = run.NoRoom is null && !changes.IsEmpty ? changes.Compare(run.Outcomes) : [];
         if (run.NoRoom is null && !changes.IsEmpty)
             changes.Publish(moved, run.Outcomes, publisher.Get());
+        if (run.NoRoom is null && !due.IsEmpty)
+            look.LookAfterRun(study.Whole);
         if (run.NoRoom is null && !request.Quiet)
         {
             SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
@@ -69,15 +73,16 @@ internal static class RunCommand
     private static RunResult NothingRun { get; } = new(ImmutableSortedDictionary<string, CaseOutcome>.Empty, null, []);
 
     private static RunResult Solve(
-        ImmutableArray<StudyCase> due, RunRequest request, ResultsFolder results, PublisherWhenNeeded publisher, StopSignals signals,
-        Surroundings surroundings)
+        ImmutableArray<StudyCase> due, RunRequest request, ResultsFolder results, PublisherWhenNeeded publisher, StudyPlan plan,
+        StopSignals signals, Surroundings surroundings)
     {
         var screen = new ScreenLog(surroundings.Error);
         publisher.Get();   // a folder that cannot be written to is told before a log file in it is tried
         using var log = RunLog.Open(results.Logs, screen, surroundings.Time, screen.Line);
+        var identity = new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion);
+        var reuse = request.All ? null : new CaseReuse(plan, results, publisher.Get(), surroundings.Disk, identity);
         var work = new CaseWork(
-            surroundings.Solve, publisher.Get(), results, new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion), log.Logger,
-            surroundings.Time, surroundings.WaitForFile);
+            surroundings.Solve, publisher.Get(), results, identity, log.Logger, surroundings.Time, surroundings.WaitForFile, reuse);
         var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
         RunResult Run() => StudyRun.Solve(due, work, request.Workers, progress, log.Logger, signals.Stopping);
         try

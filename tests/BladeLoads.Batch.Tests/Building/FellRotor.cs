@@ -27,8 +27,10 @@ internal static class FellRotor
     public static StudyCase Case(string name, RotorCase? rotor = null, string title = "invented", params (string Key, string Value)[] values)
     {
         var all = values.ToImmutableSortedDictionary(v => v.Key, v => v.Value, StringComparer.Ordinal);
+        // Cases of the same values are the same case under another name; those without any differ.
+        var determining = values.Length == 0 ? name : string.Join('\n', all.Select(v => $"{v.Key}={v.Value}"));
         return new StudyCase(
-            name, title, $"cases/{name}.toml", rotor ?? Rotor(), null, Hash(string.Join('\n', all.Select(v => $"{v.Key}={v.Value}"))),
+            name, title, $"cases/{name}.toml", rotor ?? Rotor(), null, Hash(determining),
             [new InputFile($"cases/{name}.toml", Hash(name), "case file")], all);
     }
 
