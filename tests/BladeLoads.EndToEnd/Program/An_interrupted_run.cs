@@ -67,7 +67,8 @@ public sealed class An_interrupted_run : IDisposable
 
     private bool HasResults() => Directory.Exists(_results) && Directory.EnumerateDirectories(_results, "long~*").Skip(2).Any();
 
-    private IEnumerable<string> Hidden() => Directory.EnumerateFileSystemEntries(_results, ".*");
+    private IEnumerable<string> Hidden()
+        => Directory.EnumerateFileSystemEntries(_results, ".*").Where(e => Path.GetFileName(e) is not ".index");
 
     private void AssertOnlyWholeResults()
     {
