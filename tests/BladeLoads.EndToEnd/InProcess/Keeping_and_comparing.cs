@@ -166,7 +166,7 @@ public sealed class Keeping_and_comparing : IDisposable
     {
         using var output = new StringWriter { NewLine = "\n" };
         using var error = new StringWriter { NewLine = "\n" };
-        var study = FellRotor.Study([.. _cases.Select(n => FellRotor.Case(n, values: ("air.density_kg_m3", _density)))]);
+        var study = FellRotor.Study([.. _cases.Select(n => FellRotor.Case(n, values: [("air.density_kg_m3", _density), ("name", n)]))]);
         SolveCase solve = (rotor, _) => FellRotor.Scaled(FellRotor.Curve(rotor), _factor);
         var surroundings = new Surroundings(output, error, false, false, _ => study, solve, new Disk(), TimeProvider.System, _ => { }) { Ask = ask };
         var code = CommandLine.Run([.. arguments, "--results", _folder.Path], surroundings);
