@@ -8,7 +8,7 @@ public static class MadeFrom
     private const int Shown = 3;
 
     /// <summary>
-    /// One sentence in the plan's own words: <c>section tarn-18: table changed; air.density_kg_m3 1.225 -> 1.05</c>; empty where both
+    /// One sentence in the plan's own words: <c>polar tarn-18.csv: table changed; air.density_kg_m3 1.225 -> 1.05</c>; empty where both
     /// were made from the same, or where that is not known.
     /// </summary>
     public static string Difference(StoredResult old, StoredResult now)
