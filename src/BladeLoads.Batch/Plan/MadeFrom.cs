@@ -15,7 +15,11 @@ public static class MadeFrom
     {
         if (old.Receipt is not { } was || now.Receipt is not { } receipt)
             return "";
+<<<<<<< HEAD
         var reasons = Differences.OfValues(was.Values, receipt.Values, [], _ => null).ToList();
+=======
+        var reasons = Differences.OfValues(was.Values, receipt.Values).ToList();
+>>>>>>> d76fc5e (A comparison's reason is asked of the results themselves)
         if (was.SolverVersion != receipt.SolverVersion)
             reasons.Insert(0, new StaleReason.SolverChanged(was.SolverVersion, receipt.SolverVersion));
         return string.Join("; ", reasons.Take(Shown).Select(r => r.Sentence))
