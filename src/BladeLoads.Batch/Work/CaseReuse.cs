@@ -59,7 +59,11 @@ public sealed class CaseReuse(
                 var from = Path.GetRelativePath(results.Study, folder).Replace('\\', '/');
                 var own = receipt with
                 {
-                    Study = results.StudyName, Case = studyCase.Name, Title = studyCase.Title, Inputs = studyCase.Inputs, ReusedFrom = from,
+                    Study = results.StudyName,
+                    Case = studyCase.Name,
+                    Title = studyCase.Title,
+                    Inputs = studyCase.Inputs,
+                    ReusedFrom = from,
                 };
                 publisher.PublishCase(studyCase.Name, [.. files, new(Receipt.FileName, ReceiptFile.Write(own))]);
                 return new CaseOutcome.Reused(receipt.Summary, from);
