@@ -10,6 +10,9 @@ public abstract record CaseOutcome
     /// <summary>Its result is published.</summary>
     public sealed record Solved(CaseSummary Summary, int RotorSolves) : CaseOutcome;
 
+    /// <summary>Another run at work on the same study has published its result meanwhile.</summary>
+    public sealed record SolvedByAnother(CaseSummary Summary) : CaseOutcome;
+
     /// <summary>It alone could not be solved or published.</summary>
     /// <param name="Reason">One sentence, fit for a terminal.</param>
     public sealed record Failed(string Reason) : CaseOutcome;

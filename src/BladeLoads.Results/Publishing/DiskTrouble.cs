@@ -4,6 +4,7 @@ namespace BladeLoads.Results.Publishing;
 internal static class Errno
 {
     public const int NotPermitted = 1;
+    public const int NoEntry = 2;
     public const int Interrupted = 4;
     public const int InputOutput = 5;
     public const int TryAgain = 11;
@@ -30,6 +31,10 @@ public static class DiskTrouble
     {
         HResult: Errno.TryAgain or Errno.Busy or Errno.TextFileBusy or WindowsSharing or WindowsLock
     };
+
+    /// <summary>What was asked for is not there, or the folder it was to lie in.</summary>
+    public static bool IsGone(IOException trouble)
+        => trouble is FileNotFoundException or DirectoryNotFoundException || trouble.HResult == Errno.NoEntry;
 
     /// <summary>No case can be written any more: no room, no permission, or a device that fails. Other cases would fare no better.</summary>
     public static bool StopsTheRun(Exception trouble) => trouble is UnauthorizedAccessException or IOException

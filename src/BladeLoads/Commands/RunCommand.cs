@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using BladeLoads.Batch.Logs;
 using BladeLoads.Batch.Plan;
 using BladeLoads.Batch.Queue;
+using BladeLoads.Batch.Sharing;
 using BladeLoads.Batch.Work;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Tables;
@@ -38,13 +39,18 @@ internal static class RunCommand
             surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, due.Length));
 
         if (due.IsEmpty)
+        {
             Publisher.TidyIfPossible(results, surroundings.Disk);
+            Claims.TidyIfPossible(results, surroundings.Disk);
+        }
         using var publisher = new PublisherWhenNeeded(results, surroundings.Disk);
-        var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, signals, surroundings);
+        var run = due.IsEmpty ? NothingRun : Solve(due, AgainOf(plan, request), request, results, publisher, signals, surroundings);
         var rows = StudySummary.Rows(wholePlan, run.Outcomes);
         var shown = RowsOf(plan, rows);
         if (run.NoRoom is null)
             StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
+        if (run.SolvedByAnother > 0 && !request.Quiet)
+            surroundings.Out.WriteLine($"{Count.Of(run.SolvedByAnother, "case")} solved by another run at work on this study");
         if (run.NoRoom is null && !request.Quiet)
             SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
         return Tell(run, shown, study.Asked, signals, surroundings);
@@ -53,8 +59,8 @@ internal static class RunCommand
     private static RunResult NothingRun { get; } = new(ImmutableSortedDictionary<string, CaseOutcome>.Empty, null, []);
 
     private static RunResult Solve(
-        ImmutableArray<StudyCase> due, RunRequest request, ResultsFolder results, PublisherWhenNeeded publisher, StopSignals signals,
-        Surroundings surroundings)
+        ImmutableArray<StudyCase> due, Again again, RunRequest request, ResultsFolder results, PublisherWhenNeeded publisher,
+        StopSignals signals, Surroundings surroundings)
     {
         var screen = new ScreenLog(surroundings.Error);
         publisher.Get();   // a folder that cannot be written to is told before a log file in it is tried
@@ -63,7 +69,8 @@ internal static class RunCommand
             surroundings.Solve, publisher.Get(), results, new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion), log.Logger,
             surroundings.Time, surroundings.WaitForFile);
         var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
-        RunResult Run() => StudyRun.Solve(due, work, request.Workers, progress, log.Logger, signals.Stopping);
+        using var claims = new Claims(results, surroundings.Disk);
+        RunResult Run() => StudyRun.Solve(due, again, work, claims, request.Workers, progress, log.Logger, signals.Stopping);
         try
         {
             if (request.Quiet)
@@ -78,6 +85,9 @@ internal static class RunCommand
             return NothingRun with { Faults = [e] };
         }
     }
+
+    private static Again AgainOf(StudyPlan plan, RunRequest request) => new(
+        [.. plan.Cases.Where(c => request.All && c.State is CaseState.Current).Select(c => c.Case.Name)], request.All);
 
     private static ImmutableArray<SummaryRow> RowsOf(StudyPlan plan, ImmutableArray<SummaryRow> rows)
     {
