@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using BladeLoads.Results.Publishing;
 
 namespace BladeLoads.Batch.Tests.Building;
@@ -26,9 +27,8 @@ internal sealed class KilledException : Exception;
 internal sealed class MisfortuneDisk(int at, Misfortune misfortune, bool canExchange = true, int errno = 5) : IDisk
 {
     private readonly Disk _disk = new();
+    private readonly ConcurrentBag<ILockedFile> _locks = [];
     private int _effects;
-
-    public int Effects => _effects;
 
     public bool HasStruck => at > 0 && _effects >= at;
 
@@ -84,7 +84,10 @@ internal sealed class MisfortuneDisk(int at, Misfortune misfortune, bool canExch
     public ILockedFile? TryLock(string path)
     {
         Count();
-        return _disk.TryLock(path) is { } held ? new Held(held, this) : null;
+        if (_disk.TryLock(path) is not { } held)
+            return null;
+        _locks.Add(held);
+        return new Held(held, this);
     }
 
     public byte[] ReadThoughLocked(string path) => _disk.ReadThoughLocked(path);
@@ -99,7 +102,11 @@ internal sealed class MisfortuneDisk(int at, Misfortune misfortune, bool canExch
     {
         var effect = Interlocked.Increment(ref _effects);
         trouble = misfortune == Misfortune.Killed ? new KilledException() : new IOException($"refused at {effect}", errno);
-        return at > 0 && (misfortune == Misfortune.Refused ? effect == at : effect >= at);
+        var strikes = at > 0 && (misfortune == Misfortune.Refused ? effect == at : effect >= at);
+        if (strikes && misfortune == Misfortune.Killed)
+            foreach (var held in _locks)
+                held.Dispose();   // the kernel frees the locks of a process that is gone
+        return strikes;
     }
 
     private sealed class Held(ILockedFile inner, MisfortuneDisk disk) : ILockedFile
