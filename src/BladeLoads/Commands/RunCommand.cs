@@ -64,26 +64,32 @@ internal static class RunCommand
     {
         var screen = new ScreenLog(surroundings.Error);
         publisher.Get();   // a folder that cannot be written to is told before a log file in it is tried
-        using var log = RunLog.Open(results.Logs, screen, surroundings.Time, screen.Line);
+        // Where results cannot be written either, that alone is told.
+        string? logTrouble = null;
+        var log = RunLog.Open(results.Logs, screen, surroundings.Time, line => logTrouble = line);
         var work = new CaseWork(
             surroundings.Solve, publisher.Get(), results, new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion), log.Logger,
             surroundings.Time, surroundings.WaitForFile);
         var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
         using var claims = new Claims(results, surroundings.Disk);
         RunResult Run() => StudyRun.Solve(due, again, work, claims, request.Workers, progress, log.Logger, signals.Stopping);
+        RunResult Shown() => request.Quiet ? Run()
+            : surroundings.ErrorIsTerminal ? ProgressBar.Show(Run, progress, screen)
+            : PlainProgress.Show(Run, progress, request.Workers, surroundings.Error, surroundings.Time);
+        var run = NothingRun;
         try
         {
-            if (request.Quiet)
-                return Run();
-            return surroundings.ErrorIsTerminal
-                ? ProgressBar.Show(Run, progress, screen)
-                : PlainProgress.Show(Run, progress, request.Workers, surroundings.Error, surroundings.Time);
+            run = Shown();
         }
         catch (Exception e)
         {
             log.Logger.Fault(e);
-            return NothingRun with { Faults = [e] };
+            run = NothingRun with { Faults = [e] };
         }
+        log.Dispose();
+        if (logTrouble is not null && run.NoRoom is null)
+            screen.Line(logTrouble);
+        return run;
     }
 
     private static Again AgainOf(StudyPlan plan, RunRequest request) => new(

@@ -41,11 +41,11 @@ public sealed class A_power_cut : IDisposable
         {
             // One run is cut at several instants; then a new one begins.
             using var run = Started.With(_folder.Path, Nothing, "run", "beck", "--results", disk.Folder, "--all");
-            run.Until(() => Directory.Exists(Path.Join(results, ".claims")));
+            run.Until(() => Directory.Exists(Path.Join(results, ".claims")) && Done(results, wanted).Count > 0);
             var copies = new List<(string Image, HashSet<string> Done)>();
             for (var ended = false; !ended && cut <= HowMany.PowerCuts; cut++)
             {
-                ended = run.EndsWithin(TimeSpan.FromMilliseconds(random.Next(20, 150)));
+                ended = run.EndsWithin(TimeSpan.FromMilliseconds(random.Next(10, 120)));
                 if (!ended)
                     copies.Add(Cut(run, image, results, wanted, cut));
             }
@@ -67,10 +67,7 @@ public sealed class A_power_cut : IDisposable
         run.Signal("STOP");
         while (!AreAllStopped(run.Id))
             Thread.Yield();
-        // A claim is gone only when its result is flushed: what is in its place without one is done.
-        var done = Found.Fingerprints(results)
-            .Where(f => wanted[f.Key] == f.Value && !File.Exists(Path.Join(results, ".claims", f.Key)))
-            .Select(f => f.Key).ToHashSet(StringComparer.Ordinal);
+        var done = Done(results, wanted);
         var copy = Path.Join(_folder.Path, $"cut-{number}.img");
         File.Copy(image, copy);
         run.Signal("CONT");
@@ -93,6 +90,11 @@ public sealed class A_power_cut : IDisposable
         }
         File.Delete(image);
     }
+
+    // A claim is gone only when its result is flushed: what is in its place without one is done.
+    private static HashSet<string> Done(string results, Dictionary<string, string> wanted) => Found.Fingerprints(results)
+        .Where(f => wanted[f.Key] == f.Value && !File.Exists(Path.Join(results, ".claims", f.Key)))
+        .Select(f => f.Key).ToHashSet(StringComparer.Ordinal);
 
     private static bool AreAllStopped(int process) => Directory
         .EnumerateDirectories($"/proc/{process.ToString(CultureInfo.InvariantCulture)}/task")
