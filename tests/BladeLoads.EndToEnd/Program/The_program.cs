@@ -1,4 +1,5 @@
 using BladeLoads.Batch.Tests.Building;
+using BladeLoads.Results.Publishing;
 
 namespace BladeLoads.EndToEnd.Program;
 
@@ -223,6 +224,9 @@ public sealed class The_program : IDisposable
 
     private Finished Run(params string[] arguments) => Started.Run(_folder.Path, arguments);
 
+    /// <summary>The summary and the tables of current results, by relative path.</summary>
     private static Dictionary<string, string> Tables(string results) => TemporaryFolder.Contents(results)
-        .Where(f => f.Key.EndsWith(".csv", StringComparison.Ordinal)).ToDictionary(StringComparer.Ordinal);
+        .Where(f => f.Key.EndsWith(".csv", StringComparison.Ordinal))
+        .Where(f => f.Key == "summary.csv" || ResultsFolder.Objection(f.Key.Split(Path.DirectorySeparatorChar)[0]) is null)
+        .ToDictionary(StringComparer.Ordinal);
 }
