@@ -50,7 +50,7 @@ internal static class RunCommand
         if (run.NoRoom is null)
             StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
         if (run.SolvedByAnother > 0 && !request.Quiet)
-            surroundings.Out.WriteLine($"{Count.Of(run.SolvedByAnother, "case")} solved by another run at work on this study");
+            surroundings.Out.WriteLine($"{Count.Of(run.SolvedByAnother, "case")} solved by another run");
         if (run.NoRoom is null && !request.Quiet)
             SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
         return Tell(run, shown, study.Asked, signals, surroundings);

@@ -71,7 +71,7 @@ internal static class BeckStudy
         [wind]
         speeds_m_s = { from = 4, to = 24, step = 0.01 }
         [model]
-        elements = 1200
+        elements = 800
         [outputs]
         spanwise = "none"
         """);
