@@ -45,7 +45,9 @@ internal static class RunCommand
         }
         using var publisher = new PublisherWhenNeeded(results, surroundings.Disk);
         var run = due.IsEmpty ? NothingRun : Solve(due, AgainOf(plan, request), request, results, publisher, signals, surroundings);
-        var rows = StudySummary.Rows(wholePlan, run.Outcomes);
+        // Another run may have been at work meanwhile on cases that this one was not asked for.
+        var othersAreDue = !due.IsEmpty && wholePlan.Cases.Any(c => c.IsDue && !run.Outcomes.ContainsKey(c.Case.Name));
+        var rows = StudySummary.Rows(othersAreDue ? study.Plan(results, request.Only).Whole : wholePlan, run.Outcomes);
         var shown = RowsOf(plan, rows);
         if (run.NoRoom is null)
             StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);

@@ -61,6 +61,32 @@ public sealed class A_power_cut : IDisposable
         Assert.True(mostDone > 0, "no cut fell into a run that had done something");
     }
 
+    /// <summary>
+    /// Every flush of a file takes with it whatever the file system has to say, so in a busy run a flush that is left out goes unnoticed.
+    /// Here a case that takes long is at work, and nothing is flushed after the others are done.
+    /// </summary>
+    [FactOfRoot]
+    public void Spares_what_was_done_though_nothing_has_been_flushed_since()
+    {
+        var study = Path.Join(_folder.Path, "beck");
+        BeckStudy.Write(study);
+        Assert.Equal(0, Started.Run(_folder.Path, "run", "beck").ExitCode);
+        var wanted = Found.Fingerprints(Path.Join(_folder.Path, "results", "beck"));
+        BeckStudy.AddGiant(study);
+        var image = Path.Join(_folder.Path, "disk.img");
+        Mounted.MakeImage(image, 48);
+        using var disk = Mounted.Image(Path.Join(_folder.Path, "disk"), image);
+        var results = Path.Join(disk.Folder, "beck");
+        using var run = Started.With(_folder.Path, Nothing, "run", "beck", "--results", disk.Folder, "--workers", "2");
+        run.Until(() => Directory.Exists(results) && Done(results, wanted).Count == wanted.Count);
+        var (copy, done) = Cut(run, image, results, wanted, number: 0);
+        run.Signal("KILL");
+        run.Wait();
+        using var cut = Mounted.Image(Path.Join(_folder.Path, "cut"), copy);
+        Assert.Equal(done.Order(), Found.Fingerprints(Path.Join(cut.Folder, "beck")).Keys.Order());
+        Found.AssertAllWhole(Path.Join(cut.Folder, "beck"));
+    }
+
     private (string Image, HashSet<string> Done) Cut(
         Started run, string image, string results, Dictionary<string, string> wanted, int number)
     {

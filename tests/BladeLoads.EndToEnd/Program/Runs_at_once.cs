@@ -57,6 +57,19 @@ public sealed class Runs_at_once : IDisposable
     }
 
     [Fact]
+    public void A_run_of_some_cases_does_not_write_the_others_out_of_the_summary_that_were_solved_meanwhile()
+    {
+        BeckStudy.AddGiant(_study);
+        using var some = Started.With(_folder.Path, Nothing, "run", "beck", "--only", "giant");
+        some.Until(() => IsClaimed("giant", attempts: 1));
+        Assert.Equal(0, Started.Run(_folder.Path, "run", "beck", "--only", "clean", "--only", "slow", "--only", "thin-air").ExitCode);
+        Assert.Equal(0, some.Wait().ExitCode);
+        var lines = File.ReadAllLines(Path.Join(_results, "summary.csv"));
+        Assert.Equal(5, lines.Length);
+        Assert.All(lines[1..], line => Assert.Contains(",current,", line, StringComparison.Ordinal));
+    }
+
+    [Fact]
     public void A_case_that_takes_its_process_with_it_three_times_fails_alone()
     {
         BeckStudy.AddGiant(_study);
