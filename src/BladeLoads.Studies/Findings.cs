@@ -21,6 +21,8 @@ internal sealed class Findings
 
     public void Doubt(InputFinding finding) => _doubts.Add(Visible(finding));
 
+    public void Doubt(Place at, string text) => Doubt(new InputFinding(at.File, at.Line, at.Column, text));
+
     public ImmutableArray<InputFinding> Errors => InFileOrder(_errors, "errors");
 
     public ImmutableArray<InputFinding> Doubts => InFileOrder(_doubts, "doubts");
@@ -29,11 +31,8 @@ internal sealed class Findings
         => finding with { File = VisibleText.Escape(finding.File), Text = VisibleText.Escape(finding.Text) };
 
     private static ImmutableArray<InputFinding> InFileOrder(IEnumerable<InputFinding> findings, string noun) =>
-        [.. findings
-            .GroupBy(f => f.File, StringComparer.Ordinal)
-            .OrderBy(file => Rank(file.Key)).ThenBy(file => file.Key, StringComparer.Ordinal)
-            .SelectMany(file => FirstOf(
-                [.. file.OrderBy(f => f.Line).ThenBy(f => f.Column).ThenBy(f => f.Text, StringComparer.Ordinal)], noun))];
+        [.. findings.Order(FindingOrder.Instance).GroupBy(f => f.File, StringComparer.Ordinal)
+            .SelectMany(file => FirstOf([.. file], noun))];
 
     // A table of rubbish must not push every other finding off the screen.
     private static IEnumerable<InputFinding> FirstOf(List<InputFinding> ofOneFile, string noun)
@@ -44,13 +43,4 @@ internal sealed class Findings
         var rest = (ofOneFile.Count - MostShownOfAFile).ToString(CultureInfo.InvariantCulture);
         return ofOneFile.Take(MostShownOfAFile).Append(next with { Column = 0, Text = $"and {rest} more {noun} from here on" });
     }
-
-    private static int Rank(string file) => file switch
-    {
-        StudyReader.StartingValuesFile => 0,
-        _ when file.StartsWith("cases/", StringComparison.Ordinal) => 1,
-        _ when file.StartsWith("blades/", StringComparison.Ordinal) => 2,
-        _ when file.StartsWith("polars/", StringComparison.Ordinal) => 3,
-        _ => 4,
-    };
 }

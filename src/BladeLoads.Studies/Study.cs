@@ -1,5 +1,7 @@
 using System.Collections.Immutable;
 using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Fingerprints;
 
 namespace BladeLoads.Studies;
 
@@ -13,7 +15,16 @@ namespace BladeLoads.Studies;
 /// <param name="Doubts">In file order; nothing is kept from running by a doubt.</param>
 public sealed record Study(
     string Name, string Folder, string? Baseline, ImmutableArray<StudyCase> Cases, ImmutableArray<string> Rejected,
-    ImmutableArray<InputFinding> Errors, ImmutableArray<InputFinding> Doubts);
+    ImmutableArray<InputFinding> Errors, ImmutableArray<InputFinding> Doubts)
+{
+    /// <summary>For each rejected case the first error that keeps it from running; none for a case that was rejected otherwise.</summary>
+    public ImmutableDictionary<string, InputFinding> Blocking { get; init; } = ImmutableDictionary<string, InputFinding>.Empty;
+
+    /// <summary>
+    /// What was looked at to read it; null where that is not known. While all of it stays as it was, reading again gives the same study.
+    /// </summary>
+    public StudySight? Sight { get; init; }
+}
 
 /// <summary>An error or a doubt about an input, at its place. Lines and columns count from 1; 0 means the whole file.</summary>
 /// <param name="File">Relative to the study folder, with forward slashes.</param>
@@ -33,7 +44,11 @@ public sealed record InputFinding(string File, int Line, int Column, string Text
 /// </param>
 public sealed record StudyCase(
     string Name, string Title, string File, RotorCase Rotor, ImmutableArray<double>? Spanwise, string Fingerprint,
-    ImmutableArray<InputFile> Inputs, ImmutableSortedDictionary<string, string> Values);
+    ImmutableArray<InputFile> Inputs, ImmutableSortedDictionary<string, string> Values)
+{
+    /// <summary>The tables whose hashes stand in the values; empty where they are not at hand.</summary>
+    public ImmutableArray<CanonicalTable> Tables { get; init; } = [];
+}
 
 /// <summary>A file that a case was read from.</summary>
 /// <param name="File">Relative to the study folder, with forward slashes.</param>

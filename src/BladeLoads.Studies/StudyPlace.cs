@@ -61,7 +61,7 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
     }
 
     // Hidden files are an editor's, not a user's; "..toml" is told, since someone meant it.
-    private static bool IsCaseFile(string name)
+    internal static bool IsCaseFile(string name)
         => name.EndsWith(CaseName.Ending, StringComparison.Ordinal)
             && (name[0] != '.' || name.StartsWith("..", StringComparison.Ordinal) || name == CaseName.Ending);
 

@@ -13,7 +13,16 @@ public static class StudyReader
     /// </summary>
     /// <param name="path">A study folder, or one case file: then only that case and its variants are read.</param>
     /// <exception cref="StudyNotFoundException">There is nothing at the path that could be a study.</exception>
-    public static Study Read(string path) => Read(path, new DiskFiles());
+    public static Study Read(string path) => Read(path, TimeProvider.System);
+
+    /// <inheritdoc cref="Read(string)"/>
+    /// <param name="time">Tells how long ago a file was changed: see <see cref="FileStamp"/>.</param>
+    public static Study Read(string path, TimeProvider time)
+    {
+        var files = new SeenFiles(new DiskFiles(), time);
+        var study = Read(path, files);
+        return study with { Sight = files.Sight(study.Folder) };
+    }
 
     /// <inheritdoc cref="Read(string)"/>
     /// <param name="files">Where the study lies.</param>

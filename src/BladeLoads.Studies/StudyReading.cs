@@ -10,12 +10,15 @@ namespace BladeLoads.Studies;
 /// <summary>One reading of a study, from its files to its cases.</summary>
 internal sealed class StudyReading
 {
+    // Some file systems take capitals for small letters.
+    private readonly Dictionary<string, string> _fileNames = new(StringComparer.OrdinalIgnoreCase);
     private readonly StudyPlace _place;
     private readonly StudyFolder _folder;
     private readonly Findings _findings = new();
     private readonly CaseBuilder _builder;
     private readonly List<StudyCase> _cases = [];
     private readonly SortedSet<string> _rejected = new(StringComparer.Ordinal);
+    private readonly Dictionary<string, IReadOnlyList<string>> _usedByRejected = new(StringComparer.Ordinal);
     private readonly Dictionary<string, ImmutableArray<string>> _variantNames = new(StringComparer.Ordinal);
 
     public StudyReading(StudyPlace place, IStudyFiles files)
@@ -30,10 +33,38 @@ internal sealed class StudyReading
         var start = ReadStartingValues();
         foreach (var caseFile in _place.CaseFiles)
             ReadCase(caseFile, start);
+        if (_place.IsWhole)
+            PassedOver.Doubt(_folder, _findings);
         var baseline = ReadBaseline(start);
         return new Study(
             Path.GetFileName(_place.Folder) is { Length: > 0 } name ? name : "study", _place.Folder, baseline,
-            [.. _cases.OrderBy(c => c.Name, StringComparer.Ordinal)], [.. _rejected], _findings.Errors, _findings.Doubts);
+            [.. _cases.OrderBy(c => c.Name, StringComparer.Ordinal)], [.. _rejected], _findings.Errors, _findings.Doubts)
+        {
+            Blocking = Blocking(_findings.Errors),
+        };
+    }
+
+    // The case's own file first, then its tables in the order in which it names them, then the starting values.
+    private ImmutableDictionary<string, InputFinding> Blocking(ImmutableArray<InputFinding> errors)
+    {
+        if (_rejected.Count == 0)
+            return ImmutableDictionary<string, InputFinding>.Empty;
+        var firstOfFile = errors.GroupBy(e => e.File, StringComparer.Ordinal).ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
+        var blocking = ImmutableDictionary.CreateBuilder<string, InputFinding>(StringComparer.Ordinal);
+        foreach (var name in _rejected)
+        {
+            var used = _usedByRejected.GetValueOrDefault(name) ?? [name];
+            var files = used.Append(StudyReader.StartingValuesFile).Select(VisibleText.Escape);
+            if (files.Select(file => firstOfFile.GetValueOrDefault(file)).FirstOrDefault(f => f is not null) is { } finding)
+                blocking.Add(name, finding);
+        }
+        return blocking.ToImmutable();
+    }
+
+    private void Reject(string name, IReadOnlyList<string> used)
+    {
+        _rejected.Add(name);
+        _usedByRejected[name] = used;
     }
 
     private CaseFile ReadStartingValues()
@@ -51,14 +82,23 @@ internal sealed class StudyReading
         if (CaseName.Problem(name) is { } problem)
         {
             _findings.Error(new InputFinding(file, 0, 0, problem));
-            _rejected.Add(VisibleText.Escape(file));
+            Reject(VisibleText.Escape(file), [file]);
+            return;
+        }
+        var fileName = Path.GetFileName(fullPath);
+        if (!_fileNames.TryAdd(fileName, fileName))
+        {
+            _findings.Error(new InputFinding(file, 0, 0,
+                $"the name differs from {_fileNames[fileName]} in letter case only, "
+                + "and some systems take both for one; rename one"));
+            Reject(name, [file]);
             return;
         }
         var own = CaseFile.Read(_folder, fullPath, _findings);
         var complete = own.StartingFrom(start);
         if (own.Input is null || Sweep.Variants(name, complete, _findings) is not { } variants)
         {
-            _rejected.Add(name);
+            Reject(name, [file]);
             return;
         }
         _variantNames.Add(name, [.. variants.Select(variant => variant.Name)]);
@@ -68,11 +108,11 @@ internal sealed class StudyReading
         if (start.Input is not null)
             inputs = inputs.Add(start.Input with { Contents = "starting values" });
         foreach (var variant in variants)
-            if (_builder.Build(variant.Name, variant.Title, complete, variant.Entries, inputs) is { } studyCase
+            if (_builder.Build(variant.Name, variant.Title, complete, variant.Entries, inputs, out var used) is { } studyCase
                 && own.IsSound && start.IsSound)
                 _cases.Add(studyCase);
             else
-                _rejected.Add(variant.Name);
+                Reject(variant.Name, used);
     }
 
     private string? ReadBaseline(CaseFile start)

@@ -49,6 +49,9 @@ internal static class CaseEvents
                 studyCase.Name, summary.UnbalancedPoints, summary.Points);
     }
 
+    public static void Reused(this ILogger log, StudyCase studyCase, string from)
+        => log.Information("Case {Case} has a result of its very values already, from {From}; not solved again", studyCase.Name, from);
+
     public static void Failed(this ILogger log, StudyCase studyCase, string reason, Exception? details)
         => log.Error(details, "Case {Case} failed: {Reason}", studyCase.Name, reason);
 

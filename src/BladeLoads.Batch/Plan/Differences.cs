@@ -1,20 +1,23 @@
 using System.Buffers;
 using System.Collections.Immutable;
+using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Receipts;
 using BladeLoads.Studies;
+using BladeLoads.Studies.Fingerprints;
 
 namespace BladeLoads.Batch.Plan;
 
-/// <summary>What lies between a result and the case as it reads now.</summary>
+/// <summary>What lies between the values of a result and those of its case now.</summary>
 internal static class Differences
 {
     private static readonly SearchValues<char> HexDigits = SearchValues.Create("0123456789abcdef");
 
     // Told from the receipt's own field, in words of its own.
     private const string SolverKey = "solver";
+    private const string SectionPrefix = "section.";
 
-    /// <summary>All reasons, the solver first, then values by key, then files; none for a current result.</summary>
-    public static ImmutableArray<StaleReason> Between(Receipt receipt, StudyCase now, string folder, int solverVersion)
+    /// <summary>All reasons, the solver first, then values by key; none where the result was made from these values by this solver.</summary>
+    public static ImmutableArray<StaleReason> Between(Receipt receipt, StudyCase now, ResultsFolder results, int solverVersion)
     {
         var reasons = ImmutableArray.CreateBuilder<StaleReason>();
         if (receipt.SolverVersion != solverVersion)
@@ -22,50 +25,57 @@ internal static class Differences
         if (receipt.Fingerprint != now.Fingerprint)
         {
             var before = reasons.Count;
-            reasons.AddRange(OfValues(receipt.Values, now.Values));
+            reasons.AddRange(OfValues(receipt.Values, now.Values, now.Tables, hash => TableArchive.Read(results, hash)));
             if (reasons.Count == before && receipt.SolverVersion == solverVersion)
                 reasons.Add(new StaleReason.FingerprintChanged());
         }
-        reasons.AddRange(OfFiles(receipt.Files, folder));
         return reasons.ToImmutable();
     }
 
-    private static IEnumerable<StaleReason> OfValues(IReadOnlyDictionary<string, string> was, ImmutableSortedDictionary<string, string> now)
+    /// <summary>Every value that differs, by key; the solver's version apart.</summary>
+    /// <param name="tables">Those of the values now, as far as they are at hand: their rows are told.</param>
+    /// <param name="earlierTable">The text of a table by its hash, as far as it is at hand.</param>
+    internal static IEnumerable<StaleReason> OfValues(
+        IReadOnlyDictionary<string, string> was, IReadOnlyDictionary<string, string> now, ImmutableArray<CanonicalTable> tables,
+        Func<string, string?> earlierTable)
     {
         foreach (var key in was.Keys.Union(now.Keys, StringComparer.Ordinal).Order(StringComparer.Ordinal))
         {
             var from = was.GetValueOrDefault(key);
             var to = now.GetValueOrDefault(key);
             if (from != to && key != SolverKey)
-                yield return OfValue(key, from, to);
+                yield return OfValue(key, from, to, tables, earlierTable);
         }
     }
 
-    private static StaleReason OfValue(string key, string? from, string? to) => (from, to) switch
+    private static StaleReason OfValue(string key, string? from, string? to, ImmutableArray<CanonicalTable> tables, Func<string, string?> earlierTable) => (from, to) switch
     {
-        (null, { } value) when IsTable(value) => new StaleReason.TableAdded(TableName(key)),
+        (null, { } value) when IsTable(value) => new StaleReason.TableAdded(TableName(key, tables)),
         (null, { } value) => new StaleReason.ValueAdded(key, value),
-        ({ } value, null) when IsTable(value) => new StaleReason.TableRemoved(TableName(key)),
+        ({ } value, null) when IsTable(value) => new StaleReason.TableRemoved(TableName(key, tables)),
         ({ } value, null) => new StaleReason.ValueRemoved(key, value),
-        ({ } old, { } value) when IsTable(old) && IsTable(value) => new StaleReason.TableChanged(TableName(key)),
+        ({ } old, { } value) when IsTable(old) && IsTable(value) => OfTable(key, old, value, tables, earlierTable),
         _ => new StaleReason.ValueChanged(key, from!, to!),
     };
 
-    private static string TableName(string key)
-        => key.StartsWith("section.", StringComparison.Ordinal) ? "section " + key["section.".Length..] : key;
+    private static StaleReason OfTable(string key, string old, string value, ImmutableArray<CanonicalTable> tables, Func<string, string?> earlierTable)
+    {
+        var name = TableName(key, tables);
+        return tables.FirstOrDefault(t => t.Key == key && t.Hash == value) is { } table
+            && earlierTable(old) is { } was
+            && TableRows.Between(name, key, was, table.Text) is { } rows
+            ? rows : new StaleReason.TableChanged(name);
+    }
+
+    // A section's name is also that of its file; those of the others are known while the case has them.
+    private static string TableName(string key, ImmutableArray<CanonicalTable> tables)
+    {
+        if (key.StartsWith(SectionPrefix, StringComparison.Ordinal))
+            return $"polar {key[SectionPrefix.Length..]}.csv";
+        var kind = key == "control.schedule" ? "schedule" : key;
+        return tables.FirstOrDefault(t => t.Key == key) is { } table ? $"{kind} {Path.GetFileName(table.File)}" : kind;
+    }
 
     // Tables stand in the values as their SHA-256.
     private static bool IsTable(string value) => value.Length == 64 && !value.AsSpan().ContainsAnyExcept(HexDigits);
-
-    private static IEnumerable<StaleReason> OfFiles(IEnumerable<ResultFile> files, string folder)
-    {
-        foreach (var file in files)
-        {
-            var found = new FileInfo(Path.Join(folder, Path.GetFileName(file.Name)));
-            if (!found.Exists)
-                yield return new StaleReason.FileMissing(file.Name);
-            else if (found.Length != file.Size)
-                yield return new StaleReason.FileSizeChanged(file.Name, file.Size, found.Length);
-        }
-    }
 }

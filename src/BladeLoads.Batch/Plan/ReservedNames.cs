@@ -17,6 +17,8 @@ public static class ReservedNames
         {
             Cases = study.Cases.RemoveRange(refused),
             Rejected = [.. study.Rejected, .. refused.Select(c => c.Name)],
+            Blocking = study.Blocking.AddRange(refused.Select(c => KeyValuePair.Create(
+                c.Name, new InputFinding(c.File, 0, 0, ResultsFolder.Objection(c.Name)!)))),
             Errors = [.. study.Errors.Concat(errors).OrderBy(e => e.File, StringComparer.Ordinal).ThenBy(e => e.Line).ThenBy(e => e.Column)],
         };
     }

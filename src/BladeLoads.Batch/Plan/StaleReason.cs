@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.Globalization;
 using BladeLoads.Results.Wording;
 
@@ -28,8 +29,18 @@ public abstract record StaleReason
         public override string Sentence => Printable.Of($"{Key} is gone, was {Shortened(From)}");
     }
 
-    /// <summary>A table holds other numbers.</summary>
-    /// <param name="Table">Which: <c>section tarn-30</c>.</param>
+    /// <summary>A table holds other numbers, and it is known which.</summary>
+    /// <param name="Table">Which: <c>polar tarn-30.csv</c>.</param>
+    /// <param name="Unit">Of the angle, radius or wind speed by which rows are told: deg, m or m/s.</param>
+    public sealed record TableRowsChanged(
+        string Table, string Unit, ImmutableArray<RowChange> Rows, ImmutableArray<ReynoldsChange> Reynolds) : StaleReason
+    {
+        public override string Sentence
+            => Printable.Of($"{Table}: {string.Join(", ", Rows.Select(r => r.Sentence(Unit)).Concat(Reynolds.Select(r => r.Sentence)))}");
+    }
+
+    /// <summary>A table holds other numbers; what it held is not known any more.</summary>
+    /// <param name="Table">Which: <c>polar tarn-30.csv</c>.</param>
     public sealed record TableChanged(string Table) : StaleReason
     {
         public override string Sentence => Printable.Of($"{Table}: table changed");

@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using BladeLoads.Batch.Logs;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Receipts;
@@ -16,11 +17,14 @@ public delegate PowerCurve SolveCase(RotorCase rotorCase, CancellationToken canc
 /// Solves one case and puts its result in its place: tables, log and receipt. What goes wrong with it stays with it. It is done only
 /// when it is settled too, which serves several cases at once.
 /// </summary>
+/// <param name="reuse">Looks for a result that is there already; null to solve whatever is asked for.</param>
 /// <param name="waitForFile">Waits between two tries at a file in use; the argument counts the tries made, from 1.</param>
 public sealed class CaseWork(
     SolveCase solve, Publisher publisher, ResultsFolder results, RunIdentity identity, ILogger runLog, TimeProvider time,
-    Action<int> waitForFile)
+    Action<int> waitForFile, CaseReuse? reuse = null)
 {
+    private readonly ConcurrentDictionary<string, bool> _tablesKept = new(StringComparer.Ordinal);
+
     private const int TriesAtABusyFile = 4;
 
     /// <exception cref="NoRoomForResultsException">Nothing more can be written; the case counts as not run.</exception>
@@ -30,7 +34,7 @@ public sealed class CaseWork(
         try
         {
             stopping.ThrowIfCancellationRequested();
-            var outcome = SolveAndPublish(studyCase, log, stopping);
+            CaseOutcome outcome = Reuse(studyCase, log) as CaseOutcome ?? SolveAndPublish(studyCase, log, stopping);
             publisher.Remove(results.Failure(studyCase.Name));
             return outcome;
         }
@@ -84,6 +88,15 @@ public sealed class CaseWork(
             && ResultCheck.IsWhole(folder, receipt) ? receipt : null;
     }
 
+    private CaseOutcome.Reused? Reuse(StudyCase studyCase, CaseLog log)
+    {
+        if (reuse?.Try(studyCase) is not { } outcome)
+            return null;
+        TableArchive.Keep(studyCase.Tables, results, publisher, _tablesKept);
+        log.Logger.Reused(studyCase, outcome.From);
+        return outcome;
+    }
+
     private CaseOutcome.Solved SolveAndPublish(StudyCase studyCase, CaseLog log, CancellationToken stopping)
     {
         var started = time.GetTimestamp();
@@ -98,6 +111,7 @@ public sealed class CaseWork(
         log.Logger.Solved(studyCase, summary, seconds);
         files.Add(new(CaseLog.FileName, log.ToBytes()));
         files.Add(new(Receipt.FileName, ReceiptFile.Write(ReceiptOf(studyCase, summary, files, seconds))));
+        WithPatience(() => TableArchive.Keep(studyCase.Tables, results, publisher, _tablesKept));
         WithPatience(() => publisher.Place(studyCase.Name, files));
         return new CaseOutcome.Solved(summary, curve.RotorSolves);
     }

@@ -15,5 +15,8 @@ public sealed record RunResult(ImmutableSortedDictionary<string, CaseOutcome> Ou
     /// <summary>How many another run at work on the same study has solved.</summary>
     public int SolvedByAnother => Outcomes.Values.Count(o => o is CaseOutcome.SolvedByAnother);
 
+    /// <summary>Cases that a result was there for already.</summary>
+    public int Reused => Outcomes.Values.Count(o => o is CaseOutcome.Reused);
+
     public int Failed => Outcomes.Values.Count(o => o is CaseOutcome.Failed);
 }

@@ -174,9 +174,11 @@ internal sealed class SharedWork : IDisposable
             case CaseOutcome.Solved solved:
                 placed.Add(new PlacedCase(studyCase, claim, solved));
                 break;
-            case CaseOutcome.Failed failed:
+            case CaseOutcome.NotRun:
+                break;
+            case var settled:
                 claim.Done();
-                Ended(studyCase, failed);
+                Ended(studyCase, settled);
                 break;
         }
     }

@@ -13,7 +13,7 @@ public static class StudySummary
     public static ImmutableArray<SummaryRow> Rows(StudyPlan plan, ImmutableSortedDictionary<string, CaseOutcome> outcomes) =>
     [
         .. plan.Cases.Select(planned => RowOf(planned, outcomes.GetValueOrDefault(planned.Case.Name))),
-        .. plan.Rejected.Select(name => new SummaryRow(name, "", "", "rejected", null)),
+        .. plan.Rejected.Select(name => new SummaryRow(name, "", "", new CaseState.Blocked(null).Word, null)),
     ];
 
     /// <summary>Writes <c>summary.csv</c> where it is not there with these very bytes already.</summary>
@@ -39,9 +39,11 @@ public static class StudySummary
         {
             (CaseOutcome.Solved solved, _) => ("current", solved.Summary),
             (CaseOutcome.SolvedByAnother solved, _) => ("current", solved.Summary),
-            (CaseOutcome.Failed, CaseState.Current current) => ("failed", current.Summary),
+            (CaseOutcome.Reused reused, _) => ("current", reused.Summary),
+            (CaseOutcome.Failed, CaseState.Current current) => ("failed", current.Read()),
             (CaseOutcome.Failed, _) => ("failed", null),
-            (_, CaseState.Current current) => ("current", current.Summary),
+            (_, CaseState.Current current) => ("current", current.Read()),
+            (_, CaseState.Retitled retitled) => ("current", retitled.Summary),
             _ => (planned.State.Word, null),
         };
         return new SummaryRow(planned.Case.Name, planned.Case.Title, planned.Case.Fingerprint, state, summary);

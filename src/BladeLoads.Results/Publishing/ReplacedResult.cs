@@ -10,13 +10,18 @@ namespace BladeLoads.Results.Publishing;
 /// from what, so that no receipt need be opened to look for one.
 /// </summary>
 /// <param name="SolvedAt">To the second, UTC.</param>
-/// <param name="FingerprintStart">The first 12 digits of the fingerprint; <c>no-receipt</c> where nothing says from what it was made.</param>
+/// <param name="FingerprintStart">The first 12 digits of the fingerprint; <c>no-receipt</c> where nothing says from what it was made,
+/// <c>damaged</c> for one that was not what had been written.</param>
 public sealed partial record ReplacedResult(string Case, string Folder, DateTime SolvedAt, string FingerprintStart)
 {
     private const string TimeForm = "yyyyMMdd-HHmmss";
     private const string NoReceipt = "no-receipt";
+    private const string Damaged = "damaged";
     private const int FingerprintDigits = 12;
     private const int MostOfOneName = 10_000;
+
+    /// <summary>Whether it was a whole result when it was replaced, as far as could be told.</summary>
+    public bool IsResult => FingerprintStart is not (NoReceipt or Damaged);
 
     /// <summary>Whether it can be the result of that fingerprint; its receipt has the last word.</summary>
     public bool MayBeOf(string fingerprint) => FingerprintStart == StartOf(fingerprint);
@@ -30,12 +35,13 @@ public sealed partial record ReplacedResult(string Case, string Folder, DateTime
         : [];
 
     /// <summary>Moves the folder of a result there, whole, in one step.</summary>
+    /// <param name="isDamaged">It is not what was written, and must not be taken for a result again.</param>
     /// <exception cref="IOException">The system refused; the folder is where it was.</exception>
     /// <exception cref="UnauthorizedAccessException">As above.</exception>
-    internal static void SetAside(string folder, string caseName, ResultsFolder results, IDisk disk)
+    internal static void SetAside(string folder, string caseName, ResultsFolder results, IDisk disk, bool isDamaged = false)
     {
         disk.CreateFolder(results.ReplacedOf(caseName));
-        var name = NameOf(folder);
+        var name = NameOf(folder, isDamaged);
         for (var n = 1; n <= MostOfOneName; n++)
         {
             var numbered = n == 1 ? name : string.Create(CultureInfo.InvariantCulture, $"{name}-{n}");
@@ -45,10 +51,10 @@ public sealed partial record ReplacedResult(string Case, string Folder, DateTime
         throw new IOException($"too many results named '{name}'");
     }
 
-    private static string NameOf(string folder)
+    private static string NameOf(string folder, bool isDamaged)
     {
         var (time, start) = ReceiptFile.Read(folder) is ReceiptReading.Readable { Receipt: var receipt }
-            ? (receipt.SolvedAt.UtcDateTime, StartOf(receipt.Fingerprint))
+            ? (receipt.SolvedAt.UtcDateTime, isDamaged ? Damaged : StartOf(receipt.Fingerprint))
             : (Directory.GetLastWriteTimeUtc(folder), NoReceipt);
         return string.Create(CultureInfo.InvariantCulture, $"{time.ToString(TimeForm, CultureInfo.InvariantCulture)}~{start}");
     }

@@ -1,3 +1,4 @@
+using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Tables;
 
 namespace BladeLoads.Results.Publishing;
@@ -23,6 +24,16 @@ public sealed record ResultsFolder(string Root, string StudyName)
     /// <summary>Parsed tables that results were made from, once each by their SHA-256.</summary>
     public string Tables => Path.Join(Study, TablesName);
 
+    /// <summary>The file of a parsed table.</summary>
+    /// <param name="hash">64 lower-case hexadecimal digits.</param>
+    public string Table(string hash) => Path.Join(Tables, hash + ".csv");
+
+    /// <summary>What the last plan found, so that the next need not open what has not changed since; its loss costs only time.</summary>
+    public string Index => Path.Join(Study, ".index");
+
+    /// <summary>Whether the folder needs this name itself: no result lies under it.</summary>
+    public static bool IsOwn(string name) => OwnNames.Contains(name);
+
     /// <summary>What reruns replaced: a folder a case, and in it a folder a result.</summary>
     public string Replaced => Path.Join(Study, ReplacedName);
 
@@ -36,7 +47,7 @@ public sealed record ResultsFolder(string Root, string StudyName)
     public string KeptAs(string name) => Path.Join(Kept, name);
 
     /// <summary>What moved in the last run.</summary>
-    public string Changes => Path.Join(Study, ChangesName);
+    public string Changes => Path.Join(Study, ChangesTable.FileName);
 
     /// <summary>A file for each case that is being solved, or whose process was lost while solving it.</summary>
     public string Claims => Path.Join(Study, ClaimsName);
@@ -61,10 +72,9 @@ public sealed record ResultsFolder(string Root, string StudyName)
     private const string TablesName = "tables";
     private const string ReplacedName = "replaced";
     private const string KeptName = "kept";
-    private const string ChangesName = "changes.csv";
 
     private static readonly HashSet<string> OwnNames = new(StringComparer.OrdinalIgnoreCase)
     {
-        LogsName, FailuresName, TablesName, ReplacedName, KeptName, SummaryTable.FileName, "report.html", ChangesName,
+        LogsName, FailuresName, TablesName, ReplacedName, KeptName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
     };
 }

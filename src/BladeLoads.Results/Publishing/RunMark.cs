@@ -39,6 +39,20 @@ internal sealed partial class RunMark : IDisposable
     public static bool IsAnyIn(string folder)
         => Directory.Exists(folder) && Directory.EnumerateFileSystemEntries(folder, ".*").Any(path => OwnedName().IsMatch(Path.GetFileName(path)));
 
+    /// <summary>Whether another run, alive just now, writes into the folder.</summary>
+    public bool IsAnotherAlive()
+    {
+        foreach (var path in Directory.EnumerateFiles(_folder, ".run-*.lock"))
+            if (OwnedName().Match(Path.GetFileName(path)) is { Success: true } name && name.Groups["run"].Value != _run)
+            {
+                using var held = _disk.TryLock(path);
+                if (held is null)
+                    return true;
+                _disk.Delete(path);   // a dead one's, or made by asking, if its run has just ended
+            }
+        return false;
+    }
+
     /// <summary>
     /// Removes what runs left that were killed: their unfinished writes, and their locks. A replaced result whose successor never came
     /// into its place is put back, other whole results go to the replaced ones. What belongs to a living run is left alone.

@@ -21,6 +21,9 @@ public sealed record ResultFile(string Name, long Size, string Sha256)
 /// <param name="Seconds">How long the case took to solve and write, s.</param>
 /// <param name="Files">Every file of the result but this one.</param>
 /// <param name="Summary">The figures of the summary, in SI units, so that none is lost on the way to a table.</param>
+/// <param name="ReusedFrom">
+/// The folder, in the study's results, of the result of another name or title that this one is a copy of; null where it was solved.
+/// </param>
 public sealed record Receipt(
     int Format,
     string Study,
@@ -35,7 +38,8 @@ public sealed record Receipt(
     IReadOnlyList<InputFile> Inputs,
     IReadOnlyList<ResultFile> Files,
     CaseSummary Summary,
-    string Caution)
+    string Caution,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.WhenWritingNull)] string? ReusedFrom = null)
 {
     public const string FileName = "receipt.json";
 

@@ -32,17 +32,29 @@ public static class ReceiptFile
         {
             if (ReadBytes(Path.Join(resultFolder, Receipt.FileName)) is not { } bytes)
                 return new ReceiptReading.Unreadable("the receipt is not there");
-            var receipt = JsonSerializer.Deserialize(bytes, ReceiptJson.Default.Receipt);
-            return receipt switch
+            return Parse(bytes);
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            return new ReceiptReading.Unreadable("the receipt cannot be read");
+        }
+    }
+
+    /// <summary>A receipt from its bytes; never <see cref="ReceiptReading.NoResult"/>.</summary>
+    public static ReceiptReading Parse(ReadOnlySpan<byte> utf8)
+    {
+        try
+        {
+            return JsonSerializer.Deserialize(utf8, ReceiptJson.Default.Receipt) switch
             {
                 null => new ReceiptReading.Unreadable("the receipt is damaged"),
                 { Format: not Receipt.CurrentFormat } => new ReceiptReading.Unreadable("the receipt has another form"),
-                _ => new ReceiptReading.Readable(receipt),
+                var receipt => new ReceiptReading.Readable(receipt),
             };
         }
-        catch (Exception e) when (e is JsonException or IOException or UnauthorizedAccessException)
+        catch (JsonException)
         {
-            return new ReceiptReading.Unreadable(e is JsonException ? "the receipt is damaged" : "the receipt cannot be read");
+            return new ReceiptReading.Unreadable("the receipt is damaged");
         }
     }
 

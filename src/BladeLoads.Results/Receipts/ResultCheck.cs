@@ -47,15 +47,25 @@ public static class ResultCheck
 {
     /// <summary>Whether every file that the receipt names is there with the bytes that were written.</summary>
     public static bool IsWhole(string folder, Receipt receipt)
-        => OfFiles(folder, receipt).All(flaw => flaw is ResultFlaw.Extra);
+        => receipt.Files.All(file => OfFile(folder, file) is null);
 
     /// <summary>Everything that is not as it was written; empty where all is. Reads every byte.</summary>
-    public static ImmutableArray<ResultFlaw> Of(string folder) => ReceiptFile.Read(folder) switch
+    public static ImmutableArray<ResultFlaw> Of(string folder)
     {
-        ReceiptReading.Readable { Receipt: var receipt } => [.. OfFiles(folder, receipt)],
-        ReceiptReading.Unreadable { Why: var why } => [new ResultFlaw.NoReceipt(why)],
-        _ => [new ResultFlaw.NoReceipt("there is no result")],
-    };
+        try
+        {
+            return ReceiptFile.Read(folder) switch
+            {
+                ReceiptReading.Readable { Receipt: var receipt } => [.. OfFiles(folder, receipt)],
+                ReceiptReading.Unreadable { Why: var why } => [new ResultFlaw.NoReceipt(why)],
+                _ => [new ResultFlaw.NoReceipt("there is no result")],
+            };
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            return [new ResultFlaw.NoReceipt($"its folder cannot be read: {Publishing.DiskTrouble.ReadingReason(e)}")];
+        }
+    }
 
     /// <summary>What is not as it was written of one file; null where it is.</summary>
     public static ResultFlaw? OfFile(string folder, ResultFile file)

@@ -20,16 +20,11 @@ internal static class Residual
     /// <param name="inflowAngle">rad, -pi to pi, not 0.</param>
     public static Probe At(double inflowAngle, in Annulus annulus)
     {
-        var (sin, cos) = Math.SinCos(inflowAngle);
-        var (cl, cd) = annulus.CoefficientsAt(annulus.AngleOfAttack(inflowAngle));
-        var F = annulus.LossAt(Math.Abs(sin));
-        var cn = (cl * cos) + (annulus.DragInBalance * cd * sin);
-        var k = annulus.Solidity * cn / (4 * F * sin * sin);
-        var swirl = annulus.Solidity * cl / (4 * F);
+        var t = Terms.At(inflowAngle, annulus);
         var residual = inflowAngle > 0
-            ? (sin * HighThrust.InverseSpeedRatio(k, F, annulus.HeavyLoading)) - (annulus.SpeedRatio * (cos - swirl))
-            : (sin * (1 - k)) - (annulus.SpeedRatio * (cos + swirl));
-        return new Probe(inflowAngle, sin, cos, F, residual);
+            ? (t.Sine * HighThrust.InverseSpeedRatio(t.K, t.F, annulus.HeavyLoading)) - (annulus.SpeedRatio * (t.Cosine - t.Swirl))
+            : (t.Sine * (1 - t.K)) - (annulus.SpeedRatio * (t.Cosine + t.Swirl));
+        return new Probe(inflowAngle, t.Sine, t.Cosine, t.F, residual);
     }
 
     /// <summary>
@@ -38,16 +33,27 @@ internal static class Residual
     /// </summary>
     public static Induction InductionAt(double inflowAngle, in Annulus annulus)
     {
-        var (sin, cos) = Math.SinCos(inflowAngle);
-        var (cl, cd) = annulus.CoefficientsAt(annulus.AngleOfAttack(inflowAngle));
-        var F = annulus.LossAt(Math.Abs(sin));
-        var cn = (cl * cos) + (annulus.DragInBalance * cd * sin);
-        var k = annulus.Solidity * cn / (4 * F * sin * sin);
-        var swirl = annulus.Solidity * cl / (4 * F) * (inflowAngle > 0 ? 1 : -1);
-        var throughDisc = inflowAngle > 0 ? 1 / HighThrust.InverseSpeedRatio(k, F, annulus.HeavyLoading) : 1 / (1 - k);
-        var isFlow = throughDisc / sin > 0 && cos - swirl >= 0 && (inflowAngle > 0 || k > 1);
+        var t = Terms.At(inflowAngle, annulus);
+        var swirl = inflowAngle > 0 ? t.Swirl : -t.Swirl;
+        var throughDisc = inflowAngle > 0 ? 1 / HighThrust.InverseSpeedRatio(t.K, t.F, annulus.HeavyLoading) : 1 / (1 - t.K);
+        var isFlow = throughDisc / t.Sine > 0 && t.Cosine - swirl >= 0 && (inflowAngle > 0 || t.K > 1);
         // a' = k'/(1 - k') with k' = swirl / cos phi, written so that it stands at cos phi = 0.
-        return new Induction(1 - throughDisc, swirl / (cos - swirl), F, new Coefficients(cl, cd), sin, cos, isFlow);
+        return new Induction(1 - throughDisc, swirl / (t.Cosine - swirl), t.F, t.Coefficients, t.Sine, t.Cosine, isFlow);
+    }
+
+    /// <param name="K">k: solidity x normal force coefficient / (4 F sin2 phi).</param>
+    /// <param name="Swirl">k' cos phi: solidity x lift coefficient / (4 F).</param>
+    private readonly record struct Terms(double Sine, double Cosine, Coefficients Coefficients, double F, double K, double Swirl)
+    {
+        public static Terms At(double inflowAngle, in Annulus annulus)
+        {
+            var (sin, cos) = Math.SinCos(inflowAngle);
+            var coefficients = annulus.CoefficientsAt(annulus.AngleOfAttack(inflowAngle));
+            var F = annulus.LossAt(Math.Abs(sin));
+            var cn = (coefficients.Lift * cos) + (annulus.DragInBalance * coefficients.Drag * sin);
+            var k = annulus.Solidity * cn / (4 * F * sin * sin);
+            return new Terms(sin, cos, coefficients, F, k, annulus.Solidity * coefficients.Lift / (4 * F));
+        }
     }
 }
 

@@ -13,7 +13,10 @@ internal sealed record Bounds(double Low, bool LowIncluded, double High)
 
     public static Bounds Share { get; } = new(0, true, 1);
 
-    public static Bounds AboveZeroToOne { get; } = new(0, false, 1);
+    public static Bounds AboveZeroToOne { get; } = AboveZeroTo(1);
+
+    /// <summary>Above 0, the limit included.</summary>
+    public static Bounds AboveZeroTo(double limit) => new(0, false, limit);
 
     /// <summary>From minus to plus, both included.</summary>
     public static Bounds Within(double limit) => new(-limit, true, limit);

@@ -18,19 +18,26 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
     /// <summary>Null when an error keeps the case from running; every error is reported.</summary>
     /// <param name="entries">The case's values, those of a variant in their place.</param>
     /// <param name="inputs">The case file and the starting values.</param>
+    /// <param name="used">The files that the case was read from as far as it came, its own first.</param>
     public StudyCase? Build(
         string name, string variantTitle, CaseFile file, ImmutableDictionary<string, CaseEntry> entries,
-        ImmutableArray<InputFile> inputs)
+        ImmutableArray<InputFile> inputs, out IReadOnlyList<string> used)
     {
         var values = new CaseValues(file, entries, findings);
+        used = values.Used;
         var title = ReadTitle(values, name);
         var (blade, sections) = ReadBlade(values);
         var bladeCount = values.WholeNumber("rotor.blade_count", null, 1, MostBlades);
         var coneDeg = values.Number("rotor.cone_deg", CaseDefaults.ConeDeg, Bounds.Within(80));
-        var density = values.Number("air.density_kg_m3", CaseDefaults.Density, Bounds.AboveZero);
-        var viscosity = values.Number("air.dynamic_viscosity_Pa_s", CaseDefaults.DynamicViscosity, Bounds.AboveZero);
+        var density = values.Number("air.density_kg_m3", CaseDefaults.Density, Bounds.AboveZeroTo(Limits.Density));
+        UsualRanges.Check(values, "air.density_kg_m3", density);
+        var viscosity = values.Number(
+            "air.dynamic_viscosity_Pa_s", CaseDefaults.DynamicViscosity, Bounds.AboveZeroTo(Limits.DynamicViscosity));
+        UsualRanges.Check(values, "air.dynamic_viscosity_Pa_s", viscosity);
         var windSpeeds = ReadWindSpeeds(values);
         var control = ControlReader.Read(values, windSpeeds, folder, tables);
+        if (control.Strategy is { } strategy && blade?.Blade is { } shape)
+            UsualRanges.CheckTipSpeed(values, strategy, shape, double.DegreesToRadians(coneDeg));
         var model = ModelReader.Read(values);
         var spanwise = SpanwiseReader.Read(values, windSpeeds);
         CheckTheRest(values);
@@ -43,10 +50,17 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             windSpeeds, control.Strategy, control.CutIn, control.CutOut, control.DrivetrainEfficiency, model);
         var determining = values.Determining;
         inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
+        ImmutableArray<CanonicalTable> canonical = [blade.Canonical, .. sections.Tables.Select(table => table.Canonical)];
         if (control.Schedule is { } schedule)
-            inputs = inputs.Add(schedule);
+        {
+            inputs = inputs.Add(schedule.Input);
+            canonical = canonical.Add(schedule.Canonical);
+        }
         return new StudyCase(
-            name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), inputs, determining);
+            name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), inputs, determining)
+        {
+            Tables = canonical,
+        };
     }
 
     private static string ReadTitle(CaseValues values, string name)
@@ -63,16 +77,21 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         var set = Reference(values, "polars", EntryKind.Folder);
         if (blade is null || set is null)
         {
+            // Which tables the blade would name is not known; what is wrong in any of them is told with the rest.
+            if (set is not null)
+                tables.ReadAll(set);
             values.Spoil();
             return (blade, null);
         }
+        foreach (var (section, _) in blade.Sections)
+            values.Uses(folder.RelativePath(Path.Combine(set, section + ".csv")));
         var sections = tables.Sections(blade, set);
         if (blade.Blade is null || sections.Sections is null)
             values.Spoil();
-        values.Note("blade", blade.Hash);
+        values.Note("blade", blade.Canonical.Hash);
         foreach (var table in sections.Tables)
             if (table.Section is { } section)
-                values.Note($"section.{section.Name}", table.Hash);
+                values.Note($"section.{section.Name}", table.Canonical.Hash);
         return (blade, sections);
     }
 
@@ -85,7 +104,10 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         // Relative to the file that makes it: the case's own, or study.toml.
         var at = values.Find(path)!.Value.At;
         if (folder.Locate(at.File, reference, wanted, out var problem) is { } fullPath)
+        {
+            values.Uses(folder.RelativePath(fullPath));
             return fullPath;
+        }
         values.Refuse(at, problem);
         return null;
     }
@@ -100,7 +122,7 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         }
         if (!_windSpeeds.TryGetValue(entry.Value, out var known))
         {
-            var speeds = WindSpeeds.Read(entry.Value, findings.Error);
+            var speeds = WindSpeeds.Read(entry.Value, findings);
             known = (speeds, CanonicalText.Of(speeds));
             _windSpeeds.Add(entry.Value, known);
         }

@@ -75,7 +75,7 @@ internal sealed record CaseFile(
                 else
                 {
                     _doubtful.Add("");
-                    Refuse(entry.Key, UnknownKey.InTable(entry.Name, ""));
+                    Refuse(entry.Key, UnknownKey.InTable(entry.Name, "", file));
                 }
             if (baseline is not null && file != StudyReader.StartingValuesFile)
                 Refuse(baseline.Key, $"baseline is a matter of the whole study; write it in {StudyReader.StartingValuesFile}");
@@ -103,7 +103,7 @@ internal sealed record CaseFile(
                     else
                     {
                         _doubtful.Add(table);
-                        Refuse(entry.Key, UnknownKey.InTable(entry.Name, table));
+                        Refuse(entry.Key, UnknownKey.InTable(entry.Name, table, file));
                     }
         }
 

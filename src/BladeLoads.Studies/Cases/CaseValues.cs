@@ -17,6 +17,7 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         = ImmutableSortedDictionary.CreateBuilder<string, string>(StringComparer.Ordinal);
 
     private readonly HashSet<string> _saidNotYet = new(StringComparer.Ordinal);
+    private readonly List<string> _used = [file.File];
 
     /// <summary>Nothing was wrong so far.</summary>
     public bool IsSound { get; private set; } = true;
@@ -141,6 +142,13 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         return double.NaN;
     }
 
+    /// <summary>Raises a doubt at the value of a key; the text goes on after the key's name.</summary>
+    public void Doubt(string path, string found)
+    {
+        var entry = Find(path)!;
+        findings.Doubt(entry.Value.At, $"{entry.Known.Name} {found}");
+    }
+
     /// <summary>Reports at a key.</summary>
     public void RefuseKey(string path, string text) => Refuse(Find(path)!.Key, text);
 
@@ -149,6 +157,11 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         IsSound = false;
         findings.Error(at, text);
     }
+
+    /// <summary>The files whose errors are errors of this case, its own first; relative to the study folder.</summary>
+    public IReadOnlyList<string> Used => _used;
+
+    public void Uses(string usedFile) => _used.Add(usedFile);
 
     /// <summary>Something was wrong that is reported already.</summary>
     public void Spoil() => IsSound = false;
@@ -169,9 +182,8 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         var trimmed = text.Trim();
         if (NumberText.TryParse(Encoding.UTF8.GetBytes(trimmed), out _))
             return $"is {quoted.Found} in quotes, which is text; write the number without quotes: {trimmed}";
-        var withPoint = trimmed.Replace(',', '.');
-        return trimmed.Count(c => c == ',') == 1 && NumberText.TryParse(Encoding.UTF8.GetBytes(withPoint), out _)
-            ? $"is {quoted.Found}; write decimals with a point and no quotes: {withPoint}"
+        return NumberText.Misprint(trimmed) is { } misprint
+            ? $"is {quoted.Found}{misprint}, without quotes"
             : $"is {quoted.Found}; give a number, such as {entry.Known.Example}";
     }
 

@@ -10,7 +10,7 @@ namespace BladeLoads.Studies.Cases;
 /// <summary>What [control] says: the strategy, the wind speeds of operation, the drivetrain.</summary>
 /// <param name="Strategy">Null when an error keeps it from being known.</param>
 internal sealed record ControlValues(
-    Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, InputFile? Schedule);
+    Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, ScheduleTable? Schedule);
 
 /// <summary>Reads [control].</summary>
 internal static class ControlReader
@@ -31,11 +31,15 @@ internal static class ControlReader
     /// <param name="windSpeeds">m/s; empty when they are not known.</param>
     public static ControlValues Read(CaseValues values, ImmutableArray<double> windSpeeds, StudyFolder folder, StudyTables tables)
     {
-        var cutIn = values.Number("control.cut_in_wind_speed_m_s", CaseDefaults.CutInWindSpeed, Bounds.ZeroOrMore);
-        var cutOut = values.Number("control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Bounds.AboveZero);
+        var cutIn = values.Number(
+            "control.cut_in_wind_speed_m_s", CaseDefaults.CutInWindSpeed, Bounds.FromTo(0, Limits.WindSpeed));
+        var cutOut = values.Number(
+            "control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Bounds.AboveZeroTo(Limits.WindSpeed));
         RefuseExchanged(values, "control.cut_in_wind_speed_m_s", cutIn, "control.cut_out_wind_speed_m_s", cutOut);
         var efficiency = values.Number("control.drivetrain_efficiency", CaseDefaults.DrivetrainEfficiency, Bounds.AboveZeroToOne);
-        var ratedPower = values.OptionalNumber("control.rated_power_kW", Bounds.AboveZero) * 1e3;
+        var ratedPowerKiloWatt = values.OptionalNumber("control.rated_power_kW", Bounds.AboveZeroTo(Limits.RatedPowerKiloWatt));
+        UsualRanges.Check(values, "control.rated_power_kW", ratedPowerKiloWatt ?? double.NaN);
+        var ratedPower = ratedPowerKiloWatt * 1e3;
 
         if (!values.Has("control.strategy"))
             values.Missing("control.strategy", null);
@@ -56,8 +60,10 @@ internal static class ControlReader
     {
         var tipSpeedRatio = values.RequiredNumber("control.tip_speed_ratio", Bounds.AboveZero, NotYet.TipSpeedRatioLeftOut);
         var finePitch = values.RequiredNumber("control.fine_pitch_deg", Bounds.Within(90), NotYet.FinePitchLeftOut);
-        var slowest = values.Number("control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Bounds.ZeroOrMore);
-        var fastest = values.Number("control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Bounds.AboveZero);
+        var slowest = values.Number(
+            "control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Bounds.FromTo(0, Limits.RotorSpeedRpm));
+        var fastest = values.Number(
+            "control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Bounds.AboveZeroTo(Limits.RotorSpeedRpm));
         RefuseExchanged(values, "control.min_rotor_speed_rpm", slowest, "control.max_rotor_speed_rpm", fastest);
         values.CheckedChoice("control.speed_limited_pitch", "hold", "best");
         var aboveRated = values.Choice("control.above_rated", CaseDefaults.AboveRated(values.Has("control.rated_power_kW")),
@@ -72,7 +78,7 @@ internal static class ControlReader
 
     private static Control.FixedSpeed ReadFixedSpeed(CaseValues values, double? ratedPower)
     {
-        var rotorSpeed = values.RequiredNumber("control.rotor_speed_rpm", Bounds.ZeroOrMore);
+        var rotorSpeed = values.RequiredNumber("control.rotor_speed_rpm", Bounds.FromTo(0, Limits.RotorSpeedRpm));
         var pitch = values.RequiredNumber("control.pitch_deg", Bounds.Within(180));
         return new Control.FixedSpeed(RadiansPerSecond(rotorSpeed), double.DegreesToRadians(pitch), ratedPower);
     }
@@ -92,19 +98,20 @@ internal static class ControlReader
             values.Refuse(at, problem);
             return rest;
         }
+        values.Uses(folder.RelativePath(fullPath));
         if (tables.Schedule(fullPath) is not { Points.IsEmpty: false } schedule)
         {
             values.Spoil();
             return rest;
         }
-        values.Note(path, schedule.Hash);
+        values.Note(path, schedule.Canonical.Hash);
         var (lowest, highest) = (schedule.Points[0].WindSpeed, schedule.Points[^1].WindSpeed);
         var operating = windSpeeds.Where(v => v >= rest.CutIn && v <= rest.CutOut);
         if (operating.Where(v => v < lowest || v > highest).ToList() is [var bare, ..])
             values.RefuseValue(path, $"{VisibleText.Quote(reference)} runs from {CanonicalText.Of(lowest)} to "
                 + $"{CanonicalText.Of(highest)} m/s and does not cover {CanonicalText.Of(bare)} m/s; "
                 + "add rows, or set cut-in and cut-out within it");
-        return rest with { Strategy = new Control.Schedule(schedule.Points, ratedPower), Schedule = schedule.Input };
+        return rest with { Strategy = new Control.Schedule(schedule.Points, ratedPower), Schedule = schedule };
     }
 
     private static void RefuseKeysOfOthers(CaseValues values, string strategy)

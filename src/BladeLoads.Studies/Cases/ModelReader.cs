@@ -11,6 +11,7 @@ internal static class ModelReader
     public static BalanceModel Read(CaseValues values)
     {
         var elements = values.WholeNumber("model.elements", CaseDefaults.Elements, 1, MostElements);
+        UsualRanges.Check(values, "model.elements", elements);
         var spacing = values.Choice("model.spacing", CaseDefaults.Spacing, "cosine", "uniform");
         var losses = ReadLosses(values);
         var heavyLoading = values.Choice("model.heavy_loading", CaseDefaults.HeavyLoading, "glauert-1935", "buhl-2005");

@@ -6,17 +6,21 @@ namespace BladeLoads.Studies.Cases;
 internal static class UnknownKey
 {
     /// <param name="table">The table it stands in; empty at the top of the file.</param>
-    public static string InTable(string name, string table)
+    /// <param name="file">study.toml knows one key more.</param>
+    public static string InTable(string name, string table, string file)
     {
+        var known = KnownKeys.NamesIn(table);
+        if (table.Length == 0 && file == StudyReader.StartingValuesFile)
+            known = known.Append(KnownKeys.Baseline);
         var found = $"unknown key {VisibleText.Quote(name)} {(table.Length == 0 ? "at the top of the file" : $"in [{table}]")}";
         var elsewhere = KnownKeys.All.FirstOrDefault(key => key.Name == name && key.Table != table);
         if (elsewhere is not null)
             return $"{found}; it belongs {(elsewhere.Table.Length == 0 ? "at the top of the file" : $"in [{elsewhere.Table}]")}";
-        if (Nearest.Of(name, KnownKeys.NamesIn(table)) is { } near)
+        if (Nearest.Of(name, known) is { } near)
             return $"{found}; did you mean '{near}'?";
         return table.Length == 0 && Nearest.Of(name, KnownKeys.Tables) is { } nearTable
             ? $"{found}; did you mean the table [{nearTable}]?"
-            : $"{found}; known are {string.Join(", ", KnownKeys.NamesIn(table))}";
+            : $"{found}; known are {string.Join(", ", known)}";
     }
 
     public static string Table(string name) => Nearest.Of(name, KnownKeys.Tables) is { } near

@@ -11,6 +11,9 @@ internal static class Fingerprint
     public static string Of(IEnumerable<KeyValuePair<string, string>> values)
         => OfLines(values.Select(value => $"{value.Key} = {value.Value}"));
 
+    /// <summary>A table by its rows, which are asked for again whenever its text is.</summary>
+    public static CanonicalTable OfTable(string key, string file, Func<IEnumerable<string>> lines) => new(key, OfLines(lines()), file, lines);
+
     public static string OfLines(IEnumerable<string> lines)
     {
         using var hash = IncrementalHash.CreateHash(HashAlgorithmName.SHA256);

@@ -9,8 +9,9 @@ namespace BladeLoads.Studies.Tables;
 /// <summary>A blade table as read.</summary>
 /// <param name="Blade">Null when an error keeps the table from being used.</param>
 /// <param name="Sections">Every section named, with the place of its first row; those of a table with errors too.</param>
-/// <param name="Hash">Over the parsed values.</param>
-internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Place At)> Sections, string Hash, InputFile Input)
+/// <param name="Canonical">The parsed values.</param>
+internal sealed record BladeTable(
+    Blade? Blade, ImmutableArray<(string Name, Place At)> Sections, CanonicalTable Canonical, InputFile Input)
 {
     private static readonly ImmutableArray<Column> Columns =
     [
@@ -25,7 +26,15 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
         var lines = new List<string>();
         var sections = new List<(string Name, Place At)>();
         var known = new HashSet<string>(StringComparer.Ordinal);
-        if (rows.ReadHeader(Columns) && HasSections(rows, input.File))
+        var cells = new List<(Place Chord, Place Twist)>();
+        if (!rows.ReadHeader(Columns))
+        {
+            // The names alone are still good for finding what is wrong in the polar tables.
+            while (rows.Has("section") && rows.Read())
+                if (rows.Text("section") is var name && SafeName.Problem(name) is null && known.Add(name))
+                    sections.Add((name, rows.Cell("section")));
+        }
+        else if (HasSections(rows, input.File))
         {
             if (rows.Has("mass_kg_per_m"))
                 findings.Doubt(new InputFinding(input.File, rows.Line, rows.Cell("mass_kg_per_m").Column,
@@ -37,6 +46,9 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
                 if (radius <= previous.Radius)
                     rows.Error("radius_m",
                         Rising.Problem("radius_m", previous, radius, rows.Line, "radii must rise from root to tip"));
+                if (radius > Limits.Radius)
+                    rows.Error("radius_m", $"radius_m is {CanonicalText.Of(radius)}; "
+                        + $"it must be at most {CanonicalText.Of(Limits.Radius)}, in metres");
                 var chord = Positive(rows, "chord_m");
                 var twist = rows.Number("twist_deg");
                 if (Math.Abs(twist) > 180)
@@ -48,6 +60,7 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
                 if (section is not null && known.Add(section))
                     sections.Add((section, rows.Cell("section")));
                 stations.Add(new BladeStation(radius, chord, double.DegreesToRadians(twist), section ?? ""));
+                cells.Add((rows.Cell("chord_m"), rows.Cell("twist_deg")));
                 lines.Add($"{CanonicalText.Of([radius, chord, twist])},{section}");
             }
             if (!rows.HasErrors && stations.Count < 2)
@@ -55,8 +68,10 @@ internal sealed record BladeTable(Blade? Blade, ImmutableArray<(string Name, Pla
                     $"has {(stations.Count == 0 ? "no row" : "one row")}; a blade needs two or more, root first");
         }
         var blade = rows.HasErrors ? null : Blade.FromStations(stations);
+        if (blade is not null)
+            UnlikelyBlade.Doubt(blade, cells, findings);
         return new BladeTable(
-            blade, [.. sections], Fingerprint.OfLines(lines),
+            blade, [.. sections], Fingerprint.OfTable("blade", input.File, () => lines),
             new InputFile(input.File, input.Sha256, Contents(blade, sections.Count)));
     }
 

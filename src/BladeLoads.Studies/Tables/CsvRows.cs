@@ -12,21 +12,18 @@ internal readonly record struct Column(string Name, bool IsRequired);
 /// <summary>The rows of a CSV table, read forward once. Columns in any order; lines that begin with # are comments.</summary>
 internal sealed class CsvRows : IDisposable
 {
-    // A table with so many errors is no table of this kind; what follows would only repeat them.
-    private const int MostErrors = 500;
-
     private readonly InputText _input;
-    private readonly Findings _findings;
+    private readonly TableErrors _errors;
     private readonly CsvReader _reader;
     private ImmutableArray<string> _header = [];
     private Dictionary<string, int> _places = [];
-    private int _errors;
+    private bool _headerIsSound;
 
     /// <param name="findings">Receives what is wrong, at its cell.</param>
     public CsvRows(InputText input, Findings findings)
     {
         _input = input;
-        _findings = findings;
+        _errors = new TableErrors(findings);
         _reader = CsvReader.Create(input.Utf8, new CsvReaderOptions
         {
             Separator = ',',
@@ -38,7 +35,7 @@ internal sealed class CsvRows : IDisposable
         });
     }
 
-    public bool HasErrors => _errors > 0;
+    public bool HasErrors => _errors.Any;
 
     /// <summary>Number of the current line in the file.</summary>
     public int Line => (int)_reader.LineNumber;
@@ -55,6 +52,11 @@ internal sealed class CsvRows : IDisposable
             return false;
         }
         _header = [.. Enumerable.Range(0, _reader.FieldCount).Select(_reader.GetString)];
+        if (_header is [var spaced] && SeparatedBySpaces(spaced, columns))
+        {
+            Error(Field(0), "columns are separated by spaces; separate them by ','");
+            return false;
+        }
         if (_header is [var only] && only.AsSpan().IndexOfAny(';', '\t') is >= 0 and var at)
         {
             Error(Field(0), $"columns are separated by {(only[at] == ';' ? "';'" : "tabs")}; separate them by ','");
@@ -71,19 +73,24 @@ internal sealed class CsvRows : IDisposable
         if (!HasErrors)
             foreach (var missing in columns.Where(c => c.IsRequired && !_places.ContainsKey(c.Name)))
                 Error(new Place(_input.File, Line, 1), $"no column '{missing.Name}'; the table has {string.Join(", ", _header)}");
-        return !HasErrors;
+        _headerIsSound = !HasErrors;
+        return _headerIsSound;
     }
 
-    /// <summary>Goes to the next row with one value a column; rows with more or fewer are reported and passed over.</summary>
+    /// <summary>
+    /// Goes to the next row with one value a column; rows with more or fewer are passed over, and reported where the header is
+    /// sound.
+    /// </summary>
     public bool Read()
     {
-        while (_errors < MostErrors && ReadRow())
+        while (!_errors.AreTooMany && ReadRow())
         {
             if (_reader.FieldCount == _header.Length)
                 return true;
-            Error(new Place(_input.File, Line, 1),
-                $"{Count(_reader.FieldCount, "value")} where the header names {Count(_header.Length, "column")}; "
-                + "give one value a column, and write decimals with a point");
+            if (_headerIsSound)
+                Error(new Place(_input.File, Line, 1),
+                    $"{Count(_reader.FieldCount, "value")} where the header names {Count(_header.Length, "column")}; "
+                    + "give one value a column, and write decimals with a point");
         }
         return false;
     }
@@ -102,15 +109,19 @@ internal sealed class CsvRows : IDisposable
     /// <summary>The place of a cell of the current row, by the column of its first character.</summary>
     public Place Cell(string column) => Field(_places[column]);
 
-    public void Error(string column, string text) => Error(Cell(column), text);
+    public void Error(string column, string text) => _errors.Add(column, Cell(column), text);
 
-    public void Error(Place at, string text)
+    public void Error(Place at, string text) => _errors.Add("", at, text);
+
+    /// <summary>What to ask of a column if many of its values are wrong in one way.</summary>
+    public void Ask(string column, string question) => _errors.Ask(column, question);
+
+    /// <summary>Ends the reading: errors that were held back as more of a kind are told by their number.</summary>
+    public void Dispose()
     {
-        _errors++;
-        _findings.Error(at, text);
+        _errors.TellTheRest();
+        _reader.Dispose();
     }
-
-    public void Dispose() => _reader.Dispose();
 
     private bool ReadRow()
     {
@@ -123,6 +134,10 @@ internal sealed class CsvRows : IDisposable
         }
         return false;
     }
+
+    private static bool SeparatedBySpaces(string header, ImmutableArray<Column> columns)
+        => header.Split(' ', StringSplitOptions.RemoveEmptyEntries) is { Length: > 1 } names
+            && names.All(name => columns.Any(column => column.Name == name));
 
     private Place Field(int field)
     {

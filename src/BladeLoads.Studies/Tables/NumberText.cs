@@ -1,5 +1,6 @@
 using System.Buffers;
 using System.Globalization;
+using System.Text;
 using System.Text.RegularExpressions;
 using BladeLoads.Studies.Files;
 
@@ -28,21 +29,61 @@ internal static partial class NumberText
         if (text.Length == 0)
             return $"{name} is empty; give a number";
         var quoted = VisibleText.Quote(text);
-        if (AmbiguousComma().IsMatch(text))
-            return $"{name} is {quoted}; write decimals with a point, thousands without a separator: "
-                + $"{text.Replace(',', '.')} or {text.Replace(",", "", StringComparison.Ordinal)}";
-        if (DecimalComma().IsMatch(text))
-            return $"{name} is {quoted}; write decimals with a point: {text.Replace(',', '.')}";
-        if (Thousands().IsMatch(text))
-            return $"{name} is {quoted}; write it without separators: {text.Replace(",", "", StringComparison.Ordinal)}";
+        if (Misprint(text) is { } misprint)
+            return $"{name} is {quoted}{misprint}";
         if (char.IsDigit(text[^1])
             && double.TryParse(text, Plain, CultureInfo.InvariantCulture, out var value) && double.IsInfinity(value))
             return $"{name} is {quoted}, beyond all numbers that can be kept; give a smaller one";
         return $"{name} is {quoted}; {(NotFinite().IsMatch(text) ? "give a finite number" : "give a number, such as 0.8")}";
     }
 
+    /// <summary>
+    /// What to say after <c>name is 'text'</c> of a number that is written in another way than ours; null for any other text.
+    /// </summary>
+    public static string? Misprint(string text)
+    {
+        if (ForeignSigns(text) is { } signs)
+            return signs;
+        if (WholeThousands().IsMatch(text) || Thousands().IsMatch(text) && !AmbiguousComma().IsMatch(text))
+            return $"; write it without separators: {WithoutCommas(text)}";
+        if (AmbiguousComma().IsMatch(text))
+            return $"; write {WithoutCommas(text)} or {text.Replace(',', '.')}, whichever is meant";
+        return DecimalComma().IsMatch(text) ? $"; write decimals with a point: {WithPoint(text)}" : null;
+    }
+
+    private static string? ForeignSigns(string text)
+    {
+        var plain = text;
+        var found = new List<string>();
+        foreach (var (sign, name, instead) in Signs)
+            if (plain.Contains(sign, StringComparison.Ordinal))
+            {
+                plain = plain.Replace(sign.ToString(), instead, StringComparison.Ordinal).Trim();
+                found.Add(string.Create(CultureInfo.InvariantCulture, $"{name} (U+{(int)sign:X4})"));
+            }
+        return found.Count > 0 && TryParse(Encoding.UTF8.GetBytes(plain), out _)
+            ? $", with {string.Join(" and ", found)}; write {plain}"
+            : null;
+    }
+
+    // A digit before the point: case files ask for one.
+    private static string WithPoint(string text)
+        => text.Replace(",", text.TrimStart('+', '-')[0] == ',' ? "0." : ".", StringComparison.Ordinal);
+
+    private static string WithoutCommas(string text) => text.Replace(",", "", StringComparison.Ordinal);
+
+    private static readonly (char Sign, string Name, string Instead)[] Signs =
+    [
+        ('\u2212', "a minus sign", "-"), ('\u2010', "a hyphen", "-"), ('\u2011', "a hyphen", "-"), ('\u2013', "a dash", "-"),
+        ('\u2014', "a dash", "-"), ('\u00B0', "a degree sign", ""), ('\u00BA', "an ordinal sign", ""),
+    ];
+
     private const NumberStyles Plain
         = NumberStyles.AllowLeadingSign | NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
+
+    // Nobody writes three decimals that are all zero.
+    [GeneratedRegex(@"^[+-]?[1-9]\d{0,2},000$")]
+    private static partial Regex WholeThousands();
 
     [GeneratedRegex(@"^[+-]?[1-9]\d{0,2},\d{3}$")]
     private static partial Regex AmbiguousComma();
@@ -50,7 +91,7 @@ internal static partial class NumberText
     [GeneratedRegex(@"^[+-]?\d*,\d+([eE][+-]?\d+)?$")]
     private static partial Regex DecimalComma();
 
-    [GeneratedRegex(@"^[+-]?\d{1,3}(,\d{3})+(\.\d*)?$")]
+    [GeneratedRegex(@"^[+-]?[1-9]\d{0,2}(,\d{3})+(\.\d*)?$")]
     private static partial Regex Thousands();
 
     [GeneratedRegex(@"^[+-]?(nan|inf(inity)?|∞)$", RegexOptions.IgnoreCase)]

@@ -8,14 +8,17 @@ namespace BladeLoads.Studies.Tables;
 
 /// <summary>A section's polar table as read, prepared once for all cases that use it.</summary>
 /// <param name="Section">Null when an error keeps the table from being used.</param>
-/// <param name="Hash">Over the parsed values; moment coefficients, which nothing uses, are not in it.</param>
-internal sealed record PolarTable(Section? Section, string Hash, InputFile Input)
+/// <param name="Canonical">The parsed values; moment coefficients, which nothing uses, are not in it.</param>
+internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, InputFile Input)
 {
     private const int FewestRows = 3;
     private const double AngleSlack = 1e-9;       // deg
     private const double LargestRadian = 3.2;     // a little more than pi: angles that all lie within are hardly degrees
     private const double LowestReynolds = 1e4;
     private const double LiftClosure = 0.05;
+
+    /// <summary>What is doubtful about the table; to be raised once a blade names its section.</summary>
+    public ImmutableArray<InputFinding> Doubts { get; init; } = [];
 
     private static readonly ImmutableArray<Column> Columns =
         [new("reynolds", false), new("alpha_deg", true), new("cl", true), new("cd", true), new("cm", false)];
@@ -28,11 +31,17 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         {
             while (rows.Read())
                 ReadRow(rows, blocks);
-            CheckWhole(rows, blocks, findings, input.File);
+            CheckWhole(rows, blocks, input.File);
+            if (ExchangedColumns.AreLikely(blocks.SelectMany(block => block.Coefficients())))
+                rows.Ask("cd", "are cl and cd exchanged?");
         }
         var section = rows.HasErrors ? null : Section.FromPolars(sectionName, blocks.Select(block => block.ToPolar()));
-        return new PolarTable(section, Fingerprint.OfLines(blocks.SelectMany(block => block.Lines())),
-            new InputFile(input.File, input.Sha256, section is null ? "polar table with errors" : Contents(blocks)));
+        return new PolarTable(
+            section, Fingerprint.OfTable($"section.{sectionName}", input.File, () => blocks.SelectMany(block => block.Lines())),
+            new InputFile(input.File, input.Sha256, section is null ? "polar table with errors" : Contents(blocks)))
+        {
+            Doubts = section is null ? [] : [.. DoubtsOf(blocks)],
+        };
     }
 
     private static void ReadRow(CsvRows rows, List<Block> blocks)
@@ -87,7 +96,7 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
                 (blocks[^1].Reynolds, blocks[^1].LastLine), reynolds, rows.Line, "Reynolds numbers must rise"));
     }
 
-    private static void CheckWhole(CsvRows rows, List<Block> blocks, Findings findings, string file)
+    private static void CheckWhole(CsvRows rows, List<Block> blocks, string file)
     {
         if (blocks.Count == 0 && !rows.HasErrors)
             rows.Error(new Place(file, 0, 0), "has no row; a polar needs three or more");
@@ -102,11 +111,20 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         if (lowest >= -LargestRadian && highest <= LargestRadian)
             rows.Error(blocks[0].At, $"alpha_deg runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} only; "
                 + "these look like radians, angles are in degrees");
+    }
+
+    private static IEnumerable<InputFinding> DoubtsOf(List<Block> blocks)
+    {
         foreach (var block in blocks)
             if (block.LiftAtEnd is [var (low, _), var (high, at)] && Math.Abs(high - low) > LiftClosure)
-                findings.Doubt(new InputFinding(at.File, at.Line, at.Column,
+                yield return new InputFinding(at.File, at.Line, at.Column,
                     $"cl is {CanonicalText.Of(high)} at 180 deg and {CanonicalText.Of(low)} at -180 deg; "
-                    + "these are one angle and should have one lift"));
+                    + "these are one angle and should have one lift");
+        var narrowest = blocks.MinBy(block => block.Angles[^1] - block.Angles[0])!;
+        if (narrowest.Angles[0] > -180 || narrowest.Angles[^1] < 180)
+            yield return new InputFinding(narrowest.At.File, narrowest.At.Line, narrowest.At.Column,
+                $"angles reach from {CanonicalText.Of(narrowest.Angles[0])} to {CanonicalText.Of(narrowest.Angles[^1])} deg; "
+                + "beyond them the end value serves, and each use is marked outside-angles");
     }
 
     private static string Contents(List<Block> blocks)
@@ -154,6 +172,9 @@ internal sealed record PolarTable(Section? Section, string Hash, InputFile Input
         public Polar ToPolar() => Polar.FromRows(
             Reynolds, [.. Angles.Select(angle => Math.Clamp(double.DegreesToRadians(angle), -Math.PI, Math.PI))],
             [.. _lift], [.. _drag]);
+
+        public IEnumerable<(double Angle, double Lift, double Drag)> Coefficients()
+            => Angles.Select((angle, i) => (angle, _lift[i], _drag[i]));
 
         public IEnumerable<string> Lines()
         {

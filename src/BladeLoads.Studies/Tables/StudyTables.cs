@@ -38,11 +38,23 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
             else if (Polar(name, Path.Combine(setFolder, name + ".csv")) is { } table)
                 tables.Add(table);
         }
+        foreach (var doubt in tables.SelectMany(table => table.Doubts))
+            findings.Doubt(doubt);
+        // A blade that names nothing, because of its errors, keeps no table from telling its own.
+        if (blade.Blade is null && blade.Sections.IsEmpty)
+            ReadAll(setFolder);
         var complete = tables.Count == blade.Sections.Length && tables.All(table => table.Section is not null);
         var sections = new BladeSections(
             complete ? SectionSet.Of(tables.Select(table => table.Section!)) : null, tables.ToImmutable());
         _sections.Add((blade.Input.File, setFolder), sections);
         return sections;
+    }
+
+    /// <summary>Reads every table of a set for its errors alone: the blade that would name some of them cannot be read.</summary>
+    public void ReadAll(string setFolder)
+    {
+        foreach (var name in folder.Names(setFolder).Where(IsTable))
+            Polar(name[..^4], Path.Combine(setFolder, name));
     }
 
     private PolarTable? Polar(string section, string fullPath)

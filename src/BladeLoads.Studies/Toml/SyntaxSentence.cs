@@ -1,5 +1,6 @@
 using System.Text.RegularExpressions;
 using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.Toml;
 
@@ -23,8 +24,8 @@ internal static partial class SyntaxSentence
                 : (parts.Groups["key"].Index + 1, $"'{key}' has no value; write {key} = and the value");
         if (rest.Length == 0)
             return (column, $"{key} has no value; write one after the =");
-        if (DecimalComma().IsMatch(rest))
-            return (column, $"{key} is '{rest}'; write decimals with a point: {rest.Replace(',', '.')}");
+        if (NumberText.Misprint(rest) is { } misprint)
+            return (column, $"{key} is {VisibleText.Quote(rest)}{misprint}");
         if (LeadingZero().Match(rest) is { Success: true } zero)
             return (column, $"{key} is '{rest}'; write it without leading zeros: {zero.Groups["value"].Value}");
         if (NumberAndMore().Match(rest) is { Success: true } number)
@@ -57,9 +58,6 @@ internal static partial class SyntaxSentence
 
     [GeneratedRegex(@"^\s*(?<key>[A-Za-z0-9_.-]+|""[^""]*"")\s*(?<equals>=)?\s*(?<rest>[^#""'\[\]{}=]*?)\s*(#.*)?$")]
     private static partial Regex KeyAndRest();
-
-    [GeneratedRegex(@"^[+-]?\d+,\d+([eE][+-]?\d+)?$")]
-    private static partial Regex DecimalComma();
 
     [GeneratedRegex(@"^[+-]?0+(?<value>\d+(\.\d+)?)$")]
     private static partial Regex LeadingZero();

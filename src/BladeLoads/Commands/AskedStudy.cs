@@ -1,6 +1,5 @@
 using BladeLoads.Batch.Plan;
-using BladeLoads.Results.Publishing;
-using BladeLoads.Rotor.Operation;
+using BladeLoads.Batch.Plan.Index;
 using BladeLoads.Studies;
 
 namespace BladeLoads.Commands;
@@ -34,11 +33,11 @@ internal sealed record AskedStudy(Study Asked, Study Whole)
     }
 
     /// <summary>The plan of the whole study, and what of it was asked for.</summary>
-    public (StudyPlan Whole, StudyPlan Asked) Plan(ResultsFolder results, IEnumerable<string> patterns)
+    public (StudyPlan Whole, StudyPlan Asked) Plan(StudyLook look, IEnumerable<string> patterns)
     {
-        var whole = StudyPlan.Make(Whole, results, SolverVersion.Number);
+        var whole = look.Plan(Whole);
         var names = Asked.Cases.Select(c => c.Name).ToHashSet(StringComparer.Ordinal);
-        var asked = new StudyPlan([.. whole.Cases.Where(c => names.Contains(c.Case.Name))], Asked.Rejected);
+        var asked = new StudyPlan([.. whole.Cases.Where(c => names.Contains(c.Case.Name))], Asked.Rejected) { Blocking = Asked.Blocking };
         return (whole, asked.Only(new CaseChoice([.. patterns])));
     }
 

@@ -29,7 +29,7 @@ internal static class CommandLine
                 return Refuse(result, action, surroundings);
             return result.Invoke(Invocation(surroundings));
         }
-        catch (StudyNotFoundException e)
+        catch (Exception e) when (e is StudyNotFoundException or WrongUseException)
         {
             surroundings.Error.WriteLine(Printable.Of(e.Message));
             return ExitCode.NothingCouldRun;
@@ -74,7 +74,8 @@ internal static class CommandLine
             "Power, thrust and torque curves and blade loads of wind turbine rotors, from blade and section tables. "
             + "Results are an input to, not a substitute for, load calculations under IEC 61400-1/-2, reviewed and signed by licensed engineers.")
         {
-            Check(surroundings), Plan(surroundings), RunStudy(surroundings),
+            Check(surroundings), Plan(surroundings), RunStudy(surroundings), CompareCommand.Define(surroundings),
+            KeepCommand.Define(surroundings), VerifyCommand.Define(surroundings), TidyCommand.Define(surroundings),
         };
         root.Directives.Clear();   // a study may be named [suggest]
         foreach (var option in root.Options)
@@ -100,12 +101,13 @@ internal static class CommandLine
         var study = StudyArgument("the study's folder, or one case file");
         var results = ResultsOption();
         var only = OnlyOption();
-        var command = new Command("plan", "Tells how the results of each case stand, what a run would solve, and why; writes nothing.")
+        var json = new Option<bool>("--json") { Description = "the same for scripts, as JSON" };
+        var command = new Command("plan", "Tells how the results of each case stand, what a run would solve, and why; solves nothing.")
         {
-            study, results, only,
+            study, results, only, json,
         };
         command.SetAction(result => PlanCommand.Run(
-            result.GetRequiredValue(study), result.GetRequiredValue(results), result.GetValue(only) ?? [], surroundings));
+            result.GetRequiredValue(study), result.GetRequiredValue(results), result.GetValue(only) ?? [], result.GetValue(json), surroundings));
         return command;
     }
 
@@ -135,16 +137,16 @@ internal static class CommandLine
         return command;
     }
 
-    private static Argument<string> StudyArgument(string description) => new("study") { Description = description };
+    internal static Argument<string> StudyArgument(string description) => new("study") { Description = description };
 
-    private static Option<string> ResultsOption() => new("--results")
+    internal static Option<string> ResultsOption() => new("--results")
     {
         Description = "the folder that results go to, a folder for each study in it",
         HelpName = "folder",
         DefaultValueFactory = _ => "results",
     };
 
-    private static Option<string[]> OnlyOption() => new("--only")
+    internal static Option<string[]> OnlyOption() => new("--only")
     {
         Description = "only cases whose name matches; * is any text, ? one character; may be given several times",
         HelpName = "pattern",

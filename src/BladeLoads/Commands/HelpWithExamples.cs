@@ -18,6 +18,7 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
         [
             ("bladeloads plan inputs/tarn-valley", "what a run would solve, and why"),
             ("bladeloads plan inputs/tarn-valley --only 'soiled*'", "the same for some of the cases"),
+            ("bladeloads plan inputs/tarn-valley --json", "the same for scripts; docs/formats.md has its keys"),
         ],
         ["run"] =
         [
@@ -27,11 +28,36 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads run inputs/tarn-valley --all --results /data/results", "solve all again, results elsewhere"),
             ("bladeloads run inputs/tarn-valley --workers 1 --quiet", "one case at a time, errors and warnings alone"),
         ],
+        ["compare"] =
+        [
+            ("bladeloads compare signed-off inputs/tarn-valley", "what moved since a set was kept, case by case"),
+            ("bladeloads compare soiling~polars-clean soiling~polars-soiled", "two cases"),
+            ("bladeloads compare /old/results/tarn-valley results/tarn-valley --more-than 0.5 --csv moved.csv", "two folders of results"),
+        ],
+        ["keep"] =
+        [
+            ("bladeloads keep inputs/tarn-valley signed-off-2026-11", "set the results aside as they were signed"),
+            ("bladeloads keep inputs/tarn-valley last-week --replace", "in the place of the set of that name"),
+        ],
+        ["verify"] =
+        [
+            ("bladeloads verify inputs/tarn-valley", "all results of a study: current, kept and replaced ones"),
+            ("bladeloads verify signed-off-2026-11", "a kept set"),
+            ("bladeloads verify inputs/tarn-valley --set-aside", "and have the damaged ones solved again by the next run"),
+        ],
+        ["tidy"] =
+        [
+            ("bladeloads tidy inputs/tarn-valley", "tell what can go: replaced more than 30 days ago, but for the last 3 of each case"),
+            ("bladeloads tidy inputs/tarn-valley --keep-last 1 --yes", "remove all replaced results but the last of each case"),
+            ("bladeloads tidy inputs/tarn-valley --older-than 90d", "only what was replaced more than 90 days ago"),
+        ],
         [""] =
         [
             ("bladeloads check inputs/tarn-valley", "is the input right?"),
             ("bladeloads plan inputs/tarn-valley", "what would be solved, and why?"),
-            ("bladeloads run inputs/tarn-valley", "solve it"),
+            ("bladeloads run inputs/tarn-valley", "solve it, and tell what moved"),
+            ("bladeloads keep inputs/tarn-valley signed-off", "set the results aside under a name"),
+            ("bladeloads compare signed-off inputs/tarn-valley", "what moved since then?"),
             ("bladeloads run --help", "the options of a command"),
         ],
     };

@@ -1,9 +1,11 @@
 using System.Collections.Immutable;
 using BladeLoads.Batch.Logs;
 using BladeLoads.Batch.Plan;
+using BladeLoads.Batch.Plan.Index;
 using BladeLoads.Batch.Queue;
 using BladeLoads.Batch.Sharing;
 using BladeLoads.Batch.Work;
+using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Tables;
 using BladeLoads.Rotor.Operation;
@@ -19,13 +21,16 @@ internal sealed record RunRequest(string Path, string Results, int Workers, stri
 /// <summary><c>bladeloads run</c>: solves what is not current and shows the summary.</summary>
 internal static class RunCommand
 {
+    private const int TablesShown = 6;
+
     public static int Run(RunRequest request, Surroundings surroundings)
     {
         using var signals = new StopSignals(surroundings);
         var study = AskedStudy.Read(request.Path, surroundings);
         FindingLines.Write(study.Asked, surroundings.Error, withSource: surroundings.ErrorIsTerminal);
         var results = new ResultsFolder(Path.GetFullPath(request.Results), study.Asked.Name);
-        var (wholePlan, plan) = study.Plan(results, request.Only);
+        var look = new StudyLook(results, CommandLine.ToolVersion, SolverVersion.Number, surroundings.Time);
+        var (wholePlan, plan) = study.Plan(look, request.Only);
         if (NothingMeant.Tell(plan, study.Asked, request.Only, surroundings))
             return ExitCode.NothingCouldRun;
         if (plan.Cases.IsEmpty)
@@ -36,7 +41,7 @@ internal static class RunCommand
 
         var due = plan.Cases.Where(c => request.All || c.IsDue).Select(c => c.Case).ToImmutableArray();
         if (!request.Quiet)
-            surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, due.Length));
+            surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, request.All));
 
         if (due.IsEmpty)
         {
@@ -44,24 +49,39 @@ internal static class RunCommand
             Claims.TidyIfPossible(results, surroundings.Disk);
         }
         using var publisher = new PublisherWhenNeeded(results, surroundings.Disk);
-        var run = due.IsEmpty ? NothingRun : Solve(due, AgainOf(plan, request), request, results, publisher, signals, surroundings);
+        var changes = RunChanges.Before(wholePlan, due.Select(c => c.Name), results);
+        if (!due.IsEmpty)
+            changes.Remember(publisher.Get());
+        var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, plan, signals, surroundings);
         // Another run may have been at work meanwhile on cases that this one was not asked for.
         var othersAreDue = !due.IsEmpty && wholePlan.Cases.Any(c => c.IsDue && !run.Outcomes.ContainsKey(c.Case.Name));
-        var rows = StudySummary.Rows(othersAreDue ? study.Plan(results, request.Only).Whole : wholePlan, run.Outcomes);
+        var rows = StudySummary.Rows(othersAreDue ? study.Plan(look, request.Only).Whole : wholePlan, run.Outcomes);
         var shown = RowsOf(plan, rows);
         if (run.NoRoom is null)
             StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
+        var moved = run.NoRoom is null && !changes.IsEmpty ? changes.Compare(run.Outcomes) : [];
+        if (run.NoRoom is null && !changes.IsEmpty)
+            changes.Publish(moved, run.Outcomes, publisher.Get());
+        if (run.NoRoom is null && !due.IsEmpty)
+            look.LookAfterRun(study.Whole);
         if (run.SolvedByAnother > 0 && !request.Quiet)
             surroundings.Out.WriteLine($"{Count.Of(run.SolvedByAnother, "case")} solved by another run");
         if (run.NoRoom is null && !request.Quiet)
+        {
             SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
+            if (moved.Any(c => c is not CaseComparison.NotCompared { Reason: NoComparison.NoEarlierResult }))
+                ChangeLines.Write(moved, ChangesOf(results, surroundings), surroundings.Out);
+        }
         return Tell(run, shown, study.Asked, signals, surroundings);
     }
+
+    private static ChangesShown ChangesOf(ResultsFolder results, Surroundings surroundings) => new(
+        "what moved, % of the result before", 0, TablesShown, !surroundings.OutIsTerminal, results.Changes, $"changes: {results.Changes}");
 
     private static RunResult NothingRun { get; } = new(ImmutableSortedDictionary<string, CaseOutcome>.Empty, null, []);
 
     private static RunResult Solve(
-        ImmutableArray<StudyCase> due, Again again, RunRequest request, ResultsFolder results, PublisherWhenNeeded publisher,
+        ImmutableArray<StudyCase> due, RunRequest request, ResultsFolder results, PublisherWhenNeeded publisher, StudyPlan plan,
         StopSignals signals, Surroundings surroundings)
     {
         var screen = new ScreenLog(surroundings.Error);
@@ -69,12 +89,13 @@ internal static class RunCommand
         // Where results cannot be written either, that alone is told.
         string? logTrouble = null;
         var log = RunLog.Open(results.Logs, screen, surroundings.Time, line => logTrouble = line);
+        var identity = new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion);
+        var reuse = request.All ? null : new CaseReuse(plan, results, publisher.Get(), surroundings.Disk, identity);
         var work = new CaseWork(
-            surroundings.Solve, publisher.Get(), results, new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion), log.Logger,
-            surroundings.Time, surroundings.WaitForFile);
+            surroundings.Solve, publisher.Get(), results, identity, log.Logger, surroundings.Time, surroundings.WaitForFile, reuse);
         var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
         using var claims = new Claims(results, surroundings.Disk);
-        RunResult Run() => StudyRun.Solve(due, again, work, claims, request.Workers, progress, log.Logger, signals.Stopping);
+        RunResult Run() => StudyRun.Solve(due, AgainOf(plan, request), work, claims, request.Workers, progress, log.Logger, signals.Stopping);
         RunResult Shown() => request.Quiet ? Run()
             : surroundings.ErrorIsTerminal ? ProgressBar.Show(Run, progress, screen)
             : PlainProgress.Show(Run, progress, request.Workers, surroundings.Error, surroundings.Time);
@@ -95,7 +116,7 @@ internal static class RunCommand
     }
 
     private static Again AgainOf(StudyPlan plan, RunRequest request) => new(
-        [.. plan.Cases.Where(c => request.All && c.State is CaseState.Current).Select(c => c.Case.Name)], request.All);
+        [.. plan.Cases.Where(c => c.State is CaseState.Current or CaseState.Retitled).Select(c => c.Case.Name)], request.All);
 
     private static ImmutableArray<SummaryRow> RowsOf(StudyPlan plan, ImmutableArray<SummaryRow> rows)
     {

@@ -12,7 +12,19 @@ internal sealed record Surroundings(
     TextWriter Out, TextWriter Error, bool OutIsTerminal, bool ErrorIsTerminal, Func<string, Study> ReadStudy, SolveCase Solve,
     IDisk Disk, TimeProvider Time, Action<int> WaitForFile)
 {
+    /// <summary>Puts a question to whoever sits at the terminal, and tells whether the answer was yes; null where nobody does.</summary>
+    public Func<string, bool>? Ask { get; init; }
+
     public static Surroundings OfThisProcess() => new(
         Console.Out, Console.Error, !Console.IsOutputRedirected, !Console.IsErrorRedirected, StudyReader.Read, CaseSolver.Solve,
-        new Disk(), TimeProvider.System, tries => Thread.Sleep(TimeSpan.FromMilliseconds(50 << tries)));
+        new Disk(), TimeProvider.System, tries => Thread.Sleep(TimeSpan.FromMilliseconds(50 << tries)))
+    {
+        Ask = Console.IsInputRedirected || Console.IsOutputRedirected ? null : AskAtTheTerminal,
+    };
+
+    private static bool AskAtTheTerminal(string question)
+    {
+        Console.Out.Write($"{question} [y/N] ");
+        return Console.In.ReadLine()?.Trim() is "y" or "Y" or "yes";
+    }
 }

@@ -14,7 +14,7 @@ internal static class FindingLines
     {
         var all = study.Errors.Select(e => (Finding: e, Word: ""))
             .Concat(study.Doubts.Select(d => (Finding: d, Word: "doubt: ")))
-            .OrderBy(f => f.Finding.File, StringComparer.Ordinal).ThenBy(f => f.Finding.Line).ThenBy(f => f.Finding.Column);
+            .OrderBy(f => f.Finding, FindingOrder.Instance);
         foreach (var (finding, word) in all)
         {
             output.WriteLine(Printable.Of($"{Place(finding)}: {word}{finding.Text}"));

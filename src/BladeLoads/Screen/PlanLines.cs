@@ -8,42 +8,55 @@ internal static class PlanLines
 {
     private const int WidestName = 48;
 
-    private static readonly string[] Words = ["current", "out of date", "missing", "failed", "rejected"];
+    private static readonly string[] Words =
+        ["current", "current again", "re-usable", "out of date", "damaged", "missing", "failed", "blocked"];
 
-    /// <summary>A line a case: <c>clean-1.05  out of date: section tarn-30: table changed</c>.</summary>
-    public static IEnumerable<string> Of(StudyPlan plan)
+    /// <summary>A line a case: <c>clean-1.05  out of date: air.density_kg_m3 1.225 -> 1.05</c>.</summary>
+    public static IEnumerable<string> Of(IReadOnlyCollection<CaseStanding> cases)
     {
-        var names = plan.Cases.Select(c => Printable.Of(c.Case.Name)).Concat(plan.Rejected.Select(Printable.Of)).ToList();
-        var width = Math.Min(WidestName, names.Count == 0 ? 0 : names.Max(n => n.Length));
-        foreach (var planned in plan.Cases)
+        var width = Math.Min(WidestName, cases.Count == 0 ? 0 : cases.Max(c => Printable.Of(c.Name).Length));
+        foreach (var standing in cases)
         {
-            var state = planned.State;
-            var reason = state.Reason.Length == 0 ? "" : $": {state.Reason}";
-            yield return $"{Printable.Of(planned.Case.Name).PadRight(width)}  {state.Word}{reason}";
+            var reason = standing.State.Reason;
+            yield return $"{Printable.Of(standing.Name).PadRight(width)}  {standing.State.Word}{(reason.Length == 0 ? "" : ": ")}{reason}";
         }
-        foreach (var name in plan.Rejected)
-            yield return $"{Printable.Of(name).PadRight(width)}  rejected: its input has errors";
     }
 
-    /// <summary><c>12 cases: 3 current, 2 out of date, 7 missing; run solves 9</c>.</summary>
-    public static string Closing(StudyPlan plan)
-        => $"{Counts(plan)}; {(plan.Cases.Any(c => c.IsDue) ? $"run solves {plan.Cases.Count(c => c.IsDue)}" : "nothing to run")}";
+    /// <summary><c>12 cases: 3 current, 1 re-usable, 8 missing; run solves 8, re-uses 1</c>.</summary>
+    public static string Closing(IReadOnlyCollection<CaseStanding> cases)
+    {
+        var solved = cases.Count(c => c.NeedsSolving);
+        var reused = cases.Count(c => c.IsThereAlready);
+        return (solved, reused) switch
+        {
+            (0, 0) => $"{Counts(cases)}; nothing to run",
+            (_, 0) => $"{Counts(cases)}; run solves {solved}",
+            (0, _) => $"{Counts(cases)}; run re-uses {reused}, nothing to solve",
+            _ => $"{Counts(cases)}; run solves {solved}, re-uses {reused}",
+        };
+    }
 
     /// <summary><c>12 cases: 3 current, 9 missing; solving 9</c>.</summary>
-    public static string Summary(StudyPlan plan, int due) => $"{Counts(plan)}; solving {due}";
+    /// <param name="all">Current cases are solved too, and none is re-used.</param>
+    public static string Summary(StudyPlan plan, bool all)
+    {
+        var cases = plan.Standings;
+        var solved = all ? plan.Cases.Length : cases.Count(c => c.NeedsSolving);
+        var reused = all ? 0 : cases.Count(c => c.IsThereAlready);
+        return $"{Counts(cases)}; {(solved == 0 ? "" : $"solving {solved}")}{(solved > 0 && reused > 0 ? ", " : "")}{(reused == 0 ? "" : $"re-using {reused}")}";
+    }
 
     public static string AllCurrent(StudyPlan plan)
         => plan.Rejected.IsEmpty && plan.Cases.Length == 1 ? "the case is current; nothing to solve"
         : plan.Rejected.IsEmpty ? $"all {Count.Of(plan.Cases.Length, "case")} are current; nothing to solve"
-        : $"{Counts(plan)}; nothing to solve";
+        : $"{Counts(plan.Standings)}; nothing to solve";
 
-    private static string Counts(StudyPlan plan)
+    private static string Counts(IReadOnlyCollection<CaseStanding> cases)
     {
-        var words = plan.Cases.Select(c => c.State.Word).Concat(plan.Rejected.Select(_ => "rejected")).ToList();
         var counts = Words
-            .Select(word => (Word: word, Number: words.Count(w => w == word)))
+            .Select(word => (Word: word, Number: cases.Count(c => c.State.Word == word)))
             .Where(c => c.Number > 0)
             .Select(c => $"{c.Number} {c.Word}");
-        return $"{Count.Of(words.Count, "case")}: {string.Join(", ", counts)}";
+        return $"{Count.Of(cases.Count, "case")}: {string.Join(", ", counts)}";
     }
 }

@@ -9,6 +9,8 @@ namespace BladeLoads.Screen;
 /// <summary>The summary on the screen: the most useful columns, each row within about 110 characters.</summary>
 internal static class SummaryLines
 {
+    public const string Caution = "steady, characteristic, unfactored, without weight; no design envelope (each receipt.json says more)";
+
     private const int WidestName = 40;
     private const int RowsShown = 100;
 
@@ -27,7 +29,7 @@ internal static class SummaryLines
         if (baseline is not null)
             WriteDifferences(shown, baseline, width, output);
         output.WriteLine();
-        output.WriteLine("steady, characteristic, unfactored, without weight; no design envelope (each receipt.json says more)");
+        output.WriteLine(Caution);
         output.WriteLine(Printable.Of($"results: {folder}"));
     }
 

@@ -27,8 +27,10 @@ internal static class FellRotor
     public static StudyCase Case(string name, RotorCase? rotor = null, string title = "invented", params (string Key, string Value)[] values)
     {
         var all = values.ToImmutableSortedDictionary(v => v.Key, v => v.Value, StringComparer.Ordinal);
+        // Cases of the same values are the same case under another name; those without any differ.
+        var determining = values.Length == 0 ? name : string.Join('\n', all.Select(v => $"{v.Key}={v.Value}"));
         return new StudyCase(
-            name, title, $"cases/{name}.toml", rotor ?? Rotor(), null, Hash(string.Join('\n', all.Select(v => $"{v.Key}={v.Value}"))),
+            name, title, $"cases/{name}.toml", rotor ?? Rotor(), null, Hash(determining),
             [new InputFile($"cases/{name}.toml", Hash(name), "case file")], all);
     }
 
@@ -38,6 +40,12 @@ internal static class FellRotor
     /// <summary>A curve that depends on the case alone; its powers are multiples of the wind speed.</summary>
     public static PowerCurve Curve(RotorCase rotor, PointMarks marks = PointMarks.None) => new(
         [.. rotor.WindSpeeds.Select(v => Point(v, rotor.Model.Elements, marks))], 2.5, PointMarks.None, rotor.WindSpeeds.Length);
+
+    /// <summary>The same curve with every thrust so many times as large.</summary>
+    public static PowerCurve Scaled(PowerCurve curve, double factor) => curve with
+    {
+        Points = [.. curve.Points.Select(p => p.Loads is { } loads ? p with { Loads = loads with { Thrust = loads.Thrust * factor } } : p)],
+    };
 
     public static CurvePoint Point(double windSpeed, int elements = 2, PointMarks marks = PointMarks.None) => new(
         new OperatingPoint(windSpeed, Math.PI, Math.PI / 180),

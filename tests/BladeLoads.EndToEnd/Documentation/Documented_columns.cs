@@ -1,3 +1,6 @@
+using System.Text.Json;
+using BladeLoads.Results.Comparison;
+using BladeLoads.Results.Keeping;
 using BladeLoads.Results.Tables;
 using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Loads;
@@ -23,6 +26,25 @@ public sealed class Documented_columns
     public void Of_the_baseline_are_those_written_in_their_order()
         => Assert.Equal<string>(SummaryTable.BaselineColumns, DocumentedTable.Names(
             "With a `baseline` in study.toml, five columns follow: how far the case lies from the baseline, in percent of the baseline's value."));
+
+    [Fact]
+    public void Of_the_changes_are_those_written_in_their_order()
+        => Assert.Equal<string>(ChangesTable.Columns, DocumentedTable.Names("### changes.csv"));
+
+    [Fact]
+    public void Name_the_figures_that_are_compared_in_their_order()
+    {
+        var documented = DocumentedTable.Rows("The figures of a case, in this order:");
+        Assert.Equal(Figures.All.Select(f => (f.Name, f.Unit)), documented.Take(Figures.All.Length).Select(row => (row[0].Trim('`'), row[1])));
+        Assert.Equal(Figures.All.Length + 2, documented.Length);
+    }
+
+    [Fact]
+    public void Of_a_kept_set_are_the_keys_written()
+    {
+        using var json = JsonDocument.Parse(new KeptRecord(1, "", "", default, "", [], "").ToBytes());
+        Assert.Equal(json.RootElement.EnumerateObject().Select(p => p.Name), DocumentedTable.Names("### kept.json"));
+    }
 
     [Fact]
     public void Hold_every_region_by_its_word()

@@ -109,10 +109,10 @@ public sealed class Commands_with_an_invented_solver : IDisposable
         var (code, text, _) = Run(study, "check");
         Assert.Equal(1, code);
         Assert.Equal("""
-            blades/fell.csv:3: doubt: another
             cases/bad.toml:14:1: unknown key 'tip_speed'
             cases/bad.toml:15:3: doubt: a doubt
             cases/worse.toml: is empty
+            blades/fell.csv:3: doubt: another
             2 errors in 2 files, 2 doubts; bad, worse not run, 1 other can run
 
             """, text);

@@ -62,7 +62,7 @@ public sealed class The_program : IDisposable
         Run("run", "beck");
         var table = Path.Join(_study, "polars/clean/beck-18.csv");
         File.WriteAllText(table, File.ReadAllText(table).Replace("\n4,", "\n4.5,", StringComparison.Ordinal));
-        Assert.StartsWith("clean     out of date: section beck-18: table changed\n", Run("plan", "beck").Out, StringComparison.Ordinal);
+        Assert.StartsWith("clean     out of date: polar beck-18.csv: 1 row added at 4.5 deg, 1 row removed at 4 deg\n", Run("plan", "beck").Out, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -101,9 +101,11 @@ public sealed class The_program : IDisposable
         var run = Run("run", "beck");
         Assert.StartsWith("cases/bad.toml:1:1: ", run.Error, StringComparison.Ordinal);
         Assert.EndsWith("1 error in 1 file; bad not run, 3 others can run\n", run.Error, StringComparison.Ordinal);
-        Assert.StartsWith("4 cases: 3 missing, 1 rejected; solving 3\n", run.Out, StringComparison.Ordinal);
+        Assert.StartsWith("4 cases: 3 missing, 1 blocked; solving 3\n", run.Out, StringComparison.Ordinal);
         Assert.Equal(1, run.ExitCode);
-        Assert.Equal(1, Run("plan", "beck").ExitCode);
+        var plan = Run("plan", "beck");
+        Assert.Equal(1, plan.ExitCode);
+        Assert.Contains("bad       blocked: cases/bad.toml:1:1: unknown key 'titel'", plan.Out, StringComparison.Ordinal);
         Assert.Equal(1, Run("run", "beck").ExitCode);
     }
 
@@ -198,6 +200,11 @@ public sealed class The_program : IDisposable
     [InlineData("run", "nowhere")]
     [InlineData("check", "nowhere/clean.toml")]
     [InlineData("plan", "")]
+    [InlineData("compare", "one")]
+    [InlineData("compare", "one", "other")]
+    [InlineData("keep", "beck", "signed")]
+    [InlineData("verify", "beck")]
+    [InlineData("tidy", "beck", "--keep-last", "some")]
     public void Refuses_wrong_use(params string[] arguments)
     {
         var finished = Run(arguments);
@@ -212,6 +219,10 @@ public sealed class The_program : IDisposable
     [InlineData("bladeloads plan ", "plan", "--help")]
     [InlineData("bladeloads run ", "run", "--help")]
     [InlineData("bladeloads run ", "run", "-h")]
+    [InlineData("bladeloads compare ", "compare", "--help")]
+    [InlineData("bladeloads keep ", "keep", "--help")]
+    [InlineData("bladeloads verify ", "verify", "--help")]
+    [InlineData("bladeloads tidy ", "tidy", "--help")]
     public void Helps_with_examples(string example, params string[] arguments)
     {
         var help = Run(arguments);

@@ -42,7 +42,9 @@ public class CaseErrorTests
     [InlineData("blade_count = 3", "blade_count = \"3\"",
         "cases/clean.toml:6:15: blade_count is '3' in quotes, which is text; write the number without quotes: 3")]
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = \"70,5\"",
-        "cases/clean.toml:13:19: rotor_speed_rpm is '70,5'; write decimals with a point and no quotes: 70.5")]
+        "cases/clean.toml:13:19: rotor_speed_rpm is '70,5'; write decimals with a point: 70.5, without quotes")]
+    [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = \"70,500\"",
+        "cases/clean.toml:13:19: rotor_speed_rpm is '70,500'; write 70500 or 70.500, whichever is meant, without quotes")]
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = \"fast\"",
         "cases/clean.toml:13:19: rotor_speed_rpm is 'fast'; give a number, such as 72")]
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = true",
@@ -63,7 +65,7 @@ public class CaseErrorTests
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = 1e400",
         "cases/clean.toml:13:19: rotor_speed_rpm is infinite; give a finite number")]
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = -70",
-        "cases/clean.toml:13:19: rotor_speed_rpm is -70; it must be 0 or more")]
+        "cases/clean.toml:13:19: rotor_speed_rpm is -70; it must be from 0 to 100000")]
     [InlineData("pitch_deg       = 2", "pitch_deg = 181",
         "cases/clean.toml:14:13: pitch_deg is 181; it must be from -180 to 180")]
     [InlineData("blade_count = 3", "blade_count = 0",
@@ -77,8 +79,22 @@ public class CaseErrorTests
     [InlineData("blade_count = 3", "blade_count = 3\nhub_height_m = 0",
         "cases/clean.toml:7:16: hub_height_m is 0; it must be above 0")]
     [InlineData("[rotor]", "[air]\ndensity_kg_m3 = 0\ndynamic_viscosity_Pa_s = -1e-5\n[rotor]",
-        "cases/clean.toml:6:17: density_kg_m3 is 0; it must be above 0",
-        "cases/clean.toml:7:26: dynamic_viscosity_Pa_s is -1e-05; it must be above 0")]
+        "cases/clean.toml:6:17: density_kg_m3 is 0; it must be above 0 and at most 100",
+        "cases/clean.toml:7:26: dynamic_viscosity_Pa_s is -1e-05; it must be above 0 and at most 1")]
+    // Beyond what any rotor is.
+    [InlineData("[rotor]", "[air]\ndensity_kg_m3 = 1225\ndynamic_viscosity_Pa_s = 17.89\n[rotor]",
+        "cases/clean.toml:6:17: density_kg_m3 is 1225; it must be above 0 and at most 100",
+        "cases/clean.toml:7:26: dynamic_viscosity_Pa_s is 17.89; it must be above 0 and at most 1")]
+    [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = 100001\nrated_power_kW = 2e9",
+        "cases/clean.toml:13:19: rotor_speed_rpm is 100001; it must be from 0 to 100000",
+        "cases/clean.toml:14:18: rated_power_kW is 2000000000; it must be above 0 and at most 1000000000")]
+    [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = 70\ncut_in_wind_speed_m_s = 201\ncut_out_wind_speed_m_s = 250",
+        "cases/clean.toml:14:25: cut_in_wind_speed_m_s is 201; it must be from 0 to 200",
+        "cases/clean.toml:15:26: cut_out_wind_speed_m_s is 250; it must be above 0 and at most 200")]
+    [InlineData("{ from = 5, to = 7, step = 1 }", "[5, 201]",
+        "cases/clean.toml:9:18: speeds_m_s holds 201; wind speeds must be at most 200 m/s")]
+    [InlineData("to = 7", "to = 2400",
+        "cases/clean.toml:9:31: speeds_m_s has to = 2400; wind speeds must be at most 200 m/s")]
     [InlineData("[wind]", "[air]\nrelative_humidity = 50\n[wind]\nturbulence_intensity = 12",
         "cases/clean.toml:9:21: relative_humidity is 50; it must be from 0 to 1",
         "cases/clean.toml:11:24: turbulence_intensity is 12; it must be from 0 to 1")]
@@ -167,6 +183,34 @@ public class CaseErrorTests
                 "polars/clean/tip.csv:2:10: cd is -0.02; drag coefficients must be >= 0",
             ],
             study.Read().Errors);
+    }
+
+    [Fact]
+    public void Files_follow_in_the_order_of_starting_values_cases_blades_polars_and_the_rest()
+    {
+        InputFinding[] inOrder =
+        [
+            new("study.toml", 9, 1, "a"), new("cases/a.toml", 0, 0, "the whole file"), new("cases/a.toml", 2, 10, "a"),
+            new("cases/a.toml", 10, 2, "a"), new("cases/a.toml", 10, 11, "a"), new("cases/a.toml", 10, 11, "b"),
+            new("cases/a.toml", 10, 0, "the whole line"), new("cases/b.toml", 1, 1, "a"), new("blades/z.csv", 1, 1, "a"),
+            new("polars/a/a.csv", 1, 1, "a"), new("polars/a/b.csv", 1, 1, "a"), new("a.toml", 1, 1, "a"), new("schedules/a.csv", 1, 1, "a"),
+        ];
+
+        Assert.Equal(inOrder, inOrder.Reverse().Order(FindingOrder.Instance));
+        Told.Exactly(
+            [
+                "study.toml:1:1: unknown key 'titel' at the top of the file; did you mean 'title'?",
+                "cases/clean.toml:4:15: blade_count is 0; it must be from 1 to 20",
+                "blades/fell.csv:3:3: chord_m is -0.8; it must be above 0",
+                "polars/clean/tip.csv:2:10: cd is -0.02; drag coefficients must be >= 0",
+                "schedules/gentle.csv:2:3: rotor_speed_rpm is -40; it must be from 0 to 100000",
+            ],
+            new FellStudy()
+                .With("cases/clean.toml", FellStudy.ScheduleCase.Replace("= 3", "= 0", StringComparison.Ordinal))
+                .Change("schedules/gentle.csv", "4,40", "4,-40")
+                .Change("polars/clean/tip.csv", "0.02,0\n", "-0.02,0\n")
+                .Change("blades/fell.csv", "0.8", "-0.8")
+                .With("study.toml", "titel = \"x\"\n").Read().Errors);
     }
 
     [Fact]

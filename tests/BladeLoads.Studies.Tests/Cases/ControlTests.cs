@@ -72,7 +72,7 @@ public class ControlTests
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\ndrivetrain_efficiency = 0",
         "cases/clean.toml:11:25: drivetrain_efficiency is 0; it must be above 0 and at most 1")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nrated_power_kW = -5",
-        "cases/clean.toml:11:18: rated_power_kW is -5; it must be above 0")]
+        "cases/clean.toml:11:18: rated_power_kW is -5; it must be above 0 and at most 1000000000")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nabove_rated = \"pitch-to-feather\"",
         "cases/clean.toml:11:15: above_rated is 'pitch-to-feather' without a rated power; give rated_power_kW or leave above_rated out")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nabove_rated = \"feather\"",

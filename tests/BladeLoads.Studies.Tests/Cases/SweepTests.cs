@@ -65,7 +65,7 @@ public class SweepTests
 
         Told.Exactly(
             [
-                "cases/clean.toml:17:31: density_kg_m3 is -1.05; it must be above 0",
+                "cases/clean.toml:17:31: density_kg_m3 is -1.05; it must be above 0 and at most 100",
                 "cases/clean.toml:18:27: pitch_deg is '2' in quotes, which is text; write the number without quotes: 2",
             ],
             study.Errors);

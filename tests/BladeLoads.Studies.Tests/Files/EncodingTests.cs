@@ -71,7 +71,13 @@ public class EncodingTests
         Told.Exactly(
             ["blades/fell.csv:1:1: columns are separated by ';'; separate them by ','"], With("blades/fell.csv", rubbish).Read().Errors);
         Assert.InRange(With("cases/clean.toml", rubbish[..300_000]).Read().Errors.Length, 1, 20);
-        Assert.InRange(With("polars/clean/tip.csv", [.. "alpha_deg,cl,cd\n"u8, .. rubbish]).Read().Errors.Length, 1, 51);
+        Told.Exactly(
+            [
+                .. Enumerable.Range(2, 3).Select(line => $"polars/clean/tip.csv:{line}:1: 1 value where the header names 3 columns; "
+                    + "give one value a column, and write decimals with a point"),
+                "polars/clean/tip.csv:5:1: and at least 9997 more like it",
+            ],
+            With("polars/clean/tip.csv", [.. "alpha_deg,cl,cd\n"u8, .. rubbish]).Read().Errors);
     }
 
     [Fact]

@@ -35,7 +35,7 @@ public class StartingValuesTests
             .With("cases/second.toml", FellStudy.Case)
             .With("cases/own.toml", FellStudy.Case + "[air]\ndensity_kg_m3 = 1.2\n").Read();
 
-        Told.Exactly(["study.toml:2:17: density_kg_m3 is -1; it must be above 0"], study.Errors);
+        Told.Exactly(["study.toml:2:17: density_kg_m3 is -1; it must be above 0 and at most 100"], study.Errors);
         Assert.Equal(["clean", "second"], study.Rejected.ToArray());
         Assert.Equal(["own"], study.Cases.Select(c => c.Name));
     }
@@ -88,6 +88,12 @@ public class StartingValuesTests
         Assert.Null(study.Baseline);
         Assert.Equal(3, study.Cases.Length);
     }
+
+    [Theory]
+    [InlineData("baselin = 3", "study.toml:1:1: unknown key 'baselin' at the top of the file; did you mean 'baseline'?")]
+    [InlineData("colour = 3", "study.toml:1:1: unknown key 'colour' at the top of the file; known are title, blade, polars, baseline")]
+    public void A_key_that_study_toml_does_not_know_is_told_with_those_that_it_knows(string line, string expected)
+        => Told.Exactly([expected], new FellStudy().With("study.toml", line + "\n").Read().Errors);
 
     [Fact]
     public void A_variant_may_be_the_baseline()

@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+
 namespace BladeLoads.Studies.Tests.Studies;
 
 /// <summary>What a path may name, and what is said when it names nothing.</summary>
@@ -52,4 +54,39 @@ public class StudyPlaceTests
 
         study.OnlyCase();
     }
+
+    [Theory]
+    [InlineData("x.TOML")]
+    [InlineData(".hid.toml")]
+    [InlineData("VSn.tml")]
+    [InlineData("clean.toml.txt")]
+    public void A_file_that_looks_like_a_case_and_is_not_read_is_a_doubt(string name)
+        => Told.Exactly(
+            [$"cases/{name}: is not read: a case file's name ends in .toml, in small letters, and does not begin with a dot"],
+            Doubts($"cases/{name}"));
+
+    [Theory]
+    [InlineData("cases/clean.toml~")]
+    [InlineData("cases/#clean.toml#")]
+    [InlineData("cases/.clean.toml.swp")]
+    [InlineData("cases/notes.md")]
+    [InlineData("cases/page.html")]
+    [InlineData("cases/old.TOML/notes.md")]
+    [InlineData("spare/x.TOML")]
+    public void Other_files_beside_the_cases_are_nobodys_matter(string file) => Told.Exactly([], Doubts(file));
+
+    [Fact]
+    public void Two_case_files_whose_names_differ_in_letter_case_only_are_refused()
+    {
+        var study = new FellStudy().With("cases/Clean.toml", FellStudy.Case).Read();
+
+        Told.Exactly(
+            ["cases/clean.toml: the name differs from Clean.toml in letter case only, and some systems take both for one; rename one"],
+            study.Errors);
+        Assert.Equal(["Clean"], study.Cases.Select(c => c.Name));
+        Assert.Equal(["clean"], study.Rejected.ToArray());
+    }
+
+    private static ImmutableArray<InputFinding> Doubts(string file)
+        => new FellStudy().With("polars/clean/tip.csv", FellStudy.RootPolar).With(file, "rubbish").Read().Doubts;
 }

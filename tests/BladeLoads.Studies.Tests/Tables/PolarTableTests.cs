@@ -89,9 +89,47 @@ public class PolarTableTests
 
         Told.Exactly(
             ["polars/clean/root.csv:4:9: cl is 0.06 at 180 deg and 0 at -180 deg; these are one angle and should have one lift"],
-            study.Doubts);
+            study.Doubts.Where(doubt => doubt.File == Root));
         Told.Exactly([], study.Errors);
         Assert.Equal(["clean"], study.Cases.Select(c => c.Name));
+    }
+
+    [Theory]
+    [InlineData(FellStudy.TipPolar,
+        "polars/clean/tip.csv:2:1: angles reach from -10 to 10 deg; beyond them the end value serves, and each use is marked outside-angles")]
+    [InlineData("alpha_deg,cl,cd\n-180,0,0\n0,0,0\n179,0,0\n",
+        "polars/clean/tip.csv:2:1: angles reach from -180 to 179 deg; beyond them the end value serves, and each use is marked outside-angles")]
+    [InlineData("reynolds,alpha_deg,cl,cd\n1e5,-180,0,0\n1e5,0,0,0\n1e5,180,0,0\n1e6,-20,0,0\n1e6,0,0,0\n1e6,30,0,0\n",
+        "polars/clean/tip.csv:5:1: angles reach from -20 to 30 deg; beyond them the end value serves, and each use is marked outside-angles")]
+    [InlineData("alpha_deg,cl,cd\n-180,0,0\n0,0,0\n180,0,0\n", null)]
+    public void Angles_that_do_not_go_round_are_a_doubt_once_a_table_that_a_blade_names(string tip, string? expected)
+    {
+        var study = new FellStudy().With(Tip, tip).With("polars/clean/other.csv", FellStudy.TipPolar).With("cases/second.toml", FellStudy.Case).Read();
+
+        Told.Exactly(expected is null ? [] : [expected], study.Doubts);
+        Told.Exactly([], study.Errors);
+    }
+
+    [Fact]
+    public void Negative_drag_in_many_rows_is_told_by_number()
+        => Told.Exactly(
+            [
+                "polars/clean/tip.csv:2:8: cd is -0.01; drag coefficients must be >= 0",
+                "polars/clean/tip.csv:3:7: cd is -0.02; drag coefficients must be >= 0",
+                "polars/clean/tip.csv:4:7: cd is -0.03; drag coefficients must be >= 0",
+                "polars/clean/tip.csv:5:7: and 2 more like it in column cd",
+            ],
+            new FellStudy().With(Tip, "alpha_deg,cl,cd\n-10,-1,-0.01\n-5,-1,-0.02\n0,0.5,-0.03\n5,0.9,-4e-2\n10,1.1,-0.05\n").Read().Errors);
+
+    [Theory]
+    [InlineData("-20,0.2,-0.9\n-10,0.02,-0.8\n-5,0.01,-0.4\n-2,0.01,-0.1\n0,0.01,0.2\n10,0.02,0.4\n20,0.2,0.9\n", 1)]
+    [InlineData("-90,1.8,-0.2\n-10,0.02,-0.8\n-5,0.01,-0.4\n-2,0.01,-0.1\n0,0.01,0.3\n10,0.02,1.2\n90,1.8,0.1\n", 1)]
+    public void Lift_and_drag_that_seem_exchanged_are_asked_for(string rows, int more)
+    {
+        var errors = new FellStudy().With(Tip, "alpha_deg,cl,cd\n" + rows).Errors().ToList();
+
+        Assert.Equal(4, errors.Count);
+        Assert.Equal($"polars/clean/tip.csv:5:9: and {more} more like it in column cd; are cl and cd exchanged?", errors[^1]);
     }
 
     [Fact]

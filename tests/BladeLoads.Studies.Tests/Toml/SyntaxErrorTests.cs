@@ -4,6 +4,10 @@ public class SyntaxErrorTests
 {
     [Theory]
     [InlineData("rotor_speed_rpm = 70,5", "cases/clean.toml:13:19: rotor_speed_rpm is '70,5'; write decimals with a point: 70.5")]
+    [InlineData("rotor_speed_rpm = 500,000", "cases/clean.toml:13:19: rotor_speed_rpm is '500,000'; write it without separators: 500000")]
+    [InlineData("rotor_speed_rpm = 1,234", "cases/clean.toml:13:19: rotor_speed_rpm is '1,234'; write 1234 or 1.234, whichever is meant")]
+    [InlineData("rotor_speed_rpm = ,5", "cases/clean.toml:13:19: rotor_speed_rpm is ',5'; write decimals with a point: 0.5")]
+    [InlineData("rotor_speed_rpm = \u22122", "cases/clean.toml:13:19: rotor_speed_rpm is '\u22122', with a minus sign (U+2212); write -2")]
     [InlineData("rotor_speed_rpm = 70 rpm", "cases/clean.toml:13:19: rotor_speed_rpm is '70 rpm'; write the number alone: 70")]
     [InlineData("rotor_speed_rpm = 070", "cases/clean.toml:13:19: rotor_speed_rpm is '070'; write it without leading zeros: 70")]
     [InlineData("rotor_speed_rpm = fast", "cases/clean.toml:13:19: rotor_speed_rpm is 'fast' without quotes; write text in quotes: \"fast\"")]

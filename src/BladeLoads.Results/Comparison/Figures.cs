@@ -1,0 +1,53 @@
+using System.Collections.Immutable;
+
+namespace BladeLoads.Results.Comparison;
+
+/// <summary>A figure of a result and where it was found.</summary>
+/// <param name="WindSpeed">m/s; null for a figure that is itself a wind speed, or belongs to none.</param>
+public sealed record FigureValue(double Value, double? WindSpeed);
+
+/// <summary>A figure that is compared between two results.</summary>
+/// <param name="Name">In words, as files and the screen name it.</param>
+/// <param name="Unit">Of the file; empty for a ratio.</param>
+/// <param name="BySize">Compared by magnitude: of a moment, the sign says the direction and not whether the load has grown.</param>
+/// <param name="Of">Null where the result has no such figure.</param>
+public sealed record Figure(string Name, string Unit, bool BySize, Func<StoredResult, FigureValue?> Of);
+
+/// <summary>The figures that are compared, in their order. A later one (annual energy) joins at the end.</summary>
+public static class Figures
+{
+    public const string ElectricalPower = "electrical_power_kW";
+    public const string Thrust = "thrust_kN";
+
+    // Power held at rated is the same at many wind speeds but for the last digits of a root finder; the summary has the same rule.
+    private const double SameWithin = 1e-9;
+
+    public static ImmutableArray<Figure> All { get; } =
+    [
+        new("best power coefficient", "", false, Largest("power_coefficient")),
+        new("rated wind speed", "m/s", false, Rated),
+        new("largest electrical power", "kW", false, Largest(ElectricalPower)),
+        new("largest thrust", "kN", false, Largest(Thrust)),
+        new("largest root out-of-plane moment", "kNm", true, LargestBySize("aero_root_out_of_plane_moment_kNm")),
+        new("largest root in-plane moment", "kNm", true, LargestBySize("aero_root_in_plane_moment_kNm")),
+        new("largest root flapwise moment", "kNm", true, LargestBySize("aero_root_flapwise_moment_kNm")),
+        new("largest root edgewise moment", "kNm", true, LargestBySize("aero_root_edgewise_moment_kNm")),
+    ];
+
+    // The table has no row at the rated wind speed: the receipt alone knows it.
+    private static FigureValue? Rated(StoredResult result)
+        => result.Receipt?.Summary.RatedWindSpeed is { } rated ? new FigureValue(rated, null) : null;
+
+    private static Func<StoredResult, FigureValue?> Largest(string column) => result => Largest(result.Curve, column, value => value);
+
+    private static Func<StoredResult, FigureValue?> LargestBySize(string column) => result => Largest(result.Curve, column, Math.Abs);
+
+    private static FigureValue? Largest(StoredCurve curve, string column, Func<double, double> size)
+    {
+        var found = curve.Points.Where(p => p[column] is not null).Select(p => new FigureValue(p[column]!.Value, p.WindSpeed)).ToList();
+        if (found.Count == 0)
+            return null;
+        var largest = found.Max(f => size(f.Value));
+        return found.First(f => size(f.Value) >= largest - SameWithin * Math.Abs(largest));
+    }
+}

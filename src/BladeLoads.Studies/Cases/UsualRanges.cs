@@ -1,0 +1,49 @@
+using BladeLoads.Rotor.Blades;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies.Fingerprints;
+
+namespace BladeLoads.Studies.Cases;
+
+/// <summary>
+/// Values that can be, but are more likely in another unit than meant: each is raised as a doubt. Common practice, no source.
+/// </summary>
+internal static class UsualRanges
+{
+    private const double SlowestTip = 5, FastestTip = 150; // m/s
+
+    private static readonly (string Path, double Low, double High, string Sentence)[] Lines =
+    [
+        ("air.density_kg_m3", 0.5, 1.6, "air has 0.5 to 1.6 kg/m3"),
+        ("air.dynamic_viscosity_Pa_s", 1e-5, 3e-5, "air has 1e-5 to 3e-5 Pa s"),
+        ("control.rated_power_kW", 0, 100_000, "no rotor makes more than 100,000 kW; is it in watts?"),
+        ("model.elements", 10, double.PositiveInfinity, "below 10 the loads along the blade are coarse"),
+    ];
+
+    /// <param name="value">In the unit of the file; NaN or 0 where it is wrong, and then nothing more is said.</param>
+    public static void Check(CaseValues values, string path, double value)
+    {
+        var usual = Lines.First(line => line.Path == path);
+        if (values.Has(path) && (value > 0 && value < usual.Low || value > usual.High))
+            values.Doubt(path, $"is {CanonicalText.Of(value)}; {usual.Sentence}");
+    }
+
+    /// <summary>The tip speed at the highest rotor speed that the case states.</summary>
+    /// <param name="cone">rad</param>
+    public static void CheckTipSpeed(CaseValues values, Control strategy, Blade blade, double cone)
+    {
+        var (path, rotorSpeed) = strategy switch
+        {
+            Control.VariableSpeed variable => ("control.max_rotor_speed_rpm", variable.MaxRotorSpeed),
+            Control.FixedSpeed fixedSpeed => ("control.rotor_speed_rpm", fixedSpeed.RotorSpeed),
+            Control.Schedule schedule => ("control.schedule", schedule.Points.Max(point => point.RotorSpeed)),
+            _ => throw new ArgumentOutOfRangeException(nameof(strategy)),
+        };
+        var tipSpeed = rotorSpeed * blade.TipRadius * Math.Cos(cone);
+        if (!values.Has(path) || !(tipSpeed is > 0 and < SlowestTip or > FastestTip))
+            return;
+        var rpm = CanonicalText.Of(Math.Round(rotorSpeed * 60 / Math.Tau, 6));
+        var found = strategy is Control.Schedule ? $"goes up to {rpm} rpm" : $"is {rpm}";
+        values.Doubt(path, $"{found}, a tip speed of {CanonicalText.Of(Math.Round(tipSpeed, 2))} m/s; "
+            + "5 to 150 m/s are usual, and rotor speeds are in rpm");
+    }
+}
