@@ -13,6 +13,7 @@ internal static class Runs
 {
     public static ResultsFolder Results(TemporaryFolder folder) => new(folder.Path, "fell");
 
+    /// <param name="again">Left out: what is current is solved all the same.</param>
     public static RunResult Solve(
         ResultsFolder results, IReadOnlyCollection<StudyCase> cases, SolveCase? solve = null, int workers = 2, IDisk? disk = null,
         ILogger? log = null, Action<int>? waitForFile = null, int solverVersion = 1, Again? again = null,
@@ -25,6 +26,6 @@ internal static class Runs
             TimeProvider.System, waitForFile ?? (_ => { }));
         var progress = new RunProgress(cases.Count, cases.Sum(c => CaseGroups.Estimate(c.Rotor)), TimeProvider.System);
         using var claims = new Claims(results, disk ?? new Disk());
-        return StudyRun.Solve(cases, again ?? Again.Nothing, work, claims, workers, progress, logger, stopping, pause);
+        return StudyRun.Solve(cases, again ?? new Again([.. cases.Select(c => c.Name)], Lost: false), work, claims, workers, progress, logger, stopping, pause);
     }
 }

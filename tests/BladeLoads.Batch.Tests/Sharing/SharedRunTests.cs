@@ -31,7 +31,7 @@ public sealed class SharedRunTests : IDisposable
             solved.Add(rotor.WindSpeeds.Length);
             return FellRotor.Curve(rotor);
         }
-        var results = await Task.WhenAll(Enumerable.Range(0, 2).Select(_ => Task.Run(() => Runs.Solve(Results, cases, Solve))));
+        var results = await Task.WhenAll(Enumerable.Range(0, 2).Select(_ => Task.Run(() => Runs.Solve(Results, cases, Solve, again: Again.Nothing))));
         Assert.Equal(Enumerable.Range(1, 120), solved.Order());
         Assert.All(results, r => Assert.Equal((120, 0, 0), (r.Solved + r.SolvedByAnother, r.Failed, r.NotRun)));
         Assert.Equal(120, results.Sum(r => r.Solved));
@@ -132,7 +132,7 @@ public sealed class SharedRunTests : IDisposable
         StudyCase[] cases = [FellRotor.Case("a")];
         Runs.Solve(Results, cases);
         Assert.Equal(1, Runs.Solve(Results, cases, again: new Again(["a"], Lost: true)).Solved);
-        Assert.Equal(1, Runs.Solve(Results, cases).SolvedByAnother);   // planned before the other run had published it
+        Assert.Equal(1, Runs.Solve(Results, cases, again: Again.Nothing).SolvedByAnother);   // planned before the other run had published it
     }
 
     [Fact]
@@ -144,7 +144,7 @@ public sealed class SharedRunTests : IDisposable
         var bytes = File.ReadAllBytes(table);
         bytes[^2] ^= 1;
         File.WriteAllBytes(table, bytes);
-        Assert.Equal(1, Runs.Solve(Results, cases).Solved);
+        Assert.Equal(1, Runs.Solve(Results, cases, again: Again.Nothing).Solved);
     }
 
     private void Publish(StudyCase studyCase)
