@@ -95,7 +95,7 @@ internal sealed class KnownResults(ResultsFolder results, PlanIndex? index, Time
             return [];
         var inPlace = Directory.EnumerateDirectories(results.Study).Select(path => Path.GetFileName(path))
             .Where(name => ResultsFolder.Objection(name) is null);
-        var replaced = ReplacedResult.All(results).Select(r => $"replaced/{r.Case}/{Path.GetFileName(r.Folder)}");
+        var replaced = ReplacedResult.All(results).Where(r => r.IsResult).Select(r => $"replaced/{r.Case}/{Path.GetFileName(r.Folder)}");
         return [.. inPlace.Concat(replaced)];
     }
 

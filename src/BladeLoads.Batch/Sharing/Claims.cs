@@ -81,8 +81,8 @@ public sealed class Claims : IDisposable
                 _disk.CreateFolder(_results.Claims);
                 return _disk.TryLock(_results.Claim(caseName));
             }
-            // Another run that ended has just removed the folder as an empty one.
-            catch (IOException e) when (tries < TriesAtMost && DiskTrouble.IsGone(e))
+            // Another run that ended has just removed the folder as an empty one, or a third has made it anew.
+            catch (IOException e) when (tries < TriesAtMost && DiskTrouble.HasComeOrGone(e))
             {
             }
         }

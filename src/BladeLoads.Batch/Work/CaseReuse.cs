@@ -39,7 +39,7 @@ public sealed class CaseReuse(
 
     private CaseOutcome.Reused? BringBack(StudyCase studyCase, FoundResult found)
     {
-        foreach (var replaced in ReplacedResult.Of(results, studyCase.Name))
+        foreach (var replaced in ReplacedResult.Of(results, studyCase.Name).Where(r => r.IsResult))
             if (WholeResult(replaced.Folder, studyCase) is { } receipt && ReturnedResult.Exchange(replaced, results, disk))
             {
                 if (receipt.Title != studyCase.Title)
@@ -52,7 +52,7 @@ public sealed class CaseReuse(
     // The other case may have been solved anew since the plan was made: then the result is among those that this replaced.
     private CaseOutcome.Reused? Copy(StudyCase studyCase, FoundResult found)
     {
-        var places = ReplacedResult.Of(results, found.Case).Select(r => r.Folder).Prepend(Path.Join(results.Study, found.Folder));
+        var places = ReplacedResult.Of(results, found.Case).Where(r => r.IsResult).Select(r => r.Folder).Prepend(Path.Join(results.Study, found.Folder));
         foreach (var folder in places)
             if (WholeResult(folder, studyCase) is { } receipt && FilesOf(folder, receipt) is { } files)
             {

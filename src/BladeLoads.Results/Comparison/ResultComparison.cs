@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using BladeLoads.Results.Receipts;
 
 namespace BladeLoads.Results.Comparison;
 
@@ -10,8 +9,8 @@ public static class ResultComparison
     private const double SameWindSpeedWithin = 1e-9;
 
     /// <summary>Two result folders, whatever is in them.</summary>
-    /// <param name="why">What the two were made from differs in this, in one sentence.</param>
-    public static CaseComparison OfFolders(string old, string now, Func<Receipt, Receipt, string> why)
+    /// <param name="why">In what the two were made from differs, in one sentence; asked where both have a receipt.</param>
+    public static CaseComparison OfFolders(string old, string now, Func<StoredResult, StoredResult, string> why)
     {
         StoredResult? before = null, after = null;
         var troubles = new List<string>();
@@ -37,12 +36,12 @@ public static class ResultComparison
             : Between(before, after, why);
     }
 
-    public static CaseComparison.Compared Between(StoredResult old, StoredResult now, Func<Receipt, Receipt, string> why)
+    public static CaseComparison.Compared Between(StoredResult old, StoredResult now, Func<StoredResult, StoredResult, string> why)
     {
         var (common, windSpeeds) = Match(old.Curve, now.Curve);
         return new CaseComparison.Compared(
             now.Case, old.Case,
-            old.Receipt is { } was && now.Receipt is { } receipt ? why(was, receipt) : "",
+            old.Receipt is null || now.Receipt is null ? "" : why(old, now),
             [.. Figures.All.Select(f => Change(f.Name, f.Unit, f.BySize, f.Of(old), f.Of(now)))],
             [
                 LargestChange("electrical power where it changed most", "kW", common, Figures.ElectricalPower),

@@ -38,7 +38,7 @@ public sealed record ResultSet(string Name, string Folder, bool IsSingle, Immuta
     /// Every case of either beside each other; two single results are compared whatever they are called, and a single one with the
     /// case of its name in a set.
     /// </summary>
-    public static ImmutableArray<CaseComparison> Compare(ResultSet old, ResultSet now, Func<Receipt, Receipt, string> why)
+    public static ImmutableArray<CaseComparison> Compare(ResultSet old, ResultSet now, Func<StoredResult, StoredResult, string> why)
     {
         if (old.IsSingle && now.IsSingle)
             return [ResultComparison.OfFolders(old.Folder, now.Folder, why)];
@@ -51,7 +51,7 @@ public sealed record ResultSet(string Name, string Folder, bool IsSingle, Immuta
         return [.. names.AsParallel().AsOrdered().Select(n => Compare(n, old.IsSingle ? old.Folder : old.Of(n), now.IsSingle ? now.Folder : now.Of(n), why))];
     }
 
-    private static CaseComparison Compare(string name, string? old, string? now, Func<Receipt, Receipt, string> why) => (old, now) switch
+    private static CaseComparison Compare(string name, string? old, string? now, Func<StoredResult, StoredResult, string> why) => (old, now) switch
     {
         ({ } before, { } after) => ResultComparison.OfFolders(before, after, why),
         (_, null) => new CaseComparison.NotCompared(name, name, NoComparison.OnlyOld, ""),

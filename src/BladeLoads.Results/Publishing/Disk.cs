@@ -89,7 +89,7 @@ public sealed partial class Disk : IDisk
         {
             return true;
         }
-        catch (IOException) when (Directory.Exists(path) && Directory.EnumerateFileSystemEntries(path).Any())
+        catch (IOException e) when (e.HResult == Errno.NotEmpty || Directory.Exists(path) && Directory.EnumerateFileSystemEntries(path).Any())
         {
             return false;
         }

@@ -10,11 +10,13 @@ internal static class Errno
     public const int TryAgain = 11;
     public const int AccessDenied = 13;
     public const int Busy = 16;
+    public const int Exists = 17;
     public const int Invalid = 22;
     public const int TextFileBusy = 26;
     public const int NoSpace = 28;
     public const int ReadOnlyFileSystem = 30;
     public const int Unknown = 38;
+    public const int NotEmpty = 39;
     public const int NotSupported = 95;
     public const int QuotaExceeded = 122;
 }
@@ -32,9 +34,9 @@ public static class DiskTrouble
         HResult: Errno.TryAgain or Errno.Busy or Errno.TextFileBusy or WindowsSharing or WindowsLock
     };
 
-    /// <summary>What was asked for is not there, or the folder it was to lie in.</summary>
-    public static bool IsGone(IOException trouble)
-        => trouble is FileNotFoundException or DirectoryNotFoundException || trouble.HResult == Errno.NoEntry;
+    /// <summary>What was asked for has just gone, or come, by another's hand: trying again at once can help.</summary>
+    public static bool HasComeOrGone(IOException trouble)
+        => trouble is FileNotFoundException or DirectoryNotFoundException || trouble.HResult is Errno.NoEntry or Errno.Exists;
 
     /// <summary>No case can be written any more: no room, no permission, or a device that fails. Other cases would fare no better.</summary>
     public static bool StopsTheRun(Exception trouble) => trouble is UnauthorizedAccessException or IOException

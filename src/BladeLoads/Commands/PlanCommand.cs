@@ -4,6 +4,7 @@ using BladeLoads.Batch.Plan.Index;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Screen;
+using BladeLoads.Studies;
 using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Commands;
@@ -14,11 +15,8 @@ internal static class PlanCommand
     public static int Run(string path, string resultsFolder, string[] only, bool asJson, Surroundings surroundings)
     {
         var root = Path.GetFullPath(resultsFolder);
-        if (AllCurrent(path, root, only, surroundings) is var (known, quick))
-        {
-            Tell(quick, known, asJson, surroundings);
+        if (TellAllCurrent(path, root, only, asJson, surroundings))
             return ExitCode.Good;
-        }
         var study = AskedStudy.Read(path, surroundings);
         FindingLines.Write(study.Asked, surroundings.Error, withSource: surroundings.ErrorIsTerminal);
         var results = new ResultsFolder(root, study.Asked.Name);
@@ -32,20 +30,24 @@ internal static class PlanCommand
     }
 
     // The way of most mornings: a whole study of which nothing has changed need not be read to know that.
-    private static (ResultsFolder, ImmutableArray<CaseStanding>)? AllCurrent(
-        string path, string root, string[] only, Surroundings surroundings)
+    private static bool TellAllCurrent(string path, string root, string[] only, bool asJson, Surroundings surroundings)
     {
         if (string.IsNullOrWhiteSpace(path) || path.Contains('\0'))
-            return null;
+            return false;
         var folder = Path.TrimEndingDirectorySeparator(Path.GetFullPath(path));
         if (Path.GetFileName(folder) is not { Length: > 0 } name || !Directory.Exists(folder))
-            return null;
+            return false;
         var results = new ResultsFolder(root, name);
         if (LookAt(results, surroundings).AllCurrent(folder, new DiskFiles()) is not { } all)
-            return null;
+            return false;
         var choice = new CaseChoice([.. only]);
-        var meant = only.Length == 0 ? all : [.. all.Where(c => choice.Includes(c.Name))];
-        return meant.IsEmpty ? null : (results, meant);
+        var meant = only.Length == 0 ? all.Cases : [.. all.Cases.Where(c => choice.Includes(c.Name))];
+        if (meant.IsEmpty)
+            return false;
+        FindingLines.Write(
+            new Study(name, folder, null, [], [], [], all.Doubts), surroundings.Error, withSource: surroundings.ErrorIsTerminal);
+        Tell(meant, results, asJson, surroundings);
+        return true;
     }
 
     private static StudyLook LookAt(ResultsFolder results, Surroundings surroundings)

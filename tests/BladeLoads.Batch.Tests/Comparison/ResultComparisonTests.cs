@@ -158,7 +158,7 @@ public sealed class ResultComparisonTests : IDisposable
     {
         var old = WriteReceipt(WriteCurve(_folder, "old", new Point(8, 1)), "clean", 10, new Dictionary<string, int>(), values: Values("1.225", "a"));
         var now = WriteReceipt(WriteCurve(_folder, "new", new Point(8, 1)), "clean", 10, new Dictionary<string, int>(), values: Values("1.05", "b"));
-        Assert.Equal("air.density_kg_m3 1.225 -> 1.05; section fell-30: table changed", Compare(old, now).Why);
+        Assert.Equal("air.density_kg_m3 1.225 -> 1.05; polar fell-30.csv: table changed", Compare(old, now).Why);
 
         static Dictionary<string, string> Values(string density, string digit) => new()
         {

@@ -122,7 +122,17 @@ public sealed class PlanIndexTests : IDisposable
     }
 
     [Fact]
-    public void A_study_with_a_finding_is_read_every_time()
+    public void Doubts_are_told_from_the_index_as_they_were_when_the_study_was_read()
+    {
+        Write("polars/clean/root.csv", "alpha_deg,cl,cd\n-180,-0.8,0.02\n0,0.2,0.01\n180,1.1,0.015\n");
+        Solve();
+        var doubts = new StudyLook(Results, "0.0.0", 1, Later).AllCurrent(Folder, _files)!.Doubts;
+        Assert.Contains(doubts, d => d.Text.StartsWith("cl is 1.1 at 180 deg", StringComparison.Ordinal));
+        Assert.Equal(StudyReader.Read(Folder).Doubts, doubts);
+    }
+
+    [Fact]
+    public void A_study_with_an_error_is_read_every_time()
     {
         Write("cases/b.toml", "title = 7\n");
         Solve();
@@ -215,7 +225,7 @@ public sealed class PlanIndexTests : IDisposable
     private StudyPlan Plan() => new StudyLook(Results, "0.0.0", 1, Later).Plan(StudyReader.Read(Folder, Later));
 
     private ImmutableArray<string>? Quick(TimeProvider time) => new StudyLook(Results, "0.0.0", 1, time).AllCurrent(Folder, _files) is { } all
-        ? [.. all.Select(c => $"{c.Name}: {c.State.Word}")] : null;
+        ? [.. all.Cases.Select(c => $"{c.Name}: {c.State.Word}")] : null;
 
     private sealed class InAnHour : TimeProvider
     {

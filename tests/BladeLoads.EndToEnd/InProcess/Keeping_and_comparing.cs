@@ -80,7 +80,7 @@ public sealed class Keeping_and_comparing : IDisposable
         Assert.Contains("\"difference_percent\": -50", Run("compare", "signed", "slow", "--json").Out, StringComparison.Ordinal);
         var csv = Path.Join(_folder.Path, "moved.csv");
         Assert.Equal(0, Run("compare", "clean", "slow", "--csv", csv).Code);
-        Assert.Contains("slow,clean,compared,largest thrust,kN,6,3,3,3,-3,-50,,\n", File.ReadAllText(csv), StringComparison.Ordinal);
+        Assert.Contains("slow,clean,compared,largest thrust,kN,6,3,3,3,-3,-50,,rotor.name clean -> slow\n", File.ReadAllText(csv), StringComparison.Ordinal);
         Assert.Equal(3, Run("compare", "clean", "slow", "--csv", Path.Join(_folder.Path, "nowhere", "moved.csv")).Code);
     }
 
@@ -166,7 +166,7 @@ public sealed class Keeping_and_comparing : IDisposable
     {
         using var output = new StringWriter { NewLine = "\n" };
         using var error = new StringWriter { NewLine = "\n" };
-        var study = FellRotor.Study([.. _cases.Select(n => FellRotor.Case(n, values: ("air.density_kg_m3", _density)))]);
+        var study = FellRotor.Study([.. _cases.Select(n => FellRotor.Case(n, values: [("air.density_kg_m3", _density), ("rotor.name", n)]))]);
         SolveCase solve = (rotor, _) => FellRotor.Scaled(FellRotor.Curve(rotor), _factor);
         var surroundings = new Surroundings(output, error, false, false, _ => study, solve, new Disk(), TimeProvider.System, _ => { }) { Ask = ask };
         var code = CommandLine.Run([.. arguments, "--results", _folder.Path], surroundings);

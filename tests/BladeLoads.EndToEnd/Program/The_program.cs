@@ -32,13 +32,13 @@ public sealed class The_program : IDisposable
                 Directory.EnumerateFiles(Path.Join(_results, name)).Select(f => Path.GetFileName(f)!).Order());
         Assert.Equal(10, File.ReadAllLines(Path.Join(_results, "clean", "power-curve.csv")).Length);
         Assert.Single(Directory.EnumerateFiles(Path.Join(_results, "logs"), "*.jsonl"));
-        var before = TemporaryFolder.Contents(_results);
+        var before = Results();
 
         var second = Run("run", "beck");
         Assert.True(second.ExitCode == 0, second.All);
         Assert.StartsWith("all 3 cases are current; nothing to solve\n", second.Out, StringComparison.Ordinal);
         Assert.Equal(first.Out[first.Out.IndexOf("\ncase ", StringComparison.Ordinal)..], second.Out[second.Out.IndexOf("\ncase ", StringComparison.Ordinal)..]);
-        Assert.Equal(before, TemporaryFolder.Contents(_results));
+        Assert.Equal(before, Results());
     }
 
     [Fact]
@@ -232,6 +232,10 @@ public sealed class The_program : IDisposable
 
     [Fact]
     public void Tells_its_version() => Assert.Matches(@"^bladeloads \d+\.\d+\.\d+, solver version \d+\n$", Run("--version").Out);
+
+    /// <summary>All but the index, which knows better after two seconds.</summary>
+    private Dictionary<string, string> Results()
+        => TemporaryFolder.Contents(_results).Where(f => f.Key != ".index").ToDictionary(StringComparer.Ordinal);
 
     private Finished Run(params string[] arguments) => Started.Run(_folder.Path, arguments);
 

@@ -4,6 +4,7 @@ using System.Globalization;
 using System.Numerics;
 using System.Security.Cryptography;
 using System.Text;
+using BladeLoads.Studies;
 using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Batch.Plan.Index;
@@ -66,6 +67,14 @@ internal static class IndexFile
                 writer.Write(indexed.Title);
                 writer.Write(indexed.Fingerprint);
             }
+            writer.Write(index.Doubts.Length);
+            foreach (var doubt in index.Doubts)
+            {
+                writer.Write(doubt.File);
+                writer.Write(doubt.Line);
+                writer.Write(doubt.Column);
+                writer.Write(doubt.Text);
+            }
             WriteResults(writer, index.Results);
         }
         stream.Write(ChecksumOf(stream.GetBuffer().AsSpan(0, (int)stream.Length)));
@@ -83,7 +92,7 @@ internal static class IndexFile
             var reader = new IndexReader(bytes.AsMemory(0, length));
             return reader.Text() != Form ? null : new PlanIndex(
                 reader.Text(), reader.Whole(), ReadSight(reader), reader.Many(r => new IndexedCase(r.Text(), r.Text(), r.Text())),
-                ReadResults(reader));
+                reader.Many(r => new InputFinding(r.Text(), r.Whole(), r.Whole(), r.Text())), ReadResults(reader));
         }
         catch (Exception e) when (e is ArgumentException or IndexOutOfRangeException)
         {

@@ -13,11 +13,13 @@ public sealed record IndexedCase(string Name, string Title, string Fingerprint);
 /// as far as the stamps of the files bear it out; its loss, or damage to it, costs time and nothing else.
 /// </summary>
 /// <param name="ToolVersion">Another version may read the same files otherwise.</param>
-/// <param name="Sight">What reading the study depended on; null where it had findings, which must be told every time.</param>
+/// <param name="Sight">What reading the study depended on; null where it had errors, whose cases have no values to plan with.</param>
 /// <param name="Cases">All cases of the study; empty without a sight.</param>
+/// <param name="Doubts">What was told of the study, and is to be told again.</param>
 /// <param name="Results">By folder, relative to the study's results.</param>
 public sealed record PlanIndex(
-    string ToolVersion, int SolverVersion, StudySight? Sight, ImmutableArray<IndexedCase> Cases, IReadOnlyDictionary<string, ResultFacts> Results)
+    string ToolVersion, int SolverVersion, StudySight? Sight, ImmutableArray<IndexedCase> Cases, ImmutableArray<InputFinding> Doubts,
+    IReadOnlyDictionary<string, ResultFacts> Results)
 {
     internal ResultFacts? Find(string folder) => Results.GetValueOrDefault(folder);
 
@@ -29,10 +31,11 @@ public sealed record PlanIndex(
     /// <summary>Of a study that was read and the results that were looked at for it.</summary>
     internal static PlanIndex Of(Study study, KnownResults known, string toolVersion, int solverVersion)
     {
-        var sight = study.Errors.IsEmpty && study.Doubts.IsEmpty && study.Rejected.IsEmpty ? study.Sight : null;
+        var sight = study.Errors.IsEmpty && study.Rejected.IsEmpty ? study.Sight : null;
         return new PlanIndex(
             toolVersion, solverVersion, sight,
             sight is null ? [] : [.. study.Cases.Select(c => new IndexedCase(c.Name, c.Title, c.Fingerprint))],
+            sight is null ? [] : study.Doubts,
             known.Facts.ToDictionary(StringComparer.Ordinal));
     }
 }

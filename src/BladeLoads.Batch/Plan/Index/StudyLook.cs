@@ -18,7 +18,7 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
     /// an input nor a receipt is opened that has not changed.
     /// </summary>
     /// <param name="studyFolder">Absolute path.</param>
-    public ImmutableArray<CaseStanding>? AllCurrent(string studyFolder, IStudyFiles files)
+    public CurrentStudy? AllCurrent(string studyFolder, IStudyFiles files)
     {
         if (_index is not { Sight: { } sight } index || sight.Root != studyFolder || sight.LookAgain(files, time) is not { } again)
             return null;
@@ -33,7 +33,7 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
         }
         if (known.HasLearned || !ReferenceEquals(again, sight))
             IndexFile.Write(results.Index, index with { Sight = again, Results = Merged(index, known) });
-        return standings.DrainToImmutable();
+        return new CurrentStudy(standings.DrainToImmutable(), index.Doubts);
     }
 
     /// <summary>The plan of a study that was read.</summary>
@@ -78,3 +78,7 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
         return all;
     }
 }
+
+/// <summary>A study every case of which is current.</summary>
+/// <param name="Doubts">What there is to be told of its inputs.</param>
+public sealed record CurrentStudy(ImmutableArray<CaseStanding> Cases, ImmutableArray<InputFinding> Doubts);
