@@ -54,4 +54,15 @@ internal static class CaseEvents
 
     public static void Failed(this ILogger log, StudyCase studyCase, string reason, Exception? details)
         => log.Error(details, "Case {Case} failed: {Reason}", studyCase.Name, reason);
+
+    public static void SolvedByAnother(this ILogger log, StudyCase studyCase)
+        => log.Information("Case {Case} was solved by another run meanwhile", studyCase.Name);
+
+    public static void WaitsForAnother(this ILogger log, StudyCase studyCase, int? process)
+    {
+        if (process is { } number)
+            log.Warning("Case {Case}: waiting for process {Process}, another run that is solving it", studyCase.Name, number);
+        else
+            log.Warning("Case {Case}: waiting for another run that is solving it", studyCase.Name);
+    }
 }

@@ -16,7 +16,9 @@ public sealed class RunLog : IDisposable
 {
     private readonly Logger _logger;
 
-    private RunLog(Logger logger, string? file) => (_logger, File) = (logger, file);
+    private readonly ReportOnce? _once;
+
+    private RunLog(Logger logger, string? file, ReportOnce? once) => (_logger, File, _once) = (logger, file, once);
 
     public ILogger Logger => _logger;
 
@@ -24,7 +26,7 @@ public sealed class RunLog : IDisposable
     public string? File { get; }
 
     /// <summary>A log that writes to the screen alone, for work that leaves no trace.</summary>
-    public static RunLog OnScreen(ILogEventSink screen) => new(Configuration(screen).CreateLogger(), null);
+    public static RunLog OnScreen(ILogEventSink screen) => new(Configuration(screen).CreateLogger(), null, null);
 
     /// <param name="folder">Created if need be.</param>
     /// <param name="report">Takes one line for the screen, at most once.</param>
@@ -41,7 +43,7 @@ public sealed class RunLog : IDisposable
                     .WriteTo.Fallible(
                         to => to.File(new PrintableFormatter(new CompactJsonFormatter()), file, fileSizeLimitBytes: null), once)
                     .CreateLogger(),
-                file);
+                file, once);
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
@@ -50,7 +52,17 @@ public sealed class RunLog : IDisposable
         }
     }
 
-    public void Dispose() => _logger.Dispose();
+    public void Dispose()
+    {
+        try
+        {
+            _logger.Dispose();
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            _once?.Report(e);   // the last lines of a full disk's log are written when it is closed
+        }
+    }
 
     private static LoggerConfiguration Configuration(ILogEventSink screen)
         => new LoggerConfiguration().WriteTo.Sink(screen, LogEventLevel.Warning);

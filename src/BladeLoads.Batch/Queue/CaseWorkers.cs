@@ -16,9 +16,10 @@ public static class CaseWorkers
 {
     /// <summary>Returns when every job has ended, well or not.</summary>
     /// <param name="jobs">Each a group of case names: jobs carry identities only.</param>
-    /// <param name="work">Solves the case of that name; called by several workers at once, for different cases.</param>
+    /// <param name="work">Solves the cases of a job; called by several workers at once, for different jobs.</param>
     /// <returns>What jobs ended with beside success: faults of ours, since <paramref name="work"/> is to keep its troubles to itself.</returns>
-    public static ImmutableArray<Exception> Run(ImmutableArray<ImmutableArray<string>> jobs, int workers, Action<string> work)
+    public static ImmutableArray<Exception> Run(
+        ImmutableArray<ImmutableArray<string>> jobs, int workers, Action<IReadOnlyList<string>> work)
     {
         if (jobs.IsEmpty)
             return [];

@@ -10,6 +10,9 @@ public abstract record CaseOutcome
     /// <summary>Its result is published.</summary>
     public sealed record Solved(CaseSummary Summary, int RotorSolves) : CaseOutcome;
 
+    /// <summary>Another run at work on the same study has published its result meanwhile.</summary>
+    public sealed record SolvedByAnother(CaseSummary Summary) : CaseOutcome;
+
     /// <summary>A result of its very values was there, and is in its place now.</summary>
     /// <param name="From">Where it was, relative to the study's results; the case's own folder where only the title was another.</param>
     public sealed record Reused(CaseSummary Summary, string From) : CaseOutcome;

@@ -13,7 +13,10 @@ namespace BladeLoads.Batch.Work;
 /// <summary>The physics, as the batch knows it.</summary>
 public delegate PowerCurve SolveCase(RotorCase rotorCase, CancellationToken cancellation);
 
-/// <summary>Solves one case and publishes its result: tables, log and receipt. What goes wrong with it stays with it.</summary>
+/// <summary>
+/// Solves one case and puts its result in its place: tables, log and receipt. What goes wrong with it stays with it. It is done only
+/// when it is settled too, which serves several cases at once.
+/// </summary>
 /// <param name="reuse">Looks for a result that is there already; null to solve whatever is asked for.</param>
 /// <param name="waitForFile">Waits between two tries at a file in use; the argument counts the tries made, from 1.</param>
 public sealed class CaseWork(
@@ -41,13 +44,48 @@ public sealed class CaseWork(
         }
         catch (Exception e) when (DiskTrouble.StopsTheRun(e))
         {
-            throw new NoRoomForResultsException(results.Study, e);
+            throw NoRoom(e);
         }
         // Whatever it is, it must not take the neighbours of this case with it.
         catch (Exception e)
         {
             return Fail(studyCase, e, log);
         }
+    }
+
+    /// <summary>Returns when all results that were put in place before would survive a power cut.</summary>
+    /// <exception cref="NoRoomForResultsException">They would not, and nothing more can be written.</exception>
+    public void Settle()
+    {
+        try
+        {
+            WithPatience(publisher.Settle);
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            throw NoRoom(e);
+        }
+    }
+
+    /// <summary>What is to be told where nothing more can be written.</summary>
+    public NoRoomForResultsException NoRoom(Exception trouble) => new(results.Study, trouble);
+
+    /// <summary>Has a case failed without trying it.</summary>
+    /// <param name="reason">One sentence, fit for a terminal.</param>
+    /// <exception cref="NoRoomForResultsException">Nothing more can be written.</exception>
+    public CaseOutcome.Failed GiveUp(StudyCase studyCase, string reason)
+    {
+        using var log = new CaseLog(runLog, studyCase.Name);
+        return Fail(studyCase, reason, null, log);
+    }
+
+    /// <summary>The receipt of the whole result, made from these values by this solver, that lies in the case's place; null for none.</summary>
+    public Receipt? FindResult(StudyCase studyCase)
+    {
+        var folder = results.Case(studyCase.Name);
+        return ReceiptFile.Read(folder) is ReceiptReading.Readable { Receipt: var receipt }
+            && receipt.Fingerprint == studyCase.Fingerprint && receipt.SolverVersion == identity.SolverVersion
+            && ResultCheck.IsWhole(folder, receipt) ? receipt : null;
     }
 
     private CaseOutcome.Reused? Reuse(StudyCase studyCase, CaseLog log)
@@ -74,7 +112,7 @@ public sealed class CaseWork(
         files.Add(new(CaseLog.FileName, log.ToBytes()));
         files.Add(new(Receipt.FileName, ReceiptFile.Write(ReceiptOf(studyCase, summary, files, seconds))));
         WithPatience(() => TableArchive.Keep(studyCase.Tables, results, publisher, _tablesKept));
-        WithPatience(() => publisher.PublishCase(studyCase.Name, files));
+        WithPatience(() => publisher.Place(studyCase.Name, files));
         return new CaseOutcome.Solved(summary, curve.RotorSolves);
     }
 
@@ -89,7 +127,12 @@ public sealed class CaseWork(
         var reason = isOfTheDisk
             ? $"its result cannot be written: {DiskTrouble.Reason(trouble)}"
             : $"fault in BladeLoads, please report: {Printable.Of(trouble.Message)}";
-        log.Logger.Failed(studyCase, reason, isOfTheDisk ? null : trouble);
+        return Fail(studyCase, reason, isOfTheDisk ? null : trouble, log);
+    }
+
+    private CaseOutcome.Failed Fail(StudyCase studyCase, string reason, Exception? details, CaseLog log)
+    {
+        log.Logger.Failed(studyCase, reason, details);
         var record = new FailureRecord(
             studyCase.Name, studyCase.Title, studyCase.Fingerprint, identity.SolverVersion, time.GetUtcNow(), reason, log.Lines);
         try
@@ -98,7 +141,7 @@ public sealed class CaseWork(
         }
         catch (Exception e) when (DiskTrouble.StopsTheRun(e))
         {
-            throw new NoRoomForResultsException(results.Study, e);
+            throw NoRoom(e);
         }
         catch (IOException e)
         {

@@ -38,6 +38,7 @@ public static class StudySummary
         var (state, summary) = (outcome, planned.State) switch
         {
             (CaseOutcome.Solved solved, _) => ("current", solved.Summary),
+            (CaseOutcome.SolvedByAnother solved, _) => ("current", solved.Summary),
             (CaseOutcome.Reused reused, _) => ("current", reused.Summary),
             (CaseOutcome.Failed, CaseState.Current current) => ("failed", current.Read()),
             (CaseOutcome.Failed, _) => ("failed", null),

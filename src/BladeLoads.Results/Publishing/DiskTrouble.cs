@@ -4,16 +4,19 @@ namespace BladeLoads.Results.Publishing;
 internal static class Errno
 {
     public const int NotPermitted = 1;
+    public const int NoEntry = 2;
     public const int Interrupted = 4;
     public const int InputOutput = 5;
     public const int TryAgain = 11;
     public const int AccessDenied = 13;
     public const int Busy = 16;
+    public const int Exists = 17;
     public const int Invalid = 22;
     public const int TextFileBusy = 26;
     public const int NoSpace = 28;
     public const int ReadOnlyFileSystem = 30;
     public const int Unknown = 38;
+    public const int NotEmpty = 39;
     public const int NotSupported = 95;
     public const int QuotaExceeded = 122;
 }
@@ -30,6 +33,10 @@ public static class DiskTrouble
     {
         HResult: Errno.TryAgain or Errno.Busy or Errno.TextFileBusy or WindowsSharing or WindowsLock
     };
+
+    /// <summary>What was asked for has just gone, or come, by another's hand: trying again at once can help.</summary>
+    public static bool HasComeOrGone(IOException trouble)
+        => trouble is FileNotFoundException or DirectoryNotFoundException || trouble.HResult is Errno.NoEntry or Errno.Exists;
 
     /// <summary>No case can be written any more: no room, no permission, or a device that fails. Other cases would fare no better.</summary>
     public static bool StopsTheRun(Exception trouble) => trouble is UnauthorizedAccessException or IOException

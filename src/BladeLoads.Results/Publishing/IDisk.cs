@@ -24,9 +24,27 @@ public interface IDisk
     /// <summary>Deletes a file, or a folder with all that is in it; what is not there is no error.</summary>
     void Delete(string path);
 
+    /// <summary>Deletes a folder with nothing in it; true where it is gone then, or was not there. False where something is in it.</summary>
+    bool TryDeleteEmptyFolder(string path);
+
     /// <summary>
     /// Takes the lock of a file, created if need be, until the returned value is disposed or the process dies: no lock outlives its
-    /// owner. Null while another holds it.
+    /// owner. Null while another holds it. While the lock is held the file stands at its path, unless its holder deletes it.
     /// </summary>
-    IDisposable? TryLock(string path);
+    ILockedFile? TryLock(string path);
+
+    /// <summary>What stands in a small file, even while another process has its lock.</summary>
+    byte[] ReadThoughLocked(string path);
+}
+
+/// <summary>A file that no other process can lock until this is disposed.</summary>
+public interface ILockedFile : IDisposable
+{
+    /// <summary>No more than this is ever read.</summary>
+    const int MostBytes = 4096;
+
+    byte[] Read();
+
+    /// <summary>Replaces what the file held. It would survive the end of the process, not a power cut.</summary>
+    void Write(ReadOnlySpan<byte> bytes);
 }

@@ -1,3 +1,5 @@
+using System.Collections.Concurrent;
+
 namespace BladeLoads.Results.Publishing;
 
 /// <summary>A file of a result, by name.</summary>
@@ -12,6 +14,8 @@ public sealed class Publisher : IDisposable
     private readonly IDisk _disk;
     private readonly ResultsFolder _folder;
     private readonly RunMark _mark;
+    private readonly Lock _settling = new();
+    private readonly ConcurrentQueue<Placed> _placed = new();
 
     private Publisher(IDisk disk, ResultsFolder folder, RunMark mark) => (_disk, _folder, _mark) = (disk, folder, mark);
 
@@ -53,11 +57,22 @@ public sealed class Publisher : IDisposable
         }
     }
 
-    /// <summary>Publishes the folder of a case; one that was there before moves to the replaced results, whole.</summary>
+    /// <summary>Publishes the folder of a case, for good; one that was there before moves to the replaced results, whole.</summary>
     /// <exception cref="IOException">The system refused; what was there before is there still, or else the new result is, whole.</exception>
     /// <exception cref="UnauthorizedAccessException">As above.</exception>
     /// <exception cref="ArgumentException">The name cannot be that of a result folder.</exception>
     public void PublishCase(string caseName, IEnumerable<ResultContent> files)
+    {
+        Place(caseName, files);
+        Settle();
+    }
+
+    /// <summary>
+    /// Puts the folder of a case in its place, whole and with its files flushed. It would not survive a power cut there before
+    /// <see cref="Settle"/>, which serves all that was placed before it at the price of one flush.
+    /// </summary>
+    /// <exception cref="IOException">As for <see cref="PublishCase"/>.</exception>
+    public void Place(string caseName, IEnumerable<ResultContent> files)
     {
         if (ResultsFolder.Objection(caseName) is { } objection)
             throw new ArgumentException(objection, nameof(caseName));
@@ -78,11 +93,25 @@ public sealed class Publisher : IDisposable
             DeleteIfPossible(hidden);
             throw;
         }
-        var replaced = PutInPlace(hidden, _folder.Case(caseName));
-        // Without this the rename itself could be lost. Only after it may the old result go.
-        _disk.Sync(_folder.Study);
-        if (replaced is not null)
-            SetAsideIfPossible(replaced, caseName);
+        _placed.Enqueue(new Placed(caseName, PutInPlace(hidden, _folder.Case(caseName))));
+    }
+
+    /// <summary>
+    /// Returns when all that this run placed before would survive a power cut. Only then may what it replaced leave its hidden name.
+    /// </summary>
+    /// <exception cref="IOException">The system refused: nothing that was placed since the last time is safe yet.</exception>
+    public void Settle()
+    {
+        lock (_settling)   // who waits here finds, as a rule, that its results were flushed with the others'
+        {
+            var count = _placed.Count;
+            if (count == 0)
+                return;
+            _disk.Sync(_folder.Study);
+            for (; count > 0 && _placed.TryDequeue(out var placed); count--)
+                if (placed.Replaced is not null)
+                    SetAsideIfPossible(placed.Replaced, placed.Case);
+        }
     }
 
     /// <summary>Publishes a single file, replacing one that was there.</summary>
@@ -115,6 +144,9 @@ public sealed class Publisher : IDisposable
     }
 
     public void Dispose() => _mark.Dispose();
+
+    /// <param name="Replaced">Where the result that was there before lies now; null for none.</param>
+    private sealed record Placed(string Case, string? Replaced);
 
     /// <summary>Returns where the result that was there before has gone; null for none.</summary>
     private string? PutInPlace(string hidden, string target)

@@ -49,6 +49,11 @@ public sealed record ResultsFolder(string Root, string StudyName)
     /// <summary>What moved in the last run.</summary>
     public string Changes => Path.Join(Study, ChangesTable.FileName);
 
+    /// <summary>A file for each case that is being solved, or whose process was lost while solving it.</summary>
+    public string Claims => Path.Join(Study, ClaimsName);
+
+    public string Claim(string caseName) => Path.Join(Claims, caseName);
+
     /// <summary>
     /// Why no result folder can have this name, or null where it can: the study's folder needs some names itself, and a name beginning
     /// with a point marks what is being written.
@@ -62,6 +67,7 @@ public sealed record ResultsFolder(string Root, string StudyName)
     }
 
     private const string LogsName = "logs";
+    private const string ClaimsName = ".claims";   // no case has a name that begins with a point
     private const string FailuresName = "failures";
     private const string TablesName = "tables";
     private const string ReplacedName = "replaced";

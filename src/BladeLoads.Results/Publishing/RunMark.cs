@@ -24,11 +24,9 @@ internal sealed partial class RunMark : IDisposable
         {
             var run = Convert.ToHexStringLower(RandomNumberGenerator.GetBytes(6));
             var path = LockFile(folder, run);
-            var held = disk.TryLock(path);
-            // A run that tidies up may have taken the new file for a dead one's between its creation and its lock: then it is gone.
-            if (held is not null && File.Exists(path))
+            // Another run that tidies up may hold it for a moment, between its creation and its lock, taking it for a dead one's.
+            if (disk.TryLock(path) is { } held)
                 return new RunMark(disk, folder, run, held);
-            held?.Dispose();
         }
     }
 
@@ -47,16 +45,10 @@ internal sealed partial class RunMark : IDisposable
         foreach (var path in Directory.EnumerateFiles(_folder, ".run-*.lock"))
             if (OwnedName().Match(Path.GetFileName(path)) is { Success: true } name && name.Groups["run"].Value != _run)
             {
-                try
-                {
-                    using var held = _disk.TryLock(path);
-                    if (held is null)
-                        return true;
-                }
-                catch (IOException e) when (DiskTrouble.IsBusy(e))
-                {
+                using var held = _disk.TryLock(path);
+                if (held is null)
                     return true;
-                }
+                _disk.Delete(path);   // a dead one's, or made by asking, if its run has just ended
             }
         return false;
     }
@@ -102,7 +94,12 @@ internal sealed partial class RunMark : IDisposable
         if (Receipts.ReceiptFile.Read(path) is Receipts.ReceiptReading.Readable { Receipt: var receipt }
             && ResultsFolder.Objection(receipt.Case) is null && Receipts.ResultCheck.IsWhole(path, receipt))
         {
-            if (path.EndsWith(".old", StringComparison.Ordinal) && _disk.TryRename(path, results.Case(receipt.Case)))
+            // Killed before it was flushed: nothing goes where it is taken for a result before it would survive a power cut.
+            foreach (var file in receipt.Files)
+                _disk.Sync(Path.Join(path, file.Name));
+            _disk.Sync(Path.Join(path, Receipts.Receipt.FileName));
+            _disk.Sync(path);
+            if (_disk.TryRename(path, results.Case(receipt.Case)))
                 return;
             ReplacedResult.SetAside(path, receipt.Case, results, _disk);
             return;

@@ -3,6 +3,7 @@ using BladeLoads.Batch.Logs;
 using BladeLoads.Batch.Plan;
 using BladeLoads.Batch.Plan.Index;
 using BladeLoads.Batch.Queue;
+using BladeLoads.Batch.Sharing;
 using BladeLoads.Batch.Work;
 using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Publishing;
@@ -43,13 +44,18 @@ internal static class RunCommand
             surroundings.Out.WriteLine(due.IsEmpty ? PlanLines.AllCurrent(plan) : PlanLines.Summary(plan, request.All));
 
         if (due.IsEmpty)
+        {
             Publisher.TidyIfPossible(results, surroundings.Disk);
+            Claims.TidyIfPossible(results, surroundings.Disk);
+        }
         using var publisher = new PublisherWhenNeeded(results, surroundings.Disk);
         var changes = RunChanges.Before(wholePlan, due.Select(c => c.Name), results);
         if (!due.IsEmpty)
             changes.Remember(publisher.Get());
         var run = due.IsEmpty ? NothingRun : Solve(due, request, results, publisher, plan, signals, surroundings);
-        var rows = StudySummary.Rows(wholePlan, run.Outcomes);
+        // Another run may have been at work meanwhile on cases that this one was not asked for.
+        var othersAreDue = !due.IsEmpty && wholePlan.Cases.Any(c => c.IsDue && !run.Outcomes.ContainsKey(c.Case.Name));
+        var rows = StudySummary.Rows(othersAreDue ? study.Plan(look, request.Only).Whole : wholePlan, run.Outcomes);
         var shown = RowsOf(plan, rows);
         if (run.NoRoom is null)
             StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
@@ -58,6 +64,8 @@ internal static class RunCommand
             changes.Publish(moved, run.Outcomes, publisher.Get());
         if (run.NoRoom is null && !due.IsEmpty)
             look.LookAfterRun(study.Whole);
+        if (run.SolvedByAnother > 0 && !request.Quiet)
+            surroundings.Out.WriteLine($"{Count.Of(run.SolvedByAnother, "case")} solved by another run");
         if (run.NoRoom is null && !request.Quiet)
         {
             SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
@@ -78,27 +86,37 @@ internal static class RunCommand
     {
         var screen = new ScreenLog(surroundings.Error);
         publisher.Get();   // a folder that cannot be written to is told before a log file in it is tried
-        using var log = RunLog.Open(results.Logs, screen, surroundings.Time, screen.Line);
+        // Where results cannot be written either, that alone is told.
+        string? logTrouble = null;
+        var log = RunLog.Open(results.Logs, screen, surroundings.Time, line => logTrouble = line);
         var identity = new RunIdentity(SolverVersion.Number, CommandLine.ToolVersion);
         var reuse = request.All ? null : new CaseReuse(plan, results, publisher.Get(), surroundings.Disk, identity);
         var work = new CaseWork(
             surroundings.Solve, publisher.Get(), results, identity, log.Logger, surroundings.Time, surroundings.WaitForFile, reuse);
         var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
-        RunResult Run() => StudyRun.Solve(due, work, request.Workers, progress, log.Logger, signals.Stopping);
+        using var claims = new Claims(results, surroundings.Disk);
+        RunResult Run() => StudyRun.Solve(due, AgainOf(plan, request), work, claims, request.Workers, progress, log.Logger, signals.Stopping);
+        RunResult Shown() => request.Quiet ? Run()
+            : surroundings.ErrorIsTerminal ? ProgressBar.Show(Run, progress, screen)
+            : PlainProgress.Show(Run, progress, request.Workers, surroundings.Error, surroundings.Time);
+        var run = NothingRun;
         try
         {
-            if (request.Quiet)
-                return Run();
-            return surroundings.ErrorIsTerminal
-                ? ProgressBar.Show(Run, progress, screen)
-                : PlainProgress.Show(Run, progress, request.Workers, surroundings.Error, surroundings.Time);
+            run = Shown();
         }
         catch (Exception e)
         {
             log.Logger.Fault(e);
-            return NothingRun with { Faults = [e] };
+            run = NothingRun with { Faults = [e] };
         }
+        log.Dispose();
+        if (logTrouble is not null && run.NoRoom is null)
+            screen.Line(logTrouble);
+        return run;
     }
+
+    private static Again AgainOf(StudyPlan plan, RunRequest request) => new(
+        [.. plan.Cases.Where(c => c.State is CaseState.Current or CaseState.Retitled).Select(c => c.Case.Name)], request.All);
 
     private static ImmutableArray<SummaryRow> RowsOf(StudyPlan plan, ImmutableArray<SummaryRow> rows)
     {

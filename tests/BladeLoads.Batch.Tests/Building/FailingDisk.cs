@@ -52,7 +52,11 @@ internal sealed class FailingDisk(int refuseFrom, Func<Exception>? trouble = nul
 
     public void Delete(string path) => _disk.Delete(path);
 
-    public IDisposable? TryLock(string path) => _disk.TryLock(path);
+    public bool TryDeleteEmptyFolder(string path) => _disk.TryDeleteEmptyFolder(path);
+
+    public ILockedFile? TryLock(string path) => _disk.TryLock(path);
+
+    public byte[] ReadThoughLocked(string path) => _disk.ReadThoughLocked(path);
 
     private void Step()
     {

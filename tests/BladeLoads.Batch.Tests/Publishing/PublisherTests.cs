@@ -173,6 +173,45 @@ public class PublisherTests
     }
 
     [Fact]
+    public void A_flush_that_fails_is_an_error_though_dotnet_would_not_say_so()
+    {
+        if (!OperatingSystem.IsLinux())
+            return;
+        // The system flushes no such device: 22 is EINVAL, from fsync itself.
+        Assert.Equal(22, Assert.Throws<IOException>(() => new Disk().Sync("/dev/null")).HResult);
+        using var device = File.OpenHandle("/dev/null", FileMode.Open, FileAccess.Write);
+        RandomAccess.FlushToDisk(device);
+    }
+
+    [Fact]
+    public void What_is_replaced_leaves_its_hidden_name_only_when_the_new_result_is_flushed()
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        Publish(results, WholeOld, new Disk());
+        using var publisher = Publisher.Open(results, new Disk());
+        publisher.Place("clean", New);
+        Assert.Empty(ReplacedResult.All(results));
+        publisher.Settle();
+        Assert.Equal(Contents(WholeOld), TemporaryFolder.Contents(Assert.Single(ReplacedResult.All(results)).Folder));
+    }
+
+    [Fact]
+    public void A_flush_of_the_folder_that_is_refused_settles_nothing_and_the_next_one_all()
+    {
+        using var folder = new TemporaryFolder();
+        var results = Runs.Results(folder);
+        Publish(results, WholeOld, new Disk());
+        const int StepsToPlace = 9;   // three writes, three flushes and that of their folder; a rename that finds a folder there; the exchange
+        using var publisher = Publisher.Open(results, new FailingDisk(StepsToPlace + 1, only: true));
+        publisher.Place("clean", New);
+        Assert.Throws<IOException>(publisher.Settle);
+        Assert.Empty(ReplacedResult.All(results));
+        publisher.Settle();
+        Assert.Single(ReplacedResult.All(results));
+    }
+
+    [Fact]
     public void A_flush_that_the_system_refuses_is_an_error()
         => Assert.Equal(2, Assert.Throws<IOException>(() => new Disk().Sync("/no/such/place")).HResult);   // 2: ENOENT
 

@@ -1,4 +1,5 @@
 using BladeLoads.Batch.Plan;
+using BladeLoads.Batch.Sharing;
 using BladeLoads.Batch.Tests.Building;
 using BladeLoads.Batch.Work;
 using BladeLoads.Results.Publishing;
@@ -174,7 +175,10 @@ public sealed class CaseReuseTests : IDisposable
             (rotor, _) => FellRotor.Curve(rotor), publisher, Results, identity, Logger.None, TimeProvider.System, _ => { },
             new CaseReuse(plan, Results, publisher, disk, identity));
         var due = plan.Cases.Where(c => c.IsDue).Select(c => c.Case).ToList();
-        var result = StudyRun.Solve(due, work, 2, new RunProgress(due.Count, 1, TimeProvider.System), Logger.None, default);
+        using var claims = new Claims(Results, disk);
+        var again = new Again([.. plan.Cases.Where(c => c.State is CaseState.Current or CaseState.Retitled).Select(c => c.Case.Name)], false);
+        var result = StudyRun.Solve(
+            due, again, work, claims, 2, new RunProgress(due.Count, 1, TimeProvider.System), Logger.None, default);
         Assert.Equal((0, 0), (result.Failed, result.NotRun));
         return (result.Solved, result.Reused);
     }

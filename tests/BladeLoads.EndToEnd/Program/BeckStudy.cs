@@ -56,6 +56,26 @@ internal static class BeckStudy
         "air.density_kg_m3" = [{{string.Join(", ", Enumerable.Range(0, 400).Select(i => (1 + i * 0.0005).ToString(CultureInfo.InvariantCulture)))}}]
         """);
 
+    /// <summary>Adds a case with variants that take a few milliseconds each.</summary>
+    public static void AddSmallSweep(string folder, int variants, double pitch = 0) => Case(folder, "small", $$"""
+        title = "Small"
+        [control]
+        pitch_deg = {{pitch.ToString(CultureInfo.InvariantCulture)}}
+        [sweep]
+        "air.density_kg_m3" = [{{string.Join(", ", Enumerable.Range(0, variants).Select(i => (1 + i * 0.0001).ToString(CultureInfo.InvariantCulture)))}}]
+        """);
+
+    /// <summary>Adds a single case that takes some seconds.</summary>
+    public static void AddGiant(string folder) => Case(folder, "giant", """
+        title = "Giant"
+        [wind]
+        speeds_m_s = { from = 4, to = 24, step = 0.01 }
+        [model]
+        elements = 800
+        [outputs]
+        spanwise = "none"
+        """);
+
     // Lift 2 pi sin(a) cut off at its maximum, then a plate's 2 sin(a) cos(a); drag of a plate beyond. By formula, no measurement.
     private static void Section(string folder, string name, double liftMaximum, double drag)
     {

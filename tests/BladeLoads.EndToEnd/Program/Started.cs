@@ -68,7 +68,13 @@ internal sealed class Started : IDisposable
         return new Finished(_process.ExitCode, _out.GetAwaiter().GetResult(), _error.GetAwaiter().GetResult());
     }
 
-    /// <param name="signal">By name: TERM, INT, KILL.</param>
+    /// <summary>The number of the process.</summary>
+    public int Id => _process.Id;
+
+    /// <summary>Whether it ended by itself within the time.</summary>
+    public bool EndsWithin(TimeSpan time) => _process.WaitForExit(time);
+
+    /// <param name="signal">By name: TERM, INT, KILL, STOP, CONT.</param>
     public void Signal(string signal)
     {
         using var kill = Process.Start("kill", [$"-{signal}", _process.Id.ToString(System.Globalization.CultureInfo.InvariantCulture)]);
