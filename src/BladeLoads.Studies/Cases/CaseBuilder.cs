@@ -46,8 +46,8 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             return null;
 
         var rotor = new RotorCase(
-            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), new AirProperties(density, viscosity),
-            windSpeeds, control.Strategy, control.CutIn, control.CutOut, control.DrivetrainEfficiency, model);
+            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), new AirProperties(density, viscosity, 340.29),
+            windSpeeds, control.Strategy, control.CutIn, control.CutOut, Drivetrain.Constant(control.DrivetrainEfficiency), model);
         var determining = values.Determining;
         inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
         ImmutableArray<CanonicalTable> canonical = [blade.Canonical, .. sections.Tables.Select(table => table.Canonical)];

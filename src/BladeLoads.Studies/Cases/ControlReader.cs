@@ -73,7 +73,8 @@ internal static class ControlReader
                 "is 'pitch-to-feather' without a rated power; give rated_power_kW or leave above_rated out");
         return new Control.VariableSpeed(
             tipSpeedRatio, double.DegreesToRadians(finePitch), RadiansPerSecond(slowest), RadiansPerSecond(fastest),
-            ratedPower, aboveRated == "pitch-to-feather" ? AboveRated.PitchToFeather : AboveRated.None);
+            SpeedLimitedPitch.Hold, ratedPower, aboveRated == "pitch-to-feather" ? AboveRated.PitchToFeather : AboveRated.None,
+            ThrustLimit: null);
     }
 
     private static Control.FixedSpeed ReadFixedSpeed(CaseValues values, double? ratedPower)

@@ -21,7 +21,7 @@ internal static class PublishedRotor
         OperatingPoint point, Blade blade, SectionSet sections, int bladeCount, double cone, AirProperties air, BalanceModel model)
     {
         var rotorCase = new RotorCase(blade, sections, bladeCount, cone, air, [point.WindSpeed],
-            new Control.FixedSpeed(point.RotorSpeed, point.Pitch, RatedPower: null), 0, double.PositiveInfinity, 1, model);
+            new Control.FixedSpeed(point.RotorSpeed, point.Pitch, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1), model);
         return Assert.Single(CaseSolver.Solve(rotorCase, CancellationToken.None).Points);
     }
 
