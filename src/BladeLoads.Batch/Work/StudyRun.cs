@@ -38,7 +38,7 @@ public static class StudyRun
         using var ending = CancellationTokenSource.CreateLinkedTokenSource(stopping);
         string? noRoom = null;
 
-        var jobs = CaseGroups.Of(cases.Select(c => (c.Name, CaseGroups.Estimate(c.Rotor))), workers);
+        var jobs = CaseGroups.Of(cases.Select(c => (c.Name, CaseGroups.Estimate(c))), workers);
         log.Information("Run of {Cases} cases in {Jobs} jobs with {Workers} workers", cases.Count, jobs.Length, workers);
         var faults = CaseWorkers.Run(jobs, workers, name =>
         {
@@ -54,7 +54,7 @@ public static class StudyRun
                 ending.Cancel();
             }
             if (outcomes[name] is not CaseOutcome.NotRun)
-                progress.CaseEnded(CaseGroups.Estimate(studyCase.Rotor), (outcomes[name] as CaseOutcome.Solved)?.RotorSolves ?? 0);
+                progress.CaseEnded(CaseGroups.Estimate(studyCase), (outcomes[name] as CaseOutcome.Solved)?.RotorSolves ?? 0);
         });
 
         foreach (var name in byName.Keys)

@@ -11,6 +11,11 @@ public static class TurbulentPower
 
     private const int Order = 16;
 
+    /// <summary>Mean power of a curve at a mean wind speed, W; NaN where a point without a balance lies within reach of the gusts.</summary>
+    /// <inheritdoc cref="Mean(Func{double, double}, ReadOnlySpan{double}, double, double)"/>
+    public static double Mean(SteadyPower steady, double windSpeed, double intensity)
+        => Mean(steady.At, steady.Joints.AsSpan(), windSpeed, intensity);
+
     /// <summary>
     /// Mean power at a mean wind speed, W: the integral of <c>P(v)</c> over the normal distribution of mean V and deviation TI V.
     /// </summary>

@@ -12,12 +12,17 @@ public abstract record WindClimate
     /// <param name="windSpeed">m/s.</param>
     public abstract double Cumulative(double windSpeed);
 
+    /// <summary>m/s.</summary>
+    public abstract double Mean { get; }
+
     /// <summary><c>F = 1 - exp(-(V/A)^k)</c>, with the scale A that gives the mean; k = 2 is Rayleigh's distribution.</summary>
     /// <param name="MeanWindSpeed">m/s, above 0.</param>
     /// <param name="Shape">k, 1 or more.</param>
     /// <remarks>Source: key iec61400-12-1 in docs/sources.md for k = 2; other shapes are our extension of it.</remarks>
     public sealed record Weibull(double MeanWindSpeed, double Shape) : WindClimate
     {
+        public override double Mean => MeanWindSpeed;
+
         public override double Cumulative(double windSpeed)
         {
             if (windSpeed <= 0)
@@ -32,6 +37,8 @@ public abstract record WindClimate
     /// <param name="Shares">Shares of time, 0 or above, 1 in sum.</param>
     public sealed record Histogram(ImmutableArray<double> Edges, ImmutableArray<double> Shares) : WindClimate
     {
+        public override double Mean => Shares.Select((share, i) => share * (Edges[i] + Edges[i + 1]) / 2).Sum();
+
         public override double Cumulative(double windSpeed)
         {
             var sum = 0.0;

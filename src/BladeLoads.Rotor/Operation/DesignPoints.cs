@@ -18,12 +18,12 @@ internal static class DesignPoints
     {
         var found = new List<DesignPoint>();
         if (ratedWindSpeed is { } rated && rated >= curve[0].Operation.WindSpeed && rated <= curve[^1].Operation.WindSpeed)
-            found.Add(new DesignPoint("rated wind speed", solve(rated)));
+            found.Add(new DesignPoint(DesignPoint.RatedWindSpeed, solve(rated)));
         for (var i = 1; i < curve.Length; i++)
             Beginnings(curve[i - 1], curve[i], hints, solve, regionAt, found);
         var inOperation = curve.Where(p => (p.Marks & (PointMarks.BelowCutIn | PointMarks.AboveCutOut)) == 0 && p.Loads is not null).ToArray();
         if (inOperation.Length > 0)
-            found.Add(new DesignPoint("largest thrust", LargestThrust(rotorCase, inOperation, found, solve)));
+            found.Add(new DesignPoint(DesignPoint.LargestThrust, LargestThrust(rotorCase, inOperation, found, solve)));
         return [.. found.OrderBy(p => p.Point.Operation.WindSpeed).ThenBy(p => p.Name, StringComparer.Ordinal)];
     }
 

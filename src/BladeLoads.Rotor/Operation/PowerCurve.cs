@@ -37,4 +37,9 @@ public sealed record PointMargins(double PowerPerPitch, double ThrustPerPitch, d
 
 /// <summary>An operating point worth a name: where a region begins, where rated power or the largest thrust is.</summary>
 /// <param name="Name">In words, as it is written.</param>
-public sealed record DesignPoint(string Name, CurvePoint Point);
+public sealed record DesignPoint(string Name, CurvePoint Point)
+{
+    public const string RatedWindSpeed = "rated wind speed";
+
+    public const string LargestThrust = "largest thrust";
+}

@@ -83,7 +83,7 @@ internal static class RunCommand
         var reuse = request.All ? null : new CaseReuse(plan, results, publisher.Get(), surroundings.Disk, identity);
         var work = new CaseWork(
             surroundings.Solve, publisher.Get(), results, identity, log.Logger, surroundings.Time, surroundings.WaitForFile, reuse);
-        var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
+        var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c)), surroundings.Time);
         RunResult Run() => StudyRun.Solve(due, work, request.Workers, progress, log.Logger, signals.Stopping);
         try
         {

@@ -21,7 +21,7 @@ internal static class Runs
         var work = new CaseWork(
             solve ?? ((rotor, _) => FellRotor.Curve(rotor)), publisher, results, new RunIdentity(solverVersion, "0.0.0"), logger,
             TimeProvider.System, waitForFile ?? (_ => { }));
-        var progress = new RunProgress(cases.Count, cases.Sum(c => CaseGroups.Estimate(c.Rotor)), TimeProvider.System);
+        var progress = new RunProgress(cases.Count, cases.Sum(c => CaseGroups.Estimate(c)), TimeProvider.System);
         return StudyRun.Solve(cases, work, workers, progress, logger, stopping);
     }
 }

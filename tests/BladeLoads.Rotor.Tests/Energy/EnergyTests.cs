@@ -50,10 +50,62 @@ public sealed class EnergyTests(ITestOutputHelper output)
     [Fact]
     public void A_curve_is_brought_to_multiples_of_half_a_metre_a_second()
     {
-        var (speeds, powers) = AnnualEnergy.Resample([3.2, 4.2, 5.1], [0, 10, 19]);
+        var (speeds, powers) = Steady((3.2, 0), (4.2, 10), (5.1, 19)).Bins();
         Assert.Equal([3.5, 4, 4.5, 5], speeds);
         Assert.Equal([3, 8, 13, 18], powers.Select(p => Math.Round(p, 9)));
     }
+
+    [Fact]
+    public void Between_its_rows_a_cubic_curve_is_followed_and_a_kink_stays_a_kink()
+    {
+        (double, double, bool)[] rows = [.. Enumerable.Range(6, 40).Select(i => 0.5 * i)
+            .Select(v => (v, Math.Min(v * v * v, 1331), v == 11))];
+        var steady = SteadyPower.FromNodes(rows);
+        // A straight line between the rows would miss the cubic by 0.1 to 1 %.
+        foreach (var v in new[] { 4.25, 6.1, 8.75, 9.9 })
+            Assert.Equal(v * v * v, steady.At(v), 2e-4 * v * v * v);
+        Assert.Equal(1331, steady.At(11.2), 1e-9);
+        Assert.Equal([3, 11, 22.5], steady.Joints.ToArray());
+    }
+
+    [Fact]
+    public void Outside_its_wind_speeds_a_machine_makes_nothing_below_and_its_last_power_in_a_gust_above()
+    {
+        var steady = Steady((4, 10), (5, 20));
+        Assert.Equal((0, 20), (steady.At(3.99), steady.At(30)));
+    }
+
+    [Fact]
+    public void Beside_a_point_without_a_balance_no_power_is_known_and_its_bins_are_named()
+    {
+        var steady = Steady((4, 10), (4.5, 20), (5, 30), (5.5, double.NaN), (6, 50), (6.5, 60), (7, 70));
+        Assert.Equal([30, double.NaN, double.NaN, 50], new[] { 4.999999999, 5.2, 5.7, 6 }.Select(v => Math.Round(steady.At(v), 6)));
+        var energy = EnergyYield.Of(steady, new Site(new WindClimate.Weibull(7, 2), 2, 1, []), TurbulenceIntensity.Constant(0.1), 70);
+        Assert.Equal([5, 5.5], energy.MissingBins.ToArray());
+        Assert.All(energy.Rows, row => Assert.Equal((null, null), (row.Steady, row.Turbulent)));
+    }
+
+    [Fact]
+    public void A_year_is_that_of_the_site_and_of_eight_mean_wind_speeds()
+    {
+        var steady = Steady((4, 1e5), (12, 2e6), (25, 2e6));
+        var site = new Site(new WindClimate.Histogram([0, 10, 20], [0.6, 0.4]), 2, 0.9, [("wakes", 0.1), ("grid", 0.5)]);
+        var energy = EnergyYield.Of(steady, site, null, 2e6);
+        Assert.Equal([9, 4, 5, 6, 7, 8, 9, 10, 11], energy.Rows.Select(row => row.Climate.Mean));
+        var year = energy.Rows[0].Steady!;
+        Assert.Equal(year.Gross * 0.9 * 0.9 * 0.5, year.Net, 1e-6 * year.Net);
+        Assert.Equal(year.Net / 2e6, year.FullLoadTime!.Value, 1e-6 * year.Net / 2e6);
+        Assert.Null(EnergyYield.Of(steady, site, null, null).Rows[0].Steady!.CapacityFactor);
+    }
+
+    [Fact]
+    public void Turbulence_intensity_is_linear_between_its_rows()
+    {
+        var turbulence = new TurbulenceIntensity([(5, 0.2), (15, 0.1)]);
+        Assert.Equal([0.2, 0.2, 0.15, 0.1, 0.1], new[] { 2, 5, 10.0, 15, 30 }.Select(v => Math.Round(turbulence.At(v), 12)));
+    }
+
+    private static SteadyPower Steady(params (double, double)[] rows) => SteadyPower.FromNodes([.. rows.Select(r => (r.Item1, r.Item2, false))]);
 
     [Theory]
     [InlineData(0.05)]

@@ -77,6 +77,8 @@ internal static class PublishedRotor
             var (fromA, fromB) = (CubicSpline.InterpolatePchip(a.Angles, coefficient(a)), CubicSpline.InterpolatePchip(b.Angles, coefficient(b)));
             return [.. angles.Select(angle => (1 - share) * fromA.Interpolate(angle) + share * fromB.Interpolate(angle))];
         }
-        return Polar.FromRows(double.NaN, [.. angles], Mix(inner, outer, polar => polar.Lift), Mix(inner, outer, polar => polar.Drag));
+        return Polar.FromRows(double.NaN, [.. angles], Mix(inner, outer, polar => polar.Lift),
+            // A drag of 0 at the end of both tables may round to just below it.
+            [.. Mix(inner, outer, polar => polar.Drag).Select(drag => Math.Max(0, drag))]);
     }
 }
