@@ -42,7 +42,7 @@ public class AirTests
     [InlineData("altitude_m = 12000", "cases/clean.toml:12:14: altitude_m is 12000; it must be from -500 to 11000")]
     [InlineData("temperature_C = 288.15", "cases/clean.toml:12:17: temperature_C is 288.15; it must be from -100 to 100")]
     [InlineData("relative_humidity = 60", "cases/clean.toml:12:21: relative_humidity is 60; it must be from 0 to 1")]
-    [InlineData("reference_density_kg_m3 = 0", "cases/clean.toml:12:27: reference_density_kg_m3 is 0; it must be above 0")]
+    [InlineData("reference_density_kg_m3 = 0", "cases/clean.toml:12:27: reference_density_kg_m3 is 0; it must be above 0 and at most 100")]
     public void Wrong_air_is_told(string keys, string expected) => Told.Exactly([expected], Study(keys).Read().Errors);
 
     [Fact]

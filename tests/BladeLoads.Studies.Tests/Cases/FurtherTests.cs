@@ -59,7 +59,7 @@ public class FurtherTests
     [InlineData("tip_speed_ratio = 7", "tip_speed_ratio = \"bets\"",
         "cases/clean.toml:9:19: tip_speed_ratio is 'bets'; give a number, or \"best\" for the one with the highest power coefficient")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = \"1,5\"",
-        "cases/clean.toml:10:18: fine_pitch_deg is '1,5'; write decimals with a point and no quotes: 1.5")]
+        "cases/clean.toml:10:18: fine_pitch_deg is '1,5'; write decimals with a point: 1.5, without quotes")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nthrust_limit_kN = 0", "cases/clean.toml:11:19: thrust_limit_kN is 0; it must be above 0")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nabove_rated = \"pitch-to-stall\"",
         "cases/clean.toml:11:15: above_rated is 'pitch-to-stall' without a rated power; give rated_power_kW or leave above_rated out")]
@@ -99,7 +99,7 @@ public class FurtherTests
         "cases/clean.toml:13:24: pitches_deg runs from 5 to -5; from must not exceed to")]
     [InlineData("tip_speed_ratios = { from = 1, to = 10, step = 0.01 }\npitches_deg = { from = 0, to = 20, step = 1 }",
         "cases/clean.toml:12:1: [surface] asks for 901 x 21 pairs; at most 10,000 are solved, so give larger steps")]
-    [InlineData("tip_speed_ratios = [7]\npitches_deg = [0]\nwind_speed_m_s = 0", "cases/clean.toml:14:18: wind_speed_m_s is 0; it must be above 0")]
+    [InlineData("tip_speed_ratios = [7]\npitches_deg = [0]\nwind_speed_m_s = 0", "cases/clean.toml:14:18: wind_speed_m_s is 0; it must be above 0 and at most 200")]
     public void A_wrong_surface_is_told(string keys, string expected) => Told.Exactly([expected], Surface(keys).Read().Errors);
 
     private static FellStudy Study() => new FellStudy().With("cases/clean.toml", FellStudy.VariableSpeedCase);
