@@ -39,7 +39,7 @@ public sealed record InputFinding(string File, int Line, int Column, string Text
 /// <param name="Inputs">Every file that was read for it, the case file first.</param>
 /// <param name="Values">
 /// Every value that determines the result, defaults filled in: key as in a case file, value as canonical text (ordinal order).
-/// Tables stand as the SHA-256 of their parsed values: <c>blade</c>, <c>section.NAME</c>, <c>control.schedule</c>. The
+/// Tables stand as the SHA-256 of their parsed values: <c>blade</c>, <c>section.NAME</c>, <c>control.schedule</c>, <c>site.histogram</c>. The
 /// fingerprint is over these and nothing else.
 /// </param>
 public sealed record StudyCase(
@@ -48,6 +48,9 @@ public sealed record StudyCase(
 {
     /// <summary>The tables whose hashes stand in the values; empty where they are not at hand.</summary>
     public ImmutableArray<CanonicalTable> Tables { get; init; } = [];
+
+    /// <summary>What it asks for beside its curve.</summary>
+    public FurtherResults Further { get; init; } = FurtherResults.None;
 }
 
 /// <summary>A file that a case was read from.</summary>

@@ -13,7 +13,7 @@ internal static class InventedRotor
     public static readonly BalanceModel Model = new(
         40, ElementSpacing.Cosine, TipLoss: true, HubLoss: true, HeavyLoading.Glauert1935, BalanceWith.LiftAndDrag);
 
-    public static readonly AirProperties SeaLevel = new(1.225, 1.789e-5);
+    public static readonly AirProperties SeaLevel = new(1.225, 1.789e-5, 340.29);
 
     /// <summary>Lift 2 pi per radian up to stall, then a drop over a given width to the lift of a flat plate.</summary>
     public static Polar PolarByFormula(
@@ -57,14 +57,17 @@ internal static class InventedRotor
         var sections = SectionSet.Of(
             [SectionByFormula("inboard", stallDeg, dropWidthDeg), SectionByFormula("outboard", stallDeg, dropWidthDeg)]);
         return new RotorCase(
-            Blade.FromStations(stations), sections, bladeCount, cone, SeaLevel, [.. windSpeeds], control, cutIn, cutOut, efficiency,
-            model ?? Model);
+            Blade.FromStations(stations), sections, bladeCount, cone, SeaLevel, [.. windSpeeds], control, cutIn, cutOut,
+            Drivetrain.Constant(efficiency), model ?? Model);
     }
 
     public static Control.VariableSpeed VariableSpeed(
-        double? ratedPower = null, double finePitchDeg = 0, double tipSpeedRatio = 7, double minRotorSpeed = 0,
-        double maxRotorSpeed = double.PositiveInfinity, AboveRated aboveRated = AboveRated.PitchToFeather)
-        => new(tipSpeedRatio, double.DegreesToRadians(finePitchDeg), minRotorSpeed, maxRotorSpeed, ratedPower, aboveRated);
+        double? ratedPower = null, double? finePitchDeg = 0, double? tipSpeedRatio = 7, double minRotorSpeed = 0,
+        double maxRotorSpeed = double.PositiveInfinity, AboveRated aboveRated = AboveRated.PitchToFeather,
+        SpeedLimitedPitch speedLimitedPitch = SpeedLimitedPitch.Hold, double? thrustLimit = null)
+        => new(
+            tipSpeedRatio, finePitchDeg is { } deg ? double.DegreesToRadians(deg) : null, minRotorSpeed, maxRotorSpeed, speedLimitedPitch,
+            ratedPower, aboveRated, thrustLimit);
 
     public static ImmutableArray<CurvePoint> Solve(RotorCase rotorCase) => CaseSolver.Solve(rotorCase, CancellationToken.None).Points;
 }

@@ -39,6 +39,14 @@ internal static class CaseEvents
             log.Information("Case {Case} reaches rated power at {RatedWindSpeed:0.###} m/s", studyCase.Name, rated);
         else
             log.Information("Case {Case} has no rated wind speed", studyCase.Name);
+        if (summary.Best is { Searched: true } best)
+            log.Information(
+                "Case {Case} runs best at tip-speed ratio {TipSpeedRatio:0.####}, pitch {PitchDeg:0.####} deg: power coefficient {PowerCoefficient:0.#####}",
+                studyCase.Name, best.TipSpeedRatio, double.RadiansToDegrees(best.FinePitch), best.PowerCoefficient);
+        if (summary.Energy is { AnnualEnergy: null })
+            log.Warning(
+                "Case {Case}: the annual energy is left blank, because bins of the curve have no balance; annual-energy.csv names them",
+                studyCase.Name);
         log.Information(
             "Case {Case} solved: {Points} points, {Unbalanced} unbalanced, {Seconds:0.000} s",
             studyCase.Name, summary.Points, summary.UnbalancedPoints, seconds);

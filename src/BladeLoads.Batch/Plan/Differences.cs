@@ -72,7 +72,7 @@ internal static class Differences
     {
         if (key.StartsWith(SectionPrefix, StringComparison.Ordinal))
             return $"polar {key[SectionPrefix.Length..]}.csv";
-        var kind = key == "control.schedule" ? "schedule" : key;
+        var kind = key switch { "control.schedule" => "schedule", "site.histogram" => "histogram", _ => key };
         return tables.FirstOrDefault(t => t.Key == key) is { File.Length: > 0 } table ? $"{kind} {Path.GetFileName(table.File)}" : kind;
     }
 

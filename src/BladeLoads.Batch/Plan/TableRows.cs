@@ -8,7 +8,7 @@ internal static class TableRows
 {
     /// <summary>Null where the rows cannot be told apart.</summary>
     /// <param name="table">As a reason names it: <c>polar tarn-24.csv</c>.</param>
-    /// <param name="key">Which kind of table: <c>blade</c>, <c>section.NAME</c>, <c>control.schedule</c>.</param>
+    /// <param name="key">Which kind of table: <c>blade</c>, <c>section.NAME</c>, <c>control.schedule</c>, <c>site.histogram</c>.</param>
     public static StaleReason? Between(string table, string key, string was, string now)
     {
         var isPolar = key.StartsWith("section.", StringComparison.Ordinal);

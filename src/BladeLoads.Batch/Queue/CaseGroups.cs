@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies;
 
 namespace BladeLoads.Batch.Queue;
 
@@ -13,15 +14,34 @@ public static class CaseGroups
     private const int JobsPerWorker = 4;
 
     private const double ElementMicroseconds = 1.5;   // measured on one core, order of size
-    private const double SearchedSolvesPerPoint = 15; // pitch at rated power is found by root finding
+    // Orders of size, counted on the demo study: rotor solves that a search takes.
+    private const double SolvesPerPoint = 3;          // the point and one to either side of its pitch
+    private const double RatedSolvesPerPoint = 30;    // the walk down from feather
+    private const double ThrustSolvesPerPoint = 300;
+    private const double FollowedSolvesPerPoint = 250;
+    private const double BestSolves = 4000;
     private const double PublishMilliseconds = 5;     // five flushes to disk, order of size
 
     /// <summary>About how long a case takes, ms; only ratios matter.</summary>
-    public static double Estimate(RotorCase rotorCase)
+    public static double Estimate(StudyCase studyCase)
     {
-        var solves = rotorCase.WindSpeeds.Length
-            * (rotorCase.Control is Control.VariableSpeed { RatedPower: not null } ? SearchedSolvesPerPoint : 1);
-        return PublishMilliseconds + solves * rotorCase.Model.Elements * ElementMicroseconds / 1000;
+        var (rotor, further) = (studyCase.Rotor, studyCase.Further);
+        var solves = Solves(rotor) * (further.ReferenceDensity is null ? 1 : 2);
+        if (further.Surface is { } surface)
+            solves += surface.TipSpeedRatios.Length * surface.Pitches.Length;
+        return PublishMilliseconds + solves * rotor.Model.Elements * ElementMicroseconds / 1000;
+    }
+
+    private static double Solves(RotorCase rotor)
+    {
+        if (rotor.Control is not Control.VariableSpeed control)
+            return rotor.WindSpeeds.Length * SolvesPerPoint;
+        var perPoint = (control.RatedPower is null ? 0 : RatedSolvesPerPoint)
+            + (control.ThrustLimit is null ? 0 : ThrustSolvesPerPoint)
+            + (control.SpeedLimitedPitch == SpeedLimitedPitch.Best ? FollowedSolvesPerPoint : 0);
+        var searched = control.TipSpeedRatio is null || control.FinePitch is null;
+        return rotor.WindSpeeds.Length * (SolvesPerPoint + perPoint)
+            + (searched ? BestSolves : 0);
     }
 
     /// <summary>

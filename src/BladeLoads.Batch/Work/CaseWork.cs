@@ -102,18 +102,20 @@ public sealed class CaseWork(
         var started = time.GetTimestamp();
         log.Logger.Read(studyCase);
         var curve = solve(studyCase.Rotor, stopping);
-        var summary = CaseSummary.Of(curve);
+        var further = FurtherWork.Of(studyCase, curve, solve, stopping);
+        var summary = further.Complete(CaseSummary.Of(curve));
         log.Logger.Balanced(studyCase, curve);
-        List<ResultContent> files = [new(CurveTable.FileName, CurveTable.Write(curve))];
+        List<ResultContent> files = [new(CurveTable.FileName, CurveTable.Write(curve, further.MeanPower))];
         if (SpanwiseTable.Write(curve, studyCase.Spanwise) is { } spanwise)
             files.Add(new(SpanwiseTable.FileName, spanwise));
+        files.AddRange(further.Tables(studyCase, curve));
         var seconds = time.GetElapsedTime(started).TotalSeconds;
         log.Logger.Solved(studyCase, summary, seconds);
         files.Add(new(CaseLog.FileName, log.ToBytes()));
         files.Add(new(Receipt.FileName, ReceiptFile.Write(ReceiptOf(studyCase, summary, files, seconds))));
         WithPatience(() => TableArchive.Keep(studyCase.Tables, results, publisher, _tablesKept));
         WithPatience(() => publisher.Place(studyCase.Name, files));
-        return new CaseOutcome.Solved(summary, curve.RotorSolves);
+        return new CaseOutcome.Solved(summary, curve.RotorSolves + further.RotorSolves);
     }
 
     private Receipt ReceiptOf(StudyCase studyCase, CaseSummary summary, IEnumerable<ResultContent> files, double seconds) => new(

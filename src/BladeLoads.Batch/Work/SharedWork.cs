@@ -212,7 +212,7 @@ internal sealed class SharedWork : IDisposable
     private void Ended(StudyCase studyCase, CaseOutcome outcome)
     {
         _outcomes[studyCase.Name] = outcome;
-        _progress.CaseEnded(CaseGroups.Estimate(studyCase.Rotor), (outcome as CaseOutcome.Solved)?.RotorSolves ?? 0);
+        _progress.CaseEnded(CaseGroups.Estimate(studyCase), (outcome as CaseOutcome.Solved)?.RotorSolves ?? 0);
     }
 
     private void End(string noRoom)

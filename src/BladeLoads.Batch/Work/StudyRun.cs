@@ -21,7 +21,7 @@ public static class StudyRun
         IReadOnlyCollection<StudyCase> cases, Again again, CaseWork work, Claims claims, int workers, RunProgress progress, ILogger log,
         CancellationToken stopping, Action<CancellationToken>? pause = null)
     {
-        var jobs = CaseGroups.Of(cases.Select(c => (c.Name, CaseGroups.Estimate(c.Rotor))), workers);
+        var jobs = CaseGroups.Of(cases.Select(c => (c.Name, CaseGroups.Estimate(c))), workers);
         log.Information("Run of {Cases} cases in {Jobs} jobs with {Workers} workers", cases.Count, jobs.Length, workers);
         using var shared = new SharedWork(cases, again, work, claims, progress, log, stopping);
         var faults = CaseWorkers.Run(jobs, workers, shared.DoJob);

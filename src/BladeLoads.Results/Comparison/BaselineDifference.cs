@@ -8,14 +8,16 @@ namespace BladeLoads.Results.Comparison;
 /// </summary>
 public sealed record BaselineDifference(
     double? BestPowerCoefficient, double? LargestElectricalPower, double? LargestThrust, double? RatedWindSpeed,
-    double? LargestFlapwiseMoment)
+    double? LargestFlapwiseMoment, double? AnnualEnergy, double? CapacityFactor)
 {
     public static BaselineDifference Between(CaseSummary one, CaseSummary baseline) => new(
         Percent(one.BestPowerCoefficient?.Value, baseline.BestPowerCoefficient?.Value),
         Percent(one.LargestElectricalPower?.Value, baseline.LargestElectricalPower?.Value),
         Percent(one.LargestThrust?.Value, baseline.LargestThrust?.Value),
         Percent(one.RatedWindSpeed, baseline.RatedWindSpeed),
-        Percent(Magnitude(one.LargestFlapwiseMoment), Magnitude(baseline.LargestFlapwiseMoment)));
+        Percent(Magnitude(one.LargestFlapwiseMoment), Magnitude(baseline.LargestFlapwiseMoment)),
+        Percent(one.Energy?.AnnualEnergy, baseline.Energy?.AnnualEnergy),
+        Percent(one.Energy?.CapacityFactor, baseline.Energy?.CapacityFactor));
 
     private static double? Magnitude(Extreme? moment) => moment is null ? null : Math.Abs(moment.Value);
 

@@ -1,4 +1,7 @@
 using System.Collections.Immutable;
+using BladeLoads.Results.Tables;
+using BladeLoads.Results.Wording;
+using BladeLoads.Rotor.Operation;
 
 namespace BladeLoads.Results.Comparison;
 
@@ -22,6 +25,9 @@ public static class Figures
     // Power held at rated is the same at many wind speeds but for the last digits of a root finder; the summary has the same rule.
     private const double SameWithin = 1e-9;
 
+    // A rotor that stands still outside its wind speeds of operation counts for no largest figure, as in the summary.
+    private static readonly string[] AtRest = [StatusWords.Of(PointMarks.BelowCutIn), StatusWords.Of(PointMarks.AboveCutOut)];
+
     public static ImmutableArray<Figure> All { get; } =
     [
         new("best power coefficient", "", false, Largest("power_coefficient")),
@@ -32,11 +38,15 @@ public static class Figures
         new("largest root in-plane moment", "kNm", true, LargestBySize("aero_root_in_plane_moment_kNm")),
         new("largest root flapwise moment", "kNm", true, LargestBySize("aero_root_flapwise_moment_kNm")),
         new("largest root edgewise moment", "kNm", true, LargestBySize("aero_root_edgewise_moment_kNm")),
+        new("annual energy", "MWh", false, AnnualEnergy),
     ];
 
     // The table has no row at the rated wind speed: the receipt alone knows it.
     private static FigureValue? Rated(StoredResult result)
         => result.Receipt?.Summary.RatedWindSpeed is { } rated ? new FigureValue(rated, null) : null;
+
+    private static FigureValue? AnnualEnergy(StoredResult result)
+        => result.Receipt?.Summary.Energy?.AnnualEnergy is { } energy ? new FigureValue(FileUnits.MegawattHours(energy), null) : null;
 
     private static Func<StoredResult, FigureValue?> Largest(string column) => result => Largest(result.Curve, column, value => value);
 
@@ -44,7 +54,7 @@ public static class Figures
 
     private static FigureValue? Largest(StoredCurve curve, string column, Func<double, double> size)
     {
-        var found = curve.Points.Where(p => p[column] is not null).Select(p => new FigureValue(p[column]!.Value, p.WindSpeed)).ToList();
+        var found = curve.Points.Where(p => p[column] is not null && !p.Marks.Any(AtRest.Contains)).Select(p => new FigureValue(p[column]!.Value, p.WindSpeed)).ToList();
         if (found.Count == 0)
             return null;
         var largest = found.Max(f => size(f.Value));

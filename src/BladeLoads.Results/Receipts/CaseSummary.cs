@@ -11,7 +11,8 @@ public sealed record Extreme(double Value, [property: JsonPropertyName("wind_spe
 
 /// <summary>
 /// The figures of a power curve that are compared between cases; SI units. A figure is null where no point of the curve has one.
-/// Moments are the largest by magnitude, with their sign.
+/// Moments are the largest by magnitude, with their sign. Largest figures are taken over the rows and the design points in operation:
+/// a rotor that stands still outside its wind speeds of operation counts for none.
 /// </summary>
 /// <param name="BestTipSpeedRatio">The tip-speed ratio at the best power coefficient.</param>
 /// <param name="Marks">How many points carry each mark, by its word; 0 for a mark of the curve alone.</param>
@@ -29,26 +30,40 @@ public sealed record CaseSummary(
     int UnbalancedPoints,
     IReadOnlyDictionary<string, int> Marks)
 {
+    /// <summary>Null for a machine that is not of variable speed.</summary>
+    public BestPoint? Best { get; init; }
+
+    /// <summary>Null for a case without a site.</summary>
+    public EnergySummary? Energy { get; init; }
+
     // Power held at rated is the same at many wind speeds but for the last digits of a root finder.
     private const double SameWithin = 1e-9;
 
     /// <summary>Where several points share the largest value, to 1e-9 of it, the first of them is taken.</summary>
     public static CaseSummary Of(PowerCurve curve)
     {
-        var best = Largest(curve, (loads, _) => loads.PowerCoefficient, value => value);
+        CurvePoint[] points = [.. curve.Points.Concat(curve.DesignPoints.Select(d => d.Point)).Where(InOperation)
+            .OrderBy(p => p.Operation.WindSpeed)];
+        var best = Largest(points, (loads, _) => loads.PowerCoefficient, value => value);
         return new CaseSummary(
             best,
-            best is null ? null : curve.Points.First(p => p.Operation.WindSpeed == best.WindSpeed).Loads?.TipSpeedRatio,
-            Largest(curve, (_, electricalPower) => electricalPower, value => value),
-            Largest(curve, (loads, _) => loads.Thrust, value => value),
+            best is null ? null : points.First(p => p.Operation.WindSpeed == best.WindSpeed).Loads?.TipSpeedRatio,
+            Largest(points, (_, electricalPower) => electricalPower, value => value),
+            Largest(points, (loads, _) => loads.Thrust, value => value),
             curve.RatedWindSpeed,
-            Largest(curve, (loads, _) => loads.RootOutOfPlaneMoment, Math.Abs),
-            Largest(curve, (loads, _) => loads.RootInPlaneMoment, Math.Abs),
-            Largest(curve, (loads, _) => loads.RootFlapwiseMoment, Math.Abs),
-            Largest(curve, (loads, _) => loads.RootEdgewiseMoment, Math.Abs),
+            Largest(points, (loads, _) => loads.RootOutOfPlaneMoment, Math.Abs),
+            Largest(points, (loads, _) => loads.RootInPlaneMoment, Math.Abs),
+            Largest(points, (loads, _) => loads.RootFlapwiseMoment, Math.Abs),
+            Largest(points, (loads, _) => loads.RootEdgewiseMoment, Math.Abs),
             curve.Points.Length,
             curve.Points.Count(p => p.Loads is null),
-            CountMarks(curve));
+            CountMarks(curve))
+        {
+            Best = curve.Best is { } found
+                ? new BestPoint(
+                    found.TipSpeedRatio, found.Pitch, double.IsFinite(found.PowerCoefficient) ? found.PowerCoefficient : null, found.IsSearched)
+                : null,
+        };
     }
 
     /// <summary>The marks as words in the order of a status cell, with the number of points each: <c>several-balances:3</c>.</summary>
@@ -57,9 +72,11 @@ public sealed record CaseSummary(
         .Where(m => Marks.ContainsKey(m.Word))
         .Select(m => Marks[m.Word] == 0 ? m.Word : FormattableString.Invariant($"{m.Word}:{Marks[m.Word]}")));
 
-    private static Extreme? Largest(PowerCurve curve, Func<RotorLoads, double, double> figure, Func<double, double> size)
+    private static bool InOperation(CurvePoint point) => (point.Marks & (PointMarks.BelowCutIn | PointMarks.AboveCutOut)) == 0;
+
+    private static Extreme? Largest(CurvePoint[] points, Func<RotorLoads, double, double> figure, Func<double, double> size)
     {
-        var found = curve.Points
+        var found = points
             .Where(point => point.Loads is not null)
             .Select(point => new Extreme(figure(point.Loads!, point.ElectricalPower), point.Operation.WindSpeed))
             .Where(extreme => double.IsFinite(extreme.Value))

@@ -19,24 +19,37 @@ public static class CurveTable
         "aero_root_out_of_plane_moment_kNm", "aero_root_in_plane_moment_kNm",
         "aero_root_flapwise_moment_kNm", "aero_root_edgewise_moment_kNm",
         "region", "status",
+        "rotor_power_per_pitch_kW_per_deg", "thrust_per_pitch_kN_per_deg", "stall_margin_deg", "stall_margin_radius_m", "tip_mach",
+        "mean_electrical_power_kW",
     ];
 
+    /// <summary>The table of a case without turbulence.</summary>
+    public static byte[] Write(PowerCurve curve) => Write(curve, null);
+
     /// <summary>The table as UTF-8. What an unbalanced point leaves open is an empty cell.</summary>
-    public static byte[] Write(PowerCurve curve)
+    /// <param name="meanPower">W, at a wind speed in m/s; null where the case has no turbulence.</param>
+    public static byte[] Write(PowerCurve curve, Func<double, double>? meanPower)
     {
         using var table = new TableWriter(Columns.AsSpan());
         foreach (var point in curve.Points)
-        {
-            table.Number(point.Operation.WindSpeed);
-            table.Number(Rpm(point.Operation.RotorSpeed));
-            table.Number(Deg(point.Operation.Pitch));
-            WriteLoads(table, point.Loads, point.ElectricalPower);
-            table.Text(StatusWords.Of(point.Region));
-            table.Text(StatusWords.Of(point.Marks));
-            table.EndRow();
-        }
+            WriteRow(table, point, meanPower);
         return table.ToBytes();
     }
+
+    internal static void WriteRow(TableWriter table, CurvePoint point, Func<double, double>? meanPower)
+    {
+        table.Number(point.Operation.WindSpeed);
+        table.Number(Rpm(point.Operation.RotorSpeed));
+        table.Number(Deg(point.Operation.Pitch));
+        WriteLoads(table, point.Loads, point.ElectricalPower);
+        table.Text(RegionWords.Of(point.Region));
+        table.Text(StatusWords.Of(point.Marks));
+        WriteMargins(table, point.Margins);
+        table.Number(IsAtRest(point) ? null : meanPower?.Invoke(point.Operation.WindSpeed) is { } mean ? Kilo(mean) : null);
+        table.EndRow();
+    }
+
+    private static bool IsAtRest(CurvePoint point) => (point.Marks & (PointMarks.BelowCutIn | PointMarks.AboveCutOut)) != 0;
 
     private static void WriteLoads(TableWriter table, RotorLoads? loads, double electricalPower)
     {
@@ -53,5 +66,14 @@ public static class CurveTable
         table.Number(loads is null ? null : Kilo(loads.RootInPlaneMoment));
         table.Number(loads is null ? null : Kilo(loads.RootFlapwiseMoment));
         table.Number(loads is null ? null : Kilo(loads.RootEdgewiseMoment));
+    }
+
+    private static void WriteMargins(TableWriter table, PointMargins? margins)
+    {
+        table.Number(margins is null ? null : Kilo(PerDeg(margins.PowerPerPitch)));
+        table.Number(margins is null ? null : Kilo(PerDeg(margins.ThrustPerPitch)));
+        table.Number(margins is null ? null : Deg(margins.StallMargin));
+        table.Number(margins?.StallRadius);
+        table.Number(margins?.TipMach);
     }
 }

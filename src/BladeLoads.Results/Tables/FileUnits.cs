@@ -9,6 +9,15 @@ internal static class FileUnits
     /// <summary>rad -> deg.</summary>
     public static double Deg(double angle) => double.RadiansToDegrees(angle);
 
+    /// <summary>A slope by angle: per rad -> per deg.</summary>
+    public static double PerDeg(double slope) => slope * (Math.PI / 180);
+
+    /// <summary>J -> MWh.</summary>
+    public static double MegawattHours(double energy) => energy / 3.6e9;
+
+    /// <summary>s -> h.</summary>
+    public static double Hours(double time) => time / 3600;
+
     /// <summary>W, N, N m -> kW, kN, kNm.</summary>
     public static double Kilo(double value) => value / 1000;
 }

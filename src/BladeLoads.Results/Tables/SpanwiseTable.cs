@@ -16,6 +16,7 @@ public static class SpanwiseTable
         "wind_speed_m_s", "radius_m", "chord_m", "twist_deg", "section", "inflow_angle_deg", "angle_of_attack_deg", "reynolds",
         "axial_induction", "tangential_induction", "loss_factor", "lift_coefficient", "drag_coefficient",
         "normal_force_N_per_m", "tangential_force_N_per_m", "status",
+        "element_length_m",
     ];
 
     /// <summary>The table as UTF-8, or null where the case asks for no wind speed.</summary>
@@ -53,6 +54,7 @@ public static class SpanwiseTable
         table.Number(element.NormalForcePerLength);
         table.Number(element.TangentialForcePerLength);
         table.Text(StatusWords.Of(element.Marks));
+        table.Number(element.Length);
         table.EndRow();
     }
 }

@@ -11,7 +11,7 @@ namespace BladeLoads.Results.Tables;
 public sealed record SummaryRow(string Case, string Title, string Fingerprint, string State, CaseSummary? Summary);
 
 /// <summary>
-/// <c>summary.csv</c>: a row a case. A study with a baseline has five further columns at the end. The columns are a promise
+/// <c>summary.csv</c>: a row a case. A study with a baseline has further columns. The columns are a promise
 /// (docs/formats.md).
 /// </summary>
 public static class SummaryTable
@@ -39,12 +39,24 @@ public static class SummaryTable
         "largest_aero_root_flapwise_moment_difference_percent",
     ];
 
+    /// <summary>What later versions added, after all others.</summary>
+    public static ImmutableArray<string> FurtherColumns { get; } =
+    [
+        "tip_speed_ratio", "fine_pitch_deg", "searched", "annual_energy_MWh", "capacity_factor", "turbulent_annual_energy_MWh",
+        "turbulent_capacity_factor",
+    ];
+
+    public static ImmutableArray<string> FurtherBaselineColumns { get; } =
+        ["annual_energy_difference_percent", "capacity_factor_difference_percent"];
+
     /// <summary>The table as UTF-8.</summary>
     /// <param name="baseline">The case that others are compared with, by name; null for none.</param>
     public static byte[] Write(IReadOnlyCollection<SummaryRow> rows, string? baseline)
     {
         var compared = baseline is null ? null : rows.FirstOrDefault(r => r.Case == baseline)?.Summary;
-        using var table = new TableWriter(baseline is null ? Columns.AsSpan() : [.. Columns, .. BaselineColumns]);
+        using var table = new TableWriter(baseline is null
+            ? [.. Columns, .. FurtherColumns]
+            : [.. Columns, .. BaselineColumns, .. FurtherColumns, .. FurtherBaselineColumns]);
         foreach (var row in rows)
         {
             table.Text(row.Case);
@@ -52,9 +64,12 @@ public static class SummaryTable
             table.Text(row.Fingerprint);
             WriteFigures(table, row.Summary);
             table.Text(row.State);
+            var difference = row.Summary is null || compared is null ? null : BaselineDifference.Between(row.Summary, compared);
             if (baseline is not null)
-                WriteDifference(table, row.Summary is null || compared is null
-                    ? null : BaselineDifference.Between(row.Summary, compared));
+                WriteDifference(table, difference);
+            WriteFurther(table, row.Summary);
+            if (baseline is not null)
+                WriteFurtherDifference(table, difference);
             table.EndRow();
         }
         return table.ToBytes();
@@ -89,5 +104,23 @@ public static class SummaryTable
         table.Number(difference?.LargestThrust);
         table.Number(difference?.RatedWindSpeed);
         table.Number(difference?.LargestFlapwiseMoment);
+    }
+
+    private static void WriteFurther(TableWriter table, CaseSummary? summary)
+    {
+        var (best, energy) = (summary?.Best, summary?.Energy);
+        table.Number(best?.TipSpeedRatio);
+        table.Number(best is null ? null : Deg(best.FinePitch));
+        table.Text(best is { Searched: true } ? "yes" : "");
+        table.Number(energy?.AnnualEnergy is { } steady ? MegawattHours(steady) : null);
+        table.Number(energy?.CapacityFactor);
+        table.Number(energy?.TurbulentAnnualEnergy is { } turbulent ? MegawattHours(turbulent) : null);
+        table.Number(energy?.TurbulentCapacityFactor);
+    }
+
+    private static void WriteFurtherDifference(TableWriter table, BaselineDifference? difference)
+    {
+        table.Number(difference?.AnnualEnergy);
+        table.Number(difference?.CapacityFactor);
     }
 }

@@ -1,10 +1,11 @@
+using System.Globalization;
 using CsvHelper;
 
 namespace BladeLoads.Results.Tables;
 
 /// <summary>
-/// Writes our CSV tables: comma, LF, UTF-8 without a mark, numbers in the invariant culture as the shortest text that reads back as
-/// the same value, an empty cell where there is no number, and no text that a spreadsheet would run as a formula.
+/// Writes our CSV tables: comma, LF, UTF-8 without a mark, numbers in the invariant culture with 12 significant digits at
+/// most, an empty cell where there is no number, and no text that a spreadsheet would run as a formula.
 /// </summary>
 internal sealed class TableWriter : IDisposable
 {
@@ -16,6 +17,9 @@ internal sealed class TableWriter : IDisposable
         // The writer's own list lacks the line feed.
         InjectionCharacters = "=+-@\t\r\n",
     };
+
+    // Beyond these digits stands what a conversion of units left over: 21.999999999999996 for 22.
+    private const string Digits = "G12";
 
     private readonly MemoryStream _bytes = new();
     private readonly CsvWriter _csv;
@@ -33,10 +37,13 @@ internal sealed class TableWriter : IDisposable
     public void Number(double? value)
     {
         if (value is { } number && double.IsFinite(number))
-            _csv.WriteField(number == 0 ? 0.0 : number);   // -0 would read as a difference between two equal results
+            _csv.WriteField(number == 0 ? 0.0 : Rounded(number));   // -0 would read as a difference between two equal results
         else
             _csv.WriteField((string?)null);
     }
+
+    private static double Rounded(double number)
+        => double.Parse(number.ToString(Digits, CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
 
     public void EndRow() => _csv.EndRecord();
 

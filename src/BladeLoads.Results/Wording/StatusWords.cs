@@ -3,7 +3,7 @@ using BladeLoads.Rotor.Operation;
 
 namespace BladeLoads.Results.Wording;
 
-/// <summary>The words for regions and marks in tables, on the screen and in receipts.</summary>
+/// <summary>The words for marks in tables, on the screen and in receipts.</summary>
 public static class StatusWords
 {
     private static readonly (PointMarks Mark, string Word)[] OfPoints =
@@ -18,6 +18,7 @@ public static class StatusWords
         (PointMarks.RatedNotReached, "rated-not-reached"),
         (PointMarks.BelowCutIn, "below-cut-in"),
         (PointMarks.AboveCutOut, "above-cut-out"),
+        (PointMarks.ThrustNotHeld, "thrust-not-held"),
     ];
 
     private static readonly (ElementMarks Mark, string Word)[] OfElements =
@@ -38,16 +39,4 @@ public static class StatusWords
     /// <inheritdoc cref="Of(PointMarks)"/>
     public static string Of(ElementMarks marks)
         => marks == ElementMarks.None ? "" : string.Join(' ', OfElements.Where(m => marks.HasFlag(m.Mark)).Select(m => m.Word));
-
-    public static string Of(Region region) => region switch
-    {
-        Region.Idle => "idle",
-        Region.MinimumSpeed => "minimum speed",
-        Region.BestTipSpeedRatio => "best tip-speed ratio",
-        Region.MaximumSpeed => "maximum speed",
-        Region.RatedPower => "rated power",
-        Region.FixedSpeed => "fixed speed",
-        Region.Schedule => "schedule",
-        _ => throw new ArgumentOutOfRangeException(nameof(region), region, "has no word"),
-    };
 }

@@ -1,18 +1,17 @@
 namespace BladeLoads.Rotor.Air;
 
-/// <summary>The air a rotor works in. Both values are above 0; the type cannot hold others.</summary>
+/// <summary>The air a rotor works in. Every value is above 0 and finite; the type cannot hold others.</summary>
 public sealed record AirProperties
 {
-    /// <param name="density">Density, kg/m3; above 0.</param>
-    /// <param name="dynamicViscosity">Dynamic viscosity, Pa s; above 0.</param>
+    /// <param name="density">Density, kg/m3.</param>
+    /// <param name="dynamicViscosity">Dynamic viscosity, Pa s.</param>
+    /// <param name="speedOfSound">m/s; only the tip Mach number depends on it.</param>
     /// <exception cref="ArgumentOutOfRangeException">A value is not a positive finite number.</exception>
-    public AirProperties(double density, double dynamicViscosity)
+    public AirProperties(double density, double dynamicViscosity, double speedOfSound)
     {
-        if (!(density > 0) || !double.IsFinite(density))
-            throw new ArgumentOutOfRangeException(nameof(density), density, "must be positive and finite");
-        if (!(dynamicViscosity > 0) || !double.IsFinite(dynamicViscosity))
-            throw new ArgumentOutOfRangeException(nameof(dynamicViscosity), dynamicViscosity, "must be positive and finite");
-        (Density, DynamicViscosity) = (density, dynamicViscosity);
+        Density = PositiveAndFinite(density, nameof(density));
+        DynamicViscosity = PositiveAndFinite(dynamicViscosity, nameof(dynamicViscosity));
+        SpeedOfSound = PositiveAndFinite(speedOfSound, nameof(speedOfSound));
     }
 
     /// <summary>kg/m3.</summary>
@@ -20,4 +19,10 @@ public sealed record AirProperties
 
     /// <summary>Pa s.</summary>
     public double DynamicViscosity { get; }
+
+    /// <summary>m/s.</summary>
+    public double SpeedOfSound { get; }
+
+    private static double PositiveAndFinite(double value, string name)
+        => value > 0 && double.IsFinite(value) ? value : throw new ArgumentOutOfRangeException(name, value, "must be positive and finite");
 }

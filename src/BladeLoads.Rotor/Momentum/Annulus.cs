@@ -67,6 +67,19 @@ internal readonly struct Annulus
             : Sections.CoefficientRange.Hull(BlendedRange(from, Math.PI), BlendedRange(-Math.PI, to));
     }
 
+    /// <summary>
+    /// The angle of attack with the largest lift between -90 and 90 degrees, rad, among the rows of the tables; NaN where nothing lifts.
+    /// </summary>
+    public double AngleOfLargestLift()
+    {
+        var (largest, at) = (0.0, double.NaN);
+        for (var side = 0; side < (OuterWeight == 0 ? 1 : 2); side++)
+            foreach (var angle in (side == 0 ? Inner : Outer).Knots)
+                if (Math.Abs(angle) <= Math.PI / 2 && CoefficientsAt(angle).Lift is var lift && lift > largest)
+                    (largest, at) = (lift, angle);
+        return at;
+    }
+
     public double LossAt(double absoluteSine) => LossFactor.Of(TipExponent, absoluteSine) * LossFactor.Of(HubExponent, absoluteSine);
 
     public bool IsOutsideAngles(double angleOfAttack)

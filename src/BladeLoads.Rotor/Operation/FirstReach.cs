@@ -8,15 +8,15 @@ internal static class FirstReach
 {
     private const double GoldenShare = 0.3819660112501051;
 
-    /// <summary>The first place, in the order walked, where the excess is 0 or more; null where there is none.</summary>
+    /// <summary>Where the excess first reaches 0, in the order walked; null where it does not.</summary>
     /// <param name="excess">What is to reach 0; NaN counts as below.</param>
     /// <param name="places">In the order walked, rising or falling.</param>
-    /// <param name="tolerance">In the unit of the places; the answer lies on the side where the excess is 0 or more.</param>
-    public static double? Find(Func<double, double> excess, ReadOnlySpan<double> places, double tolerance)
+    /// <param name="tolerance">In the unit of the places: how far apart the two sides of the answer may be.</param>
+    public static Reach? Find(Func<double, double> excess, ReadOnlySpan<double> places, double tolerance)
     {
         var below = new Sample(places[0], excess(places[0]));
         if (below.Excess >= 0)
-            return below.Place;
+            return new Reach(below, below);
         var beforeThat = below;
         foreach (var place in places[1..])
         {
@@ -28,7 +28,6 @@ internal static class FirstReach
                 return Close(excess, below, here, tolerance);
             (beforeThat, below) = (below, here);
         }
-        // The last place has no neighbour beyond it: a peak between the last two shows only on its near side.
         return null;
     }
 
@@ -53,7 +52,7 @@ internal static class FirstReach
     }
 
     // Regula falsi with halving (Illinois) keeps both sides; a bisection steps in where it crawls, so that a jump is closed on as well.
-    private static double Close(Func<double, double> excess, Sample below, Sample reached, double tolerance)
+    private static Reach Close(Func<double, double> excess, Sample below, Sample reached, double tolerance)
     {
         var (fBelow, fReached) = (below.Excess, reached.Excess);
         var lastSide = 0;
@@ -79,8 +78,14 @@ internal static class FirstReach
                 lastSide = -1;
             }
         }
-        return reached.Place;
+        return new Reach(below, reached);
     }
-
-    private readonly record struct Sample(double Place, double Excess);
 }
+
+/// <summary>A place and the excess there.</summary>
+internal readonly record struct Sample(double Place, double Excess);
+
+/// <summary>The two sides of a place where an excess reaches 0.</summary>
+/// <param name="Below">Where it has not yet; the same as <paramref name="Reached"/> where it had from the start.</param>
+/// <param name="Reached">Where it is 0 or more.</param>
+internal readonly record struct Reach(Sample Below, Sample Reached);

@@ -1,7 +1,7 @@
 namespace BladeLoads.Rotor.Operation;
 
 /// <summary>What governs an operating point.</summary>
-public enum Region { Idle, MinimumSpeed, BestTipSpeedRatio, MaximumSpeed, RatedPower, FixedSpeed, Schedule }
+public enum Region { Idle, MinimumSpeed, BestTipSpeedRatio, MaximumSpeed, ThrustLimit, RatedPower, FixedSpeed, Schedule }
 
 /// <summary>What a reader of an operating point must know besides its numbers; written as words in the status column.</summary>
 [Flags]
@@ -32,6 +32,9 @@ public enum PointMarks
 
     /// <summary>No pitch from fine to feather makes rated power here.</summary>
     RatedNotReached = 128,
+
+    /// <summary>Thrust exceeds its limit even with the blades feathered.</summary>
+    ThrustNotHeld = 1024,
 
     /// <summary>Below the first wind speed of operation: the rotor is at rest.</summary>
     BelowCutIn = 256,

@@ -16,7 +16,6 @@ namespace BladeLoads.Rotor.Operation;
 /// <param name="WindSpeeds">m/s, positive, rising.</param>
 /// <param name="CutInWindSpeed">m/s; below it the rotor is at rest. 0 for none.</param>
 /// <param name="CutOutWindSpeed">m/s; above it the rotor is at rest. Positive infinity for none.</param>
-/// <param name="DrivetrainEfficiency">Electrical over rotor power, above 0 to 1.</param>
 public sealed record RotorCase(
     Blade Blade, SectionSet Sections, int BladeCount, double Cone, AirProperties Air, ImmutableArray<double> WindSpeeds,
-    Control Control, double CutInWindSpeed, double CutOutWindSpeed, double DrivetrainEfficiency, BalanceModel Model);
+    Control Control, double CutInWindSpeed, double CutOutWindSpeed, Drivetrain Drivetrain, BalanceModel Model);

@@ -117,7 +117,7 @@ public sealed class RotorModel
             | (annulus.IsOutsideReynolds ? ElementMarks.OutsideReynolds : 0);
         if (!balance.IsBalanced)
             return new ElementState(
-                e.Geometry.Radius, e.Geometry.Chord, e.Geometry.Twist, e.Section, double.NaN, double.NaN, reynolds, double.NaN,
+                e.Geometry.Radius, e.Geometry.Length, e.Geometry.Chord, e.Geometry.Twist, e.Section, double.NaN, double.NaN, reynolds, double.NaN,
                 double.NaN, double.NaN, double.NaN, double.NaN, double.NaN, double.NaN, double.NaN, balance.Evaluations,
                 marks | ElementMarks.Unbalanced);
 
@@ -127,7 +127,7 @@ public sealed class RotorModel
         var rotationalSpeed = tangentialSpeed * (1 + induction.Tangential);
         var pressure = 0.5 * _air.Density * ((axialSpeed * axialSpeed) + (rotationalSpeed * rotationalSpeed)) * e.Geometry.Chord;
         return new ElementState(
-            e.Geometry.Radius, e.Geometry.Chord, e.Geometry.Twist, e.Section, phi, angleOfAttack, reynolds, induction.Axial,
+            e.Geometry.Radius, e.Geometry.Length, e.Geometry.Chord, e.Geometry.Twist, e.Section, phi, angleOfAttack, reynolds, induction.Axial,
             induction.Tangential, induction.LossFactor, cl, cd, pressure * ((cl * cos) + (cd * sin)), pressure * ((cl * sin) - (cd * cos)),
             balance.Residual, balance.Evaluations,
             marks | (annulus.IsOutsideAngles(angleOfAttack) ? ElementMarks.OutsideAngles : 0));

@@ -48,6 +48,9 @@ internal sealed partial class SectionTable
         (_points, _blocks) = SummariseCells();
     }
 
+    /// <summary>The angles of all rows, and +-pi; rad, rising.</summary>
+    public ReadOnlySpan<double> Knots => _knots;
+
     public static SectionTable Prepare(ImmutableArray<Polar> polars)
     {
         var knots = new SortedSet<double>(polars.SelectMany(p => p.Angles)) { -Math.PI, Math.PI };

@@ -11,6 +11,8 @@ internal sealed record Bounds(double Low, bool LowIncluded, double High)
 
     public static Bounds ZeroOrMore { get; } = new(0, true, double.PositiveInfinity);
 
+    public static Bounds OneOrMore { get; } = new(1, true, double.PositiveInfinity);
+
     public static Bounds Share { get; } = new(0, true, 1);
 
     public static Bounds AboveZeroToOne { get; } = AboveZeroTo(1);

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using BladeLoads.Rotor.Air;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Fingerprints;
@@ -29,25 +28,25 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         var (blade, sections) = ReadBlade(values);
         var bladeCount = values.WholeNumber("rotor.blade_count", null, 1, MostBlades);
         var coneDeg = values.Number("rotor.cone_deg", CaseDefaults.ConeDeg, Bounds.Within(80));
-        var density = values.Number("air.density_kg_m3", CaseDefaults.Density, Bounds.AboveZeroTo(Limits.Density));
-        UsualRanges.Check(values, "air.density_kg_m3", density);
-        var viscosity = values.Number(
-            "air.dynamic_viscosity_Pa_s", CaseDefaults.DynamicViscosity, Bounds.AboveZeroTo(Limits.DynamicViscosity));
-        UsualRanges.Check(values, "air.dynamic_viscosity_Pa_s", viscosity);
+        var air = AirReader.Read(values);
         var windSpeeds = ReadWindSpeeds(values);
         var control = ControlReader.Read(values, windSpeeds, folder, tables);
         if (control.Strategy is { } strategy && blade?.Blade is { } shape)
             UsualRanges.CheckTipSpeed(values, strategy, shape, double.DegreesToRadians(coneDeg));
         var model = ModelReader.Read(values);
         var spanwise = SpanwiseReader.Read(values, windSpeeds);
+        var site = SiteReader.Read(values, folder, tables);
+        var further = new FurtherResults(
+            FurtherReader.ReadSurface(values, findings), site.Site, FurtherReader.ReadTurbulence(values), FurtherReader.ReadReferenceDensity(values));
         CheckTheRest(values);
         values.Note("solver", CanonicalText.Of(SolverVersion.Number));
-        if (!values.IsSound || blade?.Blade is null || sections?.Sections is null || control.Strategy is null)
+        if (!values.IsSound || blade?.Blade is null || sections?.Sections is null || control.Strategy is null
+            || control.Drivetrain is null || air is null)
             return null;
 
         var rotor = new RotorCase(
-            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), new AirProperties(density, viscosity),
-            windSpeeds, control.Strategy, control.CutIn, control.CutOut, control.DrivetrainEfficiency, model);
+            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), air, windSpeeds, control.Strategy,
+            control.CutIn, control.CutOut, control.Drivetrain, model);
         var determining = values.Determining;
         inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
         ImmutableArray<CanonicalTable> canonical = [blade.Canonical, .. sections.Tables.Select(table => table.Canonical)];
@@ -56,10 +55,16 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             inputs = inputs.Add(schedule.Input);
             canonical = canonical.Add(schedule.Canonical);
         }
+        if (site.Histogram is { } histogram)
+        {
+            inputs = inputs.Add(histogram.Input);
+            canonical = canonical.Add(histogram.Canonical);
+        }
         return new StudyCase(
             name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), inputs, determining)
         {
             Tables = canonical,
+            Further = further,
         };
     }
 
@@ -137,17 +142,8 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
     {
         values.Check("rotor.tilt_deg", Bounds.Within(90));
         values.Check("rotor.hub_height_m", Bounds.AboveZero);
-        values.Check("air.altitude_m", Bounds.FromTo(-500, 11_000));
-        values.Check("air.temperature_C", Bounds.FromTo(-100, 100));
-        values.Check("air.pressure_Pa", Bounds.AboveZero);
-        values.Check("air.relative_humidity", Bounds.Share);
         values.Check("wind.shear_exponent", Bounds.Within(2));
         values.Check("wind.yaw_deg", Bounds.Within(180));
-        values.Check("wind.turbulence_intensity", Bounds.Share);
-        values.Check("control.thrust_limit_kN", Bounds.AboveZero);
-        values.Check("site.mean_wind_speed_m_s", Bounds.AboveZero);
-        values.Check("site.weibull_shape", Bounds.AboveZero);
-        values.Check("site.availability", Bounds.Share);
         values.CheckedChoice("sections.extend", "viterna-1982");
         values.CheckedChoice("sections.augment", "snel-1993", "du-selig-1998");
     }

@@ -16,6 +16,13 @@ internal static class CaseDefaults
     public const double CutOutWindSpeed = double.PositiveInfinity;
     public const double DrivetrainEfficiency = 1;
 
+    public const double TurbulenceIntensity = 0;
+    public const string SpeedLimitedPitch = "hold";
+
+    public const double WeibullShape = 2;             // Rayleigh's distribution
+    public const double Availability = 1;
+    public const double SurfaceWindSpeed = 8;         // m/s; where the best tip-speed ratio is searched for too
+
     public const int Elements = 40;
     public const string Spacing = "cosine";
     public const string HeavyLoading = "glauert-1935";

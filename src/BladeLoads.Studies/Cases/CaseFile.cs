@@ -38,16 +38,19 @@ internal sealed record CaseFile(
 
     /// <summary>
     /// The case with what it leaves out taken from the study's starting values, key by key. One value in the case takes the place
-    /// of a sweep over the same key there.
+    /// of a sweep over the same key there, and a key in the case that of one there that does not go with it.
     /// </summary>
     public CaseFile StartingFrom(CaseFile start) => this with
     {
-        Entries = start.Entries.SetItems(Entries),
-        Sweep = [.. start.Sweep.Where(s => !HasOwn(s.Known)), .. Sweep],
+        Entries = start.Entries.RemoveRange(start.Entries.Keys.Where(HasOwnInPlaceOf)).SetItems(Entries),
+        Sweep = [.. start.Sweep.Where(s => !HasOwn(s.Known.Path) && !HasOwnInPlaceOf(s.Known.Path)), .. Sweep],
         DoubtfulTables = DoubtfulTables.Union(start.DoubtfulTables),
     };
 
-    private bool HasOwn(KnownKey known) => Entries.ContainsKey(known.Path) || Sweep.Any(own => own.Known == known);
+    private bool HasOwn(string path) => Entries.ContainsKey(path) || Sweep.Any(own => own.Known.Path == path);
+
+    private bool HasOwnInPlaceOf(string path)
+        => KnownKeys.Exclusive.Any(pair => (pair.One == path && HasOwn(pair.Other)) || (pair.Other == path && HasOwn(pair.One)));
 
     private sealed class Sorting(string file, Findings findings)
     {

@@ -49,6 +49,19 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         return double.NaN;
     }
 
+    /// <summary>A number, or null for <c>"best"</c> and for a key that is left out; NaN where it is wrong.</summary>
+    public double? NumberOrBest(string path, Bounds bounds)
+    {
+        if (Find(path) is not { } entry || entry.Value is TomlValue.Text { Value: "best" })
+        {
+            Note(path, "best");
+            return null;
+        }
+        if (entry.Value is TomlValue.Number or TomlValue.Text { Value: [(>= '0' and <= '9') or '-' or '+' or '.' or ' ', ..] })
+            return Number(path, double.NaN, bounds);
+        return RefuseValue(path, $"is {entry.Value.Found}; give a number, or \"best\" for the one with the highest power coefficient");
+    }
+
     public double? OptionalNumber(string path, Bounds bounds)
     {
         double? value = Has(path) ? Check(path, bounds) : null;
@@ -151,6 +164,15 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
 
     /// <summary>Reports at a key.</summary>
     public void RefuseKey(string path, string text) => Refuse(Find(path)!.Key, text);
+
+    /// <summary>Two keys of which either does alone, where both are there; told at the first.</summary>
+    /// <param name="why">What the other does already.</param>
+    public void RefuseTogether(string path, string other, string why)
+    {
+        if (Find(path) is not { } entry || Find(other) is not { } second)
+            return;
+        RefuseKey(path, $"'{entry.Known.Name}' does not go with {second.Known.Name}, which {why}; leave one of them out");
+    }
 
     public void Refuse(Place at, string text)
     {

@@ -10,7 +10,7 @@ namespace BladeLoads.Studies.Cases;
 /// <summary>What [control] says: the strategy, the wind speeds of operation, the drivetrain.</summary>
 /// <param name="Strategy">Null when an error keeps it from being known.</param>
 internal sealed record ControlValues(
-    Control? Strategy, double CutIn, double CutOut, double DrivetrainEfficiency, ScheduleTable? Schedule);
+    Control? Strategy, double CutIn, double CutOut, Drivetrain? Drivetrain, ScheduleTable? Schedule);
 
 /// <summary>Reads [control].</summary>
 internal static class ControlReader
@@ -36,15 +36,15 @@ internal static class ControlReader
         var cutOut = values.Number(
             "control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Bounds.AboveZeroTo(Limits.WindSpeed));
         RefuseExchanged(values, "control.cut_in_wind_speed_m_s", cutIn, "control.cut_out_wind_speed_m_s", cutOut);
-        var efficiency = values.Number("control.drivetrain_efficiency", CaseDefaults.DrivetrainEfficiency, Bounds.AboveZeroToOne);
         var ratedPowerKiloWatt = values.OptionalNumber("control.rated_power_kW", Bounds.AboveZeroTo(Limits.RatedPowerKiloWatt));
         UsualRanges.Check(values, "control.rated_power_kW", ratedPowerKiloWatt ?? double.NaN);
         var ratedPower = ratedPowerKiloWatt * 1e3;
+        var drivetrain = DrivetrainReader.Read(values, ratedPower);
 
         if (!values.Has("control.strategy"))
             values.Missing("control.strategy", null);
         var strategy = values.Choice("control.strategy", "", VariableSpeed, FixedSpeed, BySchedule);
-        var read = new ControlValues(null, cutIn, cutOut, efficiency, null);
+        var read = new ControlValues(null, cutIn, cutOut, drivetrain, null);
         if (strategy is null or "")
             return read;
         RefuseKeysOfOthers(values, strategy);
@@ -58,22 +58,30 @@ internal static class ControlReader
 
     private static Control.VariableSpeed ReadVariableSpeed(CaseValues values, double? ratedPower)
     {
-        var tipSpeedRatio = values.RequiredNumber("control.tip_speed_ratio", Bounds.AboveZero, NotYet.TipSpeedRatioLeftOut);
-        var finePitch = values.RequiredNumber("control.fine_pitch_deg", Bounds.Within(90), NotYet.FinePitchLeftOut);
+        var tipSpeedRatio = values.NumberOrBest("control.tip_speed_ratio", Bounds.AboveZero);
+        var finePitch = values.NumberOrBest("control.fine_pitch_deg", Bounds.Within(90));
         var slowest = values.Number(
             "control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Bounds.FromTo(0, Limits.RotorSpeedRpm));
         var fastest = values.Number(
             "control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Bounds.AboveZeroTo(Limits.RotorSpeedRpm));
         RefuseExchanged(values, "control.min_rotor_speed_rpm", slowest, "control.max_rotor_speed_rpm", fastest);
-        values.CheckedChoice("control.speed_limited_pitch", "hold", "best");
+        var speedLimitedPitch = values.Choice("control.speed_limited_pitch", CaseDefaults.SpeedLimitedPitch, "hold", "best");
         var aboveRated = values.Choice("control.above_rated", CaseDefaults.AboveRated(values.Has("control.rated_power_kW")),
             "pitch-to-feather", "pitch-to-stall", "none");
-        if (aboveRated == "pitch-to-feather" && !values.Has("control.rated_power_kW"))
+        if (aboveRated is "pitch-to-feather" or "pitch-to-stall" && !values.Has("control.rated_power_kW"))
             values.RefuseValue("control.above_rated",
-                "is 'pitch-to-feather' without a rated power; give rated_power_kW or leave above_rated out");
+                $"is '{aboveRated}' without a rated power; give rated_power_kW or leave above_rated out");
+        var thrustLimit = values.OptionalNumber("control.thrust_limit_kN", Bounds.AboveZero) * 1e3;
         return new Control.VariableSpeed(
-            tipSpeedRatio, double.DegreesToRadians(finePitch), RadiansPerSecond(slowest), RadiansPerSecond(fastest),
-            ratedPower, aboveRated == "pitch-to-feather" ? AboveRated.PitchToFeather : AboveRated.None);
+            tipSpeedRatio, finePitch is { } deg ? double.DegreesToRadians(deg) : null, RadiansPerSecond(slowest), RadiansPerSecond(fastest),
+            speedLimitedPitch == "best" ? SpeedLimitedPitch.Best : SpeedLimitedPitch.Hold, ratedPower,
+            aboveRated switch
+            {
+                "pitch-to-feather" => AboveRated.PitchToFeather,
+                "pitch-to-stall" => AboveRated.PitchToStall,
+                _ => AboveRated.None,
+            },
+            thrustLimit);
     }
 
     private static Control.FixedSpeed ReadFixedSpeed(CaseValues values, double? ratedPower)

@@ -36,6 +36,7 @@ internal static class KnownKeys
         new("air.temperature_C", "15", true),
         new("air.pressure_Pa", "101325", true),
         new("air.relative_humidity", "0.5", true),
+        new("air.reference_density_kg_m3", "1.225", true),
         new("wind.speeds_m_s", "{ from = 3, to = 25, step = 0.5 }", false),
         new("wind.shear_exponent", "0.2", true),
         new("wind.yaw_deg", "10", true),
@@ -58,6 +59,11 @@ internal static class KnownKeys
         new("site.mean_wind_speed_m_s", "7.5", true),
         new("site.weibull_shape", "2", true),
         new("site.availability", "0.97", true),
+        new("site.losses", "{ wakes = 0.06, grid = 0.02 }", false),
+        new("site.histogram", "\"../site/tarn-mast.csv\"", true),
+        new("surface.tip_speed_ratios", "{ from = 4, to = 12, step = 0.5 }", false),
+        new("surface.pitches_deg", "{ from = -4, to = 20, step = 1 }", false),
+        new("surface.wind_speed_m_s", "8", true),
         new("model.elements", "40", true),
         new("model.spacing", "\"cosine\"", true),
         new("model.losses", "[\"tip\", \"hub\"]", false),
@@ -74,6 +80,14 @@ internal static class KnownKeys
     /// <summary>Tables of a case file, <c>sweep</c> included.</summary>
     public static ImmutableArray<string> Tables { get; } =
         [.. All.Select(key => key.Table).Where(table => table.Length > 0).Distinct(StringComparer.Ordinal), SweepTable];
+
+    /// <summary>Pairs of which a case takes one: of a pair, what the case states itself takes the place of a starting value.</summary>
+    public static ImmutableArray<(string One, string Other)> Exclusive { get; } =
+    [
+        ("air.density_kg_m3", "air.altitude_m"), ("air.density_kg_m3", "air.temperature_C"), ("air.density_kg_m3", "air.pressure_Pa"),
+        ("air.density_kg_m3", "air.relative_humidity"), ("air.altitude_m", "air.pressure_Pa"),
+        ("site.histogram", "site.mean_wind_speed_m_s"), ("site.histogram", "site.weibull_shape"),
+    ];
 
     public static KnownKey? Find(string path) => ByPath.GetValueOrDefault(path);
 

@@ -14,6 +14,7 @@ internal static class UsualRanges
     private static readonly (string Path, double Low, double High, string Sentence)[] Lines =
     [
         ("air.density_kg_m3", 0.5, 1.6, "air has 0.5 to 1.6 kg/m3"),
+        ("air.reference_density_kg_m3", 0.5, 1.6, "air has 0.5 to 1.6 kg/m3"),
         ("air.dynamic_viscosity_Pa_s", 1e-5, 3e-5, "air has 1e-5 to 3e-5 Pa s"),
         ("control.rated_power_kW", 0, 100_000, "no rotor makes more than 100,000 kW; is it in watts?"),
         ("model.elements", 10, double.PositiveInfinity, "below 10 the loads along the blade are coarse"),

@@ -6,7 +6,7 @@ namespace BladeLoads.Studies.Fingerprints;
 /// A table as it counts in a fingerprint: its parsed values, a row a line, without a header. One object a table, however many cases
 /// share it.
 /// </summary>
-/// <param name="key">What the table is in a case's values: <c>blade</c>, <c>section.NAME</c>, <c>control.schedule</c>.</param>
+/// <param name="key">What the table is in a case's values: <c>blade</c>, <c>section.NAME</c>, <c>control.schedule</c>, <c>site.histogram</c>.</param>
 /// <param name="hash">Of the text as UTF-8, 64 lower-case hexadecimal digits: what stands for the table in a case's values.</param>
 /// <param name="file">The file it was read from, relative to the study folder.</param>
 /// <param name="lines">Gives the rows again; asked for only when the text is.</param>

@@ -15,12 +15,15 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
     private readonly Dictionary<string, BladeTable?> _blades = new(StringComparer.Ordinal);
     private readonly Dictionary<string, PolarTable?> _polars = new(StringComparer.Ordinal);
     private readonly Dictionary<string, ScheduleTable?> _schedules = new(StringComparer.Ordinal);
+    private readonly Dictionary<string, HistogramTable?> _histograms = new(StringComparer.Ordinal);
     private readonly Dictionary<(string Blade, string Set), BladeSections> _sections = [];
 
     /// <summary>Null when the file cannot be read at all, which is reported.</summary>
     public BladeTable? Blade(string fullPath) => Once(_blades, fullPath, input => BladeTable.Parse(input, findings));
 
     public ScheduleTable? Schedule(string fullPath) => Once(_schedules, fullPath, input => ScheduleTable.Parse(input, findings));
+
+    public HistogramTable? Histogram(string fullPath) => Once(_histograms, fullPath, input => HistogramTable.Parse(input, findings));
 
     /// <param name="blade">Names the sections; those of the set that it does not name are not read.</param>
     /// <param name="setFolder">Full path of the folder of polar tables.</param>

@@ -93,7 +93,7 @@ internal static class RunCommand
         var reuse = request.All ? null : new CaseReuse(plan, results, publisher.Get(), surroundings.Disk, identity);
         var work = new CaseWork(
             surroundings.Solve, publisher.Get(), results, identity, log.Logger, surroundings.Time, surroundings.WaitForFile, reuse);
-        var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c.Rotor)), surroundings.Time);
+        var progress = new RunProgress(due.Length, due.Sum(c => CaseGroups.Estimate(c)), surroundings.Time);
         using var claims = new Claims(results, surroundings.Disk);
         RunResult Run() => StudyRun.Solve(due, AgainOf(plan, request), work, claims, request.Workers, progress, log.Logger, signals.Stopping);
         RunResult Shown() => request.Quiet ? Run()

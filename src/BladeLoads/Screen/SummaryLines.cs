@@ -13,24 +13,47 @@ internal static class SummaryLines
 
     private const int WidestName = 40;
     private const int RowsShown = 100;
+    private const string MoreTitle = "best found, year at the site";
 
     /// <param name="baseline">The row that others are compared with; null for a study without one.</param>
     /// <param name="folder">Where the results lie, told last.</param>
     public static void Write(IReadOnlyCollection<SummaryRow> rows, SummaryRow? baseline, string folder, TextWriter output)
     {
         var shown = rows.Take(RowsShown).ToList();
-        var width = Math.Max("case".Length, shown.Select(r => Name(r.Case).Length).DefaultIfEmpty(0).Max());
+        var width = Math.Max(HasMore(shown) ? MoreTitle.Length : "case".Length, shown.Select(r => Name(r.Case).Length).DefaultIfEmpty(0).Max());
         output.WriteLine();
         output.WriteLine(Row("case", width, ("best cp", 7), ("at TSR", 7), ("power kW", 9), ("rated m/s", 10), ("thrust kN", 10), ("at m/s", 7), ("flapwise kNm", 13)));
         foreach (var row in shown)
             output.WriteLine(Figures(row, width));
         if (rows.Count > shown.Count)
             output.WriteLine($"... and {rows.Count - shown.Count} more in {SummaryTable.FileName}");
+        WriteStrategyAndEnergy(shown, width, output);
         if (baseline is not null)
             WriteDifferences(shown, baseline, width, output);
         output.WriteLine();
         output.WriteLine(Caution);
         output.WriteLine(Printable.Of($"results: {folder}"));
+    }
+
+    // Rows that have a searched point or a year; none, none of it.
+    private static void WriteStrategyAndEnergy(List<SummaryRow> rows, int width, TextWriter output)
+    {
+        if (!HasMore(rows))
+            return;
+        var told = rows.Where(HasMore).ToList();
+        output.WriteLine();
+        output.WriteLine(Row(
+            MoreTitle, width, ("TSR", 7), ("pitch deg", 11), ("net MWh", 10), ("capacity %", 12), ("turbulent MWh", 15)));
+        foreach (var row in told)
+        {
+            var best = row.Summary!.Best is { Searched: true } searched ? searched : null;
+            var energy = row.Summary.Energy;
+            output.WriteLine(Row(
+                Name(row.Case), width, (Figure(best?.TipSpeedRatio), 7),
+                (best is null ? "-" : double.RadiansToDegrees(best.FinePitch).ToString("0.000", CultureInfo.InvariantCulture), 11),
+                (Figure(energy?.AnnualEnergy / 3.6e9), 10), (Figure(100 * energy?.CapacityFactor), 12),
+                (Figure(energy?.TurbulentAnnualEnergy / 3.6e9), 15)));
+        }
     }
 
     private static void WriteDifferences(List<SummaryRow> rows, SummaryRow baseline, int width, TextWriter output)
@@ -41,8 +64,9 @@ internal static class SummaryLines
             output.WriteLine(Printable.Of($"no comparison: the baseline '{baseline.Case}' has no current result"));
             return;
         }
+        var hasEnergy = baseline.Summary.Energy?.AnnualEnergy is not null;
         output.WriteLine(Printable.Of($"difference to {baseline.Case}, %"));
-        output.WriteLine(Row("case", width, ("best cp", 8), ("power", 9), ("rated", 9), ("thrust", 9), ("flapwise", 9)));
+        output.WriteLine(Row("case", width, ("best cp", 8), ("power", 9), ("rated", 9), ("thrust", 9), ("flapwise", 9)) + (hasEnergy ? "    energy" : ""));
         foreach (var row in rows)
             if (row.Summary is not null && row.Case != baseline.Case)
             {
@@ -50,9 +74,14 @@ internal static class SummaryLines
                 output.WriteLine(Row(
                     Name(row.Case), width, (Percent(difference.BestPowerCoefficient), 8), (Percent(difference.LargestElectricalPower), 9),
                     (Percent(difference.RatedWindSpeed), 9), (Percent(difference.LargestThrust), 9),
-                    (Percent(difference.LargestFlapwiseMoment), 9)));
+                    (Percent(difference.LargestFlapwiseMoment), 9))
+                    + (hasEnergy ? "  " + Percent(difference.AnnualEnergy).PadLeft(8) : ""));
             }
     }
+
+    private static bool HasMore(SummaryRow row) => row.Summary is { Energy: not null } or { Best.Searched: true };
+
+    private static bool HasMore(List<SummaryRow> rows) => rows.Exists(HasMore);
 
     private static string Figures(SummaryRow row, int width)
     {

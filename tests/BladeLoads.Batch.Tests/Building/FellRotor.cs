@@ -19,8 +19,8 @@ internal static class FellRotor
         var polar = Polar.FromRows(double.NaN, [-3, 0, 3], [0, 1, 0], [0.1, 0.01, 0.1]);
         return new RotorCase(
             Blade.FromStations([new(1, 1, 0.2, "fell-30"), new(10, 0.5, 0, "fell-30")]),
-            SectionSet.Of([Section.FromPolars("fell-30", [polar])]), 3, 0, new AirProperties(1.225, 1.789e-5),
-            [.. Enumerable.Range(1, windSpeeds).Select(i => (double)i)], new Control.FixedSpeed(2, 0, null), 0, double.PositiveInfinity, 1,
+            SectionSet.Of([Section.FromPolars("fell-30", [polar])]), 3, 0, new AirProperties(1.225, 1.789e-5, 340.29),
+            [.. Enumerable.Range(1, windSpeeds).Select(i => (double)i)], new Control.FixedSpeed(2, 0, null), 0, double.PositiveInfinity, Drivetrain.Constant(1),
             new BalanceModel(elements, ElementSpacing.Uniform, true, true, HeavyLoading.Glauert1935, BalanceWith.LiftAndDrag));
     }
 
@@ -39,7 +39,7 @@ internal static class FellRotor
 
     /// <summary>A curve that depends on the case alone; its powers are multiples of the wind speed.</summary>
     public static PowerCurve Curve(RotorCase rotor, PointMarks marks = PointMarks.None) => new(
-        [.. rotor.WindSpeeds.Select(v => Point(v, rotor.Model.Elements, marks))], 2.5, PointMarks.None, rotor.WindSpeeds.Length);
+        [.. rotor.WindSpeeds.Select(v => Point(v, rotor.Model.Elements, marks))], 2.5, null, [], PointMarks.None, rotor.WindSpeeds.Length);
 
     /// <summary>The same curve with every thrust so many times as large.</summary>
     public static PowerCurve Scaled(PowerCurve curve, double factor) => curve with
@@ -51,13 +51,15 @@ internal static class FellRotor
         new OperatingPoint(windSpeed, Math.PI, Math.PI / 180),
         marks.HasFlag(PointMarks.Unbalanced) ? null : Loads(windSpeed),
         marks.HasFlag(PointMarks.Unbalanced) ? double.NaN : 900 * windSpeed,
-        Region.FixedSpeed, marks, [.. Enumerable.Range(0, elements).Select(Element)]);
+        Region.FixedSpeed, marks, marks.HasFlag(PointMarks.Unbalanced) ? null : Margins, [.. Enumerable.Range(0, elements).Select(Element)]);
+
+    public static PointMargins Margins { get; } = new(-18e3 / Math.PI, 360e3 / Math.PI, Math.PI / 36, 7.5, 0.25);
 
     public static RotorLoads Loads(double windSpeed) => new(
         2000 * windSpeed, 300, 1000 * windSpeed, 31, 31 / windSpeed, 0.4 - 0.01 * windSpeed, 0.8, 0.05, 7000, -100, 6000 - 100 * windSpeed, 50);
 
     public static ElementState Element(int index) => new(
-        2.5 + index, 0.75, 0.1, "fell-30", 0.2, 0.1, 1.5e6, 0.3, 0.01, 0.9, 1.1, 0.02, 500, 50, 1e-13, 9 + index, ElementMarks.None);
+        2.5 + index, 1, 0.75, 0.1, "fell-30", 0.2, 0.1, 1.5e6, 0.3, 0.01, 0.9, 1.1, 0.02, 500, 50, 1e-13, 9 + index, ElementMarks.None);
 
     public static string Hash(string text) => Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(text)));
 }

@@ -24,7 +24,7 @@ internal static class Runs
         var work = new CaseWork(
             solve ?? ((rotor, _) => FellRotor.Curve(rotor)), publisher, results, new RunIdentity(solverVersion, "0.0.0"), logger,
             TimeProvider.System, waitForFile ?? (_ => { }));
-        var progress = new RunProgress(cases.Count, cases.Sum(c => CaseGroups.Estimate(c.Rotor)), TimeProvider.System);
+        var progress = new RunProgress(cases.Count, cases.Sum(c => CaseGroups.Estimate(c)), TimeProvider.System);
         using var claims = new Claims(results, disk ?? new Disk());
         return StudyRun.Solve(cases, again ?? new Again([.. cases.Select(c => c.Name)], Lost: false), work, claims, workers, progress, logger, stopping, pause);
     }

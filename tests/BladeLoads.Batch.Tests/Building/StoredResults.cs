@@ -34,7 +34,7 @@ internal static class StoredResults
         IReadOnlyDictionary<string, string>? values = null)
     {
         var curve = File.ReadAllBytes(Path.Join(folder, CurveTable.FileName));
-        var summary = CaseSummary.Of(new PowerCurve([], rated, PointMarks.None, 0)) with { Marks = marks };
+        var summary = CaseSummary.Of(new PowerCurve([], rated, null, [], PointMarks.None, 0)) with { Marks = marks };
         File.WriteAllBytes(Path.Join(folder, Receipt.FileName), ReceiptFile.Write(new Receipt(
             1, "fell", name, name, fingerprint, 1, "0.0.0", new DateTimeOffset(2026, 1, day, 0, 0, 0, TimeSpan.Zero), 0,
             values ?? new Dictionary<string, string>(), [], [ResultFile.Of(CurveTable.FileName, curve)], summary, "")));

@@ -30,6 +30,7 @@ public sealed class ResultComparisonTests : IDisposable
                 summary.LargestElectricalPower, summary.LargestThrust, summary.LargestOutOfPlaneMoment, summary.LargestInPlaneMoment,
                 summary.LargestFlapwiseMoment, summary.LargestEdgewiseMoment,
             }.Select(e => (e?.Value / 1000, e?.WindSpeed)),
+            (summary.Energy?.AnnualEnergy / 3.6e9, null),
         ];
         Assert.Equal(written, Figures.All.Select(f => (f.Of(stored)?.Value, f.Of(stored)?.WindSpeed)));
         Assert.Empty(stored.Doubts);
@@ -199,6 +200,7 @@ public sealed class ResultComparisonTests : IDisposable
             new,old,compared,largest root in-plane moment,kNm,7,8,7,8,0,0,,
             new,old,compared,largest root flapwise moment,kNm,100,8,125,8,25,25,,
             new,old,compared,largest root edgewise moment,kNm,1,8,1,8,0,0,,
+            new,old,compared,annual energy,MWh,,,,,,,,
             new,old,compared,electrical power where it changed most,kW,200,8,250,8,50,25,,
             new,old,compared,thrust where it changed most,kN,20,8,25,8,5,25,,
             new,old,compared,mark pitch-jump,points,1,,,,-1,,lost at 8 m/s,

@@ -13,7 +13,7 @@ public class SpanwiseTableTests
     {
         const string promised =
             "wind_speed_m_s,radius_m,chord_m,twist_deg,section,inflow_angle_deg,angle_of_attack_deg,reynolds,axial_induction,"
-            + "tangential_induction,loss_factor,lift_coefficient,drag_coefficient,normal_force_N_per_m,tangential_force_N_per_m,status";
+            + "tangential_induction,loss_factor,lift_coefficient,drag_coefficient,normal_force_N_per_m,tangential_force_N_per_m,status,element_length_m";
         Assert.Equal(promised, Lines(FellRotor.Curve(FellRotor.Rotor()))[0]);
     }
 
@@ -51,8 +51,8 @@ public class SpanwiseTableTests
         };
         var point = FellRotor.Point(2) with { Elements = [element] };
         Assert.Equal(
-            "2,2.5,0.75,0,fell-30,,,1500000,,,,,,,,unbalanced outside-reynolds",
-            Lines(new PowerCurve([point], null, PointMarks.None, 1))[1]);
+            "2,2.5,0.75,0,fell-30,,,1500000,,,,,,,,unbalanced outside-reynolds,1",
+            Lines(new PowerCurve([point], null, null, [], PointMarks.None, 1))[1]);
     }
 
     private static string[] Lines(PowerCurve curve, params double[] windSpeeds)

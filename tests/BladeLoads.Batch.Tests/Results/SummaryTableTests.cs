@@ -28,7 +28,30 @@ public class SummaryTableTests
     {
         var points = new[] { (11.0, 1.9e6), (12.0, 2e6), (13.0, 2e6 + 1e-5) }
             .Select(p => FellRotor.Point(p.Item1) with { ElectricalPower = p.Item2 });
-        Assert.Equal(12, CaseSummary.Of(new PowerCurve([.. points], 11.5, PointMarks.None, 3)).LargestElectricalPower!.WindSpeed);
+        Assert.Equal(12, CaseSummary.Of(new PowerCurve([.. points], 11.5, null, [], PointMarks.None, 3)).LargestElectricalPower!.WindSpeed);
+    }
+
+    [Fact]
+    public void The_largest_are_taken_over_design_points_too_and_not_over_a_rotor_at_rest()
+    {
+        var parked = FellRotor.Point(26, marks: PointMarks.AboveCutOut) with { Loads = FellRotor.Loads(26) with { Thrust = 9e6 } };
+        var peak = FellRotor.Point(11.2) with { Loads = FellRotor.Loads(11.2) with { Thrust = 40e3 } };
+        var curve = new PowerCurve(
+            [FellRotor.Point(11), FellRotor.Point(12), parked], null, null, [new DesignPoint("largest thrust", peak)], PointMarks.None, 3);
+        Assert.Equal(new Extreme(40e3, 11.2), CaseSummary.Of(curve).LargestThrust);
+        Assert.Equal(12, CaseSummary.Of(curve).LargestElectricalPower!.WindSpeed);
+    }
+
+    [Fact]
+    public void The_best_point_and_the_energy_stand_in_the_units_of_their_columns()
+    {
+        var summary = Summary(0.5, 1, 1) with
+        {
+            Best = new BestPoint(8.25, Math.PI / 90, 0.48, Searched: true), Energy = new EnergySummary(7.2e12, 0.25, null, null),
+        };
+        var rows = Lines("base", new SummaryRow("base", "", "", "current", summary with { Energy = new EnergySummary(7.2e12 / 1.1, 0.2, null, null) }),
+            new SummaryRow("one", "", "", "current", summary));
+        Assert.EndsWith(",8.25,2,yes,2000,0.25,,,10,25", rows[2], StringComparison.Ordinal);
     }
 
     [Fact]
@@ -54,7 +77,7 @@ public class SummaryTableTests
     public void A_case_without_a_current_result_keeps_its_row_and_has_no_figures()
     {
         var lines = Lines(null, new SummaryRow("clean", "Clean", "abc", "out of date", null));
-        Assert.Equal("clean,Clean,abc,,,,,,,,,,,,,,,,,,,,out of date", lines[1]);
+        Assert.Equal("clean,Clean,abc,,,,,,,,,,,,,,,,,,,,out of date,,,,,,,", lines[1]);
     }
 
     [Fact]
@@ -69,16 +92,18 @@ public class SummaryTableTests
     }
 
     [Fact]
-    public void A_study_with_a_baseline_has_five_columns_more()
+    public void A_study_with_a_baseline_has_columns_more()
     {
         var row = new SummaryRow("clean", "", "", "current", Summary(0.5, 1, 1));
-        Assert.Equal(SummaryTable.Columns.Length, Lines(null, row)[0].Split(',').Length);
+        Assert.Equal(SummaryTable.Columns.Length + SummaryTable.FurtherColumns.Length, Lines(null, row)[0].Split(',').Length);
         var compared = Lines("clean", row);
         Assert.EndsWith(
             ",state,best_power_coefficient_difference_percent,largest_electrical_power_difference_percent,"
-            + "largest_thrust_difference_percent,rated_wind_speed_difference_percent,largest_aero_root_flapwise_moment_difference_percent",
+            + "largest_thrust_difference_percent,rated_wind_speed_difference_percent,largest_aero_root_flapwise_moment_difference_percent,"
+            + "tip_speed_ratio,fine_pitch_deg,searched,annual_energy_MWh,capacity_factor,turbulent_annual_energy_MWh,turbulent_capacity_factor,"
+            + "annual_energy_difference_percent,capacity_factor_difference_percent",
             compared[0], StringComparison.Ordinal);
-        Assert.EndsWith(",current,0,0,0,0,0", compared[1], StringComparison.Ordinal);
+        Assert.EndsWith(",current,0,0,0,0,0,,,,,,,,,", compared[1], StringComparison.Ordinal);
     }
 
     [Theory]

@@ -42,7 +42,7 @@ public sealed class StudyRunTests : IDisposable
         Runs.Solve(one, cases, workers: 1);
         Runs.Solve(four, [.. cases.Reverse()], workers: 4);
         var tables = Tables(one);
-        Assert.Equal(80, tables.Count);
+        Assert.Equal(120, tables.Count);
         Assert.Equal(tables, Tables(four));
     }
 
@@ -134,7 +134,7 @@ public sealed class StudyRunTests : IDisposable
         Assert.Equal("1.225", receipt.Values["air.density_kg_m3"]);
         Assert.Equal(studyCase.Inputs, receipt.Inputs);
         Assert.Contains("IEC 61400-1", receipt.Caution, StringComparison.Ordinal);
-        Assert.Equal(["power-curve.csv", "spanwise.csv", "case.log"], receipt.Files.Select(f => f.Name));
+        Assert.Equal(["power-curve.csv", "spanwise.csv", "design-points.csv", "case.log"], receipt.Files.Select(f => f.Name));
         Assert.All(receipt.Files, f => Assert.Equal(f, ResultFile.Of(f.Name, File.ReadAllBytes(Path.Join(Results.Case("clean"), f.Name)))));
     }
 

@@ -23,6 +23,27 @@ public sealed class Documented_columns
         => Assert.Equal<string>(SummaryTable.Columns, DocumentedTable.Names("### summary.csv"));
 
     [Fact]
+    public void Of_the_design_points_are_the_name_and_those_of_the_curve()
+        => Assert.Equal<string>(DesignPointsTable.Columns, ["point", .. DocumentedTable.Names("### power-curve.csv")]);
+
+    [Fact]
+    public void Of_the_surface_are_those_written_in_their_order()
+        => Assert.Equal<string>(SurfaceTable.Columns, DocumentedTable.Names("### coefficient-surface.csv"));
+
+    [Fact]
+    public void Of_the_energy_are_those_written_in_their_order()
+        => Assert.Equal<string>(EnergyTable.Columns, DocumentedTable.Names("### annual-energy.csv"));
+
+    [Fact]
+    public void Of_the_normalisation_are_those_written_in_their_order()
+        => Assert.Equal<string>(NormalisationTable.Columns, DocumentedTable.Names("### density-normalisation.csv"));
+
+    [Fact]
+    public void Added_to_the_summary_are_those_written_in_their_order()
+        => Assert.Equal<string>([.. SummaryTable.FurtherColumns, .. SummaryTable.FurtherBaselineColumns], DocumentedTable.Names(
+            "After all of these, with or without a baseline (the last two only with one):"));
+
+    [Fact]
     public void Of_the_baseline_are_those_written_in_their_order()
         => Assert.Equal<string>(SummaryTable.BaselineColumns, DocumentedTable.Names(
             "With a `baseline` in study.toml, five columns follow: how far the case lies from the baseline, in percent of the baseline's value."));
@@ -48,7 +69,7 @@ public sealed class Documented_columns
 
     [Fact]
     public void Hold_every_region_by_its_word()
-        => Assert.Equal(Enum.GetValues<Region>().Select(StatusWords.Of), DocumentedTable.Names("### Regions"));
+        => Assert.Equal(Enum.GetValues<Region>().Select(RegionWords.Of), DocumentedTable.Names("### Regions"));
 
     [Fact]
     public void Hold_every_mark_of_a_point_by_its_word()

@@ -4,7 +4,7 @@ namespace BladeLoads.EndToEnd.Documentation;
 
 public sealed class Documented_keys : IDisposable
 {
-    private static readonly string[] Tables = ["rotor", "air", "wind", "control", "model", "outputs"];
+    private static readonly string[] Tables = ["rotor", "air", "wind", "control", "site", "surface", "model", "outputs"];
 
     private readonly ExtractedStudies _studies = new();
 
@@ -67,7 +67,9 @@ public sealed class Documented_keys : IDisposable
     {
         "rotor" => ["blade_count = 3"],
         "wind" => ["speeds_m_s = [8.0]"],
-        "control" => ["strategy = \"variable-speed\"", "tip_speed_ratio = 7.0", "fine_pitch_deg = 0.0", "rated_power_kW = 400.0"],
+        "control" => ["strategy = \"variable-speed\"", "rated_power_kW = 400.0"],
+        "site" => ["mean_wind_speed_m_s = 7.0"],
+        "surface" => ["tip_speed_ratios = [7.0]", "pitches_deg = [0.0]"],
         _ => [],
     };
 

@@ -136,8 +136,8 @@ internal static class PlausibleRotors
         });
         var sections = SectionSet.Of(shapes.Select((shape, i) => PlausibleSections.Build("s" + i, shape)));
         var operation = new OperatingPoint(wind, tipSpeedRatio * wind / (planform.TipRadius * Math.Cos(cone)), pitch);
-        var rotor = new RotorCase(Blade.FromStations(stations), sections, blades, cone, new AirProperties(density, 1.8e-5), [wind],
-            new Control.FixedSpeed(operation.RotorSpeed, pitch, RatedPower: null), 0, double.PositiveInfinity, 1, model);
+        var rotor = new RotorCase(Blade.FromStations(stations), sections, blades, cone, new AirProperties(density, 1.8e-5, 340.29), [wind],
+            new Control.FixedSpeed(operation.RotorSpeed, pitch, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1), model);
         return new Trial(rotor, operation, shapes, pick);
     }
 }

@@ -51,7 +51,7 @@ public sealed class MeasuredRotorTests(ITestOutputHelper output)
     {
         var (blade, sections) = WithBlendedSections("phase-6", "section_angle_deg");
         var operation = new OperatingPoint(row["wind_speed_m_s"], row["rotor_speed_rpm"] * Rpm, Pitch: 0);
-        return SolveAt(operation, blade, sections, bladeCount: 2, cone: 0, new AirProperties(row["density_kg_m3"], Viscosity), DefaultModel);
+        return SolveAt(operation, blade, sections, bladeCount: 2, cone: 0, new AirProperties(row["density_kg_m3"], Viscosity, 340.29), DefaultModel);
     }
 
     /// <summary>Normal to the chord: cl cos alpha + cd sin alpha, linear between element middles.</summary>

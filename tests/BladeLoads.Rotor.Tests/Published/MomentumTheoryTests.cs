@@ -123,6 +123,6 @@ public sealed class MomentumTheoryTests(ITestOutputHelper output)
         var model = new BalanceModel(
             elements, ElementSpacing.Uniform, TipLoss: false, HubLoss: false, HeavyLoading.Glauert1935, BalanceWith.LiftAndDrag);
         return SolveAt(new OperatingPoint(1, tipSpeedRatio, 0), Blade.FromStations(stations),
-            SectionSet.Of([OneAnnulus.StraightLift(0, 2 * Math.PI, drag: 0)]), 3, cone: 0, new AirProperties(1.225, 1.8e-5), model);
+            SectionSet.Of([OneAnnulus.StraightLift(0, 2 * Math.PI, drag: 0)]), 3, cone: 0, new AirProperties(1.225, 1.8e-5, 340.29), model);
     }
 }

@@ -25,6 +25,6 @@ internal static class OneAnnulus
         ImmutableArray<BladeStation> stations =
             [new(hubRadius, chord, twist, section.Name), new(tipRadius, chord, twist, section.Name)];
         return Assert.Single(PublishedRotor.SolveAt(point, Blade.FromStations(stations), SectionSet.Of([section]), bladeCount, cone: 0,
-            new AirProperties(1.225, 1.8e-5), model).Elements);
+            new AirProperties(1.225, 1.8e-5, 340.29), model).Elements);
     }
 }

@@ -20,7 +20,7 @@ public sealed class PropellerBrakeTests(ITestOutputHelper output)
     {
         var (blade, sections) = WithNamedSections("nrel-5mw");
         var point = SolveAt(new OperatingPoint(5, tipSpeedRatio * 5 / blade.TipRadius, 0), blade, sections, 3, cone: 0,
-            new AirProperties(1.225, 1.81e-5), DefaultModel);
+            new AirProperties(1.225, 1.81e-5, 340.29), DefaultModel);
 
         var brake = point.Elements.Where(e => e.InflowAngle < 0).ToArray();
         output.WriteLine($"tip-speed ratio {tipSpeedRatio}: {brake.Length} of {point.Elements.Length} elements, induction to " +
@@ -48,7 +48,7 @@ public sealed class PropellerBrakeTests(ITestOutputHelper output)
     {
         var (blade, sections) = WithNamedSections("nrel-5mw");
         var point = SolveAt(new OperatingPoint(5, tipSpeedRatio * 5 / blade.TipRadius, 0), blade, sections, 3, cone: 0,
-            new AirProperties(1.225, 1.81e-5), DefaultModel);
+            new AirProperties(1.225, 1.81e-5, 340.29), DefaultModel);
 
         foreach (var mark in Enum.GetValues<ElementMarks>().Where(mark => mark != ElementMarks.None))
             Assert.Equal(point.Elements.Any(e => e.Marks.HasFlag(mark)), point.Marks.HasFlag(Enum.Parse<PointMarks>(mark.ToString())));

@@ -21,7 +21,7 @@ internal static class PublishedRotor
         OperatingPoint point, Blade blade, SectionSet sections, int bladeCount, double cone, AirProperties air, BalanceModel model)
     {
         var rotorCase = new RotorCase(blade, sections, bladeCount, cone, air, [point.WindSpeed],
-            new Control.FixedSpeed(point.RotorSpeed, point.Pitch, RatedPower: null), 0, double.PositiveInfinity, 1, model);
+            new Control.FixedSpeed(point.RotorSpeed, point.Pitch, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1), model);
         return Assert.Single(CaseSolver.Solve(rotorCase, CancellationToken.None).Points);
     }
 
@@ -77,6 +77,8 @@ internal static class PublishedRotor
             var (fromA, fromB) = (CubicSpline.InterpolatePchip(a.Angles, coefficient(a)), CubicSpline.InterpolatePchip(b.Angles, coefficient(b)));
             return [.. angles.Select(angle => (1 - share) * fromA.Interpolate(angle) + share * fromB.Interpolate(angle))];
         }
-        return Polar.FromRows(double.NaN, [.. angles], Mix(inner, outer, polar => polar.Lift), Mix(inner, outer, polar => polar.Drag));
+        return Polar.FromRows(double.NaN, [.. angles], Mix(inner, outer, polar => polar.Lift),
+            // A drag of 0 at the end of both tables may round to just below it.
+            [.. Mix(inner, outer, polar => polar.Drag).Select(drag => Math.Max(0, drag))]);
     }
 }

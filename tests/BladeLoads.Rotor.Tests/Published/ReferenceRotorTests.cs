@@ -8,7 +8,7 @@ namespace BladeLoads.Rotor.Tests.Published;
 /// <summary>Two reference rotors whose performance others computed and published; sources and tolerances stand in the data files.</summary>
 public sealed class ReferenceRotorTests(ITestOutputHelper output)
 {
-    private static readonly AirProperties Air = new(1.225, 1.81e-5);
+    private static readonly AirProperties Air = new(1.225, 1.81e-5, 340.29);
 
     [Fact]
     public void The_15_MW_rotor_reaches_its_published_power_and_thrust_coefficient_at_tip_speed_ratio_9()

@@ -18,7 +18,7 @@ public class CaseErrorTests
     [InlineData("[rotor]", "[rotro]",
         "cases/clean.toml:5:2: unknown table [rotro]; did you mean [rotor]?")]
     [InlineData("[rotor]", "[weather]\nrain = true\n[rotor]",
-        "cases/clean.toml:5:2: unknown table [weather]; known are [rotor], [air], [wind], [control], [site], [model], [sections], [outputs], [sweep]")]
+        "cases/clean.toml:5:2: unknown table [weather]; known are [rotor], [air], [wind], [control], [site], [surface], [model], [sections], [outputs], [sweep]")]
     [InlineData("title  = ", "titel  = ",
         "cases/clean.toml:1:1: unknown key 'titel' at the top of the file; did you mean 'title'?")]
     [InlineData("title  = ", "blade_count = 3\ntitle  = ",

@@ -11,10 +11,10 @@ public class ControlTests
 
         var control = Assert.IsType<Control.VariableSpeed>(rotor.Control);
         Assert.Equal(7, control.TipSpeedRatio);
-        Assert.Equal(Math.PI / 180, control.FinePitch, 15);
+        Assert.Equal(Math.PI / 180, control.FinePitch!.Value, 15);
         Assert.Equal((0, double.PositiveInfinity), (control.MinRotorSpeed, control.MaxRotorSpeed));
         Assert.Equal((null, AboveRated.None), (control.RatedPower, control.AboveRated));
-        Assert.Equal((0, double.PositiveInfinity, 1), (rotor.CutInWindSpeed, rotor.CutOutWindSpeed, rotor.DrivetrainEfficiency));
+        Assert.Equal((0, double.PositiveInfinity, 1), (rotor.CutInWindSpeed, rotor.CutOutWindSpeed, rotor.Drivetrain.Electrical(1)));
     }
 
     [Fact]
@@ -28,7 +28,7 @@ public class ControlTests
         Assert.Equal((50e3, AboveRated.PitchToFeather), (control.RatedPower, control.AboveRated));
         Assert.Equal(6 * Math.Tau / 60, control.MinRotorSpeed, 15);
         Assert.Equal(12 * Math.Tau / 60, control.MaxRotorSpeed, 15);
-        Assert.Equal((4, 20, 0.9), (rotor.CutInWindSpeed, rotor.CutOutWindSpeed, rotor.DrivetrainEfficiency));
+        Assert.Equal((4, 20, 0.9), (rotor.CutInWindSpeed, rotor.CutOutWindSpeed, rotor.Drivetrain.Electrical(1)));
 
         var none = Read(FellStudy.VariableSpeedCase.Replace("[control]\n", limits + "above_rated = \"none\"\n", StringComparison.Ordinal)).Rotor;
         Assert.Equal(AboveRated.None, Assert.IsType<Control.VariableSpeed>(none.Control).AboveRated);

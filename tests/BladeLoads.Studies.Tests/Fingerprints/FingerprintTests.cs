@@ -25,6 +25,19 @@ public class FingerprintTests
     [InlineData("control.drivetrain_efficiency", "[control]", "[control]\ndrivetrain_efficiency = 0.9")]
     [InlineData("control.above_rated control.rated_power_kW", "[control]", "[control]\nrated_power_kW = 5")]
     [InlineData("control.rated_power_kW", "[control]", "[control]\nrated_power_kW = 5\nabove_rated = \"none\"")]
+    [InlineData("control.tip_speed_ratio", "tip_speed_ratio = 7\n", "")]
+    [InlineData("control.fine_pitch_deg", "fine_pitch_deg = 1", "fine_pitch_deg = \"best\"")]
+    [InlineData("control.speed_limited_pitch", "[control]", "[control]\nspeed_limited_pitch = \"best\"")]
+    [InlineData("control.thrust_limit_kN", "[control]", "[control]\nthrust_limit_kN = 5")]
+    [InlineData("wind.turbulence_intensity", "[wind]", "[wind]\nturbulence_intensity = 0.1")]
+    [InlineData("wind.turbulence_intensity", "[wind]", "[wind]\nturbulence_intensity = [[5, 0.2], [6, 0.1]]")]
+    [InlineData("air.altitude_m air.density_kg_m3 air.dynamic_viscosity_Pa_s air.speed_of_sound_m_s", "[model]", "[air]\naltitude_m = 500\n[model]")]
+    [InlineData("air.density_kg_m3 air.pressure_Pa", "[model]", "[air]\npressure_Pa = 1e5\n[model]")]
+    [InlineData("air.density_kg_m3 air.relative_humidity", "[model]", "[air]\nrelative_humidity = 0.5\n[model]")]
+    [InlineData("air.reference_density_kg_m3", "[model]", "[air]\nreference_density_kg_m3 = 1.2\n[model]")]
+    [InlineData("site.availability site.mean_wind_speed_m_s site.weibull_shape", "[model]", "[site]\nmean_wind_speed_m_s = 7\n[model]")]
+    [InlineData("surface.pitches_deg surface.tip_speed_ratios surface.wind_speed_m_s", "[model]",
+        "[surface]\npitches_deg = [0]\ntip_speed_ratios = [7]\n[model]")]
     [InlineData("model.elements", "[model]", "[model]\nelements = 41")]
     [InlineData("model.spacing", "[model]", "[model]\nspacing = \"uniform\"")]
     [InlineData("model.losses", "[model]", "[model]\nlosses = [\"tip\"]")]
@@ -40,7 +53,7 @@ public class FingerprintTests
         var after = Study().Change(Clean, text, by).OnlyCase();
 
         Assert.NotEqual(before.Fingerprint, after.Fingerprint);
-        Assert.Equal(keys, string.Join(' ', after.Values.Where(value => before.Values[value.Key] != value.Value).Select(value => value.Key)));
+        Assert.Equal(keys, string.Join(' ', after.Values.Where(value => before.Values.GetValueOrDefault(value.Key) != value.Value).Select(value => value.Key)));
     }
 
     [Theory]
@@ -58,7 +71,7 @@ public class FingerprintTests
         var after = new FellStudy().Change(file, text, by).OnlyCase();
 
         Assert.NotEqual(before.Fingerprint, after.Fingerprint);
-        Assert.Equal([key], after.Values.Where(value => before.Values[value.Key] != value.Value).Select(value => value.Key));
+        Assert.Equal([key], after.Values.Where(value => before.Values.GetValueOrDefault(value.Key) != value.Value).Select(value => value.Key));
     }
 
     [Fact]
@@ -132,17 +145,17 @@ public class FingerprintTests
 
         Assert.Equal(
             [
-                "air.density_kg_m3 = 1.225", "air.dynamic_viscosity_Pa_s = 1.789e-05",
+                "air.density_kg_m3 = 1.225", "air.dynamic_viscosity_Pa_s = 1.789e-05", $"air.speed_of_sound_m_s = {only.Values["air.speed_of_sound_m_s"]}",
                 $"blade = {only.Values["blade"]}",
                 "control.above_rated = none", "control.cut_in_wind_speed_m_s = 0", "control.cut_out_wind_speed_m_s = none",
                 "control.drivetrain_efficiency = 1", "control.fine_pitch_deg = 1", "control.max_rotor_speed_rpm = none",
-                "control.min_rotor_speed_rpm = 0", "control.rated_power_kW = none", "control.strategy = variable-speed",
-                "control.tip_speed_ratio = 7",
+                "control.min_rotor_speed_rpm = 0", "control.rated_power_kW = none", "control.speed_limited_pitch = hold",
+                "control.strategy = variable-speed", "control.thrust_limit_kN = none", "control.tip_speed_ratio = 7",
                 "model.balance_with = lift and drag", "model.elements = 40", "model.heavy_loading = glauert-1935",
                 "model.losses = tip,hub", "model.spacing = cosine",
                 "outputs.spanwise = all", "rotor.blade_count = 3", "rotor.cone_deg = 0",
                 $"section.root = {only.Values["section.root"]}", $"section.tip = {only.Values["section.tip"]}",
-                $"solver = {SolverVersion.Number}", "wind.speeds_m_s = 5,6,7",
+                $"solver = {SolverVersion.Number}", "wind.speeds_m_s = 5,6,7", "wind.turbulence_intensity = 0",
             ],
             only.Values.Select(value => $"{value.Key} = {value.Value}"));
         Assert.Matches("^[0-9a-f]{64}$", only.Fingerprint);

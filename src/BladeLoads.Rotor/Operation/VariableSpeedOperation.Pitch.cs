@@ -1,0 +1,95 @@
+namespace BladeLoads.Rotor.Operation;
+
+/// <summary>The pitch that holds rated power or the thrust limit, or gives the most power.</summary>
+internal sealed partial class VariableSpeedOperation
+{
+    private const double Feathered = Math.PI / 2;
+    private static readonly double DeepestStall = double.DegreesToRadians(-30);
+
+    private static Setting OnBranch(in Setting below, double ratedPower, BranchPitch? found)
+        => found is { } at
+            ? new Setting(
+                below.Point with { Pitch = at.Pitch }, Region.RatedPower,
+                at.Excess > MetTolerance * ratedPower ? PointMarks.PowerJump : PointMarks.None)
+            : below with { Marks = PointMarks.RatedNotReached };
+
+    // The largest pitch up to feather at which power is rated. At high wind the rotor at fine pitch may be stalled and make less than
+    // rated; that is no operating point, so the walk comes down from feather.
+    private BranchPitch? FeatherPitchAt(in Setting below, double ratedPower)
+    {
+        var point = below.Point;
+        var reach = FirstReach.Find(
+            pitch => PowerExcess(point with { Pitch = pitch }, ratedPower), PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)),
+            PitchTolerance);
+        return reach is { } r ? new BranchPitch(r.Reached.Place, r.Reached.Excess) : null;
+    }
+
+    // The pitch nearest to fine pitch, towards stall, at which power is rated.
+    private BranchPitch? StallPitchAt(in Setting below, double ratedPower)
+    {
+        var point = below.Point;
+        var places = PitchesIntoStall(point.Pitch);
+        if (PowerExcess(point, ratedPower) < 0)
+        {
+            var rising = FirstReach.Find(pitch => PowerExcess(point with { Pitch = pitch }, ratedPower), places, PitchTolerance);
+            return rising is { } r ? new BranchPitch(r.Reached.Place, r.Reached.Excess) : null;
+        }
+        var falling = FirstReach.Find(pitch => -PowerExcess(point with { Pitch = pitch }, ratedPower), places, PitchTolerance);
+        // The side at or above rated is the one on which power has not fallen below it yet.
+        return falling is { } f ? new BranchPitch(f.Below.Place, -f.Below.Excess) : null;
+    }
+
+    // The smallest pitch from which thrust stays within the limit up to feather; where rated power asks for more pitch, that wins.
+    private Setting WithinThrust(in Setting setting, double limit)
+    {
+        var point = setting.Point;
+        double Excess(double pitch) => (_model.Solve(point with { Pitch = pitch })?.Thrust ?? double.NaN) - limit;
+        if (!(Excess(Feathered) < 0))
+            return setting with { Marks = setting.Marks | PointMarks.ThrustNotHeld };
+        if (FirstReach.Find(Excess, PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)), PitchTolerance) is not { } reach
+            || reach.Below.Place <= point.Pitch)
+            return setting;
+        return new Setting(point with { Pitch = reach.Below.Place }, Region.ThrustLimit, setting.Marks & ~PointMarks.PowerJump);
+    }
+
+    private double PitchWithMostPower(OperatingPoint point)
+    {
+        var places = new List<double>();
+        for (var deg = -15; deg <= 45; deg++)
+            places.Add(double.DegreesToRadians(deg));
+        return Largest.Find(pitch => _model.Solve(point with { Pitch = pitch })?.Power ?? double.NaN, [.. places], 1e-9).Place;
+    }
+
+    private bool StartsWithJump(double ratedWindSpeed, double ratedPower)
+    {
+        var below = BaseAt(ratedWindSpeed);
+        return _control.AboveRated == AboveRated.PitchToFeather
+            && FeatherPitchAt(below, ratedPower)?.Pitch > below.Point.Pitch + 1e-4;
+    }
+
+    // Power and thrust fall steeply towards feather, so steps may be longer there; they are shortest at fine pitch, where a narrow peak
+    // could hide.
+    private static double[] PitchesFromFeather(double finePitch)
+    {
+        var places = new List<double>();
+        for (var pitch = Feathered; pitch > finePitch;)
+        {
+            places.Add(pitch);
+            var above = double.RadiansToDegrees(pitch - finePitch);
+            pitch -= double.DegreesToRadians(above > 45 ? 4 : above > 10 ? 2 : above > 1.5 ? 1 : 0.25);
+        }
+        places.Add(finePitch);
+        return [.. places];
+    }
+
+    private static double[] PitchesIntoStall(double finePitch)
+    {
+        var places = new List<double>();
+        for (var pitch = finePitch; pitch > DeepestStall; pitch -= double.DegreesToRadians(0.25))
+            places.Add(pitch);
+        places.Add(Math.Min(DeepestStall, finePitch));
+        return [.. places];
+    }
+
+    private readonly record struct BranchPitch(double Pitch, double Excess);
+}

@@ -1,0 +1,106 @@
+namespace BladeLoads.Rotor.Operation;
+
+/// <summary>
+/// A variable-speed machine with its best point and its rated wind speed found: what the control asks for at any wind speed.
+/// </summary>
+internal sealed partial class VariableSpeedOperation
+{
+    /// <summary>Share of rated power, or of the thrust limit, within which it counts as met.</summary>
+    public const double MetTolerance = 1e-7;
+
+    private const double PitchTolerance = 1e-12;
+    private const double WindSpeedTolerance = 1e-11;
+    private const double WindSpeedStep = 0.25;
+
+    private readonly Control.VariableSpeed _control;
+    private readonly Drivetrain _drivetrain;
+    private readonly RotorModel _model;
+
+    private VariableSpeedOperation(RotorCase rotorCase, Control.VariableSpeed control, RotorModel model, CancellationToken cancellation)
+    {
+        (_control, _drivetrain, _model) = (control, rotorCase.Drivetrain, model);
+        Best = control is { TipSpeedRatio: { } ratio, FinePitch: { } pitch }
+            ? BestOperation.Given(ratio, pitch, model)
+            : BestOperation.Find(model, control.TipSpeedRatio, control.FinePitch, cancellation);
+        if (control.RatedPower is not { } ratedPower)
+            return;
+        RatedWindSpeed = FirstReach.Find(
+            v =>
+            {
+                cancellation.ThrowIfCancellationRequested();
+                return PowerExcess(BaseAt(v).Point, ratedPower);
+            },
+            WindSpeedsUpwards(rotorCase, ratedPower), WindSpeedTolerance)?.Reached.Place;
+        Marks = RatedWindSpeed is null ? PointMarks.RatedNotReached
+            : StartsWithJump(RatedWindSpeed.Value, ratedPower) ? PointMarks.PitchJump
+            : PointMarks.None;
+    }
+
+    /// <summary>The tip-speed ratio and fine pitch in use, and the power coefficient there.</summary>
+    public BestOperation Best { get; }
+
+    /// <summary>m/s: where the rotor first makes rated power below the branch; null where it does not, from cut-in to cut-out.</summary>
+    public double? RatedWindSpeed { get; }
+
+    public PointMarks Marks { get; }
+
+    public static VariableSpeedOperation Of(
+        RotorCase rotorCase, Control.VariableSpeed control, RotorModel model, CancellationToken cancellation)
+        => new(rotorCase, control, model, cancellation);
+
+    /// <summary>m/s, rising: where the rotor speed meets a limit, and rated power.</summary>
+    public double[] LikelyBeginnings()
+    {
+        double[] all =
+        [
+            _control.MinRotorSpeed * _model.SweptRadius / Best.TipSpeedRatio, _control.MaxRotorSpeed * _model.SweptRadius / Best.TipSpeedRatio,
+            RatedWindSpeed ?? double.PositiveInfinity,
+        ];
+        return [.. all.Where(double.IsFinite).Order()];
+    }
+
+    /// <summary>What the control asks for: below rated, above it, or at the thrust limit.</summary>
+    public Setting At(double windSpeed)
+    {
+        var setting = BaseAt(windSpeed);
+        if (windSpeed >= RatedWindSpeed && _control.RatedPower is { } ratedPower)
+            setting = _control.AboveRated switch
+            {
+                AboveRated.PitchToFeather => OnBranch(setting, ratedPower, FeatherPitchAt(setting, ratedPower)),
+                AboveRated.PitchToStall => OnBranch(setting, ratedPower, StallPitchAt(setting, ratedPower)),
+                _ => setting,
+            };
+        return _control.ThrustLimit is { } limit ? WithinThrust(setting, limit) : setting;
+    }
+
+    /// <summary>Below rated: rotor speed by the tip-speed ratio within its limits, fine pitch or the pitch with the most power.</summary>
+    public Setting BaseAt(double windSpeed)
+    {
+        var wanted = Best.TipSpeedRatio * windSpeed / _model.SweptRadius;
+        var (rotorSpeed, region) = wanted < _control.MinRotorSpeed ? (_control.MinRotorSpeed, Region.MinimumSpeed)
+            : wanted > _control.MaxRotorSpeed ? (_control.MaxRotorSpeed, Region.MaximumSpeed)
+            : (wanted, Region.BestTipSpeedRatio);
+        var point = new OperatingPoint(windSpeed, rotorSpeed, Best.Pitch);
+        if (region != Region.BestTipSpeedRatio && _control.SpeedLimitedPitch == SpeedLimitedPitch.Best)
+            point = point with { Pitch = PitchWithMostPower(point) };
+        return new Setting(point, region, PointMarks.None);
+    }
+
+    // NaN where an element is unbalanced: such a point cannot be said to hold anything.
+    private double PowerExcess(OperatingPoint point, double ratedPower)
+        => _drivetrain.Electrical(_model.Solve(point)?.Power ?? double.NaN) - ratedPower;
+
+    private double[] WindSpeedsUpwards(RotorCase rotorCase, double ratedPower)
+    {
+        // Where a rotor does not operate it makes no power, rated or other.
+        var last = double.IsFinite(rotorCase.CutOutWindSpeed) ? rotorCase.CutOutWindSpeed : rotorCase.WindSpeeds[^1];
+        // No rotor takes more than all the power of the wind through its area, so the search need not begin below this.
+        var first = Math.Cbrt(ratedPower / (0.5 * rotorCase.Air.Density * _model.Area));
+        var places = new List<double>();
+        first = Math.Min(Math.Max(first, rotorCase.CutInWindSpeed), last);
+        for (var i = 0; first + (i * WindSpeedStep) < last; i++)
+            places.Add(first + (i * WindSpeedStep));
+        places.Add(last);
+        return [.. places];
+    }
+}
