@@ -36,10 +36,10 @@ public readonly record struct BestOperation(double TipSpeedRatio, double Pitch, 
     /// </remarks>
     internal static BestOperation Find(RotorModel model, double? tipSpeedRatio, double? pitch, CancellationToken cancellation)
     {
-        double[] ratios = tipSpeedRatio is { } givenRatio ? [givenRatio] : [.. Steps(LeastTipSpeedRatio, LargestTipSpeedRatio, RatioStep)];
+        double[] ratios = tipSpeedRatio is { } givenRatio ? [givenRatio] : Steps(LeastTipSpeedRatio, LargestTipSpeedRatio, RatioStep);
         double[] pitches = pitch is { } givenPitch
             ? [givenPitch]
-            : [.. Steps(double.DegreesToRadians(-15), double.DegreesToRadians(30), PitchStep)];
+            : Steps(double.DegreesToRadians(-15), double.DegreesToRadians(30), PitchStep);
         var grid = new double[ratios.Length, pitches.Length];
         var highest = double.NegativeInfinity;
         for (var i = 0; i < ratios.Length; i++)
@@ -117,9 +117,6 @@ public readonly record struct BestOperation(double TipSpeedRatio, double Pitch, 
         return true;
     }
 
-    private static IEnumerable<double> Steps(double from, double to, double step)
-    {
-        for (var i = 0; from + (i * step) <= to + (1e-9 * step); i++)
-            yield return from + (i * step);
-    }
+    private static double[] Steps(double from, double to, double step)
+        => [.. Enumerable.Range(0, (int)(((to - from) / step) + 1e-9) + 1).Select(i => from + (i * step))];
 }
