@@ -1,58 +1,75 @@
 namespace BladeLoads.Rotor.Operation;
 
 /// <summary>
-/// Walks along a line of places until a quantity reaches 0 from below, peaks between two places included, and closes on the place where
-/// it does.
+/// Walks along a line of places until a quantity reaches 0 from below, and closes on the place where it does. What could hide between two
+/// places is looked for: a peak, and a jump of elements that change their balance.
 /// </summary>
 internal static class FirstReach
 {
     private const double GoldenShare = 0.3819660112501051;
 
     /// <summary>Where the excess first reaches 0, in the order walked; null where it does not.</summary>
-    /// <param name="excess">What is to reach 0; NaN counts as below.</param>
+    /// <param name="at">The sample at a place; its excess is to reach 0, and NaN counts as below.</param>
     /// <param name="places">In the order walked, rising or falling.</param>
     /// <param name="tolerance">In the unit of the places: how far apart the two sides of the answer may be.</param>
-    public static Reach? Find(Func<double, double> excess, ReadOnlySpan<double> places, double tolerance)
+    /// <param name="finest">How close to a jump it is looked at.</param>
+    /// <param name="fastestTurn">rad a unit of place: an inflow angle that turns faster has jumped.</param>
+    public static Reach? Find(
+        Func<double, Sample> at, ReadOnlySpan<double> places, double tolerance, double finest, double fastestTurn)
     {
-        var below = new Sample(places[0], excess(places[0]));
+        var below = at(places[0]);
         if (below.Excess >= 0)
             return new Reach(below, below);
         var beforeThat = below;
         foreach (var place in places[1..])
         {
-            var here = new Sample(place, excess(place));
+            var here = at(place);
             if (beforeThat.Place != below.Place && below.Excess > beforeThat.Excess && below.Excess >= here.Excess
-                && PeakReaching(excess, beforeThat.Place, below, here.Place, tolerance) is { } peak)
-                return Close(excess, beforeThat, peak, tolerance);
+                && PeakReaching(at, beforeThat, below, here, tolerance) is { } peak)
+                return Close(at, beforeThat, peak, tolerance);
+            if (BesideJumps(at, below, here, finest, fastestTurn) is { } beside)
+                return Close(at, beside.Below, beside.Reached, tolerance);
             if (here.Excess >= 0)
-                return Close(excess, below, here, tolerance);
+                return Close(at, below, here, tolerance);
             (beforeThat, below) = (below, here);
         }
         return null;
     }
 
-    // Golden sections round a peak, until it reaches 0 or is told apart no more.
-    private static Sample? PeakReaching(Func<double, double> excess, double from, Sample peak, double to, double tolerance)
+    // Elements that change their balance between two places make the quantity jump there, and it may be 0 or more on one side of the jump
+    // only. The stretch is halved towards each jump that could lift it so far.
+    private static Reach? BesideJumps(Func<double, Sample> at, Sample from, Sample to, double finest, double fastestTurn)
     {
+        if (Math.Abs(to.Place - from.Place) <= finest || !from.MayHideReach(to, fastestTurn))
+            return null;
+        var middle = at((from.Place + to.Place) / 2);
+        if (BesideJumps(at, from, middle, finest, fastestTurn) is { } first)
+            return first;
+        return middle.Excess >= 0 ? new Reach(from, middle) : BesideJumps(at, middle, to, finest, fastestTurn);
+    }
+
+    // Golden sections round a peak, until it reaches 0 or is told apart no more.
+    private static Sample? PeakReaching(Func<double, Sample> at, Sample before, Sample peak, Sample after, double tolerance)
+    {
+        var (from, to) = (before.Place, after.Place);
         while (Math.Abs(to - from) > 1e3 * tolerance)
         {
             var inUpper = Math.Abs(to - peak.Place) > Math.Abs(peak.Place - from);
-            var place = inUpper
+            var sample = at(inUpper
                 ? peak.Place + (GoldenShare * (to - peak.Place))
-                : peak.Place - (GoldenShare * (peak.Place - from));
-            var sample = new Sample(place, excess(place));
+                : peak.Place - (GoldenShare * (peak.Place - from)));
             if (sample.Excess >= 0)
                 return sample;
             if (sample.Excess > peak.Excess)
                 (from, to, peak) = inUpper ? (peak.Place, to, sample) : (from, peak.Place, sample);
             else
-                (from, to) = inUpper ? (from, place) : (place, to);
+                (from, to) = inUpper ? (from, sample.Place) : (sample.Place, to);
         }
         return null;
     }
 
     // Regula falsi with halving (Illinois) keeps both sides; a bisection steps in where it crawls, so that a jump is closed on as well.
-    private static Reach Close(Func<double, double> excess, Sample below, Sample reached, double tolerance)
+    private static Reach Close(Func<double, Sample> at, Sample below, Sample reached, double tolerance)
     {
         var (fBelow, fReached) = (below.Excess, reached.Excess);
         var lastSide = 0;
@@ -62,7 +79,7 @@ internal static class FirstReach
             var share = i % 4 == 3 || !double.IsFinite(fBelow) ? 0.5 : Math.Clamp(fBelow / (fBelow - fReached), 0, 1);
             var least = Math.Min(0.5, 0.4 * tolerance / Math.Abs(width));
             var place = below.Place + (Math.Clamp(share, least, 1 - least) * width);
-            var sample = new Sample(place, excess(place));
+            var sample = at(place);
             if (sample.Excess >= 0)
             {
                 (reached, fReached) = (sample, sample.Excess);
@@ -81,9 +98,6 @@ internal static class FirstReach
         return new Reach(below, reached);
     }
 }
-
-/// <summary>A place and the excess there.</summary>
-internal readonly record struct Sample(double Place, double Excess);
 
 /// <summary>The two sides of a place where an excess reaches 0.</summary>
 /// <param name="Below">Where it has not yet; the same as <paramref name="Reached"/> where it had from the start.</param>

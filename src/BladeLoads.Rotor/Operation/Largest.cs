@@ -32,7 +32,7 @@ internal static class Largest
         Sample At(double place)
         {
             var found = value(place);
-            return new Sample(place, double.IsNaN(found) ? double.NegativeInfinity : found);
+            return new Sample(place, double.IsNaN(found) ? double.NegativeInfinity : found, null);
         }
 
         Sample Follow(double from, Sample peak, double to)

@@ -69,6 +69,13 @@ public sealed class RotorModel
         return Sum(point);
     }
 
+    /// <summary>What element <paramref name="i"/> of the operating point solved last adds to rotor power, W.</summary>
+    internal double PowerShare(int i, in OperatingPoint point)
+        => _bladeCount * _states[i].TangentialForcePerLength * _elements[i].Geometry.Length * _states[i].Radius * _cosCone * point.RotorSpeed;
+
+    /// <summary>What element <paramref name="i"/> of the operating point solved last adds to thrust, N.</summary>
+    internal double ThrustShare(int i) => _bladeCount * _states[i].NormalForcePerLength * _elements[i].Geometry.Length * _cosCone;
+
     private Element Prepare(in BladeElement e, SectionSet sections)
     {
         var sameSection = e.OuterWeight == 0;

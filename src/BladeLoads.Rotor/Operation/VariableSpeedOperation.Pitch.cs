@@ -4,13 +4,17 @@ namespace BladeLoads.Rotor.Operation;
 internal sealed partial class VariableSpeedOperation
 {
     private const double Feathered = Math.PI / 2;
+
+    // rad, a twentieth of a degree: below it a flat top of power at fine pitch would count as a jump.
+    private const double LeastJump = 1e-3;
     private static readonly double DeepestStall = double.DegreesToRadians(-30);
 
+    // Where even feathered blades make more than rated nothing holds it: no jump, but a point that exceeds rated.
     private static Setting OnBranch(in Setting below, double ratedPower, BranchPitch? found)
         => found is { } at
             ? new Setting(
                 below.Point with { Pitch = at.Pitch }, Region.RatedPower,
-                at.Excess > MetTolerance * ratedPower ? PointMarks.PowerJump : PointMarks.None)
+                at.Excess > MetTolerance * ratedPower && at.Pitch < Feathered ? PointMarks.PowerJump : PointMarks.None)
             : below with { Marks = PointMarks.RatedNotReached };
 
     // The largest pitch up to feather at which power is rated. At high wind the rotor at fine pitch may be stalled and make less than
@@ -19,8 +23,8 @@ internal sealed partial class VariableSpeedOperation
     {
         var point = below.Point;
         var reach = FirstReach.Find(
-            pitch => PowerExcess(point with { Pitch = pitch }, ratedPower), PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)),
-            PitchTolerance);
+            pitch => PowerAt(pitch, point with { Pitch = pitch }, ratedPower), PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)),
+            PitchTolerance, FinestPitch, TurnPerPitch);
         return reach is { } r ? new BranchPitch(r.Reached.Place, r.Reached.Excess) : null;
     }
 
@@ -29,25 +33,33 @@ internal sealed partial class VariableSpeedOperation
     {
         var point = below.Point;
         var places = PitchesIntoStall(point.Pitch);
-        if (PowerExcess(point, ratedPower) < 0)
-        {
-            var rising = FirstReach.Find(pitch => PowerExcess(point with { Pitch = pitch }, ratedPower), places, PitchTolerance);
-            return rising is { } r ? new BranchPitch(r.Reached.Place, r.Reached.Excess) : null;
-        }
-        var falling = FirstReach.Find(pitch => -PowerExcess(point with { Pitch = pitch }, ratedPower), places, PitchTolerance);
+        Sample Power(double pitch) => PowerAt(pitch, point with { Pitch = pitch }, ratedPower);
+        if (Power(point.Pitch).Excess < 0)
+            return FirstReach.Find(Power, places, PitchTolerance, FinestPitch, TurnPerPitch) is { } rising
+                ? new BranchPitch(rising.Reached.Place, rising.Reached.Excess)
+                : null;
+        static Sample Below(in Sample s) => s with { Excess = -s.Excess };
         // The side at or above rated is the one on which power has not fallen below it yet.
-        return falling is { } f ? new BranchPitch(f.Below.Place, -f.Below.Excess) : null;
+        return FirstReach.Find(pitch => Below(Power(pitch)), places, PitchTolerance, FinestPitch, TurnPerPitch)
+            is { } falling
+            ? new BranchPitch(falling.Below.Place, -falling.Below.Excess)
+            : null;
     }
 
     // The smallest pitch from which thrust stays within the limit up to feather; where rated power asks for more pitch, that wins.
     private Setting WithinThrust(in Setting setting, double limit)
     {
         var point = setting.Point;
-        double Excess(double pitch) => (_model.Solve(point with { Pitch = pitch })?.Thrust ?? double.NaN) - limit;
-        if (!(Excess(Feathered) < 0))
+        Sample Thrust(double pitch)
+        {
+            var thrust = _model.Solve(point with { Pitch = pitch })?.Thrust ?? double.NaN;
+            return new Sample(pitch, thrust - limit, ElementShare.OfThrust(_model));
+        }
+        if (FirstReach.Find(Thrust, PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)), PitchTolerance, FinestPitch, TurnPerPitch) is not { } reach)
+            return setting;
+        if (reach.Below == reach.Reached)
             return setting with { Marks = setting.Marks | PointMarks.ThrustNotHeld };
-        if (FirstReach.Find(Excess, PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)), PitchTolerance) is not { } reach
-            || reach.Below.Place <= point.Pitch)
+        if (reach.Below.Place <= point.Pitch)
             return setting;
         return new Setting(point with { Pitch = reach.Below.Place }, Region.ThrustLimit, setting.Marks & ~PointMarks.PowerJump);
     }
@@ -64,7 +76,7 @@ internal sealed partial class VariableSpeedOperation
     {
         var below = BaseAt(ratedWindSpeed);
         return _control.AboveRated == AboveRated.PitchToFeather
-            && FeatherPitchAt(below, ratedPower)?.Pitch > below.Point.Pitch + 1e-4;
+            && FeatherPitchAt(below, ratedPower)?.Pitch > below.Point.Pitch + LeastJump;
     }
 
     // Power and thrust fall steeply towards feather, so steps may be longer there; they are shortest at fine pitch, where a narrow peak

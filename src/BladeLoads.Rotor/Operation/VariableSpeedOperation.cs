@@ -12,6 +12,14 @@ internal sealed partial class VariableSpeedOperation
     private const double WindSpeedTolerance = 1e-11;
     private const double WindSpeedStep = 0.25;
 
+    // How near to a jump of power it is looked at: m/s, rad.
+    private const double FinestWindSpeed = 1e-3;
+    private const double FinestPitch = 1e-4;
+
+    // rad per m/s, rad per rad: a balance that only follows the wind or the pitch turns no faster.
+    private const double TurnPerWindSpeed = 0.1;
+    private const double TurnPerPitch = 1.2;
+
     private readonly Control.VariableSpeed _control;
     private readonly Drivetrain _drivetrain;
     private readonly RotorModel _model;
@@ -28,9 +36,9 @@ internal sealed partial class VariableSpeedOperation
             v =>
             {
                 cancellation.ThrowIfCancellationRequested();
-                return PowerExcess(BaseAt(v).Point, ratedPower);
+                return PowerAt(v, BaseAt(v).Point, ratedPower);
             },
-            WindSpeedsUpwards(rotorCase, ratedPower), WindSpeedTolerance)?.Reached.Place;
+            WindSpeedsUpwards(rotorCase, ratedPower), WindSpeedTolerance, FinestWindSpeed, TurnPerWindSpeed)?.Reached.Place;
         Marks = RatedWindSpeed is null ? PointMarks.RatedNotReached
             : StartsWithJump(RatedWindSpeed.Value, ratedPower) ? PointMarks.PitchJump
             : PointMarks.None;
@@ -87,8 +95,11 @@ internal sealed partial class VariableSpeedOperation
     }
 
     // NaN where an element is unbalanced: such a point cannot be said to hold anything.
-    private double PowerExcess(OperatingPoint point, double ratedPower)
-        => _drivetrain.Electrical(_model.Solve(point)?.Power ?? double.NaN) - ratedPower;
+    private Sample PowerAt(double place, in OperatingPoint point, double ratedPower)
+    {
+        var power = _model.Solve(point)?.Power ?? double.NaN;
+        return new Sample(place, _drivetrain.Electrical(power) - ratedPower, ElementShare.OfPower(_model, point));
+    }
 
     private double[] WindSpeedsUpwards(RotorCase rotorCase, double ratedPower)
     {

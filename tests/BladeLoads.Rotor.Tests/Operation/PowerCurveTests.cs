@@ -71,6 +71,38 @@ public sealed class PowerCurveTests
         Assert.Single(curve.Points, p => (p.Marks & PointMarks.PitchJump) != 0);
     }
 
+    [Theory]
+    [InlineData(0.3)]
+    [InlineData(0.05)]
+    public void In_sharp_stall_no_pitch_above_the_branch_makes_rated_power(double dropWidthDeg)
+    {
+        var control = InventedRotor.VariableSpeed(ratedPower: 0.7e6, maxRotorSpeed: 1.2, finePitchDeg: 1);
+        double[] winds = [9, 11, 13.3, 16, 19, 22];
+        var curve = CaseSolver.Solve(InventedRotor.Case(control, winds, dropWidthDeg: dropWidthDeg), default);
+        var model = new RotorModel(InventedRotor.Case(control, winds, dropWidthDeg: dropWidthDeg));
+        foreach (var point in curve.Points.Where(p => p.Region == Region.RatedPower))
+            for (var deg = double.RadiansToDegrees(point.Operation.Pitch) + 0.01; deg < 60; deg += deg < 45 ? 0.02 : 0.5)
+                Assert.True(
+                    model.Solve(point.Operation with { Pitch = double.DegreesToRadians(deg) })!.Power < 0.7e6,
+                    $"{point.Operation.WindSpeed} m/s: rated at {deg} degrees too");
+        Assert.Contains(curve.Points, p => (p.Marks & PointMarks.SeveralBalances) != 0 && p.Region == Region.RatedPower);
+    }
+
+    [Fact]
+    public void A_row_above_rated_at_fine_pitch_counts_as_rated_however_short_the_stretch()
+    {
+        // In sharp stall power at fine pitch may pass rated for some hundredths of a metre a second only.
+        var free = InventedRotor.VariableSpeed(maxRotorSpeed: 1.1);
+        double[] winds = [.. Enumerable.Range(0, 401).Select(i => 7 + (0.01 * i))];
+        var powers = InventedRotor.Solve(InventedRotor.Case(free, winds, dropWidthDeg: 0.3)).Select(p => p.ElectricalPower).ToArray();
+        var top = Array.IndexOf(powers, powers.Max());
+        var rated = powers[top] * (1 - 1e-9);
+        var curve = CaseSolver.Solve(InventedRotor.Case(free with { RatedPower = rated }, winds, dropWidthDeg: 0.3), default);
+        Assert.NotNull(curve.RatedWindSpeed);
+        Assert.True(curve.RatedWindSpeed <= winds[top]);
+        Assert.DoesNotContain(curve.Points, p => (p.Marks & PointMarks.ExceedsRated) != 0);
+    }
+
     [Fact]
     public void A_rotor_that_never_makes_rated_power_is_reported()
     {
