@@ -1,7 +1,7 @@
 namespace BladeLoads.Studies;
 
 /// <summary>The known name that a mistyped one was most likely meant to be.</summary>
-internal static class Nearest
+public static class Nearest
 {
     /// <summary>
     /// Within a third of its length in letters changed, else the closest that contains it or is contained in it; letter case does

@@ -3,12 +3,15 @@ using System.IO.Enumeration;
 
 namespace BladeLoads.Batch.Plan;
 
-/// <summary>Which cases are meant: all, or those whose name matches a pattern; <c>*</c> stands for any text, <c>?</c> for one character.</summary>
+/// <summary>
+/// Which cases are meant: all, or those whose name matches a pattern; <c>*</c> stands for any text, <c>?</c> for one character. A pattern
+/// that matches the name of a case file means all its variants.
+/// </summary>
 public sealed record CaseChoice(ImmutableArray<string> Patterns)
 {
     public static CaseChoice All { get; } = new(ImmutableArray<string>.Empty);
 
-    public bool Includes(string caseName) => Patterns.IsEmpty || Patterns.Any(p => Matches(p, caseName));
+    public bool Includes(string caseName) => Patterns.IsEmpty || Patterns.Any(p => Matches(p, caseName) || Matches(p, caseName.Split('~')[0]));
 
     /// <summary>
     /// Whether a rejected case is meant. Its variants are not known, so a pattern that could match one of them counts, and a case that

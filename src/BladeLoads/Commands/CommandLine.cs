@@ -25,6 +25,8 @@ internal static class CommandLine
         try
         {
             var result = Root(surroundings).Parse(arguments, new ParserConfiguration { ResponseFileTokenReplacer = null });
+            if (MisspeltOption.In(result) is { } misspelt)
+                throw new WrongUseException(misspelt);
             if (result.Errors.Count > 0 && result.Action is ParseErrorAction action)
                 return Refuse(result, action, surroundings);
             return result.Invoke(Invocation(surroundings));
@@ -39,15 +41,28 @@ internal static class CommandLine
             surroundings.Error.WriteLine(e.Message);
             return ExitCode.NoRoom;
         }
-        catch (IOException e) when (DiskTrouble.StopsTheRun(e))
+        // Redirected to a full disk, or to nothing at all: perhaps this cannot be told either.
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
-            surroundings.Error.WriteLine($"cannot write the output: {DiskTrouble.Reason(e)}");   // redirected to a full disk
+            TellIfPossible($"cannot write the output: {DiskTrouble.Reason(e)}", surroundings);
             return ExitCode.NoRoom;
         }
         catch (Exception e)
         {
-            surroundings.Error.WriteLine($"fault in BladeLoads, please report: {Printable.Of(e.Message)}");
+            TellIfPossible($"fault in BladeLoads, please report: {Printable.Of(e.Message)}", surroundings);
             return ExitCode.Fault;
+        }
+    }
+
+    private static void TellIfPossible(string line, Surroundings surroundings)
+    {
+        try
+        {
+            surroundings.Error.WriteLine(line);
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            // The exit code says what is left to say.
         }
     }
 
@@ -139,12 +154,21 @@ internal static class CommandLine
 
     internal static Argument<string> StudyArgument(string description) => new("study") { Description = description };
 
-    internal static Option<string> ResultsOption() => new("--results")
+    internal static Option<string> ResultsOption()
     {
-        Description = "the folder that results go to, a folder for each study in it",
-        HelpName = "folder",
-        DefaultValueFactory = _ => "results",
-    };
+        var option = new Option<string>("--results")
+        {
+            Description = "the folder that results go to, a folder for each study in it",
+            HelpName = "folder",
+            DefaultValueFactory = _ => "results",
+        };
+        option.Validators.Add(result =>
+        {
+            if (result.Tokens is [{ Value: "" }])
+                result.AddError("--results is empty; give a folder");
+        });
+        return option;
+    }
 
     internal static Option<string[]> OnlyOption() => new("--only")
     {

@@ -12,19 +12,19 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
         ["check"] =
         [
             ("bladeloads check inputs/tarn-valley", "every error and doubt of a study, by file, line and column"),
-            ("bladeloads check inputs/tarn-valley/cases/clean.toml", "those of one case alone"),
+            ("bladeloads check inputs/tarn-valley/cases/baseline.toml", "those of one case alone"),
         ],
         ["plan"] =
         [
             ("bladeloads plan inputs/tarn-valley", "what a run would solve, and why"),
-            ("bladeloads plan inputs/tarn-valley --only 'soiled*'", "the same for some of the cases"),
+            ("bladeloads plan inputs/tarn-valley --only 'soiling*'", "the same for some of the cases"),
             ("bladeloads plan inputs/tarn-valley --json", "the same for scripts; docs/formats.md has its keys"),
         ],
         ["run"] =
         [
             ("bladeloads run inputs/tarn-valley", "solve what is not current; results go to ./results/tarn-valley"),
-            ("bladeloads run inputs/tarn-valley/cases/clean.toml", "one case file and its variants"),
-            ("bladeloads run inputs/tarn-valley --only 'clean*' --only '*fixed*'", "some of the cases"),
+            ("bladeloads run inputs/tarn-valley/cases/baseline.toml", "one case file and its variants"),
+            ("bladeloads run inputs/tarn-valley --only soiling --only 'stall-10m*'", "some of the cases"),
             ("bladeloads run inputs/tarn-valley --all --results /data/results", "solve all again, results elsewhere"),
             ("bladeloads run inputs/tarn-valley --workers 1 --quiet", "one case at a time, errors and warnings alone"),
         ],

@@ -68,7 +68,7 @@ internal static class RunCommand
             surroundings.Out.WriteLine($"{Count.Of(run.SolvedByAnother, "case")} solved by another run");
         if (run.NoRoom is null && !request.Quiet)
         {
-            SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.Out);
+            SummaryLines.Write(shown, BaselineOf(study.Whole, rows), results.Study, surroundings.ScreenWidth(), surroundings.Out);
             if (moved.Any(c => c is not CaseComparison.NotCompared { Reason: NoComparison.NoEarlierResult }))
                 ChangeLines.Write(moved, ChangesOf(results, surroundings), surroundings.Out);
         }

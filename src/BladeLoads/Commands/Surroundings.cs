@@ -15,6 +15,9 @@ internal sealed record Surroundings(
     /// <summary>Puts a question to whoever sits at the terminal, and tells whether the answer was yes; null where nobody does.</summary>
     public Func<string, bool>? Ask { get; init; }
 
+    /// <summary>Characters of a line of the terminal; null where the output is redirected.</summary>
+    public int? ScreenWidth() => OutIsTerminal && !Console.IsOutputRedirected ? Console.WindowWidth : null;
+
     public static Surroundings OfThisProcess() => new(
         Console.Out, Console.Error, !Console.IsOutputRedirected, !Console.IsErrorRedirected, StudyReader.Read, CaseSolver.Solve,
         new Disk(), TimeProvider.System, tries => Thread.Sleep(TimeSpan.FromMilliseconds(50 << tries)))

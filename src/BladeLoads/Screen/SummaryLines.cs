@@ -6,37 +6,43 @@ using BladeLoads.Results.Wording;
 
 namespace BladeLoads.Screen;
 
-/// <summary>The summary on the screen: the most useful columns, each row within about 110 characters.</summary>
+/// <summary>The summary on the screen: the most useful columns, a row a case.</summary>
 internal static class SummaryLines
 {
     public const string Caution = "steady, characteristic, unfactored, without weight; no design envelope (each receipt.json says more)";
 
-    private const int WidestName = 40;
+    private const int NarrowestName = 40;
+    private const int FiguresWidth = 72;
     private const int RowsShown = 100;
     private const string MoreTitle = "best found, year at the site";
 
     /// <param name="baseline">The row that others are compared with; null for a study without one.</param>
     /// <param name="folder">Where the results lie, told last.</param>
-    public static void Write(IReadOnlyCollection<SummaryRow> rows, SummaryRow? baseline, string folder, TextWriter output)
+    /// <param name="screenWidth">Characters of a line; names are shortened to fit. Null where the output is redirected: names stay whole.</param>
+    public static void Write(
+        IReadOnlyCollection<SummaryRow> rows, SummaryRow? baseline, string folder, int? screenWidth, TextWriter output)
     {
-        var shown = rows.Take(RowsShown).ToList();
+        var shown = rows.Take(rows.Count == RowsShown + 1 ? rows.Count : RowsShown).ToList();
+        var widest = screenWidth is { } all ? Math.Max(NarrowestName, all - FiguresWidth) : int.MaxValue;
+        string Name(string name) => ShortName.Of(Printable.Of(name), widest);
         var width = Math.Max(HasMore(shown) ? MoreTitle.Length : "case".Length, shown.Select(r => Name(r.Case).Length).DefaultIfEmpty(0).Max());
         output.WriteLine();
         output.WriteLine(Row("case", width, ("best cp", 7), ("at TSR", 7), ("power kW", 9), ("rated m/s", 10), ("thrust kN", 10), ("at m/s", 7), ("flapwise kNm", 13)));
         foreach (var row in shown)
-            output.WriteLine(Figures(row, width));
+            output.WriteLine(Figures(row, Name(row.Case), width));
         if (rows.Count > shown.Count)
             output.WriteLine($"... and {rows.Count - shown.Count} more in {SummaryTable.FileName}");
-        WriteStrategyAndEnergy(shown, width, output);
-        if (baseline is not null)
-            WriteDifferences(shown, baseline, width, output);
+        output.WriteLine("power: largest electrical; thrust, flapwise moment at the blade root: largest; marks with their points");
+        WriteStrategyAndEnergy(shown, Name, width, output);
+        if (baseline is not null && shown.Exists(r => r.Summary is not null && r.Case != baseline.Case))
+            WriteDifferences(shown, baseline, Name, width, output);
         output.WriteLine();
         output.WriteLine(Caution);
         output.WriteLine(Printable.Of($"results: {folder}"));
     }
 
     // Rows that have a searched point or a year; none, none of it.
-    private static void WriteStrategyAndEnergy(List<SummaryRow> rows, int width, TextWriter output)
+    private static void WriteStrategyAndEnergy(List<SummaryRow> rows, Func<string, string> name, int width, TextWriter output)
     {
         if (!HasMore(rows))
             return;
@@ -49,14 +55,15 @@ internal static class SummaryLines
             var best = row.Summary!.Best is { Searched: true } searched ? searched : null;
             var energy = row.Summary.Energy;
             output.WriteLine(Row(
-                Name(row.Case), width, (Figure(best?.TipSpeedRatio), 7),
+                name(row.Case), width, (Figure(best?.TipSpeedRatio), 7),
                 (best is null ? "-" : double.RadiansToDegrees(best.FinePitch).ToString("0.000", CultureInfo.InvariantCulture), 11),
                 (Figure(energy?.AnnualEnergy / 3.6e9), 10), (Figure(100 * energy?.CapacityFactor), 12),
                 (Figure(energy?.TurbulentAnnualEnergy / 3.6e9), 15)));
         }
     }
 
-    private static void WriteDifferences(List<SummaryRow> rows, SummaryRow baseline, int width, TextWriter output)
+    private static void WriteDifferences(
+        List<SummaryRow> rows, SummaryRow baseline, Func<string, string> name, int width, TextWriter output)
     {
         output.WriteLine();
         if (baseline.Summary is null)
@@ -72,7 +79,7 @@ internal static class SummaryLines
             {
                 var difference = BaselineDifference.Between(row.Summary, baseline.Summary);
                 output.WriteLine(Row(
-                    Name(row.Case), width, (Percent(difference.BestPowerCoefficient), 8), (Percent(difference.LargestElectricalPower), 9),
+                    name(row.Case), width, (Percent(difference.BestPowerCoefficient), 8), (Percent(difference.LargestElectricalPower), 9),
                     (Percent(difference.RatedWindSpeed), 9), (Percent(difference.LargestThrust), 9),
                     (Percent(difference.LargestFlapwiseMoment), 9))
                     + (hasEnergy ? "  " + Percent(difference.AnnualEnergy).PadLeft(8) : ""));
@@ -83,12 +90,12 @@ internal static class SummaryLines
 
     private static bool HasMore(List<SummaryRow> rows) => rows.Exists(HasMore);
 
-    private static string Figures(SummaryRow row, int width)
+    private static string Figures(SummaryRow row, string name, int width)
     {
         if (row.Summary is not { } summary)
-            return $"{Name(row.Case).PadRight(width)}  {row.State}";
+            return $"{name.PadRight(width)}  {row.State}";
         var figures = Row(
-            Name(row.Case), width,
+            name, width,
             (summary.BestPowerCoefficient is { } best ? best.Value.ToString("0.0000", CultureInfo.InvariantCulture) : "-", 7),
             (Figure(summary.BestTipSpeedRatio), 7),
             (Figure(summary.LargestElectricalPower?.Value / 1000), 9),
@@ -102,7 +109,7 @@ internal static class SummaryLines
     private static string Notes(SummaryRow row, CaseSummary summary)
     {
         var state = row.State == "current" ? "" : $"  {row.State}";
-        return summary.UnbalancedPoints == 0 ? state : $"{state}  {summary.UnbalancedPoints} unbalanced";
+        return summary.MarksText is { Length: > 0 } marks ? $"{state}  {marks}" : state;
     }
 
     private static string Row(string name, int width, params ReadOnlySpan<(string Text, int Width)> cells)
@@ -112,8 +119,6 @@ internal static class SummaryLines
             row += "  " + text.PadLeft(cellWidth - 1);
         return row;
     }
-
-    private static string Name(string name) => ShortName.Of(Printable.Of(name), WidestName);
 
     private static string Figure(double? value) => value is not { } number
         ? "-"
