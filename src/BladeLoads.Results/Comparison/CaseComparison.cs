@@ -42,7 +42,7 @@ public abstract record CaseComparison(string Case, string? OldCase)
 
     /// <summary>Both were there.</summary>
     /// <param name="Why">What the two were made from differs in this, in one sentence; empty where nothing is known to differ.</param>
-    /// <param name="Figures">All of them, changed or not, in the order of <see cref="Comparison.Figures.All"/>.</param>
+    /// <param name="Figures">Those of both or either, changed or not, in the order of <see cref="Comparison.Figures.All"/>.</param>
     /// <param name="Curves">Power and thrust at the common wind speed where they changed most.</param>
     /// <param name="Doubts">What makes numbers of either doubtful, a sentence each.</param>
     public sealed record Compared(

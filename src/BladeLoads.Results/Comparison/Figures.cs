@@ -14,7 +14,11 @@ public sealed record FigureValue(double Value, double? WindSpeed);
 /// <param name="Unit">Of the file; empty for a ratio.</param>
 /// <param name="BySize">Compared by magnitude: of a moment, the sign says the direction and not whether the load has grown.</param>
 /// <param name="Of">Null where the result has no such figure.</param>
-public sealed record Figure(string Name, string Unit, bool BySize, Func<StoredResult, FigureValue?> Of);
+public sealed record Figure(string Name, string Unit, bool BySize, Func<StoredResult, FigureValue?> Of)
+{
+    /// <summary>Left out of a comparison of two results that both have none.</summary>
+    public bool IsOfSomeCases { get; init; }
+}
 
 /// <summary>The figures that are compared, in their order. A later one (annual energy) joins at the end.</summary>
 public static class Figures
@@ -38,7 +42,7 @@ public static class Figures
         new("largest root in-plane moment", "kNm", true, LargestBySize("aero_root_in_plane_moment_kNm")),
         new("largest root flapwise moment", "kNm", true, LargestBySize("aero_root_flapwise_moment_kNm")),
         new("largest root edgewise moment", "kNm", true, LargestBySize("aero_root_edgewise_moment_kNm")),
-        new("annual energy", "MWh", false, AnnualEnergy),
+        new("annual energy", "MWh", false, AnnualEnergy) { IsOfSomeCases = true },
     ];
 
     // The table has no row at the rated wind speed: the receipt alone knows it.
@@ -48,13 +52,14 @@ public static class Figures
     private static FigureValue? AnnualEnergy(StoredResult result)
         => result.Receipt?.Summary.Energy?.AnnualEnergy is { } energy ? new FigureValue(FileUnits.MegawattHours(energy), null) : null;
 
-    private static Func<StoredResult, FigureValue?> Largest(string column) => result => Largest(result.Curve, column, value => value);
+    private static Func<StoredResult, FigureValue?> Largest(string column) => result => Largest(result, column, value => value);
 
-    private static Func<StoredResult, FigureValue?> LargestBySize(string column) => result => Largest(result.Curve, column, Math.Abs);
+    private static Func<StoredResult, FigureValue?> LargestBySize(string column) => result => Largest(result, column, Math.Abs);
 
-    private static FigureValue? Largest(StoredCurve curve, string column, Func<double, double> size)
+    private static FigureValue? Largest(StoredResult result, string column, Func<double, double> size)
     {
-        var found = curve.Points.Where(p => p[column] is not null && !p.Marks.Any(AtRest.Contains)).Select(p => new FigureValue(p[column]!.Value, p.WindSpeed)).ToList();
+        var found = result.Curve.Points.Concat(result.DesignPoints.Points).OrderBy(p => p.WindSpeed)
+            .Where(p => p[column] is not null && !p.Marks.Any(AtRest.Contains)).Select(p => new FigureValue(p[column]!.Value, p.WindSpeed)).ToList();
         if (found.Count == 0)
             return null;
         var largest = found.Max(f => size(f.Value));

@@ -42,7 +42,10 @@ public static class ResultComparison
         return new CaseComparison.Compared(
             now.Case, old.Case,
             old.Receipt is null || now.Receipt is null ? "" : why(old, now),
-            [.. Figures.All.Select(f => Change(f.Name, f.Unit, f.BySize, f.Of(old), f.Of(now)))],
+            [
+                .. Figures.All.Where(f => !f.IsOfSomeCases || f.Of(old) is not null || f.Of(now) is not null)
+                    .Select(f => Change(f.Name, f.Unit, f.BySize, f.Of(old), f.Of(now))),
+            ],
             [
                 LargestChange("electrical power where it changed most", "kW", common, Figures.ElectricalPower),
                 LargestChange("thrust where it changed most", "kN", common, Figures.Thrust),

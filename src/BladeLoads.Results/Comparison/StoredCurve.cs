@@ -29,6 +29,7 @@ public sealed record StoredCurve(ImmutableArray<StoredPoint> Points)
     private const string WindSpeed = "wind_speed_m_s";
     private const string Status = "status";
     private const string Region = "region";
+    private const string PointName = "point";
 
     private static readonly CsvReaderOptions Options = new()
     {
@@ -54,6 +55,20 @@ public sealed record StoredCurve(ImmutableArray<StoredPoint> Points)
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
             throw new UnreadableCurveException($"{CurveTable.FileName} cannot be read: {Publishing.DiskTrouble.ReadingReason(e)}");
+        }
+    }
+
+    /// <summary>The design points of a result; none where there is no table of them, or none that can be read.</summary>
+    public static StoredCurve ReadDesignPoints(string resultFolder)
+    {
+        var path = Path.Join(resultFolder, DesignPointsTable.FileName);
+        try
+        {
+            return File.Exists(path) && new FileInfo(path).Length <= LargestCurve ? Parse(File.ReadAllBytes(path)) : new StoredCurve([]);
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException or UnreadableCurveException)
+        {
+            return new StoredCurve([]);
         }
     }
 
@@ -90,7 +105,7 @@ public sealed record StoredCurve(ImmutableArray<StoredPoint> Points)
         foreach (var (column, place) in columns)
             if (column == Status)
                 marks = [.. row.GetString(place).Split(' ', StringSplitOptions.RemoveEmptyEntries)];
-            else if (column != Region)
+            else if (column is not (Region or PointName))
                 numbers[place] = Number(row, place);
         return numbers[columns[WindSpeed]] is { } windSpeed
             ? new StoredPoint(windSpeed, marks, columns, numbers) : throw Damaged(row, "has no wind speed");

@@ -10,6 +10,9 @@ namespace BladeLoads.Results.Comparison;
 /// <param name="Doubts">What makes its numbers doubtful, a phrase each.</param>
 public sealed record StoredResult(string Case, string Folder, Receipt? Receipt, StoredCurve Curve, ImmutableArray<string> Doubts)
 {
+    /// <summary>None where the result has none: earlier versions wrote none.</summary>
+    public StoredCurve DesignPoints { get; init; } = new([]);
+
     /// <exception cref="UnreadableCurveException">There is no power curve that can be read.</exception>
     public static StoredResult Read(string folder)
     {
@@ -21,7 +24,10 @@ public sealed record StoredResult(string Case, string Folder, Receipt? Receipt, 
             : receipt.Files.FirstOrDefault(f => f.Name == CurveTable.FileName) is { } written
                 ? ResultCheck.OfFile(folder, written)?.Sentence
                 : $"the receipt knows of no {CurveTable.FileName}";
-        return new StoredResult(receipt?.Case ?? NameOf(folder), folder, receipt, curve, doubt is null ? [] : [doubt]);
+        return new StoredResult(receipt?.Case ?? NameOf(folder), folder, receipt, curve, doubt is null ? [] : [doubt])
+        {
+            DesignPoints = StoredCurve.ReadDesignPoints(folder),
+        };
     }
 
     private static string NameOf(string folder) => Path.GetFileName(Path.TrimEndingDirectorySeparator(Path.GetFullPath(folder)));

@@ -21,7 +21,7 @@ internal static class ChangeLines
     private const int NamesShown = 5;
     private const int WindSpeedsNamed = 6;
 
-    private static readonly string[] Heads = ["best cp", "rated", "power", "thrust", "out-of-plane", "in-plane", "flapwise", "edgewise"];
+    private static readonly string[] Heads = ["best cp", "rated", "power", "thrust", "out-of-plane", "in-plane", "flapwise", "edgewise", "energy"];
 
     public static void Write(IReadOnlyCollection<CaseComparison> comparisons, ChangesShown shown, TextWriter output)
     {
@@ -47,9 +47,10 @@ internal static class ChangeLines
     private static void WriteOverview(List<CaseComparison.Compared> moved, ChangesShown shown, TextWriter output)
     {
         var rows = moved.Count <= RowsShown ? moved : [.. moved.OrderByDescending(c => c.LargestPercent).Take(RowsShown)];
-        var table = new TextTable(["case", .. Heads]);
+        var heads = Heads[..rows.Max(row => row.Figures.Length)];   // the last is of some cases only
+        var table = new TextTable(["case", .. heads]);
         foreach (var row in rows)
-            table.Add([Name(row, shown), .. row.Figures.Select(PercentCell)], Notes(row));
+            table.Add([Name(row, shown), .. row.Figures.Select(PercentCell), .. Enumerable.Repeat("-", heads.Length - row.Figures.Length)], Notes(row));
         table.Write(output);
         if (rows.Count < moved.Count)
             output.WriteLine($"the {rows.Count} cases that moved most of {moved.Count}; all: {shown.Rest}");

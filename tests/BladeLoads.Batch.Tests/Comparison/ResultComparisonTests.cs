@@ -200,7 +200,6 @@ public sealed class ResultComparisonTests : IDisposable
             new,old,compared,largest root in-plane moment,kNm,7,8,7,8,0,0,,
             new,old,compared,largest root flapwise moment,kNm,100,8,125,8,25,25,,
             new,old,compared,largest root edgewise moment,kNm,1,8,1,8,0,0,,
-            new,old,compared,annual energy,MWh,,,,,,,,
             new,old,compared,electrical power where it changed most,kW,200,8,250,8,50,25,,
             new,old,compared,thrust where it changed most,kN,20,8,25,8,5,25,,
             new,old,compared,mark pitch-jump,points,1,,,,-1,,lost at 8 m/s,

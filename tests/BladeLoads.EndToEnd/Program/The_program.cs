@@ -28,7 +28,7 @@ public sealed class The_program : IDisposable
         Assert.StartsWith("solving 3 cases with ", first.Error, StringComparison.Ordinal);
         foreach (var name in new[] { "clean", "slow", "thin-air" })
             Assert.Equal(
-                ["case.log", "power-curve.csv", "receipt.json", "spanwise.csv"],
+                ["case.log", "design-points.csv", "power-curve.csv", "receipt.json", "spanwise.csv"],
                 Directory.EnumerateFiles(Path.Join(_results, name)).Select(f => Path.GetFileName(f)!).Order());
         Assert.Equal(10, File.ReadAllLines(Path.Join(_results, "clean", "power-curve.csv")).Length);
         Assert.Single(Directory.EnumerateFiles(Path.Join(_results, "logs"), "*.jsonl"));
@@ -85,7 +85,7 @@ public sealed class The_program : IDisposable
         var german = new Dictionary<string, string> { ["LANG"] = "de_DE.UTF-8", ["LC_ALL"] = "de_DE.UTF-8" };
         Started.Run(_folder.Path, german, "run", "beck", "--workers", "3", "--results", "others");
         var tables = Tables(_results);
-        Assert.Equal(7, tables.Count);
+        Assert.Equal(10, tables.Count);
         Assert.Equal(tables, Tables(Path.Join(_folder.Path, "others", "beck")));
     }
 
