@@ -22,13 +22,14 @@ public sealed class Commands_with_an_invented_solver : IDisposable
         Assert.Equal($"""
             2 cases: 2 missing; solving 2
 
-            case                                    best cp  at TSR  power kW  rated m/s  thrust kN  at m/s  flapwise kNm
-            clean                                   0.3900   31.00     2.700      2.500      6.000   3.000         5.900
-            sweep~dens..-1.05~fine..--1.5~min_..-8  0.3900   31.00     2.700      2.500      6.000   3.000         5.900
+            case                                                            best cp  at TSR  power kW  rated m/s  thrust kN  at m/s  flapwise kNm
+            clean                                                           0.3900   31.00     2.700      2.500      6.000   3.000         5.900
+            sweep~density_kg_m3-1.05~fine_pitch_deg--1.5~min_rotor_speed-8  0.3900   31.00     2.700      2.500      6.000   3.000         5.900
+            power: largest electrical; thrust, flapwise moment at the blade root: largest; marks with their points
 
             difference to clean, %
-            case                                    best cp     power     rated    thrust  flapwise
-            sweep~dens..-1.05~fine..--1.5~min_..-8     0.00      0.00      0.00      0.00      0.00
+            case                                                            best cp     power     rated    thrust  flapwise
+            sweep~density_kg_m3-1.05~fine_pitch_deg--1.5~min_rotor_speed-8     0.00      0.00      0.00      0.00      0.00
 
             steady, characteristic, unfactored, without weight; no design envelope (each receipt.json says more)
             results: {Path.Join(_folder.Path, "fell")}
@@ -42,7 +43,7 @@ public sealed class Commands_with_an_invented_solver : IDisposable
         SolveCase solve = (rotor, _) => FellRotor.Curve(rotor, PointMarks.Unbalanced);
         var first = Run(Study("clean"), solve: solve);
         Assert.Equal(1, first.Code);
-        Assert.Contains("3 unbalanced", first.Out, StringComparison.Ordinal);
+        Assert.Contains("  unbalanced:3\n", first.Out, StringComparison.Ordinal);
         Assert.Contains(
             "Case clean: no inflow angle balances blade force and momentum at 3 of 3 points; they are marked 'unbalanced' and left blank\n",
             first.Error, StringComparison.Ordinal);
