@@ -15,7 +15,7 @@ strategy        = "fixed-speed"
 rotor_speed_rpm = 34
 pitch_deg       = 0.0
 [model]
-elements = 4
+elements = 10
 [outputs]
 spanwise = "none"
 TOML

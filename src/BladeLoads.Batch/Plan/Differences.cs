@@ -73,9 +73,9 @@ internal static class Differences
         if (key.StartsWith(SectionPrefix, StringComparison.Ordinal))
             return $"polar {key[SectionPrefix.Length..]}.csv";
         var kind = key == "control.schedule" ? "schedule" : key;
-        return tables.FirstOrDefault(t => t.Key == key) is { } table ? $"{kind} {Path.GetFileName(table.File)}" : kind;
+        return tables.FirstOrDefault(t => t.Key == key) is { File.Length: > 0 } table ? $"{kind} {Path.GetFileName(table.File)}" : kind;
     }
 
     // Tables stand in the values as their SHA-256.
-    private static bool IsTable(string value) => value.Length == 64 && !value.AsSpan().ContainsAnyExcept(HexDigits);
+    internal static bool IsTable(string value) => value.Length == 64 && !value.AsSpan().ContainsAnyExcept(HexDigits);
 }

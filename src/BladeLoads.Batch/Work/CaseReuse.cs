@@ -49,9 +49,19 @@ public sealed class CaseReuse(
         return null;
     }
 
-    // The other case may have been solved anew since the plan was made: then the result is among those that this replaced.
+    // The other case may be solved anew at this very moment: a result that is on its way to the replaced ones is there at the next look.
     private CaseOutcome.Reused? Copy(StudyCase studyCase, FoundResult found)
     {
+        const int looks = 3;
+        for (var look = 1; look <= looks; look++)
+            if (TryCopy(studyCase, found) is { } outcome)
+                return outcome;
+        return null;
+    }
+
+    private CaseOutcome.Reused? TryCopy(StudyCase studyCase, FoundResult found)
+    {
+        publisher.Settle();   // until then what this run has replaced lies under hidden names
         var places = ReplacedResult.Of(results, found.Case).Where(r => r.IsResult).Select(r => r.Folder).Prepend(Path.Join(results.Study, found.Folder));
         foreach (var folder in places)
             if (WholeResult(folder, studyCase) is { } receipt && FilesOf(folder, receipt) is { } files)
@@ -59,7 +69,11 @@ public sealed class CaseReuse(
                 var from = Path.GetRelativePath(results.Study, folder).Replace('\\', '/');
                 var own = receipt with
                 {
-                    Study = results.StudyName, Case = studyCase.Name, Title = studyCase.Title, Inputs = studyCase.Inputs, ReusedFrom = from,
+                    Study = results.StudyName,
+                    Case = studyCase.Name,
+                    Title = studyCase.Title,
+                    Inputs = studyCase.Inputs,
+                    ReusedFrom = from,
                 };
                 publisher.PublishCase(studyCase.Name, [.. files, new(Receipt.FileName, ReceiptFile.Write(own))]);
                 return new CaseOutcome.Reused(receipt.Summary, from);

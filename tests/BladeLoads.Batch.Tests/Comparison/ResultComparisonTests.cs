@@ -167,6 +167,23 @@ public sealed class ResultComparisonTests : IDisposable
         };
     }
 
+    [Theory]
+    [InlineData("fell/kept/signed/clean")]
+    [InlineData("fell/replaced/clean/20260101-000000~f")]
+    public void Rows_of_a_table_are_told_where_both_are_kept(string old)
+    {
+        string[] tables = ["-,0,0.1,0.01\n-,5,0.6,0.01\n-,9,0.8,0.02\n", "-,0,0.1,0.01\n-,5,0.7,0.01\n-,9,0.8,0.02\n"];
+        Directory.CreateDirectory(Runs.Results(_folder).Tables);
+        foreach (var table in tables)
+            File.WriteAllText(Path.Join(Runs.Results(_folder).Tables, FellRotor.Hash(table) + ".csv"), table);
+        var compared = Compare(Result(old, tables[0]), Result("fell/clean", tables[1]));
+        Assert.Equal("polar fell-30.csv: 1 row changed at 5 deg", compared.Why);
+
+        string Result(string place, string table) => WriteReceipt(
+            WriteCurve(_folder, place, new Point(8, 1)), "clean", 10, new Dictionary<string, int>(),
+            values: new Dictionary<string, string> { ["section.fell-30"] = FellRotor.Hash(table) });
+    }
+
     [Fact]
     public void The_table_of_changes_has_a_row_a_figure()
     {

@@ -128,7 +128,7 @@ public sealed class PlanIndexTests : IDisposable
         Solve();
         var doubts = new StudyLook(Results, "0.0.0", 1, Later).AllCurrent(Folder, _files)!.Doubts;
         Assert.Contains(doubts, d => d.Text.StartsWith("cl is 1.1 at 180 deg", StringComparison.Ordinal));
-        Assert.Equal(StudyReader.Read(Folder).Doubts, doubts);
+        Assert.Equal<InputFinding>(StudyReader.Read(Folder).Doubts, doubts);
     }
 
     [Fact]

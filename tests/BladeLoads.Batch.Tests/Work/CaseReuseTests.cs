@@ -102,6 +102,15 @@ public sealed class CaseReuseTests : IDisposable
     }
 
     [Fact]
+    public void A_result_goes_on_to_another_case_though_its_own_is_solved_anew_in_the_same_job()
+    {
+        Run(Case("a", 1));
+        var old = Tables("a");
+        Assert.Equal((1, 1), Run(Case("a", 2), Case("b", 1)));
+        Assert.Equal(old, Tables("b"));
+    }
+
+    [Fact]
     public void Another_title_alone_is_taken_over_without_solving()
     {
         Run(Case("clean", 1));

@@ -20,8 +20,9 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
     /// <param name="studyFolder">Absolute path.</param>
     public CurrentStudy? AllCurrent(string studyFolder, IStudyFiles files)
     {
-        if (_index is not { Sight: { } sight } index || sight.Root != studyFolder || sight.LookAgain(files, time) is not { } again)
+        if (_index is not { Sight: { } sight } index || sight.Root != studyFolder)
             return null;
+        var inputs = Task.Run(() => sight.LookAgain(files, time));   // beside the results: both wait for the system
         using var known = new KnownResults(results, index, time);
         var standings = ImmutableArray.CreateBuilder<CaseStanding>(index.Cases.Length);
         foreach (var indexed in index.Cases)
@@ -31,6 +32,8 @@ public sealed class StudyLook(ResultsFolder results, string toolVersion, int sol
                 return null;
             standings.Add(new CaseStanding(indexed.Name, indexed.Title, indexed.Fingerprint, CurrentUnread));
         }
+        if (inputs.GetAwaiter().GetResult() is not { } again)
+            return null;
         if (known.HasLearned || !ReferenceEquals(again, sight))
             IndexFile.Write(results.Index, index with { Sight = again, Results = Merged(index, known) });
         return new CurrentStudy(standings.DrainToImmutable(), index.Doubts);
