@@ -47,7 +47,8 @@ public class SummaryTableTests
     {
         var summary = Summary(0.5, 1, 1) with
         {
-            Best = new BestPoint(8.25, Math.PI / 90, 0.48, Searched: true), Energy = new EnergySummary(7.2e12, 0.25, null, null),
+            Best = new BestPoint(8.25, Math.PI / 90, 0.48, Searched: true),
+            Energy = new EnergySummary(7.2e12, 0.25, null, null),
         };
         var rows = Lines("base", new SummaryRow("base", "", "", "current", summary with { Energy = new EnergySummary(7.2e12 / 1.1, 0.2, null, null) }),
             new SummaryRow("one", "", "", "current", summary));
