@@ -89,9 +89,10 @@ public sealed class CaseReuse(
                 && receipt.Fingerprint == wanted.Fingerprint && receipt.SolverVersion == identity.SolverVersion
                 && ResultCheck.IsWhole(folder, receipt) ? receipt : null;
         }
-        catch (DirectoryNotFoundException)
+        // Moved away meanwhile, or not to be read: then there is nothing to use again, and the case is solved.
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
-            return null;   // moved away meanwhile
+            return null;
         }
     }
 
@@ -115,7 +116,7 @@ public sealed class CaseReuse(
         {
             return File.ReadAllBytes(path);
         }
-        catch (Exception e) when (e is FileNotFoundException or DirectoryNotFoundException)
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
             return null;
         }

@@ -151,7 +151,10 @@ public sealed partial class Disk : IDisk
         {
             Span<byte> held = stackalloc byte[StatxSize];
             Span<byte> found = stackalloc byte[StatxSize];
-            return Statx(handle, "", EmptyPath, StatxInode, held) == 0 && StatxAt(CurrentFolder, path, 0, StatxInode, found) == 0
+            // Where the system does not answer at all, asking again for ever would not help.
+            if (Statx(handle, "", EmptyPath, StatxInode, held) != 0)
+                throw Refused(path);
+            return StatxAt(CurrentFolder, path, 0, StatxInode, found) == 0
                 && held[StatxInodeNumber].SequenceEqual(found[StatxInodeNumber]) && held[StatxDevice].SequenceEqual(found[StatxDevice]);
         }
         catch (EntryPointNotFoundException)

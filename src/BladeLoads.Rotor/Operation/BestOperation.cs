@@ -14,6 +14,8 @@ public readonly record struct BestOperation(double TipSpeedRatio, double Pitch, 
     private const double LargestTipSpeedRatio = 20;
     private const double RatioStep = 0.5;
     private static readonly double PitchStep = double.DegreesToRadians(1.5);
+    private static readonly double LeastPitch = double.DegreesToRadians(-15);
+    private static readonly double LargestPitch = double.DegreesToRadians(30);
 
     // Shares of a grid step.
     private const double FirstStep = 0.8;
@@ -39,7 +41,7 @@ public readonly record struct BestOperation(double TipSpeedRatio, double Pitch, 
         double[] ratios = tipSpeedRatio is { } givenRatio ? [givenRatio] : Steps(LeastTipSpeedRatio, LargestTipSpeedRatio, RatioStep);
         double[] pitches = pitch is { } givenPitch
             ? [givenPitch]
-            : Steps(double.DegreesToRadians(-15), double.DegreesToRadians(30), PitchStep);
+            : Steps(LeastPitch, LargestPitch, PitchStep);
         var grid = new double[ratios.Length, pitches.Length];
         var highest = double.NegativeInfinity;
         for (var i = 0; i < ratios.Length; i++)
@@ -68,7 +70,7 @@ public readonly record struct BestOperation(double TipSpeedRatio, double Pitch, 
     private static IEnumerable<(int, int)> Starts(double[,] grid, double highest)
     {
         var all = Enumerable.Range(0, grid.GetLength(0)).SelectMany(i => Enumerable.Range(0, grid.GetLength(1)).Select(j => (i, j))).ToArray();
-        var peaks = all.Where(at => IsPeak(grid, at.i, at.j) && grid[at.i, at.j] >= highest - ((1 - WorthFollowing) * Math.Abs(highest)));
+        var peaks = all.Where(at => double.IsFinite(grid[at.i, at.j]) && IsPeak(grid, at.i, at.j) && grid[at.i, at.j] >= highest - ((1 - WorthFollowing) * Math.Abs(highest)));
         return peaks.Concat(all.OrderByDescending(at => grid[at.i, at.j]).Take(HighestSamples)).Distinct();
     }
 
@@ -90,9 +92,10 @@ public readonly record struct BestOperation(double TipSpeedRatio, double Pitch, 
             {
                 var turn = 2 * Math.PI * (((double)i / directions) + (directions > 2 ? GoldenShare * round : 0));
                 var (alongRatio, alongPitch) = directions > 2 ? (Math.Cos(turn), Math.Sin(turn)) : (1 - (2 * i), 1 - (2 * i));
-                var (ratio, pitch) = (from.TipSpeedRatio + (alongRatio * ratioStep), from.Pitch + (alongPitch * pitchStep));
-                if (ratio <= 0)
-                    continue;
+                var ratio = freeRatio
+                    ? Math.Clamp(from.TipSpeedRatio + (alongRatio * ratioStep), LeastTipSpeedRatio, LargestTipSpeedRatio)
+                    : from.TipSpeedRatio;
+                var pitch = freePitch ? Math.Clamp(from.Pitch + (alongPitch * pitchStep), LeastPitch, LargestPitch) : from.Pitch;
                 var coefficient = CoefficientAt(model, ratio, pitch);
                 if (coefficient > up.PowerCoefficient)
                     up = new BestOperation(ratio, pitch, coefficient, IsSearched: true);

@@ -8,6 +8,9 @@ internal static class DesignPoints
     /// <summary>m/s; how closely a region's beginning and the largest thrust are found.</summary>
     private const double WindSpeedTolerance = 1e-9;
 
+    /// <summary>Between two wind speeds of a case; there are seven regions.</summary>
+    private const int MostBeginnings = 8;
+
     /// <param name="curve">The curve on the case's own wind speeds.</param>
     /// <param name="hints">m/s, rising: wind speeds at which a region is likely to begin.</param>
     /// <param name="solve">A row of the curve at any wind speed.</param>
@@ -33,7 +36,8 @@ internal static class DesignPoints
         List<DesignPoint> found)
     {
         var (region, start) = (from.Region, from.Operation.WindSpeed);
-        while (region != to.Region)
+        // Where power or thrust lies on a limit to the last digits, regions could alternate without end.
+        for (var beginnings = 0; region != to.Region && beginnings < MostBeginnings; beginnings++)
         {
             var (below, above) = (start, to.Operation.WindSpeed);
             void Look(double place)
@@ -64,7 +68,7 @@ internal static class DesignPoints
     {
         var best = curve.Concat(found.Select(p => p.Point).Where(p => p.Loads is not null)).MaxBy(p => p.Loads!.Thrust)!;
         // Between its neighbours, and the kinks that lie there, thrust has one top.
-        var kinks = curve.Concat(found.Select(p => p.Point)).Select(p => p.Operation.WindSpeed).Order().ToArray();
+        var kinks = curve.Concat(found.Select(p => p.Point)).Select(p => p.Operation.WindSpeed).Distinct().Order().ToArray();
         var at = Array.IndexOf(kinks, best.Operation.WindSpeed);
         double[] places = [.. new[] { at - 1, at, at + 1 }.Where(i => i >= 0 && i < kinks.Length).Select(i => kinks[i])];
         var top = Largest.Find(v => solve(v).Loads?.Thrust ?? double.NaN, places, WindSpeedTolerance);

@@ -25,8 +25,8 @@ internal readonly record struct Sample(double Place, double Excess, ElementShare
         for (var i = 0; i < here.Length; i++)
             if (here[i].SeveralBalances || there[i].SeveralBalances || !(Math.Abs(there[i].InflowAngle - here[i].InflowAngle) <= mostTurn))
                 jumps += Math.Abs(there[i].Share - here[i].Share);
-        // NaN, where an element is unbalanced, may hide anything.
-        return jumps != 0 && !(Math.Max(Excess, next.Excess) + (Allowance * jumps) < 0);
+        // Beside an unbalanced element this is NaN, and false: what has no number cannot be said to reach anything.
+        return jumps != 0 && Math.Max(Excess, next.Excess) + (Allowance * jumps) >= 0;
     }
 }
 

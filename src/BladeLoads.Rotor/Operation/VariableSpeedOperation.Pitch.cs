@@ -5,8 +5,8 @@ internal sealed partial class VariableSpeedOperation
 {
     private const double Feathered = Math.PI / 2;
 
-    // rad, a twentieth of a degree: below it a flat top of power at fine pitch would count as a jump.
-    private const double LeastJump = 1e-3;
+    // rad, a tenth of a degree: below it a flat top of power at fine pitch would count as a jump.
+    private const double LeastJump = 2e-3;
     private static readonly double DeepestStall = double.DegreesToRadians(-30);
 
     // Where even feathered blades make more than rated nothing holds it: no jump, but a point that exceeds rated.
@@ -52,6 +52,7 @@ internal sealed partial class VariableSpeedOperation
         var point = setting.Point;
         Sample Thrust(double pitch)
         {
+            _cancellation.ThrowIfCancellationRequested();
             var thrust = _model.Solve(point with { Pitch = pitch })?.Thrust ?? double.NaN;
             return new Sample(pitch, thrust - limit, ElementShare.OfThrust(_model));
         }
@@ -69,7 +70,13 @@ internal sealed partial class VariableSpeedOperation
         var places = new List<double>();
         for (var deg = -15; deg <= 45; deg++)
             places.Add(double.DegreesToRadians(deg));
-        return Largest.Find(pitch => _model.Solve(point with { Pitch = pitch })?.Power ?? double.NaN, [.. places], 1e-9).Place;
+        return Largest.Find(
+            pitch =>
+            {
+                _cancellation.ThrowIfCancellationRequested();
+                return _model.Solve(point with { Pitch = pitch })?.Power ?? double.NaN;
+            },
+            [.. places], 1e-9).Place;
     }
 
     private bool StartsWithJump(double ratedWindSpeed, double ratedPower)
@@ -88,7 +95,7 @@ internal sealed partial class VariableSpeedOperation
         {
             places.Add(pitch);
             var above = double.RadiansToDegrees(pitch - finePitch);
-            pitch -= double.DegreesToRadians(above > 45 ? 4 : above > 10 ? 2 : above > 1.5 ? 1 : 0.25);
+            pitch -= double.DegreesToRadians(above > 45 ? 2 : above > 1.5 ? 1 : 0.25);
         }
         places.Add(finePitch);
         return [.. places];

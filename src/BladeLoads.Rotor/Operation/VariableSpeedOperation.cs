@@ -18,26 +18,23 @@ internal sealed partial class VariableSpeedOperation
 
     // rad per m/s, rad per rad: a balance that only follows the wind or the pitch turns no faster.
     private const double TurnPerWindSpeed = 0.1;
-    private const double TurnPerPitch = 1.2;
+    private const double TurnPerPitch = 0.5;
 
     private readonly Control.VariableSpeed _control;
     private readonly Drivetrain _drivetrain;
     private readonly RotorModel _model;
+    private readonly CancellationToken _cancellation;
 
     private VariableSpeedOperation(RotorCase rotorCase, Control.VariableSpeed control, RotorModel model, CancellationToken cancellation)
     {
-        (_control, _drivetrain, _model) = (control, rotorCase.Drivetrain, model);
+        (_control, _drivetrain, _model, _cancellation) = (control, rotorCase.Drivetrain, model, cancellation);
         Best = control is { TipSpeedRatio: { } ratio, FinePitch: { } pitch }
             ? BestOperation.Given(ratio, pitch, model)
             : BestOperation.Find(model, control.TipSpeedRatio, control.FinePitch, cancellation);
         if (control.RatedPower is not { } ratedPower)
             return;
         RatedWindSpeed = FirstReach.Find(
-            v =>
-            {
-                cancellation.ThrowIfCancellationRequested();
-                return PowerAt(v, BaseAt(v).Point, ratedPower);
-            },
+            v => PowerAt(v, BaseAt(v).Point, ratedPower),
             WindSpeedsUpwards(rotorCase, ratedPower), WindSpeedTolerance, FinestWindSpeed, TurnPerWindSpeed)?.Reached.Place;
         Marks = RatedWindSpeed is null ? PointMarks.RatedNotReached
             : StartsWithJump(RatedWindSpeed.Value, ratedPower) ? PointMarks.PitchJump
@@ -97,6 +94,7 @@ internal sealed partial class VariableSpeedOperation
     // NaN where an element is unbalanced: such a point cannot be said to hold anything.
     private Sample PowerAt(double place, in OperatingPoint point, double ratedPower)
     {
+        _cancellation.ThrowIfCancellationRequested();
         var power = _model.Solve(point)?.Power ?? double.NaN;
         return new Sample(place, _drivetrain.Electrical(power) - ratedPower, ElementShare.OfPower(_model, point));
     }
@@ -107,11 +105,11 @@ internal sealed partial class VariableSpeedOperation
         var last = double.IsFinite(rotorCase.CutOutWindSpeed) ? rotorCase.CutOutWindSpeed : rotorCase.WindSpeeds[^1];
         // No rotor takes more than all the power of the wind through its area, so the search need not begin below this.
         var first = Math.Cbrt(ratedPower / (0.5 * rotorCase.Air.Density * _model.Area));
-        var places = new List<double>();
         first = Math.Min(Math.Max(first, rotorCase.CutInWindSpeed), last);
+        // The case's own wind speeds are among them: no row above rated may go unseen.
+        var places = new SortedSet<double>(rotorCase.WindSpeeds.Where(v => v > first && v < last)) { last };
         for (var i = 0; first + (i * WindSpeedStep) < last; i++)
             places.Add(first + (i * WindSpeedStep));
-        places.Add(last);
         return [.. places];
     }
 }
