@@ -41,7 +41,7 @@ internal sealed record FurtherWork(
         if (Surface is not null)
             yield return new(SurfaceTable.FileName, SurfaceTable.Write(Surface));
         if (Energy is not null)
-            yield return new(EnergyTable.FileName, EnergyTable.Write(Energy));
+            yield return new(EnergyTable.FileName, EnergyTable.Write(Energy, curve));
         if (AtReferenceDensity is not null && studyCase.Further.ReferenceDensity is { } density)
             yield return new(
                 NormalisationTable.FileName, NormalisationTable.Write(curve, studyCase.Rotor.Air.Density, AtReferenceDensity, density));

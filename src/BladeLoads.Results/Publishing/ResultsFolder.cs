@@ -34,6 +34,16 @@ public sealed record ResultsFolder(string Root, string StudyName)
     /// <summary>Whether the folder needs this name itself: no result lies under it.</summary>
     public static bool IsOwn(string name) => OwnNames.Contains(name);
 
+    /// <summary>Result folders whose name is none of these, in order: of cases that the study has no more.</summary>
+    public IReadOnlyList<string> OfNoCase(IReadOnlySet<string> caseNames)
+    {
+        if (!Directory.Exists(Study))
+            return [];
+        return [.. Directory.EnumerateDirectories(Study).Select(path => Path.GetFileName(path))
+            .Where(name => !caseNames.Contains(name) && Objection(name) is null && File.Exists(Path.Join(Case(name), Receipts.Receipt.FileName)))
+            .Order(StringComparer.Ordinal)];
+    }
+
     /// <summary>What reruns replaced: a folder a case, and in it a folder a result.</summary>
     public string Replaced => Path.Join(Study, ReplacedName);
 

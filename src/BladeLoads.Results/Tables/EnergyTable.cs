@@ -1,6 +1,8 @@
 using System.Collections.Immutable;
 using System.Globalization;
+using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Energy;
+using BladeLoads.Rotor.Operation;
 using static BladeLoads.Results.Tables.FileUnits;
 
 namespace BladeLoads.Results.Tables;
@@ -20,11 +22,18 @@ public static class EnergyTable
         "status",
     ];
 
-    /// <summary>The table as UTF-8. Energies of a curve with a missing bin are empty cells, and the status names the bins.</summary>
-    public static byte[] Write(EnergyYield energy)
+    // What a year must not be read without: points that no machine would be let run at.
+    private const PointMarks Broken = PointMarks.ExceedsRated | PointMarks.ThrustNotHeld | PointMarks.RatedNotReached;
+
+    /// <summary>
+    /// The table as UTF-8. Energies of a curve with a missing bin are empty cells, and the status names the bins; it also carries the marks
+    /// of points that exceed what the case asks for.
+    /// </summary>
+    public static byte[] Write(EnergyYield energy, PowerCurve curve)
     {
         using var table = new TableWriter(Columns.AsSpan());
-        var status = Status(energy.MissingBins);
+        var marks = StatusWords.Of(curve.Points.Aggregate(curve.Marks, (all, point) => all | point.Marks) & Broken);
+        var status = $"{Status(energy.MissingBins)} {marks}".Trim();
         for (var i = 0; i < energy.Rows.Length; i++)
         {
             var row = energy.Rows[i];

@@ -26,13 +26,21 @@ public static class CaseSolver
         if (variableSpeed?.Marks == PointMarks.PitchJump)
             MarkFirstRated(points);
         var curve = points.MoveToImmutable();
-        return new PowerCurve(
-            curve, variableSpeed?.RatedWindSpeed, variableSpeed?.Best,
-            DesignPoints.Of(
-                rotorCase, curve, variableSpeed?.RatedWindSpeed, variableSpeed?.LikelyBeginnings() ?? [], Solved,
-                v => solver.RegionOf(SettingAt(rotorCase, v, variableSpeed))),
-            variableSpeed?.Marks ?? PointMarks.None, model.Solves);
+        var limited = rotorCase.Control is Control.VariableSpeed { ThrustLimit: not null };
+        var designPoints = DesignPoints.Of(
+            rotorCase, curve, limited ? null : variableSpeed?.RatedWindSpeed, variableSpeed?.LikelyBeginnings() ?? [], Solved,
+            v => solver.RegionOf(SettingAt(rotorCase, v, variableSpeed)));
+        var rated = limited ? FirstAtRated(curve, designPoints) : variableSpeed?.RatedWindSpeed;
+        var marks = variableSpeed?.Marks ?? PointMarks.None;
+        if (limited && rated is null && rotorCase.Control.RatedPower is not null)
+            marks = PointMarks.RatedNotReached;
+        return new PowerCurve(curve, rated, variableSpeed?.Best, designPoints, marks, model.Solves);
     }
+
+    // Under a thrust limit the rotor may pitch before it makes rated power, and comes to it later than at fine pitch.
+    private static double? FirstAtRated(ImmutableArray<CurvePoint> curve, ImmutableArray<DesignPoint> designPoints)
+        => curve.Concat(designPoints.Select(d => d.Point)).Where(p => p.Region == Region.RatedPower)
+            .Min(p => (double?)p.Operation.WindSpeed);
 
     private static Setting SettingAt(RotorCase rotorCase, double windSpeed, VariableSpeedOperation? variableSpeed)
     {

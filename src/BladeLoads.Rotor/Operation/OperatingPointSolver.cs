@@ -50,6 +50,9 @@ internal sealed class OperatingPointSolver(RotorCase rotorCase, RotorModel model
         var (margin, radius) = (double.NaN, double.NaN);
         for (var i = 0; i < model.Elements.Length; i++)
         {
+            // The thick root is stalled nearly always, and says nothing of the blade that works.
+            if (model.Elements[i].Radius < rotorCase.Blade.TipRadius / 2)
+                continue;
             var here = model.Annuli[i].AngleOfLargestLift() - model.Elements[i].AngleOfAttack;
             if (here < margin || (double.IsNaN(margin) && !double.IsNaN(here)))
                 (margin, radius) = (here, model.Elements[i].Radius);

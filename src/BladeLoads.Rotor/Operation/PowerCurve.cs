@@ -6,7 +6,8 @@ namespace BladeLoads.Rotor.Operation;
 /// <summary>A rotor case solved.</summary>
 /// <param name="Points">One a wind speed, in the order of the case.</param>
 /// <param name="RatedWindSpeed">
-/// m/s: the lowest wind speed at which the rotor makes rated power before it pitches; null where the case has none, or never reaches it.
+/// m/s: the lowest wind speed at which the rotor makes rated power before it pitches, and under a thrust limit the one from which it holds
+/// rated power; null where the case has none, or never reaches it.
 /// </param>
 /// <param name="Best">The tip-speed ratio and fine pitch of a variable-speed machine; null for the others.</param>
 /// <param name="DesignPoints">In the order of their wind speeds.</param>
@@ -29,7 +30,7 @@ public sealed record CurvePoint(
 /// <param name="PowerPerPitch">Slope of rotor power by pitch, W/rad; NaN where a point beside it has none.</param>
 /// <param name="ThrustPerPitch">Slope of thrust by pitch, N/rad; likewise.</param>
 /// <param name="StallMargin">
-/// rad: the least distance from an element's angle of attack up to its table's largest lift, negative beyond it; NaN where no section lifts.
+/// rad: the least distance, over the outer half of the radius, from an element's angle of attack up to its table's largest lift, negative beyond it; NaN where no section lifts.
 /// </param>
 /// <param name="StallRadius">m: where that is.</param>
 /// <param name="TipMach">Undisturbed speed of the air past the tip over the speed of sound.</param>

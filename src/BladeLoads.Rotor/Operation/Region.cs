@@ -30,7 +30,7 @@ public enum PointMarks
     /// <summary>At the rated wind speed power rises with pitch, so the feather branch starts with a jump of pitch.</summary>
     PitchJump = 64,
 
-    /// <summary>No pitch from fine to feather makes rated power here.</summary>
+    /// <summary>No pitch that the control may take makes rated power here.</summary>
     RatedNotReached = 128,
 
     /// <summary>Thrust exceeds its limit even with the blades feathered.</summary>

@@ -46,7 +46,8 @@ internal sealed partial class VariableSpeedOperation
             : null;
     }
 
-    // The smallest pitch from which thrust stays within the limit up to feather; where rated power asks for more pitch, that wins.
+    // The smallest pitch from which thrust stays within the limit up to feather; where rated power asks for more pitch, that wins. On the
+    // side of stall the limit steps in only where the stalled blades do not hold it themselves.
     private Setting WithinThrust(in Setting setting, double limit)
     {
         var point = setting.Point;
@@ -56,10 +57,19 @@ internal sealed partial class VariableSpeedOperation
             var thrust = _model.Solve(point with { Pitch = pitch })?.Thrust ?? double.NaN;
             return new Sample(pitch, thrust - limit, ElementShare.OfThrust(_model));
         }
-        if (FirstReach.Find(Thrust, PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)), PitchTolerance, FinestPitch, TurnPerPitch) is not { } reach)
+        var isHeldByStall = _control.AboveRated == AboveRated.PitchToStall && setting.Region == Region.RatedPower
+            && Thrust(point.Pitch).Excess <= MetTolerance * limit;
+        var pitches = PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch));
+        if (isHeldByStall || FirstReach.Find(Thrust, pitches, PitchTolerance, FinestPitch, TurnPerPitch) is not { } reach)
             return setting;
         if (reach.Below == reach.Reached)
-            return setting with { Marks = setting.Marks | PointMarks.ThrustNotHeld };
+        {
+            // Not even feathered blades hold it: the pitch with the least thrust comes nearest.
+            Array.Reverse(pitches);
+            var least = Largest.Find(pitch => -Thrust(pitch).Excess, pitches, LeastJump);
+            var marks = least.Excess >= 0 ? setting.Marks : setting.Marks | PointMarks.ThrustNotHeld;
+            return new Setting(point with { Pitch = least.Place }, Region.ThrustLimit, marks & ~PointMarks.PowerJump);
+        }
         if (reach.Below.Place <= point.Pitch)
             return setting;
         return new Setting(point with { Pitch = reach.Below.Place }, Region.ThrustLimit, setting.Marks & ~PointMarks.PowerJump);

@@ -20,10 +20,10 @@ internal static class PlanCommand
         var study = AskedStudy.Read(path, surroundings);
         FindingLines.Write(study.Asked, surroundings.Error, withSource: surroundings.ErrorIsTerminal);
         var results = new ResultsFolder(root, study.Asked.Name);
-        var (_, plan) = study.Plan(LookAt(results, surroundings), only);
+        var (whole, plan) = study.Plan(LookAt(results, surroundings), only);
         if (NothingMeant.Tell(plan, study.Asked, only, surroundings))
             return ExitCode.NothingCouldRun;
-        Tell(plan.Standings, results, asJson, surroundings);
+        Tell(plan.Standings, whole.Standings, results, asJson, surroundings);
         if (plan.Cases.IsEmpty)
             return ExitCode.NothingCouldRun;
         return study.Asked.Errors.IsEmpty && plan.Rejected.IsEmpty ? ExitCode.Good : ExitCode.SomeNotGood;
@@ -46,14 +46,15 @@ internal static class PlanCommand
             return false;
         FindingLines.Write(
             new Study(name, folder, null, [], [], [], all.Doubts), surroundings.Error, withSource: surroundings.ErrorIsTerminal);
-        Tell(meant, results, asJson, surroundings);
+        Tell(meant, all.Cases, results, asJson, surroundings);
         return true;
     }
 
     private static StudyLook LookAt(ResultsFolder results, Surroundings surroundings)
         => new(results, CommandLine.ToolVersion, SolverVersion.Number, surroundings.Time);
 
-    private static void Tell(ImmutableArray<CaseStanding> cases, ResultsFolder results, bool asJson, Surroundings surroundings)
+    private static void Tell(
+        ImmutableArray<CaseStanding> cases, ImmutableArray<CaseStanding> whole, ResultsFolder results, bool asJson, Surroundings surroundings)
     {
         if (asJson)
         {
@@ -61,7 +62,7 @@ internal static class PlanCommand
             return;
         }
         // In one piece: standard output is not buffered, and a line a case would be a call of the system each.
-        var lines = string.Concat(PlanLines.Of(cases).Append(PlanLines.Closing(cases)).Select(line => line + surroundings.Out.NewLine));
+        var lines = string.Concat(PlanLines.Of(cases).Append(PlanLines.Closing(cases)).Concat(PlanLines.OfNoCase(results.OfNoCase(whole.Select(c => c.Name).ToHashSet(StringComparer.Ordinal)))).Select(line => line + surroundings.Out.NewLine));
         surroundings.Out.Write(lines);
         surroundings.Out.Flush();
     }

@@ -36,6 +36,17 @@ internal static class PlanLines
         };
     }
 
+    /// <summary>What lies there though the study has no such case: renamed, taken out, another value of a sweep.</summary>
+    public static IEnumerable<string> OfNoCase(IReadOnlyList<string> names)
+    {
+        const int Shown = 5;
+        if (names.Count == 0)
+            yield break;
+        var more = names.Count > Shown ? $" and {names.Count - Shown} more" : "";
+        yield return Printable.Of(
+            $"{Count.Of(names.Count, "result")} of no case of the study: {string.Join(", ", names.Take(Shown))}{more}; left alone, delete what is not wanted");
+    }
+
     /// <summary><c>12 cases: 3 current, 9 missing; solving 9</c>.</summary>
     /// <param name="all">Current cases are solved too, and none is re-used.</param>
     public static string Summary(StudyPlan plan, bool all)

@@ -57,7 +57,7 @@ public sealed class FurtherTablesTests : IDisposable
                 "site,7.5,2.1,2000,1000,0.25,2190,,,,,",
                 "mean wind speed,4,2.1,2000,1000,0.25,2190,2000,1000,0.25,2190,",
             ],
-            Lines(EnergyTable.Write(energy)));
+            Lines(EnergyTable.Write(energy, FellRotor.Curve(FellRotor.Rotor()))));
     }
 
     [Fact]
@@ -65,7 +65,16 @@ public sealed class FurtherTablesTests : IDisposable
     {
         var energy = new EnergyYield([11.5, 12], [new(new WindClimate.Histogram([0, 20], [1]), null, null)]);
 
-        Assert.Equal("site,10,,,,,,,,,,missing-bins:11.5/12", Lines(EnergyTable.Write(energy))[1]);
+        Assert.Equal("site,10,,,,,,,,,,missing-bins:11.5/12", Lines(EnergyTable.Write(energy, FellRotor.Curve(FellRotor.Rotor())))[1]);
+    }
+
+    [Fact]
+    public void A_year_of_points_that_break_what_the_case_asks_for_says_so()
+    {
+        var energy = new EnergyYield([], [new(new WindClimate.Histogram([0, 20], [1]), new YearOfEnergy(3.6e9, 3.6e9, null), null)]);
+        var curve = FellRotor.Curve(FellRotor.Rotor(), PointMarks.ExceedsRated | PointMarks.OutsideReynolds);
+
+        Assert.Equal("site,10,,1,1,,,,,,,exceeds-rated", Lines(EnergyTable.Write(energy, curve))[1]);
     }
 
     [Fact]

@@ -44,10 +44,43 @@ public sealed class StrategyTests
     }
 
     [Fact]
-    public void A_thrust_limit_that_feathering_cannot_hold_is_marked()
+    public void A_thrust_limit_that_feathering_cannot_hold_is_marked_at_the_pitch_with_the_least_thrust()
     {
-        var curve = Solve(InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9, thrustLimit: -1e6));
-        Assert.Contains(curve.Points, p => (p.Marks & PointMarks.ThrustNotHeld) != 0);
+        var control = InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9, thrustLimit: -1e6);
+        var model = new RotorModel(InventedRotor.Case(control, Winds));
+        foreach (var point in Solve(control).Points)
+        {
+            Assert.True((point.Marks & PointMarks.ThrustNotHeld) != 0);
+            for (var deg = 2; deg <= 90; deg += 4)
+                Assert.True(
+                    model.Solve(point.Operation with { Pitch = double.DegreesToRadians(deg) })!.Thrust
+                    >= point.Loads!.Thrust - (1e-3 * Math.Abs(point.Loads.Thrust)));
+        }
+    }
+
+    [Fact]
+    public void On_the_side_of_stall_a_thrust_limit_that_the_stalled_blades_hold_changes_nothing()
+    {
+        var control = InventedRotor.VariableSpeed(0.9e6, 2, maxRotorSpeed: 1.4, aboveRated: AboveRated.PitchToStall);
+        var free = Solve(control, dropWidthDeg: 12);
+        var limit = free.Points.Max(p => p.Loads!.Thrust) * 1.001;
+        var limited = Solve(control with { ThrustLimit = limit }, dropWidthDeg: 12);
+        Assert.Equal(free.Points.Select(p => p.Loads), limited.Points.Select(p => p.Loads));
+    }
+
+    [Fact]
+    public void Under_a_thrust_limit_the_rated_wind_speed_is_where_rated_power_is_held()
+    {
+        var curve = Solve(InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9, thrustLimit: 160e3));
+        var free = Solve(InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9));
+        Assert.True(curve.RatedWindSpeed > free.RatedWindSpeed);
+        var there = CaseSolver.Solve(
+            InventedRotor.Case(
+                InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9, thrustLimit: 160e3), [curve.RatedWindSpeed!.Value, 22.5]), default).Points[0];
+        Assert.Equal(1.5e6, there.ElectricalPower, 1.5e6 * 1e-6);
+        var never = Solve(InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9, thrustLimit: 30e3));
+        Assert.Null(never.RatedWindSpeed);
+        Assert.Equal(PointMarks.RatedNotReached, never.Marks);
     }
 
     [Fact]
@@ -85,7 +118,7 @@ public sealed class StrategyTests
         var control = InventedRotor.VariableSpeed(1.1e6, 2, minRotorSpeed: 0.9, maxRotorSpeed: 1.3, thrustLimit: 150e3);
         var curve = Solve(control);
         var names = curve.DesignPoints.Select(p => p.Name).ToArray();
-        Assert.Contains("rated wind speed", names);
+        Assert.Contains("rated power begins", names);
         Assert.Contains("largest thrust", names);
         var radius = 40.0;
         Assert.Equal(0.9 * radius / 7, Single("best tip-speed ratio begins").Operation.WindSpeed, 1e-8);
@@ -134,7 +167,7 @@ public sealed class StrategyTests
         // The invented lift is largest at 10 degrees or a row beside it.
         foreach (var point in Solve(InventedRotor.VariableSpeed()).Points)
         {
-            var largest = point.Elements.Max(e => e.AngleOfAttack);
+            var largest = point.Elements.Where(e => e.Radius >= 20).Max(e => e.AngleOfAttack);
             Assert.Equal(double.DegreesToRadians(10) - largest, point.Margins!.StallMargin, double.DegreesToRadians(1.01));
             Assert.Contains(point.Elements, e => e.Radius == point.Margins.StallRadius);
         }
