@@ -37,7 +37,7 @@ public sealed class RunLog : IDisposable
         {
             Directory.CreateDirectory(folder);
             var name = time.GetLocalNow().ToString("yyyyMMdd-HHmmss-fff", CultureInfo.InvariantCulture);
-            var file = FreePath(folder, name);
+            var file = OwnPath(folder, name);
             return new RunLog(
                 Configuration(screen)
                     .WriteTo.Fallible(
@@ -67,13 +67,22 @@ public sealed class RunLog : IDisposable
     private static LoggerConfiguration Configuration(ILogEventSink screen)
         => new LoggerConfiguration().WriteTo.Sink(screen, LogEventLevel.Warning);
 
-    // Two runs may begin within a millisecond.
-    private static string FreePath(string folder, string name)
+    // Two runs may begin within a millisecond: whoever creates the file has its name.
+    private static string OwnPath(string folder, string name)
     {
-        var path = Path.Join(folder, name + ".jsonl");
-        for (var i = 2; System.IO.File.Exists(path); i++)
-            path = Path.Join(folder, string.Create(CultureInfo.InvariantCulture, $"{name}-{i}.jsonl"));
-        return path;
+        for (var i = 1; ; i++)
+        {
+            var path = Path.Join(folder, i == 1 ? $"{name}.jsonl" : string.Create(CultureInfo.InvariantCulture, $"{name}-{i}.jsonl"));
+            try
+            {
+                System.IO.File.Open(path, FileMode.CreateNew, FileAccess.Write).Dispose();
+                return path;
+            }
+            catch (IOException) when (System.IO.File.Exists(path) && i < 1000)
+            {
+                // Another run was first.
+            }
+        }
     }
 
     private sealed class ReportOnce(string folder, Action<string> report) : ILoggingFailureListener
