@@ -36,6 +36,8 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         var model = ModelReader.Read(values);
         var spanwise = SpanwiseReader.Read(values, windSpeeds);
         var site = SiteReader.Read(values, folder, tables);
+        if (site.Site is not null)
+            UsualRanges.CheckYear(values, windSpeeds, control.CutIn, control.CutOut);
         var further = new FurtherResults(
             FurtherReader.ReadSurface(values, findings), site.Site, FurtherReader.ReadTurbulence(values), FurtherReader.ReadReferenceDensity(values));
         CheckTheRest(values);

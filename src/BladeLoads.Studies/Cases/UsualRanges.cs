@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using BladeLoads.Rotor.Blades;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Studies.Fingerprints;
@@ -46,5 +47,20 @@ internal static class UsualRanges
         var found = strategy is Control.Schedule ? $"goes up to {rpm} rpm" : $"is {rpm}";
         values.Doubt(path, $"{found}, a tip speed of {CanonicalText.Of(Math.Round(tipSpeed, 2))} m/s; "
             + "5 to 150 m/s are usual, and rotor speeds are in rpm");
+    }
+
+    /// <summary>Doubts a year of energy whose curve does not reach from cut-in to cut-out: it leaves out what lies between, in silence.</summary>
+    public static void CheckYear(CaseValues values, ImmutableArray<double> windSpeeds, double cutIn, double cutOut)
+    {
+        const double Bin = 0.5;
+        const string CutIn = "control.cut_in_wind_speed_m_s", CutOut = "control.cut_out_wind_speed_m_s";
+        if (windSpeeds.IsDefaultOrEmpty)
+            return;
+        if (values.Has(CutIn) && windSpeeds[0] > cutIn + Bin)
+            values.Doubt(CutIn, $"is {CanonicalText.Of(cutIn)}, and the wind speeds of the case begin at "
+                + $"{CanonicalText.Of(windSpeeds[0])} m/s; the year of [site] leaves out what lies between");
+        if (values.Has(CutOut) && windSpeeds[^1] < cutOut - Bin)
+            values.Doubt(CutOut, $"is {CanonicalText.Of(cutOut)}, and the wind speeds of the case end at "
+                + $"{CanonicalText.Of(windSpeeds[^1])} m/s; the year of [site] leaves out what lies between");
     }
 }

@@ -75,6 +75,23 @@ public class SiteTests
     public void A_wrong_histogram_is_told_at_its_row(string text, string by, string expected)
         => Told.Exactly(expected.Split('\n'), Study("histogram = \"../site/mast.csv\"").Change("site/mast.csv", text, by).Read().Errors);
 
+    [Fact]
+    public void A_year_of_a_curve_that_stops_short_of_cut_out_is_doubted()
+    {
+        var toml = FellStudy.VariableSpeedCase.Replace("[model]\n", "[site]\nmean_wind_speed_m_s = 7.5\n[model]\n", StringComparison.Ordinal)
+            .Replace("[control]\n", "[control]\ncut_in_wind_speed_m_s = 1\ncut_out_wind_speed_m_s = 60\n", StringComparison.Ordinal);
+        var doubts = new FellStudy().With("cases/clean.toml", toml).Read().Doubts.Select(d => d.Text).ToArray();
+
+        Assert.Contains(doubts, d => d.StartsWith("cut_in_wind_speed_m_s is 1, and the wind speeds of the case begin at ", StringComparison.Ordinal)
+            && d.EndsWith(" m/s; the year of [site] leaves out what lies between", StringComparison.Ordinal));
+        Assert.Contains(doubts, d => d.StartsWith("cut_out_wind_speed_m_s is 60, and the wind speeds of the case end at ", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void A_year_without_stated_limits_of_operation_raises_no_doubt_about_them()
+        => Assert.DoesNotContain(
+            Study("mean_wind_speed_m_s = 7.5").Read().Doubts, d => d.Text.Contains("the year of [site]", StringComparison.Ordinal));
+
     private static FellStudy Study(string keys) => new FellStudy()
         .With("cases/clean.toml", FellStudy.VariableSpeedCase.Replace("[model]\n", $"[site]\n{keys}\n[model]\n", StringComparison.Ordinal))
         .With("site/mast.csv", Mast);
