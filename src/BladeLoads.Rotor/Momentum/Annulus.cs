@@ -80,6 +80,14 @@ internal readonly struct Annulus
         return at;
     }
 
+    /// <summary>rad that an angle of attack may rise before the least angle of largest lift of the tables; negative beyond it.</summary>
+    public double BelowStall(double angleOfAttack)
+        => (OuterWeight == 0 ? Inner.LeastStallAngle : Math.Min(Inner.LeastStallAngle, Outer.LeastStallAngle)) - angleOfAttack;
+
+    /// <summary>rad that an angle of attack may rise before a table lifts; negative where one does.</summary>
+    public double BelowLift(double angleOfAttack)
+        => (OuterWeight == 0 ? Inner.LeastLiftingAngle : Math.Min(Inner.LeastLiftingAngle, Outer.LeastLiftingAngle)) - angleOfAttack;
+
     public double LossAt(double absoluteSine) => LossFactor.Of(TipExponent, absoluteSine) * LossFactor.Of(HubExponent, absoluteSine);
 
     public bool IsOutsideAngles(double angleOfAttack)

@@ -28,7 +28,7 @@ public static class CaseSolver
         var curve = points.MoveToImmutable();
         var limited = rotorCase.Control is Control.VariableSpeed { ThrustLimit: not null };
         var designPoints = DesignPoints.Of(
-            rotorCase, curve, limited ? null : variableSpeed?.RatedWindSpeed, variableSpeed?.LikelyBeginnings() ?? [], Solved,
+            rotorCase, curve, limited ? null : variableSpeed?.RatedWindSpeed, variableSpeed?.LikelyBeginnings(curve.AsSpan()) ?? [], Solved,
             v => solver.RegionOf(SettingAt(rotorCase, v, variableSpeed)));
         var rated = limited ? FirstAtRated(curve, designPoints) : variableSpeed?.RatedWindSpeed;
         var marks = variableSpeed?.Marks ?? PointMarks.None;

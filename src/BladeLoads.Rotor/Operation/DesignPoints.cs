@@ -71,7 +71,7 @@ internal static class DesignPoints
         var kinks = curve.Concat(found.Select(p => p.Point)).Select(p => p.Operation.WindSpeed).Distinct().Order().ToArray();
         var at = Array.IndexOf(kinks, best.Operation.WindSpeed);
         double[] places = [.. new[] { at - 1, at, at + 1 }.Where(i => i >= 0 && i < kinks.Length).Select(i => kinks[i])];
-        var top = Largest.Find(v => solve(v).Loads?.Thrust ?? double.NaN, places, WindSpeedTolerance);
+        var top = Largest.Find(v => solve(v).Loads?.Thrust ?? double.NaN, places, WindSpeedTolerance, worth: 1);
         if (!(top.Excess > best.Loads!.Thrust))
             return best;
         var there = solve(Math.Clamp(top.Place, rotorCase.CutInWindSpeed, rotorCase.CutOutWindSpeed));
