@@ -7,7 +7,8 @@ namespace BladeLoads.Studies.Tables;
 /// <summary>The sections of a blade from one set of polars.</summary>
 /// <param name="Sections">Null when a table is missing or has an error.</param>
 /// <param name="Tables">In the order in which the blade names them.</param>
-internal sealed record BladeSections(SectionSet? Sections, ImmutableArray<PolarTable> Tables);
+/// <param name="Set">What the set says of its tables, where the blade asks for it or the set says it.</param>
+internal sealed record BladeSections(SectionSet? Sections, ImmutableArray<PolarTable> Tables, SetFile? Set);
 
 /// <summary>The tables of a study, each read, hashed and prepared once, however many cases share it.</summary>
 internal sealed class StudyTables(StudyFolder folder, Findings findings)
@@ -16,6 +17,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
     private readonly Dictionary<string, PolarTable?> _polars = new(StringComparer.Ordinal);
     private readonly Dictionary<string, ScheduleTable?> _schedules = new(StringComparer.Ordinal);
     private readonly Dictionary<string, HistogramTable?> _histograms = new(StringComparer.Ordinal);
+    private readonly Dictionary<string, SetFile?> _sets = new(StringComparer.Ordinal);
     private readonly Dictionary<(string Blade, string Set), BladeSections> _sections = [];
 
     /// <summary>Null when the file cannot be read at all, which is reported.</summary>
@@ -25,15 +27,20 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
 
     public HistogramTable? Histogram(string fullPath) => Once(_histograms, fullPath, input => HistogramTable.Parse(input, findings));
 
-    /// <param name="blade">Names the sections; those of the set that it does not name are not read.</param>
+    /// <param name="blade">Names the sections, or gives their thickness; other tables of the set are not read.</param>
     /// <param name="setFolder">Full path of the folder of polar tables.</param>
     public BladeSections Sections(BladeTable blade, string setFolder)
     {
         if (_sections.TryGetValue((blade.Input.File, setFolder), out var known))
             return known;
         var names = folder.Names(setFolder).ToHashSet(StringComparer.Ordinal);
+        var set = names.Contains(SetFile.Name) && !blade.Thicknesses.IsEmpty
+            ? Once(_sets, Path.Combine(setFolder, SetFile.Name), input => SetFile.Parse(input, findings))
+            : null;
+        var byThickness = blade.Blade is { IsByThickness: true };
+        var wanted = byThickness ? set?.Thicknesses.Select(t => (t.Section, t.At)).ToImmutableArray() ?? [] : blade.Sections;
         var tables = ImmutableArray.CreateBuilder<PolarTable>();
-        foreach (var (name, at) in blade.Sections)
+        foreach (var (name, at) in wanted)
         {
             if (!names.Contains(name + ".csv"))
                 findings.Error(at, $"no table for section {VisibleText.Quote(name)} in {folder.RelativePath(setFolder)}/; "
@@ -46,12 +53,18 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
         // A blade that names nothing, because of its errors, keeps no table from telling its own.
         if (blade.Blade is null && blade.Sections.IsEmpty)
             ReadAll(setFolder);
-        var complete = tables.Count == blade.Sections.Length && tables.All(table => table.Section is not null);
+        var complete = tables.Count == wanted.Length && tables.All(table => table.Section is not null);
+        var isSound = ThicknessCheck.IsSound(
+            blade, set, names.Contains(SetFile.Name), tables, folder.RelativePath(setFolder), findings) && complete;
         var sections = new BladeSections(
-            complete ? SectionSet.Of(tables.Select(table => table.Section!)) : null, tables.ToImmutable());
+            !isSound ? null : byThickness ? SectionSet.Of(Family(set!, tables)) : SectionSet.Of(tables.Select(table => table.Section!)),
+            tables.ToImmutable(), byThickness ? set : null);
         _sections.Add((blade.Input.File, setFolder), sections);
         return sections;
     }
+
+    private static SectionFamily Family(SetFile set, IReadOnlyList<PolarTable> tables)
+        => SectionFamily.Of(set.Thicknesses.Zip(tables, (thickness, table) => new FamilyMember(thickness.ThicknessRatio, table.Section!)));
 
     /// <summary>Reads every table of a set for its errors alone: the blade that would name some of them cannot be read.</summary>
     public void ReadAll(string setFolder)

@@ -33,11 +33,11 @@ internal sealed class IndependentAnnulus
         Reynolds = rotor.Air.Density * Math.Sqrt(NormalWind * NormalWind + TangentialWind * TangentialWind) * Chord
             / rotor.Air.DynamicViscosity;
         if (a.Section == b.Section)
-            Add(rotor.Sections[a.Section], 1);
+            Add(rotor.Sections[a.Section!], 1);
         else
         {
-            Add(rotor.Sections[a.Section], 1 - share);
-            Add(rotor.Sections[b.Section], share);
+            Add(rotor.Sections[a.Section!], 1 - share);
+            Add(rotor.Sections[b.Section!], share);
         }
 
         double Edge(int k)
