@@ -16,23 +16,26 @@ internal static class AirReader
     public static AirProperties? Read(CaseValues values)
     {
         string[] sources = [Altitude, Temperature, Pressure, Humidity];
-        foreach (var source in sources.Where(values.Has))
-            values.RefuseTogether(source, Density, "gives the density already");
-        values.RefuseTogether(Pressure, Altitude, "gives the pressure already");
+        var bothPressures = values.Has(Pressure) && values.Has(Altitude);
+        if (values.Has(Density))
+            values.RefuseTogether(
+                sources, Density, "gives the density already", bothPressures ? "; of altitude_m and pressure_Pa one does, as either gives the pressure" : "");
+        else
+            values.RefuseTogether([Pressure], Altitude, "gives the pressure already");
 
-        var altitude = Given(values, Altitude, Bounds.FromTo(-500, 11_000));
-        var temperature = Given(values, Temperature, Bounds.FromTo(-100, 100)) + CelsiusZero
+        var altitude = Given(values, Altitude, Ranges.Altitude);
+        var temperature = Given(values, Temperature, Ranges.Temperature) + CelsiusZero
             ?? (altitude is { } height && !double.IsNaN(height) ? Atmosphere.Temperature(height) : null);
-        var pressure = Given(values, Pressure, Bounds.FromTo(10_000, 120_000))
+        var pressure = Given(values, Pressure, Ranges.Pressure)
             ?? (altitude is { } place && !double.IsNaN(place) ? Atmosphere.Pressure(place) : Atmosphere.SeaLevelPressure);
-        var humidity = Given(values, Humidity, Bounds.Share) ?? 0;
+        var humidity = Given(values, Humidity, Ranges.Humidity) ?? 0;
 
         var density = values.Has(Density) || !sources.Any(values.Has)
-            ? values.Number(Density, CaseDefaults.Density, Bounds.AboveZeroTo(Limits.Density))
+            ? values.Number(Density, CaseDefaults.Density, Ranges.Density)
             : Atmosphere.Density(pressure, temperature ?? Atmosphere.SeaLevelTemperature, humidity);
         var viscosity = values.Number(
             Viscosity, temperature is { } known ? Atmosphere.Viscosity(known) : CaseDefaults.DynamicViscosity,
-            Bounds.AboveZeroTo(Limits.DynamicViscosity));
+            Ranges.Viscosity);
         UsualRanges.Check(values, Density, density);
         UsualRanges.Check(values, Viscosity, viscosity);
         var speedOfSound = Atmosphere.SpeedOfSound(temperature ?? Atmosphere.SeaLevelTemperature);
