@@ -8,8 +8,6 @@ namespace BladeLoads.Studies.Cases;
 /// </summary>
 internal static class Ranges
 {
-    private const double CelsiusZero = 273.15; // K
-
     public static Bounds Efficiency { get; } = Bounds.AboveZeroTo(1) with
     {
         TooLow = "no electrical power would be left",
@@ -102,7 +100,7 @@ internal static class Ranges
         TooHigh = "no air over ground is as hot",
         Remedy = "give it in degrees C, such as 15",
         Slip = value => value is > 170 and < 340
-            ? $"is it in kelvin? write {CanonicalText.Of(Math.Round(value - CelsiusZero, 6))}" : null,
+            ? $"is it in kelvin? write {CanonicalText.Of(Math.Round(value - AirReader.CelsiusZero, 6))}" : null,
     };
 
     public static Bounds Pressure { get; } = Bounds.FromTo(10_000, 120_000) with
