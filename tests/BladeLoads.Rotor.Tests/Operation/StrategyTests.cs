@@ -92,6 +92,33 @@ public sealed class StrategyTests
         }
     }
 
+    /// <summary>
+    /// From the pitch below rated down in steps of 0.02 degrees, the first plain solution on the other side of rated power lies just beyond the
+    /// pitch taken.
+    /// </summary>
+    [Theory]
+    [InlineData(2, SpeedLimitedPitch.Hold)]
+    [InlineData(6, SpeedLimitedPitch.Hold)]
+    [InlineData(2, SpeedLimitedPitch.Best)]
+    public void Pitch_to_stall_takes_the_pitch_nearest_the_one_below_rated(double finePitchDeg, SpeedLimitedPitch speedLimitedPitch)
+    {
+        const double Degree = Math.PI / 180, StepDeg = 0.02, Rated = 0.9e6;
+        var control = InventedRotor.VariableSpeed(
+            Rated, finePitchDeg, maxRotorSpeed: 1.4, aboveRated: AboveRated.PitchToStall, speedLimitedPitch: speedLimitedPitch);
+        var unlimited = Solve(control with { RatedPower = null }, dropWidthDeg: 12).Points;
+        var model = new RotorModel(InventedRotor.Case(control, Winds, dropWidthDeg: 12));
+        var held = Solve(control, dropWidthDeg: 12).Points.Where(p => p.Region == Region.RatedPower).ToArray();
+        Assert.True(held.Length > 5, $"{held.Length} rows");
+        foreach (var point in held)
+        {
+            var start = unlimited.Single(p => p.Operation.WindSpeed == point.Operation.WindSpeed).Operation;
+            bool IsAbove(int steps) => model.Solve(start with { Pitch = start.Pitch - (StepDeg * Degree * steps) })!.Power >= Rated;
+            var crossed = Enumerable.Range(1, 2000).First(steps => IsAbove(steps) != IsAbove(0));
+            var beyondDeg = (start.Pitch / Degree) - (StepDeg * crossed);
+            Assert.InRange(point.Operation.Pitch / Degree, beyondDeg - 1e-9, beyondDeg + StepDeg + 1e-9);
+        }
+    }
+
     [Fact]
     public void Pitch_followed_where_the_rotor_speed_is_limited_never_makes_less_power_and_removes_the_jump()
     {
