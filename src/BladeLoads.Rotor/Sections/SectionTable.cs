@@ -21,6 +21,7 @@ internal sealed partial class SectionTable
     private readonly double[] _cells;
     private readonly int[] _firstCellOfBucket;
     private readonly double _bucketsPerRadian;
+    private readonly Lazy<SectionTable> _augmented;
 
     private SectionTable(ImmutableArray<Polar> polars, double[] knots)
     {
@@ -46,10 +47,17 @@ internal sealed partial class SectionTable
             _firstCellOfBucket[b] = cell;
         }
         (_points, _blocks) = SummariseCells();
+        _augmented = new Lazy<SectionTable>(() => Prepare([.. polars.Select(RotationalAugmentation.FullyAugmented)]));
     }
 
     /// <summary>The angles of all rows, and +-pi; rad, rising.</summary>
     public ReadOnlySpan<double> Knots => _knots;
+
+    /// <summary>
+    /// The same polars, in the same order, with all the augmentation that there can be; made when first asked for. Beyond the ends of the
+    /// plain polars it holds more rows.
+    /// </summary>
+    public SectionTable Augmented => _augmented.Value;
 
     public static SectionTable Prepare(ImmutableArray<Polar> polars)
     {
