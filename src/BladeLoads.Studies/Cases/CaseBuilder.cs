@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using BladeLoads.Rotor.Operation;
+using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Fingerprints;
 using BladeLoads.Studies.Tables;
@@ -47,7 +48,7 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             return null;
 
         var rotor = new RotorCase(
-            blade.Blade, sections.Sections, bladeCount, double.DegreesToRadians(coneDeg), air, windSpeeds, control.Strategy,
+            blade.Blade, sections.Sections, Augmentation.None, bladeCount, double.DegreesToRadians(coneDeg), air, windSpeeds, control.Strategy,
             control.CutIn, control.CutOut, control.Drivetrain, model);
         var determining = values.Determining;
         inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
