@@ -57,7 +57,7 @@ internal static class InventedRotor
         var sections = SectionSet.Of(
             [SectionByFormula("inboard", stallDeg, dropWidthDeg), SectionByFormula("outboard", stallDeg, dropWidthDeg)]);
         return new RotorCase(
-            Blade.FromStations(stations), sections, bladeCount, cone, SeaLevel, [.. windSpeeds], control, cutIn, cutOut,
+            Blade.FromStations(stations), sections, Augmentation.None, bladeCount, cone, SeaLevel, [.. windSpeeds], control, cutIn, cutOut,
             Drivetrain.Constant(efficiency), model ?? Model);
     }
 

@@ -33,6 +33,9 @@ internal readonly struct Annulus
 
     public ReynoldsPlace OuterPlace { get; init; }
 
+    /// <summary>How far the coefficients go from those of the tables to those of <see cref="SectionTable.Augmented"/>.</summary>
+    public AugmentationFactors Augmentation { get; init; }
+
     public HeavyLoading HeavyLoading { get; init; }
 
     /// <summary>1 where drag counts in the axial balance, 0 where lift alone does.</summary>
@@ -51,10 +54,11 @@ internal readonly struct Annulus
     {
         var inner = Inner.At(angleOfAttack, InnerPlace);
         if (OuterWeight == 0)
-            return inner;
+            return Augmentation.IsNone ? inner : Augmented(inner, angleOfAttack);
         var outer = Outer.At(angleOfAttack, OuterPlace);
-        return new Coefficients(
+        var plain = new Coefficients(
             inner.Lift + (OuterWeight * (outer.Lift - inner.Lift)), inner.Drag + (OuterWeight * (outer.Drag - inner.Drag)));
+        return Augmentation.IsNone ? plain : Augmented(plain, angleOfAttack);
     }
 
     /// <summary>Bounds of the coefficients over inflow angles from one to another, rad, not falling.</summary>
@@ -96,11 +100,32 @@ internal readonly struct Annulus
 
     public bool IsOutsideReynolds => InnerPlace.Outside || (OuterWeight > 0 && OuterPlace.Outside);
 
+    // (1 - f) of the plain table and f of the augmented one, f from 0 to 1 and free of the angle: so the bounds of both, blended, are bounds.
+    private Coefficients Augmented(in Coefficients plain, double angleOfAttack)
+    {
+        var full = Inner.Augmented.At(angleOfAttack, InnerPlace);
+        if (OuterWeight > 0)
+        {
+            var outer = Outer.Augmented.At(angleOfAttack, OuterPlace);
+            full = new Coefficients(
+                full.Lift + (OuterWeight * (outer.Lift - full.Lift)), full.Drag + (OuterWeight * (outer.Drag - full.Drag)));
+        }
+        return new Coefficients(
+            plain.Lift + (Augmentation.Lift * (full.Lift - plain.Lift)), plain.Drag + (Augmentation.Drag * (full.Drag - plain.Drag)));
+    }
+
     private CoefficientRange BlendedRange(double from, double to)
     {
-        var inner = Inner.Range(from, to, InnerPlace);
-        return OuterWeight == 0
-            ? inner
-            : Sections.CoefficientRange.Blend(inner, Outer.Range(from, to, OuterPlace), OuterWeight);
+        var plain = SectionRange(Inner, Outer, from, to);
+        return Augmentation.IsNone
+            ? plain
+            : Sections.CoefficientRange.Blend(
+                plain, SectionRange(Inner.Augmented, Outer.Augmented, from, to), Augmentation.Lift, Augmentation.Drag);
+    }
+
+    private CoefficientRange SectionRange(SectionTable inner, SectionTable outer, double from, double to)
+    {
+        var range = inner.Range(from, to, InnerPlace);
+        return OuterWeight == 0 ? range : Sections.CoefficientRange.Blend(range, outer.Range(from, to, OuterPlace), OuterWeight);
     }
 }

@@ -23,11 +23,12 @@ public sealed class RotorModel
     private readonly double _tipRadius;
     private readonly double _hubRadius;
     private readonly BalanceModel _model;
+    private readonly Augmentation _augmentation;
 
     public RotorModel(RotorCase rotorCase)
     {
         var blade = rotorCase.Blade;
-        (_air, _bladeCount, _model) = (rotorCase.Air, rotorCase.BladeCount, rotorCase.Model);
+        (_air, _bladeCount, _model, _augmentation) = (rotorCase.Air, rotorCase.BladeCount, rotorCase.Model, rotorCase.Augmentation);
         _cosCone = Math.Cos(rotorCase.Cone);
         (_hubRadius, _tipRadius) = (blade.HubRadius, blade.TipRadius);
         _elements = [.. BladeElements.Of(blade, _model.Elements, _model.Spacing).Select(e => Prepare(e, rotorCase.Sections))];
@@ -110,10 +111,16 @@ public sealed class RotorModel
             OuterWeight = e.Geometry.OuterWeight,
             InnerPlace = e.Inner.Place(logReynolds),
             OuterPlace = e.Outer.Place(logReynolds),
+            Augmentation = AugmentationOf(e, point),
             HeavyLoading = _model.HeavyLoading,
             DragInBalance = _model.BalanceWith == BalanceWith.LiftAndDrag ? 1 : 0,
         };
     }
+
+    private AugmentationFactors AugmentationOf(in Element e, in OperatingPoint point)
+        => _augmentation == Augmentation.None ? AugmentationFactors.None : RotationalAugmentation.Factors(
+            _augmentation, e.Geometry.Chord / e.Geometry.Radius, e.Geometry.Radius / _tipRadius,
+            RotationalAugmentation.TipSpeedShare(point.WindSpeed, point.RotorSpeed * SweptRadius));
 
     private ElementState StateOf(in Element e, in Annulus annulus, in Balance balance, in OperatingPoint point)
     {

@@ -119,6 +119,15 @@ internal readonly record struct CoefficientRange(Vector256<double> Least, Vector
     public static CoefficientRange Blend(in CoefficientRange a, in CoefficientRange b, double weightOfB) => new(
         (a.Least * (1 - weightOfB)) + (b.Least * weightOfB), (a.Largest * (1 - weightOfB)) + (b.Largest * weightOfB));
 
+    /// <param name="liftWeightOfB">Of lift and its slope.</param>
+    /// <param name="dragWeightOfB">Of drag and its slope.</param>
+    public static CoefficientRange Blend(in CoefficientRange a, in CoefficientRange b, double liftWeightOfB, double dragWeightOfB)
+    {
+        var ofB = Vector256.Create(liftWeightOfB, dragWeightOfB, liftWeightOfB, dragWeightOfB);
+        var ofA = Vector256<double>.One - ofB;
+        return new((a.Least * ofA) + (b.Least * ofB), (a.Largest * ofA) + (b.Largest * ofB));
+    }
+
     /// <summary>Bounds over both ranges.</summary>
     public static CoefficientRange Hull(in CoefficientRange a, in CoefficientRange b)
         => new(Vector256.Min(a.Least, b.Least), Vector256.Max(a.Largest, b.Largest));

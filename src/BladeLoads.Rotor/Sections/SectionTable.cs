@@ -21,6 +21,7 @@ internal sealed partial class SectionTable
     private readonly double[] _cells;
     private readonly int[] _firstCellOfBucket;
     private readonly double _bucketsPerRadian;
+    private readonly Lazy<SectionTable> _augmented;
 
     private SectionTable(ImmutableArray<Polar> polars, double[] knots)
     {
@@ -48,6 +49,7 @@ internal sealed partial class SectionTable
         (_points, _blocks) = SummariseCells();
         var stalls = polars.Select(Stall).ToArray();
         (LeastStallAngle, LeastLiftingAngle) = (stalls.Min(s => s.Largest), stalls.Min(s => s.Lifting));
+        _augmented = new Lazy<SectionTable>(() => Prepare([.. polars.Select(RotationalAugmentation.FullyAugmented)]));
     }
 
     /// <summary>The angles of all rows, and +-pi; rad, rising.</summary>
@@ -58,6 +60,12 @@ internal sealed partial class SectionTable
 
     /// <summary>rad; up to here, from far below, no polar lifts; infinite where none lifts.</summary>
     public double LeastLiftingAngle { get; }
+
+    /// <summary>
+    /// The same polars, in the same order, with all the augmentation that there can be; made when first asked for. Beyond the ends of the
+    /// plain polars it holds more rows.
+    /// </summary>
+    public SectionTable Augmented => _augmented.Value;
 
     public static SectionTable Prepare(ImmutableArray<Polar> polars)
     {

@@ -7,7 +7,8 @@ namespace BladeLoads.Studies.Tables;
 /// <summary>The sections of a blade from one set of polars.</summary>
 /// <param name="Sections">Null when a table is missing or has an error.</param>
 /// <param name="Tables">In the order in which the blade names them.</param>
-internal sealed record BladeSections(SectionSet? Sections, ImmutableArray<PolarTable> Tables);
+/// <param name="NotExtended">Where polars begin that cannot be extended, though they were to be; one a table at most.</param>
+internal sealed record BladeSections(SectionSet? Sections, ImmutableArray<PolarTable> Tables, ImmutableArray<Place> NotExtended);
 
 /// <summary>The tables of a study, each read, hashed and prepared once, however many cases share it.</summary>
 internal sealed class StudyTables(StudyFolder folder, Findings findings)
@@ -16,7 +17,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
     private readonly Dictionary<string, PolarTable?> _polars = new(StringComparer.Ordinal);
     private readonly Dictionary<string, ScheduleTable?> _schedules = new(StringComparer.Ordinal);
     private readonly Dictionary<string, HistogramTable?> _histograms = new(StringComparer.Ordinal);
-    private readonly Dictionary<(string Blade, string Set), BladeSections> _sections = [];
+    private readonly Dictionary<(string Blade, string Set, SectionExtension? Extension), BladeSections> _sections = [];
 
     /// <summary>Null when the file cannot be read at all, which is reported.</summary>
     public BladeTable? Blade(string fullPath) => Once(_blades, fullPath, input => BladeTable.Parse(input, findings));
@@ -27,9 +28,10 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
 
     /// <param name="blade">Names the sections; those of the set that it does not name are not read.</param>
     /// <param name="setFolder">Full path of the folder of polar tables.</param>
-    public BladeSections Sections(BladeTable blade, string setFolder)
+    /// <param name="extension">How polars are carried on to +-180 degrees; null where they are not.</param>
+    public BladeSections Sections(BladeTable blade, string setFolder, SectionExtension? extension)
     {
-        if (_sections.TryGetValue((blade.Input.File, setFolder), out var known))
+        if (_sections.TryGetValue((blade.Input.File, setFolder, extension), out var known))
             return known;
         var names = folder.Names(setFolder).ToHashSet(StringComparer.Ordinal);
         var tables = ImmutableArray.CreateBuilder<PolarTable>();
@@ -41,16 +43,32 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
             else if (Polar(name, Path.Combine(setFolder, name + ".csv")) is { } table)
                 tables.Add(table);
         }
-        foreach (var doubt in tables.SelectMany(table => table.Doubts))
+        foreach (var doubt in tables.SelectMany(table => extension is null ? table.Doubts.Concat(table.Reach) : table.Doubts))
             findings.Doubt(doubt);
         // A blade that names nothing, because of its errors, keeps no table from telling its own.
         if (blade.Blade is null && blade.Sections.IsEmpty)
             ReadAll(setFolder);
         var complete = tables.Count == blade.Sections.Length && tables.All(table => table.Section is not null);
         var sections = new BladeSections(
-            complete ? SectionSet.Of(tables.Select(table => table.Section!)) : null, tables.ToImmutable());
-        _sections.Add((blade.Input.File, setFolder), sections);
+            complete ? SectionSet.Of(tables.Select(table => table.Section!)) : null, tables.ToImmutable(), []);
+        if (extension is not null)
+            sections = Extended(sections, extension);
+        _sections.Add((blade.Input.File, setFolder, extension), sections);
         return sections;
+    }
+
+    private BladeSections Extended(BladeSections sections, SectionExtension extension)
+    {
+        var extended = sections.Tables.Where(table => table.Section is not null).Select(extension.Of).ToList();
+        foreach (var section in extended)
+            if (section.Doubt is { } doubt)
+                findings.Doubt(doubt);
+        var obstacles = extended.Where(section => section.Obstacle is not null).Select(section => section.Obstacle!.Value).ToImmutableArray();
+        return sections with
+        {
+            Sections = sections.Sections is null || !obstacles.IsEmpty ? null : SectionSet.Of(extended.Select(section => section.Section!)),
+            NotExtended = obstacles,
+        };
     }
 
     /// <summary>Reads every table of a set for its errors alone: the blade that would name some of them cannot be read.</summary>

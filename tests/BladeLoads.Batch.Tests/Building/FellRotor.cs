@@ -19,7 +19,7 @@ internal static class FellRotor
         var polar = Polar.FromRows(double.NaN, [-3, 0, 3], [0, 1, 0], [0.1, 0.01, 0.1]);
         return new RotorCase(
             Blade.FromStations([new(1, 1, 0.2, "fell-30"), new(10, 0.5, 0, "fell-30")]),
-            SectionSet.Of([Section.FromPolars("fell-30", [polar])]), 3, 0, new AirProperties(1.225, 1.789e-5, 340.29),
+            SectionSet.Of([Section.FromPolars("fell-30", [polar])]), Augmentation.None, 3, 0, new AirProperties(1.225, 1.789e-5, 340.29),
             [.. Enumerable.Range(1, windSpeeds).Select(i => (double)i)], new Control.FixedSpeed(2, 0, null), 0, double.PositiveInfinity, Drivetrain.Constant(1),
             new BalanceModel(elements, ElementSpacing.Uniform, true, true, HeavyLoading.Glauert1935, BalanceWith.LiftAndDrag));
     }

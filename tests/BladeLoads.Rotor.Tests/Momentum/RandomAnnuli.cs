@@ -3,7 +3,7 @@ using BladeLoads.Rotor.Sections;
 
 namespace BladeLoads.Rotor.Tests.Momentum;
 
-/// <summary>Annuli over all that a rotor may meet: parked to racing, feathered to stalled, with and without losses.</summary>
+/// <summary>Annuli over all that a rotor may meet: parked to racing, feathered to stalled, with and without losses and augmentation.</summary>
 internal static class RandomAnnuli
 {
     public static Annulus One(Random random, SectionTable inner, SectionTable outer)
@@ -23,6 +23,7 @@ internal static class RandomAnnuli
             OuterWeight = weight,
             InnerPlace = inner.Place(Math.Log(1e6)),
             OuterPlace = outer.Place(Math.Log(1e6)),
+            Augmentation = random.Next(2) == 0 ? AugmentationFactors.None : new AugmentationFactors(random.NextDouble(), random.Next(2) * random.NextDouble()),
             HeavyLoading = random.Next(2) == 0 ? HeavyLoading.Glauert1935 : HeavyLoading.Buhl2005,
             DragInBalance = random.Next(2),
         };

@@ -13,6 +13,9 @@ internal sealed class IndependentAnnulus
     private readonly RotorCase _rotor;
     private readonly OperatingPoint _operation;
     private readonly List<(double Share, IndependentPchip Lift, IndependentPchip Drag)> _tables = [];
+    private readonly List<(double Share, IndependentPchip Lift, IndependentPchip Drag)> _augmented = [];
+    private readonly double _liftFactor;
+    private readonly double _dragFactor;
 
     public IndependentAnnulus(RotorCase rotor, OperatingPoint operation, int element)
     {
@@ -32,6 +35,9 @@ internal sealed class IndependentAnnulus
         Solidity = rotor.BladeCount * Chord / (2 * Math.PI * Radius * Math.Cos(rotor.Cone));
         Reynolds = rotor.Air.Density * Math.Sqrt(NormalWind * NormalWind + TangentialWind * TangentialWind) * Chord
             / rotor.Air.DynamicViscosity;
+        var tip = rotor.Blade.TipRadius;
+        (_liftFactor, _dragFactor) = IndependentAugmentation.Factors(
+            rotor.Augmentation, Chord / Radius, Radius / tip, operation.WindSpeed, operation.RotorSpeed * tip * Math.Cos(rotor.Cone));
         if (a.Section == b.Section)
             Add(rotor.Sections[a.Section], 1);
         else
@@ -67,14 +73,23 @@ internal sealed class IndependentAnnulus
     public (double Lift, double Drag) Coefficients(double angleOfAttack)
     {
         var wrapped = Math.IEEERemainder(angleOfAttack, 2 * Math.PI);
-        var (lift, drag) = (0.0, 0.0);
-        foreach (var (share, liftTable, dragTable) in _tables)
+        var (lift, drag) = Sum(_tables);
+        if (_liftFactor == 0 && _dragFactor == 0)
+            return (lift, drag);
+        var (fullLift, fullDrag) = Sum(_augmented);
+        return (lift + _liftFactor * (fullLift - lift), drag + _dragFactor * (fullDrag - drag));
+
+        (double, double) Sum(List<(double Share, IndependentPchip Lift, IndependentPchip Drag)> tables)
         {
-            var (interval, offset) = liftTable.Locate(wrapped);
-            lift += share * liftTable.At(interval, offset);
-            drag += share * dragTable.At(interval, offset);
+            var (lift, drag) = (0.0, 0.0);
+            foreach (var (share, liftTable, dragTable) in tables)
+            {
+                var (interval, offset) = liftTable.Locate(wrapped);
+                lift += share * liftTable.At(interval, offset);
+                drag += share * dragTable.At(interval, offset);
+            }
+            return (lift, drag);
         }
-        return (lift, drag);
     }
 
     public double LossFactor(double inflowAngle)
@@ -157,5 +172,11 @@ internal sealed class IndependentAnnulus
     }
 
     private void AddPolar(Polar polar, double share)
-        => _tables.Add((share, new IndependentPchip(polar.Angles, polar.Lift), new IndependentPchip(polar.Angles, polar.Drag)));
+    {
+        _tables.Add((share, new IndependentPchip(polar.Angles, polar.Lift), new IndependentPchip(polar.Angles, polar.Drag)));
+        if (_liftFactor == 0 && _dragFactor == 0)
+            return;
+        var (angles, lift, drag) = IndependentAugmentation.Full(polar);
+        _augmented.Add((share, new IndependentPchip(angles, lift), new IndependentPchip(angles, drag)));
+    }
 }

@@ -30,7 +30,7 @@ internal sealed record Trial(RotorCase Rotor, OperatingPoint Operation, IReadOnl
         var stations = string.Join(" ", Rotor.Blade.Stations.Select(s => string.Create(CultureInfo.InvariantCulture,
             $"({s.Radius:R}, {s.Chord:R}, {s.Twist:R}, {s.Section})")));
         var shapes = string.Join("\n  ", Shapes.Select(s => $"{s} Reynolds {string.Join(" ", s.Reynolds)}"));
-        return $"{Rotor.BladeCount} blades, cone {Rotor.Cone:R}, {Rotor.Air}, {Operation}, {Rotor.Model}\n  stations {stations}\n  {shapes}";
+        return $"{Rotor.BladeCount} blades, cone {Rotor.Cone:R}, {Rotor.Air}, {Operation}, {Rotor.Model}, augmented {Rotor.Augmentation}\n  stations {stations}\n  {shapes}";
     }
 }
 
@@ -70,8 +70,9 @@ internal static class PlausibleRotors
         from wind in Between(2, 28)
         from density in Between(0.9, 1.35)
         from model in Models
+        from augmentation in Gen.Enum<Augmentation>()
         from pick in Gen.Int[0, 1_000_000]
-        select Build(planform, blades, shapes, cone * Degree, pitch * Degree, tipSpeedRatio, wind, density, model, pick);
+        select Build(planform, blades, shapes, cone * Degree, pitch * Degree, tipSpeedRatio, wind, density, model, augmentation, pick);
 
     // Pitched so that a place along the blade works within some degrees of a stall that drops lift within a degree: several balances.
     private static readonly Gen<Trial> _nearSharpStall =
@@ -120,7 +121,7 @@ internal static class PlausibleRotors
 
     private static Trial Build(
         Planform planform, int blades, PlausibleSections.Shape[] shapes, double cone, double pitch, double tipSpeedRatio, double wind,
-        double density, BalanceModel model, int pick)
+        double density, BalanceModel model, Augmentation augmentation, int pick)
     {
         var random = new Random(pick);
         var stations = Enumerable.Range(0, planform.Stations).Select(i =>
@@ -136,7 +137,7 @@ internal static class PlausibleRotors
         });
         var sections = SectionSet.Of(shapes.Select((shape, i) => PlausibleSections.Build("s" + i, shape)));
         var operation = new OperatingPoint(wind, tipSpeedRatio * wind / (planform.TipRadius * Math.Cos(cone)), pitch);
-        var rotor = new RotorCase(Blade.FromStations(stations), sections, blades, cone, new AirProperties(density, 1.8e-5, 340.29), [wind],
+        var rotor = new RotorCase(Blade.FromStations(stations), sections, augmentation, blades, cone, new AirProperties(density, 1.8e-5, 340.29), [wind],
             new Control.FixedSpeed(operation.RotorSpeed, pitch, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1), model);
         return new Trial(rotor, operation, shapes, pick);
     }

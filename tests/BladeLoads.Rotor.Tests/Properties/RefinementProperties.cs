@@ -81,7 +81,7 @@ public sealed class RefinementProperties(ITestOutputHelper output)
         var sections = SectionSet.Of([PlausibleSections.Build("s", design.Shape)]);
         var model = new BalanceModel(elements, design.Spacing, TipLoss: true, HubLoss: true, design.HeavyLoading, BalanceWith.LiftAndDrag);
         const double wind = 8;
-        var rotor = new RotorCase(Blade.FromStations(stations), sections, design.Blades, 0, new AirProperties(1.225, 1.8e-5, 340.29), [wind],
+        var rotor = new RotorCase(Blade.FromStations(stations), sections, Augmentation.None, design.Blades, 0, new AirProperties(1.225, 1.8e-5, 340.29), [wind],
             new Control.FixedSpeed(design.Ratio * wind, design.Pitch * Degree, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1), model);
         return Assert.Single(CaseSolver.Solve(rotor, CancellationToken.None).Points);
     }

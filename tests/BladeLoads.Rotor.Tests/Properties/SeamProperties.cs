@@ -63,7 +63,7 @@ public sealed class SeamProperties
     {
         var blade = Blade.FromStations([new BladeStation(1, chord, 0, "s"), new BladeStation(2, chord, 0, "s")]);
         var operation = new OperatingPoint(8, speedRatio * 8 / 1.5, angle);
-        var rotor = new RotorCase(blade, SectionSet.Of([Section.FromPolars("s", [table])]), blades, 0, new AirProperties(1.2, 1.8e-5, 340.29), [8],
+        var rotor = new RotorCase(blade, SectionSet.Of([Section.FromPolars("s", [table])]), Augmentation.None, blades, 0, new AirProperties(1.2, 1.8e-5, 340.29), [8],
             new Control.FixedSpeed(operation.RotorSpeed, angle, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1),
             new BalanceModel(1, ElementSpacing.Uniform, TipLoss: false, HubLoss: false, relation, BalanceWith.LiftAndDrag));
         return new Trial(rotor, operation, [], 0);

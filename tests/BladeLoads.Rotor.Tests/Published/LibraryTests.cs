@@ -79,7 +79,7 @@ public sealed class LibraryTests(ITestOutputHelper output)
         ImmutableArray<OperatingPoint> points = [.. Enumerable.Range(0, count).Select(i =>
             new OperatingPoint(i + 1, 0, Math.PI / 2 - (first + (last - first) * (i + 0.5) / count)))];
         var blade = Blade.FromStations([new BladeStation(1, 0.1, 0, "s"), new BladeStation(2, 0.1, 0, "s")]);
-        var rotor = new RotorCase(blade, SectionSet.Of([Section.FromPolars("s", [polar])]), 1, 0, new AirProperties(1.2, 1.8e-5, 340.29),
+        var rotor = new RotorCase(blade, SectionSet.Of([Section.FromPolars("s", [polar])]), Augmentation.None, 1, 0, new AirProperties(1.2, 1.8e-5, 340.29),
             [.. points.Select(p => p.WindSpeed)], new Control.Schedule(points, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1),
             OneAnnulus.WithoutLoss);
         var (lift, drag) = (CubicSpline.InterpolatePchip(polar.Angles, polar.Lift), CubicSpline.InterpolatePchip(polar.Angles, polar.Drag));

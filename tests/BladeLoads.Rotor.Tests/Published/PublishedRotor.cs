@@ -20,7 +20,7 @@ internal static class PublishedRotor
     public static CurvePoint SolveAt(
         OperatingPoint point, Blade blade, SectionSet sections, int bladeCount, double cone, AirProperties air, BalanceModel model)
     {
-        var rotorCase = new RotorCase(blade, sections, bladeCount, cone, air, [point.WindSpeed],
+        var rotorCase = new RotorCase(blade, sections, Augmentation.None, bladeCount, cone, air, [point.WindSpeed],
             new Control.FixedSpeed(point.RotorSpeed, point.Pitch, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1), model);
         return Assert.Single(CaseSolver.Solve(rotorCase, CancellationToken.None).Points);
     }

@@ -89,7 +89,7 @@ public sealed class ReferenceCurveTests(ITestOutputHelper output)
         Assert.NotEmpty(rows);
         var curve = CaseSolver.Solve(
             new RotorCase(
-                rotor.Blade, rotor.Sections, 3, coneDeg * Degree, Air, [.. rows.Select(r => r["wind_speed_m_s"])], control, 0,
+                rotor.Blade, rotor.Sections, Augmentation.None, 3, coneDeg * Degree, Air, [.. rows.Select(r => r["wind_speed_m_s"])], control, 0,
                 double.PositiveInfinity, Drivetrain.Constant(efficiency), DefaultModel),
             CancellationToken.None);
         output.WriteLine($"rated wind speed {curve.RatedWindSpeed:F2} m/s");
