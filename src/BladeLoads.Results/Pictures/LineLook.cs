@@ -26,7 +26,8 @@ internal sealed record LineLook(uint Colour, ImmutableArray<float> Dashes, int? 
     public static LineLook Tabulated(int index, int count)
         => new(Shade(count == 1 ? 0.25 : (double)index / (count - 1)), Patterns[index % Patterns.Length], index % Marks, 1.1f);
 
-    public static LineLook Extended(int? index) => new(Vermilion, [4, 2.5f], index % Marks, 1.2f);
+    /// <summary>Without marks, which are for rows of tables.</summary>
+    public static LineLook Extended { get; } = new(Vermilion, [4, 2.5f], null, 1.2f);
 
     /// <summary>The n-th different label among the corrected lines.</summary>
     public static LineLook Corrected(int label) => new(Purples[label % Purples.Length], CorrectedPatterns[label % CorrectedPatterns.Length], null, 1.3f);

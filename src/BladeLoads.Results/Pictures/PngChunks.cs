@@ -26,7 +26,7 @@ internal static class PngChunks
         return [.. png[..before], .. Chunk("pHYs", density), .. Chunk("tEXt", Encoding.ASCII.GetBytes(Mark)), .. png[before..]];
     }
 
-    private static byte[] Chunk(string name, byte[] content)
+    internal static byte[] Chunk(string name, byte[] content)
     {
         var chunk = new byte[12 + content.Length];
         BinaryPrimitives.WriteInt32BigEndian(chunk, content.Length);

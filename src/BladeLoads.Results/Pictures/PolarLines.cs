@@ -50,7 +50,7 @@ internal sealed record PolarLines(ImmutableArray<PolarLines.Drawn> All)
             return line.Kind switch
             {
                 LineKind.Tabulated => LineLook.Tabulated(place, reynolds.Count),
-                LineKind.Extended => LineLook.Extended(place < 0 ? null : place),
+                LineKind.Extended => LineLook.Extended,
                 _ => LineLook.Corrected(corrected.IndexOf(line.Label)),
             };
         }

@@ -67,7 +67,9 @@ internal sealed record PolarPanels(
     private static Panel LiftAgainstDrag(PolarLines lines, (double From, double To) working)
     {
         var curves = lines.AgainstEachOther(working, OfDrag, OfLift);
-        var least = curves.Where(c => c.Samples().Any()).Select(c => c.Samples().Min(p => p.X)).DefaultIfEmpty(0).Max();
+        // Of the tables' own lines: an extension begins where drag is large.
+        var least = lines.All.Where(l => l.Kind is null or LineKind.Tabulated)
+            .Select(l => l.OverAngle(working, OfDrag).SelectMany(c => c.Samples()).Select(p => p.Y).DefaultIfEmpty(0).Min()).DefaultIfEmpty(0).Max();
         var largest = curves.SelectMany(c => c.Samples()).Select(p => p.X).DefaultIfEmpty(1).Max();
         var across = PanelAxis.FromZero(Dragging, [least > 0 ? Math.Min(LiftOverDragReach * least, largest) : largest]);
         var shown = curves.SelectMany(c => c.Samples()).Where(p => p.X <= across.To).Select(p => p.Y);
