@@ -15,7 +15,7 @@ public enum ExtensionKind
     /// <summary>From its end.</summary>
     FromEnd,
 
-    /// <summary>Below zero: the table ends before it stalls there, and passes straight to the mirrored stall point of the other side.</summary>
+    /// <summary>Below zero: the table ends before it stalls there, and passes to the mirrored stall point of the other side.</summary>
     Mirrored,
 
     /// <summary>A round section, that does not lift: its end value goes on.</summary>
