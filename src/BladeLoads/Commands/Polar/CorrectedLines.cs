@@ -33,6 +33,8 @@ internal sealed class CorrectedLines
     {
         if (_best is null)
             return "No correction for rotation is shown: no operating point of the case has a balance.";
+        if (_case.Rotor.Blade.IsByThickness)
+            return "No correction for rotation is shown: the blade is given by thickness, and its elements stand between the tables.";
         if (Of(section).IsEmpty)
             return "Rotation changes nothing here: the section stands where it is not augmented.";
         return string.Create(CultureInfo.InvariantCulture,
