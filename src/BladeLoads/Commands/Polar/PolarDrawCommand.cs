@@ -39,9 +39,8 @@ internal static class PolarDrawCommand
         var results = CommandLine.ResultsOption();
         var format = new Option<ImmutableArray<PictureFormat>>("--format")
         {
-            Description = "svg, png or both",
+            Description = "svg, png or both; left out, svg",
             HelpName = "svg|png|both",
-            DefaultValueFactory = _ => [PictureFormat.Svg],
             CustomParser = ParseFormat,
         };
         var only = new Option<string[]>("--only")
@@ -59,7 +58,7 @@ internal static class PolarDrawCommand
         command.SetAction(parsed => Run(
             new DrawAsked(
                 parsed.GetRequiredValue(source), parsed.GetValue(before), parsed.GetValue(folder), parsed.GetRequiredValue(results),
-                parsed.GetRequiredValue(format), new NameChoice([.. parsed.GetValue(only) ?? []]), parsed.GetValue(replace)),
+                parsed.GetValue(format) is { IsDefaultOrEmpty: false } formats ? formats : [PictureFormat.Svg], new NameChoice([.. parsed.GetValue(only) ?? []]), parsed.GetValue(replace)),
             surroundings));
         return command;
     }
