@@ -81,12 +81,16 @@ internal sealed class ExtensionCurve
     {
         var isMirrored = sign < 0 && _below.Kind == ExtensionKind.Mirrored;
         double[] corners = isMirrored ? [_knee, _stallAngle, RightAngle, Math.PI - _stallAngle, Math.PI] : [RightAngle, Math.PI - _stallAngle, Math.PI];
+        // Just beyond a join the curve bends most; a row there keeps the table's cubic from cutting the corner.
+        var first = join + Nearest;
         var angles = new SortedSet<double>();
+        if (!isMirrored && corners.All(corner => corner > first + Nearest))
+            angles.Add(first);
         foreach (var corner in corners.Where(corner => corner == Math.PI || corner > join + Nearest))
             if (corner is RightAngle or Math.PI || corners.All(other => other == corner || Math.Abs(other - corner) > Nearest))
                 angles.Add(corner);
         for (var step = 1; step * Step < 180; step++)
-            if (double.DegreesToRadians(step * Step) is var angle && angle > join + Nearest
+            if (double.DegreesToRadians(step * Step) is var angle && angle > first + Nearest
                 && corners.All(corner => Math.Abs(angle - corner) > Nearest))
                 angles.Add(angle);
         return angles;

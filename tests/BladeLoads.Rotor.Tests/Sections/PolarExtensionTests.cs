@@ -95,7 +95,7 @@ public sealed class PolarExtensionTests
         // By hand: the relation mirrored with 0.7 of the lift through (-9 deg, -0.7, 0.03).
         var mirrored = DeepStall.Through(Rad(9), 0.7 / 0.7, 0.03, LargestDrag);
         var polar = PolarExtension.Extend(Table(1e6, Cambered), AspectRatio, ExtensionJoin.Stall).Polar;
-        foreach (var angle in new[] { 10.0, 25, 50, 87.5 })
+        foreach (var angle in new[] { 9.5, 12.5, 25, 50, 87.5 })
         {
             var (lift, drag) = mirrored.At(Rad(angle));
             Assert.Equal(-0.7 * lift, At(polar, -angle).Lift, 1e-12);
@@ -229,8 +229,8 @@ public sealed class PolarExtensionTests
         // A panel method's drag, far too low: 2 x 1.328/sqrt(1e5) is 0.0084.
         var polar = Table(1e5, (-6, -0.6, 0.002), (0, 0, 0.001), (6, 0.6, 0.002));
         var extended = PolarExtension.Extend(polar, AspectRatio, ExtensionJoin.End);
-        // On either side 174, 175, 177.5 and 180 degrees, where the drag passes from that at the join to that at zero lift.
-        Assert.Equal(8, extended.RaisedToFloor);
+        // On either side 6.5 degrees, just beyond the join, and 174, 175, 177.5 and 180, where drag passes to that at zero lift.
+        Assert.Equal(10, extended.RaisedToFloor);
         Assert.Equal(2 * 1.328 / Math.Sqrt(1e5), extended.Polar.Drag[^1], 1e-15);
         Assert.Equal((0, 0.001), At(extended.Polar, 0));
         Assert.Equal(0, PolarExtension.Extend(Table(double.NaN, (-6, -0.6, 0.002), (0, 0, 0.001), (6, 0.6, 0.002)), AspectRatio, ExtensionJoin.End).RaisedToFloor);
