@@ -3,11 +3,22 @@ using System.Collections.Immutable;
 namespace BladeLoads.Rotor.Blades;
 
 /// <summary>One row of a blade table: radius m, chord m, twist rad (positive towards feather), section by name.</summary>
-public sealed record BladeStation(double Radius, double Chord, double Twist, string Section);
+/// <param name="Section">Null where the thickness says which section it is.</param>
+public sealed record BladeStation(double Radius, double Chord, double Twist, string? Section)
+{
+    /// <summary>Thickness over chord, above 0 to 1; null where the section is named.</summary>
+    public double? ThicknessRatio { get; private init; }
+
+    /// <summary>A station whose section is that of its thickness in a family of sections.</summary>
+    /// <param name="thicknessRatio">Above 0 to 1.</param>
+    public static BladeStation OfThickness(double radius, double chord, double twist, double thicknessRatio)
+        => new(radius, chord, twist, null) { ThicknessRatio = thicknessRatio };
+}
 
 /// <summary>
 /// A blade from its root (the hub radius) to its tip. Holds at least two stations; radii are positive and rise strictly; chords are
-/// positive. Chord and twist are linear between stations. Equality is by reference.
+/// positive; either every station names its section or every one gives its thickness. Chord, twist and thickness are linear between
+/// stations. Equality is by reference.
 /// </summary>
 public sealed class Blade
 {
@@ -20,6 +31,9 @@ public sealed class Blade
 
     /// <summary>Radius of the last station, m, along the blade.</summary>
     public double TipRadius => Stations[^1].Radius;
+
+    /// <summary>Whether its sections are those of a thickness; else they are named.</summary>
+    public bool IsByThickness => Stations[0].ThicknessRatio is not null;
 
     /// <summary>Length over mean chord: the square of the length over the area, chords in straight lines between stations.</summary>
     public double AspectRatio
@@ -46,6 +60,8 @@ public sealed class Blade
                 throw new ArgumentException($"station {i}: radius and chord positive, all finite", nameof(stations));
             if (i > 0 && !(s.Radius > all[i - 1].Radius))
                 throw new ArgumentException($"station {i}: radii must rise", nameof(stations));
+            if ((s.Section is null) != (s.ThicknessRatio is > 0 and <= 1) || (s.Section is null) != (all[0].Section is null))
+                throw new ArgumentException($"station {i}: a section, or a thickness ratio above 0 to 1 at every station", nameof(stations));
         }
         return new Blade(all);
     }

@@ -8,11 +8,15 @@ namespace BladeLoads.Rotor.Blades;
 /// <param name="Length">Along the blade, m.</param>
 /// <param name="Chord">m.</param>
 /// <param name="Twist">rad, positive towards feather.</param>
-/// <param name="InnerSection">Name of the section at the station inboard of it.</param>
-/// <param name="OuterSection">Name of the section at the station outboard of it.</param>
+/// <param name="InnerSection">Name of the section at the station inboard of it; empty where the thickness says.</param>
+/// <param name="OuterSection">Name of the section at the station outboard of it; likewise.</param>
 /// <param name="OuterWeight">Share of the outer section's coefficients, 0 to 1; 0 where both names are the same.</param>
 public readonly record struct BladeElement(
-    double Radius, double Length, double Chord, double Twist, string InnerSection, string OuterSection, double OuterWeight);
+    double Radius, double Length, double Chord, double Twist, string InnerSection, string OuterSection, double OuterWeight)
+{
+    /// <summary>Thickness over chord; null where the sections are named.</summary>
+    public double? ThicknessRatio { get; init; }
+}
 
 /// <summary>Divides a blade into elements.</summary>
 public static class BladeElements
@@ -48,6 +52,9 @@ public static class BladeElements
         var w = (radius - a.Radius) / (b.Radius - a.Radius);
         return new BladeElement(
             radius, length, a.Chord + (w * (b.Chord - a.Chord)), a.Twist + (w * (b.Twist - a.Twist)),
-            a.Section, b.Section, a.Section == b.Section ? 0 : w);
+            a.Section ?? "", b.Section ?? "", a.Section == b.Section ? 0 : w)
+        {
+            ThicknessRatio = a.ThicknessRatio + (w * (b.ThicknessRatio - a.ThicknessRatio)),
+        };
     }
 }

@@ -55,11 +55,15 @@ public readonly record struct BestOperation(double TipSpeedRatio, double Pitch, 
         }
         // Coarsely from every start, then finely from where the best of them ended.
         var best = new BestOperation(ratios[0], pitches[0], double.NegativeInfinity, IsSearched: true);
+        var tops = new List<BestOperation>();
         foreach (var (i, j) in Starts(grid, highest))
         {
             cancellation.ThrowIfCancellationRequested();
+            if (tops.Exists(t => Math.Abs(t.TipSpeedRatio - ratios[i]) < RatioStep && Math.Abs(t.Pitch - pitches[j]) < PitchStep))
+                continue;
             var start = new BestOperation(ratios[i], pitches[j], grid[i, j], IsSearched: true);
             var top = Climb(model, start, tipSpeedRatio is null, pitch is null, FirstStep, CoarseStep);
+            tops.Add(top);
             if (top.PowerCoefficient > best.PowerCoefficient)
                 best = top;
         }

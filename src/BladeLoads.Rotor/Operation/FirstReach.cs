@@ -14,16 +14,20 @@ internal static class FirstReach
     /// <param name="tolerance">In the unit of the places: how far apart the two sides of the answer may be.</param>
     /// <param name="finest">How close to a jump it is looked at.</param>
     /// <param name="fastestTurn">rad a unit of place: an inflow angle that turns faster has jumped.</param>
+    /// <param name="longestLeap">
+    /// Places that may be passed over at once where nothing can hide among them; 1 for none. More only for pitches that fall.
+    /// </param>
     public static Reach? Find(
-        Func<double, Sample> at, ReadOnlySpan<double> places, double tolerance, double finest, double fastestTurn)
+        Func<double, Sample> at, ReadOnlySpan<double> places, double tolerance, double finest, double fastestTurn, int longestLeap)
     {
         var below = at(places[0]);
         if (below.Excess >= 0)
             return new Reach(below, below);
         var beforeThat = below;
-        foreach (var place in places[1..])
+        for (var next = 1; next < places.Length; next++)
         {
-            var here = at(place);
+            next += Leap(beforeThat, below, places[next..], longestLeap);
+            var here = at(places[next]);
             if (beforeThat.Place != below.Place && below.Excess > beforeThat.Excess && below.Excess >= here.Excess
                 && PeakReaching(at, beforeThat, below, here, tolerance) is { } peak)
                 return Close(at, beforeThat, peak, tolerance);
@@ -34,6 +38,15 @@ internal static class FirstReach
             (beforeThat, below) = (below, here);
         }
         return null;
+    }
+
+    // How many of the places ahead need no look. Never more than half of them: towards the end of a walk a peak has no sample behind it.
+    private static int Leap(in Sample before, in Sample from, ReadOnlySpan<double> ahead, int longest)
+    {
+        for (var leap = longest; leap > 1; leap /= 2)
+            if (leap <= ahead.Length / 2 && from.RulesOutReachUpTo(ahead[leap - 1], before))
+                return leap - 1;
+        return 0;
     }
 
     // Elements that change their balance between two places make the quantity jump there, and it may be 0 or more on one side of the jump

@@ -79,10 +79,10 @@ public sealed class RotorModel
 
     private Element Prepare(in BladeElement e, SectionSet sections)
     {
-        var sameSection = e.OuterWeight == 0;
+        var byThickness = e.ThicknessRatio is { } thickness ? sections.Family!.At(thickness) : null;
+        var (inner, outer) = (byThickness ?? sections[e.InnerSection], byThickness ?? sections[e.OuterSection]);
         return new Element(
-            e, sections[e.InnerSection].Table, sections[e.OuterSection].Table,
-            sameSection ? e.InnerSection : $"{e.InnerSection}/{e.OuterSection}",
+            e, inner.Table, outer.Table, e.OuterWeight == 0 ? inner.Name : $"{inner.Name}/{outer.Name}",
             _bladeCount * e.Chord / (2 * Math.PI * e.Radius * _cosCone),
             _model.TipLoss ? LossFactor.TipExponent(_bladeCount, e.Radius, _tipRadius) : double.NegativeInfinity,
             _model.HubLoss ? LossFactor.HubExponent(_bladeCount, e.Radius, _hubRadius) : double.NegativeInfinity);

@@ -5,6 +5,14 @@ internal sealed partial class VariableSpeedOperation
 {
     private const double Feathered = Math.PI / 2;
 
+    // Steps of a walk from feather, which are of 2, 1 and 1/4 degree.
+    private const int LongestLeap = 16;
+
+    // Lower peaks of power than this share of its range are not followed: none is that much sharper than the steps.
+    private const double WorthFollowing = 0.1;
+
+    private const double LeastThrustTolerance = 1e-6;
+
     // rad, a tenth of a degree: below it a flat top of power at fine pitch would count as a jump.
     private const double LeastJump = 2e-3;
     private static readonly double DeepestStall = double.DegreesToRadians(-30);
@@ -19,28 +27,28 @@ internal sealed partial class VariableSpeedOperation
 
     // The largest pitch up to feather at which power is rated. At high wind the rotor at fine pitch may be stalled and make less than
     // rated; that is no operating point, so the walk comes down from feather.
-    private BranchPitch? FeatherPitchAt(in Setting below, double ratedPower)
+    private BranchPitch? FeatherPitchAt(in Setting below)
     {
         var point = below.Point;
         var reach = FirstReach.Find(
-            pitch => PowerAt(pitch, point with { Pitch = pitch }, ratedPower), PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)),
-            PitchTolerance, FinestPitch, TurnPerPitch);
+            pitch => PowerAt(pitch, point with { Pitch = pitch }), PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch)),
+            PitchTolerance, FinestPitch, TurnPerPitch, LongestLeap);
         return reach is { } r ? new BranchPitch(r.Reached.Place, r.Reached.Excess) : null;
     }
 
     // The pitch nearest to fine pitch, towards stall, at which power is rated.
-    private BranchPitch? StallPitchAt(in Setting below, double ratedPower)
+    private BranchPitch? StallPitchAt(in Setting below)
     {
         var point = below.Point;
         var places = PitchesIntoStall(point.Pitch);
-        Sample Power(double pitch) => PowerAt(pitch, point with { Pitch = pitch }, ratedPower);
+        Sample Power(double pitch) => PowerAt(pitch, point with { Pitch = pitch });
         if (Power(point.Pitch).Excess < 0)
-            return FirstReach.Find(Power, places, PitchTolerance, FinestPitch, TurnPerPitch) is { } rising
+            return FirstReach.Find(Power, places, PitchTolerance, FinestPitch, TurnPerPitch, longestLeap: 1) is { } rising
                 ? new BranchPitch(rising.Reached.Place, rising.Reached.Excess)
                 : null;
         static Sample Below(in Sample s) => s with { Excess = -s.Excess };
         // The side at or above rated is the one on which power has not fallen below it yet.
-        return FirstReach.Find(pitch => Below(Power(pitch)), places, PitchTolerance, FinestPitch, TurnPerPitch)
+        return FirstReach.Find(pitch => Below(Power(pitch)), places, PitchTolerance, FinestPitch, TurnPerPitch, longestLeap: 1)
             is { } falling
             ? new BranchPitch(falling.Below.Place, -falling.Below.Excess)
             : null;
@@ -51,22 +59,17 @@ internal sealed partial class VariableSpeedOperation
     private Setting WithinThrust(in Setting setting, double limit)
     {
         var point = setting.Point;
-        Sample Thrust(double pitch)
-        {
-            _cancellation.ThrowIfCancellationRequested();
-            var thrust = _model.Solve(point with { Pitch = pitch })?.Thrust ?? double.NaN;
-            return new Sample(pitch, thrust - limit, ElementShare.OfThrust(_model));
-        }
+        Sample Thrust(double pitch) => new(pitch, ThrustExcess(point with { Pitch = pitch }), ElementShare.OfThrust(_model));
         var isHeldByStall = _control.AboveRated == AboveRated.PitchToStall && setting.Region == Region.RatedPower
             && Thrust(point.Pitch).Excess <= MetTolerance * limit;
         var pitches = PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch));
-        if (isHeldByStall || FirstReach.Find(Thrust, pitches, PitchTolerance, FinestPitch, TurnPerPitch) is not { } reach)
+        if (isHeldByStall || FirstReach.Find(Thrust, pitches, PitchTolerance, FinestPitch, TurnPerPitch, LongestLeap) is not { } reach)
             return setting;
         if (reach.Below == reach.Reached)
         {
             // Not even feathered blades hold it: the pitch with the least thrust comes nearest.
             Array.Reverse(pitches);
-            var least = Largest.Find(pitch => -Thrust(pitch).Excess, pitches, LeastJump);
+            var least = Largest.Find(pitch => -Thrust(pitch).Excess, pitches, LeastThrustTolerance, worth: 1);
             var marks = least.Excess >= 0 ? setting.Marks : setting.Marks | PointMarks.ThrustNotHeld;
             return new Setting(point with { Pitch = least.Place }, Region.ThrustLimit, marks & ~PointMarks.PowerJump);
         }
@@ -78,7 +81,7 @@ internal sealed partial class VariableSpeedOperation
     private double PitchWithMostPower(OperatingPoint point)
     {
         var places = new List<double>();
-        for (var deg = -15; deg <= 45; deg++)
+        for (var deg = -15; deg <= 45; deg += 2)
             places.Add(double.DegreesToRadians(deg));
         return Largest.Find(
             pitch =>
@@ -86,14 +89,14 @@ internal sealed partial class VariableSpeedOperation
                 _cancellation.ThrowIfCancellationRequested();
                 return _model.Solve(point with { Pitch = pitch })?.Power ?? double.NaN;
             },
-            [.. places], 1e-9).Place;
+            [.. places], 1e-9, WorthFollowing).Place;
     }
 
-    private bool StartsWithJump(double ratedWindSpeed, double ratedPower)
+    private bool StartsWithJump(double ratedWindSpeed)
     {
         var below = BaseAt(ratedWindSpeed);
         return _control.AboveRated == AboveRated.PitchToFeather
-            && FeatherPitchAt(below, ratedPower)?.Pitch > below.Point.Pitch + LeastJump;
+            && FeatherPitchAt(below)?.Pitch > below.Point.Pitch + LeastJump;
     }
 
     // Power and thrust fall steeply towards feather, so steps may be longer there; they are shortest at fine pitch, where a narrow peak

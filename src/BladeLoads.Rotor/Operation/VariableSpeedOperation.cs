@@ -34,10 +34,10 @@ internal sealed partial class VariableSpeedOperation
         if (control.RatedPower is not { } ratedPower)
             return;
         RatedWindSpeed = FirstReach.Find(
-            v => PowerAt(v, BaseAt(v).Point, ratedPower),
-            WindSpeedsUpwards(rotorCase, ratedPower), WindSpeedTolerance, FinestWindSpeed, TurnPerWindSpeed)?.Reached.Place;
+            v => PowerAt(v, BaseAt(v).Point),
+            WindSpeedsUpwards(rotorCase, ratedPower), WindSpeedTolerance, FinestWindSpeed, TurnPerWindSpeed, longestLeap: 1)?.Reached.Place;
         Marks = RatedWindSpeed is null ? PointMarks.RatedNotReached
-            : StartsWithJump(RatedWindSpeed.Value, ratedPower) ? PointMarks.PitchJump
+            : StartsWithJump(RatedWindSpeed.Value) ? PointMarks.PitchJump
             : PointMarks.None;
     }
 
@@ -53,14 +53,28 @@ internal sealed partial class VariableSpeedOperation
         RotorCase rotorCase, Control.VariableSpeed control, RotorModel model, CancellationToken cancellation)
         => new(rotorCase, control, model, cancellation);
 
-    /// <summary>m/s, rising: where the rotor speed meets a limit, and rated power.</summary>
-    public double[] LikelyBeginnings()
+    /// <summary>m/s, rising: where the rotor speed meets a limit, rated power, and the ends of the thrust limit on a curve.</summary>
+    public double[] LikelyBeginnings(ReadOnlySpan<CurvePoint> curve)
     {
-        double[] all =
+        List<double> all =
         [
             _control.MinRotorSpeed * _model.SweptRadius / Best.TipSpeedRatio, _control.MaxRotorSpeed * _model.SweptRadius / Best.TipSpeedRatio,
             RatedWindSpeed ?? double.PositiveInfinity,
         ];
+        for (var i = 1; i < curve.Length; i++)
+        {
+            double[] between = [curve[i - 1].Operation.WindSpeed, curve[i].Operation.WindSpeed];
+            Func<double, double>? excess = (curve[i - 1].Region, curve[i].Region) switch
+            {
+                (not Region.ThrustLimit, Region.ThrustLimit) => v => ThrustExcess(BaseAt(v).Point),
+                (Region.ThrustLimit, Region.RatedPower) => v => PowerExcess(WithinThrust(BaseAt(v), _control.ThrustLimit!.Value).Point),
+                _ => null,
+            };
+            if (excess is not null
+                && FirstReach.Find(v => new Sample(v, excess(v), null), between, WindSpeedTolerance, FinestWindSpeed, TurnPerWindSpeed, 1)
+                    is { } reach)
+                all.Add(reach.Reached.Place);
+        }
         return [.. all.Where(double.IsFinite).Order()];
     }
 
@@ -71,8 +85,8 @@ internal sealed partial class VariableSpeedOperation
         if (windSpeed >= RatedWindSpeed && _control.RatedPower is { } ratedPower)
             setting = _control.AboveRated switch
             {
-                AboveRated.PitchToFeather => OnBranch(setting, ratedPower, FeatherPitchAt(setting, ratedPower)),
-                AboveRated.PitchToStall => OnBranch(setting, ratedPower, StallPitchAt(setting, ratedPower)),
+                AboveRated.PitchToFeather => OnBranch(setting, ratedPower, FeatherPitchAt(setting)),
+                AboveRated.PitchToStall => OnBranch(setting, ratedPower, StallPitchAt(setting)),
                 _ => setting,
             };
         return _control.ThrustLimit is { } limit ? WithinThrust(setting, limit) : setting;
@@ -91,13 +105,21 @@ internal sealed partial class VariableSpeedOperation
         return new Setting(point, region, PointMarks.None);
     }
 
-    // NaN where an element is unbalanced: such a point cannot be said to hold anything.
-    private Sample PowerAt(double place, in OperatingPoint point, double ratedPower)
+    // Over rated power and over the thrust limit, of a control that has them; NaN where an element is unbalanced: such a point cannot be
+    // said to hold anything.
+    private double PowerExcess(in OperatingPoint point)
     {
         _cancellation.ThrowIfCancellationRequested();
-        var power = _model.Solve(point)?.Power ?? double.NaN;
-        return new Sample(place, _drivetrain.Electrical(power) - ratedPower, ElementShare.OfPower(_model, point));
+        return _drivetrain.Electrical(_model.Solve(point)?.Power ?? double.NaN) - _control.RatedPower!.Value;
     }
+
+    private double ThrustExcess(in OperatingPoint point)
+    {
+        _cancellation.ThrowIfCancellationRequested();
+        return (_model.Solve(point)?.Thrust ?? double.NaN) - _control.ThrustLimit!.Value;
+    }
+
+    private Sample PowerAt(double place, in OperatingPoint point) => new(place, PowerExcess(point), ElementShare.OfPower(_model, point));
 
     private double[] WindSpeedsUpwards(RotorCase rotorCase, double ratedPower)
     {

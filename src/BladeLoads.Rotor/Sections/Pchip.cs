@@ -30,6 +30,25 @@ public static class Pchip
             (y[n - 1] - y[n - 2]) / (x[n - 1] - x[n - 2]), (y[n - 2] - y[n - 3]) / (x[n - 2] - x[n - 3]));
     }
 
+    /// <summary>The interpolant at one place.</summary>
+    /// <param name="x">At least two, rising; with two the interpolant is a straight line.</param>
+    /// <param name="y">One an x.</param>
+    /// <param name="at">Within the range of <paramref name="x"/>.</param>
+    public static double ValueAt(ReadOnlySpan<double> x, ReadOnlySpan<double> y, double at)
+    {
+        var i = 0;
+        while (i < x.Length - 2 && at >= x[i + 1])
+            i++;
+        var (h, u) = (x[i + 1] - x[i], at - x[i]);
+        var d = (y[i + 1] - y[i]) / h;
+        if (x.Length == 2)
+            return y[i] + (u * d);
+        Span<double> slopes = stackalloc double[x.Length];
+        Slopes(x, y, slopes);
+        var (s0, s1) = (slopes[i], slopes[i + 1]);
+        return y[i] + (u * (s0 + (u * ((((3 * d) - (2 * s0) - s1) / h) + (u * ((s0 + s1 - (2 * d)) / (h * h)))))));
+    }
+
     private static double EndSlope(double h0, double h1, double d0, double d1)
     {
         var slope = ((((2 * h0) + h1) * d0) - (h0 * d1)) / (h0 + h1);

@@ -47,11 +47,19 @@ internal sealed partial class SectionTable
             _firstCellOfBucket[b] = cell;
         }
         (_points, _blocks) = SummariseCells();
+        var stalls = polars.Select(Stall).ToArray();
+        (LeastStallAngle, LeastLiftingAngle) = (stalls.Min(s => s.Largest), stalls.Min(s => s.Lifting));
         _augmented = new Lazy<SectionTable>(() => Prepare([.. polars.Select(RotationalAugmentation.FullyAugmented)]));
     }
 
     /// <summary>The angles of all rows, and +-pi; rad, rising.</summary>
     public ReadOnlySpan<double> Knots => _knots;
+
+    /// <summary>rad; the least angle at which any of the polars has a largest lift; infinite where none lifts.</summary>
+    public double LeastStallAngle { get; }
+
+    /// <summary>rad; up to here, from far below, no polar lifts; infinite where none lifts.</summary>
+    public double LeastLiftingAngle { get; }
 
     /// <summary>
     /// The same polars, in the same order, with all the augmentation that there can be; made when first asked for. Beyond the ends of the
@@ -142,6 +150,25 @@ internal sealed partial class SectionTable
             else
                 Hermite(angles[row], angles[row + 1], values[row], values[row + 1], slopes[row], slopes[row + 1], _knots[cell], c);
         }
+    }
+
+    // The first largest lift that is one: noise in the straight part of a measured table is none.
+    private static (double Lifting, double Largest) Stall(Polar polar)
+    {
+        const double Noise = 0.02;
+        var (lifting, at, largest) = (double.NegativeInfinity, double.PositiveInfinity, 0.0);
+        for (var i = 0; i < polar.Angles.Length && polar.Angles[i] <= Math.PI / 2; i++)
+        {
+            if (polar.Angles[i] < -Math.PI / 2)
+                continue;
+            if (polar.Lift[i] <= 0 && largest < Noise)
+                (lifting, largest) = (polar.Angles[i], 0);
+            else if (polar.Lift[i] > largest)
+                (at, largest) = (polar.Angles[i], polar.Lift[i]);
+            else if (polar.Lift[i] < largest - Noise)
+                return (lifting, at);
+        }
+        return double.IsFinite(at) ? (lifting, at) : (double.PositiveInfinity, double.PositiveInfinity);
     }
 
     // The cubic of one pair of rows, in powers of the angle from `from`, which lies between them.

@@ -52,6 +52,8 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             control.CutIn, control.CutOut, control.Drivetrain, model);
         var determining = values.Determining;
         inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
+        if (sections.Set is { } set)
+            inputs = inputs.Add(set.Input);
         ImmutableArray<CanonicalTable> canonical = [blade.Canonical, .. sections.Tables.Select(table => table.Canonical)];
         if (control.Schedule is { } schedule)
         {
@@ -102,6 +104,12 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         foreach (var table in sections.Tables)
             if (table.Section is { } section)
                 values.Note($"section.{section.Name}", table.Canonical.Hash);
+        if (sections.Set is { } setFile)
+        {
+            values.Uses(setFile.Input.File);
+            foreach (var thickness in setFile.Thicknesses)
+                values.Note($"thickness_ratio.{thickness.Section}", CanonicalText.Of(thickness.ThicknessRatio));
+        }
         SectionsReader.CheckTables(values, sections, augmentation, findings);
         return (blade, sections, augmentation);
     }

@@ -20,7 +20,7 @@ public sealed class CanonicalTable(string key, string hash, string file, Func<IE
 
     /// <summary>
     /// The rows, each ended by a line feed: of a polar <c>reynolds,alpha_deg,cl,cd</c> (<c>-</c> for no Reynolds number), of a blade
-    /// <c>radius_m,chord_m,twist_deg,section</c>, of a schedule <c>wind_speed_m_s,rotor_speed_rpm,pitch_deg</c>.
+    /// <c>radius_m,chord_m,twist_deg,section</c> (by thickness an empty section and the ratio), of a schedule <c>wind_speed_m_s,rotor_speed_rpm,pitch_deg</c>.
     /// </summary>
     public string Text
     {

@@ -9,9 +9,11 @@ namespace BladeLoads.Studies.Tables;
 /// <summary>A blade table as read.</summary>
 /// <param name="Blade">Null when an error keeps the table from being used.</param>
 /// <param name="Sections">Every section named, with the place of its first row; those of a table with errors too.</param>
+/// <param name="Thicknesses">Of the rows that give one, in their order, beside a section or in its place.</param>
 /// <param name="Canonical">The parsed values.</param>
 internal sealed record BladeTable(
-    Blade? Blade, ImmutableArray<(string Name, Place At)> Sections, CanonicalTable Canonical, InputFile Input)
+    Blade? Blade, ImmutableArray<(string Name, Place At)> Sections, ImmutableArray<RowThickness> Thicknesses, CanonicalTable Canonical,
+    InputFile Input)
 {
     private static readonly ImmutableArray<Column> Columns =
     [
@@ -25,6 +27,7 @@ internal sealed record BladeTable(
         var stations = new List<BladeStation>();
         var lines = new List<string>();
         var sections = new List<(string Name, Place At)>();
+        var thicknesses = new List<RowThickness>();
         var known = new HashSet<string>(StringComparer.Ordinal);
         var cells = new List<(Place Chord, Place Twist)>();
         if (!rows.ReadHeader(Columns))
@@ -34,12 +37,13 @@ internal sealed record BladeTable(
                 if (rows.Text("section") is var name && SafeName.Problem(name) is null && known.Add(name))
                     sections.Add((name, rows.Cell("section")));
         }
-        else if (HasSections(rows, input.File))
+        else if (HasShapes(rows, input.File))
         {
             if (rows.Has("mass_kg_per_m"))
                 findings.Doubt(new InputFinding(input.File, rows.Line, rows.Cell("mass_kg_per_m").Column,
                     "mass_kg_per_m is not used yet; moments are aerodynamic only"));
             var previous = (Radius: 0.0, Line: 0);
+            var byThickness = !rows.Has("section");
             while (rows.Read())
             {
                 var radius = Positive(rows, "radius_m");
@@ -53,15 +57,20 @@ internal sealed record BladeTable(
                 var twist = rows.Number("twist_deg");
                 if (Math.Abs(twist) > 180)
                     rows.Error("twist_deg", $"twist_deg is {CanonicalText.Of(twist)}; give an angle from -180 to 180");
-                var section = SectionOf(rows);
-                CheckUnused(rows);
+                var section = byThickness ? null : SectionOf(rows);
+                var thickness = ThicknessOf(rows, byThickness);
+                CheckMass(rows);
+                if (!double.IsNaN(thickness))
+                    thicknesses.Add(new RowThickness(section, thickness, rows.Cell("thickness_ratio")));
                 if (!double.IsNaN(radius))
                     previous = (radius, rows.Line);
                 if (section is not null && known.Add(section))
                     sections.Add((section, rows.Cell("section")));
-                stations.Add(new BladeStation(radius, chord, double.DegreesToRadians(twist), section ?? ""));
+                stations.Add(byThickness
+                    ? BladeStation.OfThickness(radius, chord, double.DegreesToRadians(twist), thickness)
+                    : new BladeStation(radius, chord, double.DegreesToRadians(twist), section ?? ""));
                 cells.Add((rows.Cell("chord_m"), rows.Cell("twist_deg")));
-                lines.Add($"{CanonicalText.Of([radius, chord, twist])},{section}");
+                lines.Add($"{CanonicalText.Of([radius, chord, twist])},{section}{(byThickness ? "," + CanonicalText.Of(thickness) : "")}");
             }
             if (!rows.HasErrors && stations.Count < 2)
                 rows.Error(new Place(input.File, 0, 0),
@@ -71,22 +80,20 @@ internal sealed record BladeTable(
         if (blade is not null)
             UnlikelyBlade.Doubt(blade, cells, findings);
         return new BladeTable(
-            blade, [.. sections], Fingerprint.OfTable("blade", input.File, () => lines),
+            blade, [.. sections], [.. thicknesses], Fingerprint.OfTable("blade", input.File, () => lines),
             new InputFile(input.File, input.Sha256, Contents(blade, sections.Count)));
     }
 
     private static string Contents(Blade? blade, int sections) => blade is null ? "blade table with errors" : string.Create(
         CultureInfo.InvariantCulture,
         $"{blade.Stations.Length} rows from {CanonicalText.Of(blade.HubRadius)} to {CanonicalText.Of(blade.TipRadius)} m, "
-        + $"{sections} section{(sections == 1 ? "" : "s")}");
+        + $"{(blade.IsByThickness ? "sections by thickness" : sections == 1 ? "1 section" : $"{sections} sections")}");
 
-    private static bool HasSections(CsvRows rows, string file)
+    private static bool HasShapes(CsvRows rows, string file)
     {
-        if (rows.Has("section"))
+        if (rows.Has("section") || rows.Has("thickness_ratio"))
             return true;
-        rows.Error(new Place(file, rows.Line, 1), rows.Has("thickness_ratio")
-            ? "sections from thickness_ratio are not supported yet; add a column 'section'"
-            : "no column 'section'; name the section of each row");
+        rows.Error(new Place(file, rows.Line, 1), "no column 'section'; name the section of each row, or give its thickness_ratio");
         return false;
     }
 
@@ -95,7 +102,7 @@ internal sealed record BladeTable(
         var section = rows.Text("section");
         if (section.Length == 0)
             rows.Error("section", rows.Has("thickness_ratio") && rows.Text("thickness_ratio").Length > 0
-                ? "a section from thickness_ratio is not supported yet; name a section"
+                ? "section is empty; name one in every row, or leave the column out and thickness_ratio serves"
                 : "section is empty; name a section");
         else if (SafeName.Problem(section) is { } problem)
             rows.Error("section",
@@ -114,16 +121,26 @@ internal sealed record BladeTable(
         return double.NaN;
     }
 
-    private static void CheckUnused(CsvRows rows)
+    // NaN where the row gives none, or a wrong one.
+    private static double ThicknessOf(CsvRows rows, bool isNeeded)
     {
-        if (rows.Has("thickness_ratio") && rows.Text("thickness_ratio").Length > 0)
-        {
-            var thickness = rows.Number("thickness_ratio");
-            if (thickness is <= 0 or > 1)
-                rows.Error("thickness_ratio",
-                    $"thickness_ratio is {CanonicalText.Of(thickness)}; it is thickness over chord, above 0 to 1");
-        }
+        if (!rows.Has("thickness_ratio") || (rows.Text("thickness_ratio").Length == 0 && !isNeeded))
+            return double.NaN;
+        var thickness = rows.Number("thickness_ratio");
+        if (!(thickness is <= 0 or > 1))
+            return thickness;
+        rows.Error("thickness_ratio", $"thickness_ratio is {CanonicalText.Of(thickness)}; it is thickness over chord, above 0 to 1"
+            + (thickness is > 1 and <= 100 ? $": {CanonicalText.Of(thickness / 100)}" : ""));
+        return double.NaN;
+    }
+
+    private static void CheckMass(CsvRows rows)
+    {
         if (rows.Has("mass_kg_per_m") && rows.Number("mass_kg_per_m") is < 0 and var mass)
             rows.Error("mass_kg_per_m", $"mass_kg_per_m is {CanonicalText.Of(mass)}; it must be 0 or more");
     }
 }
+
+/// <summary>A thickness over chord that a row of a blade table gives.</summary>
+/// <param name="Section">The section that the row names; null where the thickness serves.</param>
+internal sealed record RowThickness(string? Section, double ThicknessRatio, Place At);

@@ -39,11 +39,11 @@ internal sealed class IndependentAnnulus
         (_liftFactor, _dragFactor) = IndependentAugmentation.Factors(
             rotor.Augmentation, Chord / Radius, Radius / tip, operation.WindSpeed, operation.RotorSpeed * tip * Math.Cos(rotor.Cone));
         if (a.Section == b.Section)
-            Add(rotor.Sections[a.Section], 1);
+            Add(rotor.Sections[a.Section!], 1);
         else
         {
-            Add(rotor.Sections[a.Section], 1 - share);
-            Add(rotor.Sections[b.Section], share);
+            Add(rotor.Sections[a.Section!], 1 - share);
+            Add(rotor.Sections[b.Section!], share);
         }
 
         double Edge(int k)

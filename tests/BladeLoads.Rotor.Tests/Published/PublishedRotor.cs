@@ -42,7 +42,7 @@ internal static class PublishedRotor
         var rows = PublishedTable.Read($"{folder}/blade.csv").Rows;
         var stations = rows.Select(row =>
             new BladeStation(row["radius_m"], row["chord_m"], row["twist_deg"] * Degree, row.Text("section"))).ToArray();
-        var sections = stations.Select(s => s.Section).Distinct()
+        var sections = stations.Select(s => s.Section!).Distinct()
             .Select(name => Section.FromPolars(name, [ReadPolar($"{folder}/polars/{name}.csv")]));
         return (Blade.FromStations(stations), SectionSet.Of(sections));
     }
@@ -70,6 +70,16 @@ internal static class PublishedRotor
             stations.Add(new BladeStation(row["radius_m"], row["chord_m"], row[angleColumn] * Degree, name));
         }
         return (Blade.FromStations(stations), SectionSet.Of(sections.Values));
+    }
+
+    /// <summary>A blade whose rows give their thickness alone, and its published sections as a family.</summary>
+    public static (Blade Blade, SectionSet Sections) ByThickness(string folder, params (string Section, double ThicknessRatio)[] family)
+    {
+        var stations = PublishedTable.Read($"{folder}/blade.csv").Rows.Select(row => BladeStation.OfThickness(
+            row["radius_m"], row["chord_m"], row["twist_deg"] * Degree, row["thickness_ratio"]));
+        var members = family.OrderBy(m => m.ThicknessRatio).Select(m => new FamilyMember(
+            m.ThicknessRatio, Section.FromPolars(m.Section, [ReadPolar($"{folder}/polars/{m.Section}.csv")])));
+        return (Blade.FromStations(stations), SectionSet.Of(SectionFamily.Of(members)));
     }
 
     /// <summary>On the angles of both tables, where both have values.</summary>

@@ -30,22 +30,5 @@ public class NotYetTests
         Assert.Equal(plain.Fingerprint, Assert.Single(study.Cases).Fingerprint);
     }
 
-    [Fact]
-    public void A_blade_of_thickness_ratios_alone_is_not_read_yet()
-    {
-        var errors = new FellStudy().With("blades/fell.csv", "radius_m,chord_m,twist_deg,thickness_ratio\n1,1,0,0.4\n2,1,0,0.3\n").Read().Errors;
-
-        Told.Exactly(["blades/fell.csv:1:1: sections from thickness_ratio are not supported yet; add a column 'section'"], errors);
-    }
-
-    [Fact]
-    public void A_row_of_a_thickness_ratio_alone_is_not_read_yet()
-    {
-        var errors = new FellStudy().With("blades/fell.csv",
-            "radius_m,chord_m,twist_deg,section,thickness_ratio\n1,1,0,root,0.4\n2,1,0,,0.3\n3,1,0,tip,\n").Read().Errors;
-
-        Told.Exactly(["blades/fell.csv:3:7: a section from thickness_ratio is not supported yet; name a section"], errors);
-    }
-
     private static Study Read(string caseText) => new FellStudy().With("cases/clean.toml", caseText).Read();
 }

@@ -76,7 +76,7 @@ public class BladeTableTests
     [InlineData("chord_m", "colour", "2:10: unknown column 'colour'; the columns are radius_m, chord_m, twist_deg, section, thickness_ratio, mass_kg_per_m")]
     [InlineData("chord_m", "", "2:10: a column has no name; the columns are radius_m, chord_m, twist_deg, section, thickness_ratio, mass_kg_per_m")]
     [InlineData(",twist_deg,section", ",section", "2:1: no column 'twist_deg'; the table has radius_m, chord_m, section")]
-    [InlineData("twist_deg,section", "twist_deg", "2:1: no column 'section'; name the section of each row")]
+    [InlineData("twist_deg,section", "twist_deg", "2:1: no column 'section'; name the section of each row, or give its thickness_ratio")]
     [InlineData("radius_m,chord_m,twist_deg,section", "radius_m;chord_m;twist_deg;section", "2:1: columns are separated by ';'; separate them by ','")]
     [InlineData("radius_m,chord_m,twist_deg,section", "radius_m chord_m  twist_deg section", "2:1: columns are separated by spaces; separate them by ','")]
     [InlineData("radius_m,chord_m,twist_deg,section", "radius_m\tchord_m", "2:1: columns are separated by tabs; separate them by ','")]
@@ -172,7 +172,7 @@ public class BladeTableTests
 
         Told.Exactly(
             [
-                "blades/fell.csv:2:15: thickness_ratio is 40; it is thickness over chord, above 0 to 1",
+                "blades/fell.csv:2:15: thickness_ratio is 40; it is thickness over chord, above 0 to 1: 0.4",
                 "blades/fell.csv:3:14: thickness_ratio is 'x'; give a number, such as 0.8",
                 "blades/fell.csv:3:16: mass_kg_per_m is -40; it must be 0 or more",
             ],
