@@ -23,8 +23,12 @@ public static class CaseSolver
         var points = ImmutableArray.CreateBuilder<CurvePoint>(rotorCase.WindSpeeds.Length);
         foreach (var windSpeed in rotorCase.WindSpeeds)
             points.Add(Solved(windSpeed));
-        if (variableSpeed?.Marks == PointMarks.PitchJump)
-            MarkFirstRated(points);
+        var marks = variableSpeed?.Marks ?? PointMarks.None;
+        if (marks == PointMarks.PitchJump && FirstRated(points) is { } first)
+            if (first > 0 && points[first - 1].Region == Region.ThrustLimit)
+                marks = PointMarks.None;   // the thrust limit leads from one pitch to the other
+            else
+                points[first] = points[first] with { Marks = points[first].Marks | PointMarks.PitchJump };
         var curve = points.MoveToImmutable();
         Region RegionAt(double windSpeed) => solver.RegionOf(SettingAt(rotorCase, windSpeed, variableSpeed));
         var limited = rotorCase.Control is Control.VariableSpeed { ThrustLimit: not null };
@@ -34,7 +38,6 @@ public static class CaseSolver
         var rated = limited
             ? RatedUnderLimit.WindSpeed(rotorCase, variableSpeed?.RatedWindSpeed, curve, designPoints, RegionAt)
             : variableSpeed?.RatedWindSpeed;
-        var marks = variableSpeed?.Marks ?? PointMarks.None;
         if (limited && rated is null && rotorCase.Control.RatedPower is not null)
             marks = PointMarks.RatedNotReached;
         if (marks == PointMarks.RatedNotReached && NearestToRated(curve) is { } nearest)
@@ -71,14 +74,12 @@ public static class CaseSolver
         };
     }
 
-    private static void MarkFirstRated(ImmutableArray<CurvePoint>.Builder points)
+    private static int? FirstRated(ImmutableArray<CurvePoint>.Builder points)
     {
         for (var i = 0; i < points.Count; i++)
             if (points[i].Region == Region.RatedPower)
-            {
-                points[i] = points[i] with { Marks = points[i].Marks | PointMarks.PitchJump };
-                return;
-            }
+                return i;
+        return null;
     }
 }
 

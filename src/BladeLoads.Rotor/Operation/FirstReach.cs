@@ -86,7 +86,7 @@ internal static class FirstReach
     {
         var (fBelow, fReached) = (below.Excess, reached.Excess);
         var lastSide = 0;
-        for (var i = 0; Math.Abs(reached.Place - below.Place) > tolerance && reached.Excess != 0 && i < 200; i++)
+        for (var i = 0; Math.Abs(reached.Place - below.Place) > tolerance && i < 200; i++)
         {
             var width = reached.Place - below.Place;
             var share = i % 4 == 3 || !double.IsFinite(fBelow) ? 0.5 : Math.Clamp(fBelow / (fBelow - fReached), 0, 1);

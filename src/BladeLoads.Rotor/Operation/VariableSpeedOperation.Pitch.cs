@@ -62,21 +62,28 @@ internal sealed partial class VariableSpeedOperation
         Sample Thrust(double pitch) => new(pitch, ThrustExcess(point with { Pitch = pitch }), ElementShare.OfThrust(_model));
         var isHeldByStall = _control.AboveRated == AboveRated.PitchToStall && setting.Region == Region.RatedPower
             && Thrust(point.Pitch).Excess <= MetTolerance * limit;
-        var pitches = PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch));
-        if (isHeldByStall || FirstReach.Find(Thrust, pitches, PitchTolerance, FinestPitch, TurnPerPitch, LongestLeap) is not { } reach)
+        // Where more pitch than this is not needed, rated power or fine pitch wins.
+        if (isHeldByStall || FirstReach.Find(
+            Thrust, PitchesFromFeather(point.Pitch), PitchTolerance, FinestPitch, TurnPerPitch, LongestLeap) is not { } reach)
             return setting;
         if (reach.Below == reach.Reached)
         {
             // Not even feathered blades hold it: the pitch with the least thrust comes nearest.
+            var pitches = PitchesFromFeather(Math.Min(Best.Pitch, point.Pitch));
             Array.Reverse(pitches);
             var least = Largest.Find(pitch => -Thrust(pitch).Excess, pitches, LeastThrustTolerance, worth: 1);
             var marks = least.Excess >= 0 ? setting.Marks : setting.Marks | PointMarks.ThrustNotHeld;
             return new Setting(point with { Pitch = least.Place }, Region.ThrustLimit, marks & ~PointMarks.PowerJump);
         }
-        if (reach.Below.Place <= point.Pitch)
-            return setting;
         return new Setting(point with { Pitch = reach.Below.Place }, Region.ThrustLimit, setting.Marks & ~PointMarks.PowerJump);
     }
+
+    // Where power rises with pitch, the pitch that holds thrust may make rated power before fine pitch does; more pitch holds that too.
+    private Setting WithinRated(in Setting setting)
+        => setting.Region == Region.ThrustLimit && _control is { RatedPower: { } rated, AboveRated: AboveRated.PitchToFeather }
+            && PowerExcess(setting.Point) > MetTolerance * rated
+            ? OnBranch(setting, rated, FeatherPitchAt(setting))
+            : setting;
 
     private double PitchWithMostPower(OperatingPoint point)
     {

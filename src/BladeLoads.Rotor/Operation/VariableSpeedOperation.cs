@@ -89,7 +89,7 @@ internal sealed partial class VariableSpeedOperation
                 AboveRated.PitchToStall => OnBranch(setting, ratedPower, StallPitchAt(setting)),
                 _ => setting,
             };
-        return _control.ThrustLimit is { } limit ? WithinThrust(setting, limit) : setting;
+        return _control.ThrustLimit is { } limit ? WithinRated(WithinThrust(setting, limit)) : setting;
     }
 
     /// <summary>Below rated: rotor speed by the tip-speed ratio within its limits, fine pitch or the pitch with the most power.</summary>
