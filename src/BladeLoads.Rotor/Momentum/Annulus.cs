@@ -79,7 +79,7 @@ internal readonly struct Annulus
     {
         var (largest, at) = (0.0, double.NaN);
         for (var side = 0; side < (OuterWeight == 0 ? 1 : 2); side++)
-            foreach (var angle in (side == 0 ? Inner : Outer).Knots)
+            foreach (var angle in KnotsOf(side == 0 ? Inner : Outer))
                 if (Math.Abs(angle) <= Math.PI / 2 && CoefficientsAt(angle).Lift is var lift && lift > largest)
                     (largest, at) = (lift, angle);
         // A shape-preserving cubic is largest at a row; a blend of two, each of them falling while the other rises, need not be.
@@ -87,12 +87,10 @@ internal readonly struct Annulus
     }
 
     /// <summary>rad that an angle of attack may rise before the least angle of largest lift of the tables; negative beyond it.</summary>
-    public double BelowStall(double angleOfAttack)
-        => (OuterWeight == 0 ? Inner.LeastStallAngle : Math.Min(Inner.LeastStallAngle, Outer.LeastStallAngle)) - angleOfAttack;
+    public double BelowStall(double angleOfAttack) => Least(static table => table.LeastStallAngle) - angleOfAttack;
 
     /// <summary>rad that an angle of attack may rise before a table lifts; negative where one does.</summary>
-    public double BelowLift(double angleOfAttack)
-        => (OuterWeight == 0 ? Inner.LeastLiftingAngle : Math.Min(Inner.LeastLiftingAngle, Outer.LeastLiftingAngle)) - angleOfAttack;
+    public double BelowLift(double angleOfAttack) => Least(static table => table.LeastLiftingAngle) - angleOfAttack;
 
     public double LossAt(double absoluteSine) => LossFactor.Of(TipExponent, absoluteSine) * LossFactor.Of(HubExponent, absoluteSine);
 
@@ -102,13 +100,28 @@ internal readonly struct Annulus
 
     public bool IsOutsideReynolds => InnerPlace.Outside || (OuterWeight > 0 && OuterPlace.Outside);
 
+    // The least over all tables that serve here: what rises in each of them rises in their blend.
+    private double Least(Func<SectionTable, double> angleOf)
+    {
+        var least = angleOf(Inner);
+        if (OuterWeight > 0)
+            least = Math.Min(least, angleOf(Outer));
+        if (Augmentation.IsNone)
+            return least;
+        least = Math.Min(least, angleOf(Inner.Augmented));
+        return OuterWeight > 0 ? Math.Min(least, angleOf(Outer.Augmented)) : least;
+    }
+
+    // An augmented table has the rows of the plain one, and perhaps more.
+    private ReadOnlySpan<double> KnotsOf(SectionTable table) => Augmentation.IsNone ? table.Knots : table.Augmented.Knots;
+
     // In the spans to the next row on either side, by golden sections.
     private double TopBeside(double row, double lift)
     {
         const double Tolerance = 1e-7, GoldenShare = 0.6180339887498949;
         var (below, above) = (-Math.PI / 2, Math.PI / 2);
         for (var side = 0; side < (OuterWeight == 0 ? 1 : 2); side++)
-            foreach (var angle in (side == 0 ? Inner : Outer).Knots)
+            foreach (var angle in KnotsOf(side == 0 ? Inner : Outer))
                 if (angle < row)
                     below = Math.Max(below, angle);
                 else if (angle > row)

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Rotor.Sections;
+using BladeLoads.Rotor.Tests.Properties;
 using MathNet.Numerics.Interpolation;
 
 namespace BladeLoads.Rotor.Tests.Operation;
@@ -34,6 +35,31 @@ public sealed class StallMarginTests
         var plain = InventedRotor.Case(InventedRotor.VariableSpeed(), [6, 7, 8, 9, 10, 12]);
         AssertMargins(
             plain with { Sections = SectionSet.Of([Section.FromPolars("inboard", polars), Section.FromPolars("outboard", polars)]) }, [.. polars]);
+    }
+
+    [Theory]
+    [InlineData(Augmentation.Snel1993)]
+    [InlineData(Augmentation.DuSelig1998)]
+    public void Where_lift_is_augmented_it_is_that_of_the_augmented_table(Augmentation method)
+    {
+        // A blade four times as broad as usual, so that much is augmented up to 0.8 of the radius; its lift falls slowly beyond stall.
+        var plain = InventedRotor.Case(InventedRotor.VariableSpeed(), [6, 9, 12], dropWidthDeg: 60, solidityFactor: 4);
+        var polar = InventedRotor.PolarByFormula(dropWidthDeg: 60);
+        var lift = CubicSpline.InterpolatePchipSorted([.. polar.Angles], [.. polar.Lift]);
+        var (angles, lifts, _) = IndependentAugmentation.Full(polar);
+        var full = CubicSpline.InterpolatePchipSorted(angles, lifts);
+        foreach (var point in InventedRotor.Solve(plain with { Augmentation = method }))
+        {
+            var least = point.Elements.Where(e => e.Radius >= 20).Min(e =>
+            {
+                var (share, _) = IndependentAugmentation.Factors(
+                    method, e.Chord / e.Radius, e.Radius / 40, point.Operation.WindSpeed, point.Operation.RotorSpeed * 40);
+                double Lift(double angle) => lift.Interpolate(angle) + (share * (full.Interpolate(angle) - lift.Interpolate(angle)));
+                var about = Enumerable.Range(-900, 1801).Select(i => double.DegreesToRadians(0.1 * i)).MaxBy(Lift);
+                return Enumerable.Range(-200, 401).Select(i => about + (i * GridStep)).MaxBy(Lift) - e.AngleOfAttack;
+            });
+            Assert.Equal(least, point.Margins!.StallMargin, GridStep);
+        }
     }
 
     private static void AssertMargins(RotorCase rotorCase, params Polar[] polars)

@@ -1,4 +1,5 @@
 using BladeLoads.Rotor.Operation;
+using BladeLoads.Rotor.Sections;
 
 namespace BladeLoads.Rotor.Tests.Operation;
 
@@ -7,18 +8,21 @@ public sealed class StrategyTests
 {
     private static readonly double[] Winds = [.. Enumerable.Range(6, 40).Select(i => 0.5 * i)];
 
-    private static PowerCurve Solve(Control control, double dropWidthDeg = 20, double cutIn = 0)
-        => CaseSolver.Solve(InventedRotor.Case(control, Winds, dropWidthDeg: dropWidthDeg, cutIn: cutIn), default);
+    private static PowerCurve Solve(
+        Control control, double dropWidthDeg = 20, double cutIn = 0, Augmentation augmentation = Augmentation.None)
+        => CaseSolver.Solve(InventedRotor.Case(control, Winds, dropWidthDeg: dropWidthDeg, cutIn: cutIn) with { Augmentation = augmentation }, default);
 
     [Theory]
-    [InlineData(20)]
-    [InlineData(2)]
-    public void Thrust_never_exceeds_its_limit_and_pitch_is_the_smallest_that_holds_it(double dropWidthDeg)
+    [InlineData(20, Augmentation.None)]
+    [InlineData(2, Augmentation.None)]
+    [InlineData(20, Augmentation.DuSelig1998)]
+    [InlineData(2, Augmentation.Snel1993)]
+    public void Thrust_never_exceeds_its_limit_and_pitch_is_the_smallest_that_holds_it(double dropWidthDeg, Augmentation augmentation)
     {
         const double Limit = 160e3;
-        var curve = Solve(InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9, thrustLimit: Limit), dropWidthDeg);
+        var curve = Solve(InventedRotor.VariableSpeed(1.5e6, 2, maxRotorSpeed: 1.9, thrustLimit: Limit), dropWidthDeg, augmentation: augmentation);
         Assert.Contains(curve.Points, p => p.Region == Region.ThrustLimit);
-        var model = new RotorModel(InventedRotor.Case(InventedRotor.VariableSpeed(), Winds, dropWidthDeg: dropWidthDeg));
+        var model = new RotorModel(InventedRotor.Case(InventedRotor.VariableSpeed(), Winds, dropWidthDeg: dropWidthDeg) with { Augmentation = augmentation });
         foreach (var point in curve.Points)
         {
             Assert.True(point.Loads!.Thrust <= Limit * (1 + 1e-6));

@@ -89,6 +89,24 @@ public class SectionsTests
             study.Doubts);
     }
 
+    [Fact]
+    public void A_blade_by_thickness_is_extended_table_by_table_before_it_is_interpolated()
+    {
+        var only = Study("extend = \"viterna-1982\"\naugment = \"snel-1993\"")
+            .With("blades/fell.csv", "radius_m,chord_m,twist_deg,thickness_ratio\n1,0.8,12,0.4\n3,0.6,5,0.3\n5,0.4,1,0.2\n")
+            .With("polars/clean/set.toml", "[thickness_ratio]\nroot = 0.4\ntip = 0.2\n").OnlyCase();
+
+        Assert.Equal(Augmentation.Snel1993, only.Rotor.Augmentation);
+        var tip = PolarExtension.Extend(Plain().Polars[0], 16 / 2.4, ExtensionJoin.End).Polar;
+        var family = only.Rotor.Sections.Family!;
+        Assert.Equal(tip.Lift.ToArray(), family.Members[0].Section.Polars[0].Lift.ToArray());
+        var between = family.At(0.3).Polars[0];
+        Assert.Equal((-Math.PI, Math.PI), (between.Angles[0], between.Angles[^1]));
+        // The mean of the tip's plate across the wind and the root's cubic there: half way from 0.01, flat, to 0.02, rising 0.02 in a half turn.
+        var across = between.Angles.IndexOf(Math.PI / 2);
+        Assert.Equal((1.11 + (0.018 * 16 / 2.4) + 0.015 - (0.02 / 8)) / 2, between.Drag[across], 1e-9);
+    }
+
     [Theory]
     [InlineData("extend = \"viterna\"", "1:10: extend is 'viterna'; write \"viterna-1982\" or \"none\"")]
     [InlineData("extend = true", "1:10: extend is true; give text in quotes, such as \"viterna-1982\"")]
