@@ -1,4 +1,5 @@
 using BladeLoads.Rotor.Sections;
+using MathNet.Numerics.Interpolation;
 
 namespace BladeLoads.Rotor.Tests.Sections;
 
@@ -87,5 +88,23 @@ public sealed class SectionTableTests
         double[] angles = [.. Enumerable.Range(0, random.Next(3, 60)).Select(_ => random.NextDouble() * 2 * Math.PI - Math.PI).Distinct().Order()];
         return Polar.FromRows(
             reynolds, angles, [.. angles.Select(_ => (random.NextDouble() * 4) - 2)], [.. angles.Select(_ => random.NextDouble())]);
+    }
+
+    // Between rows by the same interpolant of MathNet.Numerics, between Reynolds numbers half way by hand.
+    [Fact]
+    public void A_section_by_itself_gives_what_the_solver_takes()
+    {
+        double[] angles = [Rad(-10), Rad(-2), Rad(0), Rad(7), Rad(10), Rad(15)];
+        double[] lift = [-0.7, 0.1, 0.35, 1.1, 1.25, 0.9];
+        double[] drag = [0.03, 0.009, 0.008, 0.011, 0.02, 0.15];
+        var section = Section.FromPolars("a", [Polar.FromRows(1e6, angles, lift, drag), Polar.FromRows(4e6, angles, [.. lift.Select(l => 1.2 * l)], drag)]);
+        var (expectedLift, expectedDrag) = (CubicSpline.InterpolatePchip(angles, lift), CubicSpline.InterpolatePchip(angles, drag));
+        foreach (var deg in new[] { -9.3, -1, 3.3, 8.1, 12.7 })
+        {
+            Assert.Equal(expectedLift.Interpolate(Rad(deg)), section.At(Rad(deg), 1e6).Lift, 1e-12);
+            Assert.Equal(expectedDrag.Interpolate(Rad(deg)), section.At(Rad(deg), 4e6).Drag, 1e-12);
+            Assert.Equal(1.1 * expectedLift.Interpolate(Rad(deg)), section.At(Rad(deg), 2e6).Lift, 1e-12);
+        }
+        Assert.Equal(new Coefficients(0.9, 0.15), section.At(Rad(100), 5e5));
     }
 }
