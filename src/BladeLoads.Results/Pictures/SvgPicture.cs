@@ -34,7 +34,10 @@ internal static class SvgPicture
         using var finished = new MemoryStream();
         var settings = new XmlWriterSettings
         {
-            Encoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false), Indent = true, IndentChars = "", NewLineChars = "\n",
+            Encoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false),
+            Indent = true,
+            IndentChars = "",
+            NewLineChars = "\n",
         };
         using (var writer = XmlWriter.Create(finished, settings))
             root.Save(writer);
