@@ -54,6 +54,20 @@ public sealed partial class Disk : IDisk
         }
     }
 
+    public bool TryPlace(string from, string to)
+    {
+        try
+        {
+            // By a hard link where there are any, which in one step refuses a name that is taken.
+            File.Move(from, to, overwrite: false);
+            return true;
+        }
+        catch (IOException) when (Path.Exists(to) || new FileInfo(to).LinkTarget is not null)
+        {
+            return false;
+        }
+    }
+
     public bool TryExchange(string one, string other)
     {
         if (!OperatingSystem.IsLinux())

@@ -18,6 +18,9 @@ public interface IDisk
     /// <summary>Renames; a file replaces a file. False where a folder stands at the new place.</summary>
     bool TryRename(string from, string to);
 
+    /// <summary>Renames a file to a path where nothing stands. False where something does, even if it came a moment ago.</summary>
+    bool TryPlace(string from, string to);
+
     /// <summary>Exchanges two folders in one step. False where the file system cannot.</summary>
     bool TryExchange(string one, string other);
 

@@ -1,4 +1,4 @@
-using System.Globalization;
+using BladeLoads.Studies.Tables;
 using CsvHelper;
 
 namespace BladeLoads.Results.Tables;
@@ -18,9 +18,6 @@ internal sealed class TableWriter : IDisposable
         InjectionCharacters = "=+-@\t\r\n",
     };
 
-    // Beyond these digits stands what a conversion of units left over: 21.999999999999996 for 22.
-    private const string Digits = "G12";
-
     private readonly MemoryStream _bytes = new();
     private readonly CsvWriter _csv;
 
@@ -37,13 +34,10 @@ internal sealed class TableWriter : IDisposable
     public void Number(double? value)
     {
         if (value is { } number && double.IsFinite(number))
-            _csv.WriteField(number == 0 ? 0.0 : Rounded(number));   // -0 would read as a difference between two equal results
+            _csv.WriteField(TwelveDigits.Of(number));   // -0 would read as a difference between two equal results
         else
             _csv.WriteField((string?)null);
     }
-
-    private static double Rounded(double number)
-        => double.Parse(number.ToString(Digits, CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
 
     public void EndRow() => _csv.EndRecord();
 

@@ -1,5 +1,3 @@
-using System.Globalization;
-
 namespace BladeLoads.Studies.Files;
 
 /// <summary>The files of one study. Nothing outside the study folder is read, whatever a reference or a link says.</summary>
@@ -10,8 +8,6 @@ internal sealed class StudyFolder
 
     /// <summary>MiB. A case of ten thousand wind speeds and as many variants is smaller.</summary>
     public const int LargestCase = 1;
-
-    private const int BytesPerMebibyte = 1024 * 1024;
 
     private readonly IStudyFiles _files;
     private readonly string _realRoot;
@@ -51,41 +47,11 @@ internal sealed class StudyFolder
     {
         var file = RelativePath(fullPath);
         if (LinkProblem(fullPath) is { } link)
-            return Refuse($"{link}; put the file itself inside the study folder");
-        var kind = _files.Kind(fullPath);
-        if (kind != EntryKind.File)
-            return Refuse(kind switch
-            {
-                EntryKind.Folder => "is a folder; put a file in its place",
-                EntryKind.Missing => "is gone, or a link that leads nowhere",
-                _ => "is not a regular file; put a file in its place",
-            });
-        try
         {
-            var bytes = _files.Read(fullPath, largest * BytesPerMebibyte + 1);
-            return bytes.Length > largest * BytesPerMebibyte
-                ? Refuse($"is larger than {largest.ToString(CultureInfo.InvariantCulture)} MiB, the most that is read; "
-                    + "it seems to be another kind of file")
-                : InputText.FromBytes(file, bytes, report);
-        }
-        catch (UnauthorizedAccessException)
-        {
-            return Refuse("cannot be read: no permission");
-        }
-        catch (Exception e) when (e is FileNotFoundException or DirectoryNotFoundException)
-        {
-            return Refuse("was there and is gone; read the study again");
-        }
-        catch (IOException e)
-        {
-            return Refuse($"cannot be read: {e.Message}");
-        }
-
-        InputText? Refuse(string why)
-        {
-            report(new InputFinding(file, 0, 0, why));
+            report(new InputFinding(file, 0, 0, $"{link}; put the file itself inside the study folder"));
             return null;
         }
+        return NamedFile.Read(_files, fullPath, file, largest, report) is { } bytes ? InputText.FromBytes(file, bytes, report) : null;
     }
 
     /// <summary>Names in a folder, ordinal; empty where there is no folder to read.</summary>

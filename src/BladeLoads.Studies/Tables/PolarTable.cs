@@ -20,6 +20,9 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
     /// <summary>What is doubtful about the table; to be raised once a blade names its section.</summary>
     public ImmutableArray<InputFinding> Doubts { get; init; } = [];
 
+    /// <summary>Gives the rows in the units of the file, moments among them; of a table without errors.</summary>
+    public Func<ImmutableArray<PolarRows>> Rows { get; init; } = () => [];
+
     private static readonly ImmutableArray<Column> Columns =
         [new("reynolds", false), new("alpha_deg", true), new("cl", true), new("cd", true), new("cm", false)];
 
@@ -41,6 +44,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             new InputFile(input.File, input.Sha256, section is null ? "polar table with errors" : Contents(blocks)))
         {
             Doubts = section is null ? [] : [.. DoubtsOf(blocks)],
+            Rows = () => section is null ? [] : [.. blocks.Select(block => block.ToRows())],
         };
     }
 
@@ -64,12 +68,11 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         var drag = rows.Number("cd");
         if (drag < 0)
             rows.Error("cd", $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0");
-        if (rows.Has("cm"))
-            rows.Number("cm");
+        var moment = rows.Has("cm") ? rows.Number("cm") : double.NaN;
         block.Rows++;
         if (double.IsNaN(angle))
             return;
-        block.Add(angle, lift, drag, rows.Line);
+        block.Add(new PolarRow(angle, lift, drag, moment), rows.Line);
         if (angle is -180 or 180)
             block.LiftAtEnd.Add((lift, rows.Cell("cl")));
     }
@@ -148,6 +151,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
     {
         private readonly List<double> _lift = [];
         private readonly List<double> _drag = [];
+        private readonly List<double> _moment = [];
 
         public double Reynolds { get; } = reynolds;
 
@@ -161,13 +165,17 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
 
         public List<(double Lift, Place At)> LiftAtEnd { get; } = [];
 
-        public void Add(double angle, double lift, double drag, int line)
+        public void Add(PolarRow row, int line)
         {
-            Angles.Add(angle);
-            _lift.Add(lift);
-            _drag.Add(drag);
+            Angles.Add(row.AngleDeg);
+            _lift.Add(row.Lift);
+            _drag.Add(row.Drag);
+            _moment.Add(row.Moment);
             LastLine = line;
         }
+
+        public PolarRows ToRows()
+            => new(Reynolds, [.. Angles.Select((angle, i) => new PolarRow(angle, _lift[i], _drag[i], _moment[i]))]);
 
         public Polar ToPolar() => Polar.FromRows(
             Reynolds, [.. Angles.Select(angle => Math.Clamp(double.DegreesToRadians(angle), -Math.PI, Math.PI))],

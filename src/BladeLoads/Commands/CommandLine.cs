@@ -4,6 +4,7 @@ using System.CommandLine.Invocation;
 using System.CommandLine.Parsing;
 using System.Globalization;
 using System.Reflection;
+using BladeLoads.Commands.Polar;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Operation;
@@ -78,8 +79,8 @@ internal static class CommandLine
     {
         action.ShowHelp = false;
         result.Invoke(Invocation(surroundings with { Out = surroundings.Error }));
-        var command = result.CommandResult.Command is RootCommand ? "" : result.CommandResult.Command.Name + " ";
-        surroundings.Error.WriteLine($"'bladeloads {command}--help' shows what can be asked, with examples");
+        var words = CommandWords.Of(result.CommandResult.Command);
+        surroundings.Error.WriteLine($"'bladeloads {words}{(words.Length == 0 ? "" : " ")}--help' shows what can be asked, with examples");
         return ExitCode.NothingCouldRun;
     }
 
@@ -91,6 +92,7 @@ internal static class CommandLine
         {
             Check(surroundings), Plan(surroundings), RunStudy(surroundings), CompareCommand.Define(surroundings),
             KeepCommand.Define(surroundings), VerifyCommand.Define(surroundings), TidyCommand.Define(surroundings),
+            PolarCommand.Define(surroundings),
         };
         root.Directives.Clear();   // a study may be named [suggest]
         foreach (var option in root.Options)

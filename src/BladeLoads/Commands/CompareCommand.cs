@@ -80,17 +80,12 @@ internal static class CompareCommand
         return moved.Changes.Any() || !moved.Marks.IsEmpty || moved.HasOtherWindSpeeds || !moved.Doubts.IsEmpty ? moved : null;
     }
 
-    // Beside its place first: a full disk must not leave half a table under the name that was asked for.
     private static bool Written(string file, byte[] bytes, Surroundings surroundings)
     {
-        var beside = $"{file}.{Guid.NewGuid():N}.part";
         try
         {
-            surroundings.Disk.Write(beside, bytes);
-            surroundings.Disk.Sync(beside);
-            if (surroundings.Disk.TryRename(beside, file))
+            if (WholeFile.Write(file, bytes, replace: true, surroundings.Disk))
                 return true;
-            surroundings.Disk.Delete(beside);
             surroundings.Error.WriteLine(Printable.Of($"cannot write {file}: a folder of that name is there"));
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)

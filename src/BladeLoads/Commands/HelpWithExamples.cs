@@ -51,6 +51,17 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads tidy inputs/tarn-valley --keep-last 1 --yes", "remove all replaced results but the last of each case"),
             ("bladeloads tidy inputs/tarn-valley --older-than 90d", "only what was replaced more than 90 days ago"),
         ],
+        ["polar scale"] =
+        [
+            ("bladeloads polar scale polars/clean --out polars/soiled --lift-slope 0.95 --largest-lift 0.9 --drag-floor 1.4", "a soiled set beside the clean one"),
+            ("bladeloads polar scale polars/clean --out polars/worn --drag-floor 2 --only 'tip-*'", "some of its sections; the others are copied"),
+            ("bladeloads polar scale polars/clean/t18.csv --out polars/soiled --largest-lift 0.85", "one table, into the folder of a set"),
+        ],
+        ["polar"] =
+        [
+            ("bladeloads polar scale polars/clean --out polars/soiled --largest-lift 0.9 --drag-floor 1.5", "soiled blades from clean ones"),
+            ("bladeloads polar scale --help", "the options of a command"),
+        ],
         [""] =
         [
             ("bladeloads check inputs/tarn-valley", "is the input right?"),
@@ -67,10 +78,9 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
     public override int Invoke(ParseResult parseResult)
     {
         usual.Invoke(parseResult);
-        var command = parseResult.CommandResult.Command;
         var output = parseResult.InvocationConfiguration.Output;
         output.WriteLine("Examples:");
-        foreach (var (line, what) in Examples[command is RootCommand ? "" : command.Name])
+        foreach (var (line, what) in Examples[CommandWords.Of(parseResult.CommandResult.Command)])
         {
             output.WriteLine($"  {line}");
             output.WriteLine($"      {what}");

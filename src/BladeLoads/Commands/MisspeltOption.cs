@@ -21,7 +21,7 @@ internal static class MisspeltOption
                 continue;
             return Nearest.Of(token.Value, known) is { } near
                 ? Printable.Of($"unknown option '{token.Value}'; did you mean '{near}'?")
-                : Printable.Of($"unknown option '{token.Value}'; 'bladeloads {command.Name} --help' shows what there is; for a study of that name say './{token.Value}'");
+                : Printable.Of($"unknown option '{token.Value}'; 'bladeloads {CommandWords.Of(command)} --help' shows what there is; for a file or folder of that name say './{token.Value}'");
         }
         return null;
     }

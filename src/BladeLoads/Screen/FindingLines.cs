@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.Globalization;
 using BladeLoads.Results.Wording;
 using BladeLoads.Studies;
@@ -11,15 +12,21 @@ internal static class FindingLines
 
     /// <summary>All of them in file order, each beginning with its place; the source line and a caret below it where asked for.</summary>
     public static void Write(Study study, TextWriter output, bool withSource)
+        => Write(study.Errors, study.Doubts, study.Folder, output, withSource);
+
+    /// <summary>The same for findings outside a study.</summary>
+    /// <param name="folder">What the files of the findings are relative to.</param>
+    public static void Write(
+        ImmutableArray<InputFinding> errors, ImmutableArray<InputFinding> doubts, string folder, TextWriter output, bool withSource)
     {
-        var all = study.Errors.Select(e => (Finding: e, Word: ""))
-            .Concat(study.Doubts.Select(d => (Finding: d, Word: "doubt: ")))
+        var all = errors.Select(e => (Finding: e, Word: ""))
+            .Concat(doubts.Select(d => (Finding: d, Word: "doubt: ")))
             .OrderBy(f => f.Finding, FindingOrder.Instance);
         foreach (var (finding, word) in all)
         {
             output.WriteLine(Printable.Of($"{Place(finding)}: {word}{finding.Text}"));
             if (withSource)
-                foreach (var line in SourceExcerpt.Of(study.Folder, finding))
+                foreach (var line in SourceExcerpt.Of(folder, finding))
                     output.WriteLine(line);
         }
     }

@@ -42,6 +42,12 @@ internal sealed class FailingDisk(int refuseFrom, Func<Exception>? trouble = nul
         return _disk.TryRename(from, to);
     }
 
+    public bool TryPlace(string from, string to)
+    {
+        Step();
+        return _disk.TryPlace(from, to);
+    }
+
     public bool TryExchange(string one, string other)
     {
         if (!canExchange)

@@ -61,6 +61,12 @@ internal sealed class MisfortuneDisk(int at, Misfortune misfortune, bool canExch
         return _disk.TryRename(from, to);
     }
 
+    public bool TryPlace(string from, string to)
+    {
+        Count();
+        return _disk.TryPlace(from, to);
+    }
+
     public bool TryExchange(string one, string other)
     {
         if (!canExchange)

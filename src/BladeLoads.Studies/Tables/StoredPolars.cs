@@ -1,0 +1,63 @@
+using System.Collections.Immutable;
+using BladeLoads.Rotor.Sections;
+using BladeLoads.Studies.Files;
+
+namespace BladeLoads.Studies.Tables;
+
+/// <summary>A polar table of ours by itself, outside any study: what makes a new table from one reads it so.</summary>
+/// <param name="SectionName">The name of the file without its ending.</param>
+/// <param name="Head">The comment lines above the column names, without their marks.</param>
+/// <param name="Polars">The rows as they stand in the file, by Reynolds number.</param>
+/// <param name="Section">The same, prepared for the rotor.</param>
+/// <param name="Bytes">The file as it is.</param>
+/// <param name="Sha256">Of the bytes, 64 lower-case hexadecimal digits.</param>
+public sealed record StoredPolars(
+    string SectionName, ImmutableArray<string> Head, ImmutableArray<PolarRows> Polars, Section Section, ReadOnlyMemory<byte> Bytes,
+    string Sha256)
+{
+    /// <summary>Reads a table; null, with what is wrong, where it is none.</summary>
+    /// <param name="path">As the user wrote it; findings name the file so.</param>
+    public static StoredPolars? Read(string path, IStudyFiles files, out ImmutableArray<InputFinding> errors)
+    {
+        var findings = new Findings();
+        var bytes = NamedFile.Read(files, Path.GetFullPath(path), path, StudyFolder.LargestTable, findings.Error);
+        var table = bytes is null ? null : FromBytes(path, bytes, findings);
+        errors = findings.Errors;
+        return table;
+    }
+
+    /// <summary>The table in the bytes of a file; null, with what is wrong, where there is none.</summary>
+    public static StoredPolars? FromBytes(string path, byte[] bytes, out ImmutableArray<InputFinding> errors)
+    {
+        var findings = new Findings();
+        var table = FromBytes(path, bytes, findings);
+        errors = findings.Errors;
+        return table;
+    }
+
+    private static StoredPolars? FromBytes(string path, byte[] bytes, Findings findings)
+    {
+        if (InputText.FromBytes(path, bytes, findings.Error) is not { } input)
+            return null;
+        var name = Path.GetFileNameWithoutExtension(path);
+        var table = PolarTable.Parse(name, input, findings);
+        return table.Section is null
+            ? null
+            : new StoredPolars(name, HeadOf(input.Text), table.Rows(), table.Section, bytes, input.Sha256);
+    }
+
+    private static ImmutableArray<string> HeadOf(string text)
+    {
+        var head = ImmutableArray.CreateBuilder<string>();
+        foreach (var line in text.AsSpan().EnumerateLines())
+        {
+            var trimmed = line.Trim();
+            if (trimmed.IsEmpty)
+                continue;
+            if (trimmed[0] != '#')
+                break;
+            head.Add(trimmed[1..].Trim().ToString());
+        }
+        return head.ToImmutable();
+    }
+}

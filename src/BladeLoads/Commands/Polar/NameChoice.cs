@@ -1,0 +1,11 @@
+using System.Collections.Immutable;
+using System.IO.Enumeration;
+
+namespace BladeLoads.Commands.Polar;
+
+/// <summary>Which sections are meant: all, or those whose name matches a pattern; <c>*</c> is any text, <c>?</c> one character.</summary>
+internal readonly record struct NameChoice(ImmutableArray<string> Patterns)
+{
+    public bool Includes(string name) => Patterns.IsEmpty || Patterns.Any(pattern => FileSystemName.MatchesSimpleExpression(
+        pattern.Replace(@"\", @"\\", StringComparison.Ordinal), name, ignoreCase: false));
+}

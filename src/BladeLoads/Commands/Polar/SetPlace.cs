@@ -1,0 +1,83 @@
+using System.Collections.Immutable;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Results.Wording;
+
+namespace BladeLoads.Commands.Polar;
+
+/// <summary>
+/// Where the tables that a command makes go: a whole set becomes a folder of its own, a single table a file in the folder of one.
+/// </summary>
+/// <param name="Folder">As asked for.</param>
+/// <param name="Source">What the tables are made from; it always stays.</param>
+internal sealed record SetPlace(string Folder, string Source, bool IsWholeSet, bool Replace)
+{
+    private const int NamesShown = 4;
+
+    /// <param name="names">Of the files that are to be written.</param>
+    /// <exception cref="WrongUseException">Nothing can be written there: the message says why, and what would do.</exception>
+    public void Check(ImmutableArray<string> names)
+    {
+        if (Folder.Length == 0)
+            throw new WrongUseException("--out is empty; give the folder of the set that is to be made");
+        var folder = Path.TrimEndingDirectorySeparator(Path.GetFullPath(Folder));
+        var source = Path.TrimEndingDirectorySeparator(Path.GetFullPath(IsWholeSet ? Source : Path.GetDirectoryName(Path.GetFullPath(Source))!));
+        if (Real(folder) == Real(source))
+            throw new WrongUseException($"'{Folder}' holds what is read, which stays as it is; give the folder of another set");
+        if (new FileInfo(folder).LinkTarget is not null)
+            throw new WrongUseException($"'{Folder}' is a link; give the folder itself");
+        if (File.Exists(folder))
+            throw new WrongUseException($"'{Folder}' is a file; give a folder");
+        if (Path.GetDirectoryName(folder) is not { } above || !Directory.Exists(above))
+            throw new WrongUseException($"there is no folder for '{Folder}' to stand in; make it first");
+        if (!Directory.Exists(folder))
+            return;
+        if (!IsWholeSet)
+            CheckTable(Path.Join(folder, names[0]));
+        else if (!Replace)
+            throw new WrongUseException($"there is a folder '{Folder}' already; give another, or put the new set in its place with --replace");
+        else if (Strangers(folder, names) is { Length: > 0 } strangers)
+            throw new WrongUseException(
+                $"'{Folder}' holds what the new set does not: {string.Join(", ", strangers.Take(NamesShown))}"
+                + (strangers.Length > NamesShown ? $" and {strangers.Length - NamesShown} more" : "") + "; a set that takes its place would lose it");
+    }
+
+    /// <summary>Whole or not at all; false, and told, where the disk refuses.</summary>
+    public bool Write(ImmutableArray<ResultContent> files, Surroundings surroundings)
+    {
+        try
+        {
+            var written = IsWholeSet
+                ? WholeFolder.Write(Folder, files, Replace, surroundings.Disk)
+                : WriteTable(files[0], surroundings.Disk);
+            if (!written)
+                surroundings.Error.WriteLine(Printable.Of($"cannot write {Folder}: something stands there that cannot give way"));
+            return written;
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            surroundings.Error.WriteLine(Printable.Of($"cannot write {Folder}: {DiskTrouble.Reason(e)}"));
+            return false;
+        }
+    }
+
+    private bool WriteTable(ResultContent file, IDisk disk)
+    {
+        disk.CreateFolder(Folder);
+        return WholeFile.Write(Path.Join(Folder, file.Name), file.Bytes.Span, Replace, disk);
+    }
+
+    private void CheckTable(string path)
+    {
+        if (Directory.Exists(path) || new FileInfo(path).LinkTarget is not null)
+            throw new WrongUseException($"'{Path.Join(Folder, Path.GetFileName(path))}' is a folder or a link; a table is a file");
+        if (File.Exists(path) && !Replace)
+            throw new WrongUseException(
+                $"there is a table '{Path.Join(Folder, Path.GetFileName(path))}' already; give another folder, or put the new one in its place with --replace");
+    }
+
+    private static ImmutableArray<string> Strangers(string folder, ImmutableArray<string> names)
+        => [.. Directory.EnumerateFileSystemEntries(folder).Select(path => Path.GetFileName(path))
+            .Where(name => !names.Contains(name)).Order(StringComparer.Ordinal)];
+
+    private static string Real(string path) => new Studies.Files.DiskFiles().RealPath(path);
+}
