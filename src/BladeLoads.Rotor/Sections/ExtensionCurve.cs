@@ -29,7 +29,7 @@ internal sealed class ExtensionCurve
     public ExtensionCurve(Polar polar, double largestDrag, ExtensionJoin join)
     {
         (_polar, _largestDrag) = (polar, largestDrag);
-        _floor = PolarExtension.PlateFriction(polar.Reynolds);
+        _floor = PlateFriction.Laminar(polar.Reynolds);
         (_stallAbove, _stallBelow) = (StallPoint.Above(polar), StallPoint.Below(polar));
         var last = polar.Angles.Length - 1;
         var stall = _stallAbove ?? LastBelowRightAngle();
