@@ -23,6 +23,9 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
     /// <summary>Gives the rows in the units of the file, moments among them; of a table without errors.</summary>
     public Func<ImmutableArray<PolarRows>> Rows { get; init; } = () => [];
 
+    /// <summary>Gives the lines in the file on which those rows stand.</summary>
+    public Func<ImmutableArray<ImmutableArray<int>>> RowLines { get; init; } = () => [];
+
     private static readonly ImmutableArray<Column> Columns =
         [new("reynolds", false), new("alpha_deg", true), new("cl", true), new("cd", true), new("cm", false)];
 
@@ -45,6 +48,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         {
             Doubts = section is null ? [] : [.. DoubtsOf(blocks)],
             Rows = () => section is null ? [] : [.. blocks.Select(block => block.ToRows())],
+            RowLines = () => section is null ? [] : [.. blocks.Select(block => block.RowLines)],
         };
     }
 
@@ -152,6 +156,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         private readonly List<double> _lift = [];
         private readonly List<double> _drag = [];
         private readonly List<double> _moment = [];
+        private readonly List<int> _line = [];
 
         public double Reynolds { get; } = reynolds;
 
@@ -159,7 +164,9 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
 
         public int Rows { get; set; }
 
-        public int LastLine { get; private set; } = at.Line;
+        public int LastLine => _line is [.., var last] ? last : At.Line;
+
+        public ImmutableArray<int> RowLines => [.. _line];
 
         public List<double> Angles { get; } = [];
 
@@ -171,7 +178,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             _lift.Add(row.Lift);
             _drag.Add(row.Drag);
             _moment.Add(row.Moment);
-            LastLine = line;
+            _line.Add(line);
         }
 
         public PolarRows ToRows()
