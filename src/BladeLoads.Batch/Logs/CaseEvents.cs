@@ -1,5 +1,6 @@
 using BladeLoads.Batch.Work;
 using BladeLoads.Results.Receipts;
+using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Studies;
 using Serilog;
@@ -37,8 +38,15 @@ internal static class CaseEvents
     {
         if (summary.RatedWindSpeed is { } rated)
             log.Information("Case {Case} reaches rated power at {RatedWindSpeed:0.###} m/s", studyCase.Name, rated);
+        else if (summary.Marks.ContainsKey(StatusWords.Of(PointMarks.RatedNotReached)))
+            log.RatedNotReached(studyCase, summary);
         else
             log.Information("Case {Case} has no rated wind speed", studyCase.Name);
+        if (summary.Marks.TryGetValue(StatusWords.Of(PointMarks.ThrustNotHeld), out var unheld))
+            log.Warning(
+                "Case {Case}: at {Unheld} of {Points} points thrust is above its limit even with the blades feathered; they are marked "
+                + "'thrust-not-held' and stand at the pitch with the least thrust; raise thrust_limit_kN, or lower the cut-out wind speed",
+                studyCase.Name, unheld, summary.Points);
         if (summary.Best is { Searched: true } best)
             log.Information(
                 "Case {Case} runs best at tip-speed ratio {TipSpeedRatio:0.####}, pitch {PitchDeg:0.####} deg: power coefficient {PowerCoefficient:0.#####}",
@@ -56,6 +64,13 @@ internal static class CaseEvents
                 + "they are marked 'unbalanced' and left blank",
                 studyCase.Name, summary.UnbalancedPoints, summary.Points);
     }
+
+    private static void RatedNotReached(this ILogger log, StudyCase studyCase, CaseSummary summary)
+        => log.Warning(
+            "Case {Case} never makes its rated power of {Rated:0.###} kW: the most is {Most:0.###} kW, at {WindSpeed:0.###} m/s, and the row with the "
+            + "most is marked 'rated-not-reached'; see which of rated power, rotor-speed limit, fine pitch, thrust limit and efficiency is not meant so",
+            studyCase.Name, studyCase.Rotor.Control.RatedPower / 1e3, summary.LargestElectricalPower?.Value / 1e3,
+            summary.LargestElectricalPower?.WindSpeed);
 
     public static void Reused(this ILogger log, StudyCase studyCase, string from)
         => log.Information("Case {Case} has a result of its very values already, from {From}; not solved again", studyCase.Name, from);

@@ -3,6 +3,7 @@ using System.Collections.Immutable;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Receipts;
 using BladeLoads.Studies;
+using BladeLoads.Studies.Cases;
 using BladeLoads.Studies.Fingerprints;
 
 namespace BladeLoads.Batch.Plan;
@@ -15,6 +16,7 @@ internal static class Differences
     // Told from the receipt's own field, in words of its own.
     private const string SolverKey = "solver";
     private const string SectionPrefix = "section.";
+    private const string AirPrefix = "air.";
 
     /// <summary>All reasons, the solver first, then values by key; none where the result was made from these values by this solver.</summary>
     public static ImmutableArray<StaleReason> Between(Receipt receipt, StudyCase now, ResultsFolder results, int solverVersion)
@@ -39,13 +41,23 @@ internal static class Differences
         IReadOnlyDictionary<string, string> was, IReadOnlyDictionary<string, string> now, ImmutableArray<CanonicalTable> tables,
         Func<string, string?> earlierTable)
     {
-        foreach (var key in was.Keys.Union(now.Keys, StringComparer.Ordinal).Order(StringComparer.Ordinal))
-        {
-            var from = was.GetValueOrDefault(key);
-            var to = now.GetValueOrDefault(key);
-            if (from != to && key != SolverKey)
-                yield return OfValue(key, from, to, tables, earlierTable);
-        }
+        var reasons = was.Keys.Union(now.Keys, StringComparer.Ordinal).Order(StringComparer.Ordinal)
+            .Where(key => key != SolverKey && was.GetValueOrDefault(key) != now.GetValueOrDefault(key))
+            .Select(key => (Key: key, Reason: OfValue(key, was.GetValueOrDefault(key), now.GetValueOrDefault(key), tables, earlierTable)))
+            .ToLookup(r => r.Key.StartsWith(AirPrefix, StringComparison.Ordinal));
+        // The keys of the air come before all others of a case: the order is still that of the keys.
+        return OfAir([.. reasons[true]], now).Concat(reasons[false].Select(r => r.Reason));
+    }
+
+    // What someone wrote comes first; what follows from it is told as following, with the same keys, after all that was written.
+    private static IEnumerable<StaleReason> OfAir(ImmutableArray<(string Key, StaleReason Reason)> ofAir, IReadOnlyDictionary<string, string> now)
+    {
+        bool Follows((string Key, StaleReason Reason) r) => r.Reason is StaleReason.ValueChanged && DerivedAir.IsDerived(r.Key, now);
+        var written = ofAir.Where(r => !Follows(r)).Select(r => r.Reason).ToList();
+        // Where nothing was written, they follow from another version of the program alone.
+        if (written.Count == 0 || written.Count == ofAir.Length)
+            return ofAir.Select(r => r.Reason);
+        return written.Append(new StaleReason.AirFollowed([.. ofAir.Where(Follows).Select(r => (StaleReason.ValueChanged)r.Reason)]));
     }
 
     private static StaleReason OfValue(string key, string? from, string? to, ImmutableArray<CanonicalTable> tables, Func<string, string?> earlierTable) => (from, to) switch

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using BladeLoads.Results.Wording;
+using BladeLoads.Studies.Cases;
 
 namespace BladeLoads.Batch.Plan;
 
@@ -27,6 +28,39 @@ public abstract record StaleReason
     public sealed record ValueRemoved(string Key, string From) : StaleReason
     {
         public override string Sentence => Printable.Of($"{Key} is gone, was {Shortened(From)}");
+    }
+
+    /// <summary>Values of the air that follow from others, which are told before, are others too.</summary>
+    public sealed record AirFollowed(ImmutableArray<ValueChanged> Values) : StaleReason
+    {
+        public override string Sentence => Printable.Of($"so {string.Join(", ", Values.Select(Phrase))}");
+
+        private static string Phrase(ValueChanged value)
+        {
+            var (name, unit) = value.Key switch
+            {
+                DerivedAir.Density => ("density", "kg/m3"),
+                DerivedAir.Viscosity => ("viscosity", "Pa s"),
+                DerivedAir.SpeedOfSound => ("speed of sound", "m/s"),
+                _ => (value.Key, ""),
+            };
+            var (from, to) = Rounded(value.From, value.To);
+            return $"{name} {from} -> {to} {unit}".TrimEnd();
+        }
+
+        // To as few digits, from four up, as tell them apart; nobody wrote the others.
+        private static (string From, string To) Rounded(string from, string to)
+        {
+            if (!double.TryParse(from, NumberStyles.Float, CultureInfo.InvariantCulture, out var old)
+                || !double.TryParse(to, NumberStyles.Float, CultureInfo.InvariantCulture, out var now))
+                return (Shortened(from), Shortened(to));
+            for (var digits = 4; digits < 15; digits++)
+                if ((Text(old, digits), Text(now, digits)) is var texts && texts.Item1 != texts.Item2)
+                    return texts;
+            return (from, to);
+        }
+
+        private static string Text(double value, int digits) => value.ToString($"G{digits}", CultureInfo.InvariantCulture).Replace('E', 'e');
     }
 
     /// <summary>A table holds other numbers, and it is known which.</summary>

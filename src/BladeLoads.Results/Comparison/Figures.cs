@@ -26,9 +26,6 @@ public static class Figures
     public const string ElectricalPower = "electrical_power_kW";
     public const string Thrust = "thrust_kN";
 
-    // Power held at rated is the same at many wind speeds but for the last digits of a root finder; the summary has the same rule.
-    private const double SameWithin = 1e-9;
-
     // A rotor that stands still outside its wind speeds of operation counts for no largest figure, as in the summary.
     private static readonly string[] AtRest = [StatusWords.Of(PointMarks.BelowCutIn), StatusWords.Of(PointMarks.AboveCutOut)];
 
@@ -63,6 +60,6 @@ public static class Figures
         if (found.Count == 0)
             return null;
         var largest = found.Max(f => size(f.Value));
-        return found.First(f => size(f.Value) >= largest - SameWithin * Math.Abs(largest));
+        return found.First(f => size(f.Value) >= largest - (DesignPoint.FlatWithin * Math.Abs(largest)));
     }
 }

@@ -59,6 +59,9 @@ public sealed record ResultsFolder(string Root, string StudyName)
     /// <summary>What a check of the polar tables found.</summary>
     public string Polars => Path.Join(Study, PolarsName);
 
+    /// <summary>Pictures of section tables, a folder a set.</summary>
+    public string Pictures => Path.Join(Study, PicturesName);
+
     /// <summary>What moved in the last run.</summary>
     public string Changes => Path.Join(Study, ChangesTable.FileName);
 
@@ -86,9 +89,10 @@ public sealed record ResultsFolder(string Root, string StudyName)
     private const string ReplacedName = "replaced";
     private const string KeptName = "kept";
     private const string PolarsName = "polars";
+    private const string PicturesName = "pictures";
 
     private static readonly HashSet<string> OwnNames = new(StringComparer.OrdinalIgnoreCase)
     {
-        LogsName, FailuresName, TablesName, ReplacedName, KeptName, PolarsName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
+        LogsName, FailuresName, TablesName, ReplacedName, KeptName, PolarsName, PicturesName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
     };
 }

@@ -36,10 +36,10 @@ public sealed record CaseSummary(
     /// <summary>Null for a case without a site.</summary>
     public EnergySummary? Energy { get; init; }
 
-    // Power held at rated is the same at many wind speeds but for the last digits of a root finder.
-    private const double SameWithin = 1e-9;
-
-    /// <summary>Where several points share the largest value, to 1e-9 of it, the first of them is taken.</summary>
+    /// <summary>
+    /// Where several points share the largest value, to <see cref="DesignPoint.FlatWithin"/> of it, the first of them is taken. The largest
+    /// thrust is that of the design point.
+    /// </summary>
     public static CaseSummary Of(PowerCurve curve)
     {
         CurvePoint[] points = [.. curve.Points.Concat(curve.DesignPoints.Select(d => d.Point)).Where(InOperation)
@@ -49,7 +49,7 @@ public sealed record CaseSummary(
             best,
             best is null ? null : points.First(p => p.Operation.WindSpeed == best.WindSpeed).Loads?.TipSpeedRatio,
             Largest(points, (_, electricalPower) => electricalPower, value => value),
-            Largest(points, (loads, _) => loads.Thrust, value => value),
+            ThrustOfDesignPoint(curve) ?? Largest(points, (loads, _) => loads.Thrust, value => value),
             curve.RatedWindSpeed,
             Largest(points, (loads, _) => loads.RootOutOfPlaneMoment, Math.Abs),
             Largest(points, (loads, _) => loads.RootInPlaneMoment, Math.Abs),
@@ -74,6 +74,11 @@ public sealed record CaseSummary(
 
     private static bool InOperation(CurvePoint point) => (point.Marks & (PointMarks.BelowCutIn | PointMarks.AboveCutOut)) == 0;
 
+    // Taken over, not sought again: design-points.csv and summary.csv name one place.
+    private static Extreme? ThrustOfDesignPoint(PowerCurve curve)
+        => curve.DesignPoints.FirstOrDefault(d => d.Name == DesignPoint.LargestThrust)?.Point is { Loads: { } loads, Operation: var there }
+            ? new Extreme(loads.Thrust, there.WindSpeed) : null;
+
     private static Extreme? Largest(CurvePoint[] points, Func<RotorLoads, double, double> figure, Func<double, double> size)
     {
         var found = points
@@ -84,7 +89,7 @@ public sealed record CaseSummary(
         if (found.Count == 0)
             return null;
         var largest = found.Max(extreme => size(extreme.Value));
-        return found.First(extreme => size(extreme.Value) >= largest - SameWithin * Math.Abs(largest));
+        return found.First(extreme => size(extreme.Value) >= largest - (DesignPoint.FlatWithin * Math.Abs(largest)));
     }
 
     private static ImmutableSortedDictionary<string, int> CountMarks(PowerCurve curve)

@@ -35,6 +35,18 @@ public sealed class Blade
     /// <summary>Whether its sections are those of a thickness; else they are named.</summary>
     public bool IsByThickness => Stations[0].ThicknessRatio is not null;
 
+    /// <summary>Length over mean chord: the square of the length over the area, chords in straight lines between stations.</summary>
+    public double AspectRatio
+    {
+        get
+        {
+            var area = 0.0;
+            for (var i = 1; i < Stations.Length; i++)
+                area += (Stations[i].Radius - Stations[i - 1].Radius) * (Stations[i].Chord + Stations[i - 1].Chord) / 2;
+            return (TipRadius - HubRadius) * (TipRadius - HubRadius) / area;
+        }
+    }
+
     /// <exception cref="ArgumentException">Fewer than two stations, or one that breaks what the type promises.</exception>
     public static Blade FromStations(IEnumerable<BladeStation> stations)
     {

@@ -72,7 +72,8 @@ internal readonly struct Annulus
     }
 
     /// <summary>
-    /// The angle of attack with the largest lift between -90 and 90 degrees, rad, among the rows of the tables; NaN where nothing lifts.
+    /// The angle of attack with the largest lift between -90 and 90 degrees, rad, of the tables as they serve here; NaN where nothing lifts.
+    /// Of one table it is a row; of a blend it may lie between rows, and is right to 1e-7 rad.
     /// </summary>
     public double AngleOfLargestLift()
     {
@@ -81,7 +82,8 @@ internal readonly struct Annulus
             foreach (var angle in (side == 0 ? Inner : Outer).Knots)
                 if (Math.Abs(angle) <= Math.PI / 2 && CoefficientsAt(angle).Lift is var lift && lift > largest)
                     (largest, at) = (lift, angle);
-        return at;
+        // A shape-preserving cubic is largest at a row; a blend of two, each of them falling while the other rises, need not be.
+        return double.IsNaN(at) || (OuterWeight == 0 && InnerPlace.Weight == 0 && Augmentation.IsNone) ? at : TopBeside(at, largest);
     }
 
     /// <summary>rad that an angle of attack may rise before the least angle of largest lift of the tables; negative beyond it.</summary>
@@ -99,6 +101,42 @@ internal readonly struct Annulus
             || (OuterWeight > 0 && Outer.IsOutsideAngles(angleOfAttack, OuterPlace));
 
     public bool IsOutsideReynolds => InnerPlace.Outside || (OuterWeight > 0 && OuterPlace.Outside);
+
+    // In the spans to the next row on either side, by golden sections.
+    private double TopBeside(double row, double lift)
+    {
+        const double Tolerance = 1e-7, GoldenShare = 0.6180339887498949;
+        var (below, above) = (-Math.PI / 2, Math.PI / 2);
+        for (var side = 0; side < (OuterWeight == 0 ? 1 : 2); side++)
+            foreach (var angle in (side == 0 ? Inner : Outer).Knots)
+                if (angle < row)
+                    below = Math.Max(below, angle);
+                else if (angle > row)
+                    above = Math.Min(above, angle);
+        var top = row;
+        foreach (var end in (ReadOnlySpan<double>)[below, above])
+        {
+            var (from, to) = (row, end);
+            var (near, far) = (to - (GoldenShare * (to - from)), from + (GoldenShare * (to - from)));
+            var (nearLift, farLift) = (CoefficientsAt(near).Lift, CoefficientsAt(far).Lift);
+            while (Math.Abs(to - from) > Tolerance)
+                if (nearLift >= farLift)
+                {
+                    (to, far, farLift) = (far, near, nearLift);
+                    near = to - (GoldenShare * (to - from));
+                    nearLift = CoefficientsAt(near).Lift;
+                }
+                else
+                {
+                    (from, near, nearLift) = (near, far, farLift);
+                    far = from + (GoldenShare * (to - from));
+                    farLift = CoefficientsAt(far).Lift;
+                }
+            if (Math.Max(nearLift, farLift) is var there && there > lift)
+                (top, lift) = (nearLift >= farLift ? near : far, there);
+        }
+        return top;
+    }
 
     // (1 - f) of the plain table and f of the augmented one, f from 0 to 1 and free of the angle: so the bounds of both, blended, are bounds.
     private Coefficients Augmented(in Coefficients plain, double angleOfAttack)

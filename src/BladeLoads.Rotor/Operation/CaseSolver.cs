@@ -26,21 +26,32 @@ public static class CaseSolver
         if (variableSpeed?.Marks == PointMarks.PitchJump)
             MarkFirstRated(points);
         var curve = points.MoveToImmutable();
+        Region RegionAt(double windSpeed) => solver.RegionOf(SettingAt(rotorCase, windSpeed, variableSpeed));
         var limited = rotorCase.Control is Control.VariableSpeed { ThrustLimit: not null };
         var designPoints = DesignPoints.Of(
             rotorCase, curve, limited ? null : variableSpeed?.RatedWindSpeed, variableSpeed?.LikelyBeginnings(curve.AsSpan()) ?? [], Solved,
-            v => solver.RegionOf(SettingAt(rotorCase, v, variableSpeed)));
-        var rated = limited ? FirstAtRated(curve, designPoints) : variableSpeed?.RatedWindSpeed;
+            RegionAt);
+        var rated = limited
+            ? RatedUnderLimit.WindSpeed(rotorCase, variableSpeed?.RatedWindSpeed, curve, designPoints, RegionAt)
+            : variableSpeed?.RatedWindSpeed;
         var marks = variableSpeed?.Marks ?? PointMarks.None;
         if (limited && rated is null && rotorCase.Control.RatedPower is not null)
             marks = PointMarks.RatedNotReached;
+        if (marks == PointMarks.RatedNotReached && NearestToRated(curve) is { } nearest)
+        {
+            var marked = nearest with { Marks = nearest.Marks | PointMarks.RatedNotReached };
+            curve = curve.Replace(nearest, marked);
+            designPoints = [.. designPoints.Select(d => ReferenceEquals(d.Point, nearest) ? d with { Point = marked } : d)];
+        }
         return new PowerCurve(curve, rated, variableSpeed?.Best, designPoints, marks, model.Solves);
     }
 
-    // Under a thrust limit the rotor may pitch before it makes rated power, and comes to it later than at fine pitch.
-    private static double? FirstAtRated(ImmutableArray<CurvePoint> curve, ImmutableArray<DesignPoint> designPoints)
-        => curve.Concat(designPoints.Select(d => d.Point)).Where(p => p.Region == Region.RatedPower)
-            .Min(p => (double?)p.Operation.WindSpeed);
+    // The row that shows how far the rotor gets: the most electrical power, at the lowest wind speed that has it; null where none has any.
+    private static CurvePoint? NearestToRated(ImmutableArray<CurvePoint> curve)
+    {
+        var most = curve.Select(p => p.ElectricalPower).Where(double.IsFinite).DefaultIfEmpty(0).Max();
+        return most > 0 ? curve.First(p => p.ElectricalPower >= most * (1 - DesignPoint.FlatWithin)) : null;
+    }
 
     private static Setting SettingAt(RotorCase rotorCase, double windSpeed, VariableSpeedOperation? variableSpeed)
     {

@@ -11,7 +11,10 @@ namespace BladeLoads.Rotor.Operation;
 /// </param>
 /// <param name="Best">The tip-speed ratio and fine pitch of a variable-speed machine; null for the others.</param>
 /// <param name="DesignPoints">In the order of their wind speeds.</param>
-/// <param name="Marks">What was found beside the points: a jump of pitch at rated, rated power never reached.</param>
+/// <param name="Marks">
+/// What was found of the curve as a whole: a jump of pitch at rated; rated power never reached, which the row with the most electrical power
+/// carries too.
+/// </param>
 /// <param name="RotorSolves">Operating points solved in all, those of searches included.</param>
 public sealed record PowerCurve(
     ImmutableArray<CurvePoint> Points, double? RatedWindSpeed, BestOperation? Best, ImmutableArray<DesignPoint> DesignPoints,
@@ -42,5 +45,9 @@ public sealed record DesignPoint(string Name, CurvePoint Point)
 {
     public const string RatedWindSpeed = "rated wind speed";
 
+    /// <summary>The largest thrust in operation; of a flat top its lowest wind speed, in every table that names it.</summary>
     public const string LargestThrust = "largest thrust";
+
+    /// <summary>Share of a largest value within which others count as the same: power or thrust that is held varies by a root finder's last digits.</summary>
+    public const double FlatWithin = 1e-9;
 }

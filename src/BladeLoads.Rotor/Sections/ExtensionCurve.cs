@@ -8,7 +8,7 @@ internal sealed class ExtensionCurve
     // A row nearer to its neighbour than this, rad, would make a needle of a secant.
     private const double Nearest = 0.5 * Math.PI / 180;
 
-    // Degrees between added rows. Coefficients between two rows are then within 0.001 of the curve.
+    // Degrees between added rows. Between two rows coefficients are within 0.003 of the curve then.
     private const double Step = 2.5;
 
     private readonly Polar _polar;
@@ -24,6 +24,9 @@ internal sealed class ExtensionCurve
     private readonly Coefficients _atStall;
     private readonly DeepStall _stalled;
     private readonly Coefficients _atEnd;
+
+    // Of a mirrored side below zero: where lift has come down along the lift line to that of the mirrored stall point; rad, outwards.
+    private readonly double _knee;
     private int _raised;
 
     public ExtensionCurve(Polar polar, double largestDrag, ExtensionJoin join)
@@ -42,6 +45,7 @@ internal sealed class ExtensionCurve
             : join == ExtensionJoin.Stall && _stallBelow is { } below ? (below, ExtensionKind.FromStall)
             : _stallBelow is not null || polar.Angles[0] < Math.Min(0, Nearest - _stallAngle) ? (0, ExtensionKind.FromEnd)
             : (0, ExtensionKind.Mirrored);
+        _knee = Knee();
         // -180 and 180 degrees are one angle: where the table has one of them, the other is the same.
         _atEnd = _above.Kind == ExtensionKind.Complete ? RowAt(last)
             : _below.Kind == ExtensionKind.Complete ? RowAt(0)
@@ -76,18 +80,30 @@ internal sealed class ExtensionCurve
     private SortedSet<double> AnglesBeyond(int sign, double join)
     {
         var isMirrored = sign < 0 && _below.Kind == ExtensionKind.Mirrored;
-        double[] corners = isMirrored ? [_stallAngle, RightAngle, Math.PI - _stallAngle, Math.PI] : [RightAngle, Math.PI - _stallAngle, Math.PI];
+        double[] corners = isMirrored ? [_knee, _stallAngle, RightAngle, Math.PI - _stallAngle, Math.PI] : [RightAngle, Math.PI - _stallAngle, Math.PI];
+        // Just beyond a join the curve bends most; a row there keeps the table's cubic from cutting the corner.
+        var first = join + Nearest;
         var angles = new SortedSet<double>();
+        if (!isMirrored && corners.All(corner => corner > first + Nearest))
+            angles.Add(first);
         foreach (var corner in corners.Where(corner => corner == Math.PI || corner > join + Nearest))
             if (corner is RightAngle or Math.PI || corners.All(other => other == corner || Math.Abs(other - corner) > Nearest))
                 angles.Add(corner);
-        // A straight line needs no row between its ends.
-        var from = isMirrored ? _stallAngle : join;
         for (var step = 1; step * Step < 180; step++)
-            if (double.DegreesToRadians(step * Step) is var angle && angle > from + Nearest
+            if (double.DegreesToRadians(step * Step) is var angle && angle > first + Nearest
                 && corners.All(corner => Math.Abs(angle - corner) > Nearest))
                 angles.Add(angle);
         return angles;
+    }
+
+    // Where the lift line does not come down so far before the mirrored stall point, a straight line leads there.
+    private double Knee()
+    {
+        if (_below.Kind != ExtensionKind.Mirrored || PotentialLift.Of(_polar) is not { } line)
+            return _stallAngle;
+        var (join, joined) = (-_polar.Angles[0], RowAt(0));
+        var knee = join + ((joined.Lift - Mirrored(_atStall).Lift) / line.LiftSlope);
+        return knee > join + Nearest && knee < _stallAngle - Nearest ? knee : _stallAngle;
     }
 
     /// <summary>Coefficients of the extension at <c>sign x angle</c>.</summary>
@@ -114,9 +130,9 @@ internal sealed class ExtensionCurve
             return Mirrored(Curve(-1 / PolarExtension.MirroredLift, join, joined).At(angle));
         if (angle >= _stallAngle)
             return Mirrored(_stalled.At(angle));
-        var share = (angle - join) / (_stallAngle - join);
         var end = Mirrored(_atStall);
-        return new Coefficients(joined.Lift + (share * (end.Lift - joined.Lift)), joined.Drag + (share * (end.Drag - joined.Drag)));
+        var (liftShare, dragShare) = (Math.Min(1, (angle - join) / (_knee - join)), (angle - join) / (_stallAngle - join));
+        return new Coefficients(joined.Lift + (liftShare * (end.Lift - joined.Lift)), joined.Drag + (dragShare * (end.Drag - joined.Drag)));
     }
 
     private DeepStall Curve(double liftFactor, double join, Coefficients joined)

@@ -24,6 +24,9 @@ public sealed class Polar
     /// <summary>Drag coefficients, one an angle, not negative.</summary>
     public ImmutableArray<double> Drag { get; }
 
+    /// <summary>Whether no row lifts more than 0.01, up or down: a round section, for which nothing that rests on lift is meant.</summary>
+    public bool IsRound => Lift.All(lift => Math.Abs(lift) <= 0.01);
+
     /// <param name="reynolds">Above 0, or NaN for a table that names no Reynolds number.</param>
     /// <param name="angles">rad, at least three, rising strictly, within -pi to pi.</param>
     /// <param name="lift">One an angle, finite.</param>

@@ -15,7 +15,7 @@ public enum ExtensionKind
     /// <summary>From its end.</summary>
     FromEnd,
 
-    /// <summary>Below zero: the table ends before it stalls there, and passes straight to the mirrored stall point of the other side.</summary>
+    /// <summary>Below zero: the table ends before it stalls there, and passes to the mirrored stall point of the other side.</summary>
     Mirrored,
 
     /// <summary>A round section, that does not lift: its end value goes on.</summary>
@@ -51,14 +51,11 @@ public static class PolarExtension
     /// <summary>Share of the lift that is left in mirrored flow.</summary>
     public const double MirroredLift = 0.7;
 
-    /// <summary>Largest lift coefficient of a section that counts as round.</summary>
-    internal const double NoLift = 0.01;
-
     /// <summary>
-    /// Whether a polar can be extended: it is complete, or does not lift, or has a row between 0 and 90 degrees.
+    /// Whether a polar can be extended: it is complete, or round, or has a row between 0 and 90 degrees.
     /// </summary>
     public static bool CanExtend(Polar polar)
-        => (ReachesEnd(polar, 1) && ReachesEnd(polar, -1)) || IsRound(polar) || polar.Angles.Any(IsBetween0And90Degrees);
+        => (ReachesEnd(polar, 1) && ReachesEnd(polar, -1)) || polar.IsRound || polar.Angles.Any(IsBetween0And90Degrees);
 
     /// <summary>The polar from -180 to 180 degrees.</summary>
     /// <param name="aspectRatio">Of the blade: length over mean chord, above 0; above 50 counts as 50.</param>
@@ -68,7 +65,7 @@ public static class PolarExtension
         var largestDrag = DeepStall.LargestDrag(aspectRatio);
         if (ReachesEnd(polar, 1) && ReachesEnd(polar, -1))
             return new ExtendedPolar(polar, Complete(polar, 1), Complete(polar, -1), largestDrag, 0);
-        if (IsRound(polar))
+        if (polar.IsRound)
             return CarryOn(polar, largestDrag);
         if (!polar.Angles.Any(IsBetween0And90Degrees))
             throw new ArgumentException("no row between 0 and 90 degrees", nameof(polar));
@@ -88,8 +85,6 @@ public static class PolarExtension
     internal static ExtendedSide Complete(Polar polar, int sign) => new(
         ExtensionKind.Complete, sign * Math.PI, double.NaN, double.NaN,
         (sign > 0 ? StallPoint.Above(polar) : StallPoint.Below(polar)) is not null, 0);
-
-    private static bool IsRound(Polar polar) => polar.Lift.All(lift => Math.Abs(lift) <= NoLift);
 
     private static ExtendedPolar CarryOn(Polar polar, double largestDrag)
     {

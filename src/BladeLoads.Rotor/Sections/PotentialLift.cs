@@ -47,16 +47,16 @@ public readonly record struct PotentialLift(double ZeroLiftAngle, double LiftSlo
     {
         // Rounding of the zero-lift angle must not make a neighbour of the row that it is.
         const double Same = 1e-9;
-        var (before, after) = (double.PositiveInfinity, double.PositiveInfinity);
+        var (before, after, near) = (double.PositiveInfinity, double.PositiveInfinity, 0);
         foreach (var angle in polar.Angles)
         {
             var x = angle - zeroLift;
-            if (x < -Same)
-                before = Math.Min(before, -x);
-            if (x > Same)
-                after = Math.Min(after, x);
+            if (Math.Abs(x) <= Same)
+                continue;
+            (before, after) = x < 0 ? (Math.Min(before, -x), after) : (before, Math.Min(after, x));
+            near += Math.Abs(x) <= Attached + Same ? 1 : 0;
         }
-        var (low, high) = (-Math.Max(Attached, double.IsFinite(before) ? before : 0), Math.Max(Attached, double.IsFinite(after) ? after : 0));
+        var (low, high) = near >= 2 ? (-Attached, Attached) : (-before, after);
         var (xy, xx) = (0.0, 0.0);
         for (var i = 0; i < polar.Angles.Length; i++)
             if (polar.Angles[i] - zeroLift is var x && x >= low - Same && x <= high + Same)

@@ -33,4 +33,12 @@ public sealed class Section
                 throw new ArgumentException("Reynolds numbers must rise from polar to polar", nameof(polars));
         return new Section(name, all, SectionTable.Prepare(all));
     }
+
+    /// <summary>
+    /// Lift and drag coefficients as a rotor is solved with them: between rows by a shape-preserving cubic, between Reynolds numbers linear
+    /// in the logarithm; beyond the tables the end value or the nearest polar.
+    /// </summary>
+    /// <param name="angle">Angle of attack, rad, within +-pi.</param>
+    /// <param name="reynolds">Above 0; NaN only for a section whose polar leaves its own open.</param>
+    public Coefficients At(double angle, double reynolds) => Table.At(angle, Table.Place(Math.Log(reynolds)));
 }

@@ -26,7 +26,7 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         var values = new CaseValues(file, entries, findings);
         used = values.Used;
         var title = ReadTitle(values, name);
-        var (blade, sections) = ReadBlade(values);
+        var (blade, sections, augmentation) = ReadBlade(values);
         var bladeCount = values.WholeNumber("rotor.blade_count", null, 1, MostBlades);
         var coneDeg = values.Number("rotor.cone_deg", CaseDefaults.ConeDeg, Bounds.Within(80));
         var air = AirReader.Read(values);
@@ -48,7 +48,7 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             return null;
 
         var rotor = new RotorCase(
-            blade.Blade, sections.Sections, Augmentation.None, bladeCount, double.DegreesToRadians(coneDeg), air, windSpeeds, control.Strategy,
+            blade.Blade, sections.Sections, augmentation, bladeCount, double.DegreesToRadians(coneDeg), air, windSpeeds, control.Strategy,
             control.CutIn, control.CutOut, control.Drivetrain, model);
         var determining = values.Determining;
         inputs = [.. inputs, blade.Input, .. sections.Tables.Select(table => table.Input)];
@@ -81,21 +81,23 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         return string.IsNullOrWhiteSpace(title) ? name.Split('~')[0] : title;
     }
 
-    private (BladeTable? Blade, BladeSections? Sections) ReadBlade(CaseValues values)
+    private (BladeTable? Blade, BladeSections? Sections, Augmentation Augmentation) ReadBlade(CaseValues values)
     {
         var blade = Reference(values, "blade", EntryKind.File) is { } bladePath ? tables.Blade(bladePath) : null;
         var set = Reference(values, "polars", EntryKind.Folder);
+        var extension = SectionsReader.ReadExtension(values, blade?.Blade);
+        var augmentation = SectionsReader.ReadAugmentation(values);
         if (blade is null || set is null)
         {
             // Which tables the blade would name is not known; what is wrong in any of them is told with the rest.
             if (set is not null)
                 tables.ReadAll(set);
             values.Spoil();
-            return (blade, null);
+            return (blade, null, augmentation);
         }
         foreach (var (section, _) in blade.Sections)
             values.Uses(folder.RelativePath(Path.Combine(set, section + ".csv")));
-        var sections = tables.Sections(blade, set);
+        var sections = tables.Sections(blade, set, extension);
         if (blade.Blade is null || sections.Sections is null)
             values.Spoil();
         values.Note("blade", blade.Canonical.Hash);
@@ -108,7 +110,8 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             foreach (var thickness in setFile.Thicknesses)
                 values.Note($"thickness_ratio.{thickness.Section}", CanonicalText.Of(thickness.ThicknessRatio));
         }
-        return (blade, sections);
+        SectionsReader.CheckTables(values, sections, augmentation, findings);
+        return (blade, sections, augmentation);
     }
 
     private string? Reference(CaseValues values, string path, EntryKind wanted)
@@ -155,7 +158,5 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
         values.Check("rotor.hub_height_m", Bounds.AboveZero);
         values.Check("wind.shear_exponent", Bounds.Within(2));
         values.Check("wind.yaw_deg", Bounds.Within(180));
-        values.CheckedChoice("sections.extend", "viterna-1982");
-        values.CheckedChoice("sections.augment", "snel-1993", "du-selig-1998");
     }
 }

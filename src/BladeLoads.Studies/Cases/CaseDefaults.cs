@@ -23,6 +23,10 @@ internal static class CaseDefaults
     public const double Availability = 1;
     public const double SurfaceWindSpeed = 8;         // m/s; where the best tip-speed ratio is searched for too
 
+    public const string Extend = "none";
+    public const string Join = "end";                 // keeps every row of a table
+    public const string Augment = "none";
+
     public const int Elements = 40;
     public const string Spacing = "cosine";
     public const string HeavyLoading = "glauert-1935";

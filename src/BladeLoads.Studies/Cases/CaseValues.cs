@@ -98,7 +98,7 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
         if (!double.IsFinite(number.Value))
             return RefuseValue(path, $"is {number.Found}; give a finite number");
         if (!bounds.Contain(number.Value))
-            return RefuseValue(path, $"is {number.Found}; {bounds.Rule}");
+            return RefuseValue(path, $"is {number.Found}; {bounds.Refusal(number.Value)}");
         return NotYet.Sentence(path, number) is { } notYet ? RefuseYet(entry, notYet) : number.Value;
     }
 
@@ -165,14 +165,24 @@ internal sealed class CaseValues(CaseFile file, ImmutableDictionary<string, Case
     /// <summary>Reports at a key.</summary>
     public void RefuseKey(string path, string text) => Refuse(Find(path)!.Key, text);
 
-    /// <summary>Two keys of which either does alone, where both are there; told at the first.</summary>
+    /// <summary>Keys that do not go with another, where they are there beside it: one error that names them all, at the first of them.</summary>
     /// <param name="why">What the other does already.</param>
-    public void RefuseTogether(string path, string other, string why)
+    /// <param name="remark">What else is to be said of them; empty for nothing.</param>
+    public void RefuseTogether(IEnumerable<string> paths, string other, string why, string remark = "")
     {
-        if (Find(path) is not { } entry || Find(other) is not { } second)
+        var found = paths.Select(Find).OfType<CaseEntry>().OrderBy(e => PlaceOfKey(e).Line).ThenBy(e => PlaceOfKey(e).Column).ToList();
+        if (found.Count == 0 || Find(other) is not { } second)
             return;
-        RefuseKey(path, $"'{entry.Known.Name}' does not go with {second.Known.Name}, which {why}; leave one of them out");
+        var names = found.Select(e => $"'{e.Known.Name}'").ToList();
+        Refuse(PlaceOfKey(found[0]), names.Count == 1
+            ? $"{names[0]} does not go with {second.Known.Name}, which {why}; leave one of them out"
+            : $"{string.Join(", ", names[..^1])} and {names[^1]} do not go with {second.Known.Name}, which {why}; "
+                + $"leave {second.Known.Name} out, or the others{remark}");
     }
+
+    // A swept key stands once, whatever the number of its values.
+    private Place PlaceOfKey(CaseEntry entry)
+        => entry.IsSwept ? file.Sweep.First(s => s.Known == entry.Known).Key : entry.Key;
 
     public void Refuse(Place at, string text)
     {

@@ -32,11 +32,12 @@ internal static class ControlReader
     public static ControlValues Read(CaseValues values, ImmutableArray<double> windSpeeds, StudyFolder folder, StudyTables tables)
     {
         var cutIn = values.Number(
-            "control.cut_in_wind_speed_m_s", CaseDefaults.CutInWindSpeed, Bounds.FromTo(0, Limits.WindSpeed));
+            "control.cut_in_wind_speed_m_s", CaseDefaults.CutInWindSpeed, Ranges.CutIn);
         var cutOut = values.Number(
-            "control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Bounds.AboveZeroTo(Limits.WindSpeed));
-        RefuseExchanged(values, "control.cut_in_wind_speed_m_s", cutIn, "control.cut_out_wind_speed_m_s", cutOut);
-        var ratedPowerKiloWatt = values.OptionalNumber("control.rated_power_kW", Bounds.AboveZeroTo(Limits.RatedPowerKiloWatt));
+            "control.cut_out_wind_speed_m_s", CaseDefaults.CutOutWindSpeed, Ranges.CutOut);
+        CrossedLimits.WindSpeeds.Refuse(values, cutIn, cutOut);
+        UsualRanges.CheckOperation(values, windSpeeds, cutIn, cutOut);
+        var ratedPowerKiloWatt = values.OptionalNumber("control.rated_power_kW", Ranges.RatedPower);
         UsualRanges.Check(values, "control.rated_power_kW", ratedPowerKiloWatt ?? double.NaN);
         var ratedPower = ratedPowerKiloWatt * 1e3;
         var drivetrain = DrivetrainReader.Read(values, ratedPower);
@@ -58,20 +59,21 @@ internal static class ControlReader
 
     private static Control.VariableSpeed ReadVariableSpeed(CaseValues values, double? ratedPower)
     {
-        var tipSpeedRatio = values.NumberOrBest("control.tip_speed_ratio", Bounds.AboveZero);
-        var finePitch = values.NumberOrBest("control.fine_pitch_deg", Bounds.Within(90));
+        var tipSpeedRatio = values.NumberOrBest("control.tip_speed_ratio", Ranges.TipSpeedRatio);
+        var finePitch = values.NumberOrBest("control.fine_pitch_deg", Ranges.FinePitch);
         var slowest = values.Number(
-            "control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Bounds.FromTo(0, Limits.RotorSpeedRpm));
+            "control.min_rotor_speed_rpm", CaseDefaults.MinRotorSpeedRpm, Ranges.RotorSpeed);
         var fastest = values.Number(
-            "control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Bounds.AboveZeroTo(Limits.RotorSpeedRpm));
-        RefuseExchanged(values, "control.min_rotor_speed_rpm", slowest, "control.max_rotor_speed_rpm", fastest);
+            "control.max_rotor_speed_rpm", CaseDefaults.MaxRotorSpeedRpm, Ranges.HighestRotorSpeed);
+        CrossedLimits.RotorSpeeds.Refuse(values, slowest, fastest);
         var speedLimitedPitch = values.Choice("control.speed_limited_pitch", CaseDefaults.SpeedLimitedPitch, "hold", "best");
         var aboveRated = values.Choice("control.above_rated", CaseDefaults.AboveRated(values.Has("control.rated_power_kW")),
             "pitch-to-feather", "pitch-to-stall", "none");
         if (aboveRated is "pitch-to-feather" or "pitch-to-stall" && !values.Has("control.rated_power_kW"))
             values.RefuseValue("control.above_rated",
                 $"is '{aboveRated}' without a rated power; give rated_power_kW or leave above_rated out");
-        var thrustLimit = values.OptionalNumber("control.thrust_limit_kN", Bounds.AboveZero) * 1e3;
+        var thrustLimit = values.OptionalNumber("control.thrust_limit_kN", Ranges.ThrustLimit) * 1e3;
+        UsualRanges.Check(values, "control.thrust_limit_kN", thrustLimit / 1e3 ?? double.NaN);
         return new Control.VariableSpeed(
             tipSpeedRatio, finePitch is { } deg ? double.DegreesToRadians(deg) : null, RadiansPerSecond(slowest), RadiansPerSecond(fastest),
             speedLimitedPitch == "best" ? SpeedLimitedPitch.Best : SpeedLimitedPitch.Hold, ratedPower,
@@ -86,7 +88,7 @@ internal static class ControlReader
 
     private static Control.FixedSpeed ReadFixedSpeed(CaseValues values, double? ratedPower)
     {
-        var rotorSpeed = values.RequiredNumber("control.rotor_speed_rpm", Bounds.FromTo(0, Limits.RotorSpeedRpm));
+        var rotorSpeed = values.RequiredNumber("control.rotor_speed_rpm", Ranges.RotorSpeed);
         var pitch = values.RequiredNumber("control.pitch_deg", Bounds.Within(180));
         return new Control.FixedSpeed(RadiansPerSecond(rotorSpeed), double.DegreesToRadians(pitch), ratedPower);
     }
@@ -115,12 +117,16 @@ internal static class ControlReader
         values.Note(path, schedule.Canonical.Hash);
         var (lowest, highest) = (schedule.Points[0].WindSpeed, schedule.Points[^1].WindSpeed);
         var operating = windSpeeds.Where(v => v >= rest.CutIn && v <= rest.CutOut);
-        if (operating.Where(v => v < lowest || v > highest).ToList() is [var bare, ..])
+        if (operating.Where(v => v < lowest || v > highest).ToList() is [var bare, .. var others])
             values.RefuseValue(path, $"{VisibleText.Quote(reference)} runs from {CanonicalText.Of(lowest)} to "
-                + $"{CanonicalText.Of(highest)} m/s and does not cover {CanonicalText.Of(bare)} m/s; "
+                + $"{CanonicalText.Of(highest)} m/s and does not cover {Uncovered(bare, others)}: rotor speed and pitch are not known there; "
                 + "add rows, or set cut-in and cut-out within it");
         return rest with { Strategy = new Control.Schedule(schedule.Points, ratedPower), Schedule = schedule };
     }
+
+    private static string Uncovered(double first, List<double> others) => others.Count == 0
+        ? $"{CanonicalText.Of(first)} m/s"
+        : $"{CanonicalText.Of(others.Count + 1)} wind speeds of the case, the first {CanonicalText.Of(first)} and the last {CanonicalText.Of(others[^1])} m/s";
 
     private static void RefuseKeysOfOthers(CaseValues values, string strategy)
     {
@@ -133,18 +139,6 @@ internal static class ControlReader
     }
 
     private static bool ChangesNothing(TomlValue value) => value is TomlValue.Text { Value: "hold" or "none" };
-
-    // Told at the one that a sweep varies: the other is the same in every variant.
-    private static void RefuseExchanged(CaseValues values, string lowPath, double low, string highPath, double high)
-    {
-        if (!(low > high))
-            return;
-        var (lowName, highName) = (KnownKeys.Find(lowPath)!.Name, KnownKeys.Find(highPath)!.Name);
-        if (values.Find(highPath)!.IsSwept)
-            values.RefuseValue(highPath, $"is {CanonicalText.Of(high)}, below {lowName} {CanonicalText.Of(low)}; exchange them");
-        else
-            values.RefuseValue(lowPath, $"is {CanonicalText.Of(low)}, above {highName} {CanonicalText.Of(high)}; exchange them");
-    }
 
     private static double RadiansPerSecond(double revolutionsPerMinute) => revolutionsPerMinute * Math.Tau / 60;
 }

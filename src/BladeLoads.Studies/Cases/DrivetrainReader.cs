@@ -11,7 +11,7 @@ internal static class DrivetrainReader
     private const string Path = "control.drivetrain_efficiency";
 
     private static readonly Pairs LoadPairs = new(
-        "drivetrain_efficiency", ("load", Bounds.ZeroOrMore), ("efficiency", Bounds.AboveZeroToOne), "[[0.1, 0.85], [1, 0.94]]");
+        "drivetrain_efficiency", ("load", Ranges.Load), ("efficiency", Ranges.Efficiency), "[[0.1, 0.85], [1, 0.94]]");
 
     /// <summary>Null where an error keeps it from being known.</summary>
     /// <param name="ratedPower">Electrical, W; null for none.</param>
@@ -19,7 +19,7 @@ internal static class DrivetrainReader
     {
         if (values.Find(Path) is not { Value: TomlValue.List list })
         {
-            var efficiency = values.Number(Path, CaseDefaults.DrivetrainEfficiency, Bounds.AboveZeroToOne);
+            var efficiency = values.Number(Path, CaseDefaults.DrivetrainEfficiency, Ranges.Efficiency);
             return double.IsNaN(efficiency) ? null : Drivetrain.Constant(efficiency);
         }
         var rows = LoadPairs.Read(values, list);

@@ -19,13 +19,14 @@ internal static class FurtherReader
         "pitches_deg", "pitch angle", "degrees", Bounds.Within(180), "{ from = -4, to = 20, step = 1 }");
 
     private static readonly Pairs IntensityPairs = new(
-        "turbulence_intensity", ("wind speed", Bounds.ZeroOrMore), ("intensity", Bounds.Share), "[[5, 0.2], [15, 0.14]]");
+        "turbulence_intensity", ("wind speed", Bounds.ZeroOrMore), ("intensity", Ranges.TurbulenceIntensity), "[[5, 0.2], [15, 0.14]]");
 
     public static TurbulenceIntensity? ReadTurbulence(CaseValues values)
     {
         if (values.Find(Turbulence) is not { Value: TomlValue.List list })
         {
-            var intensity = values.Number(Turbulence, CaseDefaults.TurbulenceIntensity, Bounds.Share);
+            var intensity = values.Number(Turbulence, CaseDefaults.TurbulenceIntensity, Ranges.TurbulenceIntensity);
+            UsualRanges.Check(values, Turbulence, intensity);
             return intensity > 0 ? TurbulenceIntensity.Constant(intensity) : null;
         }
         var rows = IntensityPairs.Read(values, list);
@@ -37,7 +38,7 @@ internal static class FurtherReader
     {
         if (!values.Has(ReferenceDensity))
             return null;
-        var density = values.Number(ReferenceDensity, double.NaN, Bounds.AboveZeroTo(Limits.Density));
+        var density = values.Number(ReferenceDensity, double.NaN, Ranges.Density);
         UsualRanges.Check(values, ReferenceDensity, density);
         return density;
     }

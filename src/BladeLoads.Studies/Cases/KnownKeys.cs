@@ -70,6 +70,8 @@ internal static class KnownKeys
         new("model.heavy_loading", "\"glauert-1935\"", true),
         new("model.balance_with", "\"lift and drag\"", true),
         new("sections.extend", "\"viterna-1982\"", true),
+        new("sections.aspect_ratio", "12", true),
+        new("sections.join", "\"end\"", true),
         new("sections.augment", "\"snel-1993\"", true),
         new("outputs.spanwise", "\"all\"", false),
     ];

@@ -13,8 +13,6 @@ internal static class NotYet
         ("rotor.tilt_deg", IsNotZero, "a tilted rotor is not solved yet; give 0 or leave it out"),
         ("wind.shear_exponent", IsNotZero, "wind shear is not solved yet; give 0 or leave it out"),
         ("wind.yaw_deg", IsNotZero, "yawed wind is not solved yet; give 0 or leave it out"),
-        ("sections.extend", Always, "polars are not extended yet; leave it out and give tables to +-180 degrees"),
-        ("sections.augment", Always, "lift is not augmented for rotation yet; leave it out"),
     ];
 
     /// <summary>The sentence for a value that asks for what is not there yet, or null.</summary>
@@ -25,8 +23,6 @@ internal static class NotYet
                 return line.Sentence;
         return null;
     }
-
-    private static bool Always(TomlValue value) => true;
 
     private static bool IsNotZero(TomlValue value) => value is TomlValue.Number { Value: not 0 };
 }

@@ -39,7 +39,7 @@ internal sealed record Pairs(string Key, (string Noun, Bounds Bounds) First, (st
         {
             if (double.IsFinite(number.Value) && wanted.Bounds.Contain(number.Value))
                 return true;
-            Refuse(number.At, $"has {wanted.Noun} {number.Found}; {wanted.Bounds.Rule}");
+            Refuse(number.At, $"has {wanted.Noun} {number.Found}; {wanted.Bounds.Refusal(number.Value)}");
             return false;
         }
 

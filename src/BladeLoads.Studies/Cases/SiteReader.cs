@@ -21,18 +21,17 @@ internal static class SiteReader
     {
         if (!new[] { Mean, Shape, Availability, Losses, Histogram }.Any(values.Has))
             return new SiteValues(null, null);
-        var availability = values.Number(Availability, CaseDefaults.Availability, Bounds.AboveZeroToOne);
+        var availability = values.Number(Availability, CaseDefaults.Availability, Ranges.Availability);
         var losses = ReadLosses(values);
         if (values.Has(Histogram))
         {
-            foreach (var key in new[] { Mean, Shape })
-                values.RefuseTogether(key, Histogram, "says how often each wind speed blows");
+            values.RefuseTogether([Mean, Shape], Histogram, "says how often each wind speed blows");
             var table = ReadHistogram(values, folder, tables);
             return new SiteValues(
                 table?.Climate is { } measured ? new Site(measured, CaseDefaults.WeibullShape, availability, losses) : null, table);
         }
-        var mean = values.RequiredNumber(Mean, Bounds.AboveZeroTo(Limits.WindSpeed));
-        var shape = values.Number(Shape, CaseDefaults.WeibullShape, Bounds.OneOrMore);
+        var mean = values.RequiredNumber(Mean, Ranges.MeanWindSpeed);
+        var shape = values.Number(Shape, CaseDefaults.WeibullShape, Ranges.WeibullShape);
         return new SiteValues(
             values.IsSound ? new Site(new WindClimate.Weibull(mean, shape), shape, availability, losses) : null, null);
     }
@@ -48,9 +47,10 @@ internal static class SiteReader
         }
         var losses = ImmutableArray.CreateBuilder<(string Name, double Share)>();
         foreach (var loss in table.Entries)
-            if (loss.Value is not TomlValue.Number { Value: var share } || !Bounds.Share.Contain(share))
-                values.Refuse(loss.Value.At,
-                    $"losses has {VisibleText.Quote(loss.Name)} {loss.Value.Found}; give the share of energy that is lost, from 0 to 1");
+            if (loss.Value is not TomlValue.Number { Value: var share } || !double.IsFinite(share))
+                values.Refuse(loss.Value.At, $"losses has {VisibleText.Quote(loss.Name)} {loss.Value.Found}; {Ranges.Loss.Remedy}");
+            else if (!Ranges.Loss.Contain(share))
+                values.Refuse(loss.Value.At, $"losses has {VisibleText.Quote(loss.Name)} {loss.Value.Found}; {Ranges.Loss.Refusal(share)}");
             else
                 losses.Add((loss.Name, share));
         // In one order, whatever the case's: the losses are the same.

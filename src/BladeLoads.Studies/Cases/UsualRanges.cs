@@ -18,6 +18,8 @@ internal static class UsualRanges
         ("air.reference_density_kg_m3", 0.5, 1.6, "air has 0.5 to 1.6 kg/m3"),
         ("air.dynamic_viscosity_Pa_s", 1e-5, 3e-5, "air has 1e-5 to 3e-5 Pa s"),
         ("control.rated_power_kW", 0, 100_000, "no rotor makes more than 100,000 kW; is it in watts?"),
+        ("control.thrust_limit_kN", 0, 10_000, "no rotor takes more than 10,000 kN; is it in newtons?"),
+        ("wind.turbulence_intensity", 0, 0.6, "even in slight wind 0.6 is seldom exceeded; it is a share and not percent"),
         ("model.elements", 10, double.PositiveInfinity, "below 10 the loads along the blade are coarse"),
     ];
 
@@ -47,6 +49,18 @@ internal static class UsualRanges
         var found = strategy is Control.Schedule ? $"goes up to {rpm} rpm" : $"is {rpm}";
         values.Doubt(path, $"{found}, a tip speed of {CanonicalText.Of(Math.Round(tipSpeed, 2))} m/s; "
             + "5 to 150 m/s are usual, and rotor speeds are in rpm");
+    }
+
+    /// <summary>Doubts a case that lists no wind speed from cut-in to cut-out: the rotor is at rest in every row.</summary>
+    public static void CheckOperation(CaseValues values, ImmutableArray<double> windSpeeds, double cutIn, double cutOut)
+    {
+        if (windSpeeds.IsDefaultOrEmpty || cutIn > cutOut || windSpeeds.Any(v => v >= cutIn && v <= cutOut))
+            return;
+        var (path, found) = windSpeeds[^1] < cutIn
+            ? ("control.cut_in_wind_speed_m_s", $"is {CanonicalText.Of(cutIn)}, above the last wind speed of the case, {CanonicalText.Of(windSpeeds[^1])} m/s")
+            : ("control.cut_out_wind_speed_m_s",
+                $"is {CanonicalText.Of(cutOut)}, and the case lists no wind speed from cut-in {CanonicalText.Of(cutIn)} up to it");
+        values.Doubt(path, $"{found}; the rotor is at rest in every row");
     }
 
     /// <summary>Doubts a year of energy whose curve does not reach from cut-in to cut-out: it leaves out what lies between, in silence.</summary>

@@ -19,10 +19,6 @@ internal sealed class CellPlaces
         _columns = [.. header.Split(',').Select(name => name.Trim().Trim('"'))];
     }
 
-    /// <summary>The lines above the column names, with their numbers.</summary>
-    public IEnumerable<(int Line, string Text)> Head
-        => _lines.Select((text, i) => (Line: i + 1, Text: text.Trim())).TakeWhile(line => line.Text is [] or ['#', ..]).Where(line => line.Text.Length > 0);
-
     public InputFinding Finding(int line, string column, string text) => new(_file, line, ColumnOf(line, column), text);
 
     // 0, the whole line, where quotes may hide a comma.

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.PolarCheck;
@@ -16,13 +17,19 @@ public static class PolarDoubts
         var places = new CellPlaces(file, table);
         var polars = Enumerable.Range(0, table.Polars.Length).Select(i => new CheckedPolar(table, i, places)).ToArray();
         var doubts = new List<PolarDoubt>();
-        doubts.AddRange(table.Doubts.Select(doubt => new PolarDoubt("whole table", doubt with { File = file }, -1, double.NaN, double.NaN, [])));
-        doubts.AddRange(AugmentedHead.Doubts(places));
+        doubts.AddRange(table.Reach.Select(doubt => OfTable("reach", doubt)));
+        doubts.AddRange(table.Doubts.Select(doubt => OfTable("180 deg", doubt)));
+        if (table.Augmented is var (line, note))
+            doubts.Add(OfTable("augmented", new InputFinding(file, line, 0,
+                $"the rows are augmented for rotation, by the head: '{VisibleText.Escape(note)}'; they hold for one rotor and one radius, and are not to be "
+                + "augmented again")));
         foreach (var polar in polars)
             doubts.AddRange(OfOne(polar));
         for (var i = 1; i < polars.Length; i++)
             doubts.AddRange(ReynoldsSteps.Doubts(polars[i - 1], polars[i]));
         return [.. doubts.OrderBy(doubt => doubt.Finding, FindingOrder.Instance)];
+
+        PolarDoubt OfTable(string kind, InputFinding doubt) => new(kind, doubt with { File = file }, -1, double.NaN, double.NaN, []);
     }
 
     private static PolarDoubt[] OfOne(CheckedPolar polar)

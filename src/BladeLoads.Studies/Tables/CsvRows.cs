@@ -16,6 +16,7 @@ internal sealed class CsvRows : IDisposable
     private readonly TableErrors _errors;
     private readonly CsvReader _reader;
     private ImmutableArray<string> _header = [];
+    private ImmutableArray<Place> _headerPlaces = [];
     private Dictionary<string, int> _places = [];
     private bool _headerIsSound;
 
@@ -52,6 +53,7 @@ internal sealed class CsvRows : IDisposable
             return false;
         }
         _header = [.. Enumerable.Range(0, _reader.FieldCount).Select(_reader.GetString)];
+        _headerPlaces = [.. Enumerable.Range(0, _reader.FieldCount).Select(Field)];
         if (_header is [var spaced] && SeparatedBySpaces(spaced, columns))
         {
             Error(Field(0), "columns are separated by spaces; separate them by ','");
@@ -108,6 +110,9 @@ internal sealed class CsvRows : IDisposable
 
     /// <summary>The place of a cell of the current row, by the column of its first character.</summary>
     public Place Cell(string column) => Field(_places[column]);
+
+    /// <summary>The place of a column's name in the header, once that is read.</summary>
+    public Place Header(string column) => _headerPlaces[_places[column]];
 
     public void Error(string column, string text) => _errors.Add(column, Cell(column), text);
 

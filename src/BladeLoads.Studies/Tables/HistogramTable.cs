@@ -26,8 +26,7 @@ internal sealed record HistogramTable(WindClimate.Histogram? Climate, CanonicalT
             if (!rows.HasErrors && shares.Count == 0)
                 rows.Error(new Place(input.File, 0, 0), "has no row; a histogram needs one or more");
             if (!rows.HasErrors && shares.Sum() is var sum && !(Math.Abs(sum - 1) <= SumTolerance))
-                rows.Error(new Place(input.File, 0, 0), string.Create(CultureInfo.InvariantCulture,
-                    $"share sums to {sum:G9}; the shares of all rows must make 1, so that the year is whole: divide each by {sum:G9}"));
+                rows.Error(rows.Header("share"), WrongSum(sum, shares.Count, edges));
         }
         var canonical = Fingerprint.OfTable("site.histogram", input.File, () => lines);
         if (rows.HasErrors)
@@ -37,6 +36,15 @@ internal sealed record HistogramTable(WindClimate.Histogram? Climate, CanonicalT
             new InputFile(input.File, input.Sha256, string.Create(
                 CultureInfo.InvariantCulture, $"{shares.Count} bins from {CanonicalText.Of(edges[0])} to {CanonicalText.Of(edges[^1])} m/s")));
     }
+
+    private static string WrongSum(double sum, int bins, List<double> edges) => sum == 0
+        ? "share sums to 0, so the year would have no wind at all; give the share of time of each bin, which make 1 together"
+        : string.Create(CultureInfo.InvariantCulture,
+        $"share sums to {sum:G9} over {bins} bins from {edges[0]} to {edges[^1]} m/s, so {Math.Abs(1 - sum):0.####%} of the year would be ")
+        + (sum < 1
+            ? "missing; the shares must make 1 within a millionth: add the bins that are missing, "
+            : "counted twice; the shares must make 1 within a millionth: take out what is there twice, ")
+        + string.Create(CultureInfo.InvariantCulture, $"or divide each share by {sum:G9}");
 
     private static void ReadRow(CsvRows rows, List<double> edges, List<double> shares, List<string> lines)
     {
@@ -49,7 +57,9 @@ internal sealed record HistogramTable(WindClimate.Histogram? Climate, CanonicalT
         if (to <= from)
             rows.Error("to_m_s", $"to_m_s is {CanonicalText.Of(to)}, not above from_m_s {CanonicalText.Of(from)}; a bin must have a width");
         if (share is < 0 or > 1)
-            rows.Error("share", $"share is {CanonicalText.Of(share)}; give the share of time, from 0 to 1");
+            rows.Error("share", $"share is {CanonicalText.Of(share)}; "
+                + (share < 0 ? "no time is negative" : "no bin holds more than all of the year")
+                + ": give the share of time, from 0 to 1, not percent or hours");
         if (edges.Count == 0)
             edges.Add(from);
         edges.Add(to);

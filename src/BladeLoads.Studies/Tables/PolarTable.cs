@@ -26,6 +26,18 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
     /// <summary>Gives the lines in the file on which those rows stand.</summary>
     public Func<ImmutableArray<ImmutableArray<int>>> RowLines { get; init; } = () => [];
 
+    /// <summary>That it does not go round, which is doubtful where nothing extends it; none or one.</summary>
+    public ImmutableArray<InputFinding> Reach { get; init; } = [];
+
+    /// <summary>Where the rows of each polar begin.</summary>
+    public ImmutableArray<Place> PolarsAt { get; init; } = [];
+
+    /// <summary>That augmentation leaves a polar as it is though it lifts; none or one.</summary>
+    public ImmutableArray<InputFinding> NotAugmented { get; init; } = [];
+
+    /// <summary>What the head of the table says of an augmentation for rotation that its rows already have; null where it says nothing.</summary>
+    public HeadNote? Augmented { get; init; }
+
     private static readonly ImmutableArray<Column> Columns =
         [new("reynolds", false), new("alpha_deg", true), new("cl", true), new("cd", true), new("cm", false)];
 
@@ -49,6 +61,10 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             Doubts = section is null ? [] : [.. DoubtsOf(blocks)],
             Rows = () => section is null ? [] : [.. blocks.Select(block => block.ToRows())],
             RowLines = () => section is null ? [] : [.. blocks.Select(block => block.RowLines)],
+            Reach = section is null ? [] : [.. ReachOf(blocks)],
+            NotAugmented = section is null ? [] : [.. NotAugmentedOf(section, blocks)],
+            PolarsAt = [.. blocks.Select(block => block.At)],
+            Augmented = HeadNote.Find(input, HeadNote.AugmentedName),
         };
     }
 
@@ -127,12 +143,22 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
                 yield return new InputFinding(at.File, at.Line, at.Column,
                     $"cl is {CanonicalText.Of(high)} at 180 deg and {CanonicalText.Of(low)} at -180 deg; "
                     + "these are one angle and should have one lift");
+    }
+
+    private static IEnumerable<InputFinding> ReachOf(List<Block> blocks)
+    {
         var narrowest = blocks.MinBy(block => block.Angles[^1] - block.Angles[0])!;
         if (narrowest.Angles[0] > -180 || narrowest.Angles[^1] < 180)
             yield return new InputFinding(narrowest.At.File, narrowest.At.Line, narrowest.At.Column,
                 $"angles reach from {CanonicalText.Of(narrowest.Angles[0])} to {CanonicalText.Of(narrowest.Angles[^1])} deg; "
                 + "beyond them the end value serves, and each use is marked outside-angles");
     }
+
+    private static IEnumerable<InputFinding> NotAugmentedOf(Section section, List<Block> blocks) => section.Polars.Zip(blocks)
+        .Where(pair => !pair.First.IsRound && PotentialLift.Of(pair.First) is null)
+        .Select(pair => new InputFinding(pair.Second.At.File, pair.Second.At.Line, pair.Second.At.Column,
+            "lift does not rise through 0 within 20 deg of 0; augment leaves these rows as they are"))
+        .Take(1);
 
     private static string Contents(List<Block> blocks)
     {

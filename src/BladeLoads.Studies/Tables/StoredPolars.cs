@@ -18,8 +18,14 @@ public sealed record StoredPolars(
     /// <summary>The lines in the file on which the rows of <see cref="Polars"/> stand, from 1.</summary>
     public ImmutableArray<ImmutableArray<int>> RowLines { get; init; } = [];
 
-    /// <summary>What reading alone finds doubtful: what <c>check</c> tells of the table too.</summary>
+    /// <summary>What reading alone finds doubtful: what <c>check</c> tells of the table too, but for its <see cref="Reach"/>.</summary>
     public ImmutableArray<InputFinding> Doubts { get; init; } = [];
+
+    /// <summary>That it does not go round; none or one.</summary>
+    public ImmutableArray<InputFinding> Reach { get; init; } = [];
+
+    /// <summary>The line of the head that says that the rows are augmented for rotation, and what it says; null where none does.</summary>
+    public (int Line, string Text)? Augmented { get; init; }
 
     /// <summary>Reads a table; null, with what is wrong, where it is none.</summary>
     /// <param name="path">As the user wrote it; findings name the file so.</param>
@@ -59,6 +65,8 @@ public sealed record StoredPolars(
             {
                 RowLines = table.RowLines(),
                 Doubts = table.Doubts,
+                Reach = table.Reach,
+                Augmented = table.Augmented is { } note ? (note.Line, note.Text) : null,
             };
     }
 

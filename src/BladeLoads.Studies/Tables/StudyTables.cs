@@ -8,7 +8,9 @@ namespace BladeLoads.Studies.Tables;
 /// <param name="Sections">Null when a table is missing or has an error.</param>
 /// <param name="Tables">In the order in which the blade names them.</param>
 /// <param name="Set">What the set says of its tables, where the blade asks for it or the set says it.</param>
-internal sealed record BladeSections(SectionSet? Sections, ImmutableArray<PolarTable> Tables, SetFile? Set);
+/// <param name="NotExtended">Where polars begin that cannot be extended, though they were to be; one a table at most.</param>
+internal sealed record BladeSections(
+    SectionSet? Sections, ImmutableArray<PolarTable> Tables, SetFile? Set, ImmutableArray<Place> NotExtended);
 
 /// <summary>The tables of a study, each read, hashed and prepared once, however many cases share it.</summary>
 internal sealed class StudyTables(StudyFolder folder, Findings findings)
@@ -18,7 +20,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
     private readonly Dictionary<string, ScheduleTable?> _schedules = new(StringComparer.Ordinal);
     private readonly Dictionary<string, HistogramTable?> _histograms = new(StringComparer.Ordinal);
     private readonly Dictionary<string, SetFile?> _sets = new(StringComparer.Ordinal);
-    private readonly Dictionary<(string Blade, string Set), BladeSections> _sections = [];
+    private readonly Dictionary<(string Blade, string Set, SectionExtension? Extension), BladeSections> _sections = [];
 
     /// <summary>Null when the file cannot be read at all, which is reported.</summary>
     public BladeTable? Blade(string fullPath) => Once(_blades, fullPath, input => BladeTable.Parse(input, findings));
@@ -29,9 +31,10 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
 
     /// <param name="blade">Names the sections, or gives their thickness; other tables of the set are not read.</param>
     /// <param name="setFolder">Full path of the folder of polar tables.</param>
-    public BladeSections Sections(BladeTable blade, string setFolder)
+    /// <param name="extension">How polars are carried on to +-180 degrees; null where they are not.</param>
+    public BladeSections Sections(BladeTable blade, string setFolder, SectionExtension? extension)
     {
-        if (_sections.TryGetValue((blade.Input.File, setFolder), out var known))
+        if (_sections.TryGetValue((blade.Input.File, setFolder, extension), out var known))
             return known;
         var names = folder.Names(setFolder).ToHashSet(StringComparer.Ordinal);
         var set = names.Contains(SetFile.Name) && !blade.Thicknesses.IsEmpty
@@ -48,23 +51,38 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
             else if (Polar(name, Path.Combine(setFolder, name + ".csv")) is { } table)
                 tables.Add(table);
         }
-        foreach (var doubt in tables.SelectMany(table => table.Doubts))
+        foreach (var doubt in tables.SelectMany(table => extension is null ? table.Doubts.Concat(table.Reach) : table.Doubts))
             findings.Doubt(doubt);
         // A blade that names nothing, because of its errors, keeps no table from telling its own.
         if (blade.Blade is null && blade.Sections.IsEmpty)
             ReadAll(setFolder);
-        var complete = tables.Count == wanted.Length && tables.All(table => table.Section is not null);
-        var isSound = ThicknessCheck.IsSound(
-            blade, set, names.Contains(SetFile.Name), tables, folder.RelativePath(setFolder), findings) && complete;
+        var (sound, obstacles) = Ready(tables, extension);
+        var isSound = ThicknessCheck.IsSound(blade, set, names.Contains(SetFile.Name), sound, folder.RelativePath(setFolder), findings)
+            && sound.Count == wanted.Length;
         var sections = new BladeSections(
-            !isSound ? null : byThickness ? SectionSet.Of(Family(set!, tables)) : SectionSet.Of(tables.Select(table => table.Section!)),
-            tables.ToImmutable(), byThickness ? set : null);
-        _sections.Add((blade.Input.File, setFolder), sections);
+            !isSound ? null : byThickness ? SectionSet.Of(Family(set!, sound)) : SectionSet.Of(sound), tables.ToImmutable(),
+            byThickness ? set : null, obstacles);
+        _sections.Add((blade.Input.File, setFolder, extension), sections);
         return sections;
     }
 
-    private static SectionFamily Family(SetFile set, IReadOnlyList<PolarTable> tables)
-        => SectionFamily.Of(set.Thicknesses.Zip(tables, (thickness, table) => new FamilyMember(thickness.ThicknessRatio, table.Section!)));
+    private static SectionFamily Family(SetFile set, IReadOnlyList<Section> sections)
+        => SectionFamily.Of(set.Thicknesses.Zip(sections, (thickness, section) => new FamilyMember(thickness.ThicknessRatio, section)));
+
+    // The sections of the tables as they serve, extended where that is asked for, and where it cannot be done.
+    private (IReadOnlyList<Section> Sections, ImmutableArray<Place> Obstacles) Ready(IEnumerable<PolarTable> tables, SectionExtension? extension)
+    {
+        var sound = tables.Where(table => table.Section is not null);
+        if (extension is null)
+            return ([.. sound.Select(table => table.Section!)], []);
+        var extended = sound.Select(extension.Of).ToList();
+        foreach (var section in extended)
+            if (section.Doubt is { } doubt)
+                findings.Doubt(doubt);
+        return (
+            [.. extended.Where(section => section.Obstacle is null).Select(section => section.Section!)],
+            [.. extended.Where(section => section.Obstacle is not null).Select(section => section.Obstacle!.Value)]);
+    }
 
     /// <summary>Reads every table of a set for its errors alone: the blade that would name some of them cannot be read.</summary>
     public void ReadAll(string setFolder)

@@ -1,3 +1,4 @@
+using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies.Fingerprints;
 
 namespace BladeLoads.Studies.Tables;
@@ -11,10 +12,10 @@ internal static class ThicknessCheck
 
     /// <param name="set">Null where the set says nothing of its tables, or its file cannot be read, which is reported already.</param>
     /// <param name="hasFile">Whether there is a file.</param>
-    /// <param name="tables">Of the set, in the order of their thickness where the blade is by thickness.</param>
+    /// <param name="sections">Those that can be used, as they serve.</param>
     /// <param name="folder">The set's folder as messages name it.</param>
     public static bool IsSound(
-        BladeTable blade, SetFile? set, bool hasFile, IReadOnlyList<PolarTable> tables, string folder, Findings findings)
+        BladeTable blade, SetFile? set, bool hasFile, IReadOnlyList<Section> sections, string folder, Findings findings)
     {
         if (blade.Blade is not { IsByThickness: true })
         {
@@ -38,7 +39,7 @@ internal static class ThicknessCheck
             return false;
         }
         DoubtBeyond(blade, set, findings);
-        return HaveCommonAngles(set, tables, findings);
+        return HaveCommonAngles(set, sections, findings);
     }
 
     private static void DoubtDifferences(BladeTable blade, SetFile set, string folder, Findings findings)
@@ -64,9 +65,9 @@ internal static class ThicknessCheck
         => $"thickness_ratio is {CanonicalText.Of(row.ThicknessRatio)}, {side} table of the set, '{end.Section}' with "
             + $"{CanonicalText.Of(end.ThicknessRatio)}, which serves alone";
 
-    private static bool HaveCommonAngles(SetFile set, IReadOnlyList<PolarTable> tables, Findings findings)
+    private static bool HaveCommonAngles(SetFile set, IReadOnlyList<Section> sections, Findings findings)
     {
-        var polars = tables.Where(t => t.Section is not null).SelectMany(t => t.Section!.Polars).ToArray();
+        var polars = sections.SelectMany(section => section.Polars).ToArray();
         if (polars.Length == 0)
             return false;
         var (first, last) = (polars.Max(p => p.Angles[0]), polars.Min(p => p.Angles[^1]));

@@ -64,9 +64,17 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads polar scale polars/clean --out polars/worn --drag-floor 2 --only 'tip-*'", "some of its sections; the others are copied"),
             ("bladeloads polar scale polars/clean/t18.csv --out polars/soiled --largest-lift 0.85", "one table, into the folder of a set"),
         ],
+        ["polar draw"] =
+        [
+            ("bladeloads polar draw inputs/tarn-valley", "a page for each table that its cases use, into results/tarn-valley/pictures"),
+            ("bladeloads polar draw polars/clean --format both --out pages", "every table of a set, as SVG and PNG"),
+            ("bladeloads polar draw polars/new/t18.csv --before polars/old/t18.csv", "what an update of a table changed"),
+            ("bladeloads polar draw inputs/tarn-valley --before /old/tarn-valley --only 'tarn-*'", "the same for tables of a study, beside an earlier copy"),
+        ],
         ["polar"] =
         [
             ("bladeloads polar check inputs/tarn-valley", "can the tables be trusted where the blades work?"),
+            ("bladeloads polar draw inputs/tarn-valley", "every table of a study on a page of its own"),
             ("bladeloads polar scale polars/clean --out polars/soiled --largest-lift 0.9 --drag-floor 1.5", "soiled blades from clean ones"),
             ("bladeloads polar scale --help", "the options of a command"),
         ],

@@ -137,6 +137,10 @@ internal static class PlanJson
             case StaleReason.ValueRemoved r:
                 Write(json, "value-removed", ("key", r.Key), ("from", r.From));
                 break;
+            case StaleReason.AirFollowed r:
+                Write(json, "air-followed");
+                WriteValues(json, r.Values);
+                break;
             case StaleReason.TableRowsChanged r:
                 Write(json, "table-rows-changed", ("table", r.Table), ("unit", r.Unit));
                 WriteRows(json, r);
@@ -172,6 +176,20 @@ internal static class PlanJson
             default:
                 throw new InvalidOperationException($"a reason without keys: {reason.GetType().Name}");
         }
+    }
+
+    private static void WriteValues(Utf8JsonWriter json, ImmutableArray<StaleReason.ValueChanged> values)
+    {
+        json.WriteStartArray("values");
+        foreach (var value in values)
+        {
+            json.WriteStartObject();
+            json.WriteString("key", value.Key);
+            json.WriteString("from", value.From);
+            json.WriteString("to", value.To);
+            json.WriteEndObject();
+        }
+        json.WriteEndArray();
     }
 
     private static void WriteRows(Utf8JsonWriter json, StaleReason.TableRowsChanged reason)

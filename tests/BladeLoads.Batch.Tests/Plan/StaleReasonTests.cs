@@ -51,6 +51,15 @@ public sealed class StaleReasonTests : IDisposable
     }
 
     [Fact]
+    public void What_is_done_to_tables_is_a_value_and_no_table()
+    {
+        Solve(Case(("sections.augment", "snel-1993")));
+        Assert.Equal(
+            "out of date: sections.aspect_ratio is new: 12; sections.augment snel-1993 -> du-selig-1998; sections.extend is new: viterna-1982",
+            Said(Case(("sections.augment", "du-selig-1998"), ("sections.extend", "viterna-1982"), ("sections.aspect_ratio", "12"))));
+    }
+
+    [Fact]
     public void A_table_that_holds_other_numbers_is_named()
     {
         Solve(Case(("blade", OneTable), ("section.tarn-30", OneTable)));

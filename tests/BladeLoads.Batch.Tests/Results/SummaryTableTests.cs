@@ -43,6 +43,18 @@ public class SummaryTableTests
     }
 
     [Fact]
+    public void The_largest_thrust_of_a_flat_top_is_where_the_design_points_have_it()
+    {
+        // Held at a limit: a row before it has the same thrust but for its last digits.
+        CurvePoint At(double windSpeed, double thrust)
+            => FellRotor.Point(windSpeed) with { Loads = FellRotor.Loads(windSpeed) with { Thrust = thrust } };
+        var top = At(9.4, 280e3);
+        var curve = new PowerCurve(
+            [At(9, 280e3 * (1 - 5e-10)), top, At(10, 280e3)], null, null, [new DesignPoint("largest thrust", top)], PointMarks.None, 3);
+        Assert.Equal(new Extreme(280e3, 9.4), CaseSummary.Of(curve).LargestThrust);
+    }
+
+    [Fact]
     public void The_best_point_and_the_energy_stand_in_the_units_of_their_columns()
     {
         var summary = Summary(0.5, 1, 1) with

@@ -4,7 +4,7 @@ namespace BladeLoads.EndToEnd.Documentation;
 
 public sealed class Documented_keys : IDisposable
 {
-    private static readonly string[] Tables = ["rotor", "air", "wind", "control", "site", "surface", "model", "outputs"];
+    private static readonly string[] Tables = ["rotor", "air", "wind", "control", "site", "surface", "model", "sections", "outputs"];
 
     private readonly ExtractedStudies _studies = new();
 

@@ -1,4 +1,5 @@
 using BladeLoads.Rotor.Energy;
+using MathNet.Numerics;
 using Xunit.Abstractions;
 
 namespace BladeLoads.Rotor.Tests.Energy;
@@ -38,6 +39,41 @@ public sealed class EnergyTests(ITestOutputHelper output)
         var below = speeds[..^1].Sum(climate.Cumulative);
         var closed = 1000 * ((climate.Cumulative(25) * (25 - 0.25)) - (0.5 * below));
         Assert.Equal(8760.0 * 3600 * closed, AnnualEnergy.OfBins(speeds, powers, climate), 1e-6 * closed * 8760 * 3600);
+    }
+
+    /// <summary>
+    /// The integral of c V f(V) from 0 to n = 25 m/s is c Vm erf(x) - c n exp(-x^2), x = sqrt(pi)/2 n/Vm, by parts; error function of key mathnet. The
+    /// sum in bins of width h differs from it by c h^2 f(n)/12 and terms of h^4.
+    /// </summary>
+    [Theory]
+    [InlineData(5)]
+    [InlineData(7.5)]
+    [InlineData(10)]
+    public void The_bin_sum_of_a_straight_line_is_its_integral_over_the_distribution_of_Rayleigh(double mean)
+    {
+        const double PowerPerWind = 1000, Last = 25;
+        double[] speeds = [.. Enumerable.Range(1, 50).Select(i => 0.5 * i)];
+        var x = Math.Sqrt(Math.PI) / 2 * Last / mean;
+        var integral = PowerPerWind * ((mean * SpecialFunctions.Erf(x)) - (Last * Math.Exp(-x * x)));
+        var summed = AnnualEnergy.OfBins(speeds, [.. speeds.Select(v => PowerPerWind * v)], new WindClimate.Weibull(mean, 2));
+        output.WriteLine($"{summed / (8760 * 3600 * integral) - 1:E2}");
+        Assert.Equal(8760.0 * 3600 * integral, summed, 1e-5 * summed);
+    }
+
+    /// <summary>The same for another shape: c A g(1 + 1/k, (n/A)^k), g the lower incomplete gamma function of key mathnet.</summary>
+    [Theory]
+    [InlineData(1.8)]
+    [InlineData(2.5)]
+    [InlineData(3)]
+    public void The_bin_sum_of_a_straight_line_is_its_integral_over_a_Weibull_climate(double shape)
+    {
+        const double PowerPerWind = 1000, Last = 25, Mean = 7.5;
+        double[] speeds = [.. Enumerable.Range(1, 50).Select(i => 0.5 * i)];
+        var scale = Mean / SpecialFunctions.Gamma(1 + (1 / shape));
+        var integral = PowerPerWind * scale * SpecialFunctions.GammaLowerIncomplete(1 + (1 / shape), Math.Pow(Last / scale, shape));
+        var summed = AnnualEnergy.OfBins(speeds, [.. speeds.Select(v => PowerPerWind * v)], new WindClimate.Weibull(Mean, shape));
+        output.WriteLine($"{summed / (8760 * 3600 * integral) - 1:E2}");
+        Assert.Equal(8760.0 * 3600 * integral, summed, 2e-5 * summed);
     }
 
     [Fact]

@@ -19,8 +19,13 @@ internal static class PublishedRotor
 
     public static CurvePoint SolveAt(
         OperatingPoint point, Blade blade, SectionSet sections, int bladeCount, double cone, AirProperties air, BalanceModel model)
+        => SolveAt(point, blade, sections, Augmentation.None, bladeCount, cone, air, model);
+
+    public static CurvePoint SolveAt(
+        OperatingPoint point, Blade blade, SectionSet sections, Augmentation augmentation, int bladeCount, double cone, AirProperties air,
+        BalanceModel model)
     {
-        var rotorCase = new RotorCase(blade, sections, Augmentation.None, bladeCount, cone, air, [point.WindSpeed],
+        var rotorCase = new RotorCase(blade, sections, augmentation, bladeCount, cone, air, [point.WindSpeed],
             new Control.FixedSpeed(point.RotorSpeed, point.Pitch, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1), model);
         return Assert.Single(CaseSolver.Solve(rotorCase, CancellationToken.None).Points);
     }
@@ -44,6 +49,10 @@ internal static class PublishedRotor
 
     /// <summary>A blade whose rows lie between two published sections: each row gets a section of its own, blended by its share.</summary>
     public static (Blade Blade, SectionSet Sections) WithBlendedSections(string folder, string angleColumn)
+        => WithBlendedSections(folder, angleColumn, name => ReadPolar($"{folder}/polars/{name}.csv"));
+
+    /// <param name="polarOf">The polar of a section that the rows name, before it is blended.</param>
+    public static (Blade Blade, SectionSet Sections) WithBlendedSections(string folder, string angleColumn, Func<string, Polar> polarOf)
     {
         var stations = new List<BladeStation>();
         var sections = new Dictionary<string, Section>(StringComparer.Ordinal);
@@ -53,9 +62,9 @@ internal static class PublishedRotor
             var name = share == 0 ? inner : $"{inner} {row.Text("outer_share")} {outer}";
             if (!sections.ContainsKey(name))
             {
-                var polar = ReadPolar($"{folder}/polars/{inner}.csv");
+                var polar = polarOf(inner);
                 if (share != 0)
-                    polar = Blend(polar, ReadPolar($"{folder}/polars/{outer}.csv"), share);
+                    polar = Blend(polar, polarOf(outer), share);
                 sections.Add(name, Section.FromPolars(name, [polar]));
             }
             stations.Add(new BladeStation(row["radius_m"], row["chord_m"], row[angleColumn] * Degree, name));

@@ -95,7 +95,7 @@ public sealed class PolarExtensionTests
         // By hand: the relation mirrored with 0.7 of the lift through (-9 deg, -0.7, 0.03).
         var mirrored = DeepStall.Through(Rad(9), 0.7 / 0.7, 0.03, LargestDrag);
         var polar = PolarExtension.Extend(Table(1e6, Cambered), AspectRatio, ExtensionJoin.Stall).Polar;
-        foreach (var angle in new[] { 10.0, 25, 50, 87.5 })
+        foreach (var angle in new[] { 9.5, 12.5, 25, 50, 87.5 })
         {
             var (lift, drag) = mirrored.At(Rad(angle));
             Assert.Equal(-0.7 * lift, At(polar, -angle).Lift, 1e-12);
@@ -104,17 +104,38 @@ public sealed class PolarExtensionTests
     }
 
     [Fact]
-    public void A_table_that_begins_before_it_stalls_passes_straight_to_the_mirrored_stall_point()
+    public void A_table_that_begins_before_it_stalls_passes_to_the_mirrored_stall_point()
     {
         var extended = PolarExtension.Extend(Table(1e6, [.. Cambered.Skip(3)]), AspectRatio, ExtensionJoin.Stall);
         Assert.Equal(ExtensionKind.Mirrored, extended.Below.Kind);
         Assert.False(extended.Below.ShowsStall);
         Assert.Equal(Rad(-4), extended.Below.JoinAngle);
         Assert.Equal((-0.7 * 1.4, 0.03), At(extended.Polar, -12));
-        Assert.False(Has(extended.Polar, -7.5), "a row where the line is straight");
+        // Its lift line would lead to -0.98 only within half a degree of -12: a straight line.
+        Assert.Equal(-0.1 - (0.88 * 3.5 / 8), At(extended.Polar, -7.5).Lift, 1e-12);
         Assert.Equal(-0.7 * At(extended.Polar, 30).Lift, At(extended.Polar, -30).Lift, 1e-12);
         // By hand: the slope of the line, (-0.98 + 0.1)/(-8 deg), less the secant of the first two rows, 0.45/(4 deg).
         Assert.Equal(((0.88 / 8) - (0.45 / 4)) * 180 / Math.PI, extended.Below.LiftSlopeBreak, 1e-6);
+    }
+
+    [Fact]
+    public void A_table_that_begins_above_zero_lift_goes_down_along_its_lift_line()
+    {
+        // Lift 0.1 a degree through -2 degrees to 8; stall at 14 degrees with 1.1, so -0.77 at -14.
+        var polar = Table(1e6, (-1, 0.1, 0.01), (2, 0.4, 0.01), (5, 0.7, 0.01), (8, 1.0, 0.012), (14, 1.1, 0.04), (18, 0.8, 0.2));
+        var extended = PolarExtension.Extend(polar, AspectRatio, ExtensionJoin.End);
+        Assert.Equal(ExtensionKind.Mirrored, extended.Below.Kind);
+        Assert.Equal(-0.05, At(extended.Polar, -2.5).Lift, 1e-12);
+        Assert.Equal(-0.55, At(extended.Polar, -7.5).Lift, 1e-12);
+        // The line meets -0.77 at -9.7.
+        Assert.Equal(-0.77, At(extended.Polar, -9.7).Lift, 1e-12);
+        Assert.Equal(-0.77, At(extended.Polar, -12.5).Lift, 1e-12);
+        Assert.Equal((-0.77, 0.04), (Math.Round(At(extended.Polar, -14).Lift, 12), At(extended.Polar, -14).Drag));
+        Assert.Equal(0.01 + (0.03 * 11.5 / 13), At(extended.Polar, -12.5).Drag, 1e-12);
+        Assert.Equal(0, extended.Below.LiftSlopeBreak, 1e-6);
+        var (before, after) = (PotentialLift.Of(polar)!.Value, PotentialLift.Of(extended.Polar)!.Value);
+        Assert.Equal(before.ZeroLiftAngle, after.ZeroLiftAngle, 1e-12);
+        Assert.Equal(before.LiftSlope, after.LiftSlope, 1e-12);
     }
 
     [Fact]
@@ -208,8 +229,8 @@ public sealed class PolarExtensionTests
         // A panel method's drag, far too low: 2 x 1.328/sqrt(1e5) is 0.0084.
         var polar = Table(1e5, (-6, -0.6, 0.002), (0, 0, 0.001), (6, 0.6, 0.002));
         var extended = PolarExtension.Extend(polar, AspectRatio, ExtensionJoin.End);
-        // On either side 174, 175, 177.5 and 180 degrees, where the drag passes from that at the join to that at zero lift.
-        Assert.Equal(8, extended.RaisedToFloor);
+        // On either side 6.5 degrees, just beyond the join, and 174, 175, 177.5 and 180, where drag passes to that at zero lift.
+        Assert.Equal(10, extended.RaisedToFloor);
         Assert.Equal(2 * 1.328 / Math.Sqrt(1e5), extended.Polar.Drag[^1], 1e-15);
         Assert.Equal((0, 0.001), At(extended.Polar, 0));
         Assert.Equal(0, PolarExtension.Extend(Table(double.NaN, (-6, -0.6, 0.002), (0, 0, 0.001), (6, 0.6, 0.002)), AspectRatio, ExtensionJoin.End).RaisedToFloor);

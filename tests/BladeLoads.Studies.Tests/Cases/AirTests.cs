@@ -38,11 +38,30 @@ public class AirTests
         "cases/clean.toml:13:1: 'relative_humidity' does not go with density_kg_m3, which gives the density already; leave one of them out")]
     [InlineData("pressure_Pa = 1e5\naltitude_m = 500",
         "cases/clean.toml:12:1: 'pressure_Pa' does not go with altitude_m, which gives the pressure already; leave one of them out")]
-    [InlineData("pressure_Pa = 1013.25", "cases/clean.toml:12:15: pressure_Pa is 1013.25; it must be from 10000 to 120000")]
-    [InlineData("altitude_m = 12000", "cases/clean.toml:12:14: altitude_m is 12000; it must be from -500 to 11000")]
-    [InlineData("temperature_C = 288.15", "cases/clean.toml:12:17: temperature_C is 288.15; it must be from -100 to 100")]
-    [InlineData("relative_humidity = 60", "cases/clean.toml:12:21: relative_humidity is 60; it must be from 0 to 1")]
-    [InlineData("reference_density_kg_m3 = 0", "cases/clean.toml:12:27: reference_density_kg_m3 is 0; it must be above 0 and at most 100")]
+    [InlineData("density_kg_m3 = 1.2\naltitude_m = 500\ntemperature_C = 5\npressure_Pa = 1e5\nrelative_humidity = 0.5",
+        "cases/clean.toml:13:1: 'altitude_m', 'temperature_C', 'pressure_Pa' and 'relative_humidity' do not go with density_kg_m3, "
+        + "which gives the density already; leave density_kg_m3 out, or the others; of altitude_m and pressure_Pa one does, as either gives the pressure")]
+    [InlineData("relative_humidity = 0.5\ndensity_kg_m3 = 1.2\ntemperature_C = 5",
+        "cases/clean.toml:12:1: 'relative_humidity' and 'temperature_C' do not go with density_kg_m3, which gives the density already; "
+        + "leave density_kg_m3 out, or the others")]
+    [InlineData("pressure_Pa = 101.325", "cases/clean.toml:12:15: pressure_Pa is 101.325; it must be from 10000 to 120000: "
+        + "the air over ground has more; is it in kPa? write 101325")]
+    [InlineData("pressure_Pa = 130000", "cases/clean.toml:12:15: pressure_Pa is 130000; it must be from 10000 to 120000: "
+        + "the air over ground has less; give it in Pa, such as 101325")]
+    [InlineData("temperature_C = -273", "cases/clean.toml:12:17: temperature_C is -273; it must be from -100 to 100: "
+        + "no air over ground is as cold; give it in degrees C, such as 15")]
+    [InlineData("relative_humidity = -0.1", "cases/clean.toml:12:21: relative_humidity is -0.1; it must be from 0 to 1: "
+        + "air cannot be drier than dry; give the share of saturation, such as 0.6")]
+    [InlineData("pressure_Pa = 1013.25", "cases/clean.toml:12:15: pressure_Pa is 1013.25; it must be from 10000 to 120000: "
+        + "the air over ground has more; is it in hPa? write 101325")]
+    [InlineData("altitude_m = 12000", "cases/clean.toml:12:14: altitude_m is 12000; it must be from -500 to 11000: "
+        + "the standard atmosphere is used no higher; give it in m over the sea, such as 500, or the density itself")]
+    [InlineData("temperature_C = 288.15", "cases/clean.toml:12:17: temperature_C is 288.15; it must be from -100 to 100: "
+        + "no air over ground is as hot; is it in kelvin? write 15")]
+    [InlineData("relative_humidity = 60", "cases/clean.toml:12:21: relative_humidity is 60; it must be from 0 to 1: "
+        + "air holds no more water than when it is saturated; it is a share and not percent: write 0.6")]
+    [InlineData("reference_density_kg_m3 = 0", "cases/clean.toml:12:27: reference_density_kg_m3 is 0; it must be above 0 and at most 100: "
+        + "there would be no air; give it in kg/m3, such as 1.225")]
     public void Wrong_air_is_told(string keys, string expected) => Told.Exactly([expected], Study(keys).Read().Errors);
 
     [Fact]
@@ -61,6 +80,14 @@ public class AirTests
 
         Assert.Equal([1.225, 1.1117], study.SoundCases().Select(c => Math.Round(c.Rotor.Air.Density, 4)));
     }
+
+    [Fact]
+    public void Swept_keys_that_exclude_a_density_are_told_once_at_the_key()
+        => Told.Exactly(
+            ["cases/clean.toml:15:1: 'altitude_m' and 'temperature_C' do not go with density_kg_m3, which gives the density already; "
+                + "leave density_kg_m3 out, or the others"],
+            new FellStudy().With("cases/clean.toml", FellStudy.VariableSpeedCase.Replace("[model]\n", "[air]\ndensity_kg_m3 = 1.2\n", StringComparison.Ordinal)
+                + "[sweep]\n\"air.altitude_m\" = [0, 500, 1000]\n\"air.temperature_C\" = [-5, 12]\n").Read().Errors);
 
     private static FellStudy Study(string keys) => new FellStudy().With("cases/clean.toml", FellStudy.VariableSpeedCase
         .Replace("[model]\n", $"[air]\n{keys}\n[model]\n", StringComparison.Ordinal));

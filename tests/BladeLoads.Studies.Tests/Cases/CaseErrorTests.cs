@@ -65,7 +65,7 @@ public class CaseErrorTests
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = 1e400",
         "cases/clean.toml:13:19: rotor_speed_rpm is infinite; give a finite number")]
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = -70",
-        "cases/clean.toml:13:19: rotor_speed_rpm is -70; it must be from 0 to 100000")]
+        "cases/clean.toml:13:19: rotor_speed_rpm is -70; it must be from 0 to 100000: the rotor turns one way only; give it in rpm, such as 12")]
     [InlineData("pitch_deg       = 2", "pitch_deg = 181",
         "cases/clean.toml:14:13: pitch_deg is 181; it must be from -180 to 180")]
     [InlineData("blade_count = 3", "blade_count = 0",
@@ -79,25 +79,32 @@ public class CaseErrorTests
     [InlineData("blade_count = 3", "blade_count = 3\nhub_height_m = 0",
         "cases/clean.toml:7:16: hub_height_m is 0; it must be above 0")]
     [InlineData("[rotor]", "[air]\ndensity_kg_m3 = 0\ndynamic_viscosity_Pa_s = -1e-5\n[rotor]",
-        "cases/clean.toml:6:17: density_kg_m3 is 0; it must be above 0 and at most 100",
-        "cases/clean.toml:7:26: dynamic_viscosity_Pa_s is -1e-05; it must be above 0 and at most 1")]
+        "cases/clean.toml:6:17: density_kg_m3 is 0; it must be above 0 and at most 100: there would be no air; give it in kg/m3, such as 1.225",
+        "cases/clean.toml:7:26: dynamic_viscosity_Pa_s is -1e-05; it must be above 0 and at most 1: "
+        + "Reynolds numbers would have no bound; give it in Pa s, such as 1.789e-5")]
     // Beyond what any rotor is.
     [InlineData("[rotor]", "[air]\ndensity_kg_m3 = 1225\ndynamic_viscosity_Pa_s = 17.89\n[rotor]",
-        "cases/clean.toml:6:17: density_kg_m3 is 1225; it must be above 0 and at most 100",
-        "cases/clean.toml:7:26: dynamic_viscosity_Pa_s is 17.89; it must be above 0 and at most 1")]
+        "cases/clean.toml:6:17: density_kg_m3 is 1225; it must be above 0 and at most 100: no air is as dense; give it in kg/m3, such as 1.225",
+        "cases/clean.toml:7:26: dynamic_viscosity_Pa_s is 17.89; it must be above 0 and at most 1: "
+        + "no air is as viscous; give it in Pa s, such as 1.789e-5")]
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = 100001\nrated_power_kW = 2e9",
-        "cases/clean.toml:13:19: rotor_speed_rpm is 100001; it must be from 0 to 100000",
-        "cases/clean.toml:14:18: rated_power_kW is 2000000000; it must be above 0 and at most 1000000000")]
+        "cases/clean.toml:13:19: rotor_speed_rpm is 100001; it must be from 0 to 100000: no rotor turns as fast; give it in rpm, such as 12",
+        "cases/clean.toml:14:18: rated_power_kW is 2000000000; it must be above 0 and at most 1000000000: "
+        + "no machine makes as much; give it in kW, such as 2000, or leave the key out for none")]
     [InlineData("rotor_speed_rpm = 70", "rotor_speed_rpm = 70\ncut_in_wind_speed_m_s = 201\ncut_out_wind_speed_m_s = 250",
-        "cases/clean.toml:14:25: cut_in_wind_speed_m_s is 201; it must be from 0 to 200",
-        "cases/clean.toml:15:26: cut_out_wind_speed_m_s is 250; it must be above 0 and at most 200")]
+        "cases/clean.toml:14:25: cut_in_wind_speed_m_s is 201; it must be from 0 to 200: "
+        + "no machine operates there; give it in m/s, such as 3, or leave the key out for none",
+        "cases/clean.toml:15:26: cut_out_wind_speed_m_s is 250; it must be above 0 and at most 200: "
+        + "no machine operates there; give it in m/s, such as 25, or leave the key out for none")]
     [InlineData("{ from = 5, to = 7, step = 1 }", "[5, 201]",
         "cases/clean.toml:9:18: speeds_m_s holds 201; wind speeds must be at most 200 m/s")]
     [InlineData("to = 7", "to = 2400",
         "cases/clean.toml:9:31: speeds_m_s has to = 2400; wind speeds must be at most 200 m/s")]
     [InlineData("[wind]", "[air]\nrelative_humidity = 50\n[wind]\nturbulence_intensity = 12",
-        "cases/clean.toml:9:21: relative_humidity is 50; it must be from 0 to 1",
-        "cases/clean.toml:11:24: turbulence_intensity is 12; it must be from 0 to 1")]
+        "cases/clean.toml:9:21: relative_humidity is 50; it must be from 0 to 1: "
+        + "air holds no more water than when it is saturated; it is a share and not percent: write 0.5",
+        "cases/clean.toml:11:24: turbulence_intensity is 12; it must be from 0 to 1: "
+        + "the wind speed would vary by more than its mean; it is a share and not percent: write 0.12")]
     // Wind speeds.
     [InlineData("step = 1 ", "step = 0 ",
         "cases/clean.toml:9:41: speeds_m_s has step = 0; it must be above 0")]

@@ -60,7 +60,15 @@ public class FurtherTests
         "cases/clean.toml:9:19: tip_speed_ratio is 'bets'; give a number, or \"best\" for the one with the highest power coefficient")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = \"1,5\"",
         "cases/clean.toml:10:18: fine_pitch_deg is '1,5'; write decimals with a point: 1.5, without quotes")]
-    [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nthrust_limit_kN = 0", "cases/clean.toml:11:19: thrust_limit_kN is 0; it must be above 0")]
+    [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nthrust_limit_kN = 0", "cases/clean.toml:11:19: thrust_limit_kN is 0; it must be above 0: a rotor that takes no thrust makes no power; "
+        + "give the largest thrust that the rotor may take, in kN, such as 320, or leave the key out for none")]
+    [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nthrust_limit_kN = -280", "cases/clean.toml:11:19: thrust_limit_kN is -280; it must be above 0: "
+        + "a rotor that takes no thrust makes no power; give the largest thrust that the rotor may take, in kN, such as 320, or leave the key out for none")]
+    [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nrated_power_kW = 5\ndrivetrain_efficiency = [[2, 0.8], [30, 0.9], [100, 0.95]]",
+        "cases/clean.toml:12:37: drivetrain_efficiency has load 30; it must be from 0 to 10: "
+        + "no machine carries ten times its rated power; it is a share and not percent: write 0.3\n"
+        + "cases/clean.toml:12:48: drivetrain_efficiency has load 100; it must be from 0 to 10: "
+        + "no machine carries ten times its rated power; it is a share and not percent: write 1")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nabove_rated = \"pitch-to-stall\"",
         "cases/clean.toml:11:15: above_rated is 'pitch-to-stall' without a rated power; give rated_power_kW or leave above_rated out")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\ndrivetrain_efficiency = [[0, 0.8], [1, 0.9]]",
@@ -70,8 +78,10 @@ public class FurtherTests
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nrated_power_kW = 5\ndrivetrain_efficiency = [[1, 0.8], [0.5, 0.9]]",
         "cases/clean.toml:12:37: drivetrain_efficiency falls from load 1 to 0.5; loads must rise")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nrated_power_kW = 5\ndrivetrain_efficiency = [[-1, 80], [1, 0.9]]",
-        "cases/clean.toml:12:27: drivetrain_efficiency has load -1; it must be 0 or more\n"
-        + "cases/clean.toml:12:31: drivetrain_efficiency has efficiency 80; it must be above 0 and at most 1")]
+        "cases/clean.toml:12:27: drivetrain_efficiency has load -1; it must be from 0 to 10: a load is a share of rated electrical power; "
+        + "give the share of rated electrical power, such as 0.25\n"
+        + "cases/clean.toml:12:31: drivetrain_efficiency has efficiency 80; it must be above 0 and at most 1: "
+        + "electrical power would exceed rotor power; it is a share and not percent: write 0.8")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nrated_power_kW = 5\ndrivetrain_efficiency = [[0.5, 0.4], [0.6, 0.9]]",
         "cases/clean.toml:12:38: drivetrain_efficiency rises so steeply from load 0.5 to 0.6 that more load would need less rotor power; check both pairs")]
     [InlineData("fine_pitch_deg = 1", "fine_pitch_deg = 1\nrated_power_kW = 5\ndrivetrain_efficiency = [0.9]",
@@ -82,10 +92,16 @@ public class FurtherTests
         => Told.Exactly(expected.Split('\n'), Study().Change("cases/clean.toml", text, by).Read().Errors);
 
     [Theory]
-    [InlineData("turbulence_intensity = 12", "cases/clean.toml:6:24: turbulence_intensity is 12; it must be from 0 to 1")]
+    [InlineData("turbulence_intensity = 12", "cases/clean.toml:6:24: turbulence_intensity is 12; it must be from 0 to 1: "
+        + "the wind speed would vary by more than its mean; it is a share and not percent: write 0.12")]
+    [InlineData("turbulence_intensity = -0.1", "cases/clean.toml:6:24: turbulence_intensity is -0.1; it must be from 0 to 1: "
+        + "a standard deviation is never negative; give the standard deviation over the mean, such as 0.16")]
+    [InlineData("turbulence_intensity = 1.2", "cases/clean.toml:6:24: turbulence_intensity is 1.2; it must be from 0 to 1: "
+        + "the wind speed would vary by more than its mean; give the standard deviation over the mean, such as 0.16")]
     [InlineData("turbulence_intensity = [[5, 0.2], [4, 0.1]]",
         "cases/clean.toml:6:36: turbulence_intensity falls from wind speed 5 to 4; wind speeds must rise")]
-    [InlineData("turbulence_intensity = [[5, 20]]", "cases/clean.toml:6:29: turbulence_intensity has intensity 20; it must be from 0 to 1")]
+    [InlineData("turbulence_intensity = [[5, 20]]", "cases/clean.toml:6:29: turbulence_intensity has intensity 20; it must be from 0 to 1: "
+        + "the wind speed would vary by more than its mean; it is a share and not percent: write 0.2")]
     public void Wrong_turbulence_is_told(string key, string expected) => Told.Exactly([expected], Wind(key).Read().Errors);
 
     [Theory]

@@ -51,26 +51,51 @@ public class SiteTests
     [Theory]
     [InlineData("availability = 0.97",
         "cases/clean.toml:11:2: [site] mean_wind_speed_m_s is missing; write it, such as mean_wind_speed_m_s = 7.5")]
-    [InlineData("mean_wind_speed_m_s = 7\nweibull_shape = 0.8", "cases/clean.toml:13:17: weibull_shape is 0.8; it must be 1 or more")]
-    [InlineData("mean_wind_speed_m_s = 7\navailability = 0", "cases/clean.toml:13:16: availability is 0; it must be above 0 and at most 1")]
-    [InlineData("mean_wind_speed_m_s = 7\navailability = 97", "cases/clean.toml:13:16: availability is 97; it must be above 0 and at most 1")]
+    [InlineData("mean_wind_speed_m_s = 7\nweibull_shape = 0.8", "cases/clean.toml:13:17: weibull_shape is 0.8; it must be 1 or more: below 1 calm would be the likeliest wind; "
+        + "sites have 1.5 to 3, and 2 is Rayleigh's; fit it to the wind at hub height, or give a histogram of it")]
+    [InlineData("mean_wind_speed_m_s = 7\navailability = 0", "cases/clean.toml:13:16: availability is 0; it must be above 0 and at most 1: "
+        + "the machine would never run; give the share of time in which it can run, such as 0.97")]
+    [InlineData("mean_wind_speed_m_s = 7\navailability = 97", "cases/clean.toml:13:16: availability is 97; it must be above 0 and at most 1: "
+        + "the machine would run longer than the year; it is a share and not percent: write 0.97")]
+    [InlineData("mean_wind_speed_m_s = 7\navailability = 1.1", "cases/clean.toml:13:16: availability is 1.1; it must be above 0 and at most 1: "
+        + "the machine would run longer than the year; give the share of time in which it can run, such as 0.97")]
+    [InlineData("mean_wind_speed_m_s = 0", "cases/clean.toml:12:23: mean_wind_speed_m_s is 0; it must be above 0 and at most 200: "
+        + "there would be no wind; give the mean of the year at hub height in m/s, such as 7.5")]
+    [InlineData("mean_wind_speed_m_s = 7\nlosses = { wakes = 1 }", "cases/clean.toml:13:20: losses has 'wakes' 1; it must be 0 or more and below 1: "
+        + "no energy would be left; it is a share and not percent: write 0.01")]
+    [InlineData("mean_wind_speed_m_s = 7\nlosses = { wakes = -0.06 }", "cases/clean.toml:13:20: losses has 'wakes' -0.06; it must be 0 or more and below 1: "
+        + "a loss would add energy; give the share of energy that is lost, such as 0.06")]
+    [InlineData("mean_wind_speed_m_s = 7\nlosses = { wakes = nan }",
+        "cases/clean.toml:13:20: losses has 'wakes' nan; give the share of energy that is lost, such as 0.06")]
     [InlineData("mean_wind_speed_m_s = 7\nlosses = 0.1",
         "cases/clean.toml:13:10: losses is 0.1; name each loss with its share: { wakes = 0.06, grid = 0.02 }")]
     [InlineData("mean_wind_speed_m_s = 7\nlosses = { wakes = 6 }",
-        "cases/clean.toml:13:20: losses has 'wakes' 6; give the share of energy that is lost, from 0 to 1")]
+        "cases/clean.toml:13:20: losses has 'wakes' 6; it must be 0 or more and below 1: no energy would be left; it is a share and not percent: write 0.06")]
     [InlineData("mean_wind_speed_m_s = 7\nhistogram = \"../site/mast.csv\"",
         "cases/clean.toml:12:1: 'mean_wind_speed_m_s' does not go with histogram, which says how often each wind speed blows; leave one of them out")]
+    [InlineData("weibull_shape = 2\nhistogram = \"../site/mast.csv\"\nmean_wind_speed_m_s = 7",
+        "cases/clean.toml:12:1: 'weibull_shape' and 'mean_wind_speed_m_s' do not go with histogram, which says how often each wind speed blows; "
+        + "leave histogram out, or the others")]
     [InlineData("histogram = \"../site/mats.csv\"", "cases/clean.toml:12:13: no file '../site/mats.csv'; site/ holds mast.csv")]
     public void A_wrong_site_is_told(string keys, string expected) => Told.Exactly([expected], Study(keys).Read().Errors);
 
     [Theory]
     [InlineData("10,20,0.25", "10,20,0.24",
-        "site/mast.csv: share sums to 0.99; the shares of all rows must make 1, so that the year is whole: divide each by 0.99")]
+        "site/mast.csv:1:17: share sums to 0.99 over 3 bins from 0 to 20 m/s, so 1% of the year would be missing; "
+        + "the shares must make 1 within a millionth: add the bins that are missing, or divide each share by 0.99")]
+    [InlineData("10,20,0.25", "10,20,0.3",
+        "site/mast.csv:1:17: share sums to 1.05 over 3 bins from 0 to 20 m/s, so 5% of the year would be counted twice; "
+        + "the shares must make 1 within a millionth: take out what is there twice, or divide each share by 1.05")]
+    [InlineData("0,5,0.25\n5,10,0.5\n10,20,0.25", "0,5,0\n5,10,0",
+        "site/mast.csv:1:17: share sums to 0, so the year would have no wind at all; give the share of time of each bin, which make 1 together")]
+    [InlineData("10,20,0.25", "10,20,-0.25", "site/mast.csv:4:7: share is -0.25; no time is negative: "
+        + "give the share of time, from 0 to 1, not percent or hours")]
     [InlineData("10,20,0.25", "11,20,0.25",
         "site/mast.csv:4:1: from_m_s is 11, where the bin before ends at 10; bins must follow on one another (give an empty one share 0)")]
     [InlineData("5,10,0.5", "5,5,0.5", "site/mast.csv:3:3: to_m_s is 5, not above from_m_s 5; a bin must have a width\n"
         + "site/mast.csv:4:1: from_m_s is 10, where the bin before ends at 5; bins must follow on one another (give an empty one share 0)")]
-    [InlineData("10,20,0.25", "10,20,25", "site/mast.csv:4:7: share is 25; give the share of time, from 0 to 1")]
+    [InlineData("10,20,0.25", "10,20,25", "site/mast.csv:4:7: share is 25; no bin holds more than all of the year: "
+        + "give the share of time, from 0 to 1, not percent or hours")]
     [InlineData("0,5,0.25", "-1,5,0.25", "site/mast.csv:2:1: from_m_s is -1; it must be 0 or more")]
     public void A_wrong_histogram_is_told_at_its_row(string text, string by, string expected)
         => Told.Exactly(expected.Split('\n'), Study("histogram = \"../site/mast.csv\"").Change("site/mast.csv", text, by).Read().Errors);

@@ -65,7 +65,7 @@ public class SweepTests
 
         Told.Exactly(
             [
-                "cases/clean.toml:17:31: density_kg_m3 is -1.05; it must be above 0 and at most 100",
+                "cases/clean.toml:17:31: density_kg_m3 is -1.05; it must be above 0 and at most 100: there would be no air; give it in kg/m3, such as 1.225",
                 "cases/clean.toml:18:27: pitch_deg is '2' in quotes, which is text; write the number without quotes: 2",
             ],
             study.Errors);
@@ -88,7 +88,9 @@ public class SweepTests
             .Replace("[control]", "[control]\nmin_rotor_speed_rpm = 10", StringComparison.Ordinal)
             + "[sweep]\n\"control.max_rotor_speed_rpm\" = [12, 9]\n").Read();
 
-        Told.Exactly(["cases/clean.toml:15:38: max_rotor_speed_rpm is 9, below min_rotor_speed_rpm 10; exchange them"], study.Errors);
+        Told.Exactly(
+            ["cases/clean.toml:15:38: max_rotor_speed_rpm is 9, below min_rotor_speed_rpm 10 in line 8: "
+                + "no rotor speed to turn at would be left; take 9 out of the sweep, or lower min_rotor_speed_rpm"], study.Errors);
         Assert.Equal(["clean~max_rotor_speed_rpm-12"], study.Cases.Select(c => c.Name));
     }
 

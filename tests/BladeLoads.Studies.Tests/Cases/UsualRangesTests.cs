@@ -40,6 +40,24 @@ public class UsualRangesTests
     public void A_rotor_speed_limit_is_judged_by_the_speed_of_the_tip(string line, string? expected)
         => AssertDoubts(FellStudy.VariableSpeedCase, "[control]", $"[control]\n{line}", expected);
 
+    [Theory]
+    [InlineData("thrust_limit_kN = 280_000", "cases/clean.toml:8:19: thrust_limit_kN is 280000; no rotor takes more than 10,000 kN; is it in newtons?")]
+    [InlineData("thrust_limit_kN = 10_000", null)]
+    [InlineData("cut_in_wind_speed_m_s = 8",
+        "cases/clean.toml:8:25: cut_in_wind_speed_m_s is 8, above the last wind speed of the case, 7 m/s; the rotor is at rest in every row")]
+    [InlineData("cut_out_wind_speed_m_s = 4.5", "cases/clean.toml:8:26: cut_out_wind_speed_m_s is 4.5, and the case lists no wind speed "
+        + "from cut-in 0 up to it; the rotor is at rest in every row")]
+    [InlineData("cut_in_wind_speed_m_s = 7\ncut_out_wind_speed_m_s = 7", null)]
+    public void A_control_that_is_probably_a_slip_is_a_doubt(string line, string? expected)
+        => AssertDoubts(FellStudy.VariableSpeedCase, "[control]", $"[control]\n{line}", expected);
+
+    [Theory]
+    [InlineData("turbulence_intensity = 0.7",
+        "cases/clean.toml:6:24: turbulence_intensity is 0.7; even in slight wind 0.6 is seldom exceeded; it is a share and not percent")]
+    [InlineData("turbulence_intensity = 0.6", null)]
+    public void A_turbulence_beyond_what_is_usual_is_a_doubt(string line, string? expected)
+        => AssertDoubts(FellStudy.VariableSpeedCase, "[wind]", $"[wind]\n{line}", expected);
+
     [Fact]
     public void A_schedule_is_judged_by_its_highest_rotor_speed()
         => Told.Exactly(

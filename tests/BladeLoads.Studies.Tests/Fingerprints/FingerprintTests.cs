@@ -45,6 +45,9 @@ public class FingerprintTests
     [InlineData("model.losses", "[model]", "[model]\nlosses = []")]
     [InlineData("model.heavy_loading", "[model]", "[model]\nheavy_loading = \"buhl-2005\"")]
     [InlineData("model.balance_with", "[model]", "[model]\nbalance_with = \"lift\"")]
+    [InlineData("sections.aspect_ratio sections.extend sections.join", "[model]", "[sections]\nextend = \"viterna-1982\"\n[model]")]
+    [InlineData("sections.augment", "[model]", "[sections]\naugment = \"snel-1993\"\n[model]")]
+    [InlineData("sections.augment", "[model]", "[sections]\naugment = \"du-selig-1998\"\n[model]")]
     [InlineData("outputs.spanwise", "[outputs]", "[outputs]\nspanwise = \"none\"")]
     [InlineData("outputs.spanwise", "[outputs]", "[outputs]\nspanwise = [6]")]
     public void Every_value_of_a_case_changes_it(string keys, string text, string by)
@@ -101,6 +104,7 @@ public class FingerprintTests
     [InlineData(Clean, "[model]", "[model]\nelements = 40\nspacing = \"cosine\"\nlosses = [\"hub\", \"tip\"]\nheavy_loading = \"glauert-1935\"\nbalance_with = \"lift and drag\"")]
     [InlineData(Clean, "[model]", "[air]\ndensity_kg_m3 = 1.2250\ndynamic_viscosity_Pa_s = 0.00001789\n[model]")]
     [InlineData(Clean, "[outputs]", "[outputs]\nspanwise = \"all\"")]
+    [InlineData(Clean, "[model]", "[sections]\nextend = \"none\"\naugment = \"none\"\naspect_ratio = 9\njoin = \"stall\"\n[model]")]
     [InlineData(Clean, "[control]", "[control]\nmin_rotor_speed_rpm = 0\ndrivetrain_efficiency = 1\nabove_rated = 'none'")]
     [InlineData(Clean, "blade  = ", "title = \"Another\"\nblade  = ")]
     [InlineData(Clean, "[rotor]", "[rotor]\nhub_height_m = 30\ncone_deg = -0.0")]

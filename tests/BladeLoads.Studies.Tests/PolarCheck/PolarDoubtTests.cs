@@ -189,7 +189,7 @@ public sealed class PolarDoubtTests
 
     [Fact]
     public void A_head_that_says_augmented_is_told() => Is(
-        ["1: the table is augmented for rotation, its head says; it holds for one rotor and one radius, and is not to be augmented again"],
+        ["1: the rows are augmented for rotation, by the head: 'snel-1993, c/r 0.21'; they hold for one rotor and one radius, and are not to be augmented again"],
         Fell.WithHead("# Augmented: snel-1993, c/r 0.21").Doubts());
 
     [Fact]

@@ -35,7 +35,7 @@ public class StartingValuesTests
             .With("cases/second.toml", FellStudy.Case)
             .With("cases/own.toml", FellStudy.Case + "[air]\ndensity_kg_m3 = 1.2\n").Read();
 
-        Told.Exactly(["study.toml:2:17: density_kg_m3 is -1; it must be above 0 and at most 100"], study.Errors);
+        Told.Exactly(["study.toml:2:17: density_kg_m3 is -1; it must be above 0 and at most 100: there would be no air; give it in kg/m3, such as 1.225"], study.Errors);
         Assert.Equal(["clean", "second"], study.Rejected.ToArray());
         Assert.Equal(["own"], study.Cases.Select(c => c.Name));
     }

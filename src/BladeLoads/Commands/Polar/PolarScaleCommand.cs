@@ -7,7 +7,6 @@ using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Screen;
 using BladeLoads.Studies;
-using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Commands.Polar;
@@ -62,7 +61,7 @@ internal static class PolarScaleCommand
     private static int Run(ScaleAsked asked, Surroundings surroundings)
     {
         var isSet = Directory.Exists(asked.Source);
-        if (Read(asked.Source, isSet, out var errors) is not { } set)
+        if (GivenTables.Read(asked.Source, isSet, out var errors) is not { } set)
             return Refuse(errors, surroundings);
         var choice = new NameChoice(asked.Only);
         if (!set.Tables.Any(table => choice.Includes(table.SectionName)))
@@ -102,16 +101,6 @@ internal static class PolarScaleCommand
             surroundings.Out.WriteLine(Printable.Of($"{other}: no table, not copied"));
         surroundings.Out.WriteLine(Printable.Of($"set: {asked.Folder}"));
         return ExitCode.Good;
-    }
-
-    private static StoredSet? Read(string path, bool isSet, out ImmutableArray<InputFinding> errors)
-    {
-        var files = new DiskFiles();
-        if (isSet)
-            return StoredSet.Read(path, files, out errors);
-        if (!StoredSet.IsTable(Path.GetFileName(path)))
-            throw new WrongUseException($"'{path}' is no polar table and no folder; a polar table ends in .csv, 'bladeloads polar read' makes one");
-        return StoredPolars.Read(path, files, out errors) is { } table ? new StoredSet([table], null, []) : null;
     }
 
     private static IEnumerable<string> Head(StoredPolars table, ScaledTable scaled, ScaleAsked asked)

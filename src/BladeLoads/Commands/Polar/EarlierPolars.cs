@@ -1,0 +1,43 @@
+using BladeLoads.Rotor.Sections;
+using BladeLoads.Studies;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Tables;
+
+namespace BladeLoads.Commands.Polar;
+
+/// <summary>Where the tables before an update are: one for all, a folder of them by section, or an earlier copy of the study.</summary>
+internal sealed class EarlierPolars
+{
+    private readonly Func<PolarPageAsked, string?> _pathOf;
+
+    private EarlierPolars(string path, Func<PolarPageAsked, string?> pathOf) => (Path, _pathOf) = (path, pathOf);
+
+    /// <summary>As the user wrote it.</summary>
+    public string Path { get; }
+
+    /// <exception cref="WrongUseException">There is no table and no folder.</exception>
+    public static EarlierPolars At(string path)
+    {
+        if (File.Exists(path))
+            return StoredSet.IsTable(System.IO.Path.GetFileName(path))
+                ? new EarlierPolars(path, _ => path)
+                : throw new WrongUseException($"--before '{path}' is no polar table and no folder; a polar table ends in .csv");
+        if (!Directory.Exists(path))
+            throw new WrongUseException($"--before '{path}' is not there; give a table, the folder of a set, or an earlier copy of the study");
+        return Directory.Exists(System.IO.Path.Join(path, "cases"))
+            ? new EarlierPolars(path, page => page.File is { } file
+                ? System.IO.Path.Join(path, file)
+                : throw new WrongUseException($"--before '{path}' is a study, and what is drawn is none; give a table or the folder of a set"))
+            : new EarlierPolars(path, page => System.IO.Path.Join(path, page.Section + ".csv"));
+    }
+
+    /// <summary>The earlier section, and where it was; null where there was none, or it cannot be read, which is reported.</summary>
+    public (Section Section, string Name)? Of(PolarPageAsked page, List<InputFinding> errors)
+    {
+        if (_pathOf(page) is not { } path || !File.Exists(path))
+            return null;
+        var table = StoredPolars.Read(path, new DiskFiles(), out var wrong);
+        errors.AddRange(wrong);
+        return table is null ? null : (table.Section, path);
+    }
+}

@@ -1,0 +1,215 @@
+using BladeLoads.Batch.Tests.Building;
+using BladeLoads.Commands;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies;
+
+namespace BladeLoads.EndToEnd.InProcess;
+
+public sealed class Drawing_polars : IDisposable
+{
+    private const string Table = """
+        reynolds,alpha_deg,cl,cd
+        1000000,-10,-0.8,0.02
+        1000000,0,0.3,0.008
+        1000000,10,1.2,0.02
+        1000000,20,0.9,0.2
+
+        """;
+
+    private readonly TemporaryFolder _folder = new();
+
+    public Drawing_polars()
+    {
+        Put("fell/blades/fell.csv", """
+            radius_m,chord_m,twist_deg,section
+            1,1,10,tip
+            10,0.5,0,tip
+
+            """);
+        Put("fell/polars/clean/tip.csv", Table);
+        Put("fell/polars/clean/unused.csv", Table);
+        Put("fell/cases/plain.toml", Case(""));
+    }
+
+    public void Dispose() => _folder.Dispose();
+
+    [Fact]
+    public void Of_a_study_the_tables_that_its_cases_use_are_drawn_among_its_results()
+    {
+        var (code, text, error) = Run("fell", "--format", "both");
+        Assert.Equal((0, ""), (code, error));
+        Assert.Equal($"{At("results/fell/pictures/clean/tip.svg")}\n{At("results/fell/pictures/clean/tip.png")}\n", text);
+        Assert.True(File.Exists(At("results/fell/pictures/clean/tip.png")));
+        Assert.Contains(">Section tip, set clean<", Read("results/fell/pictures/clean/tip.svg"), StringComparison.Ordinal);
+        Assert.Contains(">study fell, polars/clean/tip.csv<", Read("results/fell/pictures/clean/tip.svg"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_case_that_extends_and_augments_its_tables_has_pages_of_its_own()
+    {
+        Put("fell/cases/rotating.toml", Case("[sections]\nextend = \"viterna-1982\"\naugment = \"snel-1993\"\n"));
+        Put("fell/cases/rotating-again.toml", Case("[sections]\nextend = \"viterna-1982\"\naugment = \"snel-1993\"\n"));
+        var (code, text, _) = Run("fell", "--out", "pages");
+        Assert.Equal(0, code);
+        Assert.Equal($"{At("pages/clean/tip.svg")}\n{At("pages/clean/tip~rotating.svg")}\n", text);
+        var page = Read("pages/clean/tip~rotating.svg");
+        Assert.Contains(">extended, Viterna and Corrigan 1982<", page, StringComparison.Ordinal);
+        Assert.Contains(">corrected, Snel 1993, r/R 0.", page, StringComparison.Ordinal);
+        Assert.Contains(">Corrected at the best power coefficient of the case: ", page, StringComparison.Ordinal);
+        Assert.DoesNotContain("orrected", Read("pages/clean/tip.svg"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Of_a_set_every_table_is_drawn_and_of_a_table_that_one()
+    {
+        Assert.Equal($"{At("pages/clean/tip.svg")}\n{At("pages/clean/unused.svg")}\n", Run("fell/polars/clean", "--out", "pages").Out);
+        Assert.Equal($"{At("pages/clean/unused.svg")}\n", Run("fell/polars/clean", "--only", "un*", "--out", "pages").Out);
+        Assert.Equal($"{At("one/clean/tip.png")}\n", Run("fell/polars/clean/tip.csv", "--out", "one", "--format", "png").Out);
+    }
+
+    [Fact]
+    public void Drawn_again_a_picture_of_ours_gives_way_and_no_other_file_does()
+    {
+        Run("fell", "--out", "pages");
+        Put("fell/polars/clean/tip.csv", Table.Replace("1.2,", "1.3,", StringComparison.Ordinal));
+        var before = Read("pages/clean/tip.svg");
+        Assert.Equal(0, Run("fell", "--out", "pages").Code);
+        Assert.NotEqual(before, Read("pages/clean/tip.svg"));
+
+        Put("pages/clean/tip.svg", "<svg>mine</svg>");
+        var (code, text, error) = Run("fell", "--out", "pages");
+        Assert.Equal((1, ""), (code, text));
+        Assert.Equal(
+            $"not drawn: {At("pages/clean/tip.svg")} is there and is no picture of ours; give another folder with --out, "
+            + "or put the picture in its place with --replace\n", error);
+        Assert.Equal("<svg>mine</svg>", Read("pages/clean/tip.svg"));
+        Assert.Equal(0, Run("fell", "--out", "pages", "--replace").Code);
+        Assert.Contains("Section tip", Read("pages/clean/tip.svg"), StringComparison.Ordinal);
+
+        File.Delete(At("pages/clean/tip.svg"));
+        Directory.CreateDirectory(At("pages/clean/tip.svg"));
+        Assert.Equal($"not drawn: {At("pages/clean/tip.svg")} is a folder; give another with --out\n", Run("fell", "--out", "pages", "--replace").Error);
+    }
+
+    [Fact]
+    public void The_tables_before_an_update_are_a_table_a_set_or_an_earlier_study()
+    {
+        Put("old/cases/plain.toml", "");
+        Put("old/polars/clean/tip.csv", Table);
+        foreach (var (source, before) in new[]
+            { ("fell", "old"), ("fell", "old/polars/clean"), ("fell/polars/clean/tip.csv", "old/polars/clean/tip.csv"), ("fell/polars/clean", "old/polars/clean") })
+        {
+            var (code, _, error) = Run(source, "--out", "pages", "--before", At(before));
+            Assert.Equal((0, ""), (code, error));
+            var earlier = At(before.EndsWith(".csv", StringComparison.Ordinal) ? before : before == "old" ? "old/polars/clean/tip.csv" : before + "/tip.csv");
+            Assert.Contains($"before: {earlier}", Title(Read("pages/clean/tip.svg")), StringComparison.Ordinal);
+            File.Delete(At("pages/clean/tip.svg"));
+        }
+        Assert.StartsWith($"clean/unused: no earlier table in {At("old/polars/clean")}\n", Run("fell/polars/clean", "--out", "pages", "--before", At("old/polars/clean")).Out, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void An_earlier_table_with_an_error_is_told_and_nothing_is_drawn()
+    {
+        Put("old.csv", "alpha_deg,cl,cd\n0,0,-1\n1,0,1\n2,0,1\n");
+        var (code, text, error) = Run("fell", "--out", "pages", "--before", At("old.csv"));
+        Assert.Equal((2, ""), (code, text));
+        Assert.Equal($"{At("old.csv")}:2:5: cd is -1; drag coefficients must be >= 0\n1 error in the earlier tables; nothing drawn\n", error);
+        Assert.False(Directory.Exists(At("pages")));
+    }
+
+    [Fact]
+    public void A_table_with_an_error_is_told_and_nothing_is_drawn()
+    {
+        Put("bad.csv", "alpha_deg,cl,cd\n0,0,-1\n1,0,1\n2,0,1\n");
+        var (code, text, error) = Run("bad.csv", "--out", "pages");
+        Assert.Equal((2, "", $"{At("bad.csv")}:2:5: cd is -1; drag coefficients must be >= 0\n1 error; nothing drawn\n"), (code, text, error));
+    }
+
+    [Fact]
+    public void What_can_be_drawn_of_a_study_with_errors_is_drawn_and_the_errors_are_told()
+    {
+        Put("fell/cases/wrong.toml", Case("") + "colour = 3\n");
+        var (code, text, error) = Run("fell", "--out", "pages");
+        Assert.Equal((1, $"{At("pages/clean/tip.svg")}\n"), (code, text));
+        Assert.StartsWith("cases/wrong.toml:", error, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("--before 'nowhere' is not there; give a table, the folder of a set, or an earlier copy of the study\n", "fell", "--before", "nowhere")]
+    [InlineData("--out is empty; give the folder that pictures go to\n", "fell", "--out", "")]
+    [InlineData("no section matches 'x*'; there are tip\n", "fell", "--only", "x*")]
+    [InlineData("--format is 'jpeg'; give svg, png or both\n\n'bladeloads polar draw --help' shows what can be asked, with examples\n", "fell", "--format", "jpeg")]
+    public void Wrong_use_is_told(string expected, params string[] arguments)
+    {
+        var (code, _, error) = Run(arguments);
+        Assert.Equal((2, expected), (code, error));
+    }
+
+    [Fact]
+    public void A_study_is_no_earlier_table_of_a_set()
+    {
+        var (code, _, error) = Run("fell/polars/clean", "--before", At("fell"));
+        Assert.Equal((2, $"--before '{At("fell")}' is a study, and what is drawn is none; give a table or the folder of a set\n"), (code, error));
+    }
+
+    [Fact]
+    public void Names_of_files_are_text_and_make_safe_names_of_pictures()
+    {
+        if (OperatingSystem.IsWindows())
+            return;
+        Put("set/a\"<script>\u0007.csv", Table);
+        var (code, text, error) = Run("set", "--out", "pages");
+        Assert.Equal((0, ""), (code, error));
+        Assert.Equal($"{At("pages/set/a\"<script>_u0007.svg")}\n", text);
+        Assert.Contains("Section a\"&lt;script&gt;\\u0007, set set", Read("pages/set/a\"<script>_u0007.svg"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_full_disk_is_told_with_its_exit_code_and_leaves_no_half_picture()
+    {
+        var (code, text, error) = Run(new FailingDisk(2), "fell", "--out", "pages");
+        Assert.Equal((3, "", $"cannot write {At("pages/clean/tip.svg")}: no room left on the disk\n"), (code, text, error));
+        Assert.Empty(Directory.EnumerateFiles(At("pages/clean")));
+    }
+
+    private static string Case(string more) => $$"""
+        blade = "../blades/fell.csv"
+        polars = "../polars/clean"
+        [rotor]
+        blade_count = 3
+        [wind]
+        speeds_m_s = [6, 8, 10]
+        [control]
+        strategy = "fixed-speed"
+        rotor_speed_rpm = 50
+        pitch_deg = 0
+        {{more}}
+        """;
+
+    private static string Title(string svg) => System.Net.WebUtility.HtmlDecode(svg);
+
+    private string At(string path) => Path.Join(_folder.Path, path);
+
+    private string Read(string path) => File.ReadAllText(At(path));
+
+    private void Put(string path, string text)
+    {
+        Directory.CreateDirectory(Path.GetDirectoryName(At(path))!);
+        File.WriteAllText(At(path), text);
+    }
+
+    private (int Code, string Out, string Error) Run(params string[] arguments) => Run(new Disk(), arguments);
+
+    // Paths that a user would give from within the folder; the process of the tests stays where it is.
+    private (int Code, string Out, string Error) Run(IDisk disk, params string[] arguments)
+    {
+        using var output = new StringWriter { NewLine = "\n" };
+        using var error = new StringWriter { NewLine = "\n" };
+        var surroundings = new Surroundings(output, error, false, false, StudyReader.Read, CaseSolver.Solve, disk, TimeProvider.System, _ => { });
+        var placed = arguments.Select((a, i) => i == 0 || (arguments[i - 1] == "--out" && a.Length > 0) ? At(a) : a);
+        var code = CommandLine.Run(["polar", "draw", .. placed, "--results", At("results")], surroundings);
+        return (code, output.ToString(), error.ToString());
+    }
+}
