@@ -35,11 +35,12 @@ internal static class DesignPoints
     }
 
     // Where a region begins that is one.
-    private static IEnumerable<double> Beginnings(ImmutableArray<CurvePoint> curve, double[] hints, Func<double, Region> regionAt)
+    private static List<double> Beginnings(ImmutableArray<CurvePoint> curve, double[] hints, Func<double, Region> regionAt)
     {
         var changes = new List<(double Place, Region Region)>();
         for (var i = 1; i < curve.Length; i++)
             AddChanges(curve[i - 1], curve[i], hints, regionAt, changes);
+        var beginnings = new List<double>();
         var before = curve[0].Region;
         for (var i = 0; i < changes.Count; i++)
         {
@@ -47,9 +48,10 @@ internal static class DesignPoints
             var isEmpty = i + 1 < changes.Count && changes[i + 1].Place - place < LeastWidth;
             if (isEmpty || region == before)
                 continue;
-            yield return place;
+            beginnings.Add(place);
             before = region;
         }
+        return beginnings;
     }
 
     // The places between two points at which the region becomes another, by bisection, the lowest first.

@@ -1,6 +1,7 @@
 using BladeLoads.Rotor.Air;
 using BladeLoads.Rotor.Momentum;
 using BladeLoads.Rotor.Operation;
+using BladeLoads.Rotor.Sections;
 using Xunit.Abstractions;
 using static BladeLoads.Rotor.Tests.Published.PublishedRotor;
 
@@ -95,7 +96,7 @@ public sealed class HeavilyLoadedRotorTests(ITestOutputHelper output)
     {
         var (blade, sections) = WithNamedSections("nrel-5mw");
         return new RotorModel(new RotorCase(
-            blade, sections, 3, ConeDeg * Degree, new AirProperties(1.225, 1.81e-5, 340.29), [8],
+            blade, sections, Augmentation.None, 3, ConeDeg * Degree, new AirProperties(1.225, 1.81e-5, 340.29), [8],
             new Control.FixedSpeed(1, 0, RatedPower: null), 0, double.PositiveInfinity, Drivetrain.Constant(1),
             DefaultModel with { HeavyLoading = relation }));
     }

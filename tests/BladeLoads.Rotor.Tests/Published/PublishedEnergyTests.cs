@@ -1,6 +1,7 @@
 using BladeLoads.Rotor.Air;
 using BladeLoads.Rotor.Energy;
 using BladeLoads.Rotor.Operation;
+using BladeLoads.Rotor.Sections;
 using Xunit.Abstractions;
 using static BladeLoads.Rotor.Tests.Published.PublishedRotor;
 
@@ -75,7 +76,7 @@ public sealed class PublishedEnergyTests(ITestOutputHelper output)
             ThrustLimit: null);
         var curve = CaseSolver.Solve(
             new RotorCase(
-                blade, sections, 3, 3 * Degree, new AirProperties(1.225, 1.81e-5, 340.29), [.. winds.Select(v => v * along)], control, 0,
+                blade, sections, Augmentation.None, 3, 3 * Degree, new AirProperties(1.225, 1.81e-5, 340.29), [.. winds.Select(v => v * along)], control, 0,
                 double.PositiveInfinity, Drivetrain.Constant(1), DefaultModel),
             CancellationToken.None);
         var rows = winds.Zip(curve.Points, (wind, point) => (wind, point.ElectricalPower, IsJoint: false));
