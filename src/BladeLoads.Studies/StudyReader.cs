@@ -6,7 +6,7 @@ namespace BladeLoads.Studies;
 public static class StudyReader
 {
     internal const string StartingValuesFile = "study.toml";
-    internal const string CasesFolder = "cases";
+    public const string CasesFolder = "cases";
 
     /// <summary>
     /// Reads everything and reports every error and doubt at once; a case with an error is rejected, the others are kept.

@@ -56,6 +56,9 @@ public sealed record ResultsFolder(string Root, string StudyName)
     /// <summary>The folder of a result set that was set aside.</summary>
     public string KeptAs(string name) => Path.Join(Kept, name);
 
+    /// <summary>What a check of the polar tables found.</summary>
+    public string Polars => Path.Join(Study, PolarsName);
+
     /// <summary>Pictures of section tables, a folder a set.</summary>
     public string Pictures => Path.Join(Study, PicturesName);
 
@@ -85,10 +88,11 @@ public sealed record ResultsFolder(string Root, string StudyName)
     private const string TablesName = "tables";
     private const string ReplacedName = "replaced";
     private const string KeptName = "kept";
+    private const string PolarsName = "polars";
     private const string PicturesName = "pictures";
 
     private static readonly HashSet<string> OwnNames = new(StringComparer.OrdinalIgnoreCase)
     {
-        LogsName, FailuresName, TablesName, ReplacedName, KeptName, PicturesName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
+        LogsName, FailuresName, TablesName, ReplacedName, KeptName, PolarsName, PicturesName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
     };
 }

@@ -72,10 +72,6 @@ public static class PolarExtension
         return new ExtensionCurve(polar, largestDrag, join).Extend();
     }
 
-    /// <summary>Drag coefficient of a plate along the wind, laminar on both sides: <c>2 x 1.328 / sqrt(Re)</c>; 0 where Re is NaN.</summary>
-    /// <remarks>Source: key blasius1908 in docs/sources.md.</remarks>
-    public static double PlateFriction(double reynolds) => double.IsNaN(reynolds) ? 0 : 2 * 1.328 / Math.Sqrt(reynolds);
-
     /// <param name="sign">1 for the side above zero, -1 for that below.</param>
     internal static bool ReachesEnd(Polar polar, int sign)
     {

@@ -17,6 +17,9 @@ public sealed class Section
 
     internal SectionTable Table { get; }
 
+    /// <summary>Which of the polars serve at a Reynolds number, above 0.</summary>
+    public ReynoldsPlace PlaceOf(double reynolds) => Table.Place(Math.Log(reynolds));
+
     /// <param name="name">As blade stations name it.</param>
     /// <param name="polars">One or more, Reynolds numbers rising.</param>
     /// <exception cref="ArgumentException">No polar; or several of which one has no Reynolds number; or they do not rise.</exception>

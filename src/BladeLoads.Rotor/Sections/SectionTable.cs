@@ -47,8 +47,8 @@ internal sealed partial class SectionTable
             _firstCellOfBucket[b] = cell;
         }
         (_points, _blocks) = SummariseCells();
-        var stalls = polars.Select(Stall).ToArray();
-        (LeastStallAngle, LeastLiftingAngle) = (stalls.Min(s => s.Largest), stalls.Min(s => s.Lifting));
+        var stalls = polars.Select(FirstLiftPeak.Of).ToArray();
+        (LeastStallAngle, LeastLiftingAngle) = (stalls.Min(s => s.Peak), stalls.Min(s => s.Lifting));
         _augmented = new Lazy<SectionTable>(() => Prepare([.. polars.Select(RotationalAugmentation.FullyAugmented)]));
     }
 
@@ -152,25 +152,6 @@ internal sealed partial class SectionTable
         }
     }
 
-    // The first largest lift that is one: noise in the straight part of a measured table is none.
-    private static (double Lifting, double Largest) Stall(Polar polar)
-    {
-        const double Noise = 0.02;
-        var (lifting, at, largest) = (double.NegativeInfinity, double.PositiveInfinity, 0.0);
-        for (var i = 0; i < polar.Angles.Length && polar.Angles[i] <= Math.PI / 2; i++)
-        {
-            if (polar.Angles[i] < -Math.PI / 2)
-                continue;
-            if (polar.Lift[i] <= 0 && largest < Noise)
-                (lifting, largest) = (polar.Angles[i], 0);
-            else if (polar.Lift[i] > largest)
-                (at, largest) = (polar.Angles[i], polar.Lift[i]);
-            else if (polar.Lift[i] < largest - Noise)
-                return (lifting, at);
-        }
-        return double.IsFinite(at) ? (lifting, at) : (double.PositiveInfinity, double.PositiveInfinity);
-    }
-
     // The cubic of one pair of rows, in powers of the angle from `from`, which lies between them.
     private static void Hermite(
         double x0, double x1, double y0, double y1, double s0, double s1, double from, Span<double> c)
@@ -190,7 +171,8 @@ internal sealed partial class SectionTable
 /// <summary>Between which polars of a section a Reynolds number lies.</summary>
 /// <param name="Polar">Index of the polar below it.</param>
 /// <param name="Weight">Weight of the polar above, 0 to 1; 0 where only one serves.</param>
-internal readonly record struct ReynoldsPlace(int Polar, double Weight, bool Outside);
+/// <param name="Outside">The Reynolds number is outside the tables; the nearest serves.</param>
+public readonly record struct ReynoldsPlace(int Polar, double Weight, bool Outside);
 
 /// <summary>Lift and drag coefficients of a section.</summary>
 public readonly record struct Coefficients(double Lift, double Drag);

@@ -8,7 +8,8 @@ internal static class CaseName
 {
     public const string Ending = ".toml";
 
-    private static readonly string[] Reserved = ["logs", "failures", "tables", "replaced", "kept", "pictures", "summary.csv", "changes.csv", "report.html"];
+    private static readonly string[] Reserved =
+        ["logs", "failures", "tables", "replaced", "kept", "polars", "pictures", "summary.csv", "changes.csv", "report.html"];
 
     public static string Of(string fullPath) => Path.GetFileName(fullPath)[..^Ending.Length];
 

@@ -23,6 +23,9 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
     /// <summary>Gives the rows in the units of the file, moments among them; of a table without errors.</summary>
     public Func<ImmutableArray<PolarRows>> Rows { get; init; } = () => [];
 
+    /// <summary>Gives the lines in the file on which those rows stand.</summary>
+    public Func<ImmutableArray<ImmutableArray<int>>> RowLines { get; init; } = () => [];
+
     /// <summary>That it does not go round, which is doubtful where nothing extends it; none or one.</summary>
     public ImmutableArray<InputFinding> Reach { get; init; } = [];
 
@@ -57,6 +60,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         {
             Doubts = section is null ? [] : [.. DoubtsOf(blocks)],
             Rows = () => section is null ? [] : [.. blocks.Select(block => block.ToRows())],
+            RowLines = () => section is null ? [] : [.. blocks.Select(block => block.RowLines)],
             Reach = section is null ? [] : [.. ReachOf(blocks)],
             NotAugmented = section is null ? [] : [.. NotAugmentedOf(section, blocks)],
             PolarsAt = [.. blocks.Select(block => block.At)],
@@ -178,6 +182,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         private readonly List<double> _lift = [];
         private readonly List<double> _drag = [];
         private readonly List<double> _moment = [];
+        private readonly List<int> _line = [];
 
         public double Reynolds { get; } = reynolds;
 
@@ -185,7 +190,9 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
 
         public int Rows { get; set; }
 
-        public int LastLine { get; private set; } = at.Line;
+        public int LastLine => _line is [.., var last] ? last : At.Line;
+
+        public ImmutableArray<int> RowLines => [.. _line];
 
         public List<double> Angles { get; } = [];
 
@@ -197,7 +204,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             _lift.Add(row.Lift);
             _drag.Add(row.Drag);
             _moment.Add(row.Moment);
-            LastLine = line;
+            _line.Add(line);
         }
 
         public PolarRows ToRows()

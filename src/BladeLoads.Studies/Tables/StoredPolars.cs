@@ -15,13 +15,31 @@ public sealed record StoredPolars(
     string SectionName, ImmutableArray<string> Head, ImmutableArray<PolarRows> Polars, Section Section, ReadOnlyMemory<byte> Bytes,
     string Sha256)
 {
+    /// <summary>The lines in the file on which the rows of <see cref="Polars"/> stand, from 1.</summary>
+    public ImmutableArray<ImmutableArray<int>> RowLines { get; init; } = [];
+
+    /// <summary>What reading alone finds doubtful: what <c>check</c> tells of the table too, but for its <see cref="Reach"/>.</summary>
+    public ImmutableArray<InputFinding> Doubts { get; init; } = [];
+
+    /// <summary>That it does not go round; none or one.</summary>
+    public ImmutableArray<InputFinding> Reach { get; init; } = [];
+
+    /// <summary>The line of the head that says that the rows are augmented for rotation, and what it says; null where none does.</summary>
+    public (int Line, string Text)? Augmented { get; init; }
+
     /// <summary>Reads a table; null, with what is wrong, where it is none.</summary>
     /// <param name="path">As the user wrote it; findings name the file so.</param>
     public static StoredPolars? Read(string path, IStudyFiles files, out ImmutableArray<InputFinding> errors)
+        => Read(Path.GetFullPath(path), path, files, out errors);
+
+    /// <summary>The same of a file that findings name in another way than by its path.</summary>
+    /// <param name="fullPath">Absolute.</param>
+    /// <param name="shown">As findings name the file.</param>
+    public static StoredPolars? Read(string fullPath, string shown, IStudyFiles files, out ImmutableArray<InputFinding> errors)
     {
         var findings = new Findings();
-        var bytes = NamedFile.Read(files, Path.GetFullPath(path), path, StudyFolder.LargestTable, findings.Error);
-        var table = bytes is null ? null : FromBytes(path, bytes, findings);
+        var bytes = NamedFile.Read(files, fullPath, shown, StudyFolder.LargestTable, findings.Error);
+        var table = bytes is null ? null : FromBytes(shown, bytes, findings);
         errors = findings.Errors;
         return table;
     }
@@ -43,7 +61,13 @@ public sealed record StoredPolars(
         var table = PolarTable.Parse(name, input, findings);
         return table.Section is null
             ? null
-            : new StoredPolars(name, HeadOf(input.Text), table.Rows(), table.Section, bytes, input.Sha256);
+            : new StoredPolars(name, HeadOf(input.Text), table.Rows(), table.Section, bytes, input.Sha256)
+            {
+                RowLines = table.RowLines(),
+                Doubts = table.Doubts,
+                Reach = table.Reach,
+                Augmented = table.Augmented is { } note ? (note.Line, note.Text) : null,
+            };
     }
 
     private static ImmutableArray<string> HeadOf(string text)

@@ -19,30 +19,35 @@ public sealed record StoredSet(ImmutableArray<StoredPolars> Tables, ReadOnlyMemo
     /// <summary>Reads every table of a folder; null, with all that is wrong, where one cannot be read or there is none.</summary>
     /// <param name="path">Of the folder, as the user wrote it; findings name its files so.</param>
     public static StoredSet? Read(string path, IStudyFiles files, out ImmutableArray<InputFinding> errors)
+        => ReadSound(Path.GetFullPath(path), path, files, out errors) is var sound && errors.IsEmpty ? sound : null;
+
+    /// <summary>Reads every table of a folder, and gives those that can be read, with what is wrong with the others.</summary>
+    /// <param name="folder">Absolute.</param>
+    /// <param name="shown">As findings name the folder.</param>
+    public static StoredSet ReadSound(string folder, string shown, IStudyFiles files, out ImmutableArray<InputFinding> errors)
     {
         var found = new List<InputFinding>();
         var tables = ImmutableArray.CreateBuilder<StoredPolars>();
         ReadOnlyMemory<byte>? setFile = null;
         var others = ImmutableArray.CreateBuilder<string>();
-        var folder = Path.GetFullPath(path);
-        foreach (var name in NamesIn(folder, path, files, found).Order(StringComparer.Ordinal))
+        foreach (var name in NamesIn(folder, shown, files, found).Order(StringComparer.Ordinal))
         {
-            var shown = Path.Join(path, name);
-            if (IsTable(name) && !LeadsOut(folder, name, shown, files, found))
+            var file = Path.Join(shown, name);
+            if (IsTable(name) && !LeadsOut(folder, name, file, files, found))
             {
-                if (StoredPolars.Read(shown, files, out var wrong) is { } table)
+                if (StoredPolars.Read(Path.Join(folder, name), file, files, out var wrong) is { } table)
                     tables.Add(table);
                 found.AddRange(wrong);
             }
-            else if (name == SetFileName && !LeadsOut(folder, name, shown, files, found))
-                setFile = NamedFile.Read(files, Path.Join(folder, name), shown, StudyFolder.LargestCase, found.Add);
+            else if (name == SetFileName && !LeadsOut(folder, name, file, files, found))
+                setFile = NamedFile.Read(files, Path.Join(folder, name), file, StudyFolder.LargestCase, found.Add);
             else if (!IsTable(name) && name != SetFileName)
                 others.Add(name);
         }
         if (tables.Count == 0 && found.Count == 0)
-            found.Add(new InputFinding(path, 0, 0, "holds no polar table; the tables of a set are files <section>.csv"));
+            found.Add(new InputFinding(shown, 0, 0, "holds no polar table; the tables of a set are files <section>.csv"));
         errors = [.. found];
-        return found.Count > 0 ? null : new StoredSet(tables.ToImmutable(), setFile, others.ToImmutable());
+        return new StoredSet(tables.ToImmutable(), setFile, others.ToImmutable());
     }
 
     private static ImmutableArray<string> NamesIn(string folder, string shown, IStudyFiles files, List<InputFinding> found)

@@ -133,13 +133,7 @@ internal static class CommandLine
         var study = StudyArgument("the study's folder, or one case file");
         var results = ResultsOption();
         var only = OnlyOption();
-        var workers = new Option<int>("--workers")
-        {
-            Description = "how many cases are solved at a time; left out, as many as the machine has cores",
-            HelpName = "number",
-            DefaultValueFactory = _ => Environment.ProcessorCount,
-            CustomParser = ParseWorkers,
-        };
+        var workers = WorkersOption();
         var all = new Option<bool>("--all") { Description = "solve current cases too" };
         var quiet = new Option<bool>("--quiet") { Description = "show errors and warnings alone" };
         var command = new Command("run", "Solves the cases of a study that are not current, and shows the summary.")
@@ -176,6 +170,14 @@ internal static class CommandLine
     {
         Description = "only cases whose name matches; * is any text, ? one character; may be given several times",
         HelpName = "pattern",
+    };
+
+    internal static Option<int> WorkersOption() => new("--workers")
+    {
+        Description = "how many cases are solved at a time; left out, as many as the machine has cores",
+        HelpName = "number",
+        DefaultValueFactory = _ => Environment.ProcessorCount,
+        CustomParser = ParseWorkers,
     };
 
     private static int ParseWorkers(ArgumentResult argument)

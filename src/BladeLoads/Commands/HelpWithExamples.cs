@@ -51,6 +51,13 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads tidy inputs/tarn-valley --keep-last 1 --yes", "remove all replaced results but the last of each case"),
             ("bladeloads tidy inputs/tarn-valley --older-than 90d", "only what was replaced more than 90 days ago"),
         ],
+        ["polar check"] =
+        [
+            ("bladeloads polar check inputs/tarn-valley", "every doubt, and where the blades of all cases work in the tables"),
+            ("bladeloads polar check inputs/tarn-valley --only 'stall-10m*'", "where those of some cases do"),
+            ("bladeloads polar check polars/clean --out report", "a set by itself, with the report as files"),
+            ("bladeloads polar check polars/clean/t18.csv", "one table, all its Reynolds numbers"),
+        ],
         ["polar scale"] =
         [
             ("bladeloads polar scale polars/clean --out polars/soiled --lift-slope 0.95 --largest-lift 0.9 --drag-floor 1.4", "a soiled set beside the clean one"),
@@ -66,6 +73,7 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
         ],
         ["polar"] =
         [
+            ("bladeloads polar check inputs/tarn-valley", "can the tables be trusted where the blades work?"),
             ("bladeloads polar draw inputs/tarn-valley", "every table of a study on a page of its own"),
             ("bladeloads polar scale polars/clean --out polars/soiled --largest-lift 0.9 --drag-floor 1.5", "soiled blades from clean ones"),
             ("bladeloads polar scale --help", "the options of a command"),

@@ -162,6 +162,7 @@ public class PublisherTests
     [InlineData("tables")]
     [InlineData("Replaced")]
     [InlineData("kept")]
+    [InlineData("polars")]
     [InlineData("summary.csv")]
     [InlineData(".hidden")]
     [InlineData("../out")]

@@ -5,7 +5,7 @@ namespace BladeLoads.EndToEnd.Program;
 /// <summary>What lies in a study's results folder, held against its receipts.</summary>
 internal static class Found
 {
-    private static readonly string[] NoCases = ["logs", "failures", "tables", "replaced", "kept"];
+    private static readonly string[] NoCases = ["logs", "failures", "tables", "replaced", "kept", "polars"];
 
     public static IEnumerable<string> CaseFolders(string results) => Directory.EnumerateDirectories(results)
         .Where(f => Path.GetFileName(f) is not ['.', ..] && !NoCases.Contains(Path.GetFileName(f)));

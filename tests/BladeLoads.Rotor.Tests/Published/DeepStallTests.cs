@@ -77,7 +77,10 @@ public sealed class DeepStallTests(ITestOutputHelper output)
     public void A_plate_along_the_wind_has_the_friction_of_both_its_sides()
     {
         foreach (var row in PublishedTable.Read("sections/plate-friction.csv").Rows)
-            Assert.Equal(2 * row["laminar_friction"], PolarExtension.PlateFriction(row["reynolds"]), 1e-6 * row["laminar_friction"]);
+        {
+            Assert.Equal(2 * row["laminar_friction"], PlateFriction.Laminar(row["reynolds"]), 1e-6 * row["laminar_friction"]);
+            Assert.Equal(2 * row["turbulent_friction"], PlateFriction.Turbulent(row["reynolds"]), 1e-6 * row["turbulent_friction"]);
+        }
     }
 
     /// <summary>

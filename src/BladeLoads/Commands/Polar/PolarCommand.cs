@@ -7,9 +7,9 @@ internal static class PolarCommand
 {
     public static Command Define(Surroundings surroundings) => new(
         "polar",
-        "Makes, changes and draws polar tables: lift and drag of blade sections. What is read stays as it is; what is written says in its head how "
-        + "it was made.")
+        "Checks, makes, changes and draws polar tables: lift and drag of blade sections. What is read stays as it is; what is written says in its "
+        + "head how it was made.")
     {
-        PolarScaleCommand.Define(surroundings), PolarDrawCommand.Define(surroundings),
+        PolarCheckCommand.Define(surroundings), PolarScaleCommand.Define(surroundings), PolarDrawCommand.Define(surroundings),
     };
 }

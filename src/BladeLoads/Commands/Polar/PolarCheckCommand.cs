@@ -1,0 +1,124 @@
+using System.Collections.Immutable;
+using System.CommandLine;
+using BladeLoads.Batch.Plan;
+using BladeLoads.Batch.PolarCheck;
+using BladeLoads.Batch.Queue;
+using BladeLoads.Batch.Work;
+using BladeLoads.Results.PolarCheck;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Screen;
+using BladeLoads.Studies;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.PolarCheck;
+using BladeLoads.Studies.Tables;
+
+namespace BladeLoads.Commands.Polar;
+
+/// <param name="Source">A study, one case file of it, a set of polar tables or one table.</param>
+/// <param name="Out">The folder for the report; null for the place that a study has for it, and for none without a study.</param>
+internal sealed record PolarCheckRequest(string Source, string Results, string? Out, string[] Only, int Workers, bool Json);
+
+/// <summary><c>bladeloads polar check</c>: what is doubtful in polar tables, and where the blades of a study work in them.</summary>
+internal static class PolarCheckCommand
+{
+    public static Command Define(Surroundings surroundings)
+    {
+        var source = new Argument<string>("study, set or table")
+        {
+            Description = "a study's folder or one case file, or the folder of a set, or one table",
+        };
+        var results = CommandLine.ResultsOption();
+        results.Description = "of a study: the folder of results; the report goes to <study>/polars in it";
+        var folder = new Option<string?>("--out") { Description = "write the report into this folder instead", HelpName = "folder" };
+        var only = CommandLine.OnlyOption();
+        only.Description = "of a study: only cases whose name matches; * is any text, ? one character; may be given several times";
+        var workers = CommandLine.WorkersOption();
+        var json = new Option<bool>("--json") { Description = "the same for scripts, as JSON" };
+        var command = new Command(
+            "check",
+            "Tells every error and doubt of polar tables, by row, with their figures; of a study also where its blades work in them, for which "
+            + "its cases are solved in memory.")
+        {
+            source, results, folder, only, workers, json,
+        };
+        command.SetAction(parsed => Run(
+            new PolarCheckRequest(
+                parsed.GetRequiredValue(source), parsed.GetRequiredValue(results), parsed.GetValue(folder), parsed.GetValue(only) ?? [],
+                parsed.GetValue(workers), parsed.GetValue(json)),
+            surroundings));
+        return command;
+    }
+
+    private static int Run(PolarCheckRequest request, Surroundings surroundings)
+    {
+        var files = new DiskFiles();
+        var source = request.Source;
+        if (source.EndsWith(".csv", StringComparison.Ordinal) && File.Exists(source))
+            return Tell(CheckedTables.OfTable(source, files), UseOfTables.None, null, request, surroundings);
+        if (Directory.Exists(source) && !Directory.Exists(Path.Join(source, StudyReader.CasesFolder))
+            && Directory.EnumerateFiles(source).Any(file => StoredSet.IsTable(Path.GetFileName(file))))
+            return Tell(CheckedTables.OfSet(source, files), UseOfTables.None, null, request, surroundings);
+        return CheckStudy(request, files, surroundings);
+    }
+
+    private static int CheckStudy(PolarCheckRequest request, DiskFiles files, Surroundings surroundings)
+    {
+        using var signals = new StopSignals(surroundings);
+        var study = Chosen(AskedStudy.ReadAlone(request.Source, surroundings), request.Only);
+        var tables = CheckedTables.OfStudy(study, files);
+        if (study.Cases.IsEmpty)
+        {
+            FindingLines.Write(study, surroundings.Error, withSource: surroundings.ErrorIsTerminal);
+            surroundings.Error.WriteLine(FindingLines.Closing(study));
+            return ExitCode.NothingCouldRun;
+        }
+        var progress = new RunProgress(study.Cases.Length, study.Cases.Sum(CaseGroups.Estimate), surroundings.Time);
+        UseOfTables Solve() => UseOfTables.Of(
+            study.Cases, tables.Tables, surroundings.Solve, request.Workers, progress, signals.Stopping);
+        try
+        {
+            var use = surroundings.ErrorIsTerminal
+                ? ProgressBar.Show(Solve, progress, new ScreenLog(surroundings.Error))
+                : PlainProgress.Show(Solve, progress, request.Workers, surroundings.Error, surroundings.Time);
+            return Tell(tables, use, study, request, surroundings);
+        }
+        catch (OperationCanceledException) when (signals.Code is not null)
+        {
+            surroundings.Error.WriteLine("stopped; nothing written");
+            return signals.Code.Value;
+        }
+    }
+
+    private static Study Chosen(Study study, string[] only)
+    {
+        const int Shown = 12;
+        var choice = new CaseChoice([.. only]);
+        var chosen = study.Cases.Where(c => choice.Includes(c.Name)).ToImmutableArray();
+        if (chosen.IsEmpty && !study.Cases.IsEmpty)
+            throw new WrongUseException(
+                $"no case matches {string.Join(", ", only.Select(p => $"'{p}'"))}; the cases are "
+                + string.Join(", ", study.Cases.Take(Shown).Select(c => c.Name))
+                + (study.Cases.Length > Shown ? $" and {study.Cases.Length - Shown} more" : ""));
+        return study with { Cases = chosen };
+    }
+
+    /// <param name="study">Null where tables were asked for by themselves.</param>
+    private static int Tell(CheckedTables tables, UseOfTables use, Study? study, PolarCheckRequest request, Surroundings surroundings)
+    {
+        var report = new PolarReport(tables, use.ByFile);
+        ImmutableArray<ResultContent> Files() => [.. report.Files(), .. CheckedPicture.Files(tables, use.ByFile)];
+        var folder = tables.Tables.IsEmpty ? null
+            : request.Out is { } named ? ReportPlace.Write(named, Files(), surroundings.Disk)
+            : study is not null ? ReportPlace.Write(new ResultsFolder(Path.GetFullPath(request.Results), study.Name), Files(), surroundings.Disk)
+            : null;
+        foreach (var (name, reason) in use.Failed)
+            surroundings.Error.WriteLine($"Case {name} failed: {reason}");
+        if (request.Json)
+            surroundings.Out.WriteLine(report.ToJson(request.Source, CommandLine.ToolVersion));
+        else
+            PolarCheckLines.Write(tables, use, study, folder, surroundings);
+        return tables.Tables.IsEmpty ? ExitCode.NothingCouldRun
+            : tables.Errors.IsEmpty && use.Failed.IsEmpty && study is null or { Rejected.IsEmpty: true } ? ExitCode.Good
+            : ExitCode.SomeNotGood;
+    }
+}

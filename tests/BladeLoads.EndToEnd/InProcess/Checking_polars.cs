@@ -1,0 +1,268 @@
+using System.Globalization;
+using System.Text.Json;
+using BladeLoads.Batch.Tests.Building;
+using BladeLoads.Batch.Work;
+using BladeLoads.Commands;
+using BladeLoads.EndToEnd.Documentation;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies;
+
+namespace BladeLoads.EndToEnd.InProcess;
+
+public sealed class Checking_polars : IDisposable
+{
+    private static readonly string Demo = Path.Combine(Repository.Root, "inputs", "tarn-valley");
+
+    private readonly TemporaryFolder _folder = new();
+    private readonly ExtractedStudies _studies = new();
+
+    public void Dispose()
+    {
+        _folder.Dispose();
+        _studies.Dispose();
+    }
+
+    private string Results => Path.Join(_folder.Path, "results");
+
+    [Fact]
+    public void A_table_by_itself_is_told_with_its_doubts_and_the_figures_of_all_its_Reynolds_numbers()
+    {
+        var (code, text, error) = Run("polar", "check", _studies.PathOf("example/polars/clean/fell-21.csv"));
+        Assert.Equal((0, ""), (code, error));
+        var file = _studies.PathOf("example/polars/clean/fell-21.csv");
+        Assert.Equal($"""
+            {file}:4:8: doubt: no row between -180 and -135 deg, and the curve there is a guess; far from the working range give one every 15 deg or closer; likewise lines 5, 6, 7, 8 and 25 more
+
+            figures  Reynolds  slope/2pi  no lift deg  largest cl  at deg  best cl/cd  at deg  least cd  at deg  plate: laminar  turbulent
+            fell-21       2e5       0.98         -3.5       1.280    10.0        70.8     5.0    0.0110     0.0          0.0059     0.0123  below-turbulent-plate
+            fell-21       4e6       1.00         -3.5       1.420    14.0       104.4     5.0    0.0080     0.0          0.0013     0.0070
+
+            no errors, 30 doubts in 1 table
+
+            """, text);
+        Assert.False(Directory.Exists(Results));
+    }
+
+    [Fact]
+    public void A_set_is_told_as_a_whole_and_written_where_asked()
+    {
+        var set = _studies.PathOf("example/polars/clean");
+        var (code, text, error) = Run("polar", "check", set, "--out", Path.Join(_folder.Path, "report"));
+        Assert.Equal((0, ""), (code, error));
+        Assert.EndsWith($"\nround         -          -            -           -       -           -       -    0.6000     0.0               -          -  bluff\n"
+            + $"\nno errors, 30 doubts in 2 tables\nreport: {Path.Join(_folder.Path, "report")}\n", text, StringComparison.Ordinal);
+        Assert.Equal(["polar-doubts.csv", "polar-figures.csv"], FilesIn(Path.Join(_folder.Path, "report")).Where(f => f.EndsWith(".csv", StringComparison.Ordinal)));
+    }
+
+    [Fact]
+    public void A_study_is_told_where_its_blades_work_and_what_to_look_at_first()
+    {
+        var (code, text, error) = Run("polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed", "--workers", "1");
+        Assert.Equal(0, code);
+        Assert.StartsWith("solving 1 case with 1 worker\n", error, StringComparison.Ordinal);
+        Assert.StartsWith("polars/clean/fell-21.csv:", text, StringComparison.Ordinal);
+        Assert.Contains("\nwhere the blades work, from 5 to 95 % of their length (1 case, every operating point alike):\n", text, StringComparison.Ordinal);
+        Assert.Contains("\nlook first at, with the share of all blades at work there:\n", text, StringComparison.Ordinal);
+        Assert.EndsWith($"\nno errors, 30 doubts in 2 tables\nreport: {Path.Join(Results, "example", "polars")}\n", text, StringComparison.Ordinal);
+        Assert.Equal(
+            ["polar-doubts.csv", "polar-figures.csv", "polar-histograms.csv", "polar-use.csv"],
+            FilesIn(Path.Join(Results, "example", "polars")).Where(f => f.EndsWith(".csv", StringComparison.Ordinal)));
+        // Nothing but the report: no case was published, and no plan is any wiser.
+        Assert.Equal(["polars"], Directory.EnumerateDirectories(Path.Join(Results, "example")).Select(d => Path.GetFileName(d)!));
+    }
+
+    /// <summary>
+    /// Counted a second time, from spanwise.csv and power-curve.csv of a run and the blade tables alone: the weights of blended sections by the radius
+    /// between the rows of the blade.
+    /// </summary>
+    [Fact]
+    public void The_histograms_are_those_of_the_spanwise_tables_of_a_run()
+    {
+        string[] only = ["--only", "two-bladed", "--only", "stall-10m", "--results", Results];
+        Assert.Equal(0, Run(["run", Demo, .. only]).Code);
+        Assert.Equal(0, Run(["polar", "check", Demo, .. only]).Code);
+
+        var counted = new SortedDictionary<string, double>(StringComparer.Ordinal);
+        foreach (var (name, blade, set) in ((string, string, string)[])
+            [("two-bladed", "tarn-38-two", "clean"), ("stall-10m~pitch_deg--2", "tarn-5", "small"), ("stall-10m~pitch_deg-0", "tarn-5", "small"), ("stall-10m~pitch_deg-2", "tarn-5", "small")])
+            Count(counted, Path.Join(Results, "tarn-valley", name), Rows(Path.Join(Demo, "blades", blade + ".csv")), set);
+        var whole = counted.GroupBy(c => KeyOfTable(c.Key)).ToDictionary(g => g.Key, g => g.Sum(c => c.Value));
+
+        var told = Rows(Path.Join(Results, "tarn-valley", "polars", "polar-histograms.csv"))
+            .ToDictionary(r => $"{r["table"]} {r["quantity"]} {Bin(r)}", r => Number(r["share"]), StringComparer.Ordinal);
+        Assert.Equal(counted.Keys, told.Keys.Order(StringComparer.Ordinal));
+        Assert.True(told.Count > 200, $"{told.Count} bins");
+        foreach (var (key, share) in told)
+            Assert.Equal(counted[key] / whole[KeyOfTable(key)], share, 1e-6);
+        // Every table's shares, by angle and by Reynolds number, make one.
+        foreach (var table in told.GroupBy(t => KeyOfTable(t.Key)))
+            Assert.Equal(1, table.Sum(t => t.Value), 1e-9);
+    }
+
+    [Fact]
+    public void The_same_report_comes_of_any_number_of_workers()
+    {
+        foreach (var workers in (string[])["1", "2", "5"])
+            Assert.Equal(0, Run("polar", "check", _studies.PathOf("example"), "--results", Path.Join(Results, workers), "--workers", workers).Code);
+        var one = TemporaryFolder.Contents(Path.Join(Results, "1"));
+        Assert.Equal(one, TemporaryFolder.Contents(Path.Join(Results, "2")));
+        Assert.Equal(one, TemporaryFolder.Contents(Path.Join(Results, "5")));
+    }
+
+    [Fact]
+    public void As_JSON_the_same_rows_come_with_the_same_names()
+    {
+        var (code, text, _) = Run("polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed", "--json");
+        Assert.Equal(0, code);
+        using var json = JsonDocument.Parse(text);
+        Assert.Equal(
+            ["format", "checked", "tool_version", "polar_figures", "polar_doubts", "polar_use", "polar_histograms"],
+            json.RootElement.EnumerateObject().Select(p => p.Name));
+        foreach (var name in (string[])["figures", "doubts", "use", "histograms"])
+        {
+            var rows = Rows(Path.Join(Results, "example", "polars", $"polar-{name}.csv"));
+            var items = json.RootElement.GetProperty("polar_" + name).EnumerateArray().ToList();
+            Assert.Equal(rows.Count, items.Count);
+            foreach (var (row, item) in rows.Zip(items))
+                Assert.Equal(row.Keys, item.EnumerateObject().Select(p => p.Name));
+        }
+        Assert.Equal(0.011, json.RootElement.GetProperty("polar_figures")[0].GetProperty("least_drag").GetDouble());
+        Assert.Equal(JsonValueKind.Null, json.RootElement.GetProperty("polar_figures")[2].GetProperty("reynolds").ValueKind);
+    }
+
+    [Fact]
+    public void A_table_with_an_error_is_told_first_and_the_others_are_checked()
+    {
+        _studies.Write("example/polars/clean/spare.csv", "alpha_deg,cl,cd\n-10,0,0.1\n0,0,-0.1\n10,0,0.1\n");
+        var (code, text, _) = Run("polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed");
+        Assert.Equal(1, code);
+        Assert.StartsWith("polars/clean/spare.csv:3:5: cd is -0.1; drag coefficients must be >= 0\npolars/clean/fell-21.csv:", text, StringComparison.Ordinal);
+        Assert.Contains("\n1 error, 30 doubts in 2 tables\n", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_table_that_no_blade_names_is_checked_and_said_to_be_not_used()
+    {
+        _studies.Write("example/polars/clean/spare.csv", "alpha_deg,cl,cd\n-180,0,0.6\n0,0,0.6\n180,0,0.6\n");
+        var text = Run("polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed").Out;
+        Assert.Contains("\nspare           -                    -  -180 to 180          -            -                   -          -          -  not used\n", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_study_of_which_no_case_can_run_says_why()
+    {
+        var (code, text, error) = Run("polar", "check", _studies.PathOf("broken"), "--results", Results);
+        Assert.Equal((2, ""), (code, text));
+        Assert.StartsWith("cases/clean.toml:13:1: unknown key 'tip_speed'", error, StringComparison.Ordinal);
+        Assert.EndsWith("\n4 errors in 4 files; clean not run, nothing can run\n", error, StringComparison.Ordinal);
+        Assert.False(Directory.Exists(Results));
+    }
+
+    [Fact]
+    public void Names_that_lead_nowhere_are_told()
+    {
+        Told("no case matches 'x*'; the cases are air-and-pitch~", "polar", "check", _studies.PathOf("example"), "--only", "x*");
+        Told("no study folder or case file ", "polar", "check", Path.Join(_folder.Path, "nothing"));
+        Told("--out is empty; give a folder", "polar", "check", _studies.PathOf("example/polars/clean"), "--out", "");
+        File.WriteAllText(Path.Join(_folder.Path, "file"), "");
+        Told($"'{Path.Join(_folder.Path, "file")}' is a file; give a folder", "polar", "check", _studies.PathOf("example/polars/clean"), "--out", Path.Join(_folder.Path, "file"));
+
+        void Told(string beginning, params string[] arguments)
+        {
+            var (code, text, error) = Run(arguments);
+            Assert.Equal((2, ""), (code, text));
+            Assert.StartsWith(beginning, error, StringComparison.Ordinal);
+        }
+    }
+
+    [Fact]
+    public void A_disk_that_takes_no_more_is_told_in_one_line_with_exit_code_3()
+    {
+        var (code, text, error) = Run(
+            ["polar", "check", _studies.PathOf("example/polars/clean"), "--out", Path.Join(_folder.Path, "report")],
+            disk: new FailingDisk(1, () => new IOException("x", 28)));
+        Assert.Equal((3, ""), (code, text));
+        Assert.Equal($"cannot write results into {Path.Join(_folder.Path, "report")}: no room left on the disk\n", error);
+    }
+
+    [Fact]
+    public void A_case_that_cannot_be_solved_is_told_and_the_others_count()
+    {
+        var calls = 0;
+        var (code, text, error) = Run(
+            ["polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed", "--only", "scheduled", "--workers", "1"],
+            solve: (rotor, cancellation) => calls++ == 0 ? throw new InvalidOperationException("loss factor 1.0003") : CaseSolver.Solve(rotor, cancellation));
+        Assert.Equal(1, code);
+        Assert.Contains("Case scheduled failed: fault in BladeLoads, please report: loss factor 1.0003\n", error, StringComparison.Ordinal);
+        Assert.Contains("(1 case, every operating point alike)", text, StringComparison.Ordinal);
+        Assert.Contains("; 1 case left out, which 'bladeloads check' tells about\n", text, StringComparison.Ordinal);
+    }
+
+    private static void Count(SortedDictionary<string, double> counted, string result, List<Dictionary<string, string>> blade, string set)
+    {
+        var atRest = Rows(Path.Join(result, "power-curve.csv")).Where(r => Number(r["rotor_speed_rpm"]) == 0).Select(r => r["wind_speed_m_s"]).ToHashSet();
+        foreach (var row in Rows(Path.Join(result, "spanwise.csv")).Where(r => !atRest.Contains(r["wind_speed_m_s"])))
+        {
+            var radius = Number(row["radius_m"]);
+            var after = blade.FindIndex(1, r => Number(r["radius_m"]) > radius);
+            var (inner, outer) = (blade[after - 1], blade[after]);
+            var share = (radius - Number(inner["radius_m"])) / (Number(outer["radius_m"]) - Number(inner["radius_m"]));
+            var length = Number(row["element_length_m"]) / (Number(blade[^1]["radius_m"]) - Number(blade[0]["radius_m"]));
+            Add(inner["section"], length * (1 - share));
+            Add(outer["section"], length * share);
+
+            void Add(string section, double weight)
+            {
+                var table = $"polars/{set}/{section}.csv";
+                var degree = Math.Floor(Number(row["angle_of_attack_deg"]));
+                var tenth = Math.Floor(10 * Math.Log10(Number(row["reynolds"])));
+                foreach (var key in (string[])[$"{table} angle_of_attack_deg {degree:0}", $"{table} reynolds {tenth:0}"])
+                    counted[key] = counted.GetValueOrDefault(key) + weight;
+            }
+        }
+    }
+
+    private static string Bin(Dictionary<string, string> row) => row["quantity"] == "reynolds"
+        ? Math.Round(10 * Math.Log10(Number(row["from"]))).ToString("0", CultureInfo.InvariantCulture)
+        : row["from"];
+
+    private static string KeyOfTable(string key) => key[..key.LastIndexOf(' ')];
+
+    private static string[] FilesIn(string folder) => [.. Directory.EnumerateFiles(folder).Select(f => Path.GetFileName(f)!).Order(StringComparer.Ordinal)];
+
+    private static List<Dictionary<string, string>> Rows(string file)
+    {
+        var lines = File.ReadAllLines(file).Where(line => line is [not '#', ..]).Select(line => Cells(line)).ToList();
+        return [.. lines.Skip(1).Select(cells => lines[0].Zip(cells).ToDictionary(pair => pair.First, pair => pair.Second))];
+    }
+
+    // A comma within quotes parts nothing.
+    private static string[] Cells(string line)
+    {
+        var cells = new List<string> { "" };
+        var isQuoted = false;
+        foreach (var c in line)
+            if (c == '"')
+                isQuoted = !isQuoted;
+            else if (c == ',' && !isQuoted)
+                cells.Add("");
+            else
+                cells[^1] += c;
+        return [.. cells];
+    }
+
+    private static double Number(string text) => double.Parse(text, CultureInfo.InvariantCulture);
+
+    private static (int Code, string Out, string Error) Run(params string[] arguments) => Run(arguments, null, null);
+
+    private static (int Code, string Out, string Error) Run(string[] arguments, SolveCase? solve = null, IDisk? disk = null)
+    {
+        using var output = new StringWriter { NewLine = "\n" };
+        using var error = new StringWriter { NewLine = "\n" };
+        var surroundings = new Surroundings(
+            output, error, false, false, StudyReader.Read, solve ?? CaseSolver.Solve, disk ?? new Disk(), TimeProvider.System, _ => { });
+        var code = CommandLine.Run(arguments, surroundings);
+        return (code, output.ToString(), error.ToString());
+    }
+}
