@@ -51,6 +51,13 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads tidy inputs/tarn-valley --keep-last 1 --yes", "remove all replaced results but the last of each case"),
             ("bladeloads tidy inputs/tarn-valley --older-than 90d", "only what was replaced more than 90 days ago"),
         ],
+        ["polar read"] =
+        [
+            ("bladeloads polar read t18.txt --preview", "what would be made of it; writes nothing"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv", "a table whose header says what its columns are"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv --columns alpha=1,cl=2,cd=3,cm=5 --angles radians --reynolds 1.5e6", "one without a header"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv --sweep rising --leave-out incomplete --lines 12-", "one with more than is wanted"),
+        ],
         ["polar scale"] =
         [
             ("bladeloads polar scale polars/clean --out polars/soiled --lift-slope 0.95 --largest-lift 0.9 --drag-floor 1.4", "a soiled set beside the clean one"),
@@ -59,8 +66,9 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
         ],
         ["polar"] =
         [
-            ("bladeloads polar scale polars/clean --out polars/soiled --largest-lift 0.9 --drag-floor 1.5", "soiled blades from clean ones"),
-            ("bladeloads polar scale --help", "the options of a command"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv", "a polar table from one that a laboratory sent"),
+            ("bladeloads polar scale polars/clean --out polars/soiled --largest-lift 0.9 --drag-floor 1.4", "soiled blades from clean ones"),
+            ("bladeloads polar read --help", "the options of a command"),
         ],
         [""] =
         [

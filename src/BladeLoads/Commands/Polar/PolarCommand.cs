@@ -10,6 +10,6 @@ internal static class PolarCommand
         "Makes and changes polar tables: lift and drag of blade sections. What is read stays as it is; what is written says in its head how "
         + "it was made.")
     {
-        PolarScaleCommand.Define(surroundings),
+        PolarReadCommand.Define(surroundings), PolarScaleCommand.Define(surroundings),
     };
 }
