@@ -13,7 +13,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
 {
     private const int FewestRows = 3;
     private const double AngleSlack = 1e-9;       // deg
-    private const double LargestRadian = 3.2;     // a little more than pi: angles that all lie within are hardly degrees
+    internal const double LargestRadian = 3.2;    // a little more than pi: angles that all lie within are hardly degrees
     private const double LowestReynolds = 1e4;
     private const double LiftClosure = 0.05;
 

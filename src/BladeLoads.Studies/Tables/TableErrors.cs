@@ -17,6 +17,9 @@ internal sealed partial class TableErrors(Findings findings)
 
     public bool Any => _total > 0;
 
+    /// <summary>Those not told one by one too.</summary>
+    public int Total => _total;
+
     /// <summary>So many that it is no table of this kind: what follows would only repeat them.</summary>
     public bool AreTooMany => _total >= Most;
 

@@ -58,6 +58,13 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads polar check polars/clean --out report", "a set by itself, with the report as files"),
             ("bladeloads polar check polars/clean/t18.csv", "one table, all its Reynolds numbers"),
         ],
+        ["polar read"] =
+        [
+            ("bladeloads polar read t18.txt --preview", "what would be made of it; writes nothing"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv", "a table whose header says what its columns are"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv --columns alpha=1,cl=2,cd=3,cm=5 --angles radians --reynolds 1.5e6", "one without a header"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv --sweep rising --leave-out incomplete --lines 12-", "one with more than is wanted"),
+        ],
         ["polar scale"] =
         [
             ("bladeloads polar scale polars/clean --out polars/soiled --lift-slope 0.95 --largest-lift 0.9 --drag-floor 1.4", "a soiled set beside the clean one"),
@@ -74,9 +81,10 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
         ["polar"] =
         [
             ("bladeloads polar check inputs/tarn-valley", "can the tables be trusted where the blades work?"),
+            ("bladeloads polar read t18.txt --out polars/lab/t18.csv", "a polar table from one that a laboratory sent"),
             ("bladeloads polar draw inputs/tarn-valley", "every table of a study on a page of its own"),
             ("bladeloads polar scale polars/clean --out polars/soiled --largest-lift 0.9 --drag-floor 1.5", "soiled blades from clean ones"),
-            ("bladeloads polar scale --help", "the options of a command"),
+            ("bladeloads polar read --help", "the options of a command"),
         ],
         [""] =
         [

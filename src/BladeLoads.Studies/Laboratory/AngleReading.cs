@@ -1,0 +1,97 @@
+using System.Globalization;
+using BladeLoads.Studies.Fingerprints;
+using BladeLoads.Studies.Tables;
+
+namespace BladeLoads.Studies.Laboratory;
+
+/// <summary>Angles of a foreign table in degrees, once their unit is said or cannot be another.</summary>
+internal sealed class AngleReading
+{
+    private const double AngleSlack = 1e-9;   // deg
+
+    private readonly ReadingRequest _request;
+    private readonly AngleUnit _unit;
+    private int _wrapped;
+    private int _snapped;
+
+    private AngleReading(ReadingRequest request, AngleUnit unit, string why) => (_request, _unit, Why) = (request, unit, why);
+
+    /// <summary>The unit and from where it is known, for the record.</summary>
+    public string Why { get; }
+
+    /// <summary>What was done to the angles, for the record.</summary>
+    public IEnumerable<string> Done()
+    {
+        if (_unit == AngleUnit.Radians)
+            yield return "angles from radians to degrees, 12 significant digits";
+        if (_snapped > 0)
+            yield return "the last digit of pi rounded up taken as 180 degrees";
+        if (_wrapped > 0)
+            yield return string.Create(CultureInfo.InvariantCulture, $"{_wrapped} angle{(_wrapped == 1 ? "" : "s")} beyond 180 degrees by a turn");
+    }
+
+    /// <summary>Null, with the reason reported, where the unit is not known, or said twice and not the same.</summary>
+    public static AngleReading? Of(TableScan scan, ReadingRequest request, string file, Findings findings)
+    {
+        var named = scan.Unit;
+        if (request.Angles is { } said && named is { } other && other != said)
+        {
+            findings.Error(new Place(file, scan.UnitLine, 1), $"names {InWords(other)} for the angle of attack and --angles says {InWords(said)}; "
+                + "if the line is wrong, leave it out with --lines and say --columns by number");
+            return null;
+        }
+        if (request.Angles is { } asked)
+            return new AngleReading(request, asked, $"angles in {InWords(asked)}, as --angles says");
+        if (named is { } unit)
+            return new AngleReading(request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"));
+        if (scan.Columns!.NameOf(ColumnRole.Angle) is { HasUnknownUnit: true })
+        {
+            findings.Error(new Place(file, scan.Header.Line, 1), $"{scan.Columns.Shown(ColumnRole.Angle)} names a unit that is not known; say --angles degrees or --angles radians, "
+                + "and give other units as one of these");
+            return null;
+        }
+        var (lowest, highest) = (scan.Rows.Min(row => row.Angle), scan.Rows.Max(row => row.Angle));
+        // Radians go from -pi to pi, or from 0 to 2 pi.
+        if (Math.Abs(lowest) <= PolarTable.LargestRadian && Math.Abs(highest) <= PolarTable.LargestRadian
+            || lowest >= 0 && highest <= 2 * PolarTable.LargestRadian)
+        {
+            findings.Error(new Place(file, scan.Rows[0].Line, scan.Rows[0].At.Angle), $"alpha runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} "
+                + "only, and nothing says whether in degrees or radians; say --angles degrees or --angles radians");
+            return null;
+        }
+        return new AngleReading(request, AngleUnit.Degrees, "angles in degrees, as they go beyond all radians");
+    }
+
+    /// <summary>Degrees, -180 to 180; null, with what is wrong, for an angle beyond.</summary>
+    public double? ToDegrees(double angle, out string problem)
+    {
+        problem = "";
+        var degrees = _unit == AngleUnit.Radians ? TwelveDigits.Of(double.RadiansToDegrees(angle)) : angle;
+        if (Math.Abs(degrees) <= 180)
+            return degrees;
+        if (Math.Abs(degrees) <= 180 + AngleSlack)
+            return Math.CopySign(180, degrees);
+        if (_unit == AngleUnit.Radians && Math.Abs(angle) - Math.PI <= HalfOfLastDigit(angle))
+        {
+            _snapped++;
+            return Math.CopySign(180, degrees);
+        }
+        if (_request.Wrap && Math.Abs(degrees) <= 360 + AngleSlack)
+        {
+            _wrapped++;
+            return TwelveDigits.Of(Math.Clamp(degrees - Math.CopySign(360, degrees), -180, 180));
+        }
+        problem = $"alpha is {CanonicalText.Of(angle)}{(_unit == AngleUnit.Radians ? $" rad, {CanonicalText.Of(degrees)} deg" : "")}; angles go from -180 to 180 degrees"
+            + (Math.Abs(degrees) <= 360 ? "; where they go round from 0 to 360, say --wrap" : "");
+        return null;
+    }
+
+    private static double HalfOfLastDigit(double angle)
+    {
+        var text = angle.ToString("R", CultureInfo.InvariantCulture);
+        var point = text.IndexOf('.', StringComparison.Ordinal);
+        return point < 0 ? 0 : 0.5 * Math.Pow(10, -(text.Length - point - 1));
+    }
+
+    private static string InWords(AngleUnit unit) => unit == AngleUnit.Degrees ? "degrees" : "radians";
+}

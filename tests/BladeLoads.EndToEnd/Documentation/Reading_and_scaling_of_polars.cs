@@ -1,0 +1,44 @@
+using System.Text.RegularExpressions;
+using BladeLoads.Batch.Tests.Building;
+using BladeLoads.EndToEnd.Program;
+
+namespace BladeLoads.EndToEnd.Documentation;
+
+public sealed partial class Reading_and_scaling_of_polars : IDisposable
+{
+    private readonly TemporaryFolder _folder = new();
+
+    public void Dispose() => _folder.Dispose();
+
+    [Fact]
+    public void The_table_that_the_page_shows_is_what_is_made_of_the_file_that_it_shows()
+    {
+        var sent = CodeBlock.AllOf("docs/formats.md").Single(block => block.Attributes.ContainsKey("polar-read"));
+        var name = sent.Attributes["polar-read"];
+        var made = CodeBlock.AllOf("docs/formats.md").Single(block => block.Attributes.GetValueOrDefault("made-of") == name);
+        File.WriteAllText(Path.Join(_folder.Path, name), sent.Text);
+
+        var finished = Started.Run(_folder.Path, "polar", "read", name, "--out", "t21.csv");
+
+        Assert.True(finished.ExitCode == 0, finished.All);
+        Assert.Equal(made.Text, File.ReadAllText(Path.Join(_folder.Path, "t21.csv")));
+    }
+
+    [Theory]
+    [InlineData("read")]
+    [InlineData("scale")]
+    public void The_page_names_every_option_of_the_command_and_no_other(string command)
+    {
+        var help = Started.Run(_folder.Path, "polar", command, "--help").Out;
+        var options = Option().Matches(help[..help.IndexOf("Examples:", StringComparison.Ordinal)]).Select(match => match.Value).Except(["--help"]).Order(StringComparer.Ordinal).Distinct();
+
+        var page = string.Join("\n", Repository.Lines("docs/formats.md"));
+        var section = page[page.IndexOf($"### polar {command}\n", StringComparison.Ordinal)..];
+        section = section[..section.IndexOf("\n##", 4, StringComparison.Ordinal)];
+
+        Assert.Equal(options, Option().Matches(section).Select(match => match.Value).Order(StringComparer.Ordinal).Distinct());
+    }
+
+    [GeneratedRegex("--[a-z]+(?:-[a-z]+)*")]
+    private static partial Regex Option();
+}

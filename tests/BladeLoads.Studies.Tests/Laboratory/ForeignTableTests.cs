@@ -1,0 +1,185 @@
+using System.Text;
+
+namespace BladeLoads.Studies.Tests.Laboratory;
+
+public class ForeignTableTests
+{
+    private const string Small = "alpha;cl;cd\n-5;-0,4;0,01\n0;0,1;0,009\n5;0,6;0,01\n";
+    private const string Rows = "-5 -0.4 0.01 | 0 0.1 0.009 | 5 0.6 0.01";
+
+    public static TheoryData<string> Readable => ForeignCase.Titles(TablesThatAreRead.All);
+
+    public static TheoryData<string> Refused => ForeignCase.Titles(TablesThatAreRefused.All);
+
+    [Theory]
+    [MemberData(nameof(Readable))]
+    public void A_table_that_can_be_read_in_one_way_is_read_so(string title)
+    {
+        var table = TablesThatAreRead.All.Single(one => one.Title == title);
+
+        Assert.Equal(table.Expected, Foreign.Outcome(Foreign.Read(table.Text, table.Options)));
+    }
+
+    [Theory]
+    [MemberData(nameof(Refused))]
+    public void A_table_that_cannot_be_read_or_in_two_ways_is_refused_with_what_would_do(string title)
+    {
+        var table = TablesThatAreRefused.All.Single(one => one.Title == title);
+
+        var read = Foreign.Read(table.Text, table.Options);
+
+        Assert.Equal(table.Expected, Foreign.Outcome(read));
+        Assert.True(read.Polars.IsEmpty && !read.Errors.IsEmpty);
+    }
+
+    [Theory]
+    [InlineData("utf-8", true, "UTF-8")]
+    [InlineData("utf-16", true, "UTF-16")]
+    [InlineData("utf-16", false, "UTF-16")]
+    [InlineData("utf-16BE", true, "UTF-16")]
+    [InlineData("utf-16BE", false, "UTF-16")]
+    [InlineData("utf-32", true, "UTF-32")]
+    [InlineData("utf-32", false, "UTF-32")]
+    [InlineData("utf-32BE", true, "UTF-32")]
+    [InlineData("iso-8859-1", false, "Windows-1252 (Latin-1)")]
+    public void Every_usual_encoding_is_read(string encoding, bool withMark, string told)
+    {
+        var coder = Encoding.GetEncoding(encoding);
+
+        var table = Foreign.Read([.. withMark ? coder.GetPreamble() : [], .. coder.GetBytes(Small.Replace("alpha", "alpha [°]"))]);
+
+        Assert.Equal(Rows, Foreign.Outcome(table));
+        Assert.Equal($"text: {told}, semicolons between columns and a decimal comma", table.Record[0]);
+        Assert.Contains("angles in degrees, as line 1 says", table.Record);
+    }
+
+    [Theory]
+    [InlineData("\r\n")]
+    [InlineData("\r")]
+    [InlineData("\n\f")]
+    [InlineData("\r\n\r\n")]
+    public void Every_line_end_is_one(string end)
+        => Assert.Equal(Rows, Foreign.Outcome(Foreign.Read(Small.Replace("\n", end) + "\x1A")));
+
+    [Fact]
+    public void A_dash_of_a_one_byte_encoding_is_a_minus_sign()
+        => Assert.Equal(Rows, Foreign.Outcome(Foreign.Read([.. "alpha;cl;cd\n"u8, 0x96, .. "5;-0,4;0,01\n0;0,1;0,009\n5;0,6;0,01\n"u8])));
+
+    [Fact]
+    public void A_last_row_without_a_line_end_is_a_doubt()
+    {
+        var table = Foreign.Read(Small.TrimEnd('\n'));
+
+        Assert.Equal(Rows, Foreign.Outcome(table));
+        Told.Exactly(["lab.txt:4: the last row has no line end; if the file was cut off there, its last number may have lost digits"], table.Doubts);
+        Assert.Empty(Foreign.Read(Small + "end").Doubts);
+    }
+
+    [Fact]
+    public void The_record_says_all_that_was_done()
+    {
+        var table = Foreign.Read("""
+            Fell tunnel, section t18
+            # Re (millions) 0.75
+            alpha [rad];x;cn;ct
+            0,2;7;0,9;0,1
+            0,1;7;0,5;0,02
+            0,0;7;0,1;-0,01
+            0,0;7;0,10;-0,010
+            -0,1;;;
+            # -0,2;7;-0,7;0,01
+            end of the table
+
+            """, "--columns normal=3,tangential=4 --leave-out incomplete");
+
+        Assert.Equal(
+            [
+                "text: UTF-8, semicolons between columns and a decimal comma",
+                "columns: alpha from 'alpha [rad]' (column 1), normal from 'cn' (column 3), tangential from 'ct' (column 4); not taken: 'x' (column 2)",
+                "angles in radians, as line 3 says",
+                "Reynolds number of line 2",
+                "converted: angles from radians to degrees, 12 significant digits; cl and cd from forces square to the chord and along it, 12 significant digits",
+                "rows are sorted by angle at Reynolds number 750000",
+                "left out: line 7, the same as line 6",
+                "left out: line 8, a value is missing",
+                "left out: line 9, a row behind a comment mark",
+                "left out: line 10, a remark below the rows",
+            ],
+            table.Record.ToArray());
+    }
+
+    [Fact]
+    public void Many_lines_are_told_as_ranges()
+    {
+        var rows = string.Concat(Enumerable.Range(0, 40).Select(i => i % 3 == 0 || i > 30 ? $"{i} 0.1 0.01\n{i} 0.1 0.01\n" : $"{i} 0.1 0.01\n"));
+
+        Assert.Equal(
+            [
+                "left out: line 3, the same as line 2", "left out: line 7, the same as line 6", "left out: line 11, the same as line 10",
+            ],
+            Foreign.Read("alpha cl cd\n" + rows).Record.Where(line => line.StartsWith("left out", StringComparison.Ordinal)).Take(3));
+        Assert.Contains(
+            "left out: lines 3, 5 to 6, 8, 10, 12, 14 and more, drag below 0",
+            Foreign.Read("alpha cl cd\n1 1 1\n2 1 -1\n3 1 1\n4 1 -1\n5 1 -1\n6 1 1\n7 1 -1\n8 1 1\n9 1 -1\n10 1 1\n11 1 -1\n12 1 1\n13 1 -1\n14 1 1\n15 1 -1\n",
+                "--leave-out negative-drag").Record);
+    }
+
+    [Theory]
+    [InlineData("Re = 1.0e6", 1e6)]
+    [InlineData("RE=1,5E6", 1.5e6)]
+    [InlineData("re 750000", 750000)]
+    [InlineData("Reynolds 1 000 000", 1e6)]
+    [InlineData("Reynolds number: 1'250'000", 1.25e6)]
+    [InlineData("Reynolds no. = 1,000,000", 1e6)]
+    [InlineData("Reynoldszahl 1.000.000", 1e6)]
+    [InlineData("Reynolds number 0.3 million, clean", 3e5)]
+    [InlineData("Re = 1.5 M", 1.5e6)]
+    [InlineData("Re (millions) 1.5", 1.5e6)]
+    [InlineData("Re [10^6] = 1.5", 1.5e6)]
+    [InlineData("Re x 10^-6: 0.75", 750000)]
+    [InlineData("Re/1e6 = 0.57", 570000)]
+    [InlineData("Re = 1.5 x 10^6, Ma = 0.1", 1.5e6)]
+    [InlineData("Re = 1.5 * 10**6", 1.5e6)]
+    [InlineData("Re;300000;;", 3e5)]
+    [InlineData("\"Re\",\"1e6\"", 1e6)]
+    [InlineData("Re ~ 500 thousand", 5e5)]
+    [InlineData("run 7 at Re=2E+06", 2e6)]
+    public void A_line_that_names_a_reynolds_number_is_understood(string line, double reynolds)
+        => Assert.Equal(
+            [reynolds], Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Polars.Select(polar => polar.Reynolds));
+
+    [Theory]
+    [InlineData("more results below")]
+    [InlineData("re-run of the 12th")]
+    [InlineData("Subject: RE your order")]
+    [InlineData("Reynolds number: not noted")]
+    [InlineData("area 5")]
+    public void A_line_that_names_none_is_prose(string line)
+        => Assert.Equal(
+            [double.NaN], Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Polars.Select(polar => polar.Reynolds));
+
+    [Theory]
+    [InlineData("alpha", "CL", "CD")]
+    [InlineData("Alpha (deg)", "Cl (-)", "Cd (-)")]
+    [InlineData("ALPHA [°]", "C_L", "C_D")]
+    [InlineData("angle of attack in degrees", "coefficient of lift", "coefficient of drag")]
+    [InlineData("AoA/deg", "lift coeff.", "drag coeff.")]
+    [InlineData("AOA", "Lift", "Drag")]
+    [InlineData("alpha_deg", "c l", "c d")]
+    [InlineData("𝛼 / °", "c𝗅", "c_d")]
+    [InlineData("Incidence", "Cl", "Cd total")]
+    public void The_usual_words_of_the_trade_are_understood(string angle, string lift, string drag)
+        => Assert.Equal(Rows, Foreign.Outcome(Foreign.Read($"{lift};{angle};{drag}\n-0,4;-5;0,01\n0,1;0;0,009\n0,6;5;0,01\n")));
+
+    [Fact]
+    public void A_table_is_read_the_same_twice()
+    {
+        var one = Foreign.Read(Small);
+        var other = Foreign.Read(Small);
+
+        Assert.Equal(Foreign.Outcome(one), Foreign.Outcome(other));
+        Assert.Equal(one.Record.ToArray(), other.Record.ToArray());
+        Assert.Equal(one.Sha256, other.Sha256);
+        Assert.Equal(64, one.Sha256.Length);
+    }
+}

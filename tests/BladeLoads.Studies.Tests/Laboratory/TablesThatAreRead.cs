@@ -1,0 +1,6 @@
+namespace BladeLoads.Studies.Tests.Laboratory;
+
+internal static partial class TablesThatAreRead
+{
+    public static IEnumerable<ForeignCase> All => [.. Layouts, .. Surroundings, .. ReynoldsNumbers, .. Quantities, .. Order];
+}
