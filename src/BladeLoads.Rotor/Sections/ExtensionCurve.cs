@@ -32,7 +32,7 @@ internal sealed class ExtensionCurve
     public ExtensionCurve(Polar polar, double largestDrag, ExtensionJoin join)
     {
         (_polar, _largestDrag) = (polar, largestDrag);
-        _floor = PolarExtension.PlateFriction(polar.Reynolds);
+        _floor = PlateFriction.Laminar(polar.Reynolds);
         (_stallAbove, _stallBelow) = (StallPoint.Above(polar), StallPoint.Below(polar));
         var last = polar.Angles.Length - 1;
         var stall = _stallAbove ?? LastBelowRightAngle();
@@ -68,15 +68,15 @@ internal sealed class ExtensionCurve
     // Outwards.
     private List<(double Angle, double Lift, double Drag)> Added(int sign, double join)
     {
-        var rows = new List<(double Angle, double Lift, double Drag)>();
+        var added = new List<(double Angle, double Lift, double Drag)>();
         foreach (var angle in AnglesBeyond(sign, sign * join))
         {
             var (lift, drag) = At(sign, angle);
             if (drag < _floor)
                 _raised++;
-            rows.Add((sign * angle, lift + 0.0, Math.Max(drag, _floor)));
+            added.Add((sign * angle, lift + 0.0, Math.Max(drag, _floor)));
         }
-        return rows;
+        return added;
     }
 
     private SortedSet<double> AnglesBeyond(int sign, double join)
