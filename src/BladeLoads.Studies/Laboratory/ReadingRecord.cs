@@ -19,7 +19,9 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
         var lines = ImmutableArray.CreateBuilder<string>();
         lines.Add($"text: {text.Encoding}, {Layouts.InWords(scan)}");
         if (request.Lines is { } range)
-            lines.Add(string.Create(CultureInfo.InvariantCulture, $"lines {range.First} to {range.Last} of the file, as --lines says"));
+            lines.Add(range.Last == int.MaxValue
+                ? string.Create(CultureInfo.InvariantCulture, $"lines from {range.First} on, as --lines says")
+                : string.Create(CultureInfo.InvariantCulture, $"lines {range.First} to {range.Last} of the file, as --lines says"));
         if (request.Section is { } section)
             lines.Add($"rows of section '{section}', as --section says");
         lines.Add($"columns: {Columns()}");

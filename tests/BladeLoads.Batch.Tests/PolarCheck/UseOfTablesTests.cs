@@ -197,7 +197,9 @@ public sealed class UseOfTablesTests
 
     private static ElementState Element(int index, double angleDeg, double reynolds) => FellRotor.Element(index) with
     {
-        Length = 2, AngleOfAttack = Math.Clamp(angleDeg * Degree, -Math.PI, Math.PI), Reynolds = reynolds,
+        Length = 2,
+        AngleOfAttack = Math.Clamp(angleDeg * Degree, -Math.PI, Math.PI),
+        Reynolds = reynolds,
     };
 
     private static CheckedTable Table(string file, string text)
