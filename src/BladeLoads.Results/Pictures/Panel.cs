@@ -7,6 +7,12 @@ namespace BladeLoads.Results.Pictures;
 /// <param name="HasMarks">Whether rows of tables are marked.</param>
 internal sealed record Panel(PanelAxis Across, PanelAxis Up, ImmutableArray<Curve> Curves, bool HasMarks)
 {
+    /// <summary>What lies across between these is shaded; null for nothing.</summary>
+    public (double From, double To)? Shade { get; init; }
+
+    /// <summary>Places with a ring about them.</summary>
+    public ImmutableArray<(double X, double Y)> Rings { get; init; } = [];
+
     /// <summary>A horizontal line at 0 is drawn.</summary>
     public bool HasZeroLine => !Up.IsLogarithmic && Up.From < 0 && Up.To > 0;
 

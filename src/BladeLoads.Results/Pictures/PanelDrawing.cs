@@ -31,6 +31,10 @@ internal static class PanelDrawing
     private static readonly Color Ink = Color.FromHex("#202020");
     private static readonly Color Grid = Color.FromHex("#E4E4E4");
     private static readonly Color ZeroLine = Color.FromHex("#8A8A8A");
+    private static readonly Color Shade = Color.FromHex("#B8A860").WithAlpha(0.16);
+    private static readonly Color Ring = Color.FromHex("#C00020");
+    private const float RingSize = 9;
+    private const float RingWidth = 1.4f;
 
     /// <param name="withDashes">Whether lines are broken into their dashes; else they are solid, and a later step breaks them.</param>
     /// <param name="withNumbers">Whether the lower axis has its numbers and label; another panel below may have them for both.</param>
@@ -42,10 +46,17 @@ internal static class PanelDrawing
         var frame = FrameOf(panel, place, withNumbers);
         foreach (var curve in panel.Curves)
             Add(plot, curve, frame, withDashes, panel.HasMarks ? LargestMark * Math.Min(1, CurvesInLargeMarks / panel.Curves.Length) : 0);
+        AddRings(plot, [.. panel.Rings.Where(frame.Contains).Select(p => new Coordinates(p.X, p.Y))]);
         if (panel.HasZeroLine)
         {
             var zero = plot.Add.HorizontalLine(0, 0.8f, ZeroLine);
             plot.MoveToBack(zero);
+        }
+        if (panel.Shade is { } shade)
+        {
+            var span = plot.Add.HorizontalSpan(shade.From, shade.To, Shade);
+            span.LineWidth = 0;
+            plot.MoveToBack(span);
         }
         Style(plot, panel, withNumbers);
         plot.Layout.Fixed(new PixelPadding(Left, Right, withNumbers ? Bottom : BottomWithoutNumbers, Top));
@@ -86,6 +97,15 @@ internal static class PanelDrawing
             return;
         var marks = plot.Add.ScatterPoints(rows.Select(p => new Coordinates(p.X, p.Y)).ToArray(), ColorOf(curve.Look));
         marks.MarkerStyle = Marker(mark, size, curve.Look);
+    }
+
+    private static void AddRings(Plot plot, Coordinates[] places)
+    {
+        if (places.Length == 0)
+            return;
+        var rings = plot.Add.ScatterPoints(places, Ring);
+        rings.MarkerStyle = new MarkerStyle(MarkerShape.OpenCircle, RingSize, Ring);
+        rings.MarkerStyle.LineStyle.Width = RingWidth;
     }
 
     private static MarkerStyle Marker(int mark, float size, LineLook look)

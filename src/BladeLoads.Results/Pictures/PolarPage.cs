@@ -28,6 +28,9 @@ internal sealed class PolarPage
     private const string AboutEarlier =
         "Broad pale lines: before, in the colour of their Reynolds number where the tables still have it. Change: now less before, at each angle.";
 
+    private const string AboutRings = "Red rings: rows in doubt.";
+    private const string AboutShade = "Shaded: the angles at which blades work, from 5 to 95 % of what works in this table.";
+
     private static readonly SKColor Ink = new(0x20, 0x20, 0x20);
 
     private readonly PolarLines _lines;
@@ -39,9 +42,15 @@ internal sealed class PolarPage
     {
         PictureFont.Use();
         _lines = PolarLines.Of(picture);
-        _panels = PolarPanels.Of(_lines);
+        _panels = PolarPanels.Of(_lines).With(picture);
         _legend = Legend.Of(_lines, Width - (2 * Margin));
-        _foot = picture.Earlier is null ? [AboutLines] : [AboutLines, AboutEarlier];
+        _foot =
+        [
+            AboutLines,
+            .. picture.Earlier is null ? (string[])[] : [AboutEarlier],
+            .. picture.Ringed.IsEmpty ? (string[])[] : [AboutRings],
+            .. picture.Shaded is null ? (string[])[] : [AboutShade],
+        ];
         Title = Fit(picture.Title, TitleSize, bold: true);
         Notes = [.. picture.Notes.Select(note => Fit(note, NoteSize))];
     }

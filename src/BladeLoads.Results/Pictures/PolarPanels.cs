@@ -56,6 +56,29 @@ internal sealed record PolarPanels(
             => Over(PanelAxis.Angles(double.RadiansToDegrees(whole.From), double.RadiansToDegrees(whole.To)), curves, axis);
     }
 
+    /// <summary>The same with a ring about each row in doubt, and the angles shaded at which blades work.</summary>
+    public PolarPanels With(PolarPicture picture)
+    {
+        if (picture.Ringed.IsEmpty && picture.Shaded is null)
+            return this;
+        (double, double)? shade = picture.Shaded is var (from, to) ? (double.RadiansToDegrees(from), double.RadiansToDegrees(to)) : null;
+        return this with
+        {
+            Lift = OverAngle(Lift, OfLift),
+            Drag = OverAngle(Drag, Drag.Up.IsLogarithmic ? OfLogDrag : OfDrag),
+            LiftToDrag = OverAngle(LiftToDrag, OfRatio),
+            LiftOverDrag = LiftOverDrag with { Rings = Rings((angle, c) => angle is >= WorkingFrom and <= WorkingTo ? (c.Drag, c.Lift) : (double.NaN, 0)) },
+            WholeLift = WholeLift is { } lift ? OverAngle(lift, OfLift) : null,
+            WholeDrag = WholeDrag is { } drag ? OverAngle(drag, OfDrag) : null,
+        };
+
+        Panel OverAngle(Panel panel, Func<Coefficients, double> value)
+            => panel with { Shade = shade, Rings = Rings((angle, c) => (double.RadiansToDegrees(angle), value(c))) };
+
+        ImmutableArray<(double, double)> Rings(Func<double, Coefficients, (double, double)> at)
+            => [.. picture.Ringed.Select(r => at(r.Polar.Angles[r.Row], new Coefficients(r.Polar.Lift[r.Row], r.Polar.Drag[r.Row])))];
+    }
+
     private static Panel Over(PanelAxis angles, ImmutableArray<Curve> curves, Func<IEnumerable<double>, PanelAxis> axis)
         => new(angles, axis(curves.SelectMany(c => c.Samples()).Select(p => p.Y)), curves, HasMarks: true);
 

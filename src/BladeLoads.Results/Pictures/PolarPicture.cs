@@ -15,6 +15,12 @@ public sealed record PolarPicture(string Title, ImmutableArray<string> Notes, Im
     /// <summary>What the section's tables were before; null where nothing is compared.</summary>
     public EarlierTables? Earlier { get; init; }
 
+    /// <summary>Rows in doubt, which get a ring.</summary>
+    public ImmutableArray<RingedRow> Ringed { get; init; } = [];
+
+    /// <summary>The angles of attack at which blades work, rad, from lower to higher: they are shaded; null for none.</summary>
+    public (double From, double To)? Shaded { get; init; }
+
     /// <summary>A section as tabulated, a line a Reynolds number.</summary>
     /// <param name="set">The name of the set of polars.</param>
     /// <param name="source">Where the table stands, for the note below the title.</param>
@@ -57,6 +63,9 @@ public sealed record PolarLine(Polar Polar, LineKind Kind, string Label)
     /// <summary>The parts of the polar that are drawn, rad, each from lower to higher; empty for all of it.</summary>
     public ImmutableArray<(double From, double To)> Parts { get; init; } = [];
 }
+
+/// <summary>A row of a table that a reader is to look at.</summary>
+public readonly record struct RingedRow(Polar Polar, int Row);
 
 /// <summary>Where a line comes from; each kind looks different.</summary>
 public enum LineKind

@@ -61,20 +61,22 @@ internal sealed class ExtensionCurve
         if (above.Kind != ExtensionKind.Complete)
             rows.AddRange(Added(1, _polar.Angles[_above.Row]));
         if (below.Kind != ExtensionKind.Complete)
-            rows.InsertRange(0, Added(-1, _polar.Angles[_below.Row]).Reverse());
+            rows.InsertRange(0, Enumerable.Reverse(Added(-1, _polar.Angles[_below.Row])));
         return new ExtendedPolar(PolarExtension.FromRows(_polar.Reynolds, rows), above, below, _largestDrag, _raised);
     }
 
     // Outwards.
-    private IEnumerable<(double Angle, double Lift, double Drag)> Added(int sign, double join)
+    private List<(double Angle, double Lift, double Drag)> Added(int sign, double join)
     {
+        var added = new List<(double Angle, double Lift, double Drag)>();
         foreach (var angle in AnglesBeyond(sign, sign * join))
         {
             var (lift, drag) = At(sign, angle);
             if (drag < _floor)
                 _raised++;
-            yield return (sign * angle, lift + 0.0, Math.Max(drag, _floor));
+            added.Add((sign * angle, lift + 0.0, Math.Max(drag, _floor)));
         }
+        return added;
     }
 
     private SortedSet<double> AnglesBeyond(int sign, double join)

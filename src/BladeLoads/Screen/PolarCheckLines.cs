@@ -23,13 +23,13 @@ internal static class PolarCheckLines
     {
         var output = surroundings.Out;
         FindingLines.Write(tables.Errors, [], study?.Folder ?? "", output, withSource: surroundings.OutIsTerminal);
-        var doubts = tables.Tables.SelectMany(table => OneOfAKind(table, use.ByFile.GetValueOrDefault(table.File))).ToList();
+        var doubts = tables.Tables.SelectMany(table => KindOfDoubt.Of(table, use.ByFile.GetValueOrDefault(table.File)).Select(Finding)).ToList();
         FindingLines.Write([], [.. doubts.Take(DoubtsShown)], "", output, withSource: false);
         if (doubts.Count > DoubtsShown)
             output.WriteLine($"... and {Count.Of(doubts.Count - DoubtsShown, "more doubt")}{(folder is null ? "; --out <folder> writes all" : " in polar-doubts.csv")}");
         if (!tables.Tables.IsEmpty)
         {
-            var names = new ShownNames(tables);
+            var names = new TableNames(tables);
             WriteFigures(tables, use, names, output);
             if (study is not null)
                 WriteUse(tables, use, names, output);
@@ -42,22 +42,17 @@ internal static class PolarCheckLines
             output.WriteLine(Printable.Of($"report: {folder}"));
     }
 
-    // The same is often found at each Reynolds number: that where most works stands for all, which are in the report.
-    private static IEnumerable<InputFinding> OneOfAKind(CheckedTable table, TableUse? use)
+    private static InputFinding Finding(KindOfDoubt kind)
     {
-        foreach (var kind in table.Doubts.GroupBy(doubt => (doubt.Kind, Column: doubt.Finding.Text.Split(' ')[0])))
+        var (finding, others) = (kind.First.Finding, kind.OtherLines);
+        return others.IsEmpty ? finding : finding with
         {
-            var first = kind.MaxBy(doubt => use is null ? 0 : FirstToLookAt.ShareOf(doubt, use))!;
-            var others = kind.Where(doubt => doubt != first).Select(doubt => doubt.Finding.Line).Distinct().ToList();
-            yield return others.Count == 0 ? first.Finding : first.Finding with
-            {
-                Text = $"{first.Finding.Text}; likewise line{(others.Count == 1 ? "" : "s")} {string.Join(", ", others.Take(LinesNamed))}"
-                    + (others.Count > LinesNamed ? $" and {others.Count - LinesNamed} more" : ""),
-            };
-        }
+            Text = $"{finding.Text}; likewise line{(others.Length == 1 ? "" : "s")} {string.Join(", ", others.Take(LinesNamed))}"
+                + (others.Length > LinesNamed ? $" and {others.Length - LinesNamed} more" : ""),
+        };
     }
 
-    private static void WriteFigures(CheckedTables tables, UseOfTables use, ShownNames names, TextWriter output)
+    private static void WriteFigures(CheckedTables tables, UseOfTables use, TableNames names, TextWriter output)
     {
         var isShort = tables.Tables.Sum(table => table.Figures.Length) <= FigureRowsShown && use.ByFile.Count == 0;
         output.WriteLine();
@@ -70,7 +65,7 @@ internal static class PolarCheckLines
                 var (polar, figures) = (table.Table.Section.Polars[i], table.Figures[i]);
                 text.Add(
                     [
-                        names.Of(table), Reynolds(polar.Reynolds), Text(figures.SlopeRatio, "0.00"), Degrees(figures.Attached?.ZeroLiftAngle),
+                        Printable.Of(names.Of(table.File)), Reynolds(polar.Reynolds), Text(figures.SlopeRatio, "0.00"), Degrees(figures.Attached?.ZeroLiftAngle),
                         Text(figures.LargestLift?.Value, "0.000"), Degrees(figures.LargestLift?.Angle), Text(figures.BestLiftToDrag?.Value, "0.0"),
                         Degrees(figures.BestLiftToDrag?.Angle), Text(figures.LeastDrag?.Value, "0.0000"), Degrees(figures.LeastDrag?.Angle),
                         Text(Floor(PlateFriction.Laminar(polar.Reynolds)), "0.0000"), Text(Floor(PlateFriction.Turbulent(polar.Reynolds)), "0.0000"),
@@ -82,7 +77,7 @@ internal static class PolarCheckLines
             output.WriteLine(use.ByFile.Count > 0 ? "each table at the Reynolds number used most" : "each table at the middle one of its Reynolds numbers");
     }
 
-    private static void WriteUse(CheckedTables tables, UseOfTables use, ShownNames names, TextWriter output)
+    private static void WriteUse(CheckedTables tables, UseOfTables use, TableNames names, TextWriter output)
     {
         output.WriteLine();
         output.WriteLine($"where the blades work, from 5 to 95 % of their length ({Count.Of(use.Solved, "case")}, every operating point alike):");
@@ -97,17 +92,17 @@ internal static class PolarCheckLines
             if (use.ByFile.TryGetValue(table.File, out var u))
                 text.Add(
                 [
-                    names.Of(table), Percent(u.Blades / whole), $"{Text(u.AngleDegBelow(0.05), "0.0")} to {Text(u.AngleDegBelow(0.95), "0.0")}", angles,
+                    Printable.Of(names.Of(table.File)), Percent(u.Blades / whole), $"{Text(u.AngleDegBelow(0.05), "0.0")} to {Text(u.AngleDegBelow(0.95), "0.0")}", angles,
                     Percent(u.OutsideAngles), Percent(u.BeyondPeak), $"{Reynolds(u.ReynoldsBelow(0.05), "0.0e0")} to {Reynolds(u.ReynoldsBelow(0.95), "0.0e0")}",
                     reynolds, Percent(u.OutsideReynolds),
                 ]);
             else
-                text.Add([names.Of(table), "-", "-", angles, "-", "-", "-", reynolds, "-"], "not used");
+                text.Add([Printable.Of(names.Of(table.File)), "-", "-", angles, "-", "-", "-", reynolds, "-"], "not used");
         }
         text.Write(output);
     }
 
-    private static void WritePriorities(CheckedTables tables, UseOfTables use, ShownNames names, TextWriter output)
+    private static void WritePriorities(CheckedTables tables, UseOfTables use, TableNames names, TextWriter output)
     {
         var all = FirstToLookAt.Of(tables.Tables, use.ByFile);
         output.WriteLine();
@@ -157,26 +152,4 @@ internal static class PolarCheckLines
     private static string Text(double? value, string format)
         => value is { } number && double.IsFinite(number) ? (number.ToString(format, CultureInfo.InvariantCulture) is var text && text.Trim('-', '0', '.').Length == 0
             ? text.TrimStart('-') : text) : "-";
-
-    /// <summary>Names of tables as short as they can be: without the folder that all of them are in, and without ending.</summary>
-    private sealed class ShownNames
-    {
-        private readonly int _common;
-
-        public ShownNames(CheckedTables tables)
-        {
-            var folders = tables.Tables.Select(table => table.File[..(table.File.LastIndexOf('/') + 1)]).ToList();
-            var first = folders[0];
-            for (var end = first.Length; end > 0; end = first.LastIndexOf('/', Math.Max(0, end - 2)) + 1)
-                if (folders.All(folder => folder.StartsWith(first[..end], StringComparison.Ordinal)))
-                {
-                    _common = end;
-                    break;
-                }
-        }
-
-        public string Of(CheckedTable table) => Of(table.File);
-
-        public string Of(string file) => Printable.Of(Path.ChangeExtension(file[_common..], null));
-    }
 }

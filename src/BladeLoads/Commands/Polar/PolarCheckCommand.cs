@@ -106,9 +106,10 @@ internal static class PolarCheckCommand
     private static int Tell(CheckedTables tables, UseOfTables use, Study? study, PolarCheckRequest request, Surroundings surroundings)
     {
         var report = new PolarReport(tables, use.ByFile);
+        ImmutableArray<ResultContent> Files() => [.. report.Files(), .. CheckedPicture.Files(tables, use.ByFile)];
         var folder = tables.Tables.IsEmpty ? null
-            : request.Out is { } named ? ReportPlace.Write(named, report.Files(), surroundings.Disk)
-            : study is not null ? ReportPlace.Write(new ResultsFolder(Path.GetFullPath(request.Results), study.Name), report.Files(), surroundings.Disk)
+            : request.Out is { } named ? ReportPlace.Write(named, Files(), surroundings.Disk)
+            : study is not null ? ReportPlace.Write(new ResultsFolder(Path.GetFullPath(request.Results), study.Name), Files(), surroundings.Disk)
             : null;
         foreach (var (name, reason) in use.Failed)
             surroundings.Error.WriteLine($"Case {name} failed: {reason}");

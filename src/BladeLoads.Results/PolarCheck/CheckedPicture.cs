@@ -1,0 +1,59 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using BladeLoads.Results.Pictures;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Studies.PolarCheck;
+
+namespace BladeLoads.Results.PolarCheck;
+
+/// <summary>The page of a checked table: its rows in doubt ringed, the angles at which blades work shaded, and what is doubted in words.</summary>
+public static class CheckedPicture
+{
+    private const int DoubtsTold = 4;
+    private const string Ending = ".svg";
+
+    /// <summary>The SVG files of all tables: <c>SET~SECTION.svg</c>, or <c>SECTION.svg</c> where all are of one set.</summary>
+    /// <param name="tables">One or more.</param>
+    /// <param name="use">By the file of the table.</param>
+    public static ImmutableArray<ResultContent> Files(CheckedTables tables, IReadOnlyDictionary<string, TableUse> use)
+    {
+        var names = new TableNames(tables);
+        return [.. tables.Tables.Select(table => new ResultContent(
+            names.FileNameOf(table.File) + Ending, PictureFile.Svg(Of(table, use.GetValueOrDefault(table.File)))))];
+    }
+
+    /// <param name="use">Null for a table that nothing uses.</param>
+    public static PolarPicture Of(CheckedTable table, TableUse? use)
+    {
+        var polars = table.Table.Section.Polars;
+        var picture = PolarPicture.Of(table.Table.Section, SetOf(table), table.File);
+        return picture with
+        {
+            Notes = [.. picture.Notes, .. Told(table, use)],
+            Ringed = [.. table.Doubts.Where(doubt => doubt.Polar >= 0)
+                .SelectMany(doubt => doubt.Rows.Select(row => new RingedRow(polars[doubt.Polar], row))).Distinct()],
+            Shaded = use is { Blades: > 0 }
+                ? (double.DegreesToRadians(use.AngleDegBelow(0.05)), double.DegreesToRadians(use.AngleDegBelow(0.95)))
+                : null,
+        };
+    }
+
+    private static IEnumerable<string> Told(CheckedTable table, TableUse? use)
+    {
+        var all = KindOfDoubt.Of(table, use).OrderByDescending(kind => use is null ? 0 : FirstToLookAt.ShareOf(kind.First, use)).Select(Line).ToList();
+        return all.Count <= DoubtsTold + 1 ? all
+            : all.Take(DoubtsTold).Append(string.Create(CultureInfo.InvariantCulture, $"and {all.Count - DoubtsTold} more kinds of doubt"));
+    }
+
+    // What was found, without what would do.
+    private static string Line(KindOfDoubt kind)
+    {
+        var (doubt, finding) = (kind.First, kind.First.Finding);
+        var found = finding.Text.AsSpan().IndexOfAny(';', ':') is > 0 and var end ? finding.Text[..end] : finding.Text;
+        var others = kind.OtherLines.IsEmpty ? "" : string.Create(CultureInfo.InvariantCulture, $"; likewise {kind.OtherLines.Length} more");
+        return string.Create(CultureInfo.InvariantCulture, $"line {finding.Line}, {doubt.Kind}: {found}{others}");
+    }
+
+    private static string SetOf(CheckedTable table)
+        => Path.GetFileName(Path.GetDirectoryName(Path.GetFullPath(table.File))) is { Length: > 0 } folder ? folder : "polars";
+}
