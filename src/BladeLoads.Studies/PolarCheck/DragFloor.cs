@@ -16,7 +16,7 @@ internal static class DragFloor
         var floor = PlateFriction.Laminar(reynolds);
         for (var i = 0; i < polar.Rows.Length; i++)
             if (polar.Rows[i].Drag < floor * Rounding)
-                yield return polar.Doubt("drag below a plate", "cd", [i], polar.Rows[Math.Max(0, i - 1)].AngleDeg, polar.Rows[Math.Min(i + 1, polar.Rows.Length - 1)].AngleDeg,
+                yield return polar.Doubt(DoubtKinds.DragBelowPlate, "cd", [i], polar.Rows[Math.Max(0, i - 1)].AngleDeg, polar.Rows[Math.Min(i + 1, polar.Rows.Length - 1)].AngleDeg,
                     $"cd is {Given(polar.Rows[i].Drag)}, and a laminar plate has {Found(floor)} {(isOpen ? "even " : "")}at Reynolds number "
                     + $"{ReynoldsNumber(reynolds)}; drag of pressure alone, or a slip?");
     }

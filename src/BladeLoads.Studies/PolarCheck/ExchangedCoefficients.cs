@@ -17,7 +17,7 @@ internal static class ExchangedCoefficients
         var (first, last) = (polar.Rows[rows[0]], polar.Rows[rows[^1]]);
         var largest = rows.Max(i => Math.Abs(polar.Rows[i].Lift));
         if (last.Drag - first.Drag > RiseOfLift && largest < LittleDrag)
-            yield return polar.Doubt("exchanged columns", "cl", rows, -180, 180,
+            yield return polar.Doubt(DoubtKinds.ExchangedColumns, "cl", rows, -180, 180,
                 $"cd rises from {Given(first.Drag)} at {Given(first.AngleDeg)} deg to {Given(last.Drag)} at {Given(last.AngleDeg)} deg, and "
                 + $"cl is {Found(largest)} at most; are cl and cd exchanged?");
     }

@@ -14,7 +14,7 @@ internal static class Gaps
             var (from, to) = (polar.Rows[i - 1].AngleDeg, polar.Rows[i].AngleDeg);
             var (widest, where) = Widest((from + to) / 2);
             if (to - from > widest)
-                yield return polar.DoubtBetween("gap", "alpha_deg", i - 1, i,
+                yield return polar.DoubtBetween(DoubtKinds.Gap, "alpha_deg", i - 1, i,
                     $"no row between {Given(from)} and {Given(to)} deg, and the curve there is a guess; {where} give one every {Given(widest)} deg "
                     + "or closer");
         }

@@ -33,7 +33,7 @@ internal static class Jumps
         => Math.Abs(polar.Rows[second].Drag - polar.Rows[first].Drag) > SteepDrag * Apart(polar, first, second);
 
     private static PolarDoubt Jump(CheckedPolar polar, int row, string column, double from, double to)
-        => polar.DoubtBetween("jump", column, row - 1, row,
+        => polar.DoubtBetween(DoubtKinds.Jump, column, row - 1, row,
             $"{column} jumps from {Given(from)} to {Given(to)} between {Given(polar.Rows[row - 1].AngleDeg)} and {Given(polar.Rows[row].AngleDeg)} deg "
             + $"{polar.RowToRow(row - 1, row)}; give rows between them, or mend the slip");
 

@@ -12,7 +12,7 @@ internal static class NearRows
     {
         for (var i = 1; i < polar.Rows.Length; i++)
             if (AreOne(polar, i - 1, i))
-                yield return polar.DoubtBetween("one angle twice", "alpha_deg", i - 1, i,
+                yield return polar.DoubtBetween(DoubtKinds.OneAngleTwice, "alpha_deg", i - 1, i,
                     $"alpha_deg {Given(polar.Rows[i - 1].AngleDeg)} and {Given(polar.Rows[i].AngleDeg)} are hardly two angles "
                     + $"{polar.RowToRow(i - 1, i)}; keep one of them, or their mean");
     }

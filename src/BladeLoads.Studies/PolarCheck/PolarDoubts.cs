@@ -17,10 +17,10 @@ public static class PolarDoubts
         var places = new CellPlaces(file, table);
         var polars = Enumerable.Range(0, table.Polars.Length).Select(i => new CheckedPolar(table, i, places)).ToArray();
         var doubts = new List<PolarDoubt>();
-        doubts.AddRange(table.Reach.Select(doubt => OfTable("reach", doubt)));
-        doubts.AddRange(table.Doubts.Select(doubt => OfTable("180 deg", doubt)));
+        doubts.AddRange(table.Reach.Select(doubt => OfTable(DoubtKinds.Reach, doubt)));
+        doubts.AddRange(table.Doubts.Select(doubt => OfTable(DoubtKinds.HalfTurn, doubt)));
         if (table.Augmented is var (line, note))
-            doubts.Add(OfTable("augmented", new InputFinding(file, line, 0,
+            doubts.Add(OfTable(DoubtKinds.Augmented, new InputFinding(file, line, 0,
                 $"the rows are augmented for rotation, by the head: '{VisibleText.Escape(note)}'; they hold for one rotor and one radius, and are not to be "
                 + "augmented again")));
         foreach (var polar in polars)

@@ -17,7 +17,7 @@ internal static class ReynoldsSteps
         if (lower.Rows.Select(r => (r.AngleDeg, r.Lift, r.Drag)).SequenceEqual(upper.Rows.Select(r => (r.AngleDeg, r.Lift, r.Drag))))
         {
             if (!upper.Figures.IsBluff)
-                yield return upper.Doubt("Reynolds numbers", "reynolds", [0], double.NaN, double.NaN,
+                yield return upper.Doubt(DoubtKinds.ReynoldsNumbers, "reynolds", [0], double.NaN, double.NaN,
                     $"every row is as at Reynolds number {lower.ReynoldsText}; measure there, or leave one of the two out");
             yield break;
         }
@@ -25,18 +25,18 @@ internal static class ReynoldsSteps
             yield break;
         var step = Math.Log(upper.Reynolds / lower.Reynolds);
         if (FarthestApart(lower, upper) is var (angle, here, there) && Math.Abs(here - there) > AttachedLift)
-            yield return upper.Doubt("Reynolds numbers", "cl", [upper.RowNear(angle)], AttachedFrom, AttachedTo,
+            yield return upper.Doubt(DoubtKinds.ReynoldsNumbers, "cl", [upper.RowNear(angle)], AttachedFrom, AttachedTo,
                 $"cl at {Given(angle)} deg is {Found(here)}, and {Found(there)} at Reynolds number {lower.ReynoldsText}; attached lift hardly depends on "
                 + "it: are the two of one section and one tunnel?");
         if (upper.Figures.LargestLift is { AtEnd: false } largest && lower.Figures.LargestLift is { AtEnd: false } before
             && Math.Abs(largest.Value - before.Value) > LargestLift * Math.Max(1, step))
-            yield return upper.Doubt("Reynolds numbers", "cl", [largest.Row], double.RadiansToDegrees(Math.Min(largest.Angle, before.Angle)),
+            yield return upper.Doubt(DoubtKinds.ReynoldsNumbers, "cl", [largest.Row], double.RadiansToDegrees(Math.Min(largest.Angle, before.Angle)),
                 double.RadiansToDegrees(Math.Max(largest.Angle, before.Angle)),
                 $"the largest lift is {Given(largest.Value)}, and {Given(before.Value)} at Reynolds number {lower.ReynoldsText}; that is a jump: give a "
                 + "Reynolds number between them, or mend the slip");
         if (upper.Figures.LeastDrag is { } drag && lower.Figures.LeastDrag is { } dragBefore
             && (drag.Value > dragBefore.Value * DragSlack || drag.Value < dragBefore.Value * Math.Exp(-LaminarPower * step) / DragSlack))
-            yield return upper.Doubt("Reynolds numbers", "cd", [drag.Row], AttachedFrom, AttachedTo,
+            yield return upper.Doubt(DoubtKinds.ReynoldsNumbers, "cd", [drag.Row], AttachedFrom, AttachedTo,
                 $"the least drag is {Given(drag.Value)}, and {Given(dragBefore.Value)} at Reynolds number {lower.ReynoldsText}; drag falls with it, and no "
                 + "faster than its square root: are the two of one section, equally smooth?");
     }

@@ -24,7 +24,7 @@ internal static class SharpStall
             var last = i - 1;
             if (polar.Rows[first].Lift - polar.Rows[last].Lift < SmallFall)
                 continue;
-            yield return polar.DoubtBetween("sharp stall", "cl", first, last,
+            yield return polar.DoubtBetween(DoubtKinds.SharpStall, "cl", first, last,
                 $"cl falls from {Given(polar.Rows[first].Lift)} to {Given(polar.Rows[last].Lift)} between {Given(polar.Rows[first].AngleDeg)} and "
                 + $"{Given(polar.Rows[last].AngleDeg)} deg, by up to {Found(steepest)} a degree {polar.RowToRow(first, last)}: a sharp stall, in "
                 + "which several balances are likely; expect loads to jump there");

@@ -1,10 +1,12 @@
 using System.Text.Json;
 using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Keeping;
+using BladeLoads.Results.PolarCheck;
 using BladeLoads.Results.Tables;
 using BladeLoads.Results.Wording;
 using BladeLoads.Rotor.Loads;
 using BladeLoads.Rotor.Operation;
+using BladeLoads.Studies.PolarCheck;
 
 namespace BladeLoads.EndToEnd.Documentation;
 
@@ -51,6 +53,20 @@ public sealed class Documented_columns
     [Fact]
     public void Of_the_changes_are_those_written_in_their_order()
         => Assert.Equal<string>(ChangesTable.Columns, DocumentedTable.Names("### changes.csv"));
+
+    [Fact]
+    public void Of_the_report_on_polars_are_those_written_in_their_order()
+    {
+        Assert.Equal<string>(PolarReport.FigureColumns, DocumentedTable.Names("`polar-figures.csv`:"));
+        Assert.Equal<string>(PolarReport.DoubtColumns, DocumentedTable.Names("`polar-doubts.csv`:"));
+        Assert.Equal<string>(PolarReport.UseColumns, DocumentedTable.Names("element without a balance counts for nothing. `polar-use.csv`:"));
+        Assert.Equal<string>(PolarReport.HistogramColumns, DocumentedTable.Names(
+            "`polar-histograms.csv`, bins of one degree and ten a decade of Reynolds number, those in which there is any:"));
+    }
+
+    [Fact]
+    public void Hold_every_kind_of_doubt_about_a_polar()
+        => Assert.Equal<string>(DoubtKinds.All, DocumentedTable.Names("nowhere below 0.1 within 20 degrees."));
 
     [Fact]
     public void Name_the_figures_that_are_compared_in_their_order()

@@ -50,7 +50,7 @@ public sealed class Checking_polars : IDisposable
         var set = _studies.PathOf("example/polars/clean");
         var (code, text, error) = Run("polar", "check", set, "--out", Path.Join(_folder.Path, "report"));
         Assert.Equal((0, ""), (code, error));
-        Assert.EndsWith($"\nround         -          -            -           -       -           -       -    0.6000     0.0               -          -  bluff\n"
+        Assert.EndsWith($"\nround           -          -            -           -       -           -       -    0.6000     0.0               -          -  bluff\n"
             + $"\nno errors, 30 doubts in 2 tables\nreport: {Path.Join(_folder.Path, "report")}\n", text, StringComparison.Ordinal);
         Assert.Equal(["polar-doubts.csv", "polar-figures.csv"], FilesIn(Path.Join(_folder.Path, "report")).Where(f => f.EndsWith(".csv", StringComparison.Ordinal)));
     }
@@ -146,7 +146,7 @@ public sealed class Checking_polars : IDisposable
     {
         _studies.Write("example/polars/clean/spare.csv", "alpha_deg,cl,cd\n-180,0,0.6\n0,0,0.6\n180,0,0.6\n");
         var text = Run("polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed").Out;
-        Assert.Contains("\nspare           -                    -  -180 to 180          -            -                   -          -          -  not used\n", text, StringComparison.Ordinal);
+        Assert.Contains("\nspare          -                    -  -180 to 180          -            -                -           -          -  not used\n", text, StringComparison.Ordinal);
     }
 
     [Fact]
