@@ -10,9 +10,6 @@ namespace BladeLoads.Studies.Tables;
 /// <param name="Text">What stands behind the name, trimmed.</param>
 internal sealed record HeadNote(int Line, string Text)
 {
-    /// <summary>The rows have been augmented for rotation.</summary>
-    public const string AugmentedName = "augmented";
-
     /// <summary>The first note of that name; null where there is none.</summary>
     /// <param name="name">Small letters.</param>
     public static HeadNote? Find(InputText input, string name)

@@ -64,7 +64,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             Reach = section is null ? [] : [.. ReachOf(blocks)],
             NotAugmented = section is null ? [] : [.. NotAugmentedOf(section, blocks)],
             PolarsAt = [.. blocks.Select(block => block.At)],
-            Augmented = HeadNote.Find(input, HeadNote.AugmentedName),
+            Augmented = HeadNote.Find(input, StoredPolars.AugmentedNote),
         };
     }
 

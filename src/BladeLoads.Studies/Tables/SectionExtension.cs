@@ -20,10 +20,8 @@ internal sealed record SectionExtension(double AspectRatio, ExtensionJoin Join)
                 return new ExtendedSection(null, null, at);
             var extended = PolarExtension.Extend(section.Polars[i], AspectRatio, Join);
             polars.Add(extended.Polar);
-            if (extended.Above is { Kind: ExtensionKind.FromEnd, ShowsStall: false, JoinAngle: var angle })
-                doubt ??= new InputFinding(at.File, at.Line, at.Column,
-                    $"lift still rises at the last angle, {CanonicalText.Of(Math.Round(double.RadiansToDegrees(angle), 9))} deg; "
-                    + "extended from there, the section stalls at that angle");
+            if (ExtensionDoubt.Of(extended) is { } text)
+                doubt ??= new InputFinding(at.File, at.Line, at.Column, text);
         }
         return new ExtendedSection(Section.FromPolars(section.Name, polars), doubt, null);
     }
@@ -34,3 +32,17 @@ internal sealed record SectionExtension(double AspectRatio, ExtensionJoin Join)
 /// <param name="Doubt">The first polar whose extension rests on a guess.</param>
 /// <param name="Obstacle">Where the polar begins that cannot be extended.</param>
 internal sealed record ExtendedSection(Section? Section, InputFinding? Doubt, Place? Obstacle);
+
+/// <summary>What is doubtful about an extension, wherever it is made.</summary>
+public static class ExtensionDoubt
+{
+    /// <summary>The table says that it is augmented.</summary>
+    public const string AugmentedBefore = "the table is augmented for rotation already; extend it as it was before, and augment then";
+
+    /// <summary>Null where nothing is.</summary>
+    public static string? Of(ExtendedPolar extended)
+        => extended.Above is { Kind: ExtensionKind.FromEnd, ShowsStall: false, JoinAngle: var angle }
+            ? $"lift still rises at the last angle, {CanonicalText.Of(Math.Round(double.RadiansToDegrees(angle), 9))} deg; "
+                + "extended from there, the section stalls at that angle"
+            : null;
+}

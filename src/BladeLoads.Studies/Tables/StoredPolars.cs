@@ -15,6 +15,9 @@ public sealed record StoredPolars(
     string SectionName, ImmutableArray<string> Head, ImmutableArray<PolarRows> Polars, Section Section, ReadOnlyMemory<byte> Bytes,
     string Sha256)
 {
+    /// <summary>The name of the note in the head that says that rows are augmented for rotation: <c># augmented: ...</c>.</summary>
+    public const string AugmentedNote = "augmented";
+
     /// <summary>The lines in the file on which the rows of <see cref="Polars"/> stand, from 1.</summary>
     public ImmutableArray<ImmutableArray<int>> RowLines { get; init; } = [];
 

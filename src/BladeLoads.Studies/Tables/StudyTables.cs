@@ -75,6 +75,9 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
         var sound = tables.Where(table => table.Section is not null);
         if (extension is null)
             return ([.. sound.Select(table => table.Section!)], []);
+        foreach (var table in sound)
+            if (table.Augmented is { } note)
+                findings.Doubt(new Place(table.Input.File, note.Line, 1), ExtensionDoubt.AugmentedBefore);
         var extended = sound.Select(extension.Of).ToList();
         foreach (var section in extended)
             if (section.Doubt is { } doubt)

@@ -26,6 +26,8 @@ public sealed partial class Reading_and_scaling_of_polars : IDisposable
 
     [Theory]
     [InlineData("read")]
+    [InlineData("extend")]
+    [InlineData("augment")]
     [InlineData("scale")]
     public void The_page_names_every_option_of_the_command_and_no_other(string command)
     {
