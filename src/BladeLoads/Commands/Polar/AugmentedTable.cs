@@ -1,9 +1,10 @@
 using System.Collections.Immutable;
-using System.Globalization;
 using BladeLoads.Rotor.Sections;
+using BladeLoads.Screen;
 using BladeLoads.Studies;
 using BladeLoads.Studies.Cases;
 using BladeLoads.Studies.Tables;
+using static BladeLoads.Commands.Polar.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -34,7 +35,7 @@ internal static class AugmentedTable
             return new TableChange.Copied($"{WithoutLift(polars[0])}, copied");
         return new TableChange.Changed(
             [.. table.Polars.Zip(augmented, Exchanged)], "augmented", How(factors, asked),
-            [.. table.Polars.Zip(polars, augmented).Select(t => TableChange.At(t.First) + Told(t.Second, t.Third))]);
+            [.. table.Polars.Zip(polars, augmented).Select(t => At(t.First) + Told(t.Second, t.Third))]);
     }
 
     private static PolarRows Exchanged(PolarRows rows, Rotor.Sections.Polar augmented) => rows with
@@ -48,10 +49,10 @@ internal static class AugmentedTable
 
     private static ImmutableArray<string> How(AugmentationFactors factors, AugmentationAsked asked) =>
     [
-        $"{StoredPolars.AugmentedNote}: {SectionMethod.Augmentations.Single(pair => pair.Value == asked.Method).Key}, c/r {TableChange.Short(asked.ChordRatio)}, "
-            + $"r/R {TableChange.Short(asked.RadiusRatio)}"
-            + (double.IsNaN(asked.TipSpeedRatio) ? "" : $", tip-speed ratio {TableChange.Short(asked.TipSpeedRatio)}"),
-        $"lift goes {TableChange.Short(factors.Lift)} of the way to potential lift, drag {TableChange.Short(factors.Drag)} of the way to that at zero lift; "
+        $"{StoredPolars.AugmentedNote}: {SectionMethod.Augmentations.Single(pair => pair.Value == asked.Method).Key}, "
+            + $"c/r {Short(asked.ChordRatio)}, r/R {Short(asked.RadiusRatio)}"
+            + (double.IsNaN(asked.TipSpeedRatio) ? "" : $", tip-speed ratio {Short(asked.TipSpeedRatio)}"),
+        $"lift goes {Short(factors.Lift)} of the way to potential lift, drag {Short(factors.Drag)} of the way to that at zero lift; "
             + "fades from 30 to 50 deg; moments as they were",
     ];
 
@@ -65,13 +66,14 @@ internal static class AugmentedTable
             + Most("drag", rows.MaxBy(i => Math.Abs(now.Drag[i] - old.Drag[i])), old.Drag, now.Drag, old)
             + (added == 0
                 ? ""
-                : string.Create(CultureInfo.InvariantCulture, $"; {added} {(added == 1 ? "row" : "rows")} added up to 50 deg, where the end value fades back"));
+                : $"; {Count.Of(added, "row")} added up to 50 deg, where the end value fades back");
     }
 
     private static string Most(string what, int row, ImmutableArray<double> old, ImmutableArray<double> now, Rotor.Sections.Polar polar)
         => old[row] == now[row]
             ? $"{what} as it was"
-            : $"{what} {TableChange.Short(old[row])} -> {TableChange.Short(now[row])} at {TableChange.Degrees(polar.Angles[row])} deg, where it moves most";
+            : $"{what} {Short(old[row])} -> {Short(now[row])} at {Degrees(polar.Angles[row])} deg, where it moves most";
 
-    private static string WithoutLift(Rotor.Sections.Polar polar) => polar.IsRound ? "no lift to augment" : "lift does not rise through 0 within 20 deg of 0";
+    private static string WithoutLift(Rotor.Sections.Polar polar)
+        => polar.IsRound ? "no lift to augment" : "lift does not rise through 0 within 20 deg of 0";
 }

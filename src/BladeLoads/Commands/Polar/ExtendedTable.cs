@@ -1,9 +1,11 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using BladeLoads.Rotor.Sections;
+using BladeLoads.Screen;
 using BladeLoads.Studies;
 using BladeLoads.Studies.Cases;
 using BladeLoads.Studies.Tables;
+using static BladeLoads.Commands.Polar.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -30,7 +32,7 @@ internal static class ExtendedTable
         return new TableChange.Changed(
             [.. table.Polars.Zip(polars, extended).Select(t => CarriedOn(t.First, t.Second, t.Third))],
             "extended", How(table, extended[0].LargestDrag, asked),
-            [.. table.Polars.Zip(extended, (rows, e) => TableChange.At(rows) + Told(e))])
+            [.. table.Polars.Zip(extended, (rows, e) => At(rows) + Told(e))])
         {
             Doubts = [.. table.Augmented is var (line, _) ? [new InputFinding(file, line, 0, ExtensionDoubt.AugmentedBefore)] : (InputFinding[])[],
                 .. extended.Select((e, i) => (Text: ExtensionDoubt.Of(e), Line: table.RowLines[i][0]))
@@ -53,8 +55,8 @@ internal static class ExtendedTable
 
     private static ImmutableArray<string> How(StoredPolars table, double largestDrag, ExtensionAsked asked)
     {
-        var method = string.Create(CultureInfo.InvariantCulture,
-            $"{SectionMethod.Viterna}: aspect ratio {TableChange.Short(asked.AspectRatio)}{asked.Origin}, drag {TableChange.Short(largestDrag)} at 90 deg, ")
+        var method =
+            $"{SectionMethod.Viterna}: aspect ratio {Short(asked.AspectRatio)}{asked.Origin}, drag {Short(largestDrag)} at 90 deg, "
             + $"joined at {(asked.Join == ExtensionJoin.Stall ? "stall" : "the end of the table")}";
         var hasMoments = table.Polars.Any(rows => rows.Rows.Any(row => !double.IsNaN(row.Moment)));
         return hasMoments ? [method, "moments left out: the method has none"] : [method];
@@ -64,22 +66,20 @@ internal static class ExtendedTable
         => $"above 0 {Told(extended.Above)}; below 0 {Told(extended.Below)}"
             + (extended.RaisedToFloor == 0
                 ? ""
-                : string.Create(CultureInfo.InvariantCulture, $"; drag of {extended.RaisedToFloor} added rows raised to that of a plate along the wind"));
+                : $"; drag of {Count.Of(extended.RaisedToFloor, "added row")} raised to that of a plate along the wind");
 
     private static string Told(ExtendedSide side)
     {
-        var at = $"{TableChange.Degrees(side.JoinAngle)} deg";
+        var at = $"{Degrees(side.JoinAngle)} deg";
         return side.Kind switch
         {
             ExtensionKind.Complete => "complete as it was",
             ExtensionKind.CarriedOn => $"end value carried on from {at}",
             ExtensionKind.Mirrored => $"from {at} to the mirrored stall point{Breaks(side)}",
-            ExtensionKind.FromStall => $"from stall at {at}, {Rows(side.RowsLeftOut)} beyond left out{Breaks(side)}",
+            ExtensionKind.FromStall => $"from stall at {at}, {Count.Of(side.RowsLeftOut, "row")} beyond left out{Breaks(side)}",
             _ => $"from the end at {at}{Breaks(side)}",
         };
     }
-
-    private static string Rows(int count) => count == 1 ? "1 row" : string.Create(CultureInfo.InvariantCulture, $"{count} rows");
 
     private static string Breaks(ExtendedSide side) => double.IsNaN(side.LiftSlopeBreak)
         ? ""

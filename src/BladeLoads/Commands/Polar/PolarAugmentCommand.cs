@@ -2,6 +2,7 @@ using System.CommandLine;
 using System.Globalization;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies.Cases;
+using static BladeLoads.Commands.Polar.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -20,8 +21,8 @@ internal static class PolarAugmentCommand
         var tipSpeedRatio = NumberOption.Define("--tip-speed-ratio", "at which the rotor turns there; du-selig-1998 needs it", "ratio", 0.01, 100, "7.5");
         var command = new Command(
             "augment",
-            "Augments polar tables for rotation, as they serve at one place of a rotor and one tip-speed ratio. A case does it element by element, by its own "
-            + "key: [sections] augment.")
+            "Augments polar tables for rotation, as they serve at one place of a rotor and one tip-speed ratio. A case does it element by "
+            + "element, by its own key: [sections] augment.")
         {
             set.Source, set.Folder, method, chordRatio, radiusRatio, blade, radius, tipSpeedRatio, set.Only, set.Replace,
         };
@@ -46,8 +47,10 @@ internal static class PolarAugmentCommand
 
     private static double TipSpeedRatio(Augmentation method, double? given) => (method, given) switch
     {
-        (Augmentation.DuSelig1998, null) => throw new WrongUseException("du-selig-1998 depends on how fast the rotor turns; give --tip-speed-ratio"),
-        (Augmentation.Snel1993, not null) => throw new WrongUseException("snel-1993 does not depend on how fast the rotor turns; leave --tip-speed-ratio out"),
+        (Augmentation.DuSelig1998, null)
+            => throw new WrongUseException("du-selig-1998 depends on how fast the rotor turns; give --tip-speed-ratio"),
+        (Augmentation.Snel1993, not null)
+            => throw new WrongUseException("snel-1993 does not depend on how fast the rotor turns; leave --tip-speed-ratio out"),
         _ => given ?? double.NaN,
     };
 
@@ -66,8 +69,8 @@ internal static class PolarAugmentCommand
     {
         if (asked.RadiusRatio > RotationalAugmentation.LargestRadiusRatio)
             throw new WrongUseException(string.Create(CultureInfo.InvariantCulture,
-                $"the radius is {TableChange.Short(asked.RadiusRatio)} of the tip radius; nothing is augmented beyond {RotationalAugmentation.LargestRadiusRatio}"));
+                $"the radius is {Short(asked.RadiusRatio)} of the tip radius; nothing is augmented beyond {RotationalAugmentation.LargestRadiusRatio}"));
         if (asked.Factors.IsNone)
-            throw new WrongUseException($"with c/r {TableChange.Short(asked.ChordRatio)} and r/R {TableChange.Short(asked.RadiusRatio)} nothing would be augmented");
+            throw new WrongUseException($"with c/r {Short(asked.ChordRatio)} and r/R {Short(asked.RadiusRatio)} nothing would be augmented");
     }
 }

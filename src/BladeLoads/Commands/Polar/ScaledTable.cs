@@ -3,6 +3,7 @@ using System.Globalization;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies;
 using BladeLoads.Studies.Tables;
+using static BladeLoads.Commands.Polar.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -25,23 +26,23 @@ internal static class ScaledTable
                     break;
                 case PolarScaling.Scaled scaled:
                     polars.Add(Exchanged(rows, scaled.Polar));
-                    record.Add(TableChange.At(rows) + Told(rows, polars[^1], scaled));
+                    record.Add(At(rows) + Told(rows, polars[^1], scaled));
                     break;
                 case PolarScaling.WithoutLargestLift:
                     withoutLargest.Add(rows);
                     break;
                 default:
                     polars.Add(rows);
-                    record.Add($"{TableChange.At(rows)}all rows as they were, no lift to scale");
+                    record.Add($"{At(rows)}all rows as they were, no lift to scale");
                     break;
             }
         var errors = ImmutableArray.CreateBuilder<InputFinding>();
         if (withoutLargest.Count > 0)
-            errors.Add(new InputFinding(file, 0, 0, $"lift rises up to the end of the table or to 30 deg{TableChange.Where(withoutLargest, table)}, so "
+            errors.Add(new InputFinding(file, 0, 0, $"lift rises up to the end of the table or to 30 deg{Where(withoutLargest, table)}, so "
                 + "that there is no largest lift to scale; extend the table, choose others with --only, or give --largest-lift the factor of "
                 + "--lift-slope"));
         if (withoutLeast.Count > 0)
-            errors.Add(new InputFinding(file, 0, 0, $"lift falls down to the beginning of the table or to -30 deg{TableChange.Where(withoutLeast, table)}, "
+            errors.Add(new InputFinding(file, 0, 0, $"lift falls down to the beginning of the table or to -30 deg{Where(withoutLeast, table)}, "
                 + "so that there is no least lift to scale; extend the table, choose others with --only, or leave --least-lift out"));
         return errors.Count > 0
             ? new TableChange.Refused(errors.ToImmutable())
@@ -60,12 +61,12 @@ internal static class ScaledTable
     {
         var (first, last, drag) = (scaled.Range.First, scaled.Range.Last, scaled.LeastDrag);
         var largest = scaled.Range.HasLargestLift
-            ? $"largest lift {TableChange.Short(old.Rows[last].Lift)} -> {TableChange.Short(now.Rows[last].Lift)} at {TableChange.Short(old.Rows[last].AngleDeg)} deg"
+            ? $"largest lift {Short(old.Rows[last].Lift)} -> {Short(now.Rows[last].Lift)} at {Short(old.Rows[last].AngleDeg)} deg"
             : "no largest lift found";
         var least = scaled.Range.HasLeastLift
-            ? $"least lift {TableChange.Short(old.Rows[first].Lift)} -> {TableChange.Short(now.Rows[first].Lift)} at {TableChange.Short(old.Rows[first].AngleDeg)} deg"
+            ? $"least lift {Short(old.Rows[first].Lift)} -> {Short(now.Rows[first].Lift)} at {Short(old.Rows[first].AngleDeg)} deg"
             : "no least lift found, the slope alone below 0";
-        return $"{largest}; {least}; least drag {TableChange.Short(old.Rows[drag].Drag)} -> {TableChange.Short(now.Rows[drag].Drag)} "
-            + $"at {TableChange.Short(old.Rows[drag].AngleDeg)} deg; as it was up to {TableChange.Degrees(scaled.UnchangedBelow)} and from {TableChange.Degrees(scaled.UnchangedAbove)} deg on";
+        return $"{largest}; {least}; least drag {Short(old.Rows[drag].Drag)} -> {Short(now.Rows[drag].Drag)} "
+            + $"at {Short(old.Rows[drag].AngleDeg)} deg; as it was up to {Degrees(scaled.UnchangedBelow)} and from {Degrees(scaled.UnchangedAbove)} deg on";
     }
 }

@@ -10,7 +10,8 @@ internal static class WordOption
     /// <summary>The words are those of the values, in small letters.</summary>
     public static Option<T?> Define<T>(string name, string description)
         where T : struct, Enum
-        => Define(name, description, Enum.GetValues<T>().ToDictionary(value => value.ToString().ToLowerInvariant(), value => value, StringComparer.Ordinal));
+        => Define(
+            name, description, Enum.GetValues<T>().ToDictionary(value => value.ToString().ToLowerInvariant(), value => value, StringComparer.Ordinal));
 
     /// <param name="words">What each word means.</param>
     public static Option<T?> Define<T>(string name, string description, IReadOnlyDictionary<string, T> words)
