@@ -10,6 +10,9 @@ public static class SectionMethod
 
     internal const string Snel = "snel-1993", DuSelig = "du-selig-1998", None = "none";
 
+    /// <param name="augmentation">Not none.</param>
+    public static string NameOf(Augmentation augmentation) => augmentation == Augmentation.Snel1993 ? Snel : DuSelig;
+
     /// <summary>The methods by which tables are augmented for rotation.</summary>
     public static ImmutableSortedDictionary<string, Augmentation> Augmentations { get; } = ImmutableSortedDictionary.CreateRange(
         StringComparer.Ordinal, [KeyValuePair.Create(DuSelig, Augmentation.DuSelig1998), KeyValuePair.Create(Snel, Augmentation.Snel1993)]);

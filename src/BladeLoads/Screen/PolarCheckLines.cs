@@ -128,7 +128,7 @@ internal static class PolarCheckLines
 
     private static string Closing(CheckedTables tables, Study? study, UseOfTables use)
     {
-        var errors = tables.Errors.IsEmpty ? "no errors" : Count.Of(tables.Errors.Length, "error");
+        var errors = tables.Errors.IsEmpty ? "no errors" : Count.Of(tables.Errors, "error");
         var closing = $"{errors}, {Count.Of(tables.Tables.Sum(table => table.Doubts.Length), "doubt")} in {Count.Of(tables.Tables.Length, "table")}";
         return study is not null && study.Rejected.Length + use.Failed.Length is > 0 and var left
             ? $"{closing}; {Count.Of(left, "case")} left out, which 'bladeloads check' tells about"

@@ -4,7 +4,7 @@ using BladeLoads.Screen;
 using BladeLoads.Studies;
 using BladeLoads.Studies.Cases;
 using BladeLoads.Studies.Tables;
-using static BladeLoads.Commands.Polar.RecordText;
+using static BladeLoads.Studies.Tables.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -35,7 +35,7 @@ internal static class AugmentedTable
             return new TableChange.Copied($"{WithoutLift(polars[0])}, copied");
         return new TableChange.Changed(
             [.. table.Polars.Zip(augmented, Exchanged)], "augmented", How(factors, asked),
-            [.. table.Polars.Zip(polars, augmented).Select(t => At(t.First) + Told(t.Second, t.Third))]);
+            [.. table.Polars.Zip(polars, augmented).Select(t => At(t.First.Reynolds) + Told(t.Second, t.Third))]);
     }
 
     private static PolarRows Exchanged(PolarRows rows, Rotor.Sections.Polar augmented) => rows with
@@ -49,10 +49,10 @@ internal static class AugmentedTable
 
     private static ImmutableArray<string> How(AugmentationFactors factors, AugmentationAsked asked) =>
     [
-        $"{StoredPolars.AugmentedNote}: {SectionMethod.Augmentations.Single(pair => pair.Value == asked.Method).Key}, "
-            + $"c/r {Short(asked.ChordRatio)}, r/R {Short(asked.RadiusRatio)}"
-            + (double.IsNaN(asked.TipSpeedRatio) ? "" : $", tip-speed ratio {Short(asked.TipSpeedRatio)}"),
-        $"lift goes {Short(factors.Lift)} of the way to potential lift, drag {Short(factors.Drag)} of the way to that at zero lift; "
+        $"{StoredPolars.AugmentedNote}: {SectionMethod.NameOf(asked.Method)}, "
+            + $"c/r {Brief(asked.ChordRatio)}, r/R {Brief(asked.RadiusRatio)}"
+            + (double.IsNaN(asked.TipSpeedRatio) ? "" : $", tip-speed ratio {Brief(asked.TipSpeedRatio)}"),
+        $"lift goes {Brief(factors.Lift)} of the way to potential lift, drag {Brief(factors.Drag)} of the way to that at zero lift; "
             + "fades from 30 to 50 deg; moments as they were",
     ];
 
@@ -72,7 +72,7 @@ internal static class AugmentedTable
     private static string Most(string what, int row, ImmutableArray<double> old, ImmutableArray<double> now, Rotor.Sections.Polar polar)
         => old[row] == now[row]
             ? $"{what} as it was"
-            : $"{what} {Short(old[row])} -> {Short(now[row])} at {Degrees(polar.Angles[row])} deg, where it moves most";
+            : $"{what} {Brief(old[row])} -> {Brief(now[row])} at {Degrees(polar.Angles[row])} deg, where it moves most";
 
     private static string WithoutLift(Rotor.Sections.Polar polar)
         => polar.IsRound ? "no lift to augment" : "lift does not rise through 0 within 20 deg of 0";

@@ -1,11 +1,8 @@
 using System.Collections.Immutable;
-using System.Globalization;
 using BladeLoads.Rotor.Sections;
-using BladeLoads.Screen;
 using BladeLoads.Studies;
-using BladeLoads.Studies.Cases;
 using BladeLoads.Studies.Tables;
-using static BladeLoads.Commands.Polar.RecordText;
+using static BladeLoads.Studies.Tables.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -28,14 +25,14 @@ internal static class ExtendedTable
             return new TableChange.Refused(wrong);
         var extended = polars.Select(polar => PolarExtension.Extend(polar, asked.AspectRatio, asked.Join)).ToList();
         if (extended.TrueForAll(IsComplete))
-            return new TableChange.Copied("reaches from -180 to 180 deg already, copied");
+            return new TableChange.Copied($"{ExtensionText.CompleteAlready}, copied");
         return new TableChange.Changed(
             [.. table.Polars.Zip(polars, extended).Select(t => CarriedOn(t.First, t.Second, t.Third))],
-            "extended", How(table, extended[0].LargestDrag, asked),
-            [.. table.Polars.Zip(extended, (rows, e) => At(rows) + Told(e))])
+            "extended", How(table, asked),
+            [.. table.Polars.Zip(extended, (rows, e) => At(rows.Reynolds) + ExtensionText.Of(e))])
         {
-            Doubts = [.. table.Augmented is var (line, _) ? [new InputFinding(file, line, 0, ExtensionDoubt.AugmentedBefore)] : (InputFinding[])[],
-                .. extended.Select((e, i) => (Text: ExtensionDoubt.Of(e), Line: table.RowLines[i][0]))
+            Doubts = [.. table.Augmented is var (line, _) ? [new InputFinding(file, line, 0, ExtensionText.AugmentedBefore)] : (InputFinding[])[],
+                .. extended.Select((e, i) => (Text: ExtensionText.Doubt(e), Line: table.RowLines[i][0]))
                 .Where(doubt => doubt.Text is not null).Select(doubt => new InputFinding(file, doubt.Line, 0, doubt.Text!))],
         };
     }
@@ -53,37 +50,10 @@ internal static class ExtendedTable
                     double.NaN))],
     };
 
-    private static ImmutableArray<string> How(StoredPolars table, double largestDrag, ExtensionAsked asked)
+    private static ImmutableArray<string> How(StoredPolars table, ExtensionAsked asked)
     {
-        var method =
-            $"{SectionMethod.Viterna}: aspect ratio {Short(asked.AspectRatio)}{asked.Origin}, drag {Short(largestDrag)} at 90 deg, "
-            + $"joined at {(asked.Join == ExtensionJoin.Stall ? "stall" : "the end of the table")}";
+        var method = ExtensionText.Method(asked.AspectRatio, asked.Origin, asked.Join);
         var hasMoments = table.Polars.Any(rows => rows.Rows.Any(row => !double.IsNaN(row.Moment)));
         return hasMoments ? [method, "moments left out: the method has none"] : [method];
     }
-
-    private static string Told(ExtendedPolar extended)
-        => $"above 0 {Told(extended.Above)}; below 0 {Told(extended.Below)}"
-            + (extended.RaisedToFloor == 0
-                ? ""
-                : $"; drag of {Count.Of(extended.RaisedToFloor, "added row")} raised to that of a plate along the wind");
-
-    private static string Told(ExtendedSide side)
-    {
-        var at = $"{Degrees(side.JoinAngle)} deg";
-        return side.Kind switch
-        {
-            ExtensionKind.Complete => "complete as it was",
-            ExtensionKind.CarriedOn => $"end value carried on from {at}",
-            ExtensionKind.Mirrored => $"from {at} to the mirrored stall point{Breaks(side)}",
-            ExtensionKind.FromStall => $"from stall at {at}, {Count.Of(side.RowsLeftOut, "row")} beyond left out{Breaks(side)}",
-            _ => $"from the end at {at}{Breaks(side)}",
-        };
-    }
-
-    private static string Breaks(ExtendedSide side) => double.IsNaN(side.LiftSlopeBreak)
-        ? ""
-        : $", slope of lift breaks by {PerDegree(side.LiftSlopeBreak)} a degree, of drag by {PerDegree(side.DragSlopeBreak)}";
-
-    private static string PerDegree(double slope) => double.DegreesToRadians(slope).ToString("+0.####;-0.####;0", CultureInfo.InvariantCulture);
 }

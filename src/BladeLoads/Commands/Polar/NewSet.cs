@@ -68,7 +68,7 @@ internal sealed record NewSet(string Source, string Folder, ImmutableArray<strin
     public static int Refuse(ImmutableArray<InputFinding> errors, Surroundings surroundings)
     {
         FindingLines.Write(errors, [], "", surroundings.Error, surroundings.ErrorIsTerminal);
-        surroundings.Error.WriteLine($"{Count.Of(errors.Length, "error")}; nothing written");
+        surroundings.Error.WriteLine($"{Count.Of(errors, "error")}; nothing written");
         return ExitCode.NothingCouldRun;
     }
 }

@@ -2,7 +2,7 @@ using System.CommandLine;
 using System.Globalization;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies.Cases;
-using static BladeLoads.Commands.Polar.RecordText;
+using static BladeLoads.Studies.Tables.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -69,8 +69,8 @@ internal static class PolarAugmentCommand
     {
         if (asked.RadiusRatio > RotationalAugmentation.LargestRadiusRatio)
             throw new WrongUseException(string.Create(CultureInfo.InvariantCulture,
-                $"the radius is {Short(asked.RadiusRatio)} of the tip radius; nothing is augmented beyond {RotationalAugmentation.LargestRadiusRatio}"));
+                $"the radius is {Brief(asked.RadiusRatio)} of the tip radius; nothing is augmented beyond {RotationalAugmentation.LargestRadiusRatio}"));
         if (asked.Factors.IsNone)
-            throw new WrongUseException($"with c/r {Short(asked.ChordRatio)} and r/R {Short(asked.RadiusRatio)} nothing would be augmented");
+            throw new WrongUseException($"with c/r {Brief(asked.ChordRatio)} and r/R {Brief(asked.RadiusRatio)} nothing would be augmented");
     }
 }

@@ -100,7 +100,7 @@ internal static class PolarDrawCommand
         if (set is null)
         {
             FindingLines.Write(errors, [], "", surroundings.Error, surroundings.ErrorIsTerminal);
-            surroundings.Error.WriteLine($"{Count.Of(errors.Length, "error")}; nothing drawn");
+            surroundings.Error.WriteLine($"{Count.Of(errors, "error")}; nothing drawn");
             return ([], UsualFolder, false);
         }
         var folder = Path.GetFullPath(isSet ? asked.Source : Path.GetDirectoryName(Path.GetFullPath(asked.Source))!);

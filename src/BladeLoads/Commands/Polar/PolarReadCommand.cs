@@ -92,7 +92,7 @@ internal static class PolarReadCommand
         FindingLines.Write(table.Errors, table.Doubts, "", surroundings.Error, surroundings.ErrorIsTerminal);
         if (!table.Errors.IsEmpty)
         {
-            surroundings.Error.WriteLine($"{Count.Of(table.Errors.Length, "error")}; nothing written");
+            surroundings.Error.WriteLine($"{Count.Of(table.Errors, "error")}; nothing written");
             return ExitCode.NothingCouldRun;
         }
         ImmutableArray<string> record = [$"read by bladeloads {CommandLine.ToolVersion} from {Path.GetFileName(file)} (SHA-256 {table.Sha256})", .. table.Record];

@@ -3,7 +3,7 @@ using System.Globalization;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies;
 using BladeLoads.Studies.Tables;
-using static BladeLoads.Commands.Polar.RecordText;
+using static BladeLoads.Studies.Tables.RecordText;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -26,14 +26,14 @@ internal static class ScaledTable
                     break;
                 case PolarScaling.Scaled scaled:
                     polars.Add(Exchanged(rows, scaled.Polar));
-                    record.Add(At(rows) + Told(rows, polars[^1], scaled));
+                    record.Add(At(rows.Reynolds) + Told(rows, polars[^1], scaled));
                     break;
                 case PolarScaling.WithoutLargestLift:
                     withoutLargest.Add(rows);
                     break;
                 default:
                     polars.Add(rows);
-                    record.Add($"{At(rows)}all rows as they were, no lift to scale");
+                    record.Add($"{At(rows.Reynolds)}all rows as they were, no lift to scale");
                     break;
             }
         var errors = ImmutableArray.CreateBuilder<InputFinding>();
@@ -61,12 +61,12 @@ internal static class ScaledTable
     {
         var (first, last, drag) = (scaled.Range.First, scaled.Range.Last, scaled.LeastDrag);
         var largest = scaled.Range.HasLargestLift
-            ? $"largest lift {Short(old.Rows[last].Lift)} -> {Short(now.Rows[last].Lift)} at {Short(old.Rows[last].AngleDeg)} deg"
+            ? $"largest lift {Brief(old.Rows[last].Lift)} -> {Brief(now.Rows[last].Lift)} at {Brief(old.Rows[last].AngleDeg)} deg"
             : "no largest lift found";
         var least = scaled.Range.HasLeastLift
-            ? $"least lift {Short(old.Rows[first].Lift)} -> {Short(now.Rows[first].Lift)} at {Short(old.Rows[first].AngleDeg)} deg"
+            ? $"least lift {Brief(old.Rows[first].Lift)} -> {Brief(now.Rows[first].Lift)} at {Brief(old.Rows[first].AngleDeg)} deg"
             : "no least lift found, the slope alone below 0";
-        return $"{largest}; {least}; least drag {Short(old.Rows[drag].Drag)} -> {Short(now.Rows[drag].Drag)} "
-            + $"at {Short(old.Rows[drag].AngleDeg)} deg; as it was up to {Degrees(scaled.UnchangedBelow)} and from {Degrees(scaled.UnchangedAbove)} deg on";
+        return $"{largest}; {least}; least drag {Brief(old.Rows[drag].Drag)} -> {Brief(now.Rows[drag].Drag)} "
+            + $"at {Brief(old.Rows[drag].AngleDeg)} deg; as it was up to {Degrees(scaled.UnchangedBelow)} and from {Degrees(scaled.UnchangedAbove)} deg on";
     }
 }
