@@ -3,6 +3,7 @@ using System.Globalization;
 using System.Security.Cryptography;
 using System.Text;
 using System.Text.Unicode;
+using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Studies.Laboratory;
 
@@ -41,7 +42,7 @@ internal sealed record ForeignText(string File, ImmutableArray<string> Lines, st
             findings.Error(new Place(file, 0, 0), "is empty");
             return null;
         }
-        var lines = text.Replace("\r\n", "\n", StringComparison.Ordinal).Replace('\r', '\n').Split('\n');
+        var lines = TextLines.Of(text);
         if (lines.Length > MostLines)
         {
             findings.Error(new Place(file, MostLines, 0), string.Create(

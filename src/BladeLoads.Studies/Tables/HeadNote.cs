@@ -15,7 +15,7 @@ internal sealed record HeadNote(int Line, string Text)
     public static HeadNote? Find(InputText input, string name)
     {
         var number = 0;
-        foreach (var line in input.Text.Split('\n'))
+        foreach (var line in TextLines.Of(input.Text))
         {
             number++;
             var trimmed = line.Trim();
