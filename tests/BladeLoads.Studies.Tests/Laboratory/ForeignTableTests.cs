@@ -109,6 +109,13 @@ public class ForeignTableTests
     }
 
     [Fact]
+    public void The_record_says_nothing_of_signs_in_rows_that_are_not_taken()
+    {
+        Assert.DoesNotContain("converted: minus signs of typesetters to -", Foreign.Read(Small + "# \u22127;-0,5;0,01\n").Record);
+        Assert.Contains("converted: minus signs of typesetters to -", Foreign.Read(Small + "\u22127;-0,5;0,01\n").Record);
+    }
+
+    [Fact]
     public void Many_lines_are_told_as_ranges()
     {
         var rows = string.Concat(Enumerable.Range(0, 40).Select(i => i % 3 == 0 || i > 30 ? $"{i} 0.1 0.01\n{i} 0.1 0.01\n" : $"{i} 0.1 0.01\n"));
