@@ -65,6 +65,7 @@ public sealed record LaboratoryTable(
         var errors = new TableErrors(findings);
         var blocks = new SortedDictionary<double, List<LaboratoryRow>>();
         var forces = SectionForces.Asked(request);
+        var converted = new List<(double Angle, double Lift, double Drag)>();
         for (var i = 0; i < scan.Rows.Count; i++)
         {
             var row = scan.Rows[i];
@@ -74,6 +75,7 @@ public sealed record LaboratoryTable(
                 continue;
             }
             var (lift, drag) = forces?.ToLiftAndDrag(row.Lift, row.Drag, double.DegreesToRadians(degrees)) ?? (row.Lift, row.Drag);
+            converted.Add((degrees, lift, drag));
             if (drag < 0 && request.LeaveOutNegativeDrag)
                 record.LeaveOut(row.Line, "drag below 0");
             else if (drag < 0)
@@ -85,7 +87,7 @@ public sealed record LaboratoryTable(
             if (!(drag < 0))
                 block.Add(new LaboratoryRow(row.Line, row.At.Angle, new PolarRow(degrees, lift, drag, row.Moment)));
         }
-        if (ExchangedColumns.AreLikely(scan.Rows.Select(row => (row.Angle, row.Lift, row.Drag))))
+        if (ExchangedColumns.AreLikely(converted))
             errors.Ask("cd", "are cl and cd exchanged?");
         var polars = errors.Any ? [] : Sorted(blocks, request, record, file, errors);
         if (!errors.Any)

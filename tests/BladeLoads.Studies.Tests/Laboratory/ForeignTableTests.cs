@@ -115,6 +115,29 @@ public class ForeignTableTests
         Assert.Contains("converted: minus signs of typesetters to -", Foreign.Read(Small + "\u22127;-0,5;0,01\n").Record);
     }
 
+    [Theory]
+    [InlineData("deg")]
+    [InlineData("rad")]
+    public void Whether_columns_are_exchanged_is_asked_by_angle_in_any_unit(string unit)
+    {
+        // A plate at every angle, with drag a little below 0 where it is small; and attached flow with lift under cd.
+        var circle = Enumerable.Range(-12, 25).Select(i =>
+        {
+            var (sin, cos) = Math.SinCos(double.DegreesToRadians(15 * i));
+            return (15.0 * i, 1.8 * sin * cos, Math.Abs(i) is <= 1 or >= 11 ? -0.001 : 1.3 * sin * sin);
+        });
+        var exchanged = Enumerable.Range(-10, 21).Select(i => ((double)i, 0.01, 0.1 * i));
+
+        Assert.Equal("and 4 more like it in column cd", LastError(circle));
+        Assert.Equal("and 7 more like it in column cd; are cl and cd exchanged?", LastError(exchanged));
+
+        string LastError(IEnumerable<(double AngleDeg, double Lift, double Drag)> rows)
+            => Foreign.Read($"alpha [{unit}] cl cd\n" + string.Concat(rows.Select(Line))).Errors[^1].Text;
+
+        string Line((double AngleDeg, double Lift, double Drag) row) => FormattableString.Invariant(
+            $"{(unit == "deg" ? row.AngleDeg : double.DegreesToRadians(row.AngleDeg))} {row.Lift} {row.Drag}\n");
+    }
+
     [Fact]
     public void Many_lines_are_told_as_ranges()
     {
