@@ -138,6 +138,20 @@ public class ForeignTableTests
             $"{(unit == "deg" ? row.AngleDeg : double.DegreesToRadians(row.AngleDeg))} {row.Lift} {row.Drag}\n");
     }
 
+    [Theory]
+    [InlineData("0 3.1416", "the last digit of pi rounded up taken as 180 degrees")]
+    [InlineData("0 6.2832", "the last digit of 2 pi rounded up taken as 360 degrees; 1 angle beyond 180 degrees by a turn")]
+    [InlineData("3.142 -6.28319",
+        "the last digit of pi rounded up taken as 180 degrees; the last digit of 2 pi rounded up taken as 360 degrees; 1 angle beyond 180 degrees by a turn")]
+    public void The_record_says_that_a_last_digit_was_taken_as_the_round_angle(string angles, string done)
+    {
+        var rows = string.Concat(angles.Split(' ').Select(angle => $"{angle} 0.1 0.01\n"));
+
+        Assert.Contains(
+            $"converted: angles from radians to degrees, 12 significant digits; {done}",
+            Foreign.Read($"alpha cl cd\n1 0.5 0.1\n2 0.5 1.1\n{rows}", "--angles radians --wrap --sweep all").Record);
+    }
+
     [Fact]
     public void Many_lines_are_told_as_ranges()
     {

@@ -48,7 +48,7 @@ internal static class PolarReadCommand
             HelpName = $"{Incomplete}|{NegativeDrag}",
         };
         leaveOut.AcceptOnlyFromAmong(Incomplete, NegativeDrag);
-        var wrap = new Option<bool>("--wrap") { Description = "angles go round from 0 to 360 degrees: those beyond 180 stand for 360 less" };
+        var wrap = new Option<bool>("--wrap") { Description = "angles go round from 0 to 360 degrees, or to -360: those beyond 180 stand for 360 less, beyond -180 for 360 more" };
         var replace = new Option<bool>("--replace") { Description = "put the table in the place of a file that is there" };
         var preview = new Option<bool>("--preview") { Description = "tell what would be done and show some rows; write nothing" };
         var command = new Command(
