@@ -19,8 +19,6 @@ public sealed record LaboratoryTable(
     ImmutableArray<PolarRows> Polars, ImmutableArray<string> Record, ImmutableArray<InputFinding> Errors, ImmutableArray<InputFinding> Doubts,
     string Sha256)
 {
-    private const int FewestRows = 3;
-
     /// <summary>Reads a file.</summary>
     /// <param name="path">As the user wrote it; findings name the file so.</param>
     public static LaboratoryTable Read(string path, IStudyFiles files, ReadingRequest request)
@@ -108,10 +106,10 @@ public sealed record LaboratoryTable(
             if (sorted is null)
                 continue;
             var at = double.IsNaN(reynolds) ? "" : $" at Reynolds number {CanonicalText.Of(reynolds)}";
-            if (sorted.Count < FewestRows)
+            if (sorted.Count < PolarLimits.FewestRows)
                 errors.Add("", new Place(file, sorted.Count == 0 ? 0 : sorted[0].Line, 0), string.Create(CultureInfo.InvariantCulture,
                     $"has {sorted.Count} row{(sorted.Count == 1 ? "" : "s")}{at}; a polar needs three or more")
-                    + (blocks.Count > FewestRows ? "; where each row has a measured Reynolds number of its own, say --columns reynolds=none and --reynolds" : ""));
+                    + (blocks.Count > PolarLimits.FewestRows ? "; where each row has a measured Reynolds number of its own, say --columns reynolds=none and --reynolds" : ""));
             if (order.Done is { } done)
                 record.Order(done + at);
             polars.Add(new PolarRows(reynolds, [.. sorted.Select(row => row.Values)]));

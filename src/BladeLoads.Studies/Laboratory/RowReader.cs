@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Fingerprints;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.Laboratory;
 
@@ -88,11 +89,11 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
             return double.NaN;
         }
         var reynolds = ReynoldsText.Read(text, _power, sign);
-        if (reynolds is >= ReynoldsText.Lowest and <= ReynoldsText.Highest)
-            return reynolds.Value;
+        if (reynolds is { } number && PolarLimits.IsReynoldsOfABlade(number))
+            return number;
         Tell(role, cells, line, tell, reynolds is null
             ? ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign)
-            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are 1e4 to 1e9. Is it in millions? Then name the column so, or say "
+            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}. Is it in millions? Then name the column so, or say "
                 + "--columns reynolds=none and --reynolds");
         return double.NaN;
     }

@@ -141,9 +141,10 @@ internal static class PolarReadCommand
     private static double? ParseReynolds(ArgumentResult argument)
     {
         var text = argument.Tokens.Count == 1 ? argument.Tokens[0].Value : "";
-        if (double.TryParse(text, NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent, CultureInfo.InvariantCulture, out var number) && number is >= 1e4 and <= 1e9)
+        const NumberStyles style = NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
+        if (double.TryParse(text, style, CultureInfo.InvariantCulture, out var number) && PolarLimits.IsReynoldsOfABlade(number))
             return number;
-        argument.AddError($"--reynolds is '{Printable.Of(text)}'; give a number from 1e4 to 1e9: 1.5e6");
+        argument.AddError($"--reynolds is '{Printable.Of(text)}'; give a number from {PolarLimits.ReynoldsInWords}: 1.5e6");
         return null;
     }
 
