@@ -47,10 +47,12 @@ internal sealed class AngleReading
         if (request.Angles is { } asked)
             return new AngleReading(request, asked, $"angles in {InWords(asked)}, as --angles says");
         if (named is { } unit)
-            return new AngleReading(request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"));
+            return new AngleReading(
+                request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"));
         if (scan.Columns!.NameOf(ColumnRole.Angle) is { HasUnknownUnit: true })
         {
-            findings.Error(new Place(file, scan.Header.Line, 1), $"{scan.Columns.Shown(ColumnRole.Angle)} names a unit that is not known; say --angles degrees or --angles radians, "
+            findings.Error(new Place(file, scan.Header.Line, 1),
+                $"{scan.Columns.Shown(ColumnRole.Angle)} names a unit that is not known; say --angles degrees or --angles radians, "
                 + "and give other units as one of these");
             return null;
         }
@@ -59,7 +61,8 @@ internal sealed class AngleReading
         if (Math.Abs(lowest) <= PolarTable.LargestRadian && Math.Abs(highest) <= PolarTable.LargestRadian
             || lowest >= 0 && highest <= 2 * PolarTable.LargestRadian)
         {
-            findings.Error(new Place(file, scan.Rows[0].Line, scan.Rows[0].At.Angle), $"alpha runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} "
+            findings.Error(new Place(file, scan.Rows[0].Line, scan.Rows[0].At.Angle),
+                $"alpha runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} "
                 + "only, and nothing says whether in degrees or radians; say --angles degrees or --angles radians");
             return null;
         }

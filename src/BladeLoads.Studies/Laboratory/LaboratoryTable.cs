@@ -46,7 +46,8 @@ public sealed record LaboratoryTable(
         if (findings.Errors.Length > 0)
             return Refused(findings, text.Sha256);
         if (text.EndsOpen && scan.Rows[^1].Line == text.Lines.Length)
-            findings.Doubt(new Place(text.File, text.Lines.Length, 0), "the last row has no line end; if the file was cut off there, its last number may have lost digits");
+            findings.Doubt(new Place(text.File, text.Lines.Length, 0),
+                "the last row has no line end; if the file was cut off there, its last number may have lost digits");
         return new LaboratoryTable(polars, record.Lines(), [], findings.Doubts, text.Sha256);
     }
 
@@ -77,7 +78,8 @@ public sealed record LaboratoryTable(
             if (drag < 0 && request.LeaveOutNegativeDrag)
                 record.LeaveOut(row.Line, "drag below 0");
             else if (drag < 0)
-                errors.Add("cd", new Place(file, row.Line, row.At.Drag), $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0, leave such rows out with "
+                errors.Add("cd", new Place(file, row.Line, row.At.Drag),
+                    $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0, leave such rows out with "
                     + "--leave-out negative-drag");
             // NaN is less than any number, and so a key as others.
             if (!blocks.TryGetValue(reynolds.OfRow(i), out var block))
@@ -109,7 +111,9 @@ public sealed record LaboratoryTable(
             if (sorted.Count < PolarLimits.FewestRows)
                 errors.Add("", new Place(file, sorted.Count == 0 ? 0 : sorted[0].Line, 0), string.Create(CultureInfo.InvariantCulture,
                     $"has {sorted.Count} row{(sorted.Count == 1 ? "" : "s")}{at}; a polar needs three or more")
-                    + (blocks.Count > PolarLimits.FewestRows ? "; where each row has a measured Reynolds number of its own, say --columns reynolds=none and --reynolds" : ""));
+                    + (blocks.Count > PolarLimits.FewestRows
+                        ? "; where each row has a measured Reynolds number of its own, say --columns reynolds=none and --reynolds"
+                        : ""));
             if (order.Done is { } done)
                 record.Order(done + at);
             polars.Add(new PolarRows(reynolds, [.. sorted.Select(row => row.Values)]));
@@ -121,6 +125,7 @@ public sealed record LaboratoryTable(
     {
         var (lowest, highest) = (polars.Min(polar => polar.Rows[0].AngleDeg), polars.Max(polar => polar.Rows[^1].AngleDeg));
         if (lowest >= -PolarTable.LargestRadian && highest <= PolarTable.LargestRadian)
-            errors.Add("", new Place(file, line, 0), $"angles run from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} degrees only; no case reads a table so narrow");
+            errors.Add("", new Place(file, line, 0),
+                $"angles run from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} degrees only; no case reads a table so narrow");
     }
 }

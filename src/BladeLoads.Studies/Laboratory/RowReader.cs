@@ -93,8 +93,8 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
             return number;
         Tell(role, cells, line, tell, reynolds is null
             ? ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign)
-            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}. Is it in millions? Then name the column so, or say "
-                + "--columns reynolds=none and --reynolds");
+            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}. Is it in millions? "
+                + "Then name the column so, or say --columns reynolds=none and --reynolds");
         return double.NaN;
     }
 

@@ -15,7 +15,9 @@ internal enum RowKind
     Broken,
 }
 
-/// <summary>A line read as a row, with what was seen in it: that counts only where the row is taken, as lines are read too to tell what they are.</summary>
+/// <summary>
+/// A line read as a row, with what was seen in it: that counts only where the row is taken, as lines are read too to tell what they are.
+/// </summary>
 /// <param name="Row">Its numbers; of no other kind than <see cref="RowKind.Row"/>.</param>
 internal readonly record struct RowReading(RowKind Kind, ForeignRow Row)
 {

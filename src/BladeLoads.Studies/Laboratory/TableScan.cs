@@ -118,7 +118,8 @@ internal sealed class TableScan
     }
 
     /// <summary>Of a line between the names of the columns and the first row.</summary>
-    public static string NotUnderstood(string line) => $"{VisibleText.Quote(line.Trim())} stands between the names of the columns and the first row and is "
+    public static string NotUnderstood(string line)
+        => $"{VisibleText.Quote(line.Trim())} stands between the names of the columns and the first row and is "
         + "not understood; put a comment mark before it, or say with --comment how it begins";
 
     private void ReadLine(int i, int count, RowReader reader)
@@ -147,19 +148,22 @@ internal sealed class TableScan
             return;
         else if (isMeantAsRow)
             _errors.Add("", new Place(_text.File, number, 1), string.Create(CultureInfo.InvariantCulture,
-                $"{cells.Length} values where {(Header.Line > 0 ? $"line {Header.Line} names" : "the first row has")} {count}; give one a column, or leave the line out by --lines or a comment mark"));
+                $"{cells.Length} values where {(Header.Line > 0 ? $"line {Header.Line} names" : "the first row has")} {count}; "
+                    + $"give one a column, or leave the line out by --lines or a comment mark"));
         else
             _wordsSinceLastRow.Add(number);
     }
 
     // More digits than letters: a row that something happened to.
-    private static bool IsWords(string line) => LineSigns.IsRuling(line) || line.Count(char.IsLetter) is >= 2 and var letters && letters >= line.Count(char.IsDigit)
+    private static bool IsWords(string line) => LineSigns.IsRuling(line)
+        || line.Count(char.IsLetter) is >= 2 and var letters && letters >= line.Count(char.IsDigit)
         || !line.Any(char.IsDigit);
 
     // A line of no numbers that has its sense; another is a remark.
     private bool IsKnown(string line, int number, int count)
     {
-        if (LineSigns.IsRuling(line) || Header.IsRepeatedBy(line, Separator) || Header.IsRepeatedBy(_signs.WithoutEnd(line), Separator) || IsUnitsRow(line, number, count))
+        if (LineSigns.IsRuling(line) || Header.IsRepeatedBy(line, Separator) || Header.IsRepeatedBy(_signs.WithoutEnd(line), Separator)
+            || IsUnitsRow(line, number, count))
             return true;
         if (Header.Of(line, number, Separator, 0, _request) is not null)
             _errors.Add("", new Place(_text.File, number, 1), Header.Line > 0
@@ -183,13 +187,15 @@ internal sealed class TableScan
         {
             case RowKind.Row:
                 foreach (var words in _wordsSinceLastRow)
-                    _errors.Add("", new Place(_text.File, words, 1), $"{VisibleText.Quote(_text.Lines[words - 1].Trim())} stands between rows, and what it says of "
+                    _errors.Add("", new Place(_text.File, words, 1),
+                        $"{VisibleText.Quote(_text.Lines[words - 1].Trim())} stands between rows, and what it says of "
                         + "those below is not known; put a comment mark before it, say with --comment how it begins, or choose rows with --lines");
                 _wordsSinceLastRow.Clear();
                 Rows.Add(read.Row);
                 foreach (var cell in cells)
                     if (ReynoldsLine.IsNamedIn(cell.Text))
-                        _errors.Add("", new Place(_text.File, number, cell.Column), $"{VisibleText.Quote(cell.Text)} names a Reynolds number within a row; put it into a column of its own, "
+                        _errors.Add("", new Place(_text.File, number, cell.Column),
+                            $"{VisibleText.Quote(cell.Text)} names a Reynolds number within a row; put it into a column of its own, "
                             + "or into a line above the rows");
                 break;
             case RowKind.Incomplete:
@@ -214,7 +220,8 @@ internal sealed class TableScan
                 $"names another unit of the angle of attack than line {UnitLine}; leave one of them out with --lines"));
         foreach (var role in _request.Needed.Skip(1).Append(ColumnRole.Moment))
             if (Columns[role] is { } place && UnitWords.Meaning(cells[place].Text) != UnitMeaning.None)
-                _errors.Add("", new Place(_text.File, number, cells[place].Column), $"names {VisibleText.Quote(cells[place].Text)} as the unit of {ColumnRoleWords.Of(role)}; "
+                _errors.Add("", new Place(_text.File, number, cells[place].Column),
+                    $"names {VisibleText.Quote(cells[place].Text)} as the unit of {ColumnRoleWords.Of(role)}; "
                     + "only ratios are read, so give the table as such");
         return true;
     }
@@ -229,7 +236,8 @@ internal sealed class TableScan
                 ? $"no column names sections, so there is no section {VisibleText.Quote(section)}"
                 : $"has no section {VisibleText.Quote(section)}; there are {VisibleText.Enumerate(_sections.Keys, "none")}");
         if (Separator == CellSeparator.Comma && _request.DecimalSign is null && !_showsItsDecimals && Rows.Count > 0)
-            _errors.Add("", new Place(_text.File, Rows[0].Line, 1), "commas stand here and no row has a decimal point, so that they may separate columns or be "
+            _errors.Add("", new Place(_text.File, Rows[0].Line, 1),
+                "commas stand here and no row has a decimal point, so that they may separate columns or be "
                 + "decimal signs; say --decimal point where they separate, or save the table with semicolons");
         if (Rows.Count == 0 && !_errors.Any)
             _errors.Add("", new Place(_text.File, 0, 0), "has no row left");

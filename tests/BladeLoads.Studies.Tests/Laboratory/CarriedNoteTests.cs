@@ -45,7 +45,8 @@ public class CarriedNoteTests
     {
         var head = string.Concat(Foreign.Read($"% {Note}\n{Rows}").Record.Select(line => $"# {line}\n"));
 
-        var table = StoredPolars.FromBytes("t18.csv", Encoding.UTF8.GetBytes($"{head}alpha_deg,cl,cd\n-5,-0.4,0.01\n0,0.1,0.009\n5,0.6,0.01\n"), out _);
+        var table = StoredPolars.FromBytes(
+            "t18.csv", Encoding.UTF8.GetBytes($"{head}alpha_deg,cl,cd\n-5,-0.4,0.01\n0,0.1,0.009\n5,0.6,0.01\n"), out _);
 
         Assert.Equal("snel-1993, c/r 0.2", table!.Augmented?.Text);
     }

@@ -142,7 +142,8 @@ public class ForeignTableTests
     [InlineData("0 3.1416", "the last digit of pi rounded up taken as 180 degrees")]
     [InlineData("0 6.2832", "the last digit of 2 pi rounded up taken as 360 degrees; 1 angle beyond 180 degrees by a turn")]
     [InlineData("3.142 -6.28319",
-        "the last digit of pi rounded up taken as 180 degrees; the last digit of 2 pi rounded up taken as 360 degrees; 1 angle beyond 180 degrees by a turn")]
+        "the last digit of pi rounded up taken as 180 degrees; the last digit of 2 pi rounded up taken as 360 degrees; "
+        + "1 angle beyond 180 degrees by a turn")]
     public void The_record_says_that_a_last_digit_was_taken_as_the_round_angle(string angles, string done)
     {
         var rows = string.Concat(angles.Split(' ').Select(angle => $"{angle} 0.1 0.01\n"));
