@@ -15,7 +15,7 @@ internal sealed record HeadNote(int Line, string Text)
     public static HeadNote? Find(InputText input, string name)
     {
         var number = 0;
-        foreach (var line in input.Text.Split('\n'))
+        foreach (var line in TextLines.Of(input.Text))
         {
             number++;
             var trimmed = line.Trim();
@@ -23,10 +23,16 @@ internal sealed record HeadNote(int Line, string Text)
                 continue;
             if (trimmed[0] != '#')
                 return null;
-            var comment = trimmed.TrimStart('#').TrimStart();
-            if (comment.StartsWith(name, StringComparison.OrdinalIgnoreCase) && comment[name.Length..].TrimStart() is [':', ..] rest)
-                return new HeadNote(number, rest[1..].Trim());
+            if (TextUnder(name, trimmed.TrimStart('#')) is { } text)
+                return new HeadNote(number, text);
         }
         return null;
     }
+
+    /// <summary>What a comment without its mark says under that name, trimmed; null where it is no such note.</summary>
+    public static string? TextUnder(string name, string comment)
+        => comment.TrimStart() is var note && note.StartsWith(name, StringComparison.OrdinalIgnoreCase)
+            && note[name.Length..].TrimStart() is [':', ..] rest
+                ? rest[1..].Trim()
+                : null;
 }

@@ -11,10 +11,8 @@ namespace BladeLoads.Studies.Tables;
 /// <param name="Canonical">The parsed values; moment coefficients, which nothing uses, are not in it.</param>
 internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, InputFile Input)
 {
-    private const int FewestRows = 3;
     private const double AngleSlack = 1e-9;       // deg
     internal const double LargestRadian = 3.2;    // a little more than pi: angles that all lie within are hardly degrees
-    private const double LowestReynolds = 1e4;
     private const double LiftClosure = 0.05;
 
     /// <summary>What is doubtful about the table; to be raised once a blade names its section.</summary>
@@ -109,7 +107,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
 
     private static void CheckReynolds(CsvRows rows, List<Block> blocks, double reynolds)
     {
-        if (reynolds < LowestReynolds)
+        if (reynolds < PolarLimits.LowestReynolds)
             rows.Error("reynolds",
                 $"reynolds is {CanonicalText.Of(reynolds)}; Reynolds numbers of blades are 1e4 and more, three million is 3e6");
         else if (blocks.Any(block => block.Reynolds == reynolds))
@@ -123,7 +121,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
     {
         if (blocks.Count == 0 && !rows.HasErrors)
             rows.Error(new Place(file, 0, 0), "has no row; a polar needs three or more");
-        foreach (var block in blocks.Where(block => block.Rows < FewestRows))
+        foreach (var block in blocks.Where(block => block.Rows < PolarLimits.FewestRows))
         {
             var of = double.IsNaN(block.Reynolds) ? "the table" : $"Reynolds number {Reynolds(block.Reynolds)}";
             rows.Error(block.At, $"{of} has {(block.Rows == 1 ? "one row" : "two rows")}; a polar needs three or more");

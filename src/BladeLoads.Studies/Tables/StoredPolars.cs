@@ -76,14 +76,14 @@ public sealed record StoredPolars(
     private static ImmutableArray<string> HeadOf(string text)
     {
         var head = ImmutableArray.CreateBuilder<string>();
-        foreach (var line in text.AsSpan().EnumerateLines())
+        foreach (var line in TextLines.Of(text))
         {
             var trimmed = line.Trim();
-            if (trimmed.IsEmpty)
+            if (trimmed.Length == 0)
                 continue;
             if (trimmed[0] != '#')
                 break;
-            head.Add(trimmed[1..].Trim().ToString());
+            head.Add(trimmed[1..].Trim());
         }
         return head.ToImmutable();
     }
