@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using BladeLoads.Studies.Files;
-using BladeLoads.Studies.Fingerprints;
 using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.Laboratory;
@@ -9,9 +8,6 @@ namespace BladeLoads.Studies.Laboratory;
 /// <param name="columns">With a column for each role that is needed.</param>
 internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, DecimalSign sign, string file)
 {
-    // No section has a coefficient beyond: there a decimal sign, a unit or a column is wrong. Common practice, no source.
-    private const double LargestCoefficient = 20;
-
     private readonly ColumnRole _lift = request.Needed[1];
     private readonly ColumnRole _drag = request.Needed[2];
     private readonly int _power = columns.NameOf(ColumnRole.Reynolds)?.Power ?? 0;
@@ -70,10 +66,9 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
     private double Coefficient(ColumnRole role, ImmutableArray<Cell> cells, int line, Action<string, Place, string>? tell)
     {
         var value = Number(role, cells, line, tell);
-        if (!(Math.Abs(value) > LargestCoefficient))
+        if (!(Math.Abs(value) > PolarLimits.LargestCoefficient))
             return value;
-        Tell(role, cells, line, tell, $"{ColumnRoleWords.Of(role)} is {CanonicalText.Of(value)}, and no section has a coefficient beyond "
-            + $"{CanonicalText.Of(LargestCoefficient)}; a decimal sign, a unit or a column is wrong");
+        Tell(role, cells, line, tell, PolarLimits.BeyondLargest(ColumnRoleWords.Of(role), value));
         return double.NaN;
     }
 

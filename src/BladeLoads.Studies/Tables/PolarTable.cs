@@ -82,8 +82,8 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         if (block.Angles.Count > 0 && double.DegreesToRadians(angle) <= double.DegreesToRadians(block.Angles[^1]))
             rows.Error("alpha_deg", Rising.Problem("alpha_deg",
                 (block.Angles[^1], block.LastLine), angle, rows.Line, "angles must rise within one Reynolds number"));
-        var lift = rows.Number("cl");
-        var drag = rows.Number("cd");
+        var lift = Coefficient(rows, "cl");
+        var drag = Coefficient(rows, "cd");
         if (drag < 0)
             rows.Error("cd", $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0");
         var moment = rows.Has("cm") ? rows.Number("cm") : double.NaN;
@@ -93,6 +93,14 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         block.Add(new PolarRow(angle, lift, drag, moment), rows.Line);
         if (angle is -180 or 180)
             block.LiftAtEnd.Add((lift, rows.Cell("cl")));
+    }
+
+    private static double Coefficient(CsvRows rows, string column)
+    {
+        var value = rows.Number(column);
+        if (Math.Abs(value) > PolarLimits.LargestCoefficient)
+            rows.Error(column, PolarLimits.BeyondLargest(column, value));
+        return value;
     }
 
     // NaN where it is wrong.

@@ -43,6 +43,8 @@ public sealed class Extended_and_augmented : IDisposable
         Assert.StartsWith(
             $"viterna-1982: aspect ratio 17.9156 of beck-20.csv, drag 1.43248 at 90 deg, joined at {(join == "stall" ? "stall" : "the end of the table")}\n",
             told, StringComparison.Ordinal);
+        var sides = join == "stall" ? "above 0 from stall at 14 deg, 4 rows beyond left out" : "above 0 from the end at 22 deg";
+        Assert.Contains($" Case by-key polar tables: beck-18: {sides}, slope of lift breaks by ", File.ReadAllText(In("results/beck/by-key/case.log")), StringComparison.Ordinal);
         foreach (var table in new[] { "power-curve.csv", "spanwise.csv" })
             AssertNear(In($"results/beck/by-key/{table}"), In($"results/beck/by-file/{table}"));
     }
@@ -89,7 +91,7 @@ public sealed class Extended_and_augmented : IDisposable
         var finished = Succeed("polar", "extend", "lab", "--out", "whole", "--aspect-ratio", "12");
 
         Assert.Equal("""
-            lab/rising.csv:2: doubt: lift still rises at the last angle, 8 deg; extended from there, the section stalls at that angle
+            lab/rising.csv:2: doubt: shows no stall up to the last angle, 8 deg; extended from there, the section stalls at that angle
             lab/turned.csv:2: doubt: the table is augmented for rotation already; extend it as it was before, and augment then
 
             """, finished.Error);

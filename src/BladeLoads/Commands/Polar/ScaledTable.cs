@@ -28,6 +28,10 @@ internal static class ScaledTable
                     polars.Add(Exchanged(rows, scaled.Polar));
                     record.Add(At(rows.Reynolds) + Told(rows, polars[^1], scaled));
                     break;
+                case PolarScaling.WithoutLargestLift when PolarFigures.Of(polar).IsBluff:
+                    polars.Add(rows);
+                    record.Add($"{At(rows.Reynolds)}all rows as they were, a bluff section without a largest lift up to 30 deg");
+                    break;
                 case PolarScaling.WithoutLargestLift:
                     withoutLargest.Add(rows);
                     break;
