@@ -30,9 +30,7 @@ internal sealed class CheckedPolar
 
     public double Reynolds => Polar.Reynolds;
 
-    public string ReynoldsText => ReynoldsNumber(Reynolds);
-
-    public static string ReynoldsNumber(double reynolds) => reynolds.ToString("0.######e0", CultureInfo.InvariantCulture);
+    public string ReynoldsText => ReynoldsNumber.Text(Reynolds);
 
     /// <summary>A number as it stands in the table.</summary>
     public static string Given(double value) => CanonicalText.Of(value);

@@ -6,6 +6,7 @@ using BladeLoads.Rotor.Loads;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -62,7 +63,7 @@ internal sealed class CorrectedLines
         if (moved.Count == 0)
             return null;
         var method = _case.Rotor.Augmentation == Augmentation.Snel1993 ? "Snel 1993" : "Du and Selig 1998";
-        var reynolds = double.IsNaN(polar.Reynolds) ? "" : string.Create(CultureInfo.InvariantCulture, $", Reynolds number {polar.Reynolds:0.######e0}");
+        var reynolds = double.IsNaN(polar.Reynolds) ? "" : $", Reynolds number {ReynoldsNumber.Text(polar.Reynolds)}";
         return new PolarLine(
             corrected, LineKind.Corrected,
             string.Create(CultureInfo.InvariantCulture, $"corrected, {method}, r/R {radiusRatio:0.00}{reynolds}"))
