@@ -3,6 +3,7 @@ using BladeLoads.Batch.Tests.Building;
 using BladeLoads.Batch.Tests.Pictures;
 using BladeLoads.Results.Pictures;
 using BladeLoads.Results.PolarCheck;
+using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies.PolarCheck;
 using BladeLoads.Studies.Tables;
 
@@ -46,6 +47,22 @@ public sealed class CheckedPictureTests
         Assert.Contains(
             "line 1, augmented: the rows are augmented for rotation, by the head: 'snel-1993; c/r 0.2'",
             new DrawnPage(PictureFile.Svg(CheckedPicture.Of(table, null, "clean"))).Words);
+    }
+
+    [Fact]
+    public void Over_all_angles_no_ring_stands_where_another_diagram_shows_the_row()
+    {
+        var polar = Sections.Rows(1e6, [-180, -90, -20, 0, 10, 30, 90, 180], deg => Math.Sin(double.DegreesToRadians(2 * deg)), _ => 0.5);
+        var picture = PolarPicture.Of(Section.FromPolars("fell-18", [polar]), "clean", "fell-18.csv") with
+        {
+            Ringed = [new RingedRow(polar, 1), new RingedRow(polar, 3), new RingedRow(polar, 4), new RingedRow(polar, 5)],
+        };
+        var svg = PictureFile.Svg(picture);
+        // 0, 10 and 30 degrees in the four diagrams of the working range; -90 and 30 degrees, where those end, in the two of all angles.
+        Assert.Equal((3 * 4) + (2 * 2), CountOf(RingColour, svg));
+        Assert.Contains(
+            "Red rings: rows in doubt; in the two diagrams of all angles only those at -20 deg and below, or at 30 deg and above.",
+            new DrawnPage(svg).Words);
     }
 
     [Fact]
