@@ -36,7 +36,7 @@ public sealed record CheckedTables(ImmutableArray<CheckedTable> Tables, Immutabl
 
     /// <summary>Every table of a folder.</summary>
     /// <param name="path">As for <see cref="OfTable"/>.</param>
-    public static CheckedTables OfSet(string path, Files.IStudyFiles files) 
+    public static CheckedTables OfSet(string path, Files.IStudyFiles files)
         => OfFolder(Path.GetFullPath(path), path, files, FrozenSet<string>.Empty);
 
     /// <summary>Every table of the sets that the cases of a study use, those that none of them uses among them.</summary>

@@ -62,7 +62,8 @@ public sealed record StoredSet(ImmutableArray<StoredPolars> Tables, ReadOnlyMemo
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
-            found.Add(new InputFinding(shown, 0, 0, e is UnauthorizedAccessException ? "cannot be read: no permission" : $"cannot be read: {e.Message}"));
+            var reason = e is UnauthorizedAccessException ? "no permission" : e.Message;
+            found.Add(new InputFinding(shown, 0, 0, $"cannot be read: {reason}"));
             return [];
         }
     }

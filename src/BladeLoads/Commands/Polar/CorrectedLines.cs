@@ -37,9 +37,9 @@ internal sealed class CorrectedLines
         var lines = Elements(section).Select(e => Line(e, section)).OfType<PolarLine>().ToImmutableArray();
         return (lines, lines.IsEmpty
             ? "Rotation changes nothing here: the section stands where it is not augmented."
-            : string.Create(CultureInfo.InvariantCulture, $"Corrected at the best power coefficient of the case: {_best.Operation.WindSpeed:0.##} m/s, ")
-                + string.Create(CultureInfo.InvariantCulture, $"tip-speed ratio {_best.Loads!.TipSpeedRatio:0.0#}; each radius on the table nearest in ")
-                + "Reynolds number.");
+            : "Corrected at the best power coefficient of the case: "
+                + string.Create(CultureInfo.InvariantCulture, $"{_best.Operation.WindSpeed:0.##} m/s, tip-speed ratio {_best.Loads!.TipSpeedRatio:0.0#}")
+                + "; each radius on the table nearest in Reynolds number.");
     }
 
     private IEnumerable<ElementState> Elements(string section)

@@ -14,7 +14,7 @@ internal readonly record struct NameChoice(ImmutableArray<string> Patterns)
     public void Check(IEnumerable<string> sections)
     {
         var names = sections.Distinct().Order(StringComparer.Ordinal).ToList();
-        if (!names.Any(Includes))
+        if (names.Count > 0 && !names.Any(Includes))
             throw new WrongUseException(
                 $"no section matches {string.Join(", ", Patterns.Select(p => $"'{p}'"))}; there are {string.Join(", ", names)}");
     }

@@ -64,8 +64,7 @@ internal static class PolarCheckCommand
     private static CheckedTables Chosen(CheckedTables tables, PolarCheckRequest request)
     {
         var choice = new NameChoice(request.Only);
-        if (!request.Only.IsEmpty)
-            choice.Check(tables.Sections);
+        choice.Check(tables.Sections);
         return tables.Of(choice.Includes);
     }
 
