@@ -40,7 +40,8 @@ internal sealed class Findings
         if (ofOneFile.Count <= MostShownOfAFile)
             return ofOneFile;
         var next = ofOneFile[MostShownOfAFile];
-        var rest = (ofOneFile.Count - MostShownOfAFile).ToString(CultureInfo.InvariantCulture);
-        return ofOneFile.Take(MostShownOfAFile).Append(next with { Column = 0, Text = $"and {rest} more {noun} from here on" });
+        var rest = ofOneFile.Skip(MostShownOfAFile).Sum(finding => finding.Times);
+        return ofOneFile.Take(MostShownOfAFile).Append(
+            next with { Column = 0, Text = string.Create(CultureInfo.InvariantCulture, $"and {rest} more {noun} from here on"), Times = rest });
     }
 }

@@ -29,7 +29,11 @@ public sealed record Study(
 /// <summary>An error or a doubt about an input, at its place. Lines and columns count from 1; 0 means the whole file.</summary>
 /// <param name="File">Relative to the study folder, with forward slashes.</param>
 /// <param name="Text">What was found and what would do, without the place.</param>
-public sealed record InputFinding(string File, int Line, int Column, string Text);
+public sealed record InputFinding(string File, int Line, int Column, string Text)
+{
+    /// <summary>How many it stands for: more than one where others like it are not told one by one.</summary>
+    public int Times { get; init; } = 1;
+}
 
 /// <summary>A validated rotor case or variant of a sweep.</summary>
 /// <param name="Name">The case's file name without its ending; variants add <c>~key-value</c>. Safe as a folder name.</param>
@@ -48,6 +52,9 @@ public sealed record StudyCase(
 {
     /// <summary>The tables whose hashes stand in the values; empty where they are not at hand.</summary>
     public ImmutableArray<CanonicalTable> Tables { get; init; } = [];
+
+    /// <summary>What its polar tables went through after they were read: extended, augmented; a line each, for its log.</summary>
+    public ImmutableArray<string> Preparation { get; init; } = [];
 
     /// <summary>What it asks for beside its curve.</summary>
     public FurtherResults Further { get; init; } = FurtherResults.None;

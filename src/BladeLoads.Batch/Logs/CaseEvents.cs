@@ -15,6 +15,8 @@ internal static class CaseEvents
         log.Information("Case {Case}: {Title}; fingerprint {Fingerprint}", studyCase.Name, studyCase.Title, studyCase.Fingerprint);
         foreach (var input in studyCase.Inputs)
             log.Information("Case {Case} read {File}: {Contents} (SHA-256 {Sha256})", studyCase.Name, input.File, input.Contents, input.Sha256);
+        foreach (var line in studyCase.Preparation)
+            log.Information("Case {Case} polar tables: {Preparation}", studyCase.Name, line);
         log.Information(
             "Case {Case} asks for {Points} wind speeds, {Elements} elements each",
             studyCase.Name, studyCase.Rotor.WindSpeeds.Length, studyCase.Rotor.Model.Elements);

@@ -47,6 +47,24 @@ public sealed class Blade
         }
     }
 
+    /// <summary>Chord, m.</summary>
+    /// <param name="radius">m, from the hub radius to the tip radius.</param>
+    public double ChordAt(double radius)
+    {
+        var (inner, outer, share) = Between(radius);
+        return inner.Chord + (share * (outer.Chord - inner.Chord));
+    }
+
+    /// <summary>The stations on either side of a radius, m, and how far from the inner to the outer one it is, 0 to 1.</summary>
+    internal (BladeStation Inner, BladeStation Outer, double Share) Between(double radius)
+    {
+        var j = 0;
+        while (j < Stations.Length - 2 && Stations[j + 1].Radius <= radius)
+            j++;
+        var (inner, outer) = (Stations[j], Stations[j + 1]);
+        return (inner, outer, (radius - inner.Radius) / (outer.Radius - inner.Radius));
+    }
+
     /// <exception cref="ArgumentException">Fewer than two stations, or one that breaks what the type promises.</exception>
     public static Blade FromStations(IEnumerable<BladeStation> stations)
     {

@@ -44,12 +44,7 @@ public static class BladeElements
 
     private static BladeElement ElementAt(Blade blade, double radius, double length)
     {
-        var stations = blade.Stations;
-        var j = 0;
-        while (j < stations.Length - 2 && stations[j + 1].Radius <= radius)
-            j++;
-        var (a, b) = (stations[j], stations[j + 1]);
-        var w = (radius - a.Radius) / (b.Radius - a.Radius);
+        var (a, b, w) = blade.Between(radius);
         return new BladeElement(
             radius, length, a.Chord + (w * (b.Chord - a.Chord)), a.Twist + (w * (b.Twist - a.Twist)),
             a.Section ?? "", b.Section ?? "", a.Section == b.Section ? 0 : w)

@@ -22,12 +22,12 @@ public static class FirstLiftPeak
             if (polar.Angles[i] < -Math.PI / 2)
                 continue;
             if (polar.Lift[i] <= 0 && largest < Noise)
-                (lifting, largest) = (polar.Angles[i], 0);
+                (lifting, at, largest) = (polar.Angles[i], double.PositiveInfinity, 0);
             else if (polar.Lift[i] > largest)
                 (at, largest) = (polar.Angles[i], polar.Lift[i]);
             else if (polar.Lift[i] < largest - Noise)
                 return (lifting, at);
         }
-        return double.IsFinite(at) ? (lifting, at) : (double.PositiveInfinity, double.PositiveInfinity);
+        return largest >= Noise ? (lifting, at) : (double.PositiveInfinity, double.PositiveInfinity);
     }
 }

@@ -43,7 +43,7 @@ public abstract record PolarScaling
     /// that more lift stays more lift. Beyond, <c>cl' = cl (1 + (LargestLift - 1) A)</c>; <c>cd' = cd + (DragFloor - 1) min(cd, cdmin) A</c>.
     /// A is 1 up to the end of attached flow and from there falls to 0 within 15 degrees as 1 - 3 t^2 + 2 t^3. Attached flow ends at the
     /// largest lift, or, where lift stays above its new largest value, with the last row that does, up to 10 degrees on. Where the least
-    /// lift is not in the table, the slope factor serves alone below 0. docs/theory.md, 1.5. Common practice, no source.
+    /// lift is not in the table, the slope factor serves alone below 0. docs/theory.md, 1.7. Common practice, no source.
     /// </remarks>
     /// <exception cref="ArgumentOutOfRangeException">A factor is outside its range.</exception>
     public static PolarScaling Of(Polar polar, PolarFactors factors)

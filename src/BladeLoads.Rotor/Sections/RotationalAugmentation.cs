@@ -57,10 +57,12 @@ public static class RotationalAugmentation
         => tipSpeed / Math.Sqrt((windSpeed * windSpeed) + (tipSpeed * tipSpeed));
 
     /// <summary>
-    /// The polar with its rows augmented: lift, and drag, by their factor times <see cref="Share"/>. Rows stay where they are; a section that
-    /// does not lift stays as it is.
+    /// The polar with its rows augmented: lift, and drag, by their factor times <see cref="Share"/>. Rows stay where they are; where they end
+    /// before 50 degrees it has more, so that the augmentation of the end value fades there too. A section that does not lift stays as it is.
+    /// With <see cref="AugmentationFactors.Full"/> it is what the plain polar is blended with by the factors of an element.
     /// </summary>
-    public static Polar Augment(Polar polar, AugmentationFactors factors) => AugmentAt(polar.Angles.AsSpan(), polar, factors);
+    public static Polar Augment(Polar polar, AugmentationFactors factors)
+        => factors.IsNone || PotentialLift.Of(polar) is not { } potential ? polar : AugmentAt(WithFadingEnd(polar), polar, factors, potential);
 
     /// <summary>
     /// How much of the augmentation an angle of attack gets: all from zero lift to 30 degrees, fading in a straight line to none at 50; none
@@ -71,11 +73,7 @@ public static class RotationalAugmentation
     public static double Share(double angle, double zeroLiftAngle)
         => angle < zeroLiftAngle ? 0 : Math.Clamp((NoneFrom - angle) / (NoneFrom - FullTo), 0, 1);
 
-    /// <summary>
-    /// The polar fully augmented, with which the plain one is blended by the factors of an element. Where its rows end before 50 degrees
-    /// it has more, so that the augmentation of the end value fades there too.
-    /// </summary>
-    internal static Polar FullyAugmented(Polar polar)
+    private static double[] WithFadingEnd(Polar polar)
     {
         const double Step = 2.5 * Math.PI / 180;
         const double Least = 0.5 * Math.PI / 180;
@@ -83,7 +81,7 @@ public static class RotationalAugmentation
         for (var i = 1; i <= 20; i++)
             if (i * Step > polar.Angles[^1] + Least)
                 angles.Add(i * Step);
-        return AugmentAt([.. angles], polar, AugmentationFactors.Full);
+        return [.. angles];
     }
 
     /// <summary><c>3 (c/r)^2</c></summary>
@@ -102,10 +100,8 @@ public static class RotationalAugmentation
     }
 
     // Angles of the polar's rows, and perhaps some beyond its last, where its end value holds.
-    private static Polar AugmentAt(ReadOnlySpan<double> angles, Polar polar, AugmentationFactors factors)
+    private static Polar AugmentAt(double[] angles, Polar polar, AugmentationFactors factors, PotentialLift potential)
     {
-        if (PotentialLift.Of(polar) is not { } potential)
-            return polar;
         var zeroLiftDrag = PotentialLift.DragAt(polar, potential.ZeroLiftAngle);
         var (lift, drag) = (new double[angles.Length], new double[angles.Length]);
         for (var i = 0; i < angles.Length; i++)

@@ -64,7 +64,8 @@ public sealed class SectionFamily
                 (lifts[i], drags[i]) = around[i].Section.Table.At(angles[row], places[i]);
             }
             lift[row] = Pchip.ValueAt(thickness, lifts, thicknessRatio);
-            drag[row] = Pchip.ValueAt(thickness, drags, thicknessRatio);
+            // Between rows without drag a cubic may be below 0 by its last digit.
+            drag[row] = Math.Max(0, Pchip.ValueAt(thickness, drags, thicknessRatio));
         }
         return Polar.FromRows(reynolds, angles, lift, drag);
     }

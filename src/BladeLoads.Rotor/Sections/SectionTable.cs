@@ -49,7 +49,7 @@ internal sealed partial class SectionTable
         (_points, _blocks) = SummariseCells();
         var stalls = polars.Select(FirstLiftPeak.Of).ToArray();
         (LeastStallAngle, LeastLiftingAngle) = (stalls.Min(s => s.Peak), stalls.Min(s => s.Lifting));
-        _augmented = new Lazy<SectionTable>(() => Prepare([.. polars.Select(RotationalAugmentation.FullyAugmented)]));
+        _augmented = new Lazy<SectionTable>(() => Prepare([.. polars.Select(polar => RotationalAugmentation.Augment(polar, AugmentationFactors.Full))]));
     }
 
     /// <summary>The angles of all rows, and +-pi; rad, rising.</summary>

@@ -21,17 +21,16 @@ public static class StallPoint
     public static int? Below(Polar polar)
         => Peak(polar, [.. Enumerable.Range(0, polar.Angles.Length).Where(i => polar.Angles[i] is < 0 and > -Math.PI / 2).Reverse()], -1);
 
-    // Rows going away from 0, lift counted positive that way.
+    // Rows going away from 0, lift counted positive that way; on the way to its angle of zero lift a section lifts the other way.
     private static int? Peak(Polar polar, int[] outwards, int sign)
     {
         int? peak = null;
         foreach (var row in outwards)
         {
             var lift = sign * polar.Lift[row];
-            var largest = peak is { } p ? sign * polar.Lift[p] : 0;
-            if (lift > largest)
+            if (peak is null ? lift > 0 : lift > sign * polar.Lift[peak.Value])
                 peak = row;
-            else if (lift < (1 - LossThatCounts) * largest)
+            else if (peak is { } p && lift < (1 - LossThatCounts) * sign * polar.Lift[p])
                 return peak;
         }
         var last = sign > 0 ? polar.Angles.Length - 1 : 0;

@@ -69,6 +69,9 @@ internal sealed class CaseBuilder(StudyFolder folder, StudyTables tables, Findin
             name, title + variantTitle, file.File, rotor, spanwise, Fingerprint.Of(determining), inputs, determining)
         {
             Tables = canonical,
+            Preparation = augmentation == Augmentation.None
+                ? sections.ExtensionRecord
+                : sections.ExtensionRecord.Add($"augmented by {SectionMethod.NameOf(augmentation)}, at each element and operating point"),
             Further = further,
         };
     }

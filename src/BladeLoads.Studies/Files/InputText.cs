@@ -10,7 +10,7 @@ namespace BladeLoads.Studies.Files;
 internal sealed record InputText(string File, ReadOnlyMemory<byte> Utf8, string Sha256)
 {
     /// <summary>Line ends are all LF.</summary>
-    public string Text => Encoding.UTF8.GetString(Utf8.Span).ReplaceLineEndings("\n");
+    public string Text => TextLines.WithLineFeeds(Encoding.UTF8.GetString(Utf8.Span));
 
     /// <summary>The text in the bytes, or the finding that says why there is none.</summary>
     public static InputText? FromBytes(string file, byte[] bytes, Action<InputFinding> report)

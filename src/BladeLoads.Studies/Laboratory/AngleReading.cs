@@ -8,11 +8,13 @@ namespace BladeLoads.Studies.Laboratory;
 internal sealed class AngleReading
 {
     private const double AngleSlack = 1e-9;   // deg
+    private const int FewestDecimals = 3;     // of radians that are taken as pi or 2 pi
 
     private readonly ReadingRequest _request;
     private readonly AngleUnit _unit;
     private int _wrapped;
-    private int _snapped;
+    private int _halfTurns;
+    private int _turns;
 
     private AngleReading(ReadingRequest request, AngleUnit unit, string why) => (_request, _unit, Why) = (request, unit, why);
 
@@ -24,8 +26,10 @@ internal sealed class AngleReading
     {
         if (_unit == AngleUnit.Radians)
             yield return "angles from radians to degrees, 12 significant digits";
-        if (_snapped > 0)
+        if (_halfTurns > 0)
             yield return "the last digit of pi rounded up taken as 180 degrees";
+        if (_turns > 0)
+            yield return "the last digit of 2 pi rounded up taken as 360 degrees";
         if (_wrapped > 0)
             yield return string.Create(CultureInfo.InvariantCulture, $"{_wrapped} angle{(_wrapped == 1 ? "" : "s")} beyond 180 degrees by a turn");
     }
@@ -43,10 +47,12 @@ internal sealed class AngleReading
         if (request.Angles is { } asked)
             return new AngleReading(request, asked, $"angles in {InWords(asked)}, as --angles says");
         if (named is { } unit)
-            return new AngleReading(request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"));
+            return new AngleReading(
+                request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"));
         if (scan.Columns!.NameOf(ColumnRole.Angle) is { HasUnknownUnit: true })
         {
-            findings.Error(new Place(file, scan.Header.Line, 1), $"{scan.Columns.Shown(ColumnRole.Angle)} names a unit that is not known; say --angles degrees or --angles radians, "
+            findings.Error(new Place(file, scan.Header.Line, 1),
+                $"{scan.Columns.Shown(ColumnRole.Angle)} names a unit that is not known; say --angles degrees or --angles radians, "
                 + "and give other units as one of these");
             return null;
         }
@@ -55,7 +61,8 @@ internal sealed class AngleReading
         if (Math.Abs(lowest) <= PolarTable.LargestRadian && Math.Abs(highest) <= PolarTable.LargestRadian
             || lowest >= 0 && highest <= 2 * PolarTable.LargestRadian)
         {
-            findings.Error(new Place(file, scan.Rows[0].Line, scan.Rows[0].At.Angle), $"alpha runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} "
+            findings.Error(new Place(file, scan.Rows[0].Line, scan.Rows[0].At.Angle),
+                $"alpha runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} "
                 + "only, and nothing says whether in degrees or radians; say --angles degrees or --angles radians");
             return null;
         }
@@ -71,26 +78,37 @@ internal sealed class AngleReading
             return degrees;
         if (Math.Abs(degrees) <= 180 + AngleSlack)
             return Math.CopySign(180, degrees);
-        if (_unit == AngleUnit.Radians && Math.Abs(angle) - Math.PI <= HalfOfLastDigit(angle))
+        if (IsRoundedUp(angle, Math.PI))
         {
-            _snapped++;
+            _halfTurns++;
             return Math.CopySign(180, degrees);
         }
-        if (_request.Wrap && Math.Abs(degrees) <= 360 + AngleSlack)
+        var isTurn = IsRoundedUp(angle, Math.Tau);
+        var goesRound = isTurn || Math.Abs(degrees) <= 360 + AngleSlack;
+        if (_request.Wrap && goesRound)
         {
+            _turns += isTurn ? 1 : 0;
             _wrapped++;
-            return TwelveDigits.Of(Math.Clamp(degrees - Math.CopySign(360, degrees), -180, 180));
+            var turn = Math.CopySign(360, degrees);
+            return isTurn ? 0 : TwelveDigits.Of(Math.Clamp(degrees - turn, -180, 180));
         }
-        problem = $"alpha is {CanonicalText.Of(angle)}{(_unit == AngleUnit.Radians ? $" rad, {CanonicalText.Of(degrees)} deg" : "")}; angles go from -180 to 180 degrees"
-            + (Math.Abs(degrees) <= 360 ? "; where they go round from 0 to 360, say --wrap" : "");
+        problem = $"alpha is {CanonicalText.Of(angle)}{(_unit == AngleUnit.Radians ? $" rad, {CanonicalText.Of(degrees)} deg" : "")}; "
+            + "angles go from -180 to 180 degrees"
+            + (goesRound ? $"; where they go round from 0 to {(degrees < 0 ? "-360" : "360")}, say --wrap" : "");
         return null;
     }
 
+    // Beyond by half a digit of its last place at most.
+    private bool IsRoundedUp(double angle, double round)
+        => _unit == AngleUnit.Radians && Math.Abs(angle) > round && Math.Abs(angle) - round <= HalfOfLastDigit(angle);
+
+    // 0 where a step of the table may be as short as the digit: 6.3 after 6.2 is no 2 pi.
     private static double HalfOfLastDigit(double angle)
     {
         var text = angle.ToString("R", CultureInfo.InvariantCulture);
         var point = text.IndexOf('.', StringComparison.Ordinal);
-        return point < 0 ? 0 : 0.5 * Math.Pow(10, -(text.Length - point - 1));
+        var decimals = point < 0 ? 0 : text.Length - point - 1;
+        return decimals < FewestDecimals ? 0 : 0.5 * Math.Pow(10, -decimals);
     }
 
     private static string InWords(AngleUnit unit) => unit == AngleUnit.Degrees ? "degrees" : "radians";

@@ -27,7 +27,8 @@ internal sealed class ColumnChoice
             else
                 Take(role, PlainPlaceOf(role, request.Needed.Contains(role)));
         foreach (var both in _places.GroupBy(place => place.Value).Where(group => group.Count() > 1))
-            _problems.Add($"column {Number(both.Key)} is taken for {string.Join(" and ", both.Select(place => ColumnRoleWords.Of(place.Key)))}; give each its own");
+            _problems.Add($"column {Number(both.Key)} is taken for "
+                + $"{string.Join(" and ", both.Select(place => ColumnRoleWords.Of(place.Key)))}; give each its own");
     }
 
     /// <summary>What is wrong with the choice; empty where nothing is.</summary>
@@ -43,20 +44,22 @@ internal sealed class ColumnChoice
 
     /// <summary>Names of columns that no role has.</summary>
     public IEnumerable<string> NotTaken
-        => Enumerable.Range(0, _count).Where(i => !_places.ContainsValue(i) && (i >= _header.Cells.Length || _header.Cells[i].Text.Length > 0)).Select(Shown);
+        => Enumerable.Range(0, _count)
+            .Where(i => !_places.ContainsValue(i) && (i >= _header.Cells.Length || _header.Cells[i].Text.Length > 0)).Select(Shown);
 
     private void Take(ColumnRole role, int? place)
     {
         if (place is not { } known)
             return;
         _places[role] = known;
-        if (role is not (ColumnRole.Angle or ColumnRole.Reynolds or ColumnRole.Section) && known < _header.Names.Length && _header.Names[known].IsMultiple)
+        if (role is not (ColumnRole.Angle or ColumnRole.Reynolds or ColumnRole.Section)
+            && known < _header.Names.Length && _header.Names[known].IsMultiple)
             _problems.Add(OnMultiple(role, known));
     }
 
     private string OnMultiple(ColumnRole role, int place)
-        => $"{Shown(place)} is a multiple of the {ColumnRoleWords.InWords(role)}, and only the ratio itself is read; where its numbers are ratios all the same, leave "
-            + "the line of names out with --lines and say --columns by number";
+        => $"{Shown(place)} is a multiple of the {ColumnRoleWords.InWords(role)}, and only the ratio itself is read; "
+            + "where its numbers are ratios all the same, leave the line of names out with --lines and say --columns by number";
 
     private int? PlaceOf(ColumnRole role, string asked)
     {
@@ -105,7 +108,8 @@ internal sealed class ColumnChoice
         var problem = _header.Line == 0
             ? "no line names the columns; say which are which by number: --columns alpha=1,cl=2,cd=3"
             : perhaps.Length > 0
-                ? $"no column is plainly the {ColumnRoleWords.InWords(role)}; {InWords(perhaps)} may be it or something else: {Offers(word, perhaps)} takes it"
+                ? $"no column is plainly the {ColumnRoleWords.InWords(role)}; {InWords(perhaps)} may be it or something else: "
+                    + $"{Offers(word, perhaps)} takes it"
                 : WithoutColumn(role, word);
         if (!_problems.Contains(problem))
             _problems.Add(problem);

@@ -21,7 +21,8 @@ internal sealed partial record ColumnName(
     private static readonly Dictionary<string, ColumnRole> Plain = Words(
         (ColumnRole.Angle, "alpha alfa aoa angleofattack attackangle angle incidence angleofincidence incidenceangle anstellwinkel angledattaque"),
         (ColumnRole.Lift, "cl lift liftcoefficient liftcoeff liftcoef coefficientoflift clift auftriebsbeiwert"),
-        (ColumnRole.Drag, "cd drag dragcoefficient dragcoeff dragcoef coefficientofdrag cdrag totaldrag totaldragcoefficient cdtotal widerstandsbeiwert"),
+        (ColumnRole.Drag, "cd drag dragcoefficient dragcoeff dragcoef coefficientofdrag cdrag totaldrag totaldragcoefficient cdtotal "
+            + "widerstandsbeiwert"),
         (ColumnRole.Moment, "cm moment momentcoefficient momentcoeff pitchingmoment pitchingmomentcoefficient cmc4 cm14 cm14c cm25 cm025 cm025c "
             + "cmquarterchord cmoment momentenbeiwert"),
         (ColumnRole.Reynolds, "re reynolds reynoldsnumber reynoldsno rey renumber reynoldszahl rn"),
@@ -43,7 +44,8 @@ internal sealed partial record ColumnName(
 
     private static readonly HashSet<string> Versions = new(
         ("corr corrected correction uncorr uncorrected unc raw eff effective geo geom geometric geometrical true real nominal nom measured meas "
-            + "set actual target fit fitted smooth smoothed interpolated calc calculated computed theory theoretical exp experimental 2d 3d").Split(' '),
+            + "set actual target fit fitted smooth smoothed interpolated calc calculated computed theory theoretical exp experimental "
+            + "2d 3d").Split(' '),
         StringComparer.Ordinal);
 
     /// <summary>Its numbers are no ratios as they stand: <c>cd [%]</c>, <c>cl x 10^3</c>, <c>-cm</c>.</summary>
@@ -64,7 +66,8 @@ internal sealed partial record ColumnName(
         var angle = unit switch { UnitMeaning.Degrees => AngleUnit.Degrees, UnitMeaning.Radians => AngleUnit.Radians, _ => (AngleUnit?)null };
         if (Plain.TryGetValue(whole, out var role))
             return new ColumnName(
-                text, [role], !HasTellingSign(name) && (power == 0 || role == ColumnRole.Reynolds) && (angle is null || role == ColumnRole.Angle), false, angle, power);
+                text, [role], !HasTellingSign(name) && (power == 0 || role == ColumnRole.Reynolds) && (angle is null || role == ColumnRole.Angle),
+                false, angle, power);
         if (Unclear.TryGetValue(whole, out var several))
             return new ColumnName(text, several, false, false, angle, power);
         return Qualified(tokens, whole) is var (stem, qualifier)
@@ -143,12 +146,15 @@ internal sealed partial record ColumnName(
     [GeneratedRegex(@"^(?<name>.*?)\s*[\[({<](?<inner>[^\])}>]*)[\])}>]\s*$")]
     private static partial Regex InBrackets();
 
-    [GeneratedRegex(@"^(?<name>.*?[^\s/,_])(?:\s*[/,_]\s*|\s+in\s+|\s+|(?<=alpha|aoa))(?<unit>deg|degrees?|°|º|rad|radians?)\.?$", RegexOptions.IgnoreCase)]
+    [GeneratedRegex(
+        @"^(?<name>.*?[^\s/,_])(?:\s*[/,_]\s*|\s+in\s+|\s+|(?<=alpha|aoa))(?<unit>deg|degrees?|°|º|rad|radians?)\.?$",
+        RegexOptions.IgnoreCase)]
     private static partial Regex AfterTheName();
 
     // By a power up to the fourth: one above is a Reynolds number, which tables with several side by side put beside a name.
     [GeneratedRegex(
-        @"[%‰]|percent|\bcounts?\b|\b10\s*(?:\^|\*\*)\s*[-−]?\s*[1-4](?![0-9])|[x×*·]\s*10{1,4}\b|10⁻?[¹²³⁴](?![⁰¹²³⁴⁵⁶⁷⁸⁹])|\b1e[-+]?0?[1-4]\b|\b10{2,4}\b",
+        @"[%‰]|percent|\bcounts?\b|\b10\s*(?:\^|\*\*)\s*[-−]?\s*[1-4](?![0-9])|[x×*·]\s*10{1,4}\b|10⁻?[¹²³⁴](?![⁰¹²³⁴⁵⁶⁷⁸⁹])"
+            + @"|\b1e[-+]?0?[1-4]\b|\b10{2,4}\b",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Multiple();
 

@@ -10,7 +10,10 @@ internal static class ForeignNumber
     private const string MinusSigns = "\u2212\u2013\u2010\u2011";
 
     private static readonly string[] Absent
-        = ["-", "--", "---", "*", "**", "***", "n/a", "na", "n.a.", "nan", "null", "none", "nil", "inf", "-inf", "+inf", "infinity", "-infinity", "#n/a", "#nv"];
+        = [
+            "-", "--", "---", "*", "**", "***", "n/a", "na", "n.a.", "nan", "null", "none", "nil", "inf", "-inf", "+inf", "infinity", "-infinity",
+            "#n/a", "#nv",
+        ];
 
     /// <param name="value">Finite where the answer is true; zero has no sign.</param>
     public static bool TryParse(string text, DecimalSign sign, out double value)

@@ -3,6 +3,7 @@ using System.Globalization;
 using System.Security.Cryptography;
 using System.Text;
 using System.Text.Unicode;
+using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Studies.Laboratory;
 
@@ -33,7 +34,8 @@ internal sealed record ForeignText(string File, ImmutableArray<string> Lines, st
         catch (DecoderFallbackException)
         {
             findings.Error(
-                new Place(file, LineOfBrokenCharacter(encoding, bytes.AsSpan(preamble)), 0), $"begins as {words} and is something else here; save it as text in UTF-8");
+                new Place(file, LineOfBrokenCharacter(encoding, bytes.AsSpan(preamble)), 0),
+                $"begins as {words} and is something else here; save it as text in UTF-8");
             return null;
         }
         if (text.AsSpan().Trim().IsEmpty)
@@ -41,7 +43,7 @@ internal sealed record ForeignText(string File, ImmutableArray<string> Lines, st
             findings.Error(new Place(file, 0, 0), "is empty");
             return null;
         }
-        var lines = text.Replace("\r\n", "\n", StringComparison.Ordinal).Replace('\r', '\n').Split('\n');
+        var lines = TextLines.Of(text);
         if (lines.Length > MostLines)
         {
             findings.Error(new Place(file, MostLines, 0), string.Create(
@@ -70,7 +72,8 @@ internal sealed record ForeignText(string File, ImmutableArray<string> Lines, st
         for (var i = 0; i < line.Length; i++)
             if (char.IsControl(line[i]) && line[i] is not ('\t' or '\f'))
                 return (i + 1, string.Create(
-                    CultureInfo.InvariantCulture, $"holds a control character (U+{(int)line[i]:X4}), as no text does; give the table as a text file"));
+                    CultureInfo.InvariantCulture,
+                    $"holds a control character (U+{(int)line[i]:X4}), as no text does; give the table as a text file"));
         return line.Length > LongestLine
             ? (0, string.Create(CultureInfo.InvariantCulture, $"has {line.Length} characters, and no row of a table more than {LongestLine}"))
             : null;

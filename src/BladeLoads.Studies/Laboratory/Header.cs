@@ -62,7 +62,8 @@ internal sealed record Header(int Line, ImmutableArray<Cell> Cells, ImmutableArr
         var cells = new List<Cell>();
         foreach (var word in words)
         {
-            var isOpen = cells.Count > 0 && cells[^1].Text.Length <= ColumnName.LongestName && cells[^1].Text.AsSpan().IndexOfAny("[({") >= 0 && cells[^1].Text.AsSpan().IndexOfAny("])}") < 0;
+            var isOpen = cells.Count > 0 && cells[^1].Text.Length <= ColumnName.LongestName
+                && cells[^1].Text.AsSpan().IndexOfAny("[({") >= 0 && cells[^1].Text.AsSpan().IndexOfAny("])}") < 0;
             if (cells.Count > 0 && (isOpen || word.Text is ['[' or '(' or '{', ..]))
                 cells[^1] = cells[^1] with { Text = $"{cells[^1].Text} {word.Text}" };
             else
@@ -94,7 +95,8 @@ internal sealed record Header(int Line, ImmutableArray<Cell> Cells, ImmutableArr
             while (at < text.Length && char.IsWhiteSpace(text[at]))
                 at++;
             var start = at;
-            while (at < text.Length && !(text[at] == '\t' || char.IsWhiteSpace(text[at]) && (at + 1 == text.Length || char.IsWhiteSpace(text[at + 1]))))
+            while (at < text.Length
+                && !(text[at] == '\t' || char.IsWhiteSpace(text[at]) && (at + 1 == text.Length || char.IsWhiteSpace(text[at + 1]))))
                 at++;
             if (at > start)
                 cells.Add(new Cell(text[start..at].Trim(), start + 1, false));

@@ -19,8 +19,6 @@ public sealed record LaboratoryTable(
     ImmutableArray<PolarRows> Polars, ImmutableArray<string> Record, ImmutableArray<InputFinding> Errors, ImmutableArray<InputFinding> Doubts,
     string Sha256)
 {
-    private const int FewestRows = 3;
-
     /// <summary>Reads a file.</summary>
     /// <param name="path">As the user wrote it; findings name the file so.</param>
     public static LaboratoryTable Read(string path, IStudyFiles files, ReadingRequest request)
@@ -48,7 +46,8 @@ public sealed record LaboratoryTable(
         if (findings.Errors.Length > 0)
             return Refused(findings, text.Sha256);
         if (text.EndsOpen && scan.Rows[^1].Line == text.Lines.Length)
-            findings.Doubt(new Place(text.File, text.Lines.Length, 0), "the last row has no line end; if the file was cut off there, its last number may have lost digits");
+            findings.Doubt(new Place(text.File, text.Lines.Length, 0),
+                "the last row has no line end; if the file was cut off there, its last number may have lost digits");
         return new LaboratoryTable(polars, record.Lines(), [], findings.Doubts, text.Sha256);
     }
 
@@ -65,6 +64,7 @@ public sealed record LaboratoryTable(
         var errors = new TableErrors(findings);
         var blocks = new SortedDictionary<double, List<LaboratoryRow>>();
         var forces = SectionForces.Asked(request);
+        var converted = new List<(double Angle, double Lift, double Drag)>();
         for (var i = 0; i < scan.Rows.Count; i++)
         {
             var row = scan.Rows[i];
@@ -74,10 +74,12 @@ public sealed record LaboratoryTable(
                 continue;
             }
             var (lift, drag) = forces?.ToLiftAndDrag(row.Lift, row.Drag, double.DegreesToRadians(degrees)) ?? (row.Lift, row.Drag);
+            converted.Add((degrees, lift, drag));
             if (drag < 0 && request.LeaveOutNegativeDrag)
                 record.LeaveOut(row.Line, "drag below 0");
             else if (drag < 0)
-                errors.Add("cd", new Place(file, row.Line, row.At.Drag), $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0, leave such rows out with "
+                errors.Add("cd", new Place(file, row.Line, row.At.Drag),
+                    $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0, leave such rows out with "
                     + "--leave-out negative-drag");
             // NaN is less than any number, and so a key as others.
             if (!blocks.TryGetValue(reynolds.OfRow(i), out var block))
@@ -85,7 +87,7 @@ public sealed record LaboratoryTable(
             if (!(drag < 0))
                 block.Add(new LaboratoryRow(row.Line, row.At.Angle, new PolarRow(degrees, lift, drag, row.Moment)));
         }
-        if (ExchangedColumns.AreLikely(scan.Rows.Select(row => (row.Angle, row.Lift, row.Drag))))
+        if (ExchangedColumns.AreLikely(converted))
             errors.Ask("cd", "are cl and cd exchanged?");
         var polars = errors.Any ? [] : Sorted(blocks, request, record, file, errors);
         if (!errors.Any)
@@ -106,10 +108,12 @@ public sealed record LaboratoryTable(
             if (sorted is null)
                 continue;
             var at = double.IsNaN(reynolds) ? "" : $" at Reynolds number {CanonicalText.Of(reynolds)}";
-            if (sorted.Count < FewestRows)
+            if (sorted.Count < PolarLimits.FewestRows)
                 errors.Add("", new Place(file, sorted.Count == 0 ? 0 : sorted[0].Line, 0), string.Create(CultureInfo.InvariantCulture,
                     $"has {sorted.Count} row{(sorted.Count == 1 ? "" : "s")}{at}; a polar needs three or more")
-                    + (blocks.Count > FewestRows ? "; where each row has a measured Reynolds number of its own, say --columns reynolds=none and --reynolds" : ""));
+                    + (blocks.Count > PolarLimits.FewestRows
+                        ? "; where each row has a measured Reynolds number of its own, say --columns reynolds=none and --reynolds"
+                        : ""));
             if (order.Done is { } done)
                 record.Order(done + at);
             polars.Add(new PolarRows(reynolds, [.. sorted.Select(row => row.Values)]));
@@ -121,6 +125,7 @@ public sealed record LaboratoryTable(
     {
         var (lowest, highest) = (polars.Min(polar => polar.Rows[0].AngleDeg), polars.Max(polar => polar.Rows[^1].AngleDeg));
         if (lowest >= -PolarTable.LargestRadian && highest <= PolarTable.LargestRadian)
-            errors.Add("", new Place(file, line, 0), $"angles run from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} degrees only; no case reads a table so narrow");
+            errors.Add("", new Place(file, line, 0),
+                $"angles run from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} degrees only; no case reads a table so narrow");
     }
 }

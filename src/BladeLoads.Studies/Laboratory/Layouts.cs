@@ -22,7 +22,8 @@ internal static class Layouts
         foreach (var other in sound.Skip(1))
             if (FirstDifference(sound[0], other) is { } row)
             {
-                findings.Error(new Place(text.File, row.One.Line, 1), $"can be read in two ways: with {InWords(sound[0])}, {InWords(row.One)}; or with "
+                findings.Error(new Place(text.File, row.One.Line, 1),
+                    $"can be read in two ways: with {InWords(sound[0])}, {InWords(row.One)}; or with "
                     + $"{InWords(other)}, {InWords(row.Other)}; say which with --separator and --decimal");
                 return null;
             }

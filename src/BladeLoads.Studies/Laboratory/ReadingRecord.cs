@@ -33,6 +33,7 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
         lines.AddRange(_order);
         foreach (var reason in _leftOut.GroupBy(left => left.Why).OrderBy(group => group.Min(left => left.Line)))
             lines.Add($"left out: {LineNumbers.InWords([.. reason.Select(left => left.Line)])}, {reason.Key}");
+        lines.AddRange(CarriedNotes.In(text, new LineSigns(request.Comment)));
         return lines.ToImmutable();
     }
 

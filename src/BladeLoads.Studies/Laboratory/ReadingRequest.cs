@@ -70,7 +70,7 @@ public sealed record ReadingRequest
     /// <summary>Rows with a drag below 0 are left out.</summary>
     public bool LeaveOutNegativeDrag { get; init; }
 
-    /// <summary>Angles beyond 180 degrees stand for those a turn less.</summary>
+    /// <summary>Angles beyond 180 degrees stand for those a turn less, beyond -180 degrees for those a turn more.</summary>
     public bool Wrap { get; init; }
 
     internal bool Takes(ColumnRole role) => Columns.TryGetValue(role, out var column) && column != NoColumn;

@@ -22,7 +22,9 @@ internal sealed class ReynoldsBlocks
         if (scan.Columns![ColumnRole.Reynolds] is not null)
             return OfColumn(scan, request, file, findings);
         if (request.LeavesOut(ColumnRole.Reynolds))
-            return All(scan, request.Reynolds ?? double.NaN, request.Reynolds is { } said ? $"Reynolds number {CanonicalText.Of(said)}, as --reynolds says" : "no Reynolds number, as --columns says");
+            return All(scan, request.Reynolds ?? double.NaN, request.Reynolds is { } said
+                ? $"Reynolds number {CanonicalText.Of(said)}, as --reynolds says"
+                : "no Reynolds number, as --columns says");
         if (request.Reynolds is { } asked)
             return AsSaid(scan, asked, file, findings);
         return scan.ReynoldsLines.Count == 0
@@ -36,19 +38,23 @@ internal sealed class ReynoldsBlocks
     {
         if (request.Reynolds is { } said && scan.Rows.Find(row => row.Reynolds != said) is { Line: > 0 } other)
         {
-            findings.Error(new Place(file, other.Line, 1), $"the Reynolds number here is {CanonicalText.Of(other.Reynolds)} and --reynolds says {CanonicalText.Of(said)}; "
+            findings.Error(new Place(file, other.Line, 1),
+                $"the Reynolds number here is {CanonicalText.Of(other.Reynolds)} and --reynolds says {CanonicalText.Of(said)}; "
                 + "leave the column out with --columns reynolds=none, or --reynolds");
             return null;
         }
         return new ReynoldsBlocks([.. scan.Rows.Select(row => row.Reynolds)], $"Reynolds numbers of column {scan.Columns!.Shown(ColumnRole.Reynolds)}"
-            + (scan.ReynoldsLines.Count == 0 ? "" : $"; what {Lines(scan.ReynoldsLines)} {(scan.ReynoldsLines.Count == 1 ? "says" : "say")} of them is not taken"));
+            + (scan.ReynoldsLines.Count == 0
+                ? ""
+                : $"; what {Lines(scan.ReynoldsLines)} {(scan.ReynoldsLines.Count == 1 ? "says" : "say")} of them is not taken"));
     }
 
     private static ReynoldsBlocks? AsSaid(TableScan scan, double asked, string file, Findings findings)
     {
         foreach (var line in scan.ReynoldsLines.Where(line => line.IsUnderstood && line.Value != asked))
         {
-            findings.Error(new Place(file, line.Line, 1), $"names a Reynolds number of {CanonicalText.Of(line.Value)} and --reynolds says {CanonicalText.Of(asked)}; "
+            findings.Error(new Place(file, line.Line, 1),
+                $"names a Reynolds number of {CanonicalText.Of(line.Value)} and --reynolds says {CanonicalText.Of(asked)}; "
                 + "leave --reynolds out, or say --columns reynolds=none besides if the line is not meant so");
             return null;
         }
@@ -59,7 +65,8 @@ internal sealed class ReynoldsBlocks
     {
         var unclear = scan.ReynoldsLines.FindAll(line => !line.IsUnderstood);
         foreach (var line in unclear)
-            findings.Error(new Place(file, line.Line, 1), "names a Reynolds number in a way that is not understood, or more than one; say it with --reynolds, or "
+            findings.Error(new Place(file, line.Line, 1),
+                "names a Reynolds number in a way that is not understood, or more than one; say it with --reynolds, or "
                 + "--columns reynolds=none for a table without");
         if (unclear.Count > 0)
             return null;
@@ -74,12 +81,14 @@ internal sealed class ReynoldsBlocks
             {
                 if (before is { } one && one.Value != lines[next].Value)
                     return Refuse(lines[next].Line, string.Create(CultureInfo.InvariantCulture,
-                        $"names a Reynolds number of {CanonicalText.Of(lines[next].Value)} and line {one.Line} one of {CanonicalText.Of(one.Value)}, with no row between; say it with --reynolds"));
+                        $"names a Reynolds number of {CanonicalText.Of(lines[next].Value)} and line {one.Line} one of {CanonicalText.Of(one.Value)}, "
+                            + $"with no row between; say it with --reynolds"));
                 before = current = lines[next];
             }
             if (current is null)
                 return Refuse(lines[0].Line, string.Create(CultureInfo.InvariantCulture,
-                    $"names a Reynolds number of {CanonicalText.Of(lines[0].Value)} below rows that have none (line {scan.Rows[i].Line}); say it with --reynolds, or choose rows with --lines"));
+                    $"names a Reynolds number of {CanonicalText.Of(lines[0].Value)} below rows that have none (line {scan.Rows[i].Line}); "
+                        + $"say it with --reynolds, or choose rows with --lines"));
             ofRow[i] = current.Value.Value;
         }
         // Below the last row: it may be meant for those above.

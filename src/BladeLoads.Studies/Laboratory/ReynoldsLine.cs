@@ -27,7 +27,8 @@ internal readonly partial record struct ReynoldsLine(int Line, double Value)
             var number = match.Groups["number"].Value.TrimEnd(' ', '.', ',', '\'', '\u2019', '\u00A0', '\u2009', '\u202F');
             var isMultiplied = match.Groups["times"].Success || match.Groups["million"].Success || match.Groups["thousand"].Success;
             var end = isMultiplied ? match.Index + match.Length : match.Groups["number"].Index + number.Length;
-            if (!MoreNumbers().IsMatch(text[end..]) && !NumbersInARow().IsMatch(text[end..]) && ReynoldsText.TryParse(number, PowerOf(match), null, out var value))
+            if (!MoreNumbers().IsMatch(text[end..]) && !NumbersInARow().IsMatch(text[end..])
+                && ReynoldsText.TryParse(number, PowerOf(match), null, out var value))
                 values.Add(value);
             else
                 isUnclear = true;
@@ -40,7 +41,9 @@ internal readonly partial record struct ReynoldsLine(int Line, double Value)
     /// <summary>Whether a cell of a row names a Reynolds number: a remark that matters, or a line that ran into the row.</summary>
     public static bool IsNamedIn(string cell) => InCell().IsMatch(cell.Length <= LongestLook ? cell : cell[..LongestLook]);
 
-    /// <summary>The power of ten in a remark on a Reynolds number, such as <c>millions</c>, <c>x 10^6</c>, <c>/1e6</c>; 0 where there is none.</summary>
+    /// <summary>
+    /// The power of ten in a remark on a Reynolds number, such as <c>millions</c>, <c>x 10^6</c>, <c>/1e6</c>; 0 where there is none.
+    /// </summary>
     /// <remarks>Whether it multiplies or divides cannot be told from its sign, and need not: only one of the two gives such a number.</remarks>
     public static int PowerIn(string remark) => Millions().IsMatch(remark) ? 6 : Thousands().IsMatch(remark) ? 3 : 0;
 
@@ -80,7 +83,9 @@ internal readonly partial record struct ReynoldsLine(int Line, double Value)
     private static partial Regex Naming();
 
     // Another number right behind it, or the number goes on as a word.
-    [GeneratedRegex(@"^\s*(?:[,;/&~±–−+|-]|to\b|and\b|or\b|bis\b|\.\.+)?\s*[-+.,]?[0-9]|^[\p{L}\p{N}^]", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    [GeneratedRegex(
+        @"^\s*(?:[,;/&~±–−+|-]|to\b|and\b|or\b|bis\b|\.\.+)?\s*[-+.,]?[0-9]|^[\p{L}\p{N}^]",
+        RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex MoreNumbers();
 
     [GeneratedRegex(@"re(?:ynolds[^=:0-9]*)?\s*[=:]\s*[0-9]", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
@@ -90,7 +95,9 @@ internal readonly partial record struct ReynoldsLine(int Line, double Value)
     [GeneratedRegex("""(?:^|[\s;,|"])[-−+]?[0-9][0-9.,]*"?[\s;,|]+"?[-−+]?[0-9.]""", RegexOptions.CultureInvariant)]
     private static partial Regex NumbersInARow();
 
-    [GeneratedRegex(@"million|\bmio\b|10\s*\^?\s*[-−]?\s*[6⁶](?![0-9])|\be[-+]?0?6\b|1e[-+]?0?6\b", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+    [GeneratedRegex(
+        @"million|\bmio\b|10\s*\^?\s*[-−]?\s*[6⁶](?![0-9])|\be[-+]?0?6\b|1e[-+]?0?6\b",
+        RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Millions();
 
     [GeneratedRegex(@"thousand|\bk\b|10\s*\^?\s*[-−]?\s*[3³](?![0-9])|1e[-+]?0?3\b", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]

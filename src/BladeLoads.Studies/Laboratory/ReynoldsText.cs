@@ -1,15 +1,11 @@
 using System.Globalization;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.Laboratory;
 
 /// <summary>Reynolds numbers as people write them: with thousands set apart, in millions, with either decimal sign.</summary>
 internal static class ReynoldsText
 {
-    /// <summary>Reynolds numbers of blades lie within; a text is read in the one way that gives such a number.</summary>
-    public const double Lowest = 1e4;
-
-    public const double Highest = 1e9;
-
     private const string Groupers = " '\u2019\u00A0\u2009\u202F";
 
     /// <param name="power">Of ten, that the number is to be multiplied by.</param>
@@ -20,7 +16,7 @@ internal static class ReynoldsText
     {
         var found = new HashSet<double>();
         foreach (var decimalSign in sign is { } known ? [known] : new[] { DecimalSign.Point, DecimalSign.Comma })
-            if (Read(text, power, decimalSign) is >= Lowest and <= Highest and var read)
+            if (Read(text, power, decimalSign) is { } read && PolarLimits.IsReynoldsOfABlade(read))
                 found.Add(read);
         value = found.Count == 1 ? found.First() : double.NaN;
         return found.Count == 1;

@@ -1,54 +1,38 @@
 using System.Collections.Immutable;
 using BladeLoads.Studies.Files;
-using BladeLoads.Studies.Fingerprints;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.Laboratory;
-
-/// <summary>What a line came to that has a value a column.</summary>
-internal enum RowKind
-{
-    Row,
-
-    /// <summary>Of a section that is not asked for.</summary>
-    OtherSection,
-
-    /// <summary>A value is missing, and such rows are left out.</summary>
-    Incomplete,
-
-    /// <summary>No number where one must be.</summary>
-    Broken,
-}
 
 /// <summary>Cells of a line -> numbers.</summary>
 /// <param name="columns">With a column for each role that is needed.</param>
 internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, DecimalSign sign, string file)
 {
-    // No section has a coefficient beyond: there a decimal sign, a unit or a column is wrong. Common practice, no source.
-    private const double LargestCoefficient = 20;
-
     private readonly ColumnRole _lift = request.Needed[1];
     private readonly ColumnRole _drag = request.Needed[2];
     private readonly int _power = columns.NameOf(ColumnRole.Reynolds)?.Power ?? 0;
 
-    /// <summary>Names of the sections met, those that are not asked for among them, each with its first place.</summary>
-    public Dictionary<string, Place> Sections { get; } = new(StringComparer.Ordinal);
-
-    /// <summary>A minus sign of typesetters was read.</summary>
-    public bool HasForeignMinus { get; private set; }
-
-    /// <summary>A number had a decimal point or an exponent, or a decimal comma in quotes: commas between the cells are separators.</summary>
-    public bool ShowsItsDecimals { get; private set; }
-
     /// <param name="tell">Receives column, place and text of what is wrong; null where nothing is to be told.</param>
-    public RowKind Read(ImmutableArray<Cell> cells, int line, Action<string, Place, string>? tell, out ForeignRow row)
+    public RowReading Read(ImmutableArray<Cell> cells, int line, Action<string, Place, string>? tell)
+    {
+        var named = columns[ColumnRole.Section] is { } section ? cells[section] : (Cell?)null;
+        var kind = KindOf(cells, named?.Text, line, tell, out var row);
+        var numbers = kind == RowKind.Row ? new[] { ColumnRole.Angle, _lift, _drag }.Select(role => cells[columns[role]!.Value]).ToArray() : [];
+        return new RowReading(kind, row)
+        {
+            Section = named is { } cell ? (cell.Text, new Place(file, line, cell.Column)) : null,
+            HasForeignMinus = numbers.Any(number => ForeignNumber.HasForeignMinus(number.Text)),
+            ShowsItsDecimals = numbers.Any(
+                number => number.Text.AsSpan().IndexOfAny(".eEdD") >= 0 || number.IsQuoted && number.Text.Contains(',')),
+        };
+    }
+
+    private RowKind KindOf(
+        ImmutableArray<Cell> cells, string? section, int line, Action<string, Place, string>? tell, out ForeignRow row)
     {
         row = default;
-        if (columns[ColumnRole.Section] is { } section)
-        {
-            Sections.TryAdd(cells[section].Text, new Place(file, line, cells[section].Column));
-            if (request.Section is { } meant && cells[section].Text != meant)
-                return RowKind.OtherSection;
-        }
+        if (section is not null && request.Section is { } meant && section != meant)
+            return RowKind.OtherSection;
         var absent = Roles().Count(role => ForeignNumber.IsAbsent(cells[columns[role]!.Value].Text));
         if (request.LeaveOutIncomplete && absent > 0 && Roles().Where(role => !ForeignNumber.IsAbsent(cells[columns[role]!.Value].Text))
             .All(role => Number(role, cells, line, null) is not double.NaN))
@@ -66,12 +50,6 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
         {
             At = (cells[columns[ColumnRole.Angle]!.Value].Column, cells[columns[_drag]!.Value].Column),
         };
-        foreach (var role in new[] { ColumnRole.Angle, _lift, _drag })
-        {
-            var cell = cells[columns[role]!.Value];
-            HasForeignMinus |= ForeignNumber.HasForeignMinus(cell.Text);
-            ShowsItsDecimals |= cell.Text.AsSpan().IndexOfAny(".eEdD") >= 0 || cell.IsQuoted && cell.Text.Contains(',');
-        }
         return RowKind.Row;
     }
 
@@ -88,10 +66,9 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
     private double Coefficient(ColumnRole role, ImmutableArray<Cell> cells, int line, Action<string, Place, string>? tell)
     {
         var value = Number(role, cells, line, tell);
-        if (!(Math.Abs(value) > LargestCoefficient))
+        if (!(Math.Abs(value) > PolarLimits.LargestCoefficient))
             return value;
-        Tell(role, cells, line, tell, $"{ColumnRoleWords.Of(role)} is {CanonicalText.Of(value)}, and no section has a coefficient beyond "
-            + $"{CanonicalText.Of(LargestCoefficient)}; a decimal sign, a unit or a column is wrong");
+        Tell(role, cells, line, tell, PolarLimits.BeyondLargest(ColumnRoleWords.Of(role), value));
         return double.NaN;
     }
 
@@ -107,12 +84,12 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
             return double.NaN;
         }
         var reynolds = ReynoldsText.Read(text, _power, sign);
-        if (reynolds is >= ReynoldsText.Lowest and <= ReynoldsText.Highest)
-            return reynolds.Value;
+        if (reynolds is { } number && PolarLimits.IsReynoldsOfABlade(number))
+            return number;
         Tell(role, cells, line, tell, reynolds is null
             ? ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign)
-            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are 1e4 to 1e9. Is it in millions? Then name the column so, or say "
-                + "--columns reynolds=none and --reynolds");
+            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}. Is it in millions? "
+                + "Then name the column so, or say --columns reynolds=none and --reynolds");
         return double.NaN;
     }
 

@@ -54,7 +54,8 @@ internal sealed class SweepOrder(SweepChoice? choice, Action<int, int, string> r
         var chosen = runs.FindAll(run => run.Direction == direction);
         if (chosen.Count == 0 || AngleRun.Overlap(chosen) is not null)
         {
-            report(runs[0].Rows[0].Line, 0, $"has {(chosen.Count == 0 ? "no" : "more than one")} sweep of {word} angles over the same range; choose rows with --lines, "
+            report(runs[0].Rows[0].Line, 0,
+                $"has {(chosen.Count == 0 ? "no" : "more than one")} sweep of {word} angles over the same range; choose rows with --lines, "
                 + "or take all with --sweep all");
             return null;
         }
@@ -82,28 +83,34 @@ internal sealed class SweepOrder(SweepChoice? choice, Action<int, int, string> r
     {
         var (one, other) = both;
         report(other.Rows[0].Line, other.Rows[0].Column, string.Create(CultureInfo.InvariantCulture,
-            $"angles {Goes(one)} and then {Goes(other)}: two sweeps over the same range, or rows out of order; say which count with --sweep rising, falling, mean or all, or choose rows with --lines"));
+            $"angles {Goes(one)} and then {Goes(other)}: two sweeps over the same range, or rows out of order; "
+                + $"say which count with --sweep rising, falling, mean or all, or choose rows with --lines"));
         return null;
     }
 
     private static string Goes(AngleRun run) => run.Rows.Count == 1
         ? string.Create(CultureInfo.InvariantCulture, $"are {CanonicalText.Of(run.Rows[0].Angle)} (line {run.Rows[0].Line})")
         : string.Create(CultureInfo.InvariantCulture,
-            $"{(run.Direction < 0 ? "fall" : "rise")} from {CanonicalText.Of(run.Rows[0].Angle)} to {CanonicalText.Of(run.Rows[^1].Angle)} (lines {run.Rows[0].Line} to {run.Rows[^1].Line})");
+            $"{(run.Direction < 0 ? "fall" : "rise")} from {CanonicalText.Of(run.Rows[0].Angle)} to {CanonicalText.Of(run.Rows[^1].Angle)} "
+                + $"(lines {run.Rows[0].Line} to {run.Rows[^1].Line})");
 
     private List<LaboratoryRow>? Mean(List<AngleRun> runs)
     {
         if (runs is not [var first, var second] || first.Direction == second.Direction)
         {
-            report(runs[0].Rows[0].Line, 0, "--sweep mean takes two sweeps, one of rising and one of falling angles, and there are others; choose rows with --lines");
+            report(runs[0].Rows[0].Line, 0,
+                "--sweep mean takes two sweeps, one of rising and one of falling angles, and there are others; choose rows with --lines");
             return null;
         }
         if (!AreDistinct([.. first.Rows.OrderBy(row => row.Angle)]) | !AreDistinct([.. second.Rows.OrderBy(row => row.Angle)]))
             return null;
         var other = second.Rows.ToDictionary(row => row.Angle);
-        var alone = first.Rows.Where(row => !other.ContainsKey(row.Angle)).Concat(second.Rows.ExceptBy(first.Rows.Select(row => row.Angle), row => row.Angle)).ToList();
+        var alone = first.Rows.Where(row => !other.ContainsKey(row.Angle))
+            .Concat(second.Rows.ExceptBy(first.Rows.Select(row => row.Angle), row => row.Angle)).ToList();
         foreach (var row in alone)
-            report(row.Line, row.Column, $"alpha {CanonicalText.Of(row.Angle)} is in one of the two sweeps only, so that there is no mean; choose rows with --lines, or one sweep");
+            report(row.Line, row.Column,
+                $"alpha {CanonicalText.Of(row.Angle)} is in one of the two sweeps only, so that there is no mean; choose rows with --lines, "
+                + "or one sweep");
         if (alone.Count > 0)
             return null;
         Done = "lift, drag and moment are the means of a sweep of rising and one of falling angles, 12 significant digits";
@@ -128,11 +135,13 @@ internal sealed class SweepOrder(SweepChoice? choice, Action<int, int, string> r
                 continue;
             distinct = false;
             report(other.Line, other.Column, string.Create(CultureInfo.InvariantCulture,
-                $"alpha {CanonicalText.Of(other.Angle)} has {Coefficients(other)} here and {Coefficients(one)} in line {one.Line}; which is meant cannot be told, keep one"));
+                $"alpha {CanonicalText.Of(other.Angle)} has {Coefficients(other)} here and {Coefficients(one)} in line {one.Line}; "
+                    + $"which is meant cannot be told, keep one"));
         }
         return distinct;
     }
 
     private static string Coefficients(LaboratoryRow row)
-        => $"cl {CanonicalText.Of(row.Values.Lift)} cd {CanonicalText.Of(row.Values.Drag)}" + (double.IsNaN(row.Values.Moment) ? "" : $" cm {CanonicalText.Of(row.Values.Moment)}");
+        => $"cl {CanonicalText.Of(row.Values.Lift)} cd {CanonicalText.Of(row.Values.Drag)}"
+            + (double.IsNaN(row.Values.Moment) ? "" : $" cm {CanonicalText.Of(row.Values.Moment)}");
 }

@@ -76,7 +76,8 @@ internal sealed class TablePlace(
 
     private bool FindFirstRow(out int firstRow, out int count)
     {
-        var places = request.Needed.Select(role => int.TryParse(request.Columns[role], NumberStyles.None, CultureInfo.InvariantCulture, out var n) ? n : 0).ToList();
+        var places = request.Needed.Select(
+            role => int.TryParse(request.Columns[role], NumberStyles.None, CultureInfo.InvariantCulture, out var n) ? n : 0).ToList();
         for (firstRow = first; firstRow < end; firstRow++)
         {
             if (signs.IsComment(text.Lines[firstRow], out _))
@@ -98,7 +99,8 @@ internal sealed class TablePlace(
                 continue;
             var row = Cells.WithoutTrailing(Cells.Of(signs.WithoutRemark(text.Lines[i]), separator), FewestColumns);
             for (var above = i - 1; above >= first; above--)
-                if (Header.Of(Uncommented(above), above + 1, separator, row.Length, request) is not null && Between(above + 1, i) is >= 0 and var between)
+                if (Header.Of(Uncommented(above), above + 1, separator, row.Length, request) is not null
+                    && Between(above + 1, i) is >= 0 and var between)
                     return (between + 1, TableScan.NotUnderstood(text.Lines[between]));
                 else if (Header.Of(Uncommented(above), above + 1, separator, 0, request) is { } header)
                     return (above + 1, string.Create(CultureInfo.InvariantCulture,
@@ -109,8 +111,8 @@ internal sealed class TablePlace(
             return (i + 1, isNumbered
                 ? "has no number in a column that --columns names"
                 : request.Columns.Values.Any(column => column != ReadingRequest.NoColumn)
-                    ? $"no line above names {string.Join(", ", request.Columns.Values.Select(VisibleText.Quote))}, or columns known here; say which are which by "
-                        + "number: --columns alpha=1,cl=2,cd=3"
+                    ? $"no line above names {string.Join(", ", request.Columns.Values.Select(VisibleText.Quote))}, or columns known here; "
+                        + "say which are which by number: --columns alpha=1,cl=2,cd=3"
                     : "no line above names the columns; say which are which by number: --columns alpha=1,cl=2,cd=3");
         }
         return null;

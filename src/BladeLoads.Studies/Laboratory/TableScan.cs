@@ -15,6 +15,10 @@ internal sealed class TableScan
     private readonly TableErrors _errors;
     private readonly List<int> _wordsSinceLastRow = [];
 
+    // Those that rows name, asked for or not, each with its first place.
+    private readonly Dictionary<string, Place> _sections = new(StringComparer.Ordinal);
+    private bool _showsItsDecimals;
+
     private TableScan(ForeignText text, ReadingRequest request, CellSeparator separator, DecimalSign sign)
     {
         (_text, _request, Separator, Sign) = (text, request, separator, sign);
@@ -46,6 +50,7 @@ internal sealed class TableScan
     /// <summary>The line that names <see cref="Unit"/>.</summary>
     public int UnitLine { get; private set; }
 
+    /// <summary>A minus sign of typesetters was read in a row.</summary>
     public bool HasForeignMinus { get; private set; }
 
     /// <summary>Those not told one by one too.</summary>
@@ -85,8 +90,7 @@ internal sealed class TableScan
             ReadLine(i, count, reader);
         foreach (var line in _wordsSinceLastRow)
             LeftOut.Add((line, "a remark below the rows"));
-        CheckWhole(reader);
-        HasForeignMinus = reader.HasForeignMinus;
+        CheckWhole();
     }
 
     // From the first line, and from the header, to the first row.
@@ -107,14 +111,15 @@ internal sealed class TableScan
             else if (i + 1 > Header.Line && Header.Line > 0)
                 _errors.Add("", new Place(_text.File, i + 1, 1), NotUnderstood(line));
             else if (Cells.WithoutTrailing(Cells.Of(line, Separator), count) is var cells && cells.Length == count
-                && reader.Read(cells, i + 1, null, out _) is RowKind.Row)
+                && reader.Read(cells, i + 1, null).Kind == RowKind.Row)
                 _errors.Add("", new Place(_text.File, i + 1, 1),
                     "holds a row above the line that names the columns; --lines says which lines hold the table");
         }
     }
 
     /// <summary>Of a line between the names of the columns and the first row.</summary>
-    public static string NotUnderstood(string line) => $"{VisibleText.Quote(line.Trim())} stands between the names of the columns and the first row and is "
+    public static string NotUnderstood(string line)
+        => $"{VisibleText.Quote(line.Trim())} stands between the names of the columns and the first row and is "
         + "not understood; put a comment mark before it, or say with --comment how it begins";
 
     private void ReadLine(int i, int count, RowReader reader)
@@ -127,7 +132,7 @@ internal sealed class TableScan
             if (ReynoldsLine.In(rest, number) is { } commented)
                 ReynoldsLines.Add(commented);
             else if (Cells.WithoutTrailing(Cells.Of(rest, Separator), count) is var row && row.Length == count
-                && reader.Read(row, number, null, out _) == RowKind.Row)
+                && reader.Read(row, number, null).Kind == RowKind.Row)
                 LeftOut.Add((number, "a row behind a comment mark"));
             return;
         }
@@ -135,7 +140,7 @@ internal sealed class TableScan
         var numbers = cells.Count(cell => ForeignNumber.LooksLikeOne(cell.Text));
         var isMeantAsRow = numbers >= 2 || numbers > 0 && ForeignNumber.LooksLikeOne(cells[0].Text) || !IsWords(line);
         if (isMeantAsRow && !ForeignNumber.LooksLikeOne(cells[0].Text) && ReynoldsLine.In(line, number) is { } named
-            && (cells.Length != count || reader.Read(cells, number, null, out _) == RowKind.Broken))
+            && (cells.Length != count || reader.Read(cells, number, null).Kind == RowKind.Broken))
             ReynoldsLines.Add(named);
         else if (cells.Length == count && isMeantAsRow)
             TakeRow(cells, number, reader);
@@ -143,19 +148,22 @@ internal sealed class TableScan
             return;
         else if (isMeantAsRow)
             _errors.Add("", new Place(_text.File, number, 1), string.Create(CultureInfo.InvariantCulture,
-                $"{cells.Length} values where {(Header.Line > 0 ? $"line {Header.Line} names" : "the first row has")} {count}; give one a column, or leave the line out by --lines or a comment mark"));
+                $"{cells.Length} values where {(Header.Line > 0 ? $"line {Header.Line} names" : "the first row has")} {count}; "
+                    + $"give one a column, or leave the line out by --lines or a comment mark"));
         else
             _wordsSinceLastRow.Add(number);
     }
 
     // More digits than letters: a row that something happened to.
-    private static bool IsWords(string line) => LineSigns.IsRuling(line) || line.Count(char.IsLetter) is >= 2 and var letters && letters >= line.Count(char.IsDigit)
+    private static bool IsWords(string line) => LineSigns.IsRuling(line)
+        || line.Count(char.IsLetter) is >= 2 and var letters && letters >= line.Count(char.IsDigit)
         || !line.Any(char.IsDigit);
 
     // A line of no numbers that has its sense; another is a remark.
     private bool IsKnown(string line, int number, int count)
     {
-        if (LineSigns.IsRuling(line) || Header.IsRepeatedBy(line, Separator) || Header.IsRepeatedBy(_signs.WithoutEnd(line), Separator) || IsUnitsRow(line, number, count))
+        if (LineSigns.IsRuling(line) || Header.IsRepeatedBy(line, Separator) || Header.IsRepeatedBy(_signs.WithoutEnd(line), Separator)
+            || IsUnitsRow(line, number, count))
             return true;
         if (Header.Of(line, number, Separator, 0, _request) is not null)
             _errors.Add("", new Place(_text.File, number, 1), Header.Line > 0
@@ -170,17 +178,24 @@ internal sealed class TableScan
 
     private void TakeRow(ImmutableArray<Cell> cells, int number, RowReader reader)
     {
-        switch (reader.Read(cells, number, _errors.Add, out var row))
+        var read = reader.Read(cells, number, _errors.Add);
+        if (read.Section is var (section, at))
+            _sections.TryAdd(section, at);
+        HasForeignMinus |= read.HasForeignMinus;
+        _showsItsDecimals |= read.ShowsItsDecimals;
+        switch (read.Kind)
         {
             case RowKind.Row:
                 foreach (var words in _wordsSinceLastRow)
-                    _errors.Add("", new Place(_text.File, words, 1), $"{VisibleText.Quote(_text.Lines[words - 1].Trim())} stands between rows, and what it says of "
+                    _errors.Add("", new Place(_text.File, words, 1),
+                        $"{VisibleText.Quote(_text.Lines[words - 1].Trim())} stands between rows, and what it says of "
                         + "those below is not known; put a comment mark before it, say with --comment how it begins, or choose rows with --lines");
                 _wordsSinceLastRow.Clear();
-                Rows.Add(row);
+                Rows.Add(read.Row);
                 foreach (var cell in cells)
                     if (ReynoldsLine.IsNamedIn(cell.Text))
-                        _errors.Add("", new Place(_text.File, number, cell.Column), $"{VisibleText.Quote(cell.Text)} names a Reynolds number within a row; put it into a column of its own, "
+                        _errors.Add("", new Place(_text.File, number, cell.Column),
+                            $"{VisibleText.Quote(cell.Text)} names a Reynolds number within a row; put it into a column of its own, "
                             + "or into a line above the rows");
                 break;
             case RowKind.Incomplete:
@@ -205,22 +220,24 @@ internal sealed class TableScan
                 $"names another unit of the angle of attack than line {UnitLine}; leave one of them out with --lines"));
         foreach (var role in _request.Needed.Skip(1).Append(ColumnRole.Moment))
             if (Columns[role] is { } place && UnitWords.Meaning(cells[place].Text) != UnitMeaning.None)
-                _errors.Add("", new Place(_text.File, number, cells[place].Column), $"names {VisibleText.Quote(cells[place].Text)} as the unit of {ColumnRoleWords.Of(role)}; "
+                _errors.Add("", new Place(_text.File, number, cells[place].Column),
+                    $"names {VisibleText.Quote(cells[place].Text)} as the unit of {ColumnRoleWords.Of(role)}; "
                     + "only ratios are read, so give the table as such");
         return true;
     }
 
-    private void CheckWhole(RowReader reader)
+    private void CheckWhole()
     {
-        if (reader.Sections.Count > 1 && _request.Section is null)
-            _errors.Add("", reader.Sections.Values.ElementAt(1),
-                $"has rows of sections {VisibleText.Enumerate(reader.Sections.Keys, "")}; say which: --section {reader.Sections.Keys.First()}");
-        else if (_request.Section is { } section && !reader.Sections.ContainsKey(section))
-            _errors.Add("", new Place(_text.File, 0, 0), reader.Sections.Count == 0
+        if (_sections.Count > 1 && _request.Section is null)
+            _errors.Add("", _sections.Values.ElementAt(1),
+                $"has rows of sections {VisibleText.Enumerate(_sections.Keys, "")}; say which: --section {_sections.Keys.First()}");
+        else if (_request.Section is { } section && !_sections.ContainsKey(section))
+            _errors.Add("", new Place(_text.File, 0, 0), _sections.Count == 0
                 ? $"no column names sections, so there is no section {VisibleText.Quote(section)}"
-                : $"has no section {VisibleText.Quote(section)}; there are {VisibleText.Enumerate(reader.Sections.Keys, "none")}");
-        if (Separator == CellSeparator.Comma && _request.DecimalSign is null && !reader.ShowsItsDecimals && Rows.Count > 0)
-            _errors.Add("", new Place(_text.File, Rows[0].Line, 1), "commas stand here and no decimal point anywhere, so that they may separate columns or be "
+                : $"has no section {VisibleText.Quote(section)}; there are {VisibleText.Enumerate(_sections.Keys, "none")}");
+        if (Separator == CellSeparator.Comma && _request.DecimalSign is null && !_showsItsDecimals && Rows.Count > 0)
+            _errors.Add("", new Place(_text.File, Rows[0].Line, 1),
+                "commas stand here and no row has a decimal point, so that they may separate columns or be "
                 + "decimal signs; say --decimal point where they separate, or save the table with semicolons");
         if (Rows.Count == 0 && !_errors.Any)
             _errors.Add("", new Place(_text.File, 0, 0), "has no row left");

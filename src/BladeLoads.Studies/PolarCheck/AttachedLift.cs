@@ -58,7 +58,8 @@ internal static class AttachedLift
         else if (largest.Value is < LeastOfLargest or > LargestOfLargest)
             yield return polar.Doubt(DoubtKinds.LargestLift, "cl", [largest.Row], angle - 2, angle + 2,
                 $"the largest lift is {Given(largest.Value)}, at {Given(angle)} deg",
-                $"; slender sections reach {Given(LeastOfLargest)} to {Given(LargestOfLargest)}: is it in another unit, or of a section with a flap?");
+                $"; slender sections reach {Given(LeastOfLargest)} to {Given(LargestOfLargest)}: is it in another unit, or of a section with a "
+                + "flap?");
         if (!largest.AtEnd && angle < EarliestStall)
             yield return polar.Doubt(DoubtKinds.LargestLift, "cl", [largest.Row], angle, angle + 10,
                 $"the largest lift is at {Given(angle)} deg",

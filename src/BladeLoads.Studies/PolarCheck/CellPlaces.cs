@@ -1,4 +1,5 @@
 using System.Text;
+using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.PolarCheck;
@@ -14,7 +15,7 @@ internal sealed class CellPlaces
     public CellPlaces(string file, StoredPolars table)
     {
         _file = file;
-        _lines = Encoding.UTF8.GetString(table.Bytes.Span).TrimStart('\uFEFF').ReplaceLineEndings("\n").Split('\n');
+        _lines = TextLines.Of(Encoding.UTF8.GetString(table.Bytes.Span).TrimStart('\uFEFF'));
         var header = _lines.FirstOrDefault(line => line.Trim() is [not '#', ..]) ?? "";
         _columns = [.. header.Split(',').Select(name => name.Trim().Trim('"'))];
     }

@@ -10,15 +10,12 @@ namespace BladeLoads.Studies.Tables;
 /// <param name="Text">What stands behind the name, trimmed.</param>
 internal sealed record HeadNote(int Line, string Text)
 {
-    /// <summary>The rows have been augmented for rotation.</summary>
-    public const string AugmentedName = "augmented";
-
     /// <summary>The first note of that name; null where there is none.</summary>
     /// <param name="name">Small letters.</param>
     public static HeadNote? Find(InputText input, string name)
     {
         var number = 0;
-        foreach (var line in input.Text.Split('\n'))
+        foreach (var line in TextLines.Of(input.Text))
         {
             number++;
             var trimmed = line.Trim();
@@ -26,10 +23,16 @@ internal sealed record HeadNote(int Line, string Text)
                 continue;
             if (trimmed[0] != '#')
                 return null;
-            var comment = trimmed.TrimStart('#').TrimStart();
-            if (comment.StartsWith(name, StringComparison.OrdinalIgnoreCase) && comment[name.Length..].TrimStart() is [':', ..] rest)
-                return new HeadNote(number, rest[1..].Trim());
+            if (TextUnder(name, trimmed.TrimStart('#')) is { } text)
+                return new HeadNote(number, text);
         }
         return null;
     }
+
+    /// <summary>What a comment without its mark says under that name, trimmed; null where it is no such note.</summary>
+    public static string? TextUnder(string name, string comment)
+        => comment.TrimStart() is var note && note.StartsWith(name, StringComparison.OrdinalIgnoreCase)
+            && note[name.Length..].TrimStart() is [':', ..] rest
+                ? rest[1..].Trim()
+                : null;
 }

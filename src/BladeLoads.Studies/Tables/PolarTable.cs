@@ -11,10 +11,8 @@ namespace BladeLoads.Studies.Tables;
 /// <param name="Canonical">The parsed values; moment coefficients, which nothing uses, are not in it.</param>
 internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, InputFile Input)
 {
-    private const int FewestRows = 3;
     private const double AngleSlack = 1e-9;       // deg
     internal const double LargestRadian = 3.2;    // a little more than pi: angles that all lie within are hardly degrees
-    private const double LowestReynolds = 1e4;
     private const double LiftClosure = 0.05;
 
     /// <summary>What is doubtful about the table; to be raised once a blade names its section.</summary>
@@ -64,7 +62,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             Reach = section is null ? [] : [.. ReachOf(blocks)],
             NotAugmented = section is null ? [] : [.. NotAugmentedOf(section, blocks)],
             PolarsAt = [.. blocks.Select(block => block.At)],
-            Augmented = HeadNote.Find(input, HeadNote.AugmentedName),
+            Augmented = HeadNote.Find(input, StoredPolars.AugmentedNote),
         };
     }
 
@@ -84,8 +82,8 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         if (block.Angles.Count > 0 && double.DegreesToRadians(angle) <= double.DegreesToRadians(block.Angles[^1]))
             rows.Error("alpha_deg", Rising.Problem("alpha_deg",
                 (block.Angles[^1], block.LastLine), angle, rows.Line, "angles must rise within one Reynolds number"));
-        var lift = rows.Number("cl");
-        var drag = rows.Number("cd");
+        var lift = Coefficient(rows, "cl");
+        var drag = Coefficient(rows, "cd");
         if (drag < 0)
             rows.Error("cd", $"cd is {CanonicalText.Of(drag)}; drag coefficients must be >= 0");
         var moment = rows.Has("cm") ? rows.Number("cm") : double.NaN;
@@ -95,6 +93,14 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         block.Add(new PolarRow(angle, lift, drag, moment), rows.Line);
         if (angle is -180 or 180)
             block.LiftAtEnd.Add((lift, rows.Cell("cl")));
+    }
+
+    private static double Coefficient(CsvRows rows, string column)
+    {
+        var value = rows.Number(column);
+        if (Math.Abs(value) > PolarLimits.LargestCoefficient)
+            rows.Error(column, PolarLimits.BeyondLargest(column, value));
+        return value;
     }
 
     // NaN where it is wrong.
@@ -109,7 +115,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
 
     private static void CheckReynolds(CsvRows rows, List<Block> blocks, double reynolds)
     {
-        if (reynolds < LowestReynolds)
+        if (reynolds < PolarLimits.LowestReynolds)
             rows.Error("reynolds",
                 $"reynolds is {CanonicalText.Of(reynolds)}; Reynolds numbers of blades are 1e4 and more, three million is 3e6");
         else if (blocks.Any(block => block.Reynolds == reynolds))
@@ -123,7 +129,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
     {
         if (blocks.Count == 0 && !rows.HasErrors)
             rows.Error(new Place(file, 0, 0), "has no row; a polar needs three or more");
-        foreach (var block in blocks.Where(block => block.Rows < FewestRows))
+        foreach (var block in blocks.Where(block => block.Rows < PolarLimits.FewestRows))
         {
             var of = double.IsNaN(block.Reynolds) ? "the table" : $"Reynolds number {ReynoldsNumber.Text(block.Reynolds)}";
             rows.Error(block.At, $"{of} has {(block.Rows == 1 ? "one row" : "two rows")}; a polar needs three or more");

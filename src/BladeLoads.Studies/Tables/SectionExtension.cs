@@ -1,5 +1,6 @@
+using System.Collections.Immutable;
 using BladeLoads.Rotor.Sections;
-using BladeLoads.Studies.Fingerprints;
+using static BladeLoads.Studies.Tables.RecordText;
 
 namespace BladeLoads.Studies.Tables;
 
@@ -12,25 +13,26 @@ internal sealed record SectionExtension(double AspectRatio, ExtensionJoin Join)
     {
         var section = table.Section!;
         var polars = new List<Polar>();
+        var record = ImmutableArray.CreateBuilder<string>();
         InputFinding? doubt = null;
         for (var i = 0; i < section.Polars.Length; i++)
         {
             var at = table.PolarsAt[i];
             if (!PolarExtension.CanExtend(section.Polars[i]))
-                return new ExtendedSection(null, null, at);
+                return new ExtendedSection(null, [], null, at);
             var extended = PolarExtension.Extend(section.Polars[i], AspectRatio, Join);
             polars.Add(extended.Polar);
-            if (extended.Above is { Kind: ExtensionKind.FromEnd, ShowsStall: false, JoinAngle: var angle })
-                doubt ??= new InputFinding(at.File, at.Line, at.Column,
-                    $"lift still rises at the last angle, {CanonicalText.Of(Math.Round(double.RadiansToDegrees(angle), 9))} deg; "
-                    + "extended from there, the section stalls at that angle");
+            record.Add(section.Name + ": " + At(section.Polars[i].Reynolds) + ExtensionText.Of(extended));
+            if (ExtensionText.Doubt(extended) is { } text)
+                doubt ??= new InputFinding(at.File, at.Line, at.Column, text);
         }
-        return new ExtendedSection(Section.FromPolars(section.Name, polars), doubt, null);
+        return new ExtendedSection(Section.FromPolars(section.Name, polars), record.ToImmutable(), doubt, null);
     }
 }
 
 /// <summary>What became of a section.</summary>
 /// <param name="Section">Null where a polar cannot be extended.</param>
+/// <param name="Record">What was done at each Reynolds number, a line each.</param>
 /// <param name="Doubt">The first polar whose extension rests on a guess.</param>
 /// <param name="Obstacle">Where the polar begins that cannot be extended.</param>
-internal sealed record ExtendedSection(Section? Section, InputFinding? Doubt, Place? Obstacle);
+internal sealed record ExtendedSection(Section? Section, ImmutableArray<string> Record, InputFinding? Doubt, Place? Obstacle);

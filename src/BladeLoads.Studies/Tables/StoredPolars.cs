@@ -15,6 +15,9 @@ public sealed record StoredPolars(
     string SectionName, ImmutableArray<string> Head, ImmutableArray<PolarRows> Polars, Section Section, ReadOnlyMemory<byte> Bytes,
     string Sha256)
 {
+    /// <summary>The name of the note in the head that says that rows are augmented for rotation: <c># augmented: ...</c>.</summary>
+    public const string AugmentedNote = "augmented";
+
     /// <summary>The lines in the file on which the rows of <see cref="Polars"/> stand, from 1.</summary>
     public ImmutableArray<ImmutableArray<int>> RowLines { get; init; } = [];
 
@@ -73,14 +76,14 @@ public sealed record StoredPolars(
     private static ImmutableArray<string> HeadOf(string text)
     {
         var head = ImmutableArray.CreateBuilder<string>();
-        foreach (var line in text.AsSpan().EnumerateLines())
+        foreach (var line in TextLines.Of(text))
         {
             var trimmed = line.Trim();
-            if (trimmed.IsEmpty)
+            if (trimmed.Length == 0)
                 continue;
             if (trimmed[0] != '#')
                 break;
-            head.Add(trimmed[1..].Trim().ToString());
+            head.Add(trimmed[1..].Trim());
         }
         return head.ToImmutable();
     }

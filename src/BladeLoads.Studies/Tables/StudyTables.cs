@@ -8,9 +8,11 @@ namespace BladeLoads.Studies.Tables;
 /// <param name="Sections">Null when a table is missing or has an error.</param>
 /// <param name="Tables">In the order in which the blade names them.</param>
 /// <param name="Set">What the set says of its tables, where the blade asks for it or the set says it.</param>
+/// <param name="ExtensionRecord">What was done where polars were extended, a line each.</param>
 /// <param name="NotExtended">Where polars begin that cannot be extended, though they were to be; one a table at most.</param>
 internal sealed record BladeSections(
-    SectionSet? Sections, ImmutableArray<PolarTable> Tables, SetFile? Set, ImmutableArray<Place> NotExtended);
+    SectionSet? Sections, ImmutableArray<PolarTable> Tables, SetFile? Set, ImmutableArray<string> ExtensionRecord,
+    ImmutableArray<Place> NotExtended);
 
 /// <summary>The tables of a study, each read, hashed and prepared once, however many cases share it.</summary>
 internal sealed class StudyTables(StudyFolder folder, Findings findings)
@@ -56,12 +58,12 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
         // A blade that names nothing, because of its errors, keeps no table from telling its own.
         if (blade.Blade is null && blade.Sections.IsEmpty)
             ReadAll(setFolder);
-        var (sound, obstacles) = Ready(tables, extension);
+        var (sound, record, obstacles) = Ready(tables, extension);
         var isSound = ThicknessCheck.IsSound(blade, set, names.Contains(SetFile.Name), sound, folder.RelativePath(setFolder), findings)
             && sound.Count == wanted.Length;
         var sections = new BladeSections(
             !isSound ? null : byThickness ? SectionSet.Of(Family(set!, sound)) : SectionSet.Of(sound), tables.ToImmutable(),
-            byThickness ? set : null, obstacles);
+            byThickness ? set : null, record, obstacles);
         _sections.Add((blade.Input.File, setFolder, extension), sections);
         return sections;
     }
@@ -70,17 +72,22 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
         => SectionFamily.Of(set.Thicknesses.Zip(sections, (thickness, section) => new FamilyMember(thickness.ThicknessRatio, section)));
 
     // The sections of the tables as they serve, extended where that is asked for, and where it cannot be done.
-    private (IReadOnlyList<Section> Sections, ImmutableArray<Place> Obstacles) Ready(IEnumerable<PolarTable> tables, SectionExtension? extension)
+    private (IReadOnlyList<Section> Sections, ImmutableArray<string> Record, ImmutableArray<Place> Obstacles) Ready(
+        IEnumerable<PolarTable> tables, SectionExtension? extension)
     {
         var sound = tables.Where(table => table.Section is not null);
         if (extension is null)
-            return ([.. sound.Select(table => table.Section!)], []);
+            return ([.. sound.Select(table => table.Section!)], [], []);
+        foreach (var table in sound)
+            if (table.Augmented is { } note)
+                findings.Doubt(new Place(table.Input.File, note.Line, 1), ExtensionText.AugmentedBefore);
         var extended = sound.Select(extension.Of).ToList();
         foreach (var section in extended)
             if (section.Doubt is { } doubt)
                 findings.Doubt(doubt);
         return (
             [.. extended.Where(section => section.Obstacle is null).Select(section => section.Section!)],
+            [ExtensionText.Method(extension.AspectRatio, "", extension.Join), .. extended.SelectMany(section => section.Record)],
             [.. extended.Where(section => section.Obstacle is not null).Select(section => section.Obstacle!.Value)]);
     }
 

@@ -43,10 +43,13 @@ internal sealed partial class TableErrors(Findings findings)
     {
         foreach (var ((column, _), (count, firstUntold)) in _kinds)
             if (count > MostToldOfAKind)
-                findings.Error(firstUntold, $"and {(AreTooMany ? "at least " : "")}"
+                findings.Error(new InputFinding(firstUntold.File, firstUntold.Line, firstUntold.Column, $"and {(AreTooMany ? "at least " : "")}"
                     + $"{(count - MostToldOfAKind).ToString(CultureInfo.InvariantCulture)} more like it"
                     + (column.Length == 0 ? "" : $" in column {column}")
-                    + (_questions.TryGetValue(column, out var question) ? $"; {question}" : ""));
+                    + (_questions.TryGetValue(column, out var question) ? $"; {question}" : ""))
+                {
+                    Times = count - MostToldOfAKind,
+                });
     }
 
     [GeneratedRegex(@"'.*'|(?<![A-Za-z_])[+-]?\d[\d.e+-]*")]

@@ -8,7 +8,6 @@ internal static class ThicknessCheck
 {
     // Half a percent of chord: blade tables give thickness in percent, rounded.
     private const double Rounding = 0.005;
-    private const int FewestAngles = 3;
 
     /// <param name="set">Null where the set says nothing of its tables, or its file cannot be read, which is reported already.</param>
     /// <param name="hasFile">Whether there is a file.</param>
@@ -71,7 +70,7 @@ internal static class ThicknessCheck
         if (polars.Length == 0)
             return false;
         var (first, last) = (polars.Max(p => p.Angles[0]), polars.Min(p => p.Angles[^1]));
-        if (polars.SelectMany(p => p.Angles).Where(a => a >= first && a <= last).Distinct().Count() >= FewestAngles)
+        if (polars.SelectMany(p => p.Angles).Where(a => a >= first && a <= last).Distinct().Count() >= PolarLimits.FewestRows)
             return true;
         findings.Error(new Place(set.Input.File, 0, 0),
             "its tables have hardly an angle in common; coefficients can be interpolated in thickness only at angles that all of them reach");

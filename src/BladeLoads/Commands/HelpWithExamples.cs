@@ -65,6 +65,17 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads polar read t18.txt --out polars/lab/t18.csv --columns alpha=1,cl=2,cd=3,cm=5 --angles radians --reynolds 1.5e6", "one without a header"),
             ("bladeloads polar read t18.txt --out polars/lab/t18.csv --sweep rising --leave-out incomplete --lines 12-", "one with more than is wanted"),
         ],
+        ["polar extend"] =
+        [
+            ("bladeloads polar extend polars/lab --out polars/whole --blade blades/fell.csv", "every table of a set, by the aspect ratio of the blade"),
+            ("bladeloads polar extend polars/lab/t18.csv --out polars/whole --aspect-ratio 15.5 --join stall", "one table, into the folder of a set; what it has beyond stall is left out"),
+        ],
+        ["polar augment"] =
+        [
+            ("bladeloads polar augment polars/whole/t30.csv --out polars/root --method snel-1993 --chord-ratio 0.25 --radius-ratio 0.3", "one table, as it serves at 0.3 of the radius"),
+            ("bladeloads polar augment polars/whole --out polars/root --method du-selig-1998 --blade blades/fell.csv --radius 12.5 --tip-speed-ratio 7.5 --only t30",
+                "the same by another relation, with the chord of a blade; the other sections of the set are copied"),
+        ],
         ["polar scale"] =
         [
             ("bladeloads polar scale polars/clean --out polars/soiled --lift-slope 0.95 --largest-lift 0.9 --drag-floor 1.4", "a soiled set beside the clean one"),
@@ -84,6 +95,7 @@ internal sealed class HelpWithExamples(HelpAction usual) : SynchronousCommandLin
             ("bladeloads polar read t18.txt --out polars/lab/t18.csv", "a polar table from one that a laboratory sent"),
             ("bladeloads polar draw inputs/tarn-valley", "every table of a study on a page of its own"),
             ("bladeloads polar scale polars/clean --out polars/soiled --largest-lift 0.9 --drag-floor 1.5", "soiled blades from clean ones"),
+            ("bladeloads polar extend polars/lab --out polars/whole --blade blades/fell.csv", "tables from -180 to 180 degrees"),
             ("bladeloads polar read --help", "the options of a command"),
         ],
         [""] =

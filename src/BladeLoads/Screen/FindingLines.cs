@@ -36,8 +36,8 @@ internal static class FindingLines
     {
         var errors = study.Errors.IsEmpty
             ? "no errors"
-            : $"{Count.Of(study.Errors.Length, "error")} in {Count.Of(study.Errors.Select(e => e.File).Distinct().Count(), "file")}";
-        var doubts = study.Doubts.IsEmpty ? "" : $", {Count.Of(study.Doubts.Length, "doubt")}";
+            : $"{Count.Of(study.Errors, "error")} in {Count.Of(study.Errors.Select(e => e.File).Distinct().Count(), "file")}";
+        var doubts = study.Doubts.IsEmpty ? "" : $", {Count.Of(study.Doubts, "doubt")}";
         return Printable.Of($"{errors}{doubts}; {WhatRuns(study)}");
     }
 

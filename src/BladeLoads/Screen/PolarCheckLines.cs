@@ -132,7 +132,7 @@ internal static class PolarCheckLines
 
     private static string Closing(CheckedTables tables, Study? study, UseOfTables use)
     {
-        var errors = tables.Errors.IsEmpty ? "no errors" : Count.Of(tables.Errors.Length, "error");
+        var errors = tables.Errors.IsEmpty ? "no errors" : Count.Of(tables.Errors, "error");
         var closing = $"{errors}, {Count.Of(tables.Tables.Sum(table => table.Doubts.Length), "doubt")} in {Count.Of(tables.Tables.Length, "table")}";
         var left = new List<string>();
         if (study is { Rejected: { IsEmpty: false } rejected })

@@ -208,7 +208,8 @@ public sealed class PlanIndexTests : IDisposable
         Assert.False(Directory.Exists(Results.Study));
     }
 
-    private static TimeProvider Now => TimeProvider.System;
+    // Does not go on: however long a test takes, what it wrote was written just now.
+    private static TimeProvider Now { get; } = new StoppedClock(TimeProvider.System.GetUtcNow());
 
     // Long after everything that a test has written.
     private static TimeProvider Later { get; } = new InAnHour();
@@ -226,6 +227,11 @@ public sealed class PlanIndexTests : IDisposable
 
     private ImmutableArray<string>? Quick(TimeProvider time) => new StudyLook(Results, "0.0.0", 1, time).AllCurrent(Folder, _files) is { } all
         ? [.. all.Cases.Select(c => $"{c.Name}: {c.State.Word}")] : null;
+
+    private sealed class StoppedClock(DateTimeOffset now) : TimeProvider
+    {
+        public override DateTimeOffset GetUtcNow() => now;
+    }
 
     private sealed class InAnHour : TimeProvider
     {

@@ -26,6 +26,8 @@ public sealed partial class Reading_and_scaling_of_polars : IDisposable
 
     [Theory]
     [InlineData("read")]
+    [InlineData("extend")]
+    [InlineData("augment")]
     [InlineData("scale")]
     [InlineData("check")]
     [InlineData("draw")]

@@ -68,6 +68,18 @@ public sealed class Reading_a_foreign_table : IDisposable
     }
 
     [Fact]
+    public void An_augmented_table_stays_one_however_often_it_is_read()
+    {
+        File.WriteAllText(In("lab.txt"), "% augmented: snel-1993, c/r 0.2\r\n" + Lab);
+
+        Assert.Equal(0, Run("read", In("lab.txt"), "--out", In("t18.csv")).Code);
+        Assert.Equal(0, Run("read", In("t18.csv"), "--out", In("again.csv")).Code);
+
+        foreach (var name in new[] { "t18.csv", "again.csv" })
+            Assert.Equal("snel-1993, c/r 0.2", StoredPolars.FromBytes(name, File.ReadAllBytes(In(name)), out _)!.Augmented?.Text);
+    }
+
+    [Fact]
     public void A_preview_tells_and_writes_nothing()
     {
         File.WriteAllText(In("lab.txt"), "alpha cl cd\n" + string.Concat(Enumerable.Range(0, 20).Select(i => $"{i} 0.{i + 10} 0.01\n")));

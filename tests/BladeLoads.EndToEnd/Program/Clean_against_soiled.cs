@@ -48,6 +48,17 @@ public sealed class Clean_against_soiled : IDisposable
     }
 
     [Fact]
+    public void A_bluff_section_without_a_largest_lift_stays_as_it_is_and_says_so()
+    {
+        Set("bluff", "alpha_deg,cl,cd\n-30,-0.7,0.9\n0,0,0.4\n20,0.5,0.6\n40,0.8,1\n");
+
+        var text = Succeed("polar", "scale", "beck/polars/clean/bluff.csv", "--out", "soiled", "--largest-lift", "0.9").Out;
+
+        Assert.EndsWith("\nbluff.csv: all rows as they were, a bluff section without a largest lift up to 30 deg\nset: soiled\n", text, StringComparison.Ordinal);
+        Assert.Equal(Rows("beck/polars/clean/bluff.csv"), Rows("soiled/bluff.csv"));
+    }
+
+    [Fact]
     public void The_head_of_a_scaled_table_says_the_factors_and_keeps_what_it_said_before()
     {
         Set("t18", "# augmented: by someone\n# Fell tunnel\nreynolds,alpha_deg,cl,cd,cm\n1e6,-15,-0.5,0.1,0\n1e6,-10,-0.8,0.02,0.01\n1e6,0,0.2,0.01,-0.05\n1e6,10,1.2,0.02,-0.1\n1e6,20,0.7,0.25,-0.1\n1e6,40,0.9,0.8,-0.1\n");
@@ -170,6 +181,7 @@ public sealed class Clean_against_soiled : IDisposable
         Set("b", "");
         File.CreateSymbolicLink(In("beck/polars/clean/c.csv"), "/dev/zero");
         File.CreateSymbolicLink(In("beck/polars/clean/d.csv"), In("beck/polars/clean/d.csv"));
+        Set("e", "alpha_deg,cl,cd\n-10,-1,-0.01\n-5,-1,-0.02\n0,0.5,-0.03\n5,0.9,-4e-2\n10,1.1,-0.05\n");
 
         var error = Refuse("polar", "scale", "beck/polars/clean", "--out", "soiled", "--drag-floor", "2");
 
@@ -179,7 +191,11 @@ public sealed class Clean_against_soiled : IDisposable
             beck/polars/clean/b.csv: is empty
             beck/polars/clean/c.csv: is a link that leads out of the set; put the file itself into the folder
             beck/polars/clean/d.csv: is a link that leads round in a circle
-            5 errors; nothing written
+            beck/polars/clean/e.csv:2:8: cd is -0.01; drag coefficients must be >= 0
+            beck/polars/clean/e.csv:3:7: cd is -0.02; drag coefficients must be >= 0
+            beck/polars/clean/e.csv:4:7: cd is -0.03; drag coefficients must be >= 0
+            beck/polars/clean/e.csv:5:7: and 2 more like it in column cd
+            10 errors; nothing written
 
             """, error);
         Assert.Equal(["beck"], Names(""));

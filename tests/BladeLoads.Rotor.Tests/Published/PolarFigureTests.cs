@@ -32,6 +32,15 @@ public sealed class PolarFigureTests
         Is(1.011 / 0.0058, 5, figures.BestLiftToDrag);
     }
 
+    /// <summary>nrel5mw, appendix B: a cambered section, that lifts at 0 degrees: lowest lift -0.985 at -13 degrees, largest 1.442 at 10.</summary>
+    [Fact]
+    public void A_cambered_section_of_the_5_MW_turbine_has_its_lowest_lift_beyond_its_angle_of_zero_lift()
+    {
+        var figures = PolarFigures.Of(ReadPolar("nrel-5mw/polars/DU25_A17.csv"));
+        Is(1.442, 10, figures.LargestLift);
+        Is(-0.985, -13, figures.LowestLift);
+    }
+
     /// <summary>sheldahl-klimas1981: largest lift 0.8322 at 10 degrees. A symmetric section has no lift at zero angle.</summary>
     [Fact]
     public void The_NACA_0015_has_the_largest_lift_of_its_table_and_none_at_zero_angle()

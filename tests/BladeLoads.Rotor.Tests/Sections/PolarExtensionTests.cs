@@ -248,32 +248,4 @@ public sealed class PolarExtensionTests
             Assert.Equal((0, 0.008), At(augmented, 0));
         }
     }
-
-    [Fact]
-    public void Every_table_that_can_be_extended_goes_round_without_a_jump()
-    {
-        var random = new Random(20260501);
-        var extendedTables = 0;
-        for (var i = 0; i < 5000; i++)
-        {
-            var low = -180 * random.NextDouble() * random.NextDouble();
-            var high = 180 * random.NextDouble() * random.NextDouble();
-            double[] angles = [.. Enumerable.Range(0, random.Next(3, 40)).Select(_ => Rad(low + ((high - low) * random.NextDouble()))).Distinct().Order()];
-            if (angles.Length < 3)
-                continue;
-            var polar = Polar.FromRows(
-                random.Next(2) == 0 ? double.NaN : 1e6, angles, [.. angles.Select(_ => (random.NextDouble() * 3) - 1)], [.. angles.Select(_ => random.NextDouble())]);
-            if (!PolarExtension.CanExtend(polar))
-                continue;
-            extendedTables++;
-            var extended = PolarExtension.Extend(polar, 1 + (60 * random.NextDouble()), (ExtensionJoin)random.Next(2)).Polar;
-            Assert.Equal((-Math.PI, Math.PI), (extended.Angles[0], extended.Angles[^1]));
-            Assert.Equal((extended.Lift[0], extended.Drag[0]), (extended.Lift[^1], extended.Drag[^1]));
-            // Rows of the table may lie as near as they like; what is added keeps its distance.
-            for (var row = 1; row < extended.Angles.Length; row++)
-                if (!angles.Contains(extended.Angles[row]) && !angles.Contains(extended.Angles[row - 1]))
-                    Assert.True(extended.Angles[row] - extended.Angles[row - 1] > Rad(0.4));
-        }
-        Assert.True(extendedTables > 3000, $"only {extendedTables} tables");
-    }
 }

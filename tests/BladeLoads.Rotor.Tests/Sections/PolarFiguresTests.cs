@@ -63,4 +63,13 @@ public sealed class PolarFiguresTests
         Assert.Equal(12 * Degree, FirstLiftPeak.Of(Table((0, 0.2, 0.01), (4, 0.6, 0.01), (6, 0.585, 0.01), (12, 1.1, 0.02), (14, 1.0, 0.1))).Peak, 1e-12);
         Assert.Equal(4 * Degree, FirstLiftPeak.Of(Table((0, 0.2, 0.01), (4, 0.6, 0.01), (6, 0.57, 0.01), (12, 1.1, 0.02), (14, 1.0, 0.1))).Peak, 1e-12);
     }
+
+    [Fact]
+    public void A_little_lift_on_the_way_up_is_no_peak()
+    {
+        var round = FirstLiftPeak.Of(Table((-20, 0, 1.1), (-10, 0.004, 1.1), (20, 0, 1.1)));
+        Assert.Equal((double.PositiveInfinity, double.PositiveInfinity), round);
+        var cambered = FirstLiftPeak.Of(Table((-20, 0.01, 0.3), (-10, -0.8, 0.02), (-3, 0, 0.01), (12, 1.4, 0.03), (16, 1.1, 0.2)));
+        Assert.Equal((-3 * Degree, 12 * Degree), cambered);
+    }
 }

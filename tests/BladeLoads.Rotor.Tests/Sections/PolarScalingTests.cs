@@ -5,7 +5,7 @@ using BladeLoads.Rotor.Tests.Published;
 namespace BladeLoads.Rotor.Tests.Sections;
 
 /// <summary>
-/// Scaled polars. There is no source to check them against: the definition (docs/theory.md, 1.5) is common practice. What it says is worked
+/// Scaled polars. There is no source to check them against: the definition (docs/theory.md, 1.7) is common practice. What it says is worked
 /// out by hand below, and holds for the published tables of the tests and for random ones.
 /// </summary>
 public sealed class PolarScalingTests

@@ -54,6 +54,20 @@ public sealed class SectionFamilyTests
         Assert.Same(alone.Members[0].Section, alone.At(0.9));
     }
 
+    // Published tables have no drag at 180 degrees: the 3.4 MW reference rotor's (key iea-3.4-130 in docs/sources.md).
+    [Fact]
+    public void Rows_without_drag_stay_without()
+    {
+        Section Thin(double thickness) => Section.FromPolars("t", [Polar.FromRows(
+            1e6, [-Math.PI, -0.3, 0.1, 3, Math.PI], [0, -1, 0.4, 0.5, 0], [0, thickness, 0.01, 0.2 * thickness, 0])]);
+        foreach (var thickness in new[] { 0.19, 0.27, 0.35, 0.7 })
+        {
+            var polar = SectionFamily.Of(Thicknesses.Select(t => new FamilyMember(t, Thin(t)))).At(thickness).Polars[0];
+            Assert.All(polar.Drag, drag => Assert.True(drag >= 0));
+            Assert.Equal(0, polar.Drag[^1], 1e-12);
+        }
+    }
+
     [Fact]
     public void Two_members_are_blended_by_their_distance()
     {

@@ -27,6 +27,14 @@ public sealed class StallPointTests
     }
 
     [Fact]
+    public void Lift_of_the_other_sign_on_the_way_to_zero_lift_is_no_stall()
+    {
+        Assert.Equal(2, StallPoint.Below(Table((-18, -0.4), (-14, -0.5), (-11, -0.8), (-5, -0.2), (-2, 0.125), (0, 0.35))));
+        Assert.Equal(3, StallPoint.Above(Table((-2, -0.3), (0.5, -0.01), (5, 0.4), (12, 1.0), (18, 0.6))));
+        Assert.Null(StallPoint.Below(Table((-5, -0.2), (-2, 0.125), (0, 0.35))));
+    }
+
+    [Fact]
     public void Below_zero_the_lowest_lift_counts()
         => Assert.Equal(2, StallPoint.Below(Table((-40, -1.2), (-18, -0.5), (-12, -0.8), (-5, -0.4), (0, 0.1))));
 }

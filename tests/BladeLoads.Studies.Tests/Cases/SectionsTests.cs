@@ -143,7 +143,7 @@ public class SectionsTests
 
         Told.Exactly([], study.Errors);
         Told.Exactly(
-            ["polars/clean/tip.csv:2:1: lift still rises at the last angle, 10 deg; extended from there, the section stalls at that angle"], study.Doubts);
+            ["polars/clean/tip.csv:2:1: shows no stall up to the last angle, 10 deg; extended from there, the section stalls at that angle"], study.Doubts);
     }
 
     [Theory]

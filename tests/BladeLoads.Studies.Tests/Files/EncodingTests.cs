@@ -22,6 +22,19 @@ public class EncodingTests
     }
 
     [Theory, MemberData(nameof(TextFiles))]
+    public void A_sign_that_some_programs_end_lines_with_ends_none_within_a_comment(string file, string text)
+    {
+        var plain = new FellStudy().OnlyCase().Fingerprint;
+
+        Assert.Equal(plain, With(file, Encoding.UTF8.GetBytes("# page 1\u2028page 2\u0085\n" + text)).OnlyCase().Fingerprint);
+    }
+
+    [Fact]
+    public void A_form_feed_in_a_case_file_is_refused_as_TOML_has_none() => Told.Exactly(
+        ["cases/clean.toml:1:9: not TOML here: Invalid control character U+000C in comment; the line reads '# page 1\\u000Cpage 2'"],
+        With("cases/clean.toml", Encoding.UTF8.GetBytes("# page 1\fpage 2\n" + FellStudy.Case)).Read().Errors);
+
+    [Theory, MemberData(nameof(TextFiles))]
     public void Other_encodings_are_refused(string file, string text)
     {
         const string utf16 = "is UTF-16; save it as UTF-8", utf32 = "is UTF-32; save it as UTF-8";

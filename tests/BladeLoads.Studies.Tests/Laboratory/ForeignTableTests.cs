@@ -109,6 +109,51 @@ public class ForeignTableTests
     }
 
     [Fact]
+    public void The_record_says_nothing_of_signs_in_rows_that_are_not_taken()
+    {
+        Assert.DoesNotContain("converted: minus signs of typesetters to -", Foreign.Read(Small + "# \u22127;-0,5;0,01\n").Record);
+        Assert.Contains("converted: minus signs of typesetters to -", Foreign.Read(Small + "\u22127;-0,5;0,01\n").Record);
+    }
+
+    [Theory]
+    [InlineData("deg")]
+    [InlineData("rad")]
+    public void Whether_columns_are_exchanged_is_asked_by_angle_in_any_unit(string unit)
+    {
+        // A plate at every angle, with drag a little below 0 where it is small; and attached flow with lift under cd.
+        var circle = Enumerable.Range(-12, 25).Select(i =>
+        {
+            var (sin, cos) = Math.SinCos(double.DegreesToRadians(15 * i));
+            return (15.0 * i, 1.8 * sin * cos, Math.Abs(i) is <= 1 or >= 11 ? -0.001 : 1.3 * sin * sin);
+        });
+        var exchanged = Enumerable.Range(-10, 21).Select(i => ((double)i, 0.01, 0.1 * i));
+
+        Assert.Equal("and 4 more like it in column cd", LastError(circle));
+        Assert.Equal("and 7 more like it in column cd; are cl and cd exchanged?", LastError(exchanged));
+
+        string LastError(IEnumerable<(double AngleDeg, double Lift, double Drag)> rows)
+            => Foreign.Read($"alpha [{unit}] cl cd\n" + string.Concat(rows.Select(Line))).Errors[^1].Text;
+
+        string Line((double AngleDeg, double Lift, double Drag) row) => FormattableString.Invariant(
+            $"{(unit == "deg" ? row.AngleDeg : double.DegreesToRadians(row.AngleDeg))} {row.Lift} {row.Drag}\n");
+    }
+
+    [Theory]
+    [InlineData("0 3.1416", "the last digit of pi rounded up taken as 180 degrees")]
+    [InlineData("0 6.2832", "the last digit of 2 pi rounded up taken as 360 degrees; 1 angle beyond 180 degrees by a turn")]
+    [InlineData("3.142 -6.28319",
+        "the last digit of pi rounded up taken as 180 degrees; the last digit of 2 pi rounded up taken as 360 degrees; "
+        + "1 angle beyond 180 degrees by a turn")]
+    public void The_record_says_that_a_last_digit_was_taken_as_the_round_angle(string angles, string done)
+    {
+        var rows = string.Concat(angles.Split(' ').Select(angle => $"{angle} 0.1 0.01\n"));
+
+        Assert.Contains(
+            $"converted: angles from radians to degrees, 12 significant digits; {done}",
+            Foreign.Read($"alpha cl cd\n1 0.5 0.1\n2 0.5 1.1\n{rows}", "--angles radians --wrap --sweep all").Record);
+    }
+
+    [Fact]
     public void Many_lines_are_told_as_ranges()
     {
         var rows = string.Concat(Enumerable.Range(0, 40).Select(i => i % 3 == 0 || i > 30 ? $"{i} 0.1 0.01\n{i} 0.1 0.01\n" : $"{i} 0.1 0.01\n"));

@@ -62,6 +62,9 @@ internal sealed record SentTable(string[] Lines, bool[] IsRow, SentLayout Layout
         return [.. places];
     }
 
+    /// <summary>The same of those that a reader takes; drag of the wake and a remark stand behind them where there are more columns.</summary>
+    public IEnumerable<(int Start, int Length)> CellsTaken(int line) => CellsOf(line).SkipLast(Layout.HasMoreColumns ? 2 : 0);
+
     public byte[] Bytes() => BytesOf(string.Concat(Lines.Select(line => line + Layout.LineEnd)));
 
     public byte[] BytesOf(string text)

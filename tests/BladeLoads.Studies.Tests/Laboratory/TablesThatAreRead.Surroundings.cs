@@ -53,6 +53,31 @@ internal static partial class TablesThatAreRead
             """, """
             -5 -0.4 0.01 | 0 0.1 0.009 | 5 0.6 0.01
             """),
+        new("a row of another section behind a comment mark", "", """
+            section alpha cl cd
+            A -5 -0.4 0.01
+            A 0 0.1 0.009
+            A 5 0.6 0.01
+            # B 5 0.5 0.01
+
+            """, """
+            -5 -0.4 0.01 | 0 0.1 0.009 | 5 0.6 0.01
+            """),
+        new("a line of as many cells as a row, which names a Reynolds number, beside sections", "", """
+            Re = 750000
+            section alpha cl cd
+            A -5 -0.4 0.01
+            A 0 0.1 0.009
+            A 5 0.6 0.01
+            Re = 1500000 -
+            A -5 -0.5 0.01
+            A 0 0.1 0.009
+            A 5 0.7 0.01
+
+            """, """
+            750000: -5 -0.4 0.01 | 0 0.1 0.009 | 5 0.6 0.01
+            1500000: -5 -0.5 0.01 | 0 0.1 0.009 | 5 0.7 0.01
+            """),
         new("some lines of a file", "--lines 5-8", """
             -5;-0,4;0,1
             0;0,1;0,9

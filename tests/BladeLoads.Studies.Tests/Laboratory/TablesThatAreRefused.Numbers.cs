@@ -21,7 +21,17 @@ internal static partial class TablesThatAreRefused
             10,1,1
 
             """, """
-            lab.txt:2:1: commas stand here and no decimal point anywhere, so that they may separate columns or be decimal signs; say --decimal point where they separate, or save the table with semicolons
+            lab.txt:2:1: commas stand here and no row has a decimal point, so that they may separate columns or be decimal signs; say --decimal point where they separate, or save the table with semicolons
+            """),
+        new("whole numbers between commas, a decimal point behind a comment mark alone", "", """
+            alpha,cl,cd
+            -10,0,1
+            0,1,0
+            10,1,1
+            # 20,0.5,1
+
+            """, """
+            lab.txt:2:1: commas stand here and no row has a decimal point, so that they may separate columns or be decimal signs; say --decimal point where they separate, or save the table with semicolons
             """),
         new("one decimal point among commas", "", """
             alpha;cl;cd

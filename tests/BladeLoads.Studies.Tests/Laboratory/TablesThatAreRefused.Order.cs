@@ -32,6 +32,29 @@ internal static partial class TablesThatAreRefused
             alpha cl cd
             0 0.1 0.009
             10 0.9 0.02
+            20 1.0 0.05
+            10 0.6 0.04
+            0 0.11 0.009
+            10 0.92 0.02
+            20 1.02 0.05
+
+            """, """
+            lab.txt:2: --sweep mean takes two sweeps, one of rising and one of falling angles, and there are others; choose rows with --lines
+            """),
+        new("no mean of two rising sweeps", "--sweep mean", """
+            alpha cl cd
+            0 0.1 0.009
+            10 0.9 0.02
+            0 0.2 0.009
+            10 0.8 0.02
+
+            """, """
+            lab.txt:2: --sweep mean takes two sweeps, one of rising and one of falling angles, and there are others; choose rows with --lines
+            """),
+        new("one angle, two values, about a row that is there twice", "--sweep mean", """
+            alpha cl cd
+            0 0.1 0.009
+            10 0.9 0.02
             0 0.1 0.009
             10 0.8 0.02
 

@@ -118,6 +118,33 @@ internal static partial class TablesThatAreRefused
             lab.txt:4:1: alpha is 350; angles go from -180 to 180 degrees; where they go round from 0 to 360, say --wrap
             lab.txt:5:1: alpha is 400; angles go from -180 to 180 degrees
             """),
+        new("angles beyond -180 degrees", "", """
+            alpha cl cd
+            -350 0.8 0.02
+            -90 -0.1 1.8
+            0 0.1 0.009
+
+            """, """
+            lab.txt:2:1: alpha is -350; angles go from -180 to 180 degrees; where they go round from 0 to -360, say --wrap
+            """),
+        new("radians to 2 pi, rounded up, that nothing says go round", "--angles radians", """
+            alpha cl cd
+            0 0.1 0.009
+            3.1416 -0.1 0.03
+            6.2832 0.1 0.009
+
+            """, """
+            lab.txt:4:1: alpha is 6.2832 rad, 360.000841837 deg; angles go from -180 to 180 degrees; where they go round from 0 to 360, say --wrap
+            """),
+        new("a step of radians beyond 2 pi, not the last digit of it", "--angles radians --wrap", """
+            alpha cl cd
+            0 0.1 0.009
+            3.1 -0.1 0.03
+            6.3 0.1 0.009
+
+            """, """
+            lab.txt:4:1: alpha is 6.3 rad, 360.963410932 deg; angles go from -180 to 180 degrees
+            """),
         new("another unit in a row of units than in the header", "", """
             alpha (deg);cl;cd
             rad;-;-

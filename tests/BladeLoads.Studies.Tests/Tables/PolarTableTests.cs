@@ -47,6 +47,8 @@ public class PolarTableTests
 
     [Theory]
     [InlineData(Tip, "10,1.1,0.015", "10,1.1,-0.01", "4:8: cd is -0.01; drag coefficients must be >= 0")]
+    [InlineData(Tip, "10,1.1,0.015", "10,110,0.015", "4:4: cl is 110, and no section has a coefficient beyond 20; a decimal sign, a unit or a column is wrong")]
+    [InlineData(Tip, "10,1.1,0.015", "10,1.1,1e300", "4:8: cd is 1e300, and no section has a coefficient beyond 20; a decimal sign, a unit or a column is wrong")]
     [InlineData(Tip, "10,1.1,0.015", "10,1.1,-1e-300", "4:8: cd is -1e-300; drag coefficients must be >= 0")]
     [InlineData(Tip, "10,1.1,0.015", "10,x,0.015", "4:4: cl is 'x'; give a number, such as 0.8")]
     [InlineData(Tip, "10,1.1,0.015,-0.05", "10,1.1,0.015,", "4:14: cm is empty; give a number")]

@@ -12,7 +12,7 @@ namespace BladeLoads.Batch.Plan.Index;
 /// <summary>The file of the index: everything in it, and then its length and bytes summed up, so that a cut or changed file is known for one.</summary>
 internal static class IndexFile
 {
-    private const string Form = "bladeloads plan index 1";
+    private const string Form = "bladeloads plan index 2";
     private const long Largest = 1 << 30;
     private const int ChecksumBytes = 4;
 
@@ -74,6 +74,7 @@ internal static class IndexFile
                 writer.Write(doubt.Line);
                 writer.Write(doubt.Column);
                 writer.Write(doubt.Text);
+                writer.Write(doubt.Times);
             }
             WriteResults(writer, index.Results);
         }
@@ -92,7 +93,7 @@ internal static class IndexFile
             var reader = new IndexReader(bytes.AsMemory(0, length));
             return reader.Text() != Form ? null : new PlanIndex(
                 reader.Text(), reader.Whole(), ReadSight(reader), reader.Many(r => new IndexedCase(r.Text(), r.Text(), r.Text())),
-                reader.Many(r => new InputFinding(r.Text(), r.Whole(), r.Whole(), r.Text())), ReadResults(reader));
+                reader.Many(r => new InputFinding(r.Text(), r.Whole(), r.Whole(), r.Text()) { Times = r.Whole() }), ReadResults(reader));
         }
         catch (Exception e) when (e is ArgumentException or IndexOutOfRangeException)
         {

@@ -10,7 +10,7 @@ internal static class PolarCommand
         "Checks, makes, changes and draws polar tables: lift and drag of blade sections. What is read stays as it is; what is written says in its "
         + "head how it was made.")
     {
-        PolarReadCommand.Define(surroundings), PolarCheckCommand.Define(surroundings), PolarScaleCommand.Define(surroundings),
-        PolarDrawCommand.Define(surroundings),
+        PolarReadCommand.Define(surroundings), PolarCheckCommand.Define(surroundings), PolarExtendCommand.Define(surroundings),
+        PolarAugmentCommand.Define(surroundings), PolarScaleCommand.Define(surroundings), PolarDrawCommand.Define(surroundings),
     };
 }

@@ -86,7 +86,7 @@ internal static class PolarDrawCommand
         var (pages, errors) = StudyPages.Of(study, asked.Only, surroundings.Solve);
         FindingLines.Write(errors, [], study.Folder, surroundings.Error, surroundings.ErrorIsTerminal);
         if (!errors.IsEmpty)
-            surroundings.Error.WriteLine($"{Count.Of(errors.Length, "error")} in tables that changed just now; their pages are not drawn");
+            surroundings.Error.WriteLine($"{Count.Of(errors, "error")} in tables that changed just now; their pages are not drawn");
         // Shown as the user gave it.
         var folder = new ResultsFolder(asked.Results, study.Name).Pictures;
         return (pages, folder, study.Errors.IsEmpty && errors.IsEmpty);
@@ -99,7 +99,7 @@ internal static class PolarDrawCommand
         if (set is null)
         {
             FindingLines.Write(errors, [], "", surroundings.Error, surroundings.ErrorIsTerminal);
-            surroundings.Error.WriteLine($"{Count.Of(errors.Length, "error")}; nothing drawn");
+            surroundings.Error.WriteLine($"{Count.Of(errors, "error")}; nothing drawn");
             return ([], UsualFolder, false);
         }
         asked.Only.Check(set.Tables.Select(table => table.SectionName));

@@ -21,7 +21,10 @@ internal static class PolarReadCommand
 
     public static Command Define(Surroundings surroundings)
     {
-        var file = new Argument<string>("file") { Description = "the table: text with a header or with column numbers, however its columns are separated" };
+        var file = new Argument<string>("file")
+        {
+            Description = "the table: text with a header or with column numbers, however its columns are separated",
+        };
         var path = new Option<string?>("--out") { Description = "the table that is made, <section>.csv", HelpName = "table.csv" };
         var columns = ColumnsOption.Define();
         var angles = WordOption.Define<AngleUnit>("--angles", "unit of the angle of attack, where the table does not say");
@@ -33,7 +36,11 @@ internal static class PolarReadCommand
             HelpName = "number",
             CustomParser = ParseReynolds,
         };
-        var comment = new Option<string?>("--comment") { Description = "how lines begin that are no part of the table, besides # % ! and //", HelpName = "sign" };
+        var comment = new Option<string?>("--comment")
+        {
+            Description = "how lines begin that are no part of the table, besides # % ! and //",
+            HelpName = "sign",
+        };
         var lines = new Option<LineRange?>("--lines")
         {
             Description = "the lines that hold the table, 12-48 or 12-; the others are not looked at",
@@ -48,7 +55,10 @@ internal static class PolarReadCommand
             HelpName = $"{Incomplete}|{NegativeDrag}",
         };
         leaveOut.AcceptOnlyFromAmong(Incomplete, NegativeDrag);
-        var wrap = new Option<bool>("--wrap") { Description = "angles go round from 0 to 360 degrees: those beyond 180 stand for 360 less" };
+        var wrap = new Option<bool>("--wrap")
+        {
+            Description = "angles go round from 0 to 360 degrees, or to -360: those beyond 180 stand for 360 less, beyond -180 for 360 more",
+        };
         var replace = new Option<bool>("--replace") { Description = "put the table in the place of a file that is there" };
         var preview = new Option<bool>("--preview") { Description = "tell what would be done and show some rows; write nothing" };
         var command = new Command(
@@ -92,10 +102,13 @@ internal static class PolarReadCommand
         FindingLines.Write(table.Errors, table.Doubts, "", surroundings.Error, surroundings.ErrorIsTerminal);
         if (!table.Errors.IsEmpty)
         {
-            surroundings.Error.WriteLine($"{Count.Of(table.Errors.Length, "error")}; nothing written");
+            surroundings.Error.WriteLine($"{Count.Of(table.Errors, "error")}; nothing written");
             return ExitCode.NothingCouldRun;
         }
-        ImmutableArray<string> record = [$"read by bladeloads {CommandLine.ToolVersion} from {Path.GetFileName(file)} (SHA-256 {table.Sha256})", .. table.Record];
+        ImmutableArray<string> record =
+        [
+            $"read by bladeloads {CommandLine.ToolVersion} from {Path.GetFileName(file)} (SHA-256 {table.Sha256})", .. table.Record,
+        ];
         var bytes = PolarTableWriter.Write(record, table.Polars);
         CheckThatItReadsBack(path ?? "preview.csv", bytes, table.Polars);
         if (!preview && !place!.Write(bytes, surroundings))
@@ -116,13 +129,20 @@ internal static class PolarReadCommand
         if (StoredPolars.FromBytes(path, bytes, out var errors) is not { } stored)
             throw new InvalidOperationException($"a table that was read cannot be read again: {errors[0].Text}");
         if (stored.Polars.Length != polars.Length
-            || !stored.Polars.Zip(polars).All(pair => pair.First.Reynolds.Equals(pair.Second.Reynolds) && pair.First.Rows.SequenceEqual(pair.Second.Rows)))
+            || !stored.Polars.Zip(polars).All(pair
+                => pair.First.Reynolds.Equals(pair.Second.Reynolds) && pair.First.Rows.SequenceEqual(pair.Second.Rows)))
             throw new InvalidOperationException("a table that was read has other values when it is read again");
     }
 
-    private static string InWords(PolarRows polar) => string.Create(
-        CultureInfo.InvariantCulture,
-        $"{Count.Of(polar.Rows.Length, "row")}{(double.IsNaN(polar.Reynolds) ? "" : $" at Reynolds number {polar.Reynolds.ToString("0.######e0", CultureInfo.InvariantCulture)}")}, {polar.Rows[0].AngleDeg} to {polar.Rows[^1].AngleDeg} deg");
+    private static string InWords(PolarRows polar)
+    {
+        var reynolds = double.IsNaN(polar.Reynolds)
+            ? ""
+            : $" at Reynolds number {polar.Reynolds.ToString("0.######e0", CultureInfo.InvariantCulture)}";
+        return string.Create(
+            CultureInfo.InvariantCulture,
+            $"{Count.Of(polar.Rows.Length, "row")}{reynolds}, {polar.Rows[0].AngleDeg} to {polar.Rows[^1].AngleDeg} deg");
+    }
 
     private static void WriteRows(byte[] bytes, TextWriter output)
     {
@@ -134,16 +154,22 @@ internal static class PolarReadCommand
                 output.WriteLine("...");
     }
 
-    private static string? CommentSign(string? text) => text is null || text.Trim().Length > 0 && !char.IsAsciiDigit(text.Trim()[0]) && text.Trim() is not ("-" or "+" or "." or ",")
-        ? text?.Trim()
-        : throw new WrongUseException($"--comment is '{text}'; give the sign or the word that such lines begin with, no number and no sign of one");
+    private static string? CommentSign(string? text)
+    {
+        var sign = text?.Trim();
+        return sign is null || sign.Length > 0 && !char.IsAsciiDigit(sign[0]) && sign is not ("-" or "+" or "." or ",")
+            ? sign
+            : throw new WrongUseException(
+                $"--comment is '{text}'; give the sign or the word that such lines begin with, no number and no sign of one");
+    }
 
     private static double? ParseReynolds(ArgumentResult argument)
     {
         var text = argument.Tokens.Count == 1 ? argument.Tokens[0].Value : "";
-        if (double.TryParse(text, NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent, CultureInfo.InvariantCulture, out var number) && number is >= 1e4 and <= 1e9)
+        const NumberStyles style = NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
+        if (double.TryParse(text, style, CultureInfo.InvariantCulture, out var number) && PolarLimits.IsReynoldsOfABlade(number))
             return number;
-        argument.AddError($"--reynolds is '{Printable.Of(text)}'; give a number from 1e4 to 1e9: 1.5e6");
+        argument.AddError($"--reynolds is '{Printable.Of(text)}'; give a number from {PolarLimits.ReynoldsInWords}: 1.5e6");
         return null;
     }
 

@@ -10,18 +10,20 @@ internal static class WordOption
     /// <summary>The words are those of the values, in small letters.</summary>
     public static Option<T?> Define<T>(string name, string description)
         where T : struct, Enum
-    {
-        var words = Enum.GetValues<T>().ToDictionary(value => value.ToString().ToLowerInvariant(), value => value, StringComparer.Ordinal);
-        return new Option<T?>(name)
+        => Define(
+            name, description, Enum.GetValues<T>().ToDictionary(value => value.ToString().ToLowerInvariant(), value => value, StringComparer.Ordinal));
+
+    /// <param name="words">What each word means.</param>
+    public static Option<T?> Define<T>(string name, string description, IReadOnlyDictionary<string, T> words)
+        where T : struct => new(name)
         {
             Description = description,
             HelpName = string.Join('|', words.Keys),
             CustomParser = argument => Parse(argument, name, words),
         };
-    }
 
-    private static T? Parse<T>(ArgumentResult argument, string name, Dictionary<string, T> words)
-        where T : struct, Enum
+    private static T? Parse<T>(ArgumentResult argument, string name, IReadOnlyDictionary<string, T> words)
+        where T : struct
     {
         var text = argument.Tokens.Count == 1 ? argument.Tokens[0].Value : "";
         if (words.TryGetValue(text, out var value))
