@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Batch.Plan;
 
@@ -25,12 +26,11 @@ public sealed record RowChange(string What, int Rows, double From, double To, Im
     /// <summary><c>Reynolds number 3e6</c>, <c>Reynolds numbers 3e6, 1.5e7</c>, <c>12 Reynolds numbers from 1e6 to 1.5e7</c>.</summary>
     internal static string Numbers(ImmutableArray<double> reynolds) => reynolds switch
     {
-        [var only] => $"Reynolds number {Reynold(only)}",
-        { Length: <= MostListed } => $"Reynolds numbers {string.Join(", ", reynolds.Select(Reynold))}",
-        _ => string.Create(CultureInfo.InvariantCulture, $"{reynolds.Length} Reynolds numbers from {Reynold(reynolds[0])} to {Reynold(reynolds[^1])}"),
+        [var only] => $"Reynolds number {ReynoldsNumber.Text(only)}",
+        { Length: <= MostListed } => $"Reynolds numbers {string.Join(", ", reynolds.Select(ReynoldsNumber.Text))}",
+        _ => string.Create(CultureInfo.InvariantCulture,
+            $"{reynolds.Length} Reynolds numbers from {ReynoldsNumber.Text(reynolds[0])} to {ReynoldsNumber.Text(reynolds[^1])}"),
     };
-
-    private static string Reynold(double value) => value.ToString("0.######e0", CultureInfo.InvariantCulture);
 
     private static string Text(double value) => value.ToString(CultureInfo.InvariantCulture);
 }

@@ -76,7 +76,9 @@ public sealed record UseOfTables(
         var length = rotor.Blade.TipRadius - rotor.Blade.HubRadius;
         var elements = BladeElements.Of(rotor.Blade, rotor.Model.Elements, rotor.Model.Spacing)
             .Select(element => SectionShares.Of(element, rotor.Sections)
-                .Select(share => (Use: UseOf(files[share.Section]), Share: share.Share * element.Length / length)).Where(x => x.Use is not null).ToArray()).ToArray();
+                .Select(share => (Use: UseOf(files[share.Section]), Share: share.Share * element.Length / length))
+                .Where(x => x.Use is not null).ToArray())
+            .ToArray();
         foreach (var point in curve.Points)
             if (point.Operation.RotorSpeed > 0)
                 for (var i = 0; i < point.Elements.Length; i++)

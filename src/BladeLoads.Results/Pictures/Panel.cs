@@ -30,7 +30,7 @@ internal sealed record PanelAxis(string Label, double From, double To)
     /// <summary>Angles of attack, with numbers at whole multiples that suit the range.</summary>
     public static PanelAxis Angles(double fromDeg, double toDeg)
     {
-        var every = (toDeg - fromDeg) switch { <= 60 => 5, <= 150 => 15, _ => 45 };
+        var every = (toDeg - fromDeg) switch { <= 60 => 5, <= 100 => 10, <= 150 => 15, _ => 45 };
         var ticks = Enumerable.Range(-180 / every, (360 / every) + 1).Select(i => i * every)
             .Where(deg => deg >= fromDeg - 1e-9 && deg <= toDeg + 1e-9)
             .Select(deg => ((double)deg, deg.ToString(CultureInfo.InvariantCulture))).ToImmutableArray();

@@ -29,6 +29,8 @@ internal sealed class PolarPage
         "Broad pale lines: before, in the colour of their Reynolds number where the tables still have it. Change: now less before, at each angle.";
 
     private const string AboutRings = "Red rings: rows in doubt.";
+    private const string AboutFewerRings =
+        "Red rings: rows in doubt; in the two diagrams of all angles only those at -20 deg and below, or at 30 deg and above.";
     private const string AboutShade = "Shaded: the angles at which blades work, from 5 to 95 % of what works in this table.";
 
     private static readonly SKColor Ink = new(0x20, 0x20, 0x20);
@@ -48,7 +50,7 @@ internal sealed class PolarPage
         [
             AboutLines,
             .. picture.Earlier is null ? (string[])[] : [AboutEarlier],
-            .. picture.Ringed.IsEmpty ? (string[])[] : [AboutRings],
+            .. picture.Ringed.IsEmpty ? (string[])[] : [_panels.WholeLift is null ? AboutRings : AboutFewerRings],
             .. picture.Shaded is null ? (string[])[] : [AboutShade],
         ];
         Title = Fit(picture.Title, TitleSize, bold: true);

@@ -14,6 +14,7 @@ internal sealed record PolarPanels(
     private const double WorkingFrom = -20 * Math.PI / 180;
     private const double WorkingTo = 30 * Math.PI / 180;
 
+    private const double Slack = 1e-9;             // rad
     private const double LogarithmicFrom = 8;      // largest over least drag
     private const double LiftOverDragReach = 5;    // largest drag shown over the least one
     private const double NarrowestLift = 0.2;
@@ -64,19 +65,23 @@ internal sealed record PolarPanels(
         (double, double)? shade = picture.Shaded is var (from, to) ? (double.RadiansToDegrees(from), double.RadiansToDegrees(to)) : null;
         return this with
         {
-            Lift = OverAngle(Lift, OfLift),
-            Drag = OverAngle(Drag, Drag.Up.IsLogarithmic ? OfLogDrag : OfDrag),
-            LiftToDrag = OverAngle(LiftToDrag, OfRatio),
-            LiftOverDrag = LiftOverDrag with { Rings = Rings((angle, c) => angle is >= WorkingFrom and <= WorkingTo ? (c.Drag, c.Lift) : (double.NaN, 0)) },
-            WholeLift = WholeLift is { } lift ? OverAngle(lift, OfLift) : null,
-            WholeDrag = WholeDrag is { } drag ? OverAngle(drag, OfDrag) : null,
+            Lift = OverAngle(Lift, OfLift, _ => true),
+            Drag = OverAngle(Drag, Drag.Up.IsLogarithmic ? OfLogDrag : OfDrag, _ => true),
+            LiftToDrag = OverAngle(LiftToDrag, OfRatio, _ => true),
+            LiftOverDrag = LiftOverDrag with { Rings = Rings(angle => angle is >= WorkingFrom and <= WorkingTo, (_, c) => (c.Drag, c.Lift)) },
+            WholeLift = WholeLift is { } lift ? OverAngle(lift, OfLift, IsBeyond) : null,
+            WholeDrag = WholeDrag is { } drag ? OverAngle(drag, OfDrag, IsBeyond) : null,
         };
 
-        Panel OverAngle(Panel panel, Func<Coefficients, double> value)
-            => panel with { Shade = shade, Rings = Rings((angle, c) => (double.RadiansToDegrees(angle), value(c))) };
+        Panel OverAngle(Panel panel, Func<Coefficients, double> value, Func<double, bool> isRinged)
+            => panel with { Shade = shade, Rings = Rings(isRinged, (angle, c) => (double.RadiansToDegrees(angle), value(c))) };
 
-        ImmutableArray<(double, double)> Rings(Func<double, Coefficients, (double, double)> at)
-            => [.. picture.Ringed.Select(r => at(r.Polar.Angles[r.Row], new Coefficients(r.Polar.Lift[r.Row], r.Polar.Drag[r.Row])))];
+        // Within the working range the rows stand so close there that rings would cover each other, and another diagram shows them.
+        static bool IsBeyond(double angle) => angle is <= WorkingFrom + Slack or >= WorkingTo - Slack;
+
+        ImmutableArray<(double, double)> Rings(Func<double, bool> isRinged, Func<double, Coefficients, (double, double)> at)
+            => [.. picture.Ringed.Where(r => isRinged(r.Polar.Angles[r.Row]))
+                .Select(r => at(r.Polar.Angles[r.Row], new Coefficients(r.Polar.Lift[r.Row], r.Polar.Drag[r.Row])))];
     }
 
     private static Panel Over(PanelAxis angles, ImmutableArray<Curve> curves, Func<IEnumerable<double>, PanelAxis> axis)

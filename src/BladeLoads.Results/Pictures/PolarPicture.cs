@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
 using BladeLoads.Rotor.Sections;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Results.Pictures;
 
@@ -36,7 +37,7 @@ public sealed record PolarPicture(string Title, ImmutableArray<string> Notes, Im
     public PolarPicture Over(Section earlier, string name) => this with { Earlier = new EarlierTables(earlier, name) };
 
     internal static string ReynoldsText(double reynolds)
-        => double.IsNaN(reynolds) ? "any" : reynolds.ToString("0.######e0", CultureInfo.InvariantCulture);
+        => double.IsNaN(reynolds) ? "any" : ReynoldsNumber.Text(reynolds);
 
     private static string Contents(Section section)
     {

@@ -13,20 +13,18 @@ public static class CheckedPicture
     private const string Ending = ".svg";
 
     /// <summary>The SVG files of all tables: <c>SET~SECTION.svg</c>, or <c>SECTION.svg</c> where all are of one set.</summary>
-    /// <param name="tables">One or more.</param>
     /// <param name="use">By the file of the table.</param>
-    public static ImmutableArray<ResultContent> Files(CheckedTables tables, IReadOnlyDictionary<string, TableUse> use)
-    {
-        var names = new TableNames(tables);
-        return [.. tables.Tables.Select(table => new ResultContent(
-            names.FileNameOf(table.File) + Ending, PictureFile.Svg(Of(table, use.GetValueOrDefault(table.File)))))];
-    }
+    public static ImmutableArray<ResultContent> Files(CheckedTables tables, IReadOnlyDictionary<string, TableUse> use, TableNames names)
+        => [.. tables.Tables.Select(table => new ResultContent(
+            names.FileNameOf(table.File) + Ending,
+            PictureFile.Svg(Of(table, use.GetValueOrDefault(table.File), names.SetOf(table.File)))))];
 
     /// <param name="use">Null for a table that nothing uses.</param>
-    public static PolarPicture Of(CheckedTable table, TableUse? use)
+    /// <param name="set">The name of the set of the table.</param>
+    public static PolarPicture Of(CheckedTable table, TableUse? use, string set)
     {
         var polars = table.Table.Section.Polars;
-        var picture = PolarPicture.Of(table.Table.Section, SetOf(table), table.File);
+        var picture = PolarPicture.Of(table.Table.Section, set, table.File);
         return picture with
         {
             Notes = [.. picture.Notes, .. Told(table, use)],
@@ -40,20 +38,16 @@ public static class CheckedPicture
 
     private static IEnumerable<string> Told(CheckedTable table, TableUse? use)
     {
-        var all = KindOfDoubt.Of(table, use).OrderByDescending(kind => use is null ? 0 : FirstToLookAt.ShareOf(kind.First, use)).Select(Line).ToList();
+        var all = KindOfDoubt.Of(table, use)
+            .OrderByDescending(kind => use is null ? 0 : FirstToLookAt.ShareOf(kind.First, use)).Select(Line).ToList();
         return all.Count <= DoubtsTold + 1 ? all
             : all.Take(DoubtsTold).Append(string.Create(CultureInfo.InvariantCulture, $"and {all.Count - DoubtsTold} more kinds of doubt"));
     }
 
-    // What was found, without what would do.
     private static string Line(KindOfDoubt kind)
     {
-        var (doubt, finding) = (kind.First, kind.First.Finding);
-        var found = finding.Text.AsSpan().IndexOfAny(';', ':') is > 0 and var end ? finding.Text[..end] : finding.Text;
         var others = kind.OtherLines.IsEmpty ? "" : string.Create(CultureInfo.InvariantCulture, $"; likewise {kind.OtherLines.Length} more");
-        return string.Create(CultureInfo.InvariantCulture, $"line {finding.Line}, {doubt.Kind}: {found}{others}");
+        return string.Create(
+            CultureInfo.InvariantCulture, $"line {kind.First.Finding.Line}, {kind.First.Kind}: {kind.First.Found}{others}");
     }
-
-    private static string SetOf(CheckedTable table)
-        => Path.GetFileName(Path.GetDirectoryName(Path.GetFullPath(table.File))) is { Length: > 0 } folder ? folder : "polars";
 }

@@ -11,7 +11,7 @@ public sealed record KindOfDoubt(PolarDoubt First, ImmutableArray<int> OtherLine
     /// <summary>All doubts of a table, in the order of the lines of those that stand for their kind.</summary>
     /// <param name="use">Null for a table that nothing uses.</param>
     public static ImmutableArray<KindOfDoubt> Of(CheckedTable table, TableUse? use)
-        => [.. table.Doubts.GroupBy(doubt => (doubt.Kind, Column: doubt.Finding.Text.Split(' ')[0])).Select(kind =>
+        => [.. table.Doubts.GroupBy(doubt => (doubt.Kind, doubt.Column)).Select(kind =>
         {
             var first = use is null ? kind.First() : kind.MaxBy(doubt => FirstToLookAt.ShareOf(doubt, use))!;
             return new KindOfDoubt(first, [.. kind.Where(doubt => doubt != first).Select(doubt => doubt.Finding.Line).Distinct()]);

@@ -120,8 +120,9 @@ public sealed class PolarReport
             yield return use.TryGetValue(table.File, out var u)
                 ?
                 [
-                    table.File, u.Blades / whole, Tenths(u.AngleDegBelow(0.05)), Tenths(u.AngleDegBelow(0.95)), lowest, highest, u.OutsideAngles, u.BeyondPeak,
-                    ThreeDigits(u.ReynoldsBelow(0.05)), ThreeDigits(u.ReynoldsBelow(0.95)), polars[0].Reynolds, polars[^1].Reynolds, u.OutsideReynolds, u.SeveralBalances,
+                    table.File, u.Blades / whole, Tenths(u.AngleDegBelow(0.05)), Tenths(u.AngleDegBelow(0.95)), lowest, highest,
+                    u.OutsideAngles, u.BeyondPeak, ThreeDigits(u.ReynoldsBelow(0.05)), ThreeDigits(u.ReynoldsBelow(0.95)),
+                    polars[0].Reynolds, polars[^1].Reynolds, u.OutsideReynolds, u.SeveralBalances,
                 ]
                 : [table.File, 0.0, null, null, lowest, highest, null, null, null, null, polars[0].Reynolds, polars[^1].Reynolds, null, null];
         }

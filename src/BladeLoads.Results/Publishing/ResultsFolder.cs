@@ -3,8 +3,8 @@ using BladeLoads.Results.Tables;
 
 namespace BladeLoads.Results.Publishing;
 
-/// <summary>Where the results of a study lie. Absolute paths; nothing is created by asking.</summary>
-/// <param name="Root">The folder that <c>--results</c> names, absolute.</param>
+/// <summary>Where the results of a study lie. Absolute paths, but where they are only shown; nothing is created by asking.</summary>
+/// <param name="Root">The folder that <c>--results</c> names: absolute, or as the user gave it, for paths to be shown.</param>
 /// <param name="StudyName">The name of the study, safe as a folder name.</param>
 public sealed record ResultsFolder(string Root, string StudyName)
 {

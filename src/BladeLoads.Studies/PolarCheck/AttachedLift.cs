@@ -29,16 +29,18 @@ internal static class AttachedLift
             var row = polar.RowNear(zeroLift);
             if (zeroLift > HighestZeroLift)
                 yield return polar.Doubt(DoubtKinds.ZeroLiftAngle, "cl", [row], zeroLift - 4, zeroLift + 4,
-                    $"lift is 0 at {Found(zeroLift)} deg, so the section lifts downwards at 0 deg; blade sections lift upwards there: is a sign "
-                    + "turned?");
+                    $"lift is 0 at {Found(zeroLift)} deg, so the section lifts downwards at 0 deg",
+                    "; blade sections lift upwards there: is a sign turned?");
             if (zeroLift < LowestZeroLift)
                 yield return polar.Doubt(DoubtKinds.ZeroLiftAngle, "cl", [row], zeroLift - 4, zeroLift + 4,
-                    $"lift is 0 at {Found(zeroLift)} deg; of blade sections it is between {Given(LowestZeroLift)} and 0 deg: are the angles shifted?");
+                    $"lift is 0 at {Found(zeroLift)} deg",
+                    $"; of blade sections it is between {Given(LowestZeroLift)} and 0 deg: are the angles shifted?");
             var ratio = figures.SlopeRatio!.Value;
             if (ratio is < LeastSlope or > LargestSlope)
                 yield return polar.Doubt(DoubtKinds.LiftSlope, "cl", [row], zeroLift - 4, zeroLift + 4,
-                    $"lift rises by {Found(attached.LiftSlope)} a radian about {Found(zeroLift)} deg, {Found(ratio)} of 2 pi; slender sections have "
-                    + $"{Given(LeastSlope)} to {Given(LargestSlope)} of it: is lift there scattered, augmented, or in another unit?");
+                    $"lift rises by {Found(attached.LiftSlope)} a radian about {Found(zeroLift)} deg, {Found(ratio)} of 2 pi",
+                    $"; slender sections have {Given(LeastSlope)} to {Given(LargestSlope)} of it: is lift there scattered, augmented, or in another "
+                    + "unit?");
         }
         foreach (var doubt in OfLargestLift(polar))
             yield return doubt;
@@ -51,14 +53,17 @@ internal static class AttachedLift
         var angle = polar.Rows[largest.Row].AngleDeg;
         if (largest.AtEnd)
             yield return polar.Doubt(DoubtKinds.EndsBeforeStall, "cl", [largest.Row], angle, 180,
-                $"the rows end at {Given(angle)} deg, before stall; measure on, or extend the table, which then rests on a guess");
+                $"the rows end at {Given(angle)} deg, before stall",
+                "; measure on, or extend the table, which then rests on a guess");
         else if (largest.Value is < LeastOfLargest or > LargestOfLargest)
             yield return polar.Doubt(DoubtKinds.LargestLift, "cl", [largest.Row], angle - 2, angle + 2,
-                $"the largest lift is {Given(largest.Value)}, at {Given(angle)} deg; slender sections reach {Given(LeastOfLargest)} to "
-                + $"{Given(LargestOfLargest)}: is it in another unit, or of a section with a flap?");
+                $"the largest lift is {Given(largest.Value)}, at {Given(angle)} deg",
+                $"; slender sections reach {Given(LeastOfLargest)} to {Given(LargestOfLargest)}: is it in another unit, or of a section with a "
+                + "flap?");
         if (!largest.AtEnd && angle < EarliestStall)
             yield return polar.Doubt(DoubtKinds.LargestLift, "cl", [largest.Row], angle, angle + 10,
-                $"the largest lift is at {Given(angle)} deg; slender sections stall beyond {Given(EarliestStall)} deg: are the angles in another unit?");
+                $"the largest lift is at {Given(angle)} deg",
+                $"; slender sections stall beyond {Given(EarliestStall)} deg: are the angles in another unit?");
     }
 
     private static PolarDoubt? FallsAboutZero(CheckedPolar polar)
@@ -66,6 +71,7 @@ internal static class AttachedLift
         if (polar.At(-Falls) is not { Lift: var before } || polar.At(Falls) is not { Lift: var after } || after > before - ByMuch)
             return null;
         return polar.Doubt(DoubtKinds.SignOfLift, "cl", [polar.RowNear(0)], -180, 180,
-            $"cl falls from {Found(before)} at {Given(-Falls)} deg to {Found(after)} at {Given(Falls)} deg; is the sign of cl or of alpha_deg turned?");
+            $"cl falls from {Found(before)} at {Given(-Falls)} deg to {Found(after)} at {Given(Falls)} deg",
+            "; is the sign of cl or of alpha_deg turned?");
     }
 }

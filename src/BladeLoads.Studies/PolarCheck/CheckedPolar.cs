@@ -13,11 +13,12 @@ internal sealed class CheckedPolar
     private readonly ImmutableArray<int> _lines;
 
     /// <param name="index">Which of the table's Reynolds numbers.</param>
-    public CheckedPolar(StoredPolars table, int index, CellPlaces places)
+    /// <param name="figures">Of that Reynolds number.</param>
+    public CheckedPolar(StoredPolars table, int index, PolarFigures figures, CellPlaces places)
     {
         (Index, _places, _lines) = (index, places, table.RowLines[index]);
         (Rows, Polar) = (table.Polars[index].Rows, table.Section.Polars[index]);
-        Figures = PolarFigures.Of(Polar);
+        Figures = figures;
     }
 
     public int Index { get; }
@@ -30,9 +31,7 @@ internal sealed class CheckedPolar
 
     public double Reynolds => Polar.Reynolds;
 
-    public string ReynoldsText => ReynoldsNumber(Reynolds);
-
-    public static string ReynoldsNumber(double reynolds) => reynolds.ToString("0.######e0", CultureInfo.InvariantCulture);
+    public string ReynoldsText => ReynoldsNumber.Text(Reynolds);
 
     /// <summary>A number as it stands in the table.</summary>
     public static string Given(double value) => CanonicalText.Of(value);
@@ -65,14 +64,23 @@ internal sealed class CheckedPolar
     /// <param name="kind">A few words.</param>
     /// <param name="column">Name of the column.</param>
     /// <param name="rows">What it is about; told at the first.</param>
-    public PolarDoubt Doubt(string kind, string column, IEnumerable<int> rows, double fromDeg, double toDeg, string text)
+    /// <param name="found">What was found: the beginning of its sentence.</param>
+    /// <param name="further">The rest of the sentence: what is expected, and what would do.</param>
+    public PolarDoubt Doubt(
+        string kind, string column, IEnumerable<int> rows, double fromDeg, double toDeg, string found, string further)
     {
         var all = rows.ToImmutableArray();
-        return new PolarDoubt(kind, _places.Finding(_lines[all[0]], column, text), Index, fromDeg, toDeg, all);
+        return new PolarDoubt(kind, column, _places.Finding(_lines[all[0]], column, found + further), Index, fromDeg, toDeg, all)
+        {
+            Found = found,
+        };
     }
 
     /// <summary>A doubt about what lies between two rows, which are both part of it; told at the second.</summary>
-    public PolarDoubt DoubtBetween(string kind, string column, int first, int last, string text) => new(
-        kind, _places.Finding(_lines[last], column, text), Index, Rows[first].AngleDeg, Rows[last].AngleDeg,
-        [.. Enumerable.Range(first, last - first + 1)]);
+    public PolarDoubt DoubtBetween(string kind, string column, int first, int last, string found, string further) => new(
+        kind, column, _places.Finding(_lines[last], column, found + further), Index, Rows[first].AngleDeg, Rows[last].AngleDeg,
+        [.. Enumerable.Range(first, last - first + 1)])
+    {
+        Found = found,
+    };
 }

@@ -1,4 +1,5 @@
 using BladeLoads.Rotor.Sections;
+using BladeLoads.Studies.Tables;
 using static BladeLoads.Studies.PolarCheck.CheckedPolar;
 
 namespace BladeLoads.Studies.PolarCheck;
@@ -15,9 +16,13 @@ internal static class DragFloor
         var reynolds = isOpen ? LargestReynolds : polar.Reynolds;
         var floor = PlateFriction.Laminar(reynolds);
         for (var i = 0; i < polar.Rows.Length; i++)
+        {
+            var (before, after) = (Math.Max(0, i - 1), Math.Min(i + 1, polar.Rows.Length - 1));
             if (polar.Rows[i].Drag < floor * Rounding)
-                yield return polar.Doubt(DoubtKinds.DragBelowPlate, "cd", [i], polar.Rows[Math.Max(0, i - 1)].AngleDeg, polar.Rows[Math.Min(i + 1, polar.Rows.Length - 1)].AngleDeg,
+                yield return polar.Doubt(DoubtKinds.DragBelowPlate, "cd", [i], polar.Rows[before].AngleDeg, polar.Rows[after].AngleDeg,
                     $"cd is {Given(polar.Rows[i].Drag)}, and a laminar plate has {Found(floor)} {(isOpen ? "even " : "")}at Reynolds number "
-                    + $"{ReynoldsNumber(reynolds)}; drag of pressure alone, or a slip?");
+                    + ReynoldsNumber.Text(reynolds),
+                    "; drag of pressure alone, or a slip?");
+        }
     }
 }

@@ -19,6 +19,7 @@ internal static class ExchangedCoefficients
         if (last.Drag - first.Drag > RiseOfLift && largest < LittleDrag)
             yield return polar.Doubt(DoubtKinds.ExchangedColumns, "cl", rows, -180, 180,
                 $"cd rises from {Given(first.Drag)} at {Given(first.AngleDeg)} deg to {Given(last.Drag)} at {Given(last.AngleDeg)} deg, and "
-                + $"cl is {Found(largest)} at most; are cl and cd exchanged?");
+                + $"cl is {Found(largest)} at most",
+                "; are cl and cd exchanged?");
     }
 }

@@ -34,8 +34,9 @@ internal static class Jumps
 
     private static PolarDoubt Jump(CheckedPolar polar, int row, string column, double from, double to)
         => polar.DoubtBetween(DoubtKinds.Jump, column, row - 1, row,
-            $"{column} jumps from {Given(from)} to {Given(to)} between {Given(polar.Rows[row - 1].AngleDeg)} and {Given(polar.Rows[row].AngleDeg)} deg "
-            + $"{polar.RowToRow(row - 1, row)}; give rows between them, or mend the slip");
+            $"{column} jumps from {Given(from)} to {Given(to)} between {Given(polar.Rows[row - 1].AngleDeg)} and "
+            + $"{Given(polar.Rows[row].AngleDeg)} deg {polar.RowToRow(row - 1, row)}",
+            "; give rows between them, or mend the slip");
 
     private static double Apart(CheckedPolar polar, int first, int second) => polar.Rows[second].AngleDeg - polar.Rows[first].AngleDeg;
 }

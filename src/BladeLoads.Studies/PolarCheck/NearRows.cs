@@ -14,7 +14,8 @@ internal static class NearRows
             if (AreOne(polar, i - 1, i))
                 yield return polar.DoubtBetween(DoubtKinds.OneAngleTwice, "alpha_deg", i - 1, i,
                     $"alpha_deg {Given(polar.Rows[i - 1].AngleDeg)} and {Given(polar.Rows[i].AngleDeg)} are hardly two angles "
-                    + $"{polar.RowToRow(i - 1, i)}; keep one of them, or their mean");
+                    + polar.RowToRow(i - 1, i),
+                    "; keep one of them, or their mean");
     }
 
     public static bool AreOne(CheckedPolar polar, int first, int second)

@@ -11,24 +11,24 @@ internal static class RepeatedRows
     private const double MuchDrag = 0.1;    // attached drag is flat; this is not attached
     private const double SomeLift = 0.05;
 
+    private const string OfAnInstrument = ": the limit of an instrument? Measure there, or leave all but the first out";
+
     public static IEnumerable<PolarDoubt> Doubts(CheckedPolar polar)
     {
         if (polar.Figures.IsBluff)
             yield break;
         foreach (var (first, last) in Runs(polar, (a, b) => a.Lift == b.Lift && a.Drag == b.Drag))
             yield return polar.DoubtBetween(DoubtKinds.RepeatedRows, "cl", first, last,
-                $"cl and cd are {Given(polar.Rows[last].Lift)} and {Given(polar.Rows[last].Drag)} {Running(polar, first, last)}: copied? Measure there, "
-                + "or leave all but the first out");
+                $"cl and cd are {Given(polar.Rows[last].Lift)} and {Given(polar.Rows[last].Drag)} {Running(polar, first, last)}",
+                ": copied? Measure there, or leave all but the first out");
         foreach (var (first, last) in Runs(polar, (a, b) => a.Drag == b.Drag && a.Drag > MuchDrag && a.Lift != b.Lift))
             if (last - first >= 2 && SpanOf(polar, first, last) >= Span)
                 yield return polar.DoubtBetween(DoubtKinds.RepeatedRows, "cd", first, last,
-                    $"cd is {Given(polar.Rows[last].Drag)} {Running(polar, first, last)}: the limit of an instrument? Measure there, or leave all but "
-                    + "the first out");
+                    $"cd is {Given(polar.Rows[last].Drag)} {Running(polar, first, last)}", OfAnInstrument);
         foreach (var (first, last) in Runs(polar, (a, b) => a.Lift == b.Lift && Math.Abs(a.Lift) > SomeLift && a.Drag != b.Drag))
             if (last - first >= 3 && SpanOf(polar, first, last) >= Span)
                 yield return polar.DoubtBetween(DoubtKinds.RepeatedRows, "cl", first, last,
-                    $"cl is {Given(polar.Rows[last].Lift)} {Running(polar, first, last)}: the limit of an instrument? Measure there, or leave all but "
-                    + "the first out");
+                    $"cl is {Given(polar.Rows[last].Lift)} {Running(polar, first, last)}", OfAnInstrument);
     }
 
     private static string Running(CheckedPolar polar, int first, int last)

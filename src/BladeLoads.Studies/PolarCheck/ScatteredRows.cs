@@ -34,15 +34,18 @@ internal static class ScatteredRows
         var off = looked.Select(i => (Row: i, By: offBy(polar, i))).Where(x => x.By is not null).ToArray();
         if (off.Length > Math.Max(3, Many * looked.Length))
         {
-            yield return polar.Doubt(DoubtKinds.Scatter, column, off.Select(x => x.Row), polar.Rows[off[0].Row].AngleDeg, polar.Rows[off[^1].Row].AngleDeg,
+            yield return polar.Doubt(
+                DoubtKinds.Scatter, column, off.Select(x => x.Row), polar.Rows[off[0].Row].AngleDeg, polar.Rows[off[^1].Row].AngleDeg,
                 $"{column} scatters: {off.Length} of {looked.Length} rows from {Given(polar.Rows[looked[0]].AngleDeg)} to "
-                + $"{Given(polar.Rows[looked[^1]].AngleDeg)} deg lie off the line of their neighbours; smooth the table");
+                + $"{Given(polar.Rows[looked[^1]].AngleDeg)} deg lie off the line of their neighbours",
+                "; smooth the table");
             yield break;
         }
         foreach (var (row, by) in off)
             yield return polar.Doubt(DoubtKinds.Scatter, column, [row], polar.Rows[row - 1].AngleDeg, polar.Rows[row + 1].AngleDeg,
                 $"{column} is {Given(value(polar.Rows[row]))} at {Given(polar.Rows[row].AngleDeg)} deg, {Found(Math.Abs(by!.Value))} "
-                + $"{(by > 0 ? "above" : "below")} the line of its neighbours; compare it with the source, or leave the row out");
+                + $"{(by > 0 ? "above" : "below")} the line of its neighbours",
+                "; compare it with the source, or leave the row out");
     }
 
     private static double? OffLiftBy(CheckedPolar polar, int row) => Off(polar, row, r => r.Lift, _ => OffLift);
@@ -61,7 +64,8 @@ internal static class ScatteredRows
             return value(from) + ((value(to) - value(from)) * (x - from.AngleDeg) / (to.AngleDeg - from.AngleDeg));
         }
         var between = Line(row - 1, row + 1);
-        double[] off = [value(polar.Rows[row]) - between, value(polar.Rows[row]) - Line(row - 2, row - 1), value(polar.Rows[row]) - Line(row + 1, row + 2)];
+        var here = value(polar.Rows[row]);
+        double[] off = [here - between, here - Line(row - 2, row - 1), here - Line(row + 1, row + 2)];
         if (!off.All(x => x > 0) && !off.All(x => x < 0))
             return null;
         var least = off.MinBy(Math.Abs);

@@ -26,8 +26,8 @@ internal static class SharpStall
                 continue;
             yield return polar.DoubtBetween(DoubtKinds.SharpStall, "cl", first, last,
                 $"cl falls from {Given(polar.Rows[first].Lift)} to {Given(polar.Rows[last].Lift)} between {Given(polar.Rows[first].AngleDeg)} and "
-                + $"{Given(polar.Rows[last].AngleDeg)} deg, by up to {Found(steepest)} a degree {polar.RowToRow(first, last)}: a sharp stall, in "
-                + "which several balances are likely; expect loads to jump there");
+                + $"{Given(polar.Rows[last].AngleDeg)} deg, by up to {Found(steepest)} a degree {polar.RowToRow(first, last)}",
+                ": a sharp stall, in which several balances are likely; expect loads to jump there");
         }
     }
 
@@ -38,7 +38,8 @@ internal static class SharpStall
     // From the row before it.
     private static bool IsSteep(CheckedPolar polar, int row)
         => row >= 1 && row < polar.Rows.Length && !polar.Figures.IsBluff && !NearRows.AreOne(polar, row - 1, row)
-            && ((polar.Rows[row - 1] is { AngleDeg: > 0 and < Farthest, Lift: > 0 }) || (polar.Rows[row] is { AngleDeg: < 0 and > -Farthest, Lift: < 0 }))
+            && (polar.Rows[row - 1] is { AngleDeg: > 0 and < Farthest, Lift: > 0 }
+                || polar.Rows[row] is { AngleDeg: < 0 and > -Farthest, Lift: < 0 })
             && -Secant(polar, row) > Steep;
 
     private static double Secant(CheckedPolar polar, int row)

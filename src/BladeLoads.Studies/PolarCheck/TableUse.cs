@@ -109,8 +109,9 @@ public sealed class TableUse
             for (var fine = bin; fine < bin + AnglesPerDegree; fine++)
                 counted += At(-1, fine);
             if (counted > 0)
-                yield return new UseBin(-180 + ((double)bin / AnglesPerDegree), -180 + ((double)(bin + AnglesPerDegree) / AnglesPerDegree), Share(counted));
+                yield return new UseBin(Edge(bin), Edge(bin + AnglesPerDegree), Share(counted));
         }
+        static double Edge(int bin) => -180 + ((double)bin / AnglesPerDegree);
     }
 
     /// <summary>Shares by Reynolds number: ten bins a decade, those in which there is any. They make 1.</summary>

@@ -119,7 +119,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             rows.Error("reynolds",
                 $"reynolds is {CanonicalText.Of(reynolds)}; Reynolds numbers of blades are 1e4 and more, three million is 3e6");
         else if (blocks.Any(block => block.Reynolds == reynolds))
-            rows.Error("reynolds", $"reynolds returns to {Reynolds(reynolds)}; keep the rows of one Reynolds number together");
+            rows.Error("reynolds", $"reynolds returns to {ReynoldsNumber.Text(reynolds)}; keep the rows of one Reynolds number together");
         else if (blocks.Count > 0 && reynolds < blocks[^1].Reynolds)
             rows.Error("reynolds", Rising.Problem("reynolds",
                 (blocks[^1].Reynolds, blocks[^1].LastLine), reynolds, rows.Line, "Reynolds numbers must rise"));
@@ -131,7 +131,7 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
             rows.Error(new Place(file, 0, 0), "has no row; a polar needs three or more");
         foreach (var block in blocks.Where(block => block.Rows < PolarLimits.FewestRows))
         {
-            var of = double.IsNaN(block.Reynolds) ? "the table" : $"Reynolds number {Reynolds(block.Reynolds)}";
+            var of = double.IsNaN(block.Reynolds) ? "the table" : $"Reynolds number {ReynoldsNumber.Text(block.Reynolds)}";
             rows.Error(block.At, $"{of} has {(block.Rows == 1 ? "one row" : "two rows")}; a polar needs three or more");
         }
         if (rows.HasErrors)
@@ -172,15 +172,13 @@ internal sealed record PolarTable(Section? Section, CanonicalTable Canonical, In
         var reynolds = blocks switch
         {
             [{ Reynolds: double.NaN }] => "no Reynolds number",
-            [var only] => $"Reynolds number {Reynolds(only.Reynolds)}",
+            [var only] => $"Reynolds number {ReynoldsNumber.Text(only.Reynolds)}",
             _ => string.Create(CultureInfo.InvariantCulture,
-                $"{blocks.Count} Reynolds numbers from {Reynolds(blocks[0].Reynolds)} to {Reynolds(blocks[^1].Reynolds)}"),
+                $"{blocks.Count} Reynolds numbers from {ReynoldsNumber.Text(blocks[0].Reynolds)} to {ReynoldsNumber.Text(blocks[^1].Reynolds)}"),
         };
         var (lowest, highest) = (CanonicalText.Of(blocks.Min(b => b.Angles[0])), CanonicalText.Of(blocks.Max(b => b.Angles[^1])));
         return string.Create(CultureInfo.InvariantCulture, $"{reynolds}, {rowCount} rows, {lowest} to {highest} deg");
     }
-
-    private static string Reynolds(double value) => value.ToString("0.######e0", CultureInfo.InvariantCulture);
 
     /// <summary>The rows of one Reynolds number.</summary>
     private sealed class Block(double reynolds, Place at)

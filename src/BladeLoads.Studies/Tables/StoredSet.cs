@@ -19,12 +19,14 @@ public sealed record StoredSet(ImmutableArray<StoredPolars> Tables, ReadOnlyMemo
     /// <summary>Reads every table of a folder; null, with all that is wrong, where one cannot be read or there is none.</summary>
     /// <param name="path">Of the folder, as the user wrote it; findings name its files so.</param>
     public static StoredSet? Read(string path, IStudyFiles files, out ImmutableArray<InputFinding> errors)
-        => ReadSound(Path.GetFullPath(path), path, files, out errors) is var sound && errors.IsEmpty ? sound : null;
+        => ReadSound(Path.GetFullPath(path), path, files, out errors, _ => false) is var sound && errors.IsEmpty ? sound : null;
 
     /// <summary>Reads every table of a folder, and gives those that can be read, with what is wrong with the others.</summary>
     /// <param name="folder">Absolute.</param>
     /// <param name="shown">As findings name the folder.</param>
-    public static StoredSet ReadSound(string folder, string shown, IStudyFiles files, out ImmutableArray<InputFinding> errors)
+    /// <param name="isOther">Whether a file of this name is known to be something else than a table of the set.</param>
+    public static StoredSet ReadSound(
+        string folder, string shown, IStudyFiles files, out ImmutableArray<InputFinding> errors, Func<string, bool> isOther)
     {
         var found = new List<InputFinding>();
         var tables = ImmutableArray.CreateBuilder<StoredPolars>();
@@ -33,7 +35,9 @@ public sealed record StoredSet(ImmutableArray<StoredPolars> Tables, ReadOnlyMemo
         foreach (var name in NamesIn(folder, shown, files, found).Order(StringComparer.Ordinal))
         {
             var file = Path.Join(shown, name);
-            if (IsTable(name) && !LeadsOut(folder, name, file, files, found))
+            if (isOther(name))
+                others.Add(name);
+            else if (IsTable(name) && !LeadsOut(folder, name, file, files, found))
             {
                 if (StoredPolars.Read(Path.Join(folder, name), file, files, out var wrong) is { } table)
                     tables.Add(table);
@@ -58,7 +62,8 @@ public sealed record StoredSet(ImmutableArray<StoredPolars> Tables, ReadOnlyMemo
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
-            found.Add(new InputFinding(shown, 0, 0, e is UnauthorizedAccessException ? "cannot be read: no permission" : $"cannot be read: {e.Message}"));
+            var reason = e is UnauthorizedAccessException ? "no permission" : e.Message;
+            found.Add(new InputFinding(shown, 0, 0, $"cannot be read: {reason}"));
             return [];
         }
     }

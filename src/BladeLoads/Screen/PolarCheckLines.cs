@@ -19,17 +19,18 @@ internal static class PolarCheckLines
 
     /// <param name="study">Null where tables were checked by themselves.</param>
     /// <param name="folder">Where the report was written; null for nowhere.</param>
-    public static void Write(CheckedTables tables, UseOfTables use, Study? study, string? folder, Surroundings surroundings)
+    public static void Write(
+        CheckedTables tables, UseOfTables use, TableNames names, Study? study, string? folder, Surroundings surroundings)
     {
         var output = surroundings.Out;
         FindingLines.Write(tables.Errors, [], study?.Folder ?? "", output, withSource: surroundings.OutIsTerminal);
         var doubts = tables.Tables.SelectMany(table => KindOfDoubt.Of(table, use.ByFile.GetValueOrDefault(table.File)).Select(Finding)).ToList();
         FindingLines.Write([], [.. doubts.Take(DoubtsShown)], "", output, withSource: false);
         if (doubts.Count > DoubtsShown)
-            output.WriteLine($"... and {Count.Of(doubts.Count - DoubtsShown, "more doubt")}{(folder is null ? "; --out <folder> writes all" : " in polar-doubts.csv")}");
+            output.WriteLine($"... and {Count.Of(doubts.Count - DoubtsShown, "more doubt")}"
+                + (folder is null ? "; --out <folder> writes all" : " in polar-doubts.csv"));
         if (!tables.Tables.IsEmpty)
         {
-            var names = new TableNames(tables);
             WriteFigures(tables, use, names, output);
             if (study is not null)
                 WriteUse(tables, use, names, output);
@@ -65,7 +66,8 @@ internal static class PolarCheckLines
                 var (polar, figures) = (table.Table.Section.Polars[i], table.Figures[i]);
                 text.Add(
                     [
-                        Printable.Of(names.Of(table.File)), Reynolds(polar.Reynolds), Text(figures.SlopeRatio, "0.00"), Degrees(figures.Attached?.ZeroLiftAngle),
+                        Printable.Of(names.Of(table.File)), Reynolds(polar.Reynolds), Text(figures.SlopeRatio, "0.00"),
+                        Degrees(figures.Attached?.ZeroLiftAngle),
                         Text(figures.LargestLift?.Value, "0.000"), Degrees(figures.LargestLift?.Angle), Text(figures.BestLiftToDrag?.Value, "0.0"),
                         Degrees(figures.BestLiftToDrag?.Angle), Text(figures.LeastDrag?.Value, "0.0000"), Degrees(figures.LeastDrag?.Angle),
                         Text(Floor(PlateFriction.Laminar(polar.Reynolds)), "0.0000"), Text(Floor(PlateFriction.Turbulent(polar.Reynolds)), "0.0000"),
@@ -74,7 +76,8 @@ internal static class PolarCheckLines
             }
         text.Write(output);
         if (!isShort && tables.Tables.Any(table => table.Figures.Length > 1))
-            output.WriteLine(use.ByFile.Count > 0 ? "each table at the Reynolds number used most" : "each table at the middle one of its Reynolds numbers");
+            output.WriteLine(
+                $"each table at the {(use.ByFile.Count > 0 ? "Reynolds number used most" : "middle one of its Reynolds numbers")}");
     }
 
     private static void WriteUse(CheckedTables tables, UseOfTables use, TableNames names, TextWriter output)
@@ -92,9 +95,10 @@ internal static class PolarCheckLines
             if (use.ByFile.TryGetValue(table.File, out var u))
                 text.Add(
                 [
-                    Printable.Of(names.Of(table.File)), Percent(u.Blades / whole), $"{Text(u.AngleDegBelow(0.05), "0.0")} to {Text(u.AngleDegBelow(0.95), "0.0")}", angles,
-                    Percent(u.OutsideAngles), Percent(u.BeyondPeak), $"{Reynolds(u.ReynoldsBelow(0.05), "0.0e0")} to {Reynolds(u.ReynoldsBelow(0.95), "0.0e0")}",
-                    reynolds, Percent(u.OutsideReynolds),
+                    Printable.Of(names.Of(table.File)), Percent(u.Blades / whole),
+                    $"{Text(u.AngleDegBelow(0.05), "0.0")} to {Text(u.AngleDegBelow(0.95), "0.0")}", angles, Percent(u.OutsideAngles),
+                    Percent(u.BeyondPeak), $"{Reynolds(u.ReynoldsBelow(0.05), "0.0e0")} to {Reynolds(u.ReynoldsBelow(0.95), "0.0e0")}", reynolds,
+                    Percent(u.OutsideReynolds),
                 ]);
             else
                 text.Add([Printable.Of(names.Of(table.File)), "-", "-", angles, "-", "-", "-", reynolds, "-"], "not used");
@@ -113,7 +117,7 @@ internal static class PolarCheckLines
         }
         output.WriteLine("look first at, with the share of all blades at work there:");
         foreach (var first in all.Take(PrioritiesShown))
-            output.WriteLine(Printable.Of($"  {Percent(first.Share),4} %  {names.Of(first.File)}: {first.Kind}{Where(first)}"));
+            output.WriteLine(Printable.Of($"  {Percent(first.Share),5} %  {names.Of(first.File)}: {first.Kind}{Where(first)}"));
         if (all.Length > PrioritiesShown)
             output.WriteLine($"  and {Count.Of(all.Length - PrioritiesShown, "other")} of less");
     }
@@ -130,9 +134,12 @@ internal static class PolarCheckLines
     {
         var errors = tables.Errors.IsEmpty ? "no errors" : Count.Of(tables.Errors, "error");
         var closing = $"{errors}, {Count.Of(tables.Tables.Sum(table => table.Doubts.Length), "doubt")} in {Count.Of(tables.Tables.Length, "table")}";
-        return study is not null && study.Rejected.Length + use.Failed.Length is > 0 and var left
-            ? $"{closing}; {Count.Of(left, "case")} left out, which 'bladeloads check' tells about"
-            : closing;
+        var left = new List<string>();
+        if (study is { Rejected: { IsEmpty: false } rejected })
+            left.Add($"{Count.Of(rejected.Length, "case")} with errors");
+        if (!use.Failed.IsEmpty)
+            left.Add($"{Count.Of(use.Failed.Length, "case")} that failed in solving");
+        return left.Count == 0 ? closing : $"{closing}; left out: {string.Join(", ", left)}";
     }
 
     private static int MostUsed(CheckedTable table, UseOfTables use)
@@ -150,6 +157,10 @@ internal static class PolarCheckLines
 
     // -0.0 reads as a slip.
     private static string Text(double? value, string format)
-        => value is { } number && double.IsFinite(number) ? (number.ToString(format, CultureInfo.InvariantCulture) is var text && text.Trim('-', '0', '.').Length == 0
-            ? text.TrimStart('-') : text) : "-";
+    {
+        if (value is not { } number || !double.IsFinite(number))
+            return "-";
+        var text = number.ToString(format, CultureInfo.InvariantCulture);
+        return text.Trim('-', '0', '.').Length == 0 ? text.TrimStart('-') : text;
+    }
 }

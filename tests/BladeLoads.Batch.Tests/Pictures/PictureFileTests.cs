@@ -24,6 +24,15 @@ public sealed class PictureFileTests
         Assert.Equal("Section fell-21, set clean", page.Title);
     }
 
+    [Fact]
+    public void A_range_a_little_wider_than_sixty_degrees_has_numbers_every_ten()
+    {
+        var section = Section.FromPolars("fell-21", [Sections.Lifting(1e6, fromDeg: -20.2, toDeg: 55)]);
+        var words = Page(PolarPicture.Of(section, "clean", "fell-21.csv")).Words;
+        Assert.Contains("50", words);
+        Assert.DoesNotContain("45", words);
+    }
+
     // Without a font the plotting library draws no text and says nothing of it: this is how it would be noticed.
     [Fact]
     public void Every_text_of_the_svg_has_ink_in_the_png()

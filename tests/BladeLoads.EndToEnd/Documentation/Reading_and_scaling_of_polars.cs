@@ -29,13 +29,16 @@ public sealed partial class Reading_and_scaling_of_polars : IDisposable
     [InlineData("extend")]
     [InlineData("augment")]
     [InlineData("scale")]
+    [InlineData("check")]
+    [InlineData("draw")]
     public void The_page_names_every_option_of_the_command_and_no_other(string command)
     {
         var help = Started.Run(_folder.Path, "polar", command, "--help").Out;
         var options = Option().Matches(help[..help.IndexOf("Examples:", StringComparison.Ordinal)]).Select(match => match.Value).Except(["--help"]).Order(StringComparer.Ordinal).Distinct();
 
         var page = string.Join("\n", Repository.Lines("docs/formats.md"));
-        var section = page[page.IndexOf($"### polar {command}\n", StringComparison.Ordinal)..];
+        var heading = command switch { "check" => "Report on polar tables", "draw" => "Pictures", _ => $"polar {command}" };
+        var section = page[page.IndexOf($"### {heading}\n", StringComparison.Ordinal)..];
         section = section[..section.IndexOf("\n##", 4, StringComparison.Ordinal)];
 
         Assert.Equal(options, Option().Matches(section).Select(match => match.Value).Order(StringComparer.Ordinal).Distinct());

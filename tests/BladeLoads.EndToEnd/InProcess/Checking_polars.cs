@@ -150,6 +150,54 @@ public sealed class Checking_polars : IDisposable
     }
 
     [Fact]
+    public void A_case_file_beside_its_tables_is_checked_under_the_name_of_its_folder()
+    {
+        Alone("clean.toml", "");
+        var (code, text, error) = Run("polar", "check", Path.Join(_folder.Path, "alone", "clean.toml"), "--results", Results);
+        Assert.True(code == 0, text + error);
+        // The blade's own table stands there too, and is none of the set's.
+        Assert.DoesNotContain("blade.csv", text, StringComparison.Ordinal);
+        Assert.Contains("\nlook first at, with the share of all blades at work there:\n", text, StringComparison.Ordinal);
+        Assert.Contains(">Section tip, set alone<", File.ReadAllText(Path.Join(Results, "alone", "polars", "tip.svg")), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Of_a_set_and_of_a_table_the_sections_named_are_checked()
+    {
+        _studies.Write("example/polars/clean/spare.csv", "alpha_deg,cl,cd\n-10,0,0.1\n0,0,-0.1\n10,0,0.1\n");
+        var set = _studies.PathOf("example/polars/clean");
+        var (code, text, error) = Run("polar", "check", set, "--only", "ro*");
+        Assert.Equal((0, ""), (code, error));
+        Assert.DoesNotContain("fell-21", text, StringComparison.Ordinal);
+        Assert.EndsWith("\nno errors, no doubts in 1 table\n", text.Replace("0 doubts", "no doubts", StringComparison.Ordinal), StringComparison.Ordinal);
+        (code, text, _) = Run("polar", "check", set, "--only", "sp*", "--only", "ro*");
+        Assert.Equal(1, code);
+        Assert.EndsWith("\n1 error, 0 doubts in 1 table\n", text, StringComparison.Ordinal);
+        Assert.Equal((2, "", "no section matches 'x*', 'y'; there are fell-21, round, spare\n"), Run("polar", "check", set, "--only", "x*", "--only", "y"));
+        Assert.Equal((2, "", "no section matches 'x*'; there are round\n"), Run("polar", "check", Path.Join(set, "round.csv"), "--only", "x*"));
+        Assert.Equal(0, Run("polar", "check", Path.Join(set, "round.csv"), "--only", "round").Code);
+    }
+
+    [Fact]
+    public void Cases_with_errors_are_said_to_be_left_out()
+    {
+        Alone("clean.toml", "");
+        Alone("cases/clean.toml", "");
+        Alone("cases/wrong.toml", "colour = 3\n");
+        var (code, text, _) = Run("polar", "check", Path.Join(_folder.Path, "alone"), "--results", Results);
+        Assert.Equal(1, code);
+        Assert.Contains("\n1 error, 4 doubts in 1 table; left out: 1 case with errors\n", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void The_report_is_told_by_the_path_that_was_given()
+    {
+        var relative = Path.GetRelativePath(Directory.GetCurrentDirectory(), Results);
+        var text = Run("polar", "check", _studies.PathOf("example"), "--results", relative, "--only", "fixed-speed").Out;
+        Assert.EndsWith($"\nreport: {Path.Join(relative, "example", "polars")}\n", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_study_of_which_no_case_can_run_says_why()
     {
         var (code, text, error) = Run("polar", "check", _studies.PathOf("broken"), "--results", Results);
@@ -196,7 +244,35 @@ public sealed class Checking_polars : IDisposable
         Assert.Equal(1, code);
         Assert.Contains("Case scheduled failed: fault in BladeLoads, please report: loss factor 1.0003\n", error, StringComparison.Ordinal);
         Assert.Contains("(1 case, every operating point alike)", text, StringComparison.Ordinal);
-        Assert.Contains("; 1 case left out, which 'bladeloads check' tells about\n", text, StringComparison.Ordinal);
+        Assert.Contains("\nno errors, 30 doubts in 2 tables; left out: 1 case that failed in solving\n", text, StringComparison.Ordinal);
+    }
+
+    // A case of a study 'alone', beside its tables or in cases/.
+    private void Alone(string file, string more)
+    {
+        var tables = file.Contains('/', StringComparison.Ordinal) ? ".." : ".";
+        Put("tip.csv", "reynolds,alpha_deg,cl,cd\n1e6,-10,-0.8,0.02\n1e6,0,0.3,0.008\n1e6,10,1.2,0.02\n1e6,20,0.9,0.2\n");
+        Put("blade.csv", "radius_m,chord_m,twist_deg,section\n1,1,10,tip\n10,0.5,0,tip\n");
+        Put(file, $"""
+            blade = "{tables}/blade.csv"
+            polars = "{tables}"
+            {more}[rotor]
+            blade_count = 3
+            [wind]
+            speeds_m_s = [6, 8, 10]
+            [control]
+            strategy = "fixed-speed"
+            rotor_speed_rpm = 50
+            pitch_deg = 0
+
+            """);
+
+        void Put(string name, string text)
+        {
+            var path = Path.Join(_folder.Path, "alone", name);
+            Directory.CreateDirectory(Path.GetDirectoryName(path)!);
+            File.WriteAllText(path, text);
+        }
     }
 
     private static void Count(SortedDictionary<string, double> counted, string result, List<Dictionary<string, string>> blade, string set)

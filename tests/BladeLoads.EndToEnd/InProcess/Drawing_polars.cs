@@ -1,4 +1,5 @@
 using BladeLoads.Batch.Tests.Building;
+using BladeLoads.Batch.Work;
 using BladeLoads.Commands;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Rotor.Operation;
@@ -18,6 +19,7 @@ public sealed class Drawing_polars : IDisposable
         """;
 
     private readonly TemporaryFolder _folder = new();
+    private readonly SolveCase _solve = CaseSolver.Solve;
 
     public Drawing_polars()
     {
@@ -58,6 +60,83 @@ public sealed class Drawing_polars : IDisposable
         Assert.Contains(">corrected, Snel 1993, r/R 0.", page, StringComparison.Ordinal);
         Assert.Contains(">Corrected at the best power coefficient of the case: ", page, StringComparison.Ordinal);
         Assert.DoesNotContain("orrected", Read("pages/clean/tip.svg"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Sets_of_one_folder_name_have_folders_of_different_names()
+    {
+        foreach (var set in (string[])["a/clean", "b/clean"])
+        {
+            Put($"fell/polars/{set}/tip.csv", Table);
+            Put($"fell/cases/{set[0]}.toml", Case("").Replace("polars/clean", "polars/" + set, StringComparison.Ordinal));
+        }
+        File.Delete(At("fell/cases/plain.toml"));
+        var (code, text, error) = Run("fell", "--out", "pages");
+        Assert.Equal((0, ""), (code, error));
+        Assert.Equal($"{At("pages/a~clean/tip.svg")}\n{At("pages/b~clean/tip.svg")}\n", text);
+        Assert.Contains(">Section tip, set b/clean<", Read("pages/b~clean/tip.svg"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Tables_in_the_folder_of_the_study_go_into_one_that_no_other_set_has()
+    {
+        foreach (var set in (string[])["", "fell/"])
+        {
+            Put($"fell/{set}tip.csv", Table);
+            Put($"fell/cases/in-{set.Length}.toml", Case("").Replace("../polars/clean", "../" + set, StringComparison.Ordinal));
+        }
+        Assert.Equal($"{At("pages/fell/tip.svg")}\n", Run("fell/cases/in-0.toml", "--out", "pages").Out);
+        Assert.Equal(
+            $"{At("pages/fell/tip.svg")}\n{At("pages/polars~clean/tip.svg")}\n{At("pages/~/tip.svg")}\n", Run("fell", "--out", "pages").Out);
+    }
+
+    [Fact]
+    public void A_table_that_cannot_be_read_again_is_told_and_has_no_page()
+    {
+        Put("fell/cases/rotating.toml", Case("[sections]\nextend = \"viterna-1982\"\n"));
+        var (code, text, error) = Run(new Disk(), _solve, ReadThenSpoil, "fell", "--out", "pages");
+        Assert.Equal((1, $"{At("pages/clean/tip.svg")}\n"), (code, text));
+        Assert.Equal("polars/clean/tip.csv:2:5: cd is -1; drag coefficients must be >= 0\n1 error in tables that changed just now; their pages are not drawn\n", error);
+        Assert.False(File.Exists(At("pages/clean/tip~rotating.svg")));
+
+        Study ReadThenSpoil(string path)
+        {
+            var study = StudyReader.Read(path);
+            Put("fell/polars/clean/tip.csv", "alpha_deg,cl,cd\n0,0,-1\n1,0,1\n2,0,1\n");
+            return study;
+        }
+    }
+
+    [Fact]
+    public void No_case_is_solved_for_sections_that_were_not_asked_for()
+    {
+        Put("fell/polars/clean/root.csv", Table);
+        Put("fell/blades/other.csv", "radius_m,chord_m,twist_deg,section\n1,1,10,root\n10,0.5,0,root\n");
+        Put("fell/cases/rotating.toml", Case("[sections]\nextend = \"viterna-1982\"\naugment = \"snel-1993\"\n")
+            .Replace("fell.csv", "other.csv", StringComparison.Ordinal));
+        var solved = 0;
+        SolveCase solve = (rotor, cancellation) =>
+        {
+            solved++;
+            return CaseSolver.Solve(rotor, cancellation);
+        };
+        Assert.Equal($"{At("pages/clean/tip.svg")}\n", Run(new Disk(), solve, StudyReader.Read, "fell", "--out", "pages", "--only", "tip").Out);
+        Assert.Equal(0, solved);
+        Assert.Equal($"{At("pages/clean/root~rotating.svg")}\n", Run(new Disk(), solve, StudyReader.Read, "fell", "--out", "pages", "--only", "root").Out);
+        Assert.Equal(1, solved);
+        Assert.Equal("no section matches 'x*'; there are root, tip\n", Run("fell", "--only", "x*").Error);
+    }
+
+    [Fact]
+    public void Pictures_are_told_by_the_path_that_was_given()
+    {
+        var relative = Path.GetRelativePath(Directory.GetCurrentDirectory(), At("results"));
+        Assert.Equal($"{Path.Join(relative, "fell/pictures/clean/tip.svg")}\n", RunAsGiven(new Disk(), _solve, StudyReader.Read, At("fell"), "--results", relative).Out);
+        Assert.True(File.Exists(At("results/fell/pictures/clean/tip.svg")));
+        var set = Path.GetRelativePath(Directory.GetCurrentDirectory(), At("fell/polars/clean"));
+        var pages = Path.GetRelativePath(Directory.GetCurrentDirectory(), At("pages"));
+        Assert.Equal($"{Path.Join(pages, "clean/tip.svg")}\n", RunAsGiven(new Disk(), _solve, StudyReader.Read, set, "--out", pages, "--only", "tip").Out);
+        Assert.Contains($">{Path.Join(set, "tip.csv")}<", Read("pages/clean/tip.svg"), StringComparison.Ordinal);
     }
 
     [Fact]
@@ -203,13 +282,18 @@ public sealed class Drawing_polars : IDisposable
     private (int Code, string Out, string Error) Run(params string[] arguments) => Run(new Disk(), arguments);
 
     // Paths that a user would give from within the folder; the process of the tests stays where it is.
-    private (int Code, string Out, string Error) Run(IDisk disk, params string[] arguments)
+    private (int Code, string Out, string Error) Run(IDisk disk, params string[] arguments) => Run(disk, _solve, StudyReader.Read, arguments);
+
+    private (int Code, string Out, string Error) Run(IDisk disk, SolveCase solve, Func<string, Study> read, params string[] arguments)
+        => RunAsGiven(disk, solve, read, [
+            .. arguments.Select((a, i) => i == 0 || (arguments[i - 1] == "--out" && a.Length > 0) ? At(a) : a), "--results", At("results")]);
+
+    private static (int Code, string Out, string Error) RunAsGiven(IDisk disk, SolveCase solve, Func<string, Study> read, params string[] arguments)
     {
         using var output = new StringWriter { NewLine = "\n" };
         using var error = new StringWriter { NewLine = "\n" };
-        var surroundings = new Surroundings(output, error, false, false, StudyReader.Read, CaseSolver.Solve, disk, TimeProvider.System, _ => { });
-        var placed = arguments.Select((a, i) => i == 0 || (arguments[i - 1] == "--out" && a.Length > 0) ? At(a) : a);
-        var code = CommandLine.Run(["polar", "draw", .. placed, "--results", At("results")], surroundings);
+        var surroundings = new Surroundings(output, error, false, false, read, solve, disk, TimeProvider.System, _ => { });
+        var code = CommandLine.Run(["polar", "draw", .. arguments], surroundings);
         return (code, output.ToString(), error.ToString());
     }
 }

@@ -123,7 +123,7 @@ internal sealed class FellTable
     {
         var table = StoredPolars.FromBytes("fell.csv", Encoding.UTF8.GetBytes(text), out var errors);
         Told.Exactly([], errors);
-        return PolarDoubts.Of(table!, "fell.csv");
+        return CheckedTable.Of(table!, "fell.csv").Doubts;
     }
 
     private void Append(StringBuilder text)

@@ -34,6 +34,11 @@ public sealed class PolarDoubtTests
         Fell.Without(a => a is -2 or 0 or 25 or 90).Doubts());
 
     [Fact]
+    public void Rows_are_far_apart_by_the_narrowest_range_that_they_reach_into() => Is(
+        ["35:5: no row between 19 and 23 deg, and the curve there is a guess; from -10 to 20 deg give one every 2.5 deg or closer"],
+        Fell.Without(a => a is 20).With(19, "0.69", "0.1455").With(23, "0.689", "0.2115").Doubts());
+
+    [Fact]
     public void Two_rows_at_one_angle_are_told() => Is(
         ["27:5: alpha_deg 4 and 4.04 are hardly two angles (row 26 to 27); keep one of them, or their mean"],
         Fell.With(4.04, "0.736", "0.0101").Doubts());
@@ -107,6 +112,7 @@ public sealed class PolarDoubtTests
             "13:8: lift is 0 at -8.99 deg; of blade sections it is between -8 and 0 deg: are the angles shifted?",
             "19:7: the largest lift is at 4 deg; slender sections stall beyond 5 deg: are the angles in another unit?",
             "25:5: no row between 14 and 19 deg, and the curve there is a guess; from -10 to 20 deg give one every 2.5 deg or closer",
+            "26:5: no row between 19 and 24 deg, and the curve there is a guess; from -10 to 20 deg give one every 2.5 deg or closer",
         ],
         Fell.Without(a => a is < -30 or > 30).Changed(r => (r.Angle - 6, r.Lift, r.Drag)).Doubts());
 

@@ -6,6 +6,7 @@ using BladeLoads.Rotor.Loads;
 using BladeLoads.Rotor.Operation;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -26,20 +27,19 @@ internal sealed class CorrectedLines
         return new CorrectedLines(studyCase, curve.Points.Where(p => p.Loads is not null).MaxBy(p => p.Loads!.PowerCoefficient));
     }
 
-    public ImmutableArray<PolarLine> Of(string section) => [.. Elements(section).Select(e => Line(e, section)).OfType<PolarLine>()];
-
-    /// <summary>At which operating point, or why there are no lines.</summary>
-    public string Note(string section)
+    /// <summary>The lines of a section, and at which operating point they are, or why there are none.</summary>
+    public (ImmutableArray<PolarLine> Lines, string Note) On(string section)
     {
         if (_best is null)
-            return "No correction for rotation is shown: no operating point of the case has a balance.";
+            return ([], "No correction for rotation is shown: no operating point of the case has a balance.");
         if (_case.Rotor.Blade.IsByThickness)
-            return "No correction for rotation is shown: the blade is given by thickness, and its elements stand between the tables.";
-        if (Of(section).IsEmpty)
-            return "Rotation changes nothing here: the section stands where it is not augmented.";
-        return string.Create(CultureInfo.InvariantCulture,
-            $"Corrected at the best power coefficient of the case: {_best.Operation.WindSpeed:0.##} m/s, tip-speed ratio {_best.Loads!.TipSpeedRatio:0.0#}; ")
-            + "each radius on the table nearest in Reynolds number.";
+            return ([], "No correction for rotation is shown: the blade is given by thickness, and its elements stand between the tables.");
+        var lines = Elements(section).Select(e => Line(e, section)).OfType<PolarLine>().ToImmutableArray();
+        return (lines, lines.IsEmpty
+            ? "Rotation changes nothing here: the section stands where it is not augmented."
+            : "Corrected at the best power coefficient of the case: "
+                + string.Create(CultureInfo.InvariantCulture, $"{_best.Operation.WindSpeed:0.##} m/s, tip-speed ratio {_best.Loads!.TipSpeedRatio:0.0#}")
+                + "; each radius on the table nearest in Reynolds number.");
     }
 
     private IEnumerable<ElementState> Elements(string section)
@@ -51,7 +51,8 @@ internal sealed class CorrectedLines
 
     private PolarLine? Line(ElementState element, string section)
     {
-        var polar = _case.Rotor.Sections[section].Polars.MinBy(p => double.IsNaN(p.Reynolds) ? 0 : Math.Abs(Math.Log(p.Reynolds / element.Reynolds)))!;
+        var polar = _case.Rotor.Sections[section].Polars
+            .MinBy(p => double.IsNaN(p.Reynolds) ? 0 : Math.Abs(Math.Log(p.Reynolds / element.Reynolds)))!;
         var radiusRatio = element.Radius / _case.Rotor.Blade.TipRadius;
         var factors = RotationalAugmentation.Factors(
             _case.Rotor.Augmentation, element.Chord / element.Radius, radiusRatio,
@@ -62,7 +63,7 @@ internal sealed class CorrectedLines
         if (moved.Count == 0)
             return null;
         var method = _case.Rotor.Augmentation == Augmentation.Snel1993 ? "Snel 1993" : "Du and Selig 1998";
-        var reynolds = double.IsNaN(polar.Reynolds) ? "" : string.Create(CultureInfo.InvariantCulture, $", Reynolds number {polar.Reynolds:0.######e0}");
+        var reynolds = double.IsNaN(polar.Reynolds) ? "" : $", Reynolds number {ReynoldsNumber.Text(polar.Reynolds)}";
         return new PolarLine(
             corrected, LineKind.Corrected,
             string.Create(CultureInfo.InvariantCulture, $"corrected, {method}, r/R {radiusRatio:0.00}{reynolds}"))

@@ -24,7 +24,7 @@ internal sealed class EarlierPolars
                 : throw new WrongUseException($"--before '{path}' is no polar table and no folder; a polar table ends in .csv");
         if (!Directory.Exists(path))
             throw new WrongUseException($"--before '{path}' is not there; give a table, the folder of a set, or an earlier copy of the study");
-        return Directory.Exists(System.IO.Path.Join(path, "cases"))
+        return GivenSource.IsStudyFolder(path)
             ? new EarlierPolars(path, page => page.File is { } file
                 ? System.IO.Path.Join(path, file)
                 : throw new WrongUseException($"--before '{path}' is a study, and what is drawn is none; give a table or the folder of a set"))

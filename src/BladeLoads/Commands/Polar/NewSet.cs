@@ -22,10 +22,7 @@ internal sealed record NewSet(string Source, string Folder, ImmutableArray<strin
         if (GivenTables.Read(Source, isSet, out var errors) is not { } set)
             return Refuse(errors, surroundings);
         var choice = new NameChoice(Only);
-        if (!set.Tables.Any(table => choice.Includes(table.SectionName)))
-            throw new WrongUseException(
-                $"no section matches {string.Join(", ", Only.Select(p => $"'{p}'"))}; there are "
-                + string.Join(", ", set.Tables.Select(table => table.SectionName)));
+        choice.Check(set.Tables.Select(table => table.SectionName));
         var place = new SetPlace(Folder, Source, isSet, Replace);
         place.Check([.. set.Tables.Select(FileName), .. set.SetFile is null ? [] : (string[])[StoredSet.SetFileName]]);
 

@@ -8,16 +8,18 @@ namespace BladeLoads.Commands.Polar;
 internal enum PictureFormat { Svg, Png }
 
 /// <summary>A page to be drawn.</summary>
-/// <param name="Set">The name of the set, and of the folder of its pictures.</param>
+/// <param name="Folder">The name of the folder of the set's pictures; no other set has it.</param>
+/// <param name="Set">The name of the set.</param>
 /// <param name="FileName">Without its ending.</param>
 /// <param name="File">The table, relative to its study; null outside one.</param>
-internal sealed record PolarPageAsked(string Set, string Section, string FileName, string? File, PolarPicture Picture);
+internal sealed record PolarPageAsked(
+    string Folder, string Set, string Section, string FileName, string? File, PolarPicture Picture);
 
 /// <summary>Where pictures go: a folder a set, a file a section. A picture of ours gives way to a new one, anything else only when told to.</summary>
 internal sealed record PicturePlace(string Folder, bool Replace, IDisk Disk)
 {
     public string PathOf(PolarPageAsked page, PictureFormat format)
-        => Path.Join(Folder, Safe(page.Set), Safe(page.FileName) + (format == PictureFormat.Svg ? ".svg" : ".png"));
+        => Path.Join(Folder, Safe(page.Folder), Safe(page.FileName) + (format == PictureFormat.Svg ? ".svg" : ".png"));
 
     /// <summary>Whole or not at all; null when written, else why not.</summary>
     /// <param name="draw">Makes the bytes; asked only where they can go somewhere.</param>

@@ -10,13 +10,13 @@ using BladeLoads.Screen;
 using BladeLoads.Studies;
 using BladeLoads.Studies.Files;
 using BladeLoads.Studies.PolarCheck;
-using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Commands.Polar;
 
-/// <param name="Source">A study, one case file of it, a set of polar tables or one table.</param>
+/// <param name="Only">Of a study cases, else sections.</param>
 /// <param name="Out">The folder for the report; null for the place that a study has for it, and for none without a study.</param>
-internal sealed record PolarCheckRequest(string Source, string Results, string? Out, string[] Only, int Workers, bool Json);
+internal sealed record PolarCheckRequest(
+    GivenSource Source, string Results, string? Out, ImmutableArray<string> Only, int Workers, bool Json);
 
 /// <summary><c>bladeloads polar check</c>: what is doubtful in polar tables, and where the blades of a study work in them.</summary>
 internal static class PolarCheckCommand
@@ -31,7 +31,8 @@ internal static class PolarCheckCommand
         results.Description = "of a study: the folder of results; the report goes to <study>/polars in it";
         var folder = new Option<string?>("--out") { Description = "write the report into this folder instead", HelpName = "folder" };
         var only = CommandLine.OnlyOption();
-        only.Description = "of a study: only cases whose name matches; * is any text, ? one character; may be given several times";
+        only.Description = "of a study: only cases whose name matches; of a set or a table: only sections; * is any text, ? one character; may be "
+            + "given several times";
         var workers = CommandLine.WorkersOption();
         var json = new Option<bool>("--json") { Description = "the same for scripts, as JSON" };
         var command = new Command(
@@ -43,8 +44,8 @@ internal static class PolarCheckCommand
         };
         command.SetAction(parsed => Run(
             new PolarCheckRequest(
-                parsed.GetRequiredValue(source), parsed.GetRequiredValue(results), parsed.GetValue(folder), parsed.GetValue(only) ?? [],
-                parsed.GetValue(workers), parsed.GetValue(json)),
+                GivenSource.Of(parsed.GetRequiredValue(source)), parsed.GetRequiredValue(results), parsed.GetValue(folder),
+                [.. parsed.GetValue(only) ?? []], parsed.GetValue(workers), parsed.GetValue(json)),
             surroundings));
         return command;
     }
@@ -52,19 +53,25 @@ internal static class PolarCheckCommand
     private static int Run(PolarCheckRequest request, Surroundings surroundings)
     {
         var files = new DiskFiles();
-        var source = request.Source;
-        if (source.EndsWith(".csv", StringComparison.Ordinal) && File.Exists(source))
-            return Tell(CheckedTables.OfTable(source, files), UseOfTables.None, null, request, surroundings);
-        if (Directory.Exists(source) && !Directory.Exists(Path.Join(source, StudyReader.CasesFolder))
-            && Directory.EnumerateFiles(source).Any(file => StoredSet.IsTable(Path.GetFileName(file))))
-            return Tell(CheckedTables.OfSet(source, files), UseOfTables.None, null, request, surroundings);
-        return CheckStudy(request, files, surroundings);
+        return request.Source switch
+        {
+            GivenSource.Table table => Tell(Chosen(CheckedTables.OfTable(table.Path, files), request), UseOfTables.None, null, request, surroundings),
+            GivenSource.Set set => Tell(Chosen(CheckedTables.OfSet(set.Path, files), request), UseOfTables.None, null, request, surroundings),
+            _ => CheckStudy(request, files, surroundings),
+        };
+    }
+
+    private static CheckedTables Chosen(CheckedTables tables, PolarCheckRequest request)
+    {
+        var choice = new NameChoice(request.Only);
+        choice.Check(tables.Sections);
+        return tables.Of(choice.Includes);
     }
 
     private static int CheckStudy(PolarCheckRequest request, DiskFiles files, Surroundings surroundings)
     {
         using var signals = new StopSignals(surroundings);
-        var study = Chosen(AskedStudy.ReadAlone(request.Source, surroundings), request.Only);
+        var study = Chosen(AskedStudy.ReadAlone(request.Source.Path, surroundings), request.Only);
         var tables = CheckedTables.OfStudy(study, files);
         if (study.Cases.IsEmpty)
         {
@@ -89,10 +96,10 @@ internal static class PolarCheckCommand
         }
     }
 
-    private static Study Chosen(Study study, string[] only)
+    private static Study Chosen(Study study, ImmutableArray<string> only)
     {
         const int Shown = 12;
-        var choice = new CaseChoice([.. only]);
+        var choice = new CaseChoice(only);
         var chosen = study.Cases.Where(c => choice.Includes(c.Name)).ToImmutableArray();
         if (chosen.IsEmpty && !study.Cases.IsEmpty)
             throw new WrongUseException(
@@ -106,19 +113,28 @@ internal static class PolarCheckCommand
     private static int Tell(CheckedTables tables, UseOfTables use, Study? study, PolarCheckRequest request, Surroundings surroundings)
     {
         var report = new PolarReport(tables, use.ByFile);
-        ImmutableArray<ResultContent> Files() => [.. report.Files(), .. CheckedPicture.Files(tables, use.ByFile)];
-        var folder = tables.Tables.IsEmpty ? null
-            : request.Out is { } named ? ReportPlace.Write(named, Files(), surroundings.Disk)
-            : study is not null ? ReportPlace.Write(new ResultsFolder(Path.GetFullPath(request.Results), study.Name), Files(), surroundings.Disk)
-            : null;
+        var names = new TableNames(tables.Tables.Select(table => table.File).DefaultIfEmpty(""), study?.Name ?? request.Source.FolderName());
+        var folder = tables.Tables.IsEmpty ? null : Report();
         foreach (var (name, reason) in use.Failed)
             surroundings.Error.WriteLine($"Case {name} failed: {reason}");
         if (request.Json)
-            surroundings.Out.WriteLine(report.ToJson(request.Source, CommandLine.ToolVersion));
+            surroundings.Out.WriteLine(report.ToJson(request.Source.Path, CommandLine.ToolVersion));
         else
-            PolarCheckLines.Write(tables, use, study, folder, surroundings);
+            PolarCheckLines.Write(tables, use, names, study, folder, surroundings);
         return tables.Tables.IsEmpty ? ExitCode.NothingCouldRun
             : tables.Errors.IsEmpty && use.Failed.IsEmpty && study is null or { Rejected.IsEmpty: true } ? ExitCode.Good
             : ExitCode.SomeNotGood;
+
+        // The folder as the user gave it; null where none is written.
+        string? Report()
+        {
+            ImmutableArray<ResultContent> Files() => [.. report.Files(), .. CheckedPicture.Files(tables, use.ByFile, names)];
+            if (request.Out is { } named)
+                return ReportPlace.Write(named, Files(), surroundings.Disk);
+            if (study is null)
+                return null;
+            ReportPlace.Write(new ResultsFolder(Path.GetFullPath(request.Results), study.Name), Files(), surroundings.Disk);
+            return new ResultsFolder(request.Results, study.Name).Polars;
+        }
     }
 }

@@ -9,11 +9,10 @@ using BladeLoads.Studies;
 
 namespace BladeLoads.Commands.Polar;
 
-/// <param name="Source">A study, the folder of a set, or a table.</param>
 /// <param name="Before">The same before an update; null where nothing is compared.</param>
 /// <param name="Folder">Where the pictures go; null for their usual place.</param>
 internal sealed record DrawAsked(
-    string Source, string? Before, string? Folder, string Results, ImmutableArray<PictureFormat> Formats, NameChoice Only, bool Replace);
+    GivenSource Source, string? Before, string? Folder, string Results, ImmutableArray<PictureFormat> Formats, NameChoice Only, bool Replace);
 
 /// <summary><c>bladeloads polar draw</c>: a page of diagrams for each section table.</summary>
 internal static class PolarDrawCommand
@@ -33,7 +32,8 @@ internal static class PolarDrawCommand
         };
         var folder = new Option<string?>("--out")
         {
-            Description = "the folder that pictures go to, a folder for each set in it; left out, results/<study>/pictures for a study, else ./pictures",
+            Description = "the folder that pictures go to, a folder for each set in it; left out, results/<study>/pictures for a study, "
+                + "else ./pictures",
             HelpName = "folder",
         };
         var results = CommandLine.ResultsOption();
@@ -57,8 +57,9 @@ internal static class PolarDrawCommand
         };
         command.SetAction(parsed => Run(
             new DrawAsked(
-                parsed.GetRequiredValue(source), parsed.GetValue(before), parsed.GetValue(folder), parsed.GetRequiredValue(results),
-                parsed.GetValue(format) is { IsDefaultOrEmpty: false } formats ? formats : [PictureFormat.Svg], new NameChoice([.. parsed.GetValue(only) ?? []]), parsed.GetValue(replace)),
+                GivenSource.Of(parsed.GetRequiredValue(source)), parsed.GetValue(before), parsed.GetValue(folder), parsed.GetRequiredValue(results),
+                parsed.GetValue(format) is { IsDefaultOrEmpty: false } formats ? formats : [PictureFormat.Svg],
+                new NameChoice([.. parsed.GetValue(only) ?? []]), parsed.GetValue(replace)),
             surroundings));
         return command;
     }
@@ -68,14 +69,7 @@ internal static class PolarDrawCommand
         if (asked.Folder is "")
             throw new WrongUseException("--out is empty; give the folder that pictures go to");
         var earlier = asked.Before is null ? null : EarlierPolars.At(asked.Before);
-        var (pages, folder, isWhole) = IsStudy(asked.Source) ? OfStudy(asked, surroundings) : OfTables(asked, surroundings);
-        if (pages.IsEmpty)
-            return ExitCode.NothingCouldRun;
-        var chosen = pages.Where(page => asked.Only.Includes(page.Section)).ToImmutableArray();
-        if (chosen.IsEmpty)
-            throw new WrongUseException(
-                $"no section matches {string.Join(", ", asked.Only.Patterns.Select(p => $"'{p}'"))}; there are "
-                + string.Join(", ", pages.Select(page => page.Section).Distinct()));
+        var (chosen, folder, isWhole) = asked.Source is GivenSource.Study ? OfStudy(asked, surroundings) : OfTables(asked, surroundings);
         if (earlier is not null)
             chosen = Compared(chosen, earlier, surroundings);
         if (chosen.IsEmpty)
@@ -85,29 +79,34 @@ internal static class PolarDrawCommand
 
     private static (ImmutableArray<PolarPageAsked> Pages, string Folder, bool IsWhole) OfStudy(DrawAsked asked, Surroundings surroundings)
     {
-        var study = AskedStudy.ReadAlone(asked.Source, surroundings);
+        var study = AskedStudy.ReadAlone(asked.Source.Path, surroundings);
         FindingLines.Write(study.Errors, [], study.Folder, surroundings.Error, surroundings.ErrorIsTerminal);
         if (study.Cases.IsEmpty)
             surroundings.Error.WriteLine(Printable.Of(FindingLines.Closing(study)));
-        var folder = new ResultsFolder(Path.GetFullPath(asked.Results), study.Name).Pictures;
-        return (StudyPages.Of(study, surroundings.Solve), folder, study.Errors.IsEmpty);
+        var (pages, errors) = StudyPages.Of(study, asked.Only, surroundings.Solve);
+        FindingLines.Write(errors, [], study.Folder, surroundings.Error, surroundings.ErrorIsTerminal);
+        if (!errors.IsEmpty)
+            surroundings.Error.WriteLine($"{Count.Of(errors, "error")} in tables that changed just now; their pages are not drawn");
+        // Shown as the user gave it.
+        var folder = new ResultsFolder(asked.Results, study.Name).Pictures;
+        return (pages, folder, study.Errors.IsEmpty && errors.IsEmpty);
     }
 
     private static (ImmutableArray<PolarPageAsked> Pages, string Folder, bool IsWhole) OfTables(DrawAsked asked, Surroundings surroundings)
     {
-        var isSet = Directory.Exists(asked.Source);
-        var set = GivenTables.Read(asked.Source, isSet, out var errors);
+        var (path, isSet) = (asked.Source.Path, asked.Source is GivenSource.Set);
+        var set = GivenTables.Read(path, isSet, out var errors);
         if (set is null)
         {
             FindingLines.Write(errors, [], "", surroundings.Error, surroundings.ErrorIsTerminal);
             surroundings.Error.WriteLine($"{Count.Of(errors, "error")}; nothing drawn");
             return ([], UsualFolder, false);
         }
-        var folder = Path.GetFullPath(isSet ? asked.Source : Path.GetDirectoryName(Path.GetFullPath(asked.Source))!);
-        var name = Path.GetFileName(Path.TrimEndingDirectorySeparator(folder)) is { Length: > 0 } last ? last : "polars";
-        return ([.. set.Tables.Select(table => new PolarPageAsked(
-            name, table.SectionName, table.SectionName, null,
-            PolarPicture.Of(table.Section, name, isSet ? Path.Join(asked.Source, table.SectionName + ".csv") : asked.Source)))], UsualFolder, true);
+        asked.Only.Check(set.Tables.Select(table => table.SectionName));
+        var name = asked.Source.FolderName();
+        return ([.. set.Tables.Where(table => asked.Only.Includes(table.SectionName)).Select(table => new PolarPageAsked(
+            name, name, table.SectionName, table.SectionName, null,
+            PolarPicture.Of(table.Section, name, isSet ? Path.Join(path, table.SectionName + ".csv") : path)))], UsualFolder, true);
     }
 
     private static ImmutableArray<PolarPageAsked> Compared(
@@ -144,7 +143,7 @@ internal static class PolarDrawCommand
                 var path = place.PathOf(page, format);
                 try
                 {
-                    if (place.Write(path, () => format == PictureFormat.Svg ? PictureFile.Svg(page.Picture) : PictureFile.Png(page.Picture)) is { } refusal)
+                    if (place.Write(path, Draw) is { } refusal)
                     {
                         surroundings.Error.WriteLine(Printable.Of($"not drawn: {path} {refusal}"));
                         code = ExitCode.SomeNotGood;
@@ -157,12 +156,11 @@ internal static class PolarDrawCommand
                     surroundings.Error.WriteLine(Printable.Of($"cannot write {path}: {DiskTrouble.Reason(e)}"));
                     return ExitCode.NoRoom;
                 }
+
+                byte[] Draw() => format == PictureFormat.Svg ? PictureFile.Svg(page.Picture) : PictureFile.Png(page.Picture);
             }
         return code;
     }
-
-    private static bool IsStudy(string path)
-        => Directory.Exists(path) ? Directory.Exists(Path.Join(path, "cases")) : !path.EndsWith(".csv", StringComparison.Ordinal);
 
     private static ImmutableArray<PictureFormat> ParseFormat(ArgumentResult argument)
     {
