@@ -26,7 +26,7 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
             lines.Add($"rows of section '{section}', as --section says");
         lines.Add($"columns: {Columns()}");
         lines.Add(angles.Why);
-        lines.Add(reynolds.Why);
+        lines.AddRange(reynolds.Why);
         var done = Conversions().ToList();
         if (done.Count > 0)
             lines.Add($"converted: {string.Join("; ", done)}");
@@ -54,6 +54,8 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
             yield return "cl and cd from forces square to the chord and along it, 12 significant digits";
         if (scan.Columns!.NameOf(ColumnRole.Reynolds)?.Power is > 0 and var power)
             yield return $"Reynolds numbers times {CanonicalText.Of(Math.Pow(10, power))}";
+        else if (request.ReynoldsUnit is { } unit)
+            yield return $"Reynolds numbers without a unit times {CanonicalText.Of(Math.Pow(10, (int)unit))}, as --reynolds says";
         if (scan.HasForeignMinus)
             yield return "minus signs of typesetters to -";
     }

@@ -14,7 +14,7 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
 
     private readonly ColumnRole _lift = request.Needed[1];
     private readonly ColumnRole _drag = request.Needed[2];
-    private readonly int _power = columns.NameOf(ColumnRole.Reynolds)?.Power ?? 0;
+    private readonly int _power = columns.NameOf(ColumnRole.Reynolds)?.Power is > 0 and var power ? power : (int)(request.ReynoldsUnit ?? 0);
 
     /// <param name="tell">Receives column, place and text of what is wrong; null where nothing is to be told.</param>
     public RowReading Read(ImmutableArray<Cell> cells, int line, Action<string, Place, string>? tell)
@@ -93,8 +93,9 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
             return number;
         Tell(role, cells, line, tell, reynolds is null
             ? ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign)
-            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}. Is it in millions? "
-                + "Then name the column so, or say --columns reynolds=none and --reynolds");
+            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}"
+                + (_power == 0 ? ". Is it in millions? Then say --reynolds millions"
+                    : $", and {(request.ReynoldsUnit is { } unit ? $"--reynolds says {ReynoldsBlocks.InWords(unit)}" : "the name of the column gives a unit")}"));
         return double.NaN;
     }
 

@@ -68,7 +68,7 @@ internal sealed class TablePlace(
             var cells = Cells.Of(line, separator);
             var isOfUnits = cells.Any(cell => UnitWords.Meaning(cell.Text) is UnitMeaning.Degrees or UnitMeaning.Radians)
                 && !cells.Any(cell => cell.Text != "1" && ForeignNumber.LooksLikeOne(cell.Text));
-            if (!isOfUnits && ReynoldsLine.In(line, i + 1) is null)
+            if (!isOfUnits && ReynoldsLine.In(line, i + 1, request.ReynoldsUnit) is null)
                 return null;
         }
         return null;

@@ -104,7 +104,7 @@ internal sealed class TableScan
                 continue;
             if (i + 1 > Header.Line && Header.Line > 0 && !isComment && IsUnitsRow(line, i + 1, count))
                 continue;
-            if (ReynoldsLine.In(isComment ? rest : line, i + 1) is { } named)
+            if (ReynoldsLine.In(isComment ? rest : line, i + 1, _request.ReynoldsUnit) is { } named)
                 ReynoldsLines.Add(named);
             else if (isComment || LineSigns.IsEmpty(line) || LineSigns.IsRuling(line))
                 continue;
@@ -129,7 +129,7 @@ internal sealed class TableScan
             return;
         if (_signs.IsComment(line, out var rest))
         {
-            if (ReynoldsLine.In(rest, number) is { } commented)
+            if (ReynoldsLine.In(rest, number, _request.ReynoldsUnit) is { } commented)
                 ReynoldsLines.Add(commented);
             else if (Cells.WithoutTrailing(Cells.Of(rest, Separator), count) is var row && row.Length == count
                 && reader.Read(row, number, null).Kind == RowKind.Row)
@@ -139,7 +139,7 @@ internal sealed class TableScan
         var cells = Cells.WithoutTrailing(Cells.Of(_signs.WithoutRemark(line), Separator), count);
         var numbers = cells.Count(cell => ForeignNumber.LooksLikeOne(cell.Text));
         var isMeantAsRow = numbers >= 2 || numbers > 0 && ForeignNumber.LooksLikeOne(cells[0].Text) || !IsWords(line);
-        if (isMeantAsRow && !ForeignNumber.LooksLikeOne(cells[0].Text) && ReynoldsLine.In(line, number) is { } named
+        if (isMeantAsRow && !ForeignNumber.LooksLikeOne(cells[0].Text) && ReynoldsLine.In(line, number, _request.ReynoldsUnit) is { } named
             && (cells.Length != count || reader.Read(cells, number, null).Kind == RowKind.Broken))
             ReynoldsLines.Add(named);
         else if (cells.Length == count && isMeantAsRow)
@@ -169,7 +169,7 @@ internal sealed class TableScan
             _errors.Add("", new Place(_text.File, number, 1), Header.Line > 0
                 ? string.Create(CultureInfo.InvariantCulture, $"names other columns than line {Header.Line}; --lines says which lines hold the table")
                 : "names columns below the first row; --lines says which lines hold the table");
-        else if (ReynoldsLine.In(line, number) is { } named)
+        else if (ReynoldsLine.In(line, number, _request.ReynoldsUnit) is { } named)
             ReynoldsLines.Add(named);
         else
             return false;

@@ -30,7 +30,7 @@ public sealed class Reading_a_foreign_table : IDisposable
             # text: UTF-8, semicolons between columns and a decimal comma
             # columns: alpha from 'alpha [°]' (column 1), cl from 'CL' (column 2), cd from 'CD' (column 3)
             # angles in degrees, as line 3 says
-            # Reynolds number of line 2
+            # Reynolds number 750000 of line 2: 'Re = 0,75 million'
             # left out: line 7, the same as line 6
             reynolds,alpha_deg,cl,cd
             750000,-5,-0.4,0.01
@@ -43,7 +43,7 @@ public sealed class Reading_a_foreign_table : IDisposable
             text: UTF-8, semicolons between columns and a decimal comma
             columns: alpha from 'alpha [°]' (column 1), cl from 'CL' (column 2), cd from 'CD' (column 3)
             angles in degrees, as line 3 says
-            Reynolds number of line 2
+            Reynolds number 750000 of line 2: 'Re = 0,75 million'
             left out: line 7, the same as line 6
             3 rows at Reynolds number 7.5e5, -5 to 5 deg
             table: {In("t18.csv")}
@@ -116,6 +116,18 @@ public sealed class Reading_a_foreign_table : IDisposable
 
         Assert.True(code == 0, error);
         Assert.Contains("\n3 rows at Reynolds number 1.5e6, -10.49574497 to 11.4591559026 deg\n", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_column_of_reynolds_numbers_in_millions_that_does_not_say_so_is_read_when_told()
+    {
+        File.WriteAllText(In("lab.txt"), "alpha cl cd Re\n-5 -0.4 0.01 1.0\n0 0.1 0.009 1.0\n5 0.6 0.01 1.0\n");
+
+        var (code, text, error) = Run("read", In("lab.txt"), "--preview", "--reynolds", "millions");
+
+        Assert.Equal((0, ""), (code, error));
+        Assert.Contains("\nconverted: Reynolds numbers without a unit times 1000000, as --reynolds says\n", text, StringComparison.Ordinal);
+        Assert.Contains("\n1000000,-5,-0.4,0.01\n", text, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -198,7 +210,7 @@ public sealed class Reading_a_foreign_table : IDisposable
             [
                 "--angles is 'grad'; give degrees or radians", "--decimal is 'dot'; give point or comma",
                 "--separator is ';'; give tab, semicolon, comma, bar or blanks", "--sweep is 'up'; give rising, falling, mean or all",
-                "--reynolds is '1500'; give a number from 1e4 to 1e9: 1.5e6",
+                "--reynolds is '1500'; give a number from 1e4 to 1e9: 1.5e6; or millions or thousands, the unit of those in the table",
                 "--lines is '5'; give the first and the last line of the table, 12-48, or the first alone, 12-",
                 "--lines is '0-5'; give the first and the last line of the table, 12-48, or the first alone, 12-",
             ],

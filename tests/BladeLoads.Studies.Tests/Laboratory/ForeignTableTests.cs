@@ -97,7 +97,7 @@ public class ForeignTableTests
                 "text: UTF-8, semicolons between columns and a decimal comma",
                 "columns: alpha from 'alpha [rad]' (column 1), normal from 'cn' (column 3), tangential from 'ct' (column 4); not taken: 'x' (column 2)",
                 "angles in radians, as line 3 says",
-                "Reynolds number of line 2",
+                "Reynolds number 750000 of line 2: 'Re (millions) 0.75'",
                 "converted: angles from radians to degrees, 12 significant digits; cl and cd from forces square to the chord and along it, 12 significant digits",
                 "rows are sorted by angle at Reynolds number 750000",
                 "left out: line 7, the same as line 6",
@@ -189,9 +189,68 @@ public class ForeignTableTests
     [InlineData("\"Re\",\"1e6\"", 1e6)]
     [InlineData("Re ~ 500 thousand", 5e5)]
     [InlineData("run 7 at Re=2E+06", 2e6)]
+    [InlineData("# Fell tunnel, section t18 (Re 1.5e6), 2019-07-04", 1.5e6)]
+    [InlineData("Re = 1e6 (nominal)", 1e6)]
+    [InlineData("Reynolds number Re = 1e6 and Ma 0.1", 1e6)]
+    [InlineData("chord Reynolds number: 1e6; tripped at 5 % chord, q = 1.2e4 Pa", 1e6)]
+    [InlineData("Re (chord) = 1e6 - clean", 1e6)]
     public void A_line_that_names_a_reynolds_number_is_understood(string line, double reynolds)
         => Assert.Equal(
             [reynolds], Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Polars.Select(polar => polar.Reynolds));
+
+    [Theory]
+    [InlineData("# Tunnel: largest Reynolds number 6e6", "largest")]
+    [InlineData("Re = 2.5e6 per metre", "per")]
+    [InlineData("Re = 2.5e6, per metre", "per")]
+    [InlineData("Re = 2.5e6 1/m", "")]
+    [InlineData("Re = 2.5e6 /m", "/m")]
+    [InlineData("Re [1/m] = 2.5e6", "1/m")]
+    [InlineData("# not Re = 1e6", "not")]
+    [InlineData("critical at Re = 4e5", "critical")]
+    [InlineData("Tunnel Re = 6e6", "Tunnel")]
+    [InlineData("Re (max) = 6e6", "max")]
+    [InlineData("Re = 6e6 or more", "or")]
+    [InlineData("Re = 6e6 (max.)", "max.")]
+    [InlineData("Re up to 6e6", "?")]
+    [InlineData("Re < 6e6", "?")]
+    [InlineData("Re = 1e6 (nominal), 1.02e6 (measured)", "")]
+    [InlineData("Re = 1e6, measured: 1.02 million", "")]
+    [InlineData("Re = 1000000 (nominal), 1020000 (measured)", "")]
+    [InlineData("Re about 1e6 to 2e6", "")]
+    [InlineData("Re = 1.4e6 to 1.6e6", "")]
+    [InlineData("from 1e5 on, Re = 1e6", "")]
+    public void A_reynolds_number_beside_which_other_words_stand_is_refused_with_the_words(string line, string qualifier)
+        => Told.Exactly(
+            [
+                $"lab.txt:1:1: '{line.TrimStart('#', ' ')}' names "
+                + (qualifier switch
+                {
+                    "" => "more than one Reynolds number",
+                    "?" => "a Reynolds number in a way that is not understood",
+                    _ => $"a Reynolds number, and '{qualifier}' beside it may make it another than that of the rows",
+                })
+                + "; say it with --reynolds, or --columns reynolds=none for a table without",
+            ],
+            Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Errors);
+
+    [Fact]
+    public void The_record_shows_the_lines_that_name_reynolds_numbers_and_of_many_the_first()
+    {
+        static string Blocks(int count) => "alpha cl cd\n" + string.Concat(
+            Enumerable.Range(1, count).Select(i => $"Re = {i},5 million, clean\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n"));
+
+        Assert.Equal(
+            ["Reynolds number 1500000 of line 2: 'Re = 1,5 million, clean'", "Reynolds number 2500000 of line 6: 'Re = 2,5 million, clean'"],
+            Foreign.Read(Blocks(2)).Record.Where(line => line.StartsWith("Reynolds", StringComparison.Ordinal)));
+        Assert.Equal(
+            ["Reynolds number 12500000 of line 46: 'Re = 12,5 million, clean'", "Reynolds numbers of lines 50 and 54 besides"],
+            Foreign.Read(Blocks(14)).Record.Where(line => line.StartsWith("Reynolds", StringComparison.Ordinal)).Skip(11));
+    }
+
+    [Fact]
+    public void The_record_says_that_a_unit_of_reynolds_numbers_was_said()
+        => Assert.Contains(
+            "converted: Reynolds numbers without a unit times 1000000, as --reynolds says", Foreign.Read("Re = 1.5\n" + Small, "--reynolds millions").Record);
 
     [Theory]
     [InlineData("more results below")]

@@ -138,7 +138,7 @@ public class HostileFileTests
         ["--angles degrees", "--angles radians"],
         ["--decimal point", "--decimal comma"],
         ["--separator tab", "--separator semicolon", "--separator comma", "--separator bar", "--separator blanks"],
-        ["--reynolds 1e6", "--reynolds 2e6"],
+        ["--reynolds 1e6", "--reynolds 2e6", "--reynolds millions", "--reynolds thousands"],
         ["--comment C", "--comment alpha", "--comment Re"],
         ["--lines 2-4", "--lines 1-1", "--lines 90-99", "--lines 3-2147483647"],
         ["--sweep rising", "--sweep falling", "--sweep mean", "--sweep all"],
