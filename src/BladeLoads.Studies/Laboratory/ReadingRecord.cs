@@ -25,6 +25,7 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
         if (request.Section is { } section)
             lines.Add($"rows of section '{section}', as --section says");
         lines.Add($"columns: {Columns()}");
+        lines.AddRange(scan.Columns!.MomentsNotTaken.Select(moment => $"no moment: {moment}"));
         lines.Add(angles.Why);
         lines.AddRange(reynolds.Why);
         var done = Conversions().ToList();

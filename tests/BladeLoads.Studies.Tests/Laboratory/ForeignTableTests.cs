@@ -170,6 +170,35 @@ public class ForeignTableTests
     }
 
     [Theory]
+    [InlineData("-cm", "its sign is turned")]
+    [InlineData("\u2212CM", "its sign is turned")]
+    [InlineData("cm (nose down positive)", "its sign is turned")]
+    [InlineData("cm*10", "it is a multiple of the moment coefficient")]
+    [InlineData("cm [%]", "it is a multiple of the moment coefficient")]
+    [InlineData("Cm LE", "it is about the leading edge; --columns cm=4 takes it as it stands")]
+    [InlineData("cmte", "it is about the trailing edge; --columns cm=4 takes it as it stands")]
+    [InlineData("CM_ac", "it is about the aerodynamic centre; --columns cm=4 takes it as it stands")]
+    [InlineData("Cm_corr", "it is one version of several; --columns cm=4 takes it as it stands")]
+    [InlineData("Cm root", "it is not plainly about the quarter chord; --columns cm=4 takes it as it stands")]
+    public void The_record_says_why_a_column_is_not_taken_for_the_moment(string name, string why)
+    {
+        var text = $"alpha;cl;cd;{name}\n-5;-0.4;0.01;0.1\n0;0.1;0.009;0.1\n5;0.6;0.01;0.1\n";
+
+        Assert.Contains($"no moment: '{name}' (column 4) is not taken, as {why}", Foreign.Read(text).Record);
+        Assert.Equal(Rows, Foreign.Outcome(Foreign.Read(text)));
+        Assert.Equal(!why.Contains("--columns", StringComparison.Ordinal), Foreign.Read(text, "--columns cm=4").Polars.IsEmpty);
+        Assert.Contains(
+            $"columns: alpha from 'alpha' (column 1), cl from 'cl' (column 2), cd from 'cd' (column 3); not taken: '{name}' (column 4)",
+            Foreign.Read(text, "--columns cm=none").Record);
+    }
+
+    [Fact]
+    public void A_moment_said_to_be_nose_up_is_taken()
+        => Assert.Equal(
+            "-5 -0.4 0.01 0.1 | 0 0.1 0.009 0.1 | 5 0.6 0.01 0.1",
+            Foreign.Outcome(Foreign.Read("alpha;cl;cd;cm (nose up positive)\n-5;-0.4;0.01;0.1\n0;0.1;0.009;0.1\n5;0.6;0.01;0.1\n")));
+
+    [Theory]
     [InlineData("Re = 1.0e6", 1e6)]
     [InlineData("RE=1,5E6", 1.5e6)]
     [InlineData("re 750000", 750000)]
