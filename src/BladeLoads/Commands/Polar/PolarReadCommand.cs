@@ -58,7 +58,7 @@ internal static class PolarReadCommand
             Description = "rows to leave out: those without a value, those with a drag below 0; may be given several times",
             HelpName = $"{Incomplete}|{NegativeDrag}",
         };
-        leaveOut.AcceptOnlyFromAmong(Incomplete, NegativeDrag);
+        leaveOut.Validators.Add(CheckLeaveOut);
         var wrap = new Option<bool>("--wrap")
         {
             Description = "angles go round from 0 to 360 degrees, or to -360: those beyond 180 stand for 360 less, beyond -180 for 360 more",
@@ -166,6 +166,12 @@ internal static class PolarReadCommand
             ? sign
             : throw new WrongUseException(
                 $"--comment is '{text}'; give the sign or the word that such lines begin with, no number and no sign of one");
+    }
+
+    private static void CheckLeaveOut(OptionResult result)
+    {
+        foreach (var token in result.Tokens.Where(token => token.Value is not (Incomplete or NegativeDrag)))
+            result.AddError($"--leave-out is '{Printable.Of(token.Value)}'; give {Incomplete} or {NegativeDrag}");
     }
 
     private static ReynoldsSaid? ParseReynolds(ArgumentResult argument)
