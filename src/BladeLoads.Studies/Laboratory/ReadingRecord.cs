@@ -59,5 +59,7 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
             yield return $"Reynolds numbers without a unit times {CanonicalText.Of(Math.Pow(10, (int)unit))}, as --reynolds says";
         if (scan.HasForeignMinus)
             yield return "minus signs of typesetters to -";
+        if (scan.HasDegreeSigns)
+            yield return "degree signs taken from angles";
     }
 }

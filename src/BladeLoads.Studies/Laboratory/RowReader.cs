@@ -26,6 +26,7 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
         {
             Section = named is { } cell ? (cell.Text, new Place(file, line, cell.Column)) : null,
             HasForeignMinus = numbers.Any(number => ForeignNumber.HasForeignMinus(number.Text)),
+            HasDegreeSign = kind == RowKind.Row && ForeignNumber.HasDegreeSign(numbers[0].Text),
             ShowsItsDecimals = numbers.Any(
                 number => number.Text.AsSpan().IndexOfAny(".eEdD") >= 0 || number.IsQuoted && number.Text.Contains(',')),
         };
@@ -83,7 +84,7 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
         var text = cells[columns[role]!.Value].Text;
         if (role != ColumnRole.Reynolds)
         {
-            if (ForeignNumber.TryParse(text, sign, out var value))
+            if (ForeignNumber.TryParse(role == ColumnRole.Angle ? ForeignNumber.WithoutDegreeSign(text) : text, sign, out var value))
                 return value;
             Tell(role, cells, line, tell, ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign));
             return double.NaN;

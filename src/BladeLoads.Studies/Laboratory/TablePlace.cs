@@ -84,12 +84,14 @@ internal sealed class TablePlace(
                 continue;
             var cells = Cells.WithoutTrailing(Cells.Of(signs.WithoutRemark(text.Lines[firstRow]), separator), places.Max());
             count = cells.Length;
-            if (places.TrueForAll(n => n >= 1 && n <= cells.Length && ForeignNumber.TryParse(cells[n - 1].Text, sign, out _)))
+            if (places.TrueForAll(n => n >= 1 && n <= cells.Length && IsNumber(cells[n - 1])))
                 return true;
         }
         count = 0;
         return false;
     }
+
+    private bool IsNumber(Cell cell) => ForeignNumber.TryParse(ForeignNumber.WithoutDegreeSign(cell.Text), sign, out _);
 
     private (int Line, string Text)? Problem(bool isNumbered)
     {

@@ -6,7 +6,7 @@ using BladeLoads.Studies.Tables;
 namespace BladeLoads.Studies.Laboratory;
 
 /// <summary>A foreign table read with one separator and one decimal sign. It is sound where every line makes sense so.</summary>
-internal sealed class TableScan
+internal sealed partial class TableScan
 {
     private readonly ForeignText _text;
     private readonly ReadingRequest _request;
@@ -18,6 +18,9 @@ internal sealed class TableScan
     // Those that rows name, asked for or not, each with its first place.
     private readonly Dictionary<string, Place> _sections = new(StringComparer.Ordinal);
     private bool _showsItsDecimals;
+
+    // Of rows, in their order.
+    private readonly List<bool> _haveDegreeSigns = [];
 
     private TableScan(ForeignText text, ReadingRequest request, CellSeparator separator, DecimalSign sign)
     {
@@ -52,6 +55,9 @@ internal sealed class TableScan
 
     /// <summary>A minus sign of typesetters was read in a row.</summary>
     public bool HasForeignMinus { get; private set; }
+
+    /// <summary>The angles of the rows bear degree signs.</summary>
+    public bool HasDegreeSigns => _haveDegreeSigns.Contains(true);
 
     /// <summary>Those not told one by one too.</summary>
     public int ErrorCount => _errors.Total;
@@ -192,6 +198,7 @@ internal sealed class TableScan
                         + "those below is not known; put a comment mark before it, say with --comment how it begins, or choose rows with --lines");
                 _wordsSinceLastRow.Clear();
                 Rows.Add(read.Row);
+                _haveDegreeSigns.Add(read.HasDegreeSign);
                 foreach (var cell in cells)
                     if (ReynoldsLine.IsNamedIn(cell.Text))
                         _errors.Add("", new Place(_text.File, number, cell.Column),
@@ -224,22 +231,5 @@ internal sealed class TableScan
                     $"names {VisibleText.Quote(cells[place].Text)} as the unit of {ColumnRoleWords.Of(role)}; "
                     + "only ratios are read, so give the table as such");
         return true;
-    }
-
-    private void CheckWhole()
-    {
-        if (_sections.Count > 1 && _request.Section is null)
-            _errors.Add("", _sections.Values.ElementAt(1),
-                $"has rows of sections {VisibleText.Enumerate(_sections.Keys, "")}; say which: --section {_sections.Keys.First()}");
-        else if (_request.Section is { } section && !_sections.ContainsKey(section))
-            _errors.Add("", new Place(_text.File, 0, 0), _sections.Count == 0
-                ? $"no column names sections, so there is no section {VisibleText.Quote(section)}"
-                : $"has no section {VisibleText.Quote(section)}; there are {VisibleText.Enumerate(_sections.Keys, "none")}");
-        if (Separator == CellSeparator.Comma && _request.DecimalSign is null && !_showsItsDecimals && Rows.Count > 0)
-            _errors.Add("", new Place(_text.File, Rows[0].Line, 1),
-                "commas stand here and no row has a decimal point, so that they may separate columns or be "
-                + "decimal signs; say --decimal point where they separate, or save the table with semicolons");
-        if (Rows.Count == 0 && !_errors.Any)
-            _errors.Add("", new Place(_text.File, 0, 0), "has no row left");
     }
 }

@@ -115,6 +115,15 @@ public class ForeignTableTests
         Assert.Contains("converted: minus signs of typesetters to -", Foreign.Read(Small + "\u22127;-0,5;0,01\n").Record);
     }
 
+    [Fact]
+    public void The_record_says_that_degree_signs_were_taken_from_angles()
+    {
+        var record = Foreign.Read("alpha;cl;cd\n-3°;-0,4;0,01\n0°;0,1;0,009\n4°;0,6;0,01\n").Record;
+
+        Assert.Contains("angles in degrees, as line 2 says", record);
+        Assert.Contains("converted: degree signs taken from angles", record);
+    }
+
     [Theory]
     [InlineData("deg")]
     [InlineData("rad")]
