@@ -26,9 +26,9 @@ internal sealed partial record ColumnName(
         (ColumnRole.Moment, "cm moment momentcoefficient momentcoeff pitchingmoment pitchingmomentcoefficient cmc4 cm14 cm14c cm25 cm025 cm025c "
             + "cmquarterchord cmnoseuppositive cmpositivenoseup cmoment momentenbeiwert"),
         (ColumnRole.Reynolds, "re reynolds reynoldsnumber reynoldsno rey renumber reynoldszahl rn"),
-        (ColumnRole.Normal, "cn normalforce normalforcecoefficient cnormal"),
-        (ColumnRole.Tangential, "ct tangentialforce tangentialforcecoefficient ctangential"),
-        (ColumnRole.Axial, "cc chordforce chordforcecoefficient chordwiseforce axialforce axialforcecoefficient"),
+        (ColumnRole.Normal, "cn normal normalforce normalforcecoefficient cnormal"),
+        (ColumnRole.Tangential, "ct tangential tangentialforce tangentialforcecoefficient ctangential"),
+        (ColumnRole.Axial, "cc chordforce chordforcecoefficient chordwiseforce axial axialforce axialforcecoefficient"),
         (ColumnRole.Section, "section airfoil aerofoil profile foil"));
 
     // One letter in one country, another in the next.

@@ -51,9 +51,10 @@ internal static class Layouts
     private static bool Occurs(CellSeparator separator, ForeignText text)
         => Cells.SignOf(separator) is not { } sign || text.Lines.Any(line => line.Contains(sign));
 
-    // The way that goes farthest: what is wrong in it is most likely what is wrong.
+    // The way that goes farthest: what is wrong in it is most likely what is wrong. Blanks go far where every cell ends in a comma.
     private static TableScan Nearest(List<TableScan> scans) => scans
-        .OrderByDescending(scan => scan.Rows.Count)
+        .OrderByDescending(scan => scan.HasCommasTwice && !scans.Exists(other => other.Rows.Count > 0))
+        .ThenByDescending(scan => scan.Rows.Count)
         .ThenByDescending(scan => scan.Columns is not null)
         .ThenByDescending(scan => scan.Header.Cells.Length)
         .ThenByDescending(scan => scan.ErrorCount > 0)

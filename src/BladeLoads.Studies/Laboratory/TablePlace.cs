@@ -1,10 +1,9 @@
 using System.Globalization;
-using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Studies.Laboratory;
 
 /// <summary>Where in a text the table stands: the line that names its columns, and its first row.</summary>
-internal sealed class TablePlace(
+internal sealed partial class TablePlace(
     ForeignText text, ReadingRequest request, LineSigns signs, CellSeparator separator, DecimalSign sign, int first, int end)
 {
     private const int FewestColumns = 2;
@@ -92,33 +91,6 @@ internal sealed class TablePlace(
     }
 
     private bool IsNumber(Cell cell) => ForeignNumber.TryParse(ForeignNumber.WithoutDegreeSign(cell.Text), sign, out _);
-
-    private (int Line, string Text)? Problem(bool isNumbered)
-    {
-        for (var i = first; i < end; i++)
-        {
-            if (signs.IsComment(text.Lines[i], out _) || !IsMeantAsRow(text.Lines[i]))
-                continue;
-            var row = Cells.WithoutTrailing(Cells.Of(signs.WithoutRemark(text.Lines[i]), separator), FewestColumns);
-            for (var above = i - 1; above >= first; above--)
-                if (Header.Of(Uncommented(above), above + 1, separator, row.Length, request) is not null
-                    && Between(above + 1, i) is >= 0 and var between)
-                    return (between + 1, TableScan.NotUnderstood(text.Lines[between]));
-                else if (Header.Of(Uncommented(above), above + 1, separator, 0, request) is { } header)
-                    return (above + 1, string.Create(CultureInfo.InvariantCulture,
-                        $"names {header.Cells.Length} columns where line {i + 1} has {row.Length} values; ")
-                        + (separator == CellSeparator.Comma && !row.Any(cell => cell.Text.Contains('.'))
-                            ? "commas seem to separate columns and to be decimal signs too, so save the table with semicolons"
-                            : "say which are which by number: --columns alpha=1,cl=2,cd=3"));
-            return (i + 1, isNumbered
-                ? "has no number in a column that --columns names"
-                : request.Columns.Values.Any(column => column != ReadingRequest.NoColumn)
-                    ? $"no line above names {string.Join(", ", request.Columns.Values.Select(VisibleText.Quote))}, or columns known here; "
-                        + "say which are which by number: --columns alpha=1,cl=2,cd=3"
-                    : "no line above names the columns; say which are which by number: --columns alpha=1,cl=2,cd=3");
-        }
-        return null;
-    }
 
     // The line that keeps a header from being one.
     private int Between(int from, int row)

@@ -53,6 +53,9 @@ internal sealed partial class TableScan
     /// <summary>The line that names <see cref="Unit"/>.</summary>
     public int UnitLine { get; private set; }
 
+    /// <summary>There is no table so, as commas seem to separate columns and to be decimal signs too.</summary>
+    public bool HasCommasTwice { get; private set; }
+
     /// <summary>A minus sign of typesetters was read in a row.</summary>
     public bool HasForeignMinus { get; private set; }
 
@@ -78,6 +81,7 @@ internal sealed partial class TableScan
         var place = new TablePlace(_text, _request, _signs, Separator, Sign, First, End);
         if (!place.Find(out var header, out var firstRow, out var count, out var problem))
         {
+            HasCommasTwice = place.HasCommasTwice;
             if (problem is var (line, text))
                 _errors.Add("", new Place(_text.File, line, line == 0 ? 0 : 1), text);
             return;

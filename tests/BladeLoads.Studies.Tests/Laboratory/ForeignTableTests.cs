@@ -116,6 +116,12 @@ public class ForeignTableTests
     }
 
     [Fact]
+    public void The_record_says_that_a_line_was_not_believed_in_the_unit_of_the_angle()
+        => Assert.Contains(
+            "angles in degrees, as --angles says and as they go beyond all radians, though line 1 names radians",
+            Foreign.Read("alpha [rad];cl;cd\n-5;-0,4;0,01\n0;0,1;0,009\n5;0,6;0,01\n", "--angles degrees").Record);
+
+    [Fact]
     public void The_record_says_that_degree_signs_were_taken_from_angles()
     {
         var record = Foreign.Read("alpha;cl;cd\n-3°;-0,4;0,01\n0°;0,1;0,009\n4°;0,6;0,01\n").Record;

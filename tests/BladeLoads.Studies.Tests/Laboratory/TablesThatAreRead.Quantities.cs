@@ -165,5 +165,14 @@ internal static partial class TablesThatAreRead
             """, """
             -4 -0.4 0.01 | 0 0.1 0.009 | 4 0.6 0.01
             """),
+        new("degrees said of a column of radians that can be none", "--angles degrees", """
+            alpha [rad];cl;cd
+            -4;-0,4;0,01
+            0;0,1;0,009
+            4;0,6;0,01
+
+            """, """
+            -4 -0.4 0.01 | 0 0.1 0.009 | 4 0.6 0.01
+            """),
     ];
 }
