@@ -85,7 +85,7 @@ internal sealed class ReynoldsBlocks
         var unclear = scan.ReynoldsLines.FindAll(line => !line.IsUnderstood);
         foreach (var line in unclear)
             findings.Error(new Place(file, line.Line, 1),
-                $"{VisibleText.Quote(line.Text)} {line.Problem}; say it with --reynolds, or --columns reynolds=none for a table without");
+                $"{VisibleText.Quote(line.Text)} {line.Problem}; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without");
         if (unclear.Count > 0)
             return null;
         var ofRow = new double[scan.Rows.Count];

@@ -46,8 +46,10 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
         var isMultiplied = match.Groups["times"].Success || match.Groups["million"].Success || match.Groups["thousand"].Success;
         var end = isMultiplied ? match.Index + match.Length : match.Groups["number"].Index + number.Length;
         var (before, after) = (text[..match.Index], text[end..]);
-        if (MoreNumbers().IsMatch(after) || NumbersInARow().IsMatch(after) || ReynoldsSurroundings.NamesAnother(before, after))
+        if (ReynoldsSurroundings.NamesAnother(before, after))
             return Several;
+        if (MoreNumbers().IsMatch(after) || NumbersInARow().IsMatch(after))
+            return "names a Reynolds number, and another number stands right behind it";
         if (GoesOn().IsMatch(after))
             return NotUnderstood;
         var power = PowerOf(match);
@@ -57,7 +59,7 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
         {
             case [var value]:
                 values.Add(value);
-                return ReynoldsSurroundings.Qualifier(before, match.Groups["remark"].Value, after) is { } qualifier
+                return ReynoldsSurroundings.Qualifier(before, Remark(match), after) is { } qualifier
                     ? $"names a Reynolds number, and {VisibleText.Quote(qualifier)} beside it may make it another than that of the rows"
                     : null;
             case [var one, var other]:
@@ -76,6 +78,8 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     /// </summary>
     /// <remarks>Whether it multiplies or divides cannot be told from its sign, and need not: only one of the two gives such a number.</remarks>
     public static int PowerIn(string remark) => Millions().IsMatch(remark) ? 6 : Thousands().IsMatch(remark) ? 3 : 0;
+
+    private static string Remark(Match match) => match.Groups["suffix"].Success ? $"({match.Groups["suffix"].Value})" : match.Groups["remark"].Value;
 
     private static int PowerOf(Match match)
     {
@@ -98,7 +102,7 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     [GeneratedRegex(
         """
         (?<![\p{L}\p{N}_])
-        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))? (?:,?\s+re(?![\p{L}\p{N}_]))?) | re | rn ) (?![\p{L}\p{N}_])
+        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))? (?:,?\s+re(?![\p{L}\p{N}_]))?) | re(?:_(?<suffix>c|chord|nom|mean|max|min|crit|unit))? | rn ) (?![\p{L}\p{N}_])
         \s*
         (?<remark> [(\[{<][^)\]}>]*[)\]}>] | [x×*·/]\s*(?:10\s*\^?\s*[-−]?\s*[0-9⁰¹²³⁴⁵⁶⁷⁸⁹]+ | 1e[-+]?[0-9]+) )?
         (?:

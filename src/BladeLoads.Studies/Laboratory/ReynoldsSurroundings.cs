@@ -16,7 +16,7 @@ internal static partial class ReynoldsSurroundings
 
     // They say how or on what a section was measured, or nothing.
     private static readonly HashSet<string> Harmless = Words(
-        "the a an is chord stream freestream free nominal mean average test tested measured run polar polars section profile aerofoil data same "
+        "the a an is chord stream freestream free nominal nom mean average test tested measured run polar polars section profile aerofoil data same "
         + "clean soiled rough fouled eroded smooth tripped fixed forced natural transition approx approximately based number reynolds "
         + "millions million thousand thousands mio c re");
 
@@ -102,7 +102,7 @@ internal static partial class ReynoldsSurroundings
         """
         \s* (?: (?<end> [,;|] | [-–—](?=\s|$) )
         | (?<word> \p{L}[\p{L}\p{N}_.-]* ) (?<value> \s*[=:≈] | (?<=(?i:ma|mach|tu|ncrit|run|entry|test|section|case))\s+[0-9] )?
-        | (?<none> ["'()\[\].]+ ) | (?<sign> \S\S* ) )
+        | (?<none> ["'()\[\].\#*!=_~]+ ) | (?<sign> \S\S* ) )
         """,
         RegexOptions.IgnorePatternWhitespace | RegexOptions.CultureInvariant)]
     private static partial Regex Tokens();

@@ -238,6 +238,7 @@ public class ForeignTableTests
     [InlineData("Reynolds number Re = 1e6 and Ma 0.1", 1e6)]
     [InlineData("chord Reynolds number: 1e6; tripped at 5 % chord, q = 1.2e4 Pa", 1e6)]
     [InlineData("Re (chord) = 1e6 - clean", 1e6)]
+    [InlineData("## Re_c = 1e6 ##", 1e6)]
     public void A_line_that_names_a_reynolds_number_is_understood(string line, double reynolds)
         => Assert.Equal(
             [reynolds], Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Polars.Select(polar => polar.Reynolds));
@@ -246,13 +247,15 @@ public class ForeignTableTests
     [InlineData("# Tunnel: largest Reynolds number 6e6", "largest")]
     [InlineData("Re = 2.5e6 per metre", "per")]
     [InlineData("Re = 2.5e6, per metre", "per")]
-    [InlineData("Re = 2.5e6 1/m", "")]
+    [InlineData("Re = 2.5e6 1/m", "1")]
+    [InlineData("Re = 2.5e6, 2019", "1")]
     [InlineData("Re = 2.5e6 /m", "/m")]
     [InlineData("Re [1/m] = 2.5e6", "1/m")]
     [InlineData("# not Re = 1e6", "not")]
     [InlineData("critical at Re = 4e5", "critical")]
     [InlineData("Tunnel Re = 6e6", "Tunnel")]
     [InlineData("Re (max) = 6e6", "max")]
+    [InlineData("Re_max = 6e6", "max")]
     [InlineData("Re = 6e6 or more", "or")]
     [InlineData("Re = 6e6 (max.)", "max.")]
     [InlineData("Re up to 6e6", "?")]
@@ -270,10 +273,11 @@ public class ForeignTableTests
                 + (qualifier switch
                 {
                     "" => "more than one Reynolds number",
+                    "1" => "a Reynolds number, and another number stands right behind it",
                     "?" => "a Reynolds number in a way that is not understood",
                     _ => $"a Reynolds number, and '{qualifier}' beside it may make it another than that of the rows",
                 })
-                + "; say it with --reynolds, or --columns reynolds=none for a table without",
+                + "; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without",
             ],
             Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Errors);
 

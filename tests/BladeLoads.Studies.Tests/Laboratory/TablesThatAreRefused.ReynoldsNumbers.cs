@@ -24,7 +24,7 @@ internal static partial class TablesThatAreRefused
             20 1.0 0.05
 
             """, """
-            lab.txt:1:1: 'Reynolds numbers from 1e5 to 1e6' names a Reynolds number in a way that is not understood; say it with --reynolds, or --columns reynolds=none for a table without
+            lab.txt:1:1: 'Reynolds numbers from 1e5 to 1e6' names a Reynolds number in a way that is not understood; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without
             """),
         new("a Reynolds number without its unit", "", """
             Re = 1.5
@@ -34,7 +34,7 @@ internal static partial class TablesThatAreRefused
             20 1.0 0.05
 
             """, """
-            lab.txt:1:1: 'Re = 1.5' names a Reynolds number of 1.5, and those of blades are 1e4 to 1e9, so give its unit (--reynolds millions or thousands); say it with --reynolds, or --columns reynolds=none for a table without
+            lab.txt:1:1: 'Re = 1.5' names a Reynolds number of 1.5, and those of blades are 1e4 to 1e9, so give its unit (--reynolds millions or thousands); write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without
             """),
         new("a column of Reynolds numbers without its unit", "", """
             alpha cl cd Re
@@ -111,7 +111,7 @@ internal static partial class TablesThatAreRefused
             5 0.6 0.01
 
             """, """
-            lab.txt:1:1: 'Re = 1e6, 2e6' names more than one Reynolds number; say it with --reynolds, or --columns reynolds=none for a table without
+            lab.txt:1:1: 'Re = 1e6, 2e6' names more than one Reynolds number; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without
             """),
         new("a Reynolds number with a sign that may be decimal or not", "", """
             Re: 12,345 thousand
@@ -121,7 +121,7 @@ internal static partial class TablesThatAreRefused
             5 0.6 0.01
 
             """, """
-            lab.txt:1:1: 'Re: 12,345 thousand' names a Reynolds number that can be 12345 or 12345000; say it with --reynolds, or --columns reynolds=none for a table without
+            lab.txt:1:1: 'Re: 12,345 thousand' names a Reynolds number that can be 12345 or 12345000; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without
             """),
         new("millions said of Reynolds numbers that are none", "--reynolds millions", """
             Re = 1000000
@@ -131,7 +131,7 @@ internal static partial class TablesThatAreRefused
             5 0.6 0.01
 
             """, """
-            lab.txt:1:1: 'Re = 1000000' names a Reynolds number of 1000000, and those of blades are 1e4 to 1e9; say it with --reynolds, or --columns reynolds=none for a table without
+            lab.txt:1:1: 'Re = 1000000' names a Reynolds number of 1000000, and those of blades are 1e4 to 1e9; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without
             """),
         new("millions said of a column that is in none", "--reynolds millions", """
             alpha cl cd Re
