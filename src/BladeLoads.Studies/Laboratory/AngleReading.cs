@@ -54,11 +54,13 @@ internal sealed class AngleReading
             return null;
         }
         if (request.Angles is { } asked)
-            return new AngleReading(request, asked, $"angles in {InWords(asked)}, as --angles says", areDegrees ? "; is --angles radians right?" : "");
+            return new AngleReading(
+                request, asked, $"angles in {InWords(asked)}, as --angles says", areDegrees ? "; is --angles radians right?" : "");
         if (named is { } unit)
             return new AngleReading(
                 request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"),
-                areDegrees ? string.Create(CultureInfo.InvariantCulture, $"; if line {scan.UnitLine} is wrong to name radians, say --angles degrees") : "");
+                !areDegrees ? "" : string.Create(
+                    CultureInfo.InvariantCulture, $"; if line {scan.UnitLine} is wrong to name radians, say --angles degrees"));
         if (scan.Columns!.NameOf(ColumnRole.Angle) is { HasUnknownUnit: true })
         {
             findings.Error(new Place(file, scan.Header.Line, 1),

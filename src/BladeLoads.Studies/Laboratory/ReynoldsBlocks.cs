@@ -47,7 +47,8 @@ internal sealed class ReynoldsBlocks
         => request.LeavesOut(ColumnRole.Reynolds) ? "--columns reynolds=none that none is taken; leave one of the two out"
             : scan.Columns!.NameOf(ColumnRole.Reynolds)?.Power is > 0 and var power && power != (int)unit
                 ? $"{scan.Columns.Shown(ColumnRole.Reynolds)} names another unit; leave --reynolds out, or correct the name"
-            : scan.Columns[ColumnRole.Reynolds] is null && scan.ReynoldsLines.Count == 0 ? "the table names no Reynolds number; give it as a number: --reynolds 1.5e6"
+            : scan.Columns[ColumnRole.Reynolds] is null && scan.ReynoldsLines.Count == 0
+                ? "the table names no Reynolds number; give it as a number: --reynolds 1.5e6"
             : null;
 
     private static ReynoldsBlocks All(TableScan scan, double value, string why) => new([.. scan.Rows.Select(_ => value)], [why]);
@@ -85,7 +86,8 @@ internal sealed class ReynoldsBlocks
         var unclear = scan.ReynoldsLines.FindAll(line => !line.IsUnderstood);
         foreach (var line in unclear)
             findings.Error(new Place(file, line.Line, 1),
-                $"{VisibleText.Quote(line.Text)} {line.Problem}; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without");
+                $"{VisibleText.Quote(line.Text)} {line.Problem}; write it as Re = 1.5e6, say it with --reynolds, "
+                + "or say --columns reynolds=none for a table without");
         if (unclear.Count > 0)
             return null;
         var ofRow = new double[scan.Rows.Count];

@@ -102,7 +102,8 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     [GeneratedRegex(
         """
         (?<![\p{L}\p{N}_])
-        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))? (?:,?\s+re(?![\p{L}\p{N}_]))?) | re(?:_(?<suffix>c|chord|nom|mean|max|min|crit|unit))? | rn ) (?![\p{L}\p{N}_])
+        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))? (?:,?\s+re(?![\p{L}\p{N}_]))?)
+          | re(?:_(?<suffix>c|chord|nom|mean|max|min|crit|unit))? | rn ) (?![\p{L}\p{N}_])
         \s*
         (?<remark> [(\[{<][^)\]}>]*[)\]}>] | [x×*·/]\s*(?:10\s*\^?\s*[-−]?\s*[0-9⁰¹²³⁴⁵⁶⁷⁸⁹]+ | 1e[-+]?[0-9]+) )?
         (?:

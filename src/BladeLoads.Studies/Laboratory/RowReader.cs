@@ -96,7 +96,8 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
             ? ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign)
             : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}"
                 + (_power == 0 ? ". Is it in millions? Then say --reynolds millions"
-                    : $", and {(request.ReynoldsUnit is { } unit ? $"--reynolds says {ReynoldsBlocks.InWords(unit)}" : "the name of the column gives a unit")}"));
+                    : request.ReynoldsUnit is { } unit ? $", and --reynolds says {ReynoldsBlocks.InWords(unit)}"
+                    : ", and the name of the column gives a unit"));
         return double.NaN;
     }
 

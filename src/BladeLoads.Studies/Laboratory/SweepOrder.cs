@@ -139,8 +139,8 @@ internal sealed class SweepOrder(SweepChoice? choice, Action<int, int, string> r
                 continue;
             distinct = false;
             report(other.Line, other.Column, string.Create(CultureInfo.InvariantCulture,
-                $"alpha {CanonicalText.Of(other.Angle)} has {Coefficients(other)} here and {Beside(one, other)}{Coefficients(one)} in line {one.Line}; "
-                    + $"which is meant cannot be told, keep one"));
+                $"alpha {CanonicalText.Of(other.Angle)} has {Coefficients(other)} here "
+                    + $"and {Beside(one, other)}{Coefficients(one)} in line {one.Line}; which is meant cannot be told, keep one"));
         }
         return distinct;
     }

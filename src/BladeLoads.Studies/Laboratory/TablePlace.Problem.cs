@@ -65,7 +65,8 @@ internal sealed partial class TablePlace
         foreach (var role in request.Needed)
         {
             var said = $"--columns {ColumnRoleWords.Of(role)}={request.Columns[role]}";
-            if (!int.TryParse(request.Columns[role], NumberStyles.None, CultureInfo.InvariantCulture, out var number) || number < 1 || number > row.Length)
+            if (!int.TryParse(request.Columns[role], NumberStyles.None, CultureInfo.InvariantCulture, out var number)
+                || number < 1 || number > row.Length)
                 return string.Create(CultureInfo.InvariantCulture, $"{said}: the table has columns 1 to {row.Length}");
             if (!IsNumber(row[number - 1]))
                 return $"{said}: that column holds {VisibleText.Quote(row[number - 1].Text)} here, no number";

@@ -182,7 +182,8 @@ internal static class PolarReadCommand
         const NumberStyles style = NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
         if (double.TryParse(text, style, CultureInfo.InvariantCulture, out var number) && PolarLimits.IsReynoldsOfABlade(number))
             return new ReynoldsSaid(number, null);
-        argument.AddError($"--reynolds is '{Printable.Of(text)}'; give a number from {PolarLimits.ReynoldsInWords}: 1.5e6; or {Millions} or {Thousands}, "
+        argument.AddError(
+            $"--reynolds is '{Printable.Of(text)}'; give a number from {PolarLimits.ReynoldsInWords}: 1.5e6; or {Millions} or {Thousands}, "
             + "the unit of those in the table");
         return null;
     }
