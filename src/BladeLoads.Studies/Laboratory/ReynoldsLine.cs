@@ -23,6 +23,9 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     public static ReynoldsLine? In(string whole, int line, ReynoldsUnit? unit)
     {
         var text = whole.Length <= LongestLook ? whole : whole[..LongestLook];
+        // Most lines of a file are asked, and patterns are slow.
+        if (text.AsSpan().IndexOfAnyInRange('0', '9') < 0 || text.AsSpan().IndexOfAny('r', 'R') < 0)
+            return null;
         var values = new HashSet<double>();
         string? problem = null;
         foreach (Match match in Naming().Matches(text))

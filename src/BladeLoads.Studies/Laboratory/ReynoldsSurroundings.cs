@@ -110,7 +110,7 @@ internal static partial class ReynoldsSurroundings
     // Unless a letter stands for it: q = 1.2e4.
     [GeneratedRegex(
         """
-        (?<![\p{L}\p{N}_.,^]) (?<!\b\p{L}{1,2}\s*=\s*)
+        (?=[0-9]) (?<![\p{L}\p{N}_.,^]) (?<!\b\p{L}{1,2}\s*=\s*)
         [0-9][0-9.,]* (?: [ed]\+?0?[4-8](?![0-9]) | \s*[x×*·]\s*10\s*(?:\^|\*\*)?\s*[4-8⁴⁵⁶⁷⁸](?![0-9]) | \s*(?:millions?|mio)\b )
         """,
         RegexOptions.IgnoreCase | RegexOptions.IgnorePatternWhitespace | RegexOptions.CultureInvariant)]
@@ -119,7 +119,7 @@ internal static partial class ReynoldsSurroundings
     // Not 20190704: a day.
     [GeneratedRegex(
         """
-        (?<![\p{L}\p{N}_.,^/-]) (?<!\b\p{L}{1,2}\s*=\s*)
+        (?=[0-9]) (?<![\p{L}\p{N}_.,^/-]) (?<!\b\p{L}{1,2}\s*=\s*)
         (?: (?!(?:19|20)[0-9]{6}(?![0-9])) [0-9]{5,9} | [0-9]{1,3}(?:[ ',.][0-9]{3}){2} ) (?![\p{L}\p{N}_/-]|[.,][0-9])
         """,
         RegexOptions.IgnorePatternWhitespace | RegexOptions.CultureInvariant)]
