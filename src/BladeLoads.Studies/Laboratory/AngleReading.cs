@@ -16,7 +16,11 @@ internal sealed class AngleReading
     private int _halfTurns;
     private int _turns;
 
-    private AngleReading(ReadingRequest request, AngleUnit unit, string why) => (_request, _unit, Why) = (request, unit, why);
+    // What would do where angles go beyond those of their unit, which may be another; empty where it cannot.
+    private readonly string _advice;
+
+    private AngleReading(ReadingRequest request, AngleUnit unit, string why, string advice = "")
+        => (_request, _unit, Why, _advice) = (request, unit, why, advice);
 
     /// <summary>The unit and from where it is known, for the record.</summary>
     public string Why { get; }
@@ -38,17 +42,25 @@ internal sealed class AngleReading
     public static AngleReading? Of(TableScan scan, ReadingRequest request, string file, Findings findings)
     {
         var named = scan.Unit;
+        var (lowest, highest) = (scan.Rows.Min(row => row.Angle), scan.Rows.Max(row => row.Angle));
+        var areDegrees = !CanBeRadians(lowest, highest);
         if (request.Angles is { } said && named is { } other && other != said)
         {
+            if (said == AngleUnit.Degrees && areDegrees)
+                return new AngleReading(request, said, string.Create(CultureInfo.InvariantCulture,
+                    $"angles in degrees, as --angles says and as they go beyond all radians, though line {scan.UnitLine} names radians"));
             findings.Error(new Place(file, scan.UnitLine, 1), $"names {InWords(other)} for the angle of attack and --angles says {InWords(said)}; "
                 + "if the line is wrong, leave it out with --lines and say --columns by number");
             return null;
         }
         if (request.Angles is { } asked)
-            return new AngleReading(request, asked, $"angles in {InWords(asked)}, as --angles says");
+            return new AngleReading(
+                request, asked, $"angles in {InWords(asked)}, as --angles says", areDegrees ? "; is --angles radians right?" : "");
         if (named is { } unit)
             return new AngleReading(
-                request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"));
+                request, unit, string.Create(CultureInfo.InvariantCulture, $"angles in {InWords(unit)}, as line {scan.UnitLine} says"),
+                !areDegrees ? "" : string.Create(
+                    CultureInfo.InvariantCulture, $"; if line {scan.UnitLine} is wrong to name radians, say --angles degrees"));
         if (scan.Columns!.NameOf(ColumnRole.Angle) is { HasUnknownUnit: true })
         {
             findings.Error(new Place(file, scan.Header.Line, 1),
@@ -56,10 +68,8 @@ internal sealed class AngleReading
                 + "and give other units as one of these");
             return null;
         }
-        var (lowest, highest) = (scan.Rows.Min(row => row.Angle), scan.Rows.Max(row => row.Angle));
-        // Radians go from -pi to pi, or from 0 to 2 pi.
-        if (Math.Abs(lowest) <= PolarTable.LargestRadian && Math.Abs(highest) <= PolarTable.LargestRadian
-            || lowest >= 0 && highest <= 2 * PolarTable.LargestRadian)
+        // Nobody counts radians from 0 to -2 pi without saying so.
+        if (!areDegrees && (lowest >= 0 || lowest >= -PolarTable.LargestRadian))
         {
             findings.Error(new Place(file, scan.Rows[0].Line, scan.Rows[0].At.Angle),
                 $"alpha runs from {CanonicalText.Of(lowest)} to {CanonicalText.Of(highest)} "
@@ -68,6 +78,11 @@ internal sealed class AngleReading
         }
         return new AngleReading(request, AngleUnit.Degrees, "angles in degrees, as they go beyond all radians");
     }
+
+    // Radians go from -pi to pi, or from 0 to 2 pi on either side.
+    private static bool CanBeRadians(double lowest, double highest)
+        => Math.Abs(lowest) <= PolarTable.LargestRadian && Math.Abs(highest) <= PolarTable.LargestRadian
+            || lowest >= 0 && highest <= 2 * PolarTable.LargestRadian || highest <= 0 && lowest >= -2 * PolarTable.LargestRadian;
 
     /// <summary>Degrees, -180 to 180; null, with what is wrong, for an angle beyond.</summary>
     public double? ToDegrees(double angle, out string problem)
@@ -92,9 +107,12 @@ internal sealed class AngleReading
             var turn = Math.CopySign(360, degrees);
             return isTurn ? 0 : TwelveDigits.Of(Math.Clamp(degrees - turn, -180, 180));
         }
+        var advice = _unit == AngleUnit.Radians ? _advice : "";
         problem = $"alpha is {CanonicalText.Of(angle)}{(_unit == AngleUnit.Radians ? $" rad, {CanonicalText.Of(degrees)} deg" : "")}; "
             + "angles go from -180 to 180 degrees"
-            + (goesRound ? $"; where they go round from 0 to {(degrees < 0 ? "-360" : "360")}, say --wrap" : "");
+            + (advice.Length > 0 ? advice
+                : goesRound ? $"; where they go round from 0 to {(degrees < 0 ? "-360" : "360")}, say --wrap"
+                : "");
         return null;
     }
 

@@ -8,7 +8,10 @@ internal sealed record AngleRun(int Direction, List<LaboratoryRow> Rows)
 
     private double Most => Math.Max(Rows[0].Angle, Rows[^1].Angle);
 
-    /// <summary>The rows as runs. Where angles turn from one run to the next, the row at the turn is in both.</summary>
+    /// <summary>
+    /// The rows as runs. Where angles turn from one run to the next, the row at the turn is in both; of two at one angle there, the first ends
+    /// the one run and the second begins the other.
+    /// </summary>
     public static List<AngleRun> Of(IReadOnlyList<LaboratoryRow> rows)
     {
         var runs = new List<AngleRun>();
@@ -19,11 +22,14 @@ internal sealed record AngleRun(int Direction, List<LaboratoryRow> Rows)
             var step = run.Count == 0 ? 0 : Math.Sign(rows[i].Angle - run[^1].Angle);
             if (direction != 0 && step != 0 && step != direction)
             {
-                runs.Add(new AngleRun(direction, run));
                 // A jump to where another sweep begins, or over the whole of this one, is no turn.
                 var goesBack = Math.Sign(rows[i].Angle - run[0].Angle) == direction;
                 var turns = goesBack && (i + 1 == rows.Count || Math.Sign(rows[i + 1].Angle - rows[i].Angle) != direction);
-                run = turns ? [run[^1]] : [];
+                List<LaboratoryRow> next = turns ? [run[^1]] : [];
+                if (turns && IsMeasuredTwice(run))
+                    run.RemoveAt(run.Count - 1);
+                runs.Add(new AngleRun(direction, run));
+                run = next;
                 step = turns ? step : 0;
                 direction = 0;
             }
@@ -33,6 +39,10 @@ internal sealed record AngleRun(int Direction, List<LaboratoryRow> Rows)
         runs.Add(new AngleRun(direction, run));
         return runs;
     }
+
+    // Of three at one angle it cannot be told which end which run.
+    private static bool IsMeasuredTwice(List<LaboratoryRow> run)
+        => run.Count > 2 && run[^1].Angle == run[^2].Angle && run[^3].Angle != run[^1].Angle;
 
     /// <summary>Two runs over the same range, in the order of the file; null where there are none: ends may touch.</summary>
     public static (AngleRun One, AngleRun Other)? Overlap(List<AngleRun> runs)

@@ -42,10 +42,19 @@ internal sealed class ColumnChoice
     /// <summary>For people: <c>'CL' (column 2)</c>.</summary>
     public string Shown(ColumnRole role) => Shown(this[role]!.Value);
 
-    /// <summary>Names of columns that no role has.</summary>
+    /// <summary>Names of columns that no role has, but for <see cref="MomentsNotTaken"/>.</summary>
     public IEnumerable<string> NotTaken
-        => Enumerable.Range(0, _count)
-            .Where(i => !_places.ContainsValue(i) && (i >= _header.Cells.Length || _header.Cells[i].Text.Length > 0)).Select(Shown);
+        => Enumerable.Range(0, _count).Where(
+            i => !_places.ContainsValue(i) && !MayBeTheMoment(i) && (i >= _header.Cells.Length || _header.Cells[i].Text.Length > 0)).Select(Shown);
+
+    /// <summary>Where no column is taken for the moment: those that may be it, each with the reason and what takes it.</summary>
+    public IEnumerable<string> MomentsNotTaken
+        => Enumerable.Range(0, _count).Where(MayBeTheMoment).Select(i => $"{Shown(i)} is not taken, as {MomentDoubt.Of(_header.Names[i])}"
+            + (_header.Names[i].IsMultiple ? "" : $"; --columns cm={Number(i)} takes it as it stands"));
+
+    private bool MayBeTheMoment(int place)
+        => this[ColumnRole.Moment] is null && !_request.LeavesOut(ColumnRole.Moment) && !_places.ContainsValue(place)
+            && place < _header.Names.Length && _header.Names[place].Is(ColumnRole.Moment);
 
     private void Take(ColumnRole role, int? place)
     {

@@ -24,11 +24,11 @@ internal sealed partial record ColumnName(
         (ColumnRole.Drag, "cd drag dragcoefficient dragcoeff dragcoef coefficientofdrag cdrag totaldrag totaldragcoefficient cdtotal "
             + "widerstandsbeiwert"),
         (ColumnRole.Moment, "cm moment momentcoefficient momentcoeff pitchingmoment pitchingmomentcoefficient cmc4 cm14 cm14c cm25 cm025 cm025c "
-            + "cmquarterchord cmoment momentenbeiwert"),
+            + "cmquarterchord cmnoseuppositive cmpositivenoseup cmoment momentenbeiwert"),
         (ColumnRole.Reynolds, "re reynolds reynoldsnumber reynoldsno rey renumber reynoldszahl rn"),
-        (ColumnRole.Normal, "cn normalforce normalforcecoefficient cnormal"),
-        (ColumnRole.Tangential, "ct tangentialforce tangentialforcecoefficient ctangential"),
-        (ColumnRole.Axial, "cc chordforce chordforcecoefficient chordwiseforce axialforce axialforcecoefficient"),
+        (ColumnRole.Normal, "cn normal normalforce normalforcecoefficient cnormal"),
+        (ColumnRole.Tangential, "ct tangential tangentialforce tangentialforcecoefficient ctangential"),
+        (ColumnRole.Axial, "cc chordforce chordforcecoefficient chordwiseforce axial axialforce axialforcecoefficient"),
         (ColumnRole.Section, "section airfoil aerofoil profile foil"));
 
     // One letter in one country, another in the next.
@@ -49,7 +49,12 @@ internal sealed partial record ColumnName(
         StringComparer.Ordinal);
 
     /// <summary>Its numbers are no ratios as they stand: <c>cd [%]</c>, <c>cl x 10^3</c>, <c>-cm</c>.</summary>
-    public bool IsMultiple => !Is(ColumnRole.Reynolds) && (Shown.TrimStart().StartsWith('-') || Multiple().IsMatch(Shown));
+    public bool IsMultiple => !Is(ColumnRole.Reynolds) && (IsTurned || Multiple().IsMatch(Shown));
+
+    /// <summary><c>-cm</c>, <c>cm (nose down positive)</c>.</summary>
+    public bool IsTurned => Shown.TrimStart() is ['-' or '\u2212' or '\u2013', ..]
+        || Is(ColumnRole.Moment) && Shown.Contains("nose", StringComparison.OrdinalIgnoreCase)
+            && Shown.Contains("down", StringComparison.OrdinalIgnoreCase);
 
     /// <summary>Of an angle: a unit stands beside it, and is not known.</summary>
     public bool HasUnknownUnit => Unit is null && !IsPlain && Shown.AsSpan().IndexOfAny("[({/") >= 0;
@@ -96,7 +101,7 @@ internal sealed partial record ColumnName(
         foreach (var stem in new[] { "alpha", "aoa", "cl", "cd", "cm" })
             if (whole.StartsWith(stem, StringComparison.Ordinal) && Versions.Contains(whole[stem.Length..]))
                 return (stem, whole[stem.Length..]);
-        return whole is "cdp" or "cdf" or "cdwake" or "cdpressure" ? ("cd", whole[2..]) : null;
+        return whole is "cdp" or "cdf" or "cdwake" or "cdpressure" or "cmle" or "cmte" or "cmac" or "cm0" ? (whole[..2], whole[2..]) : null;
     }
 
     // The name, and the unit or the power of ten that stands beside it.
@@ -122,7 +127,8 @@ internal sealed partial record ColumnName(
         return (name, UnitMeaning.Unknown, 0);
     }
 
-    private static List<string> Tokens(string name)
+    /// <summary>Words and numbers in a name, in small letters.</summary>
+    public static List<string> Tokens(string name)
     {
         var tokens = new List<string>();
         var token = new StringBuilder();

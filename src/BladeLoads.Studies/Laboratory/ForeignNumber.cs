@@ -30,13 +30,18 @@ internal static class ForeignNumber
     public static bool LooksLikeOne(string text)
     {
         var digits = false;
-        foreach (var c in text)
+        foreach (var c in WithoutDegreeSign(text))
             if (char.IsAsciiDigit(c))
                 digits = true;
             else if (!(c is '+' or '-' or '.' or ',' or '\'' or 'e' or 'E' or 'd' or 'D' || MinusSigns.Contains(c)))
                 return false;
         return digits && !char.IsAsciiLetter(text[0]);
     }
+
+    /// <summary>Right behind the last digit, as angles may bear it.</summary>
+    public static bool HasDegreeSign(string text) => text is [.., >= '0' and <= '9', '\u00B0' or '\u00BA'];
+
+    public static string WithoutDegreeSign(string text) => HasDegreeSign(text) ? text[..^1] : text;
 
     public static bool HasForeignMinus(string text) => text.AsSpan().IndexOfAny(MinusSigns) >= 0;
 
@@ -61,6 +66,8 @@ internal static class ForeignNumber
             return $"{name} is {quoted}, a formula; give its value";
         if (IsAbsent(text))
             return $"{name} is {quoted}, no number; leave such rows out with --leave-out incomplete";
+        if (text[^1] == '%' && TryParse(text[..^1].TrimEnd(), sign, out _))
+            return $"{name} is {quoted}, in percent; only ratios are read, so give the table as such";
         var other = sign == DecimalSign.Point ? DecimalSign.Comma : DecimalSign.Point;
         if (TryParse(text, other, out _))
             return sign == DecimalSign.Point

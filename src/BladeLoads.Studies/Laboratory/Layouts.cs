@@ -12,6 +12,12 @@ internal static class Layouts
     /// <summary>Null, with the reason reported, where no way makes sense, or more than one.</summary>
     public static TableScan? Choose(ForeignText text, ReadingRequest request, Findings findings)
     {
+        if (request is { Separator: CellSeparator.Comma, DecimalSign: DecimalSign.Comma } && !HasQuotes(text))
+        {
+            findings.Error(new Place(text.File, 0, 0),
+                "a comma cannot both separate columns and be the decimal sign where no cell stands in quotes; give --separator or --decimal another");
+            return null;
+        }
         var scans = Ways(text, request).Select(way => TableScan.Of(text, request, way.Separator, way.Sign)).ToList();
         var sound = scans.FindAll(scan => scan.IsSound);
         if (sound.Count == 0)
@@ -36,16 +42,19 @@ internal static class Layouts
         foreach (var separator in request.Separator is { } known ? [known] : Enum.GetValues<CellSeparator>().Where(s => Occurs(s, text)))
             foreach (var decimalSign in signs)
                 // Between commas a decimal comma stands in quotes or nowhere.
-                if (!(separator == CellSeparator.Comma && decimalSign == DecimalSign.Comma) || text.Lines.Any(line => line.Contains('"')))
+                if (!(separator == CellSeparator.Comma && decimalSign == DecimalSign.Comma) || HasQuotes(text))
                     yield return (separator, decimalSign);
     }
+
+    private static bool HasQuotes(ForeignText text) => text.Lines.Any(line => line.Contains('"'));
 
     private static bool Occurs(CellSeparator separator, ForeignText text)
         => Cells.SignOf(separator) is not { } sign || text.Lines.Any(line => line.Contains(sign));
 
-    // The way that goes farthest: what is wrong in it is most likely what is wrong.
+    // The way that goes farthest: what is wrong in it is most likely what is wrong. Blanks go far where every cell ends in a comma.
     private static TableScan Nearest(List<TableScan> scans) => scans
-        .OrderByDescending(scan => scan.Rows.Count)
+        .OrderByDescending(scan => scan.HasCommasTwice && !scans.Exists(other => other.Rows.Count > 0))
+        .ThenByDescending(scan => scan.Rows.Count)
         .ThenByDescending(scan => scan.Columns is not null)
         .ThenByDescending(scan => scan.Header.Cells.Length)
         .ThenByDescending(scan => scan.ErrorCount > 0)

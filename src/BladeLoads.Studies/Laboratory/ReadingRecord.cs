@@ -25,8 +25,9 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
         if (request.Section is { } section)
             lines.Add($"rows of section '{section}', as --section says");
         lines.Add($"columns: {Columns()}");
+        lines.AddRange(scan.Columns!.MomentsNotTaken.Select(moment => $"no moment: {moment}"));
         lines.Add(angles.Why);
-        lines.Add(reynolds.Why);
+        lines.AddRange(reynolds.Why);
         var done = Conversions().ToList();
         if (done.Count > 0)
             lines.Add($"converted: {string.Join("; ", done)}");
@@ -54,7 +55,11 @@ internal sealed class ReadingRecord(ForeignText text, ReadingRequest request, Ta
             yield return "cl and cd from forces square to the chord and along it, 12 significant digits";
         if (scan.Columns!.NameOf(ColumnRole.Reynolds)?.Power is > 0 and var power)
             yield return $"Reynolds numbers times {CanonicalText.Of(Math.Pow(10, power))}";
+        else if (request.ReynoldsUnit is { } unit)
+            yield return $"Reynolds numbers without a unit times {CanonicalText.Of(Math.Pow(10, (int)unit))}, as --reynolds says";
         if (scan.HasForeignMinus)
             yield return "minus signs of typesetters to -";
+        if (scan.HasDegreeSigns)
+            yield return "degree signs taken from angles";
     }
 }

@@ -23,6 +23,13 @@ public enum CellSeparator
     Blanks,
 }
 
+/// <summary>Of Reynolds numbers beside which none stands; the value is the power of ten.</summary>
+public enum ReynoldsUnit
+{
+    Thousands = 3,
+    Millions = 6,
+}
+
 /// <summary>Which rows count where a file holds the angles more than once, up and down.</summary>
 public enum SweepChoice
 {
@@ -52,6 +59,9 @@ public sealed record ReadingRequest
 
     /// <summary>Of the whole table, which names none; 1e4 or more.</summary>
     public double? Reynolds { get; init; }
+
+    /// <summary>Of the Reynolds numbers in the table, where neither the name of their column nor the line that names them says one.</summary>
+    public ReynoldsUnit? ReynoldsUnit { get; init; }
 
     /// <summary>A line that begins with this is a comment, as are those that begin with <c># % ! //</c>.</summary>
     public string? Comment { get; init; }

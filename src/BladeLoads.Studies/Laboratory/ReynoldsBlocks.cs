@@ -1,4 +1,6 @@
+using System.Collections.Immutable;
 using System.Globalization;
+using BladeLoads.Studies.Files;
 using BladeLoads.Studies.Fingerprints;
 
 namespace BladeLoads.Studies.Laboratory;
@@ -6,12 +8,14 @@ namespace BladeLoads.Studies.Laboratory;
 /// <summary>Which Reynolds number the rows of a foreign table have: by column, by lines that name one, as the user says, or none.</summary>
 internal sealed class ReynoldsBlocks
 {
+    private const int MostLinesShown = 12;
+
     private readonly double[] _ofRow;
 
-    private ReynoldsBlocks(double[] ofRow, string why) => (_ofRow, Why) = (ofRow, why);
+    private ReynoldsBlocks(double[] ofRow, ImmutableArray<string> why) => (_ofRow, Why) = (ofRow, why);
 
     /// <summary>From where the numbers are known, for the record.</summary>
-    public string Why { get; }
+    public ImmutableArray<string> Why { get; }
 
     /// <summary>NaN where the table has none.</summary>
     public double OfRow(int index) => _ofRow[index];
@@ -19,6 +23,11 @@ internal sealed class ReynoldsBlocks
     /// <summary>Null, with the reasons reported, where they cannot be told.</summary>
     public static ReynoldsBlocks? Of(TableScan scan, ReadingRequest request, string file, Findings findings)
     {
+        if (request.ReynoldsUnit is { } unit && UnitProblem(scan, request, unit) is { } problem)
+        {
+            findings.Error(new Place(file, 0, 0), $"--reynolds says {InWords(unit)}, and {problem}");
+            return null;
+        }
         if (scan.Columns![ColumnRole.Reynolds] is not null)
             return OfColumn(scan, request, file, findings);
         if (request.LeavesOut(ColumnRole.Reynolds))
@@ -32,7 +41,17 @@ internal sealed class ReynoldsBlocks
             : OfLines(scan, file, findings);
     }
 
-    private static ReynoldsBlocks All(TableScan scan, double value, string why) => new([.. scan.Rows.Select(_ => value)], why);
+    public static string InWords(ReynoldsUnit unit) => unit == ReynoldsUnit.Millions ? "millions" : "thousands";
+
+    private static string? UnitProblem(TableScan scan, ReadingRequest request, ReynoldsUnit unit)
+        => request.LeavesOut(ColumnRole.Reynolds) ? "--columns reynolds=none that none is taken; leave one of the two out"
+            : scan.Columns!.NameOf(ColumnRole.Reynolds)?.Power is > 0 and var power && power != (int)unit
+                ? $"{scan.Columns.Shown(ColumnRole.Reynolds)} names another unit; leave --reynolds out, or correct the name"
+            : scan.Columns[ColumnRole.Reynolds] is null && scan.ReynoldsLines.Count == 0
+                ? "the table names no Reynolds number; give it as a number: --reynolds 1.5e6"
+            : null;
+
+    private static ReynoldsBlocks All(TableScan scan, double value, string why) => new([.. scan.Rows.Select(_ => value)], [why]);
 
     private static ReynoldsBlocks? OfColumn(TableScan scan, ReadingRequest request, string file, Findings findings)
     {
@@ -43,10 +62,11 @@ internal sealed class ReynoldsBlocks
                 + "leave the column out with --columns reynolds=none, or --reynolds");
             return null;
         }
-        return new ReynoldsBlocks([.. scan.Rows.Select(row => row.Reynolds)], $"Reynolds numbers of column {scan.Columns!.Shown(ColumnRole.Reynolds)}"
-            + (scan.ReynoldsLines.Count == 0
-                ? ""
-                : $"; what {Lines(scan.ReynoldsLines)} {(scan.ReynoldsLines.Count == 1 ? "says" : "say")} of them is not taken"));
+        var others = scan.ReynoldsLines.Count == 0
+            ? ""
+            : $"; what {Lines(scan.ReynoldsLines)} {(scan.ReynoldsLines.Count == 1 ? "says" : "say")} of them is not taken";
+        return new ReynoldsBlocks(
+            [.. scan.Rows.Select(row => row.Reynolds)], [$"Reynolds numbers of column {scan.Columns!.Shown(ColumnRole.Reynolds)}{others}"]);
     }
 
     private static ReynoldsBlocks? AsSaid(TableScan scan, double asked, string file, Findings findings)
@@ -66,8 +86,8 @@ internal sealed class ReynoldsBlocks
         var unclear = scan.ReynoldsLines.FindAll(line => !line.IsUnderstood);
         foreach (var line in unclear)
             findings.Error(new Place(file, line.Line, 1),
-                "names a Reynolds number in a way that is not understood, or more than one; say it with --reynolds, or "
-                + "--columns reynolds=none for a table without");
+                $"{VisibleText.Quote(line.Text)} {line.Problem}; write it as Re = 1.5e6, say it with --reynolds, "
+                + "or say --columns reynolds=none for a table without");
         if (unclear.Count > 0)
             return null;
         var ofRow = new double[scan.Rows.Count];
@@ -95,7 +115,11 @@ internal sealed class ReynoldsBlocks
         if (next < lines.Count && lines[next].Value != current!.Value.Value)
             return Refuse(lines[next].Line, string.Create(CultureInfo.InvariantCulture,
                 $"names a Reynolds number of {CanonicalText.Of(lines[next].Value)} and no row stands below; choose rows with --lines"));
-        return new ReynoldsBlocks(ofRow, $"Reynolds number{(lines.Count == 1 ? "" : "s")} of {Lines(lines)}");
+        return new ReynoldsBlocks(ofRow, [
+            .. lines.Take(MostLinesShown).Select(line => string.Create(
+                CultureInfo.InvariantCulture, $"Reynolds number {CanonicalText.Of(line.Value)} of line {line.Line}: {VisibleText.Quote(line.Text)}")),
+            .. lines.Count <= MostLinesShown ? [] : (string[])[$"Reynolds numbers of {Lines([.. lines.Skip(MostLinesShown)])} besides"],
+        ]);
 
         ReynoldsBlocks? Refuse(int line, string why)
         {

@@ -1,41 +1,76 @@
 using System.Text.RegularExpressions;
+using BladeLoads.Studies.Files;
+using BladeLoads.Studies.Fingerprints;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Studies.Laboratory;
 
 /// <summary>A line that names a Reynolds number: <c>Re = 1.0e6</c>, <c>Reynolds number 1 000 000</c>, <c>Re (millions) 1.5</c>.</summary>
 /// <param name="Line">Counted from 1.</param>
+/// <param name="Text">Of the line.</param>
 /// <param name="Value">NaN where the number cannot be told.</param>
-internal readonly partial record struct ReynoldsLine(int Line, double Value)
+/// <param name="Problem">Why it cannot be told: how the text names it.</param>
+internal readonly partial record struct ReynoldsLine(int Line, string Text, double Value, string Problem)
 {
     private const int LongestLook = 200;   // characters: a line that announces something does so early
+    private const string Several = "names more than one Reynolds number";
+    private const string NotUnderstood = "names a Reynolds number in a way that is not understood";
 
     public bool IsUnderstood => !double.IsNaN(Value);
 
     /// <summary>Null for a line that names none.</summary>
-    public static ReynoldsLine? In(string whole, int line)
+    /// <param name="unit">Of numbers beside which none stands.</param>
+    public static ReynoldsLine? In(string whole, int line, ReynoldsUnit? unit)
     {
         var text = whole.Length <= LongestLook ? whole : whole[..LongestLook];
+        // Most lines of a file are asked, and patterns are slow.
+        if (text.AsSpan().IndexOfAnyInRange('0', '9') < 0 || text.AsSpan().IndexOfAny('r', 'R') < 0)
+            return null;
         var values = new HashSet<double>();
-        var isUnclear = false;
+        string? problem = null;
         foreach (Match match in Naming().Matches(text))
         {
-            if (!match.Groups["number"].Success)
-            {
-                isUnclear |= match.Groups["whole"].Success && text.AsSpan(match.Index).IndexOfAnyInRange('0', '9') >= 0;
-                continue;
-            }
-            var number = match.Groups["number"].Value.TrimEnd(' ', '.', ',', '\'', '\u2019', '\u00A0', '\u2009', '\u202F');
-            var isMultiplied = match.Groups["times"].Success || match.Groups["million"].Success || match.Groups["thousand"].Success;
-            var end = isMultiplied ? match.Index + match.Length : match.Groups["number"].Index + number.Length;
-            if (!MoreNumbers().IsMatch(text[end..]) && !NumbersInARow().IsMatch(text[end..])
-                && ReynoldsText.TryParse(number, PowerOf(match), null, out var value))
-                values.Add(value);
-            else
-                isUnclear = true;
+            if (match.Groups["number"].Success)
+                problem = Read(match, text, unit, values) ?? problem;
+            else if (match.Groups["whole"].Success && text.AsSpan(match.Index).IndexOfAnyInRange('0', '9') >= 0
+                || ReynoldsSurroundings.Compares(match.Groups["remark"].Value + text[(match.Index + match.Length)..]))
+                problem ??= NotUnderstood;
         }
-        return values.Count == 1 && !isUnclear ? new ReynoldsLine(line, values.First())
-            : values.Count > 0 || isUnclear ? new ReynoldsLine(line, double.NaN)
+        problem ??= values.Count > 1 ? Several : null;
+        return problem is not null ? new ReynoldsLine(line, whole.Trim(), double.NaN, problem)
+            : values.Count == 1 ? new ReynoldsLine(line, whole.Trim(), values.First(), "")
             : null;
+    }
+
+    // What is wrong with the number; null where it is one of the values.
+    private static string? Read(Match match, string text, ReynoldsUnit? unit, HashSet<double> values)
+    {
+        var number = match.Groups["number"].Value.TrimEnd(' ', '.', ',', '\'', '\u2019', '\u00A0', '\u2009', '\u202F');
+        var isMultiplied = match.Groups["times"].Success || match.Groups["million"].Success || match.Groups["thousand"].Success;
+        var end = isMultiplied ? match.Index + match.Length : match.Groups["number"].Index + number.Length;
+        var (before, after) = (text[..match.Index], text[end..]);
+        if (ReynoldsSurroundings.NamesAnother(before, after))
+            return Several;
+        if (MoreNumbers().IsMatch(after) || NumbersInARow().IsMatch(after))
+            return "names a Reynolds number, and another number stands right behind it";
+        if (GoesOn().IsMatch(after))
+            return NotUnderstood;
+        var power = PowerOf(match);
+        if (power == 0 && number.AsSpan().IndexOfAny("eEdD") < 0)
+            power = (int)(unit ?? 0);
+        switch (ReynoldsText.Readings(number, power))
+        {
+            case [var value]:
+                values.Add(value);
+                return ReynoldsSurroundings.Qualifier(before, Remark(match), after) is { } qualifier
+                    ? $"names a Reynolds number, and {VisibleText.Quote(qualifier)} beside it may make it another than that of the rows"
+                    : null;
+            case [var one, var other]:
+                return $"names a Reynolds number that can be {CanonicalText.Of(one)} or {CanonicalText.Of(other)}";
+            default:
+                return $"names a Reynolds number of {number}, and those of blades are {PolarLimits.ReynoldsInWords}"
+                    + (power == 0 ? ", so give its unit (--reynolds millions or thousands)" : "");
+        }
     }
 
     /// <summary>Whether a cell of a row names a Reynolds number: a remark that matters, or a line that ran into the row.</summary>
@@ -46,6 +81,8 @@ internal readonly partial record struct ReynoldsLine(int Line, double Value)
     /// </summary>
     /// <remarks>Whether it multiplies or divides cannot be told from its sign, and need not: only one of the two gives such a number.</remarks>
     public static int PowerIn(string remark) => Millions().IsMatch(remark) ? 6 : Thousands().IsMatch(remark) ? 3 : 0;
+
+    private static string Remark(Match match) => match.Groups["suffix"].Success ? $"({match.Groups["suffix"].Value})" : match.Groups["remark"].Value;
 
     private static int PowerOf(Match match)
     {
@@ -68,7 +105,8 @@ internal readonly partial record struct ReynoldsLine(int Line, double Value)
     [GeneratedRegex(
         """
         (?<![\p{L}\p{N}_])
-        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))?) | re | rn ) (?![\p{L}\p{N}_])
+        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))? (?:,?\s+re(?![\p{L}\p{N}_]))?)
+          | re(?:_(?<suffix>c|chord|nom|mean|max|min|crit|unit))? | rn ) (?![\p{L}\p{N}_])
         \s*
         (?<remark> [(\[{<][^)\]}>]*[)\]}>] | [x×*·/]\s*(?:10\s*\^?\s*[-−]?\s*[0-9⁰¹²³⁴⁵⁶⁷⁸⁹]+ | 1e[-+]?[0-9]+) )?
         (?:
@@ -82,11 +120,14 @@ internal readonly partial record struct ReynoldsLine(int Line, double Value)
         RegexOptions.IgnoreCase | RegexOptions.IgnorePatternWhitespace | RegexOptions.CultureInvariant)]
     private static partial Regex Naming();
 
-    // Another number right behind it, or the number goes on as a word.
+    // Another number right behind it.
     [GeneratedRegex(
-        @"^\s*(?:[,;/&~±–−+|-]|to\b|and\b|or\b|bis\b|\.\.+)?\s*[-+.,]?[0-9]|^[\p{L}\p{N}^]",
-        RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
+        @"^\s*(?:[,;/&~±–−+|-]|to\b|and\b|or\b|bis\b|\.\.+)?\s*[-+.,]?[0-9]", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex MoreNumbers();
+
+    // As a word.
+    [GeneratedRegex(@"^[\p{L}\p{N}^]", RegexOptions.CultureInvariant)]
+    private static partial Regex GoesOn();
 
     [GeneratedRegex(@"re(?:ynolds[^=:0-9]*)?\s*[=:]\s*[0-9]", RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex InCell();

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.Globalization;
 using BladeLoads.Studies.Tables;
 
@@ -8,19 +9,11 @@ internal static class ReynoldsText
 {
     private const string Groupers = " '\u2019\u00A0\u2009\u202F";
 
+    /// <summary>The plausible numbers that the text can mean, the smallest first, whatever its decimal sign is.</summary>
     /// <param name="power">Of ten, that the number is to be multiplied by.</param>
-    /// <param name="sign">Null where it is not known.</param>
-    /// <param name="value">The one plausible number that the text can mean.</param>
-    /// <returns>False where there is none, or more than one.</returns>
-    public static bool TryParse(string text, int power, DecimalSign? sign, out double value)
-    {
-        var found = new HashSet<double>();
-        foreach (var decimalSign in sign is { } known ? [known] : new[] { DecimalSign.Point, DecimalSign.Comma })
-            if (Read(text, power, decimalSign) is { } read && PolarLimits.IsReynoldsOfABlade(read))
-                found.Add(read);
-        value = found.Count == 1 ? found.First() : double.NaN;
-        return found.Count == 1;
-    }
+    public static ImmutableArray<double> Readings(string text, int power)
+        => [.. Enum.GetValues<DecimalSign>().Select(sign => Read(text, power, sign)).OfType<double>().Where(PolarLimits.IsReynoldsOfABlade)
+            .Distinct().Order()];
 
     /// <summary>Null where it is no number in that way of writing.</summary>
     public static double? Read(string text, int power, DecimalSign sign)

@@ -10,7 +10,7 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
 {
     private readonly ColumnRole _lift = request.Needed[1];
     private readonly ColumnRole _drag = request.Needed[2];
-    private readonly int _power = columns.NameOf(ColumnRole.Reynolds)?.Power ?? 0;
+    private readonly int _power = columns.NameOf(ColumnRole.Reynolds)?.Power is > 0 and var power ? power : (int)(request.ReynoldsUnit ?? 0);
 
     /// <param name="tell">Receives column, place and text of what is wrong; null where nothing is to be told.</param>
     public RowReading Read(ImmutableArray<Cell> cells, int line, Action<string, Place, string>? tell)
@@ -22,6 +22,7 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
         {
             Section = named is { } cell ? (cell.Text, new Place(file, line, cell.Column)) : null,
             HasForeignMinus = numbers.Any(number => ForeignNumber.HasForeignMinus(number.Text)),
+            HasDegreeSign = kind == RowKind.Row && ForeignNumber.HasDegreeSign(numbers[0].Text),
             ShowsItsDecimals = numbers.Any(
                 number => number.Text.AsSpan().IndexOfAny(".eEdD") >= 0 || number.IsQuoted && number.Text.Contains(',')),
         };
@@ -78,7 +79,7 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
         var text = cells[columns[role]!.Value].Text;
         if (role != ColumnRole.Reynolds)
         {
-            if (ForeignNumber.TryParse(text, sign, out var value))
+            if (ForeignNumber.TryParse(role == ColumnRole.Angle ? ForeignNumber.WithoutDegreeSign(text) : text, sign, out var value))
                 return value;
             Tell(role, cells, line, tell, ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign));
             return double.NaN;
@@ -88,8 +89,10 @@ internal sealed class RowReader(ColumnChoice columns, ReadingRequest request, De
             return number;
         Tell(role, cells, line, tell, reynolds is null
             ? ForeignNumber.Problem(ColumnRoleWords.Of(role), text, sign)
-            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}. Is it in millions? "
-                + "Then name the column so, or say --columns reynolds=none and --reynolds");
+            : $"reynolds is {VisibleText.Quote(text)}; Reynolds numbers of blades are {PolarLimits.ReynoldsInWords}"
+                + (_power == 0 ? ". Is it in millions? Then say --reynolds millions"
+                    : request.ReynoldsUnit is { } unit ? $", and --reynolds says {ReynoldsBlocks.InWords(unit)}"
+                    : ", and the name of the column gives a unit"));
         return double.NaN;
     }
 

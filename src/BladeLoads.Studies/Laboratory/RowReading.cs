@@ -27,6 +27,9 @@ internal readonly record struct RowReading(RowKind Kind, ForeignRow Row)
     /// <summary>A minus sign of typesetters was read.</summary>
     public bool HasForeignMinus { get; init; }
 
+    /// <summary>Its angle bears a degree sign.</summary>
+    public bool HasDegreeSign { get; init; }
+
     /// <summary>A number has a decimal point or an exponent, or a decimal comma in quotes: commas between the cells are separators.</summary>
     public bool ShowsItsDecimals { get; init; }
 }

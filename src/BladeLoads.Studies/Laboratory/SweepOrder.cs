@@ -12,6 +12,9 @@ namespace BladeLoads.Studies.Laboratory;
 /// <param name="leaveOut">Receives rows that are passed over, each with the reason.</param>
 internal sealed class SweepOrder(SweepChoice? choice, Action<int, int, string> report, Action<int, string> leaveOut)
 {
+    // deg. Nobody sets a section so finely: two angles nearer to each other are one, written down twice.
+    private const double OneAngle = 1e-5;
+
     /// <summary>What was done to the order, for the record; null where nothing was.</summary>
     public string? Done { get; private set; }
 
@@ -130,16 +133,20 @@ internal sealed class SweepOrder(SweepChoice? choice, Action<int, int, string> r
         for (var i = 1; i < sorted.Count; i++)
         {
             var (one, other) = (sorted[i - 1], sorted[i]);
-            // Asked in radians: two angles that differ in their last digit may be one there.
-            if (double.DegreesToRadians(other.Angle) > double.DegreesToRadians(one.Angle))
+            var (oneRadian, otherRadian) = (double.DegreesToRadians(one.Angle), double.DegreesToRadians(other.Angle));
+            // Asked in radians too: two angles that differ in their last digit may be one there.
+            if (otherRadian > oneRadian && (other.Angle - one.Angle > OneAngle || other.Values with { AngleDeg = one.Angle } == one.Values))
                 continue;
             distinct = false;
             report(other.Line, other.Column, string.Create(CultureInfo.InvariantCulture,
-                $"alpha {CanonicalText.Of(other.Angle)} has {Coefficients(other)} here and {Coefficients(one)} in line {one.Line}; "
-                    + $"which is meant cannot be told, keep one"));
+                $"alpha {CanonicalText.Of(other.Angle)} has {Coefficients(other)} here "
+                    + $"and {Beside(one, other)}{Coefficients(one)} in line {one.Line}; which is meant cannot be told, keep one"));
         }
         return distinct;
     }
+
+    private static string Beside(LaboratoryRow one, LaboratoryRow other)
+        => one.Angle == other.Angle ? "" : $"alpha {CanonicalText.Of(one.Angle)}, within 1e-5 degrees of it, has ";
 
     private static string Coefficients(LaboratoryRow row)
         => $"cl {CanonicalText.Of(row.Values.Lift)} cd {CanonicalText.Of(row.Values.Drag)}"

@@ -1,10 +1,9 @@
 using System.Globalization;
-using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Studies.Laboratory;
 
 /// <summary>Where in a text the table stands: the line that names its columns, and its first row.</summary>
-internal sealed class TablePlace(
+internal sealed partial class TablePlace(
     ForeignText text, ReadingRequest request, LineSigns signs, CellSeparator separator, DecimalSign sign, int first, int end)
 {
     private const int FewestColumns = 2;
@@ -68,7 +67,7 @@ internal sealed class TablePlace(
             var cells = Cells.Of(line, separator);
             var isOfUnits = cells.Any(cell => UnitWords.Meaning(cell.Text) is UnitMeaning.Degrees or UnitMeaning.Radians)
                 && !cells.Any(cell => cell.Text != "1" && ForeignNumber.LooksLikeOne(cell.Text));
-            if (!isOfUnits && ReynoldsLine.In(line, i + 1) is null)
+            if (!isOfUnits && ReynoldsLine.In(line, i + 1, request.ReynoldsUnit) is null)
                 return null;
         }
         return null;
@@ -84,39 +83,14 @@ internal sealed class TablePlace(
                 continue;
             var cells = Cells.WithoutTrailing(Cells.Of(signs.WithoutRemark(text.Lines[firstRow]), separator), places.Max());
             count = cells.Length;
-            if (places.TrueForAll(n => n >= 1 && n <= cells.Length && ForeignNumber.TryParse(cells[n - 1].Text, sign, out _)))
+            if (places.TrueForAll(n => n >= 1 && n <= cells.Length && IsNumber(cells[n - 1])))
                 return true;
         }
         count = 0;
         return false;
     }
 
-    private (int Line, string Text)? Problem(bool isNumbered)
-    {
-        for (var i = first; i < end; i++)
-        {
-            if (signs.IsComment(text.Lines[i], out _) || !IsMeantAsRow(text.Lines[i]))
-                continue;
-            var row = Cells.WithoutTrailing(Cells.Of(signs.WithoutRemark(text.Lines[i]), separator), FewestColumns);
-            for (var above = i - 1; above >= first; above--)
-                if (Header.Of(Uncommented(above), above + 1, separator, row.Length, request) is not null
-                    && Between(above + 1, i) is >= 0 and var between)
-                    return (between + 1, TableScan.NotUnderstood(text.Lines[between]));
-                else if (Header.Of(Uncommented(above), above + 1, separator, 0, request) is { } header)
-                    return (above + 1, string.Create(CultureInfo.InvariantCulture,
-                        $"names {header.Cells.Length} columns where line {i + 1} has {row.Length} values; ")
-                        + (separator == CellSeparator.Comma && !row.Any(cell => cell.Text.Contains('.'))
-                            ? "commas seem to separate columns and to be decimal signs too, so save the table with semicolons"
-                            : "say which are which by number: --columns alpha=1,cl=2,cd=3"));
-            return (i + 1, isNumbered
-                ? "has no number in a column that --columns names"
-                : request.Columns.Values.Any(column => column != ReadingRequest.NoColumn)
-                    ? $"no line above names {string.Join(", ", request.Columns.Values.Select(VisibleText.Quote))}, or columns known here; "
-                        + "say which are which by number: --columns alpha=1,cl=2,cd=3"
-                    : "no line above names the columns; say which are which by number: --columns alpha=1,cl=2,cd=3");
-        }
-        return null;
-    }
+    private bool IsNumber(Cell cell) => ForeignNumber.TryParse(ForeignNumber.WithoutDegreeSign(cell.Text), sign, out _);
 
     // The line that keeps a header from being one.
     private int Between(int from, int row)

@@ -6,7 +6,7 @@ using BladeLoads.Studies.Tables;
 namespace BladeLoads.Studies.Laboratory;
 
 /// <summary>A foreign table read with one separator and one decimal sign. It is sound where every line makes sense so.</summary>
-internal sealed class TableScan
+internal sealed partial class TableScan
 {
     private readonly ForeignText _text;
     private readonly ReadingRequest _request;
@@ -18,6 +18,9 @@ internal sealed class TableScan
     // Those that rows name, asked for or not, each with its first place.
     private readonly Dictionary<string, Place> _sections = new(StringComparer.Ordinal);
     private bool _showsItsDecimals;
+
+    // Of rows, in their order.
+    private readonly List<bool> _haveDegreeSigns = [];
 
     private TableScan(ForeignText text, ReadingRequest request, CellSeparator separator, DecimalSign sign)
     {
@@ -50,8 +53,14 @@ internal sealed class TableScan
     /// <summary>The line that names <see cref="Unit"/>.</summary>
     public int UnitLine { get; private set; }
 
+    /// <summary>There is no table so, as commas seem to separate columns and to be decimal signs too.</summary>
+    public bool HasCommasTwice { get; private set; }
+
     /// <summary>A minus sign of typesetters was read in a row.</summary>
     public bool HasForeignMinus { get; private set; }
+
+    /// <summary>The angles of the rows bear degree signs.</summary>
+    public bool HasDegreeSigns => _haveDegreeSigns.Contains(true);
 
     /// <summary>Those not told one by one too.</summary>
     public int ErrorCount => _errors.Total;
@@ -72,6 +81,7 @@ internal sealed class TableScan
         var place = new TablePlace(_text, _request, _signs, Separator, Sign, First, End);
         if (!place.Find(out var header, out var firstRow, out var count, out var problem))
         {
+            HasCommasTwice = place.HasCommasTwice;
             if (problem is var (line, text))
                 _errors.Add("", new Place(_text.File, line, line == 0 ? 0 : 1), text);
             return;
@@ -104,7 +114,7 @@ internal sealed class TableScan
                 continue;
             if (i + 1 > Header.Line && Header.Line > 0 && !isComment && IsUnitsRow(line, i + 1, count))
                 continue;
-            if (ReynoldsLine.In(isComment ? rest : line, i + 1) is { } named)
+            if (ReynoldsLine.In(isComment ? rest : line, i + 1, _request.ReynoldsUnit) is { } named)
                 ReynoldsLines.Add(named);
             else if (isComment || LineSigns.IsEmpty(line) || LineSigns.IsRuling(line))
                 continue;
@@ -129,7 +139,7 @@ internal sealed class TableScan
             return;
         if (_signs.IsComment(line, out var rest))
         {
-            if (ReynoldsLine.In(rest, number) is { } commented)
+            if (ReynoldsLine.In(rest, number, _request.ReynoldsUnit) is { } commented)
                 ReynoldsLines.Add(commented);
             else if (Cells.WithoutTrailing(Cells.Of(rest, Separator), count) is var row && row.Length == count
                 && reader.Read(row, number, null).Kind == RowKind.Row)
@@ -139,7 +149,7 @@ internal sealed class TableScan
         var cells = Cells.WithoutTrailing(Cells.Of(_signs.WithoutRemark(line), Separator), count);
         var numbers = cells.Count(cell => ForeignNumber.LooksLikeOne(cell.Text));
         var isMeantAsRow = numbers >= 2 || numbers > 0 && ForeignNumber.LooksLikeOne(cells[0].Text) || !IsWords(line);
-        if (isMeantAsRow && !ForeignNumber.LooksLikeOne(cells[0].Text) && ReynoldsLine.In(line, number) is { } named
+        if (isMeantAsRow && !ForeignNumber.LooksLikeOne(cells[0].Text) && ReynoldsLine.In(line, number, _request.ReynoldsUnit) is { } named
             && (cells.Length != count || reader.Read(cells, number, null).Kind == RowKind.Broken))
             ReynoldsLines.Add(named);
         else if (cells.Length == count && isMeantAsRow)
@@ -169,7 +179,7 @@ internal sealed class TableScan
             _errors.Add("", new Place(_text.File, number, 1), Header.Line > 0
                 ? string.Create(CultureInfo.InvariantCulture, $"names other columns than line {Header.Line}; --lines says which lines hold the table")
                 : "names columns below the first row; --lines says which lines hold the table");
-        else if (ReynoldsLine.In(line, number) is { } named)
+        else if (ReynoldsLine.In(line, number, _request.ReynoldsUnit) is { } named)
             ReynoldsLines.Add(named);
         else
             return false;
@@ -192,6 +202,7 @@ internal sealed class TableScan
                         + "those below is not known; put a comment mark before it, say with --comment how it begins, or choose rows with --lines");
                 _wordsSinceLastRow.Clear();
                 Rows.Add(read.Row);
+                _haveDegreeSigns.Add(read.HasDegreeSign);
                 foreach (var cell in cells)
                     if (ReynoldsLine.IsNamedIn(cell.Text))
                         _errors.Add("", new Place(_text.File, number, cell.Column),
@@ -224,22 +235,5 @@ internal sealed class TableScan
                     $"names {VisibleText.Quote(cells[place].Text)} as the unit of {ColumnRoleWords.Of(role)}; "
                     + "only ratios are read, so give the table as such");
         return true;
-    }
-
-    private void CheckWhole()
-    {
-        if (_sections.Count > 1 && _request.Section is null)
-            _errors.Add("", _sections.Values.ElementAt(1),
-                $"has rows of sections {VisibleText.Enumerate(_sections.Keys, "")}; say which: --section {_sections.Keys.First()}");
-        else if (_request.Section is { } section && !_sections.ContainsKey(section))
-            _errors.Add("", new Place(_text.File, 0, 0), _sections.Count == 0
-                ? $"no column names sections, so there is no section {VisibleText.Quote(section)}"
-                : $"has no section {VisibleText.Quote(section)}; there are {VisibleText.Enumerate(_sections.Keys, "none")}");
-        if (Separator == CellSeparator.Comma && _request.DecimalSign is null && !_showsItsDecimals && Rows.Count > 0)
-            _errors.Add("", new Place(_text.File, Rows[0].Line, 1),
-                "commas stand here and no row has a decimal point, so that they may separate columns or be "
-                + "decimal signs; say --decimal point where they separate, or save the table with semicolons");
-        if (Rows.Count == 0 && !_errors.Any)
-            _errors.Add("", new Place(_text.File, 0, 0), "has no row left");
     }
 }

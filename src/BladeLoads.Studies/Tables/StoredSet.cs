@@ -16,6 +16,10 @@ public sealed record StoredSet(ImmutableArray<StoredPolars> Tables, ReadOnlyMemo
     /// <summary>Whether a file of this name in the folder of a set is one of its tables.</summary>
     public static bool IsTable(string name) => name.EndsWith(Ending, StringComparison.Ordinal) && name[0] != '.';
 
+    /// <summary>Why no section can have the name that a table's file gives it, or null.</summary>
+    /// <param name="name">Of a file that <see cref="IsTable"/>.</param>
+    public static string? NameProblem(string name) => SafeName.Problem(name[..^Ending.Length]);
+
     /// <summary>Reads every table of a folder; null, with all that is wrong, where one cannot be read or there is none.</summary>
     /// <param name="path">Of the folder, as the user wrote it; findings name its files so.</param>
     public static StoredSet? Read(string path, IStudyFiles files, out ImmutableArray<InputFinding> errors)

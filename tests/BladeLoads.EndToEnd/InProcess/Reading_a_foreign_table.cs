@@ -30,7 +30,7 @@ public sealed class Reading_a_foreign_table : IDisposable
             # text: UTF-8, semicolons between columns and a decimal comma
             # columns: alpha from 'alpha [°]' (column 1), cl from 'CL' (column 2), cd from 'CD' (column 3)
             # angles in degrees, as line 3 says
-            # Reynolds number of line 2
+            # Reynolds number 750000 of line 2: 'Re = 0,75 million'
             # left out: line 7, the same as line 6
             reynolds,alpha_deg,cl,cd
             750000,-5,-0.4,0.01
@@ -43,7 +43,7 @@ public sealed class Reading_a_foreign_table : IDisposable
             text: UTF-8, semicolons between columns and a decimal comma
             columns: alpha from 'alpha [°]' (column 1), cl from 'CL' (column 2), cd from 'CD' (column 3)
             angles in degrees, as line 3 says
-            Reynolds number of line 2
+            Reynolds number 750000 of line 2: 'Re = 0,75 million'
             left out: line 7, the same as line 6
             3 rows at Reynolds number 7.5e5, -5 to 5 deg
             table: {In("t18.csv")}
@@ -119,6 +119,18 @@ public sealed class Reading_a_foreign_table : IDisposable
     }
 
     [Fact]
+    public void A_column_of_reynolds_numbers_in_millions_that_does_not_say_so_is_read_when_told()
+    {
+        File.WriteAllText(In("lab.txt"), "alpha cl cd Re\n-5 -0.4 0.01 1.0\n0 0.1 0.009 1.0\n5 0.6 0.01 1.0\n");
+
+        var (code, text, error) = Run("read", In("lab.txt"), "--preview", "--reynolds", "millions");
+
+        Assert.Equal((0, ""), (code, error));
+        Assert.Contains("\nconverted: Reynolds numbers without a unit times 1000000, as --reynolds says\n", text, StringComparison.Ordinal);
+        Assert.Contains("\n1000000,-5,-0.4,0.01\n", text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void What_is_wrong_is_told_by_file_line_and_column_and_nothing_is_written()
     {
         File.WriteAllText(In("lab.txt"), "alpha cl cd\n-5 x 0.01\n0 0.1 0.009\n5 0.6\n");
@@ -166,8 +178,11 @@ public sealed class Reading_a_foreign_table : IDisposable
                 $"'{In("set.csv")}' is a folder; give a file in it",
                 $"'{In("link.csv")}' is a link; give the file itself",
                 $"there is no folder for '{In("nowhere/t18.csv")}' to stand in; make it first",
+                $"'{In("a~b.csv")}' cannot be a polar table: the name of its section holds '~'; give another <section>.csv",
+                $"'{In("CON.csv")}' cannot be a polar table: the name of its section is the name of a device on some systems; give another <section>.csv",
+                $"'{In("a .csv")}' cannot be a polar table: the name of its section begins or ends with a space or a dot; give another <section>.csv",
             ],
-            new[] { "t18.txt", ".t18.csv", "lab.csv", "same.csv", "set.csv", "link.csv", "nowhere/t18.csv" }.Select(
+            new[] { "t18.txt", ".t18.csv", "lab.csv", "same.csv", "set.csv", "link.csv", "nowhere/t18.csv", "a~b.csv", "CON.csv", "a .csv" }.Select(
                 name => Refusal("read", In("lab.csv"), "--out", In(name), "--replace")));
         Assert.Equal(["lab.csv", "link.csv", "same.csv", "set.csv"], Names());
     }
@@ -198,11 +213,12 @@ public sealed class Reading_a_foreign_table : IDisposable
             [
                 "--angles is 'grad'; give degrees or radians", "--decimal is 'dot'; give point or comma",
                 "--separator is ';'; give tab, semicolon, comma, bar or blanks", "--sweep is 'up'; give rising, falling, mean or all",
-                "--reynolds is '1500'; give a number from 1e4 to 1e9: 1.5e6",
+                "--reynolds is '1500'; give a number from 1e4 to 1e9: 1.5e6; or millions or thousands, the unit of those in the table",
+                "--leave-out is 'everything'; give incomplete or negative-drag",
                 "--lines is '5'; give the first and the last line of the table, 12-48, or the first alone, 12-",
                 "--lines is '0-5'; give the first and the last line of the table, 12-48, or the first alone, 12-",
             ],
-            new string[][] { ["--angles", "grad"], ["--decimal", "dot"], ["--separator", ";"], ["--sweep", "up"], ["--reynolds", "1500"], ["--lines", "5"], ["--lines", "0-5"] }
+            new string[][] { ["--angles", "grad"], ["--decimal", "dot"], ["--separator", ";"], ["--sweep", "up"], ["--reynolds", "1500"], ["--leave-out", "everything"], ["--lines", "5"], ["--lines", "0-5"] }
                 .Select(options => Refusal(["read", In("lab.txt"), "--preview", .. options]).Split('\n')[0]));
     }
 
@@ -216,6 +232,18 @@ public sealed class Reading_a_foreign_table : IDisposable
 
             Assert.Equal((3, $"cannot write {In("t18.csv")}: no room left on the disk\n"), (code, error));
             Assert.Equal(["lab.txt"], Names());
+        }
+    }
+
+    [Fact]
+    public void A_folder_in_which_no_file_can_be_made_is_told_in_words()
+    {
+        File.WriteAllText(In("lab.txt"), Lab);
+        foreach (var trouble in new Exception[] { new FileNotFoundException("Could not find file 'x'"), new DirectoryNotFoundException("Could not find 'x'") })
+        {
+            var (code, _, error) = Run(new FailingDisk(1, () => trouble), "read", In("lab.txt"), "--out", In("t18.csv"));
+
+            Assert.Equal((3, $"cannot write {In("t18.csv")}: no file can be made in its folder; give a place in another\n"), (code, error));
         }
     }
 

@@ -45,6 +45,8 @@ internal static class Foreign
                 "--angles" => request with { Angles = Enum.Parse<AngleUnit>(words.Dequeue(), ignoreCase: true) },
                 "--decimal" => request with { DecimalSign = Enum.Parse<DecimalSign>(words.Dequeue(), ignoreCase: true) },
                 "--separator" => request with { Separator = Enum.Parse<CellSeparator>(words.Dequeue(), ignoreCase: true) },
+                "--reynolds" when Enum.TryParse<ReynoldsUnit>(words.Peek(), ignoreCase: true, out var unit) && char.IsLetter(words.Dequeue()[0])
+                    => request with { ReynoldsUnit = unit },
                 "--reynolds" => request with { Reynolds = double.Parse(words.Dequeue(), CultureInfo.InvariantCulture) },
                 "--comment" => request with { Comment = words.Dequeue() },
                 "--lines" => request with { Lines = Lines(words.Dequeue()) },

@@ -97,7 +97,7 @@ public class ForeignTableTests
                 "text: UTF-8, semicolons between columns and a decimal comma",
                 "columns: alpha from 'alpha [rad]' (column 1), normal from 'cn' (column 3), tangential from 'ct' (column 4); not taken: 'x' (column 2)",
                 "angles in radians, as line 3 says",
-                "Reynolds number of line 2",
+                "Reynolds number 750000 of line 2: 'Re (millions) 0.75'",
                 "converted: angles from radians to degrees, 12 significant digits; cl and cd from forces square to the chord and along it, 12 significant digits",
                 "rows are sorted by angle at Reynolds number 750000",
                 "left out: line 7, the same as line 6",
@@ -113,6 +113,21 @@ public class ForeignTableTests
     {
         Assert.DoesNotContain("converted: minus signs of typesetters to -", Foreign.Read(Small + "# \u22127;-0,5;0,01\n").Record);
         Assert.Contains("converted: minus signs of typesetters to -", Foreign.Read(Small + "\u22127;-0,5;0,01\n").Record);
+    }
+
+    [Fact]
+    public void The_record_says_that_a_line_was_not_believed_in_the_unit_of_the_angle()
+        => Assert.Contains(
+            "angles in degrees, as --angles says and as they go beyond all radians, though line 1 names radians",
+            Foreign.Read("alpha [rad];cl;cd\n-5;-0,4;0,01\n0;0,1;0,009\n5;0,6;0,01\n", "--angles degrees").Record);
+
+    [Fact]
+    public void The_record_says_that_degree_signs_were_taken_from_angles()
+    {
+        var record = Foreign.Read("alpha;cl;cd\n-3°;-0,4;0,01\n0°;0,1;0,009\n4°;0,6;0,01\n").Record;
+
+        Assert.Contains("angles in degrees, as line 2 says", record);
+        Assert.Contains("converted: degree signs taken from angles", record);
     }
 
     [Theory]
@@ -170,6 +185,35 @@ public class ForeignTableTests
     }
 
     [Theory]
+    [InlineData("-cm", "its sign is turned")]
+    [InlineData("\u2212CM", "its sign is turned")]
+    [InlineData("cm (nose down positive)", "its sign is turned")]
+    [InlineData("cm*10", "it is a multiple of the moment coefficient")]
+    [InlineData("cm [%]", "it is a multiple of the moment coefficient")]
+    [InlineData("Cm LE", "it is about the leading edge; --columns cm=4 takes it as it stands")]
+    [InlineData("cmte", "it is about the trailing edge; --columns cm=4 takes it as it stands")]
+    [InlineData("CM_ac", "it is about the aerodynamic centre; --columns cm=4 takes it as it stands")]
+    [InlineData("Cm_corr", "it is one version of several; --columns cm=4 takes it as it stands")]
+    [InlineData("Cm root", "it is not plainly about the quarter chord; --columns cm=4 takes it as it stands")]
+    public void The_record_says_why_a_column_is_not_taken_for_the_moment(string name, string why)
+    {
+        var text = $"alpha;cl;cd;{name}\n-5;-0.4;0.01;0.1\n0;0.1;0.009;0.1\n5;0.6;0.01;0.1\n";
+
+        Assert.Contains($"no moment: '{name}' (column 4) is not taken, as {why}", Foreign.Read(text).Record);
+        Assert.Equal(Rows, Foreign.Outcome(Foreign.Read(text)));
+        Assert.Equal(!why.Contains("--columns", StringComparison.Ordinal), Foreign.Read(text, "--columns cm=4").Polars.IsEmpty);
+        Assert.Contains(
+            $"columns: alpha from 'alpha' (column 1), cl from 'cl' (column 2), cd from 'cd' (column 3); not taken: '{name}' (column 4)",
+            Foreign.Read(text, "--columns cm=none").Record);
+    }
+
+    [Fact]
+    public void A_moment_said_to_be_nose_up_is_taken()
+        => Assert.Equal(
+            "-5 -0.4 0.01 0.1 | 0 0.1 0.009 0.1 | 5 0.6 0.01 0.1",
+            Foreign.Outcome(Foreign.Read("alpha;cl;cd;cm (nose up positive)\n-5;-0.4;0.01;0.1\n0;0.1;0.009;0.1\n5;0.6;0.01;0.1\n")));
+
+    [Theory]
     [InlineData("Re = 1.0e6", 1e6)]
     [InlineData("RE=1,5E6", 1.5e6)]
     [InlineData("re 750000", 750000)]
@@ -189,9 +233,72 @@ public class ForeignTableTests
     [InlineData("\"Re\",\"1e6\"", 1e6)]
     [InlineData("Re ~ 500 thousand", 5e5)]
     [InlineData("run 7 at Re=2E+06", 2e6)]
+    [InlineData("# Fell tunnel, section t18 (Re 1.5e6), 2019-07-04", 1.5e6)]
+    [InlineData("Re = 1e6 (nominal)", 1e6)]
+    [InlineData("Reynolds number Re = 1e6 and Ma 0.1", 1e6)]
+    [InlineData("chord Reynolds number: 1e6; tripped at 5 % chord, q = 1.2e4 Pa", 1e6)]
+    [InlineData("Re (chord) = 1e6 - clean", 1e6)]
+    [InlineData("## Re_c = 1e6 ##", 1e6)]
     public void A_line_that_names_a_reynolds_number_is_understood(string line, double reynolds)
         => Assert.Equal(
             [reynolds], Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Polars.Select(polar => polar.Reynolds));
+
+    [Theory]
+    [InlineData("# Tunnel: largest Reynolds number 6e6", "largest")]
+    [InlineData("Re = 2.5e6 per metre", "per")]
+    [InlineData("Re = 2.5e6, per metre", "per")]
+    [InlineData("Re = 2.5e6 1/m", "1")]
+    [InlineData("Re = 2.5e6, 2019", "1")]
+    [InlineData("Re = 2.5e6 /m", "/m")]
+    [InlineData("Re [1/m] = 2.5e6", "1/m")]
+    [InlineData("# not Re = 1e6", "not")]
+    [InlineData("critical at Re = 4e5", "critical")]
+    [InlineData("Tunnel Re = 6e6", "Tunnel")]
+    [InlineData("Re (max) = 6e6", "max")]
+    [InlineData("Re_max = 6e6", "max")]
+    [InlineData("Re = 6e6 or more", "or")]
+    [InlineData("Re = 6e6 (max.)", "max.")]
+    [InlineData("Re up to 6e6", "?")]
+    [InlineData("Re < 6e6", "?")]
+    [InlineData("Re = 1e6 (nominal), 1.02e6 (measured)", "")]
+    [InlineData("Re = 1e6, measured: 1.02 million", "")]
+    [InlineData("Re = 1000000 (nominal), 1020000 (measured)", "")]
+    [InlineData("Re about 1e6 to 2e6", "")]
+    [InlineData("Re = 1.4e6 to 1.6e6", "")]
+    [InlineData("from 1e5 on, Re = 1e6", "")]
+    public void A_reynolds_number_beside_which_other_words_stand_is_refused_with_the_words(string line, string qualifier)
+        => Told.Exactly(
+            [
+                $"lab.txt:1:1: '{line.TrimStart('#', ' ')}' names "
+                + (qualifier switch
+                {
+                    "" => "more than one Reynolds number",
+                    "1" => "a Reynolds number, and another number stands right behind it",
+                    "?" => "a Reynolds number in a way that is not understood",
+                    _ => $"a Reynolds number, and '{qualifier}' beside it may make it another than that of the rows",
+                })
+                + "; write it as Re = 1.5e6, say it with --reynolds, or say --columns reynolds=none for a table without",
+            ],
+            Foreign.Read($"{line}\nalpha cl cd\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n").Errors);
+
+    [Fact]
+    public void The_record_shows_the_lines_that_name_reynolds_numbers_and_of_many_the_first()
+    {
+        static string Blocks(int count) => "alpha cl cd\n" + string.Concat(
+            Enumerable.Range(1, count).Select(i => $"Re = {i},5 million, clean\n-5 -0.4 0.01\n0 0.1 0.009\n5 0.6 0.01\n"));
+
+        Assert.Equal(
+            ["Reynolds number 1500000 of line 2: 'Re = 1,5 million, clean'", "Reynolds number 2500000 of line 6: 'Re = 2,5 million, clean'"],
+            Foreign.Read(Blocks(2)).Record.Where(line => line.StartsWith("Reynolds", StringComparison.Ordinal)));
+        Assert.Equal(
+            ["Reynolds number 12500000 of line 46: 'Re = 12,5 million, clean'", "Reynolds numbers of lines 50 and 54 besides"],
+            Foreign.Read(Blocks(14)).Record.Where(line => line.StartsWith("Reynolds", StringComparison.Ordinal)).Skip(11));
+    }
+
+    [Fact]
+    public void The_record_says_that_a_unit_of_reynolds_numbers_was_said()
+        => Assert.Contains(
+            "converted: Reynolds numbers without a unit times 1000000, as --reynolds says", Foreign.Read("Re = 1.5\n" + Small, "--reynolds millions").Record);
 
     [Theory]
     [InlineData("more results below")]

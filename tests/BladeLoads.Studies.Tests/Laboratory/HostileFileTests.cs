@@ -108,4 +108,42 @@ public class HostileFileTests
             Assert.True(table.Errors.IsEmpty == !table.Polars.IsEmpty, text);
         }
     }
+
+    [Theory]
+    [InlineData(6)]
+    [InlineData(7)]
+    public void Options_by_chance_over_every_table_are_taken_or_refused_and_nothing_is_thrown(int seed)
+    {
+        var random = new Random(seed);
+        ForeignCase[] tables = [.. TablesThatAreRead.All, .. TablesThatAreRefused.All];
+        foreach (var one in tables)
+            for (var i = 0; i < 20; i++)
+            {
+                var options = string.Join(' ', Options.Where(_ => random.Next(4) == 0).Select(values => values[random.Next(values.Length)]));
+
+                var table = Foreign.Read(one.Text, options);
+
+                Assert.True(table.Errors.IsEmpty == !table.Polars.IsEmpty, $"{one.Title}: {options}");
+            }
+    }
+
+    // All that a user can say, an option a line.
+    private static readonly string[][] Options =
+    [
+        [
+            "--columns alpha=1,cl=2,cd=3", "--columns alpha=1,cl=2", "--columns cd=99", "--columns alpha=0,cl=2,cd=3", "--columns alpha=2,cl=1,cd=3,cm=4",
+            "--columns cl=CL", "--columns cm=none,reynolds=none", "--columns normal=2,tangential=3", "--columns alpha=1,normal=2,axial=3",
+            "--columns reynolds=1", "--columns section=1", "--columns alpha=99999999999,cl=1,cd=1",
+        ],
+        ["--angles degrees", "--angles radians"],
+        ["--decimal point", "--decimal comma"],
+        ["--separator tab", "--separator semicolon", "--separator comma", "--separator bar", "--separator blanks"],
+        ["--reynolds 1e6", "--reynolds 2e6", "--reynolds millions", "--reynolds thousands"],
+        ["--comment C", "--comment alpha", "--comment Re"],
+        ["--lines 2-4", "--lines 1-1", "--lines 90-99", "--lines 3-2147483647"],
+        ["--sweep rising", "--sweep falling", "--sweep mean", "--sweep all"],
+        ["--section A", "--section C"],
+        ["--leave-out incomplete", "--leave-out negative-drag", "--leave-out incomplete --leave-out negative-drag"],
+        ["--wrap"],
+    ];
 }

@@ -148,5 +148,31 @@ internal static partial class TablesThatAreRead
             """, """
             -5.1 -0.4 0.01 | -0.1 0.1 0.009 | 4.9 0.6 0.01
             """),
+        new("degree signs beside the angles", "", """
+            alpha;cl;cd
+            -3°;-0,4;0,01
+            0º;0,1;0,009
+            4°;0,6;0,01
+
+            """, """
+            -3 -0.4 0.01 | 0 0.1 0.009 | 4 0.6 0.01
+            """),
+        new("degree signs and no header", "--columns alpha=1,cl=2,cd=3", """
+            -4° -0.4 0.01
+            0° 0.1 0.009
+            4° 0.6 0.01
+
+            """, """
+            -4 -0.4 0.01 | 0 0.1 0.009 | 4 0.6 0.01
+            """),
+        new("degrees said of a column of radians that can be none", "--angles degrees", """
+            alpha [rad];cl;cd
+            -4;-0,4;0,01
+            0;0,1;0,009
+            4;0,6;0,01
+
+            """, """
+            -4 -0.4 0.01 | 0 0.1 0.009 | 4 0.6 0.01
+            """),
     ];
 }

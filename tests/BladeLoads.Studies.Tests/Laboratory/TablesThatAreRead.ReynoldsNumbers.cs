@@ -126,5 +126,33 @@ internal static partial class TablesThatAreRead
             """, """
             -5 -0.4 0.01 | 0 0.1 0.009 | 5 0.6 0.01
             """),
+        new("a column in millions that nothing but an option says", "--reynolds millions", """
+            Re;alpha;cl;cd
+            1,0;-5;-0,4;0,01
+            1,0;0;0,1;0,009
+            1,0;5;0,6;0,01
+            3,0;-5;-0,41;0,01
+            3,0;0;0,11;0,009
+            3,0;5;0,61;0,01
+
+            """, """
+            1000000: -5 -0.4 0.01 | 0 0.1 0.009 | 5 0.6 0.01
+            3000000: -5 -0.41 0.01 | 0 0.11 0.009 | 5 0.61 0.01
+            """),
+        new("lines in thousands that nothing but an option says, beside one that has its unit", "--reynolds thousands", """
+            alpha cl cd
+            Re = 750
+            -5 -0.4 0.01
+            0 0.1 0.009
+            5 0.6 0.01
+            Re = 1.5 million
+            -5 -0.41 0.01
+            0 0.11 0.009
+            5 0.61 0.01
+
+            """, """
+            750000: -5 -0.4 0.01 | 0 0.1 0.009 | 5 0.6 0.01
+            1500000: -5 -0.41 0.01 | 0 0.11 0.009 | 5 0.61 0.01
+            """),
     ];
 }

@@ -19,7 +19,7 @@ internal static partial class TablesThatAreRefused
             5 0.6 0.01
 
             """, """
-            lab.txt:1:1: has no number in a column that --columns names
+            lab.txt:1:1: --columns cd=7: the table has columns 1 to 3
             """),
         new("a column beyond the last", "--columns cd=7", """
             alpha cl cd
@@ -140,6 +140,92 @@ internal static partial class TablesThatAreRefused
 
             """, """
             lab.txt:1:1: 'cd' (column 3) and 'cd' (column 4) can both be the drag coefficient; say which: --columns cd=3 or cd=4
+            """),
+        new("numbers of columns but for one that is forgotten", "--columns alpha=1,cl=2", """
+            -5 -0.4 0.01
+            0 0.1 0.009
+            5 0.6 0.01
+
+            """, """
+            lab.txt:1:1: no line above names the columns, and --columns does not say which is cd; add cd=<number>
+            """),
+        new("the number of one column alone", "--columns alpha=1", """
+            -5 -0.4 0.01
+            0 0.1 0.009
+            5 0.6 0.01
+
+            """, """
+            lab.txt:1:1: no line above names the columns, and --columns does not say which is cl and which cd; add cl=<number> and cd=<number>
+            """),
+        new("a name and a number of columns that no line names", "--columns alpha=1,cl=CLmax", """
+            -5 -0.4 0.01
+            0 0.1 0.009
+            5 0.6 0.01
+
+            """, """
+            lab.txt:1:1: no line above names 'CLmax', or columns known here; say which are which by number: --columns alpha=1,cl=2,cd=3
+            """),
+        new("columns counted from 0", "--columns alpha=0,cl=1,cd=2", """
+            -5 -0.4 0.01
+            0 0.1 0.009
+            5 0.6 0.01
+
+            """, """
+            lab.txt:1:1: --columns alpha=0: the table has columns 1 to 3
+            """),
+        new("a column of words said to be the lift", "--columns alpha=1,cl=3,cd=2", """
+            -5 0.01 low
+            0 0.009 low
+            5 0.01 high
+
+            """, """
+            lab.txt:1:1: --columns cl=3: that column holds 'low' here, no number
+            """),
+        new("names set apart by blanks above rows set apart by commas", "", """
+            alpha cl cd cm
+            -5,-0.4,0.01,0
+            0,0.1,0.009,0
+            5,0.6,0.01,0
+
+            """, """
+            lab.txt:1:1: names columns with blanks between them where line 2 has commas; put commas here too, or say which are which by number: --columns alpha=1,cl=2,cd=3
+            """),
+        new("a name in quotes with a line break", "", """
+            "alpha
+            [deg]",cl,cd
+            -5,-0.4,0.01
+            0,0.1,0.009
+            5,0.6,0.01
+
+            """, """
+            lab.txt:1:1: has a cell in quotes that goes on in the next line; put the names of the columns into one line
+            """),
+        new("our own words for forces as names", "", """
+            alpha normal axial
+            -5 -0.4 0.01
+            0 0.1 0.009
+            5 0.6 0.01
+
+            """, """
+            lab.txt:1:1: no columns for lift and drag; 'normal' (column 2) and 'axial' (column 3) are forces square to the chord and along it, which are turned by --columns normal=2,tangential=3 where the second is positive towards the leading edge, or axial=3 where it is positive towards the trailing edge
+            """),
+        new("commas between columns and as decimal signs, with blanks", "", """
+            alpha, cl, cd
+            -4, -0,28, 0,0101
+            0, 0,19, 0,0098
+            4, 0,66, 0,0104
+
+            """, """
+            lab.txt:1:1: names 3 columns where line 2 has 5 values; commas seem to separate columns and to be decimal signs too, so save the table with semicolons
+            """),
+        new("the same below names set apart by blanks", "", """
+            alpha cl cd
+            -4, -0,28, 0,0101
+            0, 0,19, 0,0098
+            4, 0,66, 0,0104
+
+            """, """
+            lab.txt:1:1: names 3 columns where line 2 has 5 values; commas seem to separate columns and to be decimal signs too, so save the table with semicolons
             """),
     ];
 }

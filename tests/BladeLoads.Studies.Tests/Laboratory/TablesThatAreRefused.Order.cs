@@ -101,6 +101,30 @@ internal static partial class TablesThatAreRefused
             """, """
             lab.txt:4:1: alpha 10 has cl 0.91 cd 0.02 cm -0.1 here and cl 0.9 cd 0.02 cm -0.1 in line 3; which is meant cannot be told, keep one
             """),
+        new("one angle but for its last digits, two values", "", """
+            alpha cl cd
+            0 0.1 0.009
+            2 0.3 0.01
+            2.0000001 0.4 0.01
+            10 0.91 0.02
+
+            """, """
+            lab.txt:4:1: alpha 2.0000001 has cl 0.4 cd 0.01 here and alpha 2, within 1e-5 degrees of it, has cl 0.3 cd 0.01 in line 3; which is meant cannot be told, keep one
+            """),
+        new("the turn of two sweeps measured three times", "--sweep mean", """
+            alpha cl cd
+            0 0.1 0.009
+            10 0.9 0.02
+            14 1.3 0.05
+            14 1.2 0.05
+            14 1.1 0.05
+            10 0.6 0.04
+            0 0.1 0.009
+
+            """, """
+            lab.txt:5:1: alpha 14 has cl 1.2 cd 0.05 here and cl 1.3 cd 0.05 in line 4; which is meant cannot be told, keep one
+            lab.txt:6:1: alpha 14 has cl 1.1 cd 0.05 here and cl 1.2 cd 0.05 in line 5; which is meant cannot be told, keep one
+            """),
         new("words between rows", "", """
             alpha cl cd
             0 0.1 0.009

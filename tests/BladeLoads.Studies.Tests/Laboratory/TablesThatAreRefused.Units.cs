@@ -95,8 +95,8 @@ internal static partial class TablesThatAreRefused
             10;0,6;0,01
 
             """, """
-            lab.txt:2:1: alpha is -10 rad, -572.957795131 deg; angles go from -180 to 180 degrees
-            lab.txt:4:1: alpha is 10 rad, 572.957795131 deg; angles go from -180 to 180 degrees
+            lab.txt:2:1: alpha is -10 rad, -572.957795131 deg; angles go from -180 to 180 degrees; if line 1 is wrong to name radians, say --angles degrees
+            lab.txt:4:1: alpha is 10 rad, 572.957795131 deg; angles go from -180 to 180 degrees; if line 1 is wrong to name radians, say --angles degrees
             """),
         new("a unit said that is not the one named", "--angles radians", """
             alpha (deg);cl;cd
@@ -163,6 +163,62 @@ internal static partial class TablesThatAreRefused
 
             """, """
             lab.txt:1:1: 'cd x 10^4' (column 3) is a multiple of the drag coefficient, and only the ratio itself is read; where its numbers are ratios all the same, leave the line of names out with --lines and say --columns by number
+            """),
+        new("drag in percent, in its cells", "", """
+            alpha;cl;cd
+            -5;-0,4;1,01%
+            0;0,1;0,9 %
+            5;0,6;0,01
+
+            """, """
+            lab.txt:2:9: cd is '1,01%', in percent; only ratios are read, so give the table as such
+            lab.txt:3:7: cd is '0,9 %', in percent; only ratios are read, so give the table as such
+            """),
+        new("a degree sign beside one angle of several", "", """
+            alpha;cl;cd
+            -5;-0,4;0,01
+            1°;0,1;0,009
+            5;0,6;0,01
+
+            """, """
+            lab.txt:3:1: alpha has a degree sign here and none in line 2; give one to all angles or to none
+            """),
+        new("degree signs in a column of radians", "", """
+            alpha [rad];cl;cd
+            -3°;-0,4;0,01
+            1°;0,1;0,009
+            3°;0,6;0,01
+
+            """, """
+            lab.txt:2:1: alpha has a degree sign here and line 1 names radians; correct one of them
+            """),
+        new("degrees in a column of radians, of which some could go round", "", """
+            alpha [rad];cl;cd
+            -4;-0,4;0,01
+            0;0,1;0,009
+            4;0,6;0,01
+
+            """, """
+            lab.txt:2:1: alpha is -4 rad, -229.183118052 deg; angles go from -180 to 180 degrees; if line 1 is wrong to name radians, say --angles degrees
+            lab.txt:4:1: alpha is 4 rad, 229.183118052 deg; angles go from -180 to 180 degrees; if line 1 is wrong to name radians, say --angles degrees
+            """),
+        new("degrees said to be radians", "--angles radians", """
+            alpha;cl;cd
+            -4;-0,4;0,01
+            0;0,1;0,009
+            3;0,6;0,01
+
+            """, """
+            lab.txt:2:1: alpha is -4 rad, -229.183118052 deg; angles go from -180 to 180 degrees; is --angles radians right?
+            """),
+        new("degrees said of a column of radians that may be such", "--angles degrees", """
+            alpha [rad];cl;cd
+            -3;-0,4;0,01
+            0;0,1;0,009
+            3;0,6;0,01
+
+            """, """
+            lab.txt:1:1: names radians for the angle of attack and --angles says degrees; if the line is wrong, leave it out with --lines and say --columns by number
             """),
     ];
 }

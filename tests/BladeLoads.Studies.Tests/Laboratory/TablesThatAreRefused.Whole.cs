@@ -41,6 +41,15 @@ internal static partial class TablesThatAreRefused
             """, """
             lab.txt:1:1: can be read in two ways: with tabs between columns and a decimal point, -5 -0.4 0.1 in line 1; or with blanks between columns and a decimal point, -0.4 0.1 0.7 in line 1; say which with --separator and --decimal
             """),
+        new("commas that are to separate columns and be decimal signs", "--separator comma --decimal comma", """
+            alpha,cl,cd
+            0,1,2
+            5,1,2
+            10,1,2
+
+            """, """
+            lab.txt: a comma cannot both separate columns and be the decimal sign where no cell stands in quotes; give --separator or --decimal another
+            """),
         new("a hidden character", "", """
             alpha;cl;cd
             <U+200F>-5;-0,4;0,01

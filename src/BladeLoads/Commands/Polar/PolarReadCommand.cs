@@ -17,7 +17,11 @@ internal static class PolarReadCommand
 {
     private const string Incomplete = "incomplete";
     private const string NegativeDrag = "negative-drag";
+    private const string Millions = "millions";
+    private const string Thousands = "thousands";
     private const int RowsShown = 3;
+
+    private readonly record struct ReynoldsSaid(double? Number, ReynoldsUnit? Unit);
 
     public static Command Define(Surroundings surroundings)
     {
@@ -30,10 +34,10 @@ internal static class PolarReadCommand
         var angles = WordOption.Define<AngleUnit>("--angles", "unit of the angle of attack, where the table does not say");
         var sign = WordOption.Define<DecimalSign>("--decimal", "decimal sign, where it can be read in two ways");
         var separator = WordOption.Define<CellSeparator>("--separator", "what stands between columns, where it can be read in two ways");
-        var reynolds = new Option<double?>("--reynolds")
+        var reynolds = new Option<ReynoldsSaid?>("--reynolds")
         {
-            Description = "Reynolds number of a table that names none",
-            HelpName = "number",
+            Description = "Reynolds number of a table that names none; or the unit of those in the table, where it does not say",
+            HelpName = $"number|{Millions}|{Thousands}",
             CustomParser = ParseReynolds,
         };
         var comment = new Option<string?>("--comment")
@@ -54,7 +58,7 @@ internal static class PolarReadCommand
             Description = "rows to leave out: those without a value, those with a drag below 0; may be given several times",
             HelpName = $"{Incomplete}|{NegativeDrag}",
         };
-        leaveOut.AcceptOnlyFromAmong(Incomplete, NegativeDrag);
+        leaveOut.Validators.Add(CheckLeaveOut);
         var wrap = new Option<bool>("--wrap")
         {
             Description = "angles go round from 0 to 360 degrees, or to -360: those beyond 180 stand for 360 less, beyond -180 for 360 more",
@@ -76,7 +80,8 @@ internal static class PolarReadCommand
                 Angles = parsed.GetValue(angles),
                 DecimalSign = parsed.GetValue(sign),
                 Separator = parsed.GetValue(separator),
-                Reynolds = parsed.GetValue(reynolds),
+                Reynolds = parsed.GetValue(reynolds)?.Number,
+                ReynoldsUnit = parsed.GetValue(reynolds)?.Unit,
                 Comment = CommentSign(parsed.GetValue(comment)),
                 Lines = parsed.GetValue(lines),
                 Section = parsed.GetValue(section),
@@ -163,13 +168,23 @@ internal static class PolarReadCommand
                 $"--comment is '{text}'; give the sign or the word that such lines begin with, no number and no sign of one");
     }
 
-    private static double? ParseReynolds(ArgumentResult argument)
+    private static void CheckLeaveOut(OptionResult result)
+    {
+        foreach (var token in result.Tokens.Where(token => token.Value is not (Incomplete or NegativeDrag)))
+            result.AddError($"--leave-out is '{Printable.Of(token.Value)}'; give {Incomplete} or {NegativeDrag}");
+    }
+
+    private static ReynoldsSaid? ParseReynolds(ArgumentResult argument)
     {
         var text = argument.Tokens.Count == 1 ? argument.Tokens[0].Value : "";
+        if (text is Millions or Thousands)
+            return new ReynoldsSaid(null, text == Millions ? ReynoldsUnit.Millions : ReynoldsUnit.Thousands);
         const NumberStyles style = NumberStyles.AllowDecimalPoint | NumberStyles.AllowExponent;
         if (double.TryParse(text, style, CultureInfo.InvariantCulture, out var number) && PolarLimits.IsReynoldsOfABlade(number))
-            return number;
-        argument.AddError($"--reynolds is '{Printable.Of(text)}'; give a number from {PolarLimits.ReynoldsInWords}: 1.5e6");
+            return new ReynoldsSaid(number, null);
+        argument.AddError(
+            $"--reynolds is '{Printable.Of(text)}'; give a number from {PolarLimits.ReynoldsInWords}: 1.5e6; or {Millions} or {Thousands}, "
+            + "the unit of those in the table");
         return null;
     }
 

@@ -15,6 +15,8 @@ internal sealed record TableOut(string Path, string Source, bool Replace)
     {
         if (!StoredSet.IsTable(System.IO.Path.GetFileName(Path)))
             throw new WrongUseException($"'{Path}' cannot be a polar table; give a file <section>.csv");
+        if (StoredSet.NameProblem(System.IO.Path.GetFileName(Path)) is { } problem)
+            throw new WrongUseException($"'{Path}' cannot be a polar table: the name of its section {problem}; give another <section>.csv");
         var path = System.IO.Path.GetFullPath(Path);
         if (new DiskFiles().RealPath(path) == new DiskFiles().RealPath(System.IO.Path.GetFullPath(Source)))
             throw new WrongUseException($"'{Path}' is what is read, which stays as it is; give another file");
@@ -36,6 +38,11 @@ internal sealed record TableOut(string Path, string Source, bool Replace)
             if (WholeFile.Write(Path, bytes, Replace, surroundings.Disk))
                 return true;
             surroundings.Error.WriteLine(Printable.Of($"cannot write {Path}: something stands there that cannot give way"));
+        }
+        catch (Exception e) when (e is FileNotFoundException or DirectoryNotFoundException)
+        {
+            // The folder is no place for files of ours, or went after it was looked at; the system's text would name a file that nobody knows.
+            surroundings.Error.WriteLine(Printable.Of($"cannot write {Path}: no file can be made in its folder; give a place in another"));
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
