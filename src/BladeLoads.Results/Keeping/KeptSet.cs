@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using BladeLoads.Results.Publishing;
+using BladeLoads.Results.Report;
 using BladeLoads.Results.Tables;
 using BladeLoads.Results.Wording;
 
@@ -8,10 +9,11 @@ namespace BladeLoads.Results.Keeping;
 /// <summary>What is to be kept.</summary>
 /// <param name="Cases">Every case of the study, and how its result stands in the plan's words.</param>
 /// <param name="Summary">The bytes of <c>summary.csv</c>.</param>
+/// <param name="Report">The bytes of <c>report.html</c>; null where there is none of this summary.</param>
 /// <param name="Replace">A set of that name gives way.</param>
 /// <param name="AsItIs">Results that are not what was written are kept too, and said to be damaged.</param>
 public sealed record KeepRequest(
-    string Name, IReadOnlyList<(string Case, string State)> Cases, byte[] Summary, bool Replace, bool AsItIs, DateTimeOffset At,
+    string Name, IReadOnlyList<(string Case, string State)> Cases, byte[] Summary, byte[]? Report, bool Replace, bool AsItIs, DateTimeOffset At,
     string ToolVersion);
 
 /// <summary>Why a set is not kept: one line, and lines about single cases.</summary>
@@ -91,8 +93,14 @@ public static class KeptSet
             throw new NotKeptException("not kept: there is no result", []);
         var record = new KeptRecord(
             KeptRecord.CurrentFormat, request.Name, results.StudyName, request.At, request.ToolVersion, kept, Caution.Text);
+        var report = kept.Exists(k => k.State == Damaged) ? null : request.Report;
         WriteFolder(
-            hidden, [new ResultContent(SummaryTable.FileName, request.Summary), new ResultContent(KeptRecord.FileName, record.ToBytes())], disk);
+            hidden,
+            [
+                new ResultContent(SummaryTable.FileName, request.Summary), new ResultContent(KeptRecord.FileName, record.ToBytes()),
+                .. report is null ? (ResultContent[])[] : [new ResultContent(StudyReport.FileName, report)],
+            ],
+            disk);
         return record;
     }
 

@@ -13,10 +13,22 @@ public static class PictureFile
     public static byte[] Svg(PolarPicture picture)
     {
         var page = new PolarPage(picture);
+        return Svg(page.Height, canvas => page.Draw(canvas, withDashes: false), page.Looks, picture.Title, picture.Notes);
+    }
+
+    /// <summary>The same for curves over wind speed.</summary>
+    public static byte[] Svg(CurvePicture picture)
+    {
+        var page = new CurvePage(picture);
+        return Svg(page.Height, page.Draw, page.Looks, picture.Title, []);
+    }
+
+    private static byte[] Svg(float height, Action<SKCanvas> draw, IEnumerable<LineLook> looks, string title, IEnumerable<string> notes)
+    {
         using var drawn = new MemoryStream();
-        using (var canvas = SKSvgCanvas.Create(SKRect.Create(PolarPage.Width, page.Height), drawn))
-            page.Draw(canvas, withDashes: false);
-        return SvgPicture.Finish(drawn.ToArray(), page, PictureText.Of(picture.Title), picture.Notes.Select(PictureText.Of));
+        using (var canvas = SKSvgCanvas.Create(SKRect.Create(PolarPage.Width, height), drawn))
+            draw(canvas);
+        return SvgPicture.Finish(drawn.ToArray(), height, looks, PictureText.Of(title), notes.Select(PictureText.Of));
     }
 
     /// <summary>A PNG page of 192 pixels an inch.</summary>

@@ -17,15 +17,17 @@ internal static class SvgPicture
     private static readonly XNamespace Svg = "http://www.w3.org/2000/svg";
 
     /// <param name="svg">As drawn, with solid lines.</param>
+    /// <param name="height">px</param>
+    /// <param name="looks">Of all lines.</param>
     /// <param name="title">For screen readers and the browser's tab.</param>
-    public static byte[] Finish(byte[] svg, PolarPage page, string title, IEnumerable<string> notes)
+    public static byte[] Finish(byte[] svg, float height, IEnumerable<LineLook> looks, string title, IEnumerable<string> notes)
     {
         using var drawn = new MemoryStream(svg);
         var root = XElement.Load(drawn);
-        root.SetAttributeValue("viewBox", string.Create(CultureInfo.InvariantCulture, $"0 0 {PolarPage.Width} {page.Height}"));
+        root.SetAttributeValue("viewBox", string.Create(CultureInfo.InvariantCulture, $"0 0 {PolarPage.Width} {height}"));
         foreach (var text in root.Descendants(Svg + "text"))
             SetText(text);
-        Break(root, page.Looks);
+        Break(root, looks);
         Renumber(root);
         root.AddFirst(
             new XElement(Svg + "title", title),

@@ -1,4 +1,5 @@
 using BladeLoads.Results.Comparison;
+using BladeLoads.Results.Report;
 using BladeLoads.Results.Tables;
 
 namespace BladeLoads.Results.Publishing;
@@ -62,6 +63,9 @@ public sealed record ResultsFolder(string Root, string StudyName)
     /// <summary>Pictures of section tables, a folder a set.</summary>
     public string Pictures => Path.Join(Study, PicturesName);
 
+    /// <summary>The page for reading, printing and signing.</summary>
+    public string Report => Path.Join(Study, StudyReport.FileName);
+
     /// <summary>What moved in the last run.</summary>
     public string Changes => Path.Join(Study, ChangesTable.FileName);
 
@@ -93,6 +97,6 @@ public sealed record ResultsFolder(string Root, string StudyName)
 
     private static readonly HashSet<string> OwnNames = new(StringComparer.OrdinalIgnoreCase)
     {
-        LogsName, FailuresName, TablesName, ReplacedName, KeptName, PolarsName, PicturesName, SummaryTable.FileName, "report.html", ChangesTable.FileName,
+        LogsName, FailuresName, TablesName, ReplacedName, KeptName, PolarsName, PicturesName, SummaryTable.FileName, StudyReport.FileName, ChangesTable.FileName,
     };
 }

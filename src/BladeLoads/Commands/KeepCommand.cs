@@ -77,7 +77,7 @@ internal static class KeepCommand
             results,
             new KeepRequest(
                 asked.Name, [.. plan.Cases.Select(c => (c.Case.Name, c.State.Word)), .. plan.Rejected.Select(r => (r, "rejected"))],
-                SummaryTable.Write(rows, study.Whole.Baseline), asked.Replace, asked.AsItIs, surroundings.Time.GetUtcNow(),
+                SummaryTable.Write(rows, study.Whole.Baseline), StudyReportFile.Find(rows, study.Whole.Baseline, results), asked.Replace, asked.AsItIs, surroundings.Time.GetUtcNow(),
                 CommandLine.ToolVersion),
             surroundings.Disk);
         var kept = record.Cases.Count(c => c.Fingerprint is not null);

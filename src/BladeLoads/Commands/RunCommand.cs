@@ -62,6 +62,8 @@ internal static class RunCommand
         var moved = run.NoRoom is null && !changes.IsEmpty ? changes.Compare(run.Outcomes) : [];
         if (run.NoRoom is null && !changes.IsEmpty)
             changes.Publish(moved, run.Outcomes, publisher.Get());
+        if (run.NoRoom is null && run.Faults.IsEmpty)
+            StudyReportFile.Publish(rows, study.Whole, results, CommandLine.ToolVersion, !run.Outcomes.IsEmpty, publisher.Get);
         if (run.NoRoom is null && !due.IsEmpty)
             look.LookAfterRun(study.Whole);
         if (run.SolvedByAnother > 0 && !request.Quiet)

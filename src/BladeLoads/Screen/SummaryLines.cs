@@ -1,6 +1,7 @@
 using System.Globalization;
 using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Receipts;
+using BladeLoads.Results.Report;
 using BladeLoads.Results.Tables;
 using BladeLoads.Results.Wording;
 
@@ -39,6 +40,7 @@ internal static class SummaryLines
         output.WriteLine();
         output.WriteLine(Caution);
         output.WriteLine(Printable.Of($"results: {folder}"));
+        output.WriteLine(Printable.Of($"report:  {Path.Join(folder, StudyReport.FileName)}"));
     }
 
     // Rows that have a searched point or a year; none, none of it.

@@ -114,6 +114,6 @@ public sealed class KeptSetTests : IDisposable
     }
 
     private static KeepRequest Request(string name, params string[] cases) => new(
-        name, [.. cases.Select(c => (c, c == "c" ? "missing" : "current"))], Summary, false, false,
+        name, [.. cases.Select(c => (c, c == "c" ? "missing" : "current"))], Summary, null, false, false,
         new DateTimeOffset(2026, 2, 1, 0, 0, 0, TimeSpan.Zero), "0.0.0");
 }

@@ -16,7 +16,7 @@ public sealed class VerificationTests : IDisposable
         _results = Runs.Results(_folder);
         for (var i = 0; i < 2; i++)
             Runs.Solve(_results, [FellRotor.Case("a"), FellRotor.Case("b")]);
-        KeptSet.Keep(_results, new KeepRequest("signed", [("a", "current")], [], false, false, DateTimeOffset.UnixEpoch, "0.0.0"), new Disk());
+        KeptSet.Keep(_results, new KeepRequest("signed", [("a", "current")], [], null, false, false, DateTimeOffset.UnixEpoch, "0.0.0"), new Disk());
     }
 
     public void Dispose() => _folder.Dispose();

@@ -33,6 +33,7 @@ public sealed class Commands_with_an_invented_solver : IDisposable
 
             steady, characteristic, unfactored, without weight; no design envelope (each receipt.json says more)
             results: {Path.Join(_folder.Path, "fell")}
+            report:  {Path.Join(_folder.Path, "fell", "report.html")}
 
             """, text);
     }

@@ -24,7 +24,7 @@ public sealed class The_program : IDisposable
         var first = Run("run", "beck");
         Assert.True(first.ExitCode == 0, first.All);
         Assert.StartsWith("3 cases: 3 missing; solving 3\n", first.Out, StringComparison.Ordinal);
-        Assert.EndsWith($"\nresults: {_results}\n", first.Out, StringComparison.Ordinal);
+        Assert.EndsWith($"\nresults: {_results}\nreport:  {_results}/report.html\n", first.Out, StringComparison.Ordinal);
         Assert.StartsWith("solving 3 cases with ", first.Error, StringComparison.Ordinal);
         foreach (var name in new[] { "clean", "slow", "thin-air" })
             Assert.Equal(

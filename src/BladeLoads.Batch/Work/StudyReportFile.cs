@@ -1,0 +1,90 @@
+using System.Collections.Immutable;
+using System.Security.Cryptography;
+using System.Text;
+using BladeLoads.Results.Comparison;
+using BladeLoads.Results.Publishing;
+using BladeLoads.Results.Receipts;
+using BladeLoads.Results.Report;
+using BladeLoads.Results.Tables;
+using BladeLoads.Studies;
+
+namespace BladeLoads.Batch.Work;
+
+/// <summary>The report of a study, from the results that lie on the disk.</summary>
+public static class StudyReportFile
+{
+    private const int StampReach = 1024;
+
+    /// <summary>Writes <c>report.html</c> where results were just made, or where the one that is there is of another summary.</summary>
+    /// <param name="rows">Of the whole study, as its summary has them.</param>
+    /// <exception cref="NoRoomForResultsException">It cannot be written.</exception>
+    public static void Publish(
+        ImmutableArray<SummaryRow> rows, Study study, ResultsFolder results, string toolVersion, bool hasNewResults, Func<Publisher> publisher)
+    {
+        try
+        {
+            var changes = File.Exists(results.Changes) ? File.ReadAllBytes(results.Changes) : [];
+            var stamp = $"{StampOf(rows, study.Baseline)} and changes {Hash(changes)}";
+            if (!hasNewResults && IsOf(results.Report, stamp))
+                return;
+            var report = new StudyReport(
+                results.StudyName, toolVersion, study.Baseline, Cases(rows, study, results), StoredChanges.Parse(changes));
+            publisher().PublishFile(results.Report, ReportPage.Write(report, stamp));
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            throw new NoRoomForResultsException(results.Study, e);
+        }
+    }
+
+    /// <summary>The report that lies there; null where there is none of this summary, or it cannot be read.</summary>
+    public static byte[]? Find(ImmutableArray<SummaryRow> rows, string? baseline, ResultsFolder results)
+    {
+        try
+        {
+            return IsOf(results.Report, StampOf(rows, baseline)) ? File.ReadAllBytes(results.Report) : null;
+        }
+        catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+        {
+            return null;
+        }
+    }
+
+    private static string StampOf(ImmutableArray<SummaryRow> rows, string? baseline) => $"of summary {Hash(SummaryTable.Write(rows, baseline))}";
+
+    private static bool IsOf(string path, string stamp)
+    {
+        if (!File.Exists(path))
+            return false;
+        using var file = File.OpenRead(path);
+        var beginning = new byte[StampReach];
+        var read = file.ReadAtLeast(beginning, StampReach, throwOnEndOfStream: false);
+        return beginning.AsSpan(0, read).IndexOf(Encoding.ASCII.GetBytes(stamp)) >= 0;
+    }
+
+    private static ImmutableArray<ReportedCase> Cases(ImmutableArray<SummaryRow> rows, Study study, ResultsFolder results)
+    {
+        var files = study.Cases.ToDictionary(c => c.Name, c => c.File, StringComparer.Ordinal);
+        return [.. rows.Select(row =>
+        {
+            var file = files.GetValueOrDefault(row.Case, "");
+            return row.Summary is not null && ReceiptFile.Read(results.Case(row.Case)) is ReceiptReading.Readable { Receipt: var receipt }
+                ? new ReportedCase(row, file, receipt, CurveOf(results.Case(row.Case)))
+                : new ReportedCase(row, file, null, null);
+        })];
+    }
+
+    private static StoredCurve? CurveOf(string folder)
+    {
+        try
+        {
+            return StoredCurve.Read(folder);
+        }
+        catch (UnreadableCurveException)
+        {
+            return null;   // 'verify' tells of it
+        }
+    }
+
+    private static string Hash(byte[] bytes) => Convert.ToHexStringLower(SHA256.HashData(bytes));
+}
