@@ -71,7 +71,7 @@ public static class ReportPage
 
     private static XElement Cautions() => Element(
         "section", Text("h2", "Cautions"), Text("p", Caution.Text),
-        Text("p", "Marks in the summary name operating points whose figures need a look before they are used; what each means stands at the end.")).Class("caution");
+        Text("p", "Marks in the summary name operating points whose figures need a look before they are used; what each means stands below it.")).Class("caution");
 
     private static XElement SignOff() => Element(
         "section", Text("h2", "Signatures"),

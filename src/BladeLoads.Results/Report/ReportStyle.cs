@@ -12,7 +12,7 @@ internal static class ReportStyle
         table { border-collapse: collapse; font-size: 12px; margin: 6px 0; }
         th, td { border: 1px solid #d0d0d0; padding: 2px 6px; text-align: left; vertical-align: top; overflow-wrap: anywhere; }
         th { background: #f1f3f5; font-weight: 600; overflow-wrap: normal; }
-        td:first-child { min-width: 14em; }
+        td:first-child { min-width: 16em; }
         .n { text-align: right; font-variant-numeric: tabular-nums; overflow-wrap: normal; }
         .origin, footer { color: #505050; }
         .caution { border: 2px solid #b04000; padding: 0 14px 4px; margin-top: 16px; }
@@ -25,7 +25,7 @@ internal static class ReportStyle
         figcaption { font-weight: 600; margin-bottom: 4px; }
         img { width: 100%; max-width: 794px; height: auto; }
         footer { margin: 28px 0; }
-        @page { size: A4; margin: 14mm; }
+        @page { size: A4 landscape; margin: 12mm; }
         @media print { body { margin: 0; max-width: none; padding: 0; font-size: 10pt; } table { font-size: 7.5pt; } tr, .receipt { break-inside: avoid; } }
 
         """;
