@@ -78,7 +78,7 @@ public enum LineKind
     Extended,
 
     /// <summary>Worked out from the table for a place on a rotor.</summary>
-    Corrected,
+    Augmented,
 }
 
 /// <summary>The tables of a section before an update.</summary>

@@ -89,10 +89,10 @@ public sealed class PolarLinesTests
         => Assert.Empty(ExtendedLines.Of(Sections.Round(), Sections.Round()));
 
     [Fact]
-    public void Corrected_lines_of_one_label_stand_in_the_legend_once_and_look_alike()
+    public void Augmented_lines_of_one_label_stand_in_the_legend_once_and_look_alike()
     {
         var lines = new[] { ("at a", 1.2), ("at b", 1.3), ("at a", 1.4) }
-            .Select(l => new PolarLine(Sections.Lifting(1e6, l.Item2), LineKind.Corrected, l.Item1)).ToImmutableArray();
+            .Select(l => new PolarLine(Sections.Lifting(1e6, l.Item2), LineKind.Augmented, l.Item1)).ToImmutableArray();
         var picture = Picture(Sections.Of(1e6)).With(lines);
         Assert.Single(new DrawnPage(PictureFile.Svg(picture)).Words, w => w == "at a");
         var looks = PolarLines.Of(picture).All.Skip(1).Select(l => l.Look).ToList();
