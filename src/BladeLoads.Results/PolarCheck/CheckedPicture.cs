@@ -29,12 +29,19 @@ public static class CheckedPicture
         {
             Notes = [.. picture.Notes, .. Told(table, use)],
             Ringed = [.. table.Doubts.Where(doubt => doubt.Polar >= 0)
-                .SelectMany(doubt => doubt.Rows.Select(row => new RingedRow(polars[doubt.Polar], row))).Distinct()],
+                .SelectMany(doubt => doubt.Rows.Select(row => new RingedRow(polars[doubt.Polar], row, CoefficientOf(doubt)))).Distinct()],
             Shaded = use is { Blades: > 0 }
                 ? (double.DegreesToRadians(use.AngleDegBelow(0.05)), double.DegreesToRadians(use.AngleDegBelow(0.95)))
                 : null,
         };
     }
+
+    private static RingedCoefficient CoefficientOf(PolarDoubt doubt) => doubt.Column switch
+    {
+        "cl" => RingedCoefficient.Lift,
+        "cd" => RingedCoefficient.Drag,
+        _ => RingedCoefficient.Both,
+    };
 
     private static IEnumerable<string> Told(CheckedTable table, TableUse? use)
     {

@@ -75,6 +75,35 @@ public sealed class PolarDoubtTests
     }
 
     [Fact]
+    public void The_row_that_sticks_out_is_told_and_not_its_neighbour_which_it_makes_look_so() => Is(
+        ["26:7: cl is 0.84 at 4 deg, 0.082 above the line of its neighbours; compare it with the source, or leave the row out"],
+        Fell.With(4, "0.84", "0.0101").With(6, "0.9", "0.0121").Doubts());
+
+    [Fact]
+    public void A_second_row_that_sticks_out_is_told_in_the_place_of_the_third() => Is(
+        [
+            "3:1: angles reach from -4 to 30 deg; beyond them the end value serves, and each use is marked outside-angles",
+            "4:8: cl is 0.207 at -2 deg, 0.112 above the line of its neighbours; compare it with the source, or leave the row out",
+        ],
+        Fell.Without(a => a is < -4 or > 30).With(-2, "0.207", "0.0095").With(0, "0.3", "0.0091").Doubts());
+
+    [Fact]
+    public void Drag_in_percent_is_doubted_where_lift_is_that_of_a_slender_section()
+    {
+        Is(
+            [
+                "3:1: angles reach from -8 to 18 deg; beyond them the end value serves, and each use is marked outside-angles",
+                "7:13: cd is 0.91 at least, and lift rises by 0.975 of 2 pi to 1.094, as that of slender sections does; they have a tenth of such drag and "
+                + "less: is it in percent?",
+            ],
+            Fell.Without(a => a is < -8 or > 18).Changed(r => (r.Angle, r.Lift, 100 * r.Drag)).Doubts());
+        // Half the slope, or half the lift: as thick sections near the root have them.
+        Assert.DoesNotContain(
+            Fell.Without(a => a is < -8 or > 18).Changed(r => (r.Angle, 0.5 * r.Lift, 100 * r.Drag)).Doubts(),
+            doubt => doubt.Contains("percent", StringComparison.Ordinal));
+    }
+
+    [Fact]
     public void A_table_that_scatters_as_a_whole_is_told_once() => Is(
         ["20:8: cl scatters: 10 of 24 rows from -30 to 30 deg lie off the line of their neighbours; smooth the table"],
         Fell.Changed(r => (r.Angle, r.Lift + (r.Angle % 4 == 0 ? 0.04 : -0.04) * (Math.Abs(r.Angle) < 13 ? 1 : 0), r.Drag)).Doubts());
