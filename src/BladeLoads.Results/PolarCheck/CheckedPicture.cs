@@ -16,8 +16,11 @@ public static class CheckedPicture
     /// <param name="use">By the file of the table.</param>
     public static ImmutableArray<ResultContent> Files(CheckedTables tables, IReadOnlyDictionary<string, TableUse> use, TableNames names)
         => [.. tables.Tables.Select(table => new ResultContent(
-            names.FileNameOf(table.File) + Ending,
+            FileNameOf(table.File, names),
             PictureFile.Svg(Of(table, use.GetValueOrDefault(table.File), names.SetOf(table.File)))))];
+
+    /// <param name="file">Of the table.</param>
+    public static string FileNameOf(string file, TableNames names) => PictureName.Of(names.FileNameOf(file)) + Ending;
 
     /// <param name="use">Null for a table that nothing uses.</param>
     /// <param name="set">The name of the set of the table.</param>

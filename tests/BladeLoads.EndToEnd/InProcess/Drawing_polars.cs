@@ -222,10 +222,10 @@ public sealed class Drawing_polars : IDisposable
     [Fact]
     public void An_earlier_table_with_an_error_is_told_and_nothing_is_drawn()
     {
-        Put("old.csv", "alpha_deg,cl,cd\n0,0,-1\n1,0,1\n2,0,1\n");
-        var (code, text, error) = Run("fell", "--out", "pages", "--before", At("old.csv"));
+        Put("old/tip.csv", "alpha_deg,cl,cd\n0,0,-1\n1,0,1\n2,0,1\n");
+        var (code, text, error) = Run("fell", "--out", "pages", "--before", At("old/tip.csv"));
         Assert.Equal((2, ""), (code, text));
-        Assert.Equal($"{At("old.csv")}:2:5: cd is -1; drag coefficients must be >= 0\n1 error in the earlier tables; nothing drawn\n", error);
+        Assert.Equal($"{At("old/tip.csv")}:2:5: cd is -1; drag coefficients must be >= 0\n1 error in the earlier tables; nothing drawn\n", error);
         Assert.False(Directory.Exists(At("pages")));
     }
 
@@ -235,6 +235,47 @@ public sealed class Drawing_polars : IDisposable
         Put("bad.csv", "alpha_deg,cl,cd\n0,0,-1\n1,0,1\n2,0,1\n");
         var (code, text, error) = Run("bad.csv", "--out", "pages");
         Assert.Equal((2, "", $"{At("bad.csv")}:2:5: cd is -1; drag coefficients must be >= 0\n1 error; nothing drawn\n"), (code, text, error));
+    }
+
+    [Fact]
+    public void Of_a_set_the_tables_without_errors_are_drawn_and_the_others_told()
+    {
+        Put("fell/polars/clean/bad.csv", "alpha_deg,cl,cd\n0,0,-1\n1,0,1\n2,0,1\n");
+        var error = $"{At("fell/polars/clean/bad.csv")}:2:5: cd is -1; drag coefficients must be >= 0\n";
+        Assert.Equal(
+            (1, $"{At("pages/clean/tip.svg")}\n{At("pages/clean/unused.svg")}\n", error + "1 error; only tables without errors are drawn\n"),
+            Run("fell/polars/clean", "--out", "pages"));
+        Assert.Equal((0, $"{At("pages/clean/tip.svg")}\n", ""), Run("fell/polars/clean", "--out", "pages", "--only", "tip"));
+        Assert.Equal((2, "", error + "1 error; nothing drawn\n"), Run("fell/polars/clean", "--out", "pages", "--only", "bad"));
+        Assert.Equal((2, "", "no section matches 'x'; there are bad, tip, unused\n"), Run("fell/polars/clean", "--only", "x"));
+    }
+
+    [Fact]
+    public void A_table_before_an_update_stands_for_the_section_of_its_name_alone()
+    {
+        Put("old/tip.csv", Table);
+        Put("old/other.csv", Table);
+        Assert.Equal(
+            (2, "", $"--before '{At("old/tip.csv")}' is the table of section 'tip' alone, and drawn are tip, unused; give the folder of a set or an "
+                + "earlier copy of the study, or draw --only tip\n"),
+            Run("fell/polars/clean", "--out", "pages", "--before", At("old/tip.csv")));
+        Assert.Equal(
+            (2, "", $"--before '{At("old/other.csv")}' is the table of section 'other' alone, and drawn are tip; give the folder of a set or an "
+                + "earlier copy of the study, or draw one table by itself\n"),
+            Run("fell", "--out", "pages", "--before", At("old/other.csv")));
+        Assert.False(Directory.Exists(At("pages")));
+        Assert.Equal(0, Run("fell/polars/clean", "--out", "pages", "--only", "tip", "--before", At("old/tip.csv")).Code);
+        Assert.Equal(0, Run("fell", "--out", "pages", "--before", At("old/tip.csv")).Code);
+        // Of two tables it is plain which are meant, whatever they are called.
+        Assert.Equal(0, Run("fell/polars/clean/tip.csv", "--out", "pages", "--before", At("old/other.csv")).Code);
+    }
+
+    [Fact]
+    public void A_file_where_a_folder_of_pictures_would_stand_is_told()
+    {
+        Put("file", "");
+        Assert.Equal((2, "", $"'{At("file")}' is a file; give a folder with --out\n"), Run("fell", "--out", "file"));
+        Assert.Equal((2, "", $"'{At("file")}' is a file; give a folder with --out\n"), Run("fell", "--out", "file/pages"));
     }
 
     [Fact]
@@ -317,7 +358,8 @@ public sealed class Drawing_polars : IDisposable
 
     private (int Code, string Out, string Error) Run(IDisk disk, SolveCase solve, Func<string, Study> read, params string[] arguments)
         => RunAsGiven(disk, solve, read, [
-            .. arguments.Select((a, i) => i == 0 || (arguments[i - 1] == "--out" && a.Length > 0) ? At(a) : a), "--results", At("results")]);
+            .. arguments.Select((a, i) => i == 0 || (arguments[i - 1] == "--out" && a.Length > 0) ? At(a) : a),
+            .. Directory.Exists(At(arguments[0] + "/cases")) ? (string[])["--results", At("results")] : []]);
 
     private static (int Code, string Out, string Error) RunAsGiven(IDisk disk, SolveCase solve, Func<string, Study> read, params string[] arguments)
     {
