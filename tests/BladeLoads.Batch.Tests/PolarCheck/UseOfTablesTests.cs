@@ -172,6 +172,25 @@ public sealed class UseOfTablesTests
             first.Select(p => FormattableString.Invariant($"{p.Share:0.00} {p.File} {p.Kind} {p.Most?.Finding.Line} of {p.Doubts}")));
     }
 
+    [Fact]
+    public void A_table_of_one_Reynolds_number_is_to_be_looked_at_where_its_use_is_far_from_it()
+    {
+        var one = Table(Tip, "reynolds,alpha_deg,cl,cd\n1e6,-5,-0.3,0.01\n1e6,0,0.3,0.01\n1e6,8,1.2,0.02\n1e6,15,0.8,0.1\n");
+        // Of the tip's length at work, 0.25 + 0.75 + 1 of 4 elements, the last is alone beyond twice a million.
+        Assert.Equal(
+            ["0.25 polars/clean/tip.csv used far from its one Reynolds number, 1e6, from 6.0e5 to 3.0e6"],
+            Far((1, 3, 6.05e5), (1, 3, 6.05e5), (1, 3, 6.05e5), (1, 3, 3e6)));
+        Assert.Empty(Far((1, 3, 5.2e5), (1, 3, 5.2e5), (1, 3, 1.9e6), (1, 3, 1.9e6)));
+
+        IEnumerable<string> Far(params (double, double, double)[] elements)
+        {
+            var use = UseOfTables.Of(
+                [Case("case-0")], [one], (rotor, _) => Curve(rotor, elements), 1, new RunProgress(1, 1, TimeProvider.System), CancellationToken.None);
+            return FirstToLookAt.Of([one], use.ByFile.SetItem(Root, Use((rotor, _) => Curve(rotor, elements)).ByFile[Root]))
+                .Where(p => p.Kind.StartsWith("used", StringComparison.Ordinal)).Select(p => FormattableString.Invariant($"{p.Share:0.00} {p.File} {p.Kind}"));
+        }
+    }
+
     private static (double RotorSpeed, double AngleDeg, double Reynolds)[] All(double angleDeg) => [.. Enumerable.Repeat((1.0, angleDeg, 1.01e6), 4)];
 
     private static UseOfTables Use(SolveCase solve) => UseOfTables.Of(
