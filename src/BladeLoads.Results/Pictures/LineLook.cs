@@ -30,7 +30,8 @@ internal sealed record LineLook(uint Colour, ImmutableArray<float> Dashes, int? 
     public static LineLook Extended { get; } = new(Vermilion, [4, 2.5f], null, 1.2f);
 
     /// <summary>The n-th different label among the augmented lines.</summary>
-    public static LineLook Augmented(int label) => new(Purples[label % Purples.Length], AugmentedPatterns[label % AugmentedPatterns.Length], null, 1.3f);
+    public static LineLook Augmented(int label)
+        => new(Purples[label % Purples.Length], AugmentedPatterns[label % AugmentedPatterns.Length], null, 1.3f);
 
     /// <summary>A broad pale line, on which an unchanged line runs in the middle; in the colour of the line that it was, if that is known.</summary>
     public static LineLook Earlier(LineLook? now) => new(Pale(now?.Colour ?? Grey), [], null, 3.4f);

@@ -66,7 +66,9 @@ internal sealed record PolarLines(ImmutableArray<PolarLines.Drawn> All)
     /// <summary>What an update changed, where both reach.</summary>
     public ImmutableArray<Curve> Differences((double From, double To) span, Func<Coefficients, double> value)
         => [.. Compared
-            .Select(c => (c.Now, c.Earlier, From: Math.Max(Math.Max(c.Now.From, c.Earlier.From), span.From), To: Math.Min(Math.Min(c.Now.To, c.Earlier.To), span.To)))
+            .Select(c => (
+                c.Now, c.Earlier,
+                From: Math.Max(Math.Max(c.Now.From, c.Earlier.From), span.From), To: Math.Min(Math.Min(c.Now.To, c.Earlier.To), span.To)))
             .Where(c => c.To > c.From)
             .Select(c => new Curve(
                 c.Now.Look, c.From, c.To, [.. c.Now.Knots.Concat(c.Earlier.Knots).Distinct().Order()],

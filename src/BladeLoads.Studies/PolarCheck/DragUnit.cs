@@ -11,10 +11,14 @@ internal static class DragUnit
 
     public static IEnumerable<PolarDoubt> Doubts(CheckedPolar polar)
     {
-        if (polar.Figures is { LeastDrag: { Value: >= MuchDrag } drag, SlopeRatio: >= SlenderSlope and var slope, LargestLift: { Value: > SlenderLift } lift })
+        if (polar.Figures is
+            {
+                LeastDrag: { Value: >= MuchDrag } drag, SlopeRatio: >= SlenderSlope and var slope, LargestLift: { Value: > SlenderLift } lift,
+            })
             yield return polar.Doubt(
                 DoubtKinds.UnitOfDrag, "cd", [drag.Row], -180, 180,
-                $"cd is {Given(drag.Value)} at least, and lift rises by {Found(slope)} of 2 pi to {Given(lift.Value)}, as that of slender sections does",
+                $"cd is {Given(drag.Value)} at least, and lift rises by {Found(slope)} of 2 pi to {Given(lift.Value)}, as that of slender sections "
+                + "does",
                 "; they have a tenth of such drag and less: is it in percent?");
     }
 }

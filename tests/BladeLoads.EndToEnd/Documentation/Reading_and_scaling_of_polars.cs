@@ -55,7 +55,8 @@ public sealed partial class Reading_and_scaling_of_polars : IDisposable
         ];
         var row = Repository.Lines("README.md").Single(line => line.StartsWith("| `--results <folder>` |", StringComparison.Ordinal));
         Assert.Equal(
-            commands.Where(command => Started.Run(_folder.Path, [.. command.Split(' '), "--help"]).Out.Contains("--results <folder>", StringComparison.Ordinal)),
+            commands.Where(
+                command => Started.Run(_folder.Path, [.. command.Split(' '), "--help"]).Out.Contains("--results <folder>", StringComparison.Ordinal)),
             row.Split(" | ")[1].Split(", "));
     }
 

@@ -127,7 +127,9 @@ public sealed class Drawing_polars : IDisposable
         Put("fell/cases/rotating.toml", Case("[sections]\nextend = \"viterna-1982\"\n"));
         var (code, text, error) = Run(new Disk(), _solve, ReadThenSpoil, "fell", "--out", "pages");
         Assert.Equal((1, $"{At("pages/clean/tip.svg")}\n"), (code, text));
-        Assert.Equal("polars/clean/tip.csv:2:5: cd is -1; drag coefficients must be >= 0\n1 error in tables that changed just now; their pages are not drawn\n", error);
+        Assert.Equal(
+            "polars/clean/tip.csv:2:5: cd is -1; drag coefficients must be >= 0\n"
+            + "1 error in tables that changed just now; their pages are not drawn\n", error);
         Assert.False(File.Exists(At("pages/clean/tip~rotating.svg")));
 
         Study ReadThenSpoil(string path)
@@ -153,7 +155,8 @@ public sealed class Drawing_polars : IDisposable
         };
         Assert.Equal($"{At("pages/clean/tip.svg")}\n", Run(new Disk(), solve, StudyReader.Read, "fell", "--out", "pages", "--only", "tip").Out);
         Assert.Equal(0, solved);
-        Assert.Equal($"{At("pages/clean/root~rotating.svg")}\n", Run(new Disk(), solve, StudyReader.Read, "fell", "--out", "pages", "--only", "root").Out);
+        Assert.Equal(
+            $"{At("pages/clean/root~rotating.svg")}\n", Run(new Disk(), solve, StudyReader.Read, "fell", "--out", "pages", "--only", "root").Out);
         Assert.Equal(1, solved);
         Assert.Equal("no section matches 'x*'; there are root, tip\n", Run("fell", "--only", "x*").Error);
     }
@@ -162,11 +165,14 @@ public sealed class Drawing_polars : IDisposable
     public void Pictures_are_told_by_the_path_that_was_given()
     {
         var relative = Path.GetRelativePath(Directory.GetCurrentDirectory(), At("results"));
-        Assert.Equal($"{Path.Join(relative, "fell/pictures/clean/tip.svg")}\n", RunAsGiven(new Disk(), _solve, StudyReader.Read, At("fell"), "--results", relative).Out);
+        Assert.Equal(
+            $"{Path.Join(relative, "fell/pictures/clean/tip.svg")}\n",
+            RunAsGiven(new Disk(), _solve, StudyReader.Read, At("fell"), "--results", relative).Out);
         Assert.True(File.Exists(At("results/fell/pictures/clean/tip.svg")));
         var set = Path.GetRelativePath(Directory.GetCurrentDirectory(), At("fell/polars/clean"));
         var pages = Path.GetRelativePath(Directory.GetCurrentDirectory(), At("pages"));
-        Assert.Equal($"{Path.Join(pages, "clean/tip.svg")}\n", RunAsGiven(new Disk(), _solve, StudyReader.Read, set, "--out", pages, "--only", "tip").Out);
+        Assert.Equal(
+            $"{Path.Join(pages, "clean/tip.svg")}\n", RunAsGiven(new Disk(), _solve, StudyReader.Read, set, "--out", pages, "--only", "tip").Out);
         Assert.Contains($">{Path.Join(set, "tip.csv")}<", Read("pages/clean/tip.svg"), StringComparison.Ordinal);
     }
 
@@ -199,7 +205,8 @@ public sealed class Drawing_polars : IDisposable
 
         File.Delete(At("pages/clean/tip.svg"));
         Directory.CreateDirectory(At("pages/clean/tip.svg"));
-        Assert.Equal($"not drawn: {At("pages/clean/tip.svg")} is a folder; give another with --out\n", Run("fell", "--out", "pages", "--replace").Error);
+        Assert.Equal(
+            $"not drawn: {At("pages/clean/tip.svg")} is a folder; give another with --out\n", Run("fell", "--out", "pages", "--replace").Error);
     }
 
     [Fact]
@@ -208,15 +215,21 @@ public sealed class Drawing_polars : IDisposable
         Put("old/cases/plain.toml", "");
         Put("old/polars/clean/tip.csv", Table);
         foreach (var (source, before) in new[]
-            { ("fell", "old"), ("fell", "old/polars/clean"), ("fell/polars/clean/tip.csv", "old/polars/clean/tip.csv"), ("fell/polars/clean", "old/polars/clean") })
+            {
+                ("fell", "old"), ("fell", "old/polars/clean"), ("fell/polars/clean/tip.csv", "old/polars/clean/tip.csv"),
+                ("fell/polars/clean", "old/polars/clean"),
+            })
         {
             var (code, _, error) = Run(source, "--out", "pages", "--before", At(before));
             Assert.Equal((0, ""), (code, error));
-            var earlier = At(before.EndsWith(".csv", StringComparison.Ordinal) ? before : before == "old" ? "old/polars/clean/tip.csv" : before + "/tip.csv");
+            var earlier = At(
+                before.EndsWith(".csv", StringComparison.Ordinal) ? before : before == "old" ? "old/polars/clean/tip.csv" : before + "/tip.csv");
             Assert.Contains($"before: {earlier}", Title(Read("pages/clean/tip.svg")), StringComparison.Ordinal);
             File.Delete(At("pages/clean/tip.svg"));
         }
-        Assert.StartsWith($"clean/unused: no earlier table in {At("old/polars/clean")}\n", Run("fell/polars/clean", "--out", "pages", "--before", At("old/polars/clean")).Out, StringComparison.Ordinal);
+        Assert.StartsWith(
+            $"clean/unused: no earlier table in {At("old/polars/clean")}\n",
+            Run("fell/polars/clean", "--out", "pages", "--before", At("old/polars/clean")).Out, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -288,10 +301,13 @@ public sealed class Drawing_polars : IDisposable
     }
 
     [Theory]
-    [InlineData("--before 'nowhere' is not there; give a table, the folder of a set, or an earlier copy of the study\n", "fell", "--before", "nowhere")]
+    [InlineData(
+        "--before 'nowhere' is not there; give a table, the folder of a set, or an earlier copy of the study\n", "fell", "--before", "nowhere")]
     [InlineData("--out is empty; give the folder that pictures go to\n", "fell", "--out", "")]
     [InlineData("no section matches 'x*'; there are tip\n", "fell", "--only", "x*")]
-    [InlineData("--format is 'jpeg'; give svg, png or both\n\n'bladeloads polar draw --help' shows what can be asked, with examples\n", "fell", "--format", "jpeg")]
+    [InlineData(
+        "--format is 'jpeg'; give svg, png or both\n\n'bladeloads polar draw --help' shows what can be asked, with examples\n", "fell", "--format",
+        "jpeg")]
     public void Wrong_use_is_told(string expected, params string[] arguments)
     {
         var (code, _, error) = Run(arguments);

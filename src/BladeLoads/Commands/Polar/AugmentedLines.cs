@@ -39,7 +39,8 @@ internal sealed class AugmentedLines
         return (lines, lines.IsEmpty
             ? "Rotation changes nothing here: the section stands where it is not augmented."
             : "Augmented at the best power coefficient of the case: "
-                + string.Create(CultureInfo.InvariantCulture, $"{_best.Operation.WindSpeed:0.##} m/s, tip-speed ratio {_best.Loads!.TipSpeedRatio:0.0#}")
+                + string.Create(
+                    CultureInfo.InvariantCulture, $"{_best.Operation.WindSpeed:0.##} m/s, tip-speed ratio {_best.Loads!.TipSpeedRatio:0.0#}")
                 + "; each radius on the table nearest in Reynolds number.");
     }
 

@@ -113,7 +113,8 @@ internal static class PolarDrawCommand
         ];
         FindingLines.Write(errors, [], "", surroundings.Error, surroundings.ErrorIsTerminal);
         if (!errors.IsEmpty)
-            surroundings.Error.WriteLine($"{Count.Of(errors, "error")}; {(pages.IsEmpty ? "nothing drawn" : "only tables without errors are drawn")}");
+            surroundings.Error.WriteLine(
+                $"{Count.Of(errors, "error")}; {(pages.IsEmpty ? "nothing drawn" : "only tables without errors are drawn")}");
         return (pages, UsualFolder, errors.IsEmpty);
 
         // Null for an error about the set itself.
