@@ -129,8 +129,7 @@ internal sealed record BladeTable(
         var thickness = rows.Number("thickness_ratio");
         if (!(thickness is <= 0 or > 1))
             return thickness;
-        rows.Error("thickness_ratio", $"thickness_ratio is {CanonicalText.Of(thickness)}; it is thickness over chord, above 0 to 1"
-            + (thickness is > 1 and <= 100 ? $": {CanonicalText.Of(thickness / 100)}" : ""));
+        rows.Error("thickness_ratio", $"thickness_ratio is {CanonicalText.Of(thickness)}; {ThicknessText.WhatWouldDo(thickness)}");
         return double.NaN;
     }
 

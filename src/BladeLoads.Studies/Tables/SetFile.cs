@@ -40,8 +40,9 @@ internal sealed record SetFile(ImmutableArray<TableThickness> Thicknesses, Input
         {
             foreach (var (section, key, value) in table.Entries)
                 if (value is not TomlValue.Number { Value: > 0 and <= 1 } number)
-                    Refuse(value.At, $"thickness_ratio of '{section}' is {value.Found}; it is thickness over chord, above 0 to 1"
-                        + (value is TomlValue.Number { Value: > 1 and <= 100 } percent ? $": {CanonicalText.Of(percent.Value / 100)}" : ""));
+                    Refuse(value.At, $"thickness_ratio of '{section}' is {value.Found}; " + (value is TomlValue.Text
+                        ? "give the thickness over chord as a number, without quotes"
+                        : ThicknessText.WhatWouldDo((value as TomlValue.Number)?.Value ?? double.NaN)));
                 else
                     thicknesses.Add(new TableThickness(section, number.Value, key));
         }

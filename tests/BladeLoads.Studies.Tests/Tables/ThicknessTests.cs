@@ -71,7 +71,7 @@ public sealed class ThicknessTests
         "polars/clean/set.toml:2:8: thickness_ratio of 'root' is 40; it is thickness over chord, above 0 to 1: 0.4")]
     [InlineData("[thickness_ratio]\nroot = 0\ntip = \"0.2\"\n",
         "polars/clean/set.toml:2:8: thickness_ratio of 'root' is 0; it is thickness over chord, above 0 to 1",
-        "polars/clean/set.toml:3:7: thickness_ratio of 'tip' is '0.2'; it is thickness over chord, above 0 to 1")]
+        "polars/clean/set.toml:3:7: thickness_ratio of 'tip' is '0.2'; give the thickness over chord as a number, without quotes")]
     [InlineData("[thickness_ratio]\nroot = 0.2\ntip = 0.2\n",
         "polars/clean/set.toml:3:1: 'root' and 'tip' are both 0.2 thick; between tables of one thickness nothing can be interpolated")]
     [InlineData("thickness_ratio = 0.2\n",
@@ -97,9 +97,10 @@ public sealed class ThicknessTests
         "blades/fell.csv:3:7: section is empty; name one in every row, or leave the column out and thickness_ratio serves")]
     [InlineData("radius_m,chord_m,twist_deg,thickness_ratio\n1,1,0,0.4\n2,1,0,\n",
         "blades/fell.csv:3:7: thickness_ratio is empty; give a number")]
-    [InlineData("radius_m,chord_m,twist_deg,thickness_ratio\n1,1,0,40\n2,1,0,21\n",
+    [InlineData("radius_m,chord_m,twist_deg,thickness_ratio\n1,1,0,40\n2,1,0,21\n3,1,0,1.2\n",
         "blades/fell.csv:2:7: thickness_ratio is 40; it is thickness over chord, above 0 to 1: 0.4",
-        "blades/fell.csv:3:7: thickness_ratio is 21; it is thickness over chord, above 0 to 1: 0.21")]
+        "blades/fell.csv:3:7: thickness_ratio is 21; it is thickness over chord, above 0 to 1: 0.21",
+        "blades/fell.csv:4:7: thickness_ratio is 1.2; it is thickness over chord, above 0 to 1")]
     public void A_row_without_a_shape_is_told(string blade, params string[] expected)
         => Told.Exactly(expected, Study(blade).Read().Errors);
 }
