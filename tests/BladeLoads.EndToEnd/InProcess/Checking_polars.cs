@@ -273,6 +273,10 @@ public sealed class Checking_polars : IDisposable
         Assert.Equal(
             (2, "", $"'{other}' holds a polar table, fell-21.csv, and the report would be read as more of them; give another folder with --out\n"),
             Run("polar", "check", set, "--out", other));
+        // Where the study lies in the folder that is named for results, the place of the report is that of its sets.
+        Assert.Equal(
+            (2, "", $"'{_studies.PathOf("example/polars")}' holds the polars that are checked; give another folder for results with --results\n"),
+            Run("polar", "check", study, "--results", Path.GetDirectoryName(study)!));
         Assert.Equal(before, FilesIn(set));
     }
 

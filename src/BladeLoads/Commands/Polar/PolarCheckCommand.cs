@@ -121,14 +121,15 @@ internal static class PolarCheckCommand
     // Before hours of solving, not after.
     private static void CheckPlace(CheckedTables tables, Study? study, PolarCheckRequest request)
     {
-        if (request.Out is not { } folder)
-            return;
-        var names = Names(tables, study, request);
         var sets = tables.Tables.Select(table => table.File).Concat(tables.Errors.Select(error => error.File))
             .Select(file => Path.GetDirectoryName(Path.GetFullPath(file, study?.Folder ?? Directory.GetCurrentDirectory()))!).Distinct().ToList();
-        ReportPlace.Check(
-            folder, study is null ? sets : [.. sets, .. sets.Where(set => set != study.Folder).Select(set => Path.GetDirectoryName(set)!)],
-            tables.Tables.Select(table => CheckedPicture.FileNameOf(table.File, names)));
+        if (study is not null)
+            sets = [.. sets, .. sets.Where(set => set != study.Folder).Select(set => Path.GetDirectoryName(set)!)];
+        var names = Names(tables, study, request);
+        if (request.Out is { } folder)
+            ReportPlace.Check(folder, sets, tables.Tables.Select(table => CheckedPicture.FileNameOf(table.File, names)));
+        else if (study is not null)
+            ReportPlace.CheckInputs(new ResultsFolder(request.Results, study.Name).Polars, sets, "folder for results with --results");
     }
 
     private static TableNames Names(CheckedTables tables, Study? study, PolarCheckRequest request)

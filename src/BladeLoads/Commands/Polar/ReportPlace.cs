@@ -67,9 +67,7 @@ internal static class ReportPlace
         FileInTheWay.Refuse(folder, "give a folder");
         if (!Directory.Exists(folder))
             return;
-        var real = Real(folder);
-        if (inputs.Select(Real).Contains(real))
-            throw new WrongUseException($"'{folder}' holds the polars that are checked; give another folder with --out");
+        CheckInputs(folder, inputs, "folder with --out");
         foreach (var path in Directory.EnumerateFiles(folder).Order(StringComparer.Ordinal))
             if (!PolarReport.FileNames.Contains(Path.GetFileName(path)) && StoredSet.IsTable(Path.GetFileName(path)) && IsPolarTable(path))
                 throw new WrongUseException(
@@ -81,6 +79,14 @@ internal static class ReportPlace
         foreach (var name in pictures)
             if (File.Exists(Path.Join(folder, name)) && !PictureFile.IsOwn(Beginning(Path.Join(folder, name))))
                 throw new WrongUseException($"'{Path.Join(folder, name)}' is there and is no picture of ours; give another folder with --out");
+    }
+
+    /// <param name="another">What would do.</param>
+    /// <exception cref="WrongUseException">The folder is one of the inputs.</exception>
+    public static void CheckInputs(string folder, IEnumerable<string> inputs, string another)
+    {
+        if (inputs.Select(Real).Contains(Real(folder)))
+            throw new WrongUseException($"'{folder}' holds the polars that are checked; give another {another}");
     }
 
     private static bool IsPolarTable(string path)
