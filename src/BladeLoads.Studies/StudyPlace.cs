@@ -22,7 +22,7 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
             EntryKind.Folder => WholeStudy(fullPath, shown, files),
             EntryKind.File => OneCase(fullPath, shown),
             EntryKind.Missing => throw new StudyNotFoundException(
-                $"no study folder or case file {shown}; {Beside(fullPath, files)}"),
+                $"no study folder or case file {shown}; {FolderNames.Beside(fullPath, files, folder => NamesIn(folder, files))}"),
             _ => throw new StudyNotFoundException($"{shown} is not a regular file; name a study folder or a case file (.toml)"),
         };
     }
@@ -64,15 +64,6 @@ internal sealed record StudyPlace(string Folder, ImmutableArray<string> CaseFile
     internal static bool IsCaseFile(string name)
         => name.EndsWith(CaseName.Ending, StringComparison.Ordinal)
             && (name[0] != '.' || name.StartsWith("..", StringComparison.Ordinal) || name == CaseName.Ending);
-
-    private static string Beside(string missing, IStudyFiles files)
-    {
-        var folder = Path.GetDirectoryName(missing);
-        if (folder is null || files.Kind(folder) != EntryKind.Folder)
-            return "the folder it would be in does not exist either";
-        var names = NamesIn(folder, files).Where(name => name[0] != '.');
-        return VisibleText.Escape($"'{folder}' holds {VisibleText.Enumerate(names, "nothing")}");
-    }
 
     private static ImmutableArray<string> NamesIn(string folder, IStudyFiles files)
     {

@@ -1,3 +1,4 @@
+using BladeLoads.Studies.Cases;
 using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Studies;
@@ -7,6 +8,7 @@ public static class StudyReader
 {
     internal const string StartingValuesFile = "study.toml";
     public const string CasesFolder = "cases";
+    public const string CaseEnding = CaseName.Ending;
 
     /// <summary>
     /// Reads everything and reports every error and doubt at once; a case with an error is rejected, the others are kept.

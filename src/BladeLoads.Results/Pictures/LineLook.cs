@@ -20,7 +20,7 @@ internal sealed record LineLook(uint Colour, ImmutableArray<float> Dashes, int? 
     private const double Paleness = 0.62;
 
     private static readonly ImmutableArray<float>[] Patterns = [[], [9, 2.5f], [7, 2, 1.5f, 2], [4, 2, 1.2f, 2, 1.2f, 2]];
-    private static readonly ImmutableArray<float>[] CorrectedPatterns = [[6, 2], [3.5f, 2], [1.5f, 1.8f], [6, 2, 1.5f, 2]];
+    private static readonly ImmutableArray<float>[] AugmentedPatterns = [[6, 2], [3.5f, 2], [1.5f, 1.8f], [6, 2, 1.5f, 2]];
 
     /// <summary>A table's own line: one of so many Reynolds numbers.</summary>
     public static LineLook Tabulated(int index, int count)
@@ -29,8 +29,9 @@ internal sealed record LineLook(uint Colour, ImmutableArray<float> Dashes, int? 
     /// <summary>Without marks, which are for rows of tables.</summary>
     public static LineLook Extended { get; } = new(Vermilion, [4, 2.5f], null, 1.2f);
 
-    /// <summary>The n-th different label among the corrected lines.</summary>
-    public static LineLook Corrected(int label) => new(Purples[label % Purples.Length], CorrectedPatterns[label % CorrectedPatterns.Length], null, 1.3f);
+    /// <summary>The n-th different label among the augmented lines.</summary>
+    public static LineLook Augmented(int label)
+        => new(Purples[label % Purples.Length], AugmentedPatterns[label % AugmentedPatterns.Length], null, 1.3f);
 
     /// <summary>A broad pale line, on which an unchanged line runs in the middle; in the colour of the line that it was, if that is known.</summary>
     public static LineLook Earlier(LineLook? now) => new(Pale(now?.Colour ?? Grey), [], null, 3.4f);

@@ -67,9 +67,14 @@ internal sealed record PanelAxis(string Label, double From, double To)
             Ticks = [.. Enumerable.Range((int)Math.Floor(from), (int)(Math.Ceiling(to) - Math.Floor(from)) + 1)
                 .SelectMany(power => steps.Select(step => (At: power + Math.Log10(step), Value: step * Math.Pow(10, power))))
                 .Where(tick => tick.At >= from && tick.At <= to)
-                .Select(tick => (tick.At, tick.Value.ToString("0.######", CultureInfo.InvariantCulture)))],
+                .Select(tick => (tick.At, NumberText(tick.Value)))],
         };
     }
+
+    /// <summary>A number beside an axis; those that would need more room than there is with an exponent: <c>1e-5</c>.</summary>
+    public static string NumberText(double value) => Math.Abs(value) is >= 1e6 or (< 1e-4 and > 1e-9)
+        ? value.ToString("0.###e0", CultureInfo.InvariantCulture)
+        : value.ToString("0.######", CultureInfo.InvariantCulture);
 
     private static (double Least, double Largest) Extremes(IEnumerable<double> values)
     {

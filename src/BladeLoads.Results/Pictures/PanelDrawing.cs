@@ -143,7 +143,7 @@ internal static class PanelDrawing
         axis.MajorTickStyle.Width = 0.8f;
         axis.MinorTickStyle.Length = 0;
         axis.TickGenerator = said.Ticks.IsEmpty
-            ? new NumericAutomatic { LabelFormatter = value => value.ToString("0.######", System.Globalization.CultureInfo.InvariantCulture) }
+            ? new NumericAutomatic { LabelFormatter = PanelAxis.NumberText }
             : new NumericManual([.. said.Ticks.Select(t => t.At)], [.. said.Ticks.Select(t => t.Text)]);
     }
 

@@ -32,7 +32,7 @@ internal sealed record PolarLines(ImmutableArray<PolarLines.Drawn> All)
     public static PolarLines Of(PolarPicture picture)
     {
         var reynolds = picture.Lines.Where(l => l.Kind == LineKind.Tabulated).Select(l => l.Polar.Reynolds).Distinct().Order().ToList();
-        var corrected = picture.Lines.Where(l => l.Kind == LineKind.Corrected).Select(l => l.Label).Distinct().ToList();
+        var augmented = picture.Lines.Where(l => l.Kind == LineKind.Augmented).Select(l => l.Label).Distinct().ToList();
         var own = picture.Lines.Select(line => Line(line.Polar, line.Kind, line.Label, Look(line), line.Parts)).ToList();
         if (picture.Earlier is not { } earlier)
             return new PolarLines([.. own]);
@@ -51,7 +51,7 @@ internal sealed record PolarLines(ImmutableArray<PolarLines.Drawn> All)
             {
                 LineKind.Tabulated => LineLook.Tabulated(place, reynolds.Count),
                 LineKind.Extended => LineLook.Extended,
-                _ => LineLook.Corrected(corrected.IndexOf(line.Label)),
+                _ => LineLook.Augmented(augmented.IndexOf(line.Label)),
             };
         }
     }
@@ -66,7 +66,9 @@ internal sealed record PolarLines(ImmutableArray<PolarLines.Drawn> All)
     /// <summary>What an update changed, where both reach.</summary>
     public ImmutableArray<Curve> Differences((double From, double To) span, Func<Coefficients, double> value)
         => [.. Compared
-            .Select(c => (c.Now, c.Earlier, From: Math.Max(Math.Max(c.Now.From, c.Earlier.From), span.From), To: Math.Min(Math.Min(c.Now.To, c.Earlier.To), span.To)))
+            .Select(c => (
+                c.Now, c.Earlier,
+                From: Math.Max(Math.Max(c.Now.From, c.Earlier.From), span.From), To: Math.Min(Math.Min(c.Now.To, c.Earlier.To), span.To)))
             .Where(c => c.To > c.From)
             .Select(c => new Curve(
                 c.Now.Look, c.From, c.To, [.. c.Now.Knots.Concat(c.Earlier.Knots).Distinct().Order()],

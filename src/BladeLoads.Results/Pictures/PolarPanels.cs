@@ -65,22 +65,28 @@ internal sealed record PolarPanels(
         (double, double)? shade = picture.Shaded is var (from, to) ? (double.RadiansToDegrees(from), double.RadiansToDegrees(to)) : null;
         return this with
         {
-            Lift = OverAngle(Lift, OfLift, _ => true),
-            Drag = OverAngle(Drag, Drag.Up.IsLogarithmic ? OfLogDrag : OfDrag, _ => true),
-            LiftToDrag = OverAngle(LiftToDrag, OfRatio, _ => true),
-            LiftOverDrag = LiftOverDrag with { Rings = Rings(angle => angle is >= WorkingFrom and <= WorkingTo, (_, c) => (c.Drag, c.Lift)) },
-            WholeLift = WholeLift is { } lift ? OverAngle(lift, OfLift, IsBeyond) : null,
-            WholeDrag = WholeDrag is { } drag ? OverAngle(drag, OfDrag, IsBeyond) : null,
+            Lift = OverAngle(Lift, OfLift, RingedCoefficient.Lift, _ => true),
+            Drag = OverAngle(Drag, Drag.Up.IsLogarithmic ? OfLogDrag : OfDrag, RingedCoefficient.Drag, _ => true),
+            LiftToDrag = OverAngle(LiftToDrag, OfRatio, RingedCoefficient.Both, _ => true),
+            LiftOverDrag = LiftOverDrag with
+            {
+                Rings = Rings(RingedCoefficient.Both, angle => angle is >= WorkingFrom and <= WorkingTo, (_, c) => (c.Drag, c.Lift)),
+            },
+            WholeLift = WholeLift is { } lift ? OverAngle(lift, OfLift, RingedCoefficient.Lift, IsBeyond) : null,
+            WholeDrag = WholeDrag is { } drag ? OverAngle(drag, OfDrag, RingedCoefficient.Drag, IsBeyond) : null,
         };
 
-        Panel OverAngle(Panel panel, Func<Coefficients, double> value, Func<double, bool> isRinged)
-            => panel with { Shade = shade, Rings = Rings(isRinged, (angle, c) => (double.RadiansToDegrees(angle), value(c))) };
+        Panel OverAngle(Panel panel, Func<Coefficients, double> value, RingedCoefficient drawn, Func<double, bool> isRinged)
+            => panel with { Shade = shade, Rings = Rings(drawn, isRinged, (angle, c) => (double.RadiansToDegrees(angle), value(c))) };
 
         // Within the working range the rows stand so close there that rings would cover each other, and another diagram shows them.
         static bool IsBeyond(double angle) => angle is <= WorkingFrom + Slack or >= WorkingTo - Slack;
 
-        ImmutableArray<(double, double)> Rings(Func<double, bool> isRinged, Func<double, Coefficients, (double, double)> at)
-            => [.. picture.Ringed.Where(r => isRinged(r.Polar.Angles[r.Row]))
+        ImmutableArray<(double, double)> Rings(
+            RingedCoefficient drawn, Func<double, bool> isRinged, Func<double, Coefficients, (double, double)> at)
+            => [.. picture.Ringed
+                .Where(r => drawn == RingedCoefficient.Both || r.Of == RingedCoefficient.Both || r.Of == drawn)
+                .Where(r => isRinged(r.Polar.Angles[r.Row])).DistinctBy(r => (r.Polar, r.Row))
                 .Select(r => at(r.Polar.Angles[r.Row], new Coefficients(r.Polar.Lift[r.Row], r.Polar.Drag[r.Row])))];
     }
 

@@ -66,7 +66,10 @@ public sealed record PolarLine(Polar Polar, LineKind Kind, string Label)
 }
 
 /// <summary>A row of a table that a reader is to look at.</summary>
-public readonly record struct RingedRow(Polar Polar, int Row);
+/// <param name="Of">Which of its coefficients: it has no ring where only the other is drawn.</param>
+public readonly record struct RingedRow(Polar Polar, int Row, RingedCoefficient Of);
+
+public enum RingedCoefficient { Both, Lift, Drag }
 
 /// <summary>Where a line comes from; each kind looks different.</summary>
 public enum LineKind
@@ -78,7 +81,7 @@ public enum LineKind
     Extended,
 
     /// <summary>Worked out from the table for a place on a rotor.</summary>
-    Corrected,
+    Augmented,
 }
 
 /// <summary>The tables of a section before an update.</summary>

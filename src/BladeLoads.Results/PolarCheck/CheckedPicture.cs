@@ -16,8 +16,11 @@ public static class CheckedPicture
     /// <param name="use">By the file of the table.</param>
     public static ImmutableArray<ResultContent> Files(CheckedTables tables, IReadOnlyDictionary<string, TableUse> use, TableNames names)
         => [.. tables.Tables.Select(table => new ResultContent(
-            names.FileNameOf(table.File) + Ending,
+            FileNameOf(table.File, names),
             PictureFile.Svg(Of(table, use.GetValueOrDefault(table.File), names.SetOf(table.File)))))];
+
+    /// <param name="file">Of the table.</param>
+    public static string FileNameOf(string file, TableNames names) => PictureName.Of(names.FileNameOf(file)) + Ending;
 
     /// <param name="use">Null for a table that nothing uses.</param>
     /// <param name="set">The name of the set of the table.</param>
@@ -29,12 +32,19 @@ public static class CheckedPicture
         {
             Notes = [.. picture.Notes, .. Told(table, use)],
             Ringed = [.. table.Doubts.Where(doubt => doubt.Polar >= 0)
-                .SelectMany(doubt => doubt.Rows.Select(row => new RingedRow(polars[doubt.Polar], row))).Distinct()],
+                .SelectMany(doubt => doubt.Rows.Select(row => new RingedRow(polars[doubt.Polar], row, CoefficientOf(doubt)))).Distinct()],
             Shaded = use is { Blades: > 0 }
                 ? (double.DegreesToRadians(use.AngleDegBelow(0.05)), double.DegreesToRadians(use.AngleDegBelow(0.95)))
                 : null,
         };
     }
+
+    private static RingedCoefficient CoefficientOf(PolarDoubt doubt) => doubt.Column switch
+    {
+        "cl" => RingedCoefficient.Lift,
+        "cd" => RingedCoefficient.Drag,
+        _ => RingedCoefficient.Both,
+    };
 
     private static IEnumerable<string> Told(CheckedTable table, TableUse? use)
     {

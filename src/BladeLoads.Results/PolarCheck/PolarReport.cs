@@ -15,13 +15,18 @@ public sealed class PolarReport
 {
     private const int Format = 1;
 
+    private const string FiguresName = "polar-figures";
+    private const string DoubtsName = "polar-doubts";
+    private const string UseName = "polar-use";
+    private const string HistogramsName = "polar-histograms";
+
     /// <param name="use">By the file of the table; empty where no cases were solved.</param>
     public PolarReport(CheckedTables tables, IReadOnlyDictionary<string, TableUse> use)
     {
-        Figures = new ReportTable("polar-figures", FigureColumns, [.. tables.Tables.SelectMany(FigureRows)]);
-        Doubts = new ReportTable("polar-doubts", DoubtColumns, [.. DoubtRows(tables, use)]);
-        Use = new ReportTable("polar-use", UseColumns, [.. UseRows(tables, use)]);
-        Histograms = new ReportTable("polar-histograms", HistogramColumns, [.. tables.Tables.SelectMany(table => HistogramRows(table, use))]);
+        Figures = new ReportTable(FiguresName, FigureColumns, [.. tables.Tables.SelectMany(FigureRows)]);
+        Doubts = new ReportTable(DoubtsName, DoubtColumns, [.. DoubtRows(tables, use)]);
+        Use = new ReportTable(UseName, UseColumns, [.. UseRows(tables, use)]);
+        Histograms = new ReportTable(HistogramsName, HistogramColumns, [.. tables.Tables.SelectMany(table => HistogramRows(table, use))]);
     }
 
     public static ImmutableArray<string> FigureColumns { get; } =
@@ -43,6 +48,16 @@ public sealed class PolarReport
 
     public static ImmutableArray<string> HistogramColumns { get; } = ["table", "quantity", "from", "to", "share", "tabulated"];
 
+    /// <summary>Of all files that a report may have, use or not.</summary>
+    public static ImmutableArray<string> FileNames { get; } = [.. NamesAndColumns.Select(table => table.Name + ReportTable.Ending)];
+
+    /// <summary>Whether a file is a table of a report that was written here, and so may be written anew.</summary>
+    /// <param name="fileName">One of <see cref="FileNames"/>.</param>
+    /// <param name="beginning">At least the first line of it.</param>
+    public static bool IsOwn(string fileName, ReadOnlySpan<byte> beginning)
+        => beginning.StartsWith(Encoding.ASCII.GetBytes(
+            string.Join(',', NamesAndColumns.Single(table => table.Name + ReportTable.Ending == fileName).Columns) + "\n"));
+
     public ReportTable Figures { get; }
 
     public ReportTable Doubts { get; }
@@ -50,6 +65,9 @@ public sealed class PolarReport
     public ReportTable Use { get; }
 
     public ReportTable Histograms { get; }
+
+    private static (string Name, ImmutableArray<string> Columns)[] NamesAndColumns =>
+        [(FiguresName, FigureColumns), (DoubtsName, DoubtColumns), (UseName, UseColumns), (HistogramsName, HistogramColumns)];
 
     /// <summary>The files of the report; what is about use only where there was any.</summary>
     public ImmutableArray<ResultContent> Files()

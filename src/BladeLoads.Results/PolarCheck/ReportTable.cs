@@ -11,7 +11,9 @@ namespace BladeLoads.Results.PolarCheck;
 /// <param name="Rows">A value a column: text, a number, or null for a blank.</param>
 public sealed record ReportTable(string Name, ImmutableArray<string> Columns, ImmutableArray<ImmutableArray<object?>> Rows)
 {
-    public string FileName => Name + ".csv";
+    internal const string Ending = ".csv";
+
+    public string FileName => Name + Ending;
 
     public byte[] ToCsv()
     {

@@ -3,14 +3,14 @@ using System.Globalization;
 namespace BladeLoads.Studies.Files;
 
 /// <summary>The bytes of a file, or the finding that says why there are none.</summary>
-internal static class NamedFile
+public static class NamedFile
 {
     private const int BytesPerMebibyte = 1024 * 1024;
 
     /// <param name="fullPath">Absolute.</param>
     /// <param name="shown">As findings name the file.</param>
     /// <param name="largest">MiB; of a larger file no more than this is read.</param>
-    public static byte[]? Read(IStudyFiles files, string fullPath, string shown, int largest, Action<InputFinding> report)
+    internal static byte[]? Read(IStudyFiles files, string fullPath, string shown, int largest, Action<InputFinding> report)
     {
         var kind = files.Kind(fullPath);
         if (kind != EntryKind.File)
@@ -18,7 +18,9 @@ internal static class NamedFile
             {
                 EntryKind.Folder => "is a folder; put a file in its place",
                 EntryKind.Missing => "is gone, or a link that leads nowhere",
-                _ => "is not a regular file; put a file in its place",
+                _ => LeadsNowhere(files, fullPath)
+                    ? "is a link that leads nowhere; put a file in its place"
+                    : "is not a regular file; put a file in its place",
             });
         try
         {
@@ -45,6 +47,20 @@ internal static class NamedFile
         {
             report(new InputFinding(shown, 0, 0, why));
             return null;
+        }
+    }
+
+    /// <summary>Whether a path is a link, or goes by one, whose end is not there.</summary>
+    /// <param name="fullPath">Absolute.</param>
+    public static bool LeadsNowhere(IStudyFiles files, string fullPath)
+    {
+        try
+        {
+            return files.RealPath(fullPath) is var real && real != fullPath && files.Kind(real) == EntryKind.Missing;
+        }
+        catch (IOException)
+        {
+            return true;   // round in a circle
         }
     }
 }

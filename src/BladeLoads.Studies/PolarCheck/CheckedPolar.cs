@@ -11,6 +11,7 @@ internal sealed class CheckedPolar
 {
     private readonly CellPlaces _places;
     private readonly ImmutableArray<int> _lines;
+    private (ImmutableArray<Scattered>, ImmutableArray<Scattered>)? _scattered;
 
     /// <param name="index">Which of the table's Reynolds numbers.</param>
     /// <param name="figures">Of that Reynolds number.</param>
@@ -28,6 +29,10 @@ internal sealed class CheckedPolar
     public Polar Polar { get; }
 
     public PolarFigures Figures { get; }
+
+    /// <summary>Rows off the line of their neighbours; none are looked for on bluff sections.</summary>
+    public (ImmutableArray<Scattered> Lift, ImmutableArray<Scattered> Drag) Scattered
+        => _scattered ??= Figures.IsBluff ? ([], []) : ScatteredRows.Of(this);
 
     public double Reynolds => Polar.Reynolds;
 
@@ -56,6 +61,9 @@ internal sealed class CheckedPolar
         }
         return null;
     }
+
+    /// <summary>Whether a row is off the line of its neighbours, in either coefficient.</summary>
+    public bool IsScattered(int row) => Scattered.Lift.Any(s => s.Row == row) || Scattered.Drag.Any(s => s.Row == row);
 
     /// <summary>The row whose angle is nearest.</summary>
     public int RowNear(double angleDeg) => Enumerable.Range(0, Rows.Length).MinBy(i => Math.Abs(Rows[i].AngleDeg - angleDeg));

@@ -16,6 +16,7 @@ public static class DoubtKinds
     public const string LargestLift = "largest lift";
     public const string EndsBeforeStall = "ends before stall";
     public const string DragBelowPlate = "drag below a plate";
+    public const string UnitOfDrag = "unit of drag";
     public const string Jump = "jump";
     public const string SharpStall = "sharp stall";
     public const string HalfTurn = "180 deg";
@@ -28,6 +29,6 @@ public static class DoubtKinds
     public static ImmutableArray<string> All { get; } =
     [
         Reach, Gap, OneAngleTwice, RepeatedRows, Scatter, LiftSlope, ZeroLiftAngle, SignOfLift, LargestLift, EndsBeforeStall,
-        DragBelowPlate, Jump, SharpStall, HalfTurn, DragAcross, ExchangedColumns, ReynoldsNumbers, Augmented,
+        DragBelowPlate, UnitOfDrag, Jump, SharpStall, HalfTurn, DragAcross, ExchangedColumns, ReynoldsNumbers, Augmented,
     ];
 }

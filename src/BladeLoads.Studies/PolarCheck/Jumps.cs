@@ -17,7 +17,7 @@ internal static class Jumps
         {
             // Told as one angle twice, as a stall, or as a row off its line.
             if (NearRows.AreOne(polar, i - 1, i) || SharpStall.IsNear(polar, i - 1, i)
-                || (!polar.Figures.IsBluff && (ScatteredRows.IsOff(polar, i - 1) || ScatteredRows.IsOff(polar, i))))
+                || polar.IsScattered(i - 1) || polar.IsScattered(i))
                 continue;
             if (LiftJumps(polar, i - 1, i))
                 yield return Jump(polar, i, "cl", polar.Rows[i - 1].Lift, polar.Rows[i].Lift);

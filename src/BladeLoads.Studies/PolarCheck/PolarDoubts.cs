@@ -39,9 +39,11 @@ public static class PolarDoubts
 
     private static PolarDoubt[] OfOne(CheckedPolar polar)
     {
-        // What stands under wrong names is wrong in every other way too.
+        // What stands under wrong names or in another unit is wrong in every other way too.
         if (ExchangedCoefficients.Doubts(polar).ToArray() is { Length: > 0 } exchanged)
             return exchanged;
+        if (DragUnit.Doubts(polar).ToArray() is { Length: > 0 } unit)
+            return unit;
         return
         [
             .. Gaps.Doubts(polar), .. NearRows.Doubts(polar), .. RepeatedRows.Doubts(polar), .. ScatteredRows.Doubts(polar),

@@ -93,6 +93,16 @@ public sealed class TableUse
     /// <summary>Share at one of the Reynolds numbers.</summary>
     public double At(int polar) => Share(_angles[polar].Sum());
 
+    /// <summary>Share of it at Reynolds numbers below one or above another, both above 0, to 2 %.</summary>
+    public double OutsideOf(double lowest, double highest)
+    {
+        var counted = 0L;
+        for (var bin = 0; bin < ReynoldsBins; bin++)
+            if (Math.Pow(10, LowestPower + ((bin + 0.5) / BinsPerDecade)) is var middle && (middle < lowest || middle > highest))
+                counted += _reynolds[bin];
+        return Share(counted);
+    }
+
     /// <summary>The angle below which a share of that works, degrees, to a tenth; NaN where nothing does.</summary>
     public double AngleDegBelow(double share) => Quantile(share, AngleBins, bin => At(-1, bin), bin => -180 + (bin / AnglesPerDegree));
 

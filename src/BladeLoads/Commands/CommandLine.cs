@@ -28,6 +28,8 @@ internal static class CommandLine
             var result = Root(surroundings).Parse(arguments, new ParserConfiguration { ResponseFileTokenReplacer = null });
             if (MisspeltOption.In(result) is { } misspelt)
                 throw new WrongUseException(misspelt);
+            if (SurplusArgument.In(result) is { } surplus)
+                throw new WrongUseException(surplus);
             if (result.Errors.Count > 0 && result.Action is ParseErrorAction action)
                 return Refuse(result, action, surroundings);
             return result.Invoke(Invocation(surroundings));

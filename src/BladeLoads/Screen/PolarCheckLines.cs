@@ -132,8 +132,10 @@ internal static class PolarCheckLines
 
     private static string Closing(CheckedTables tables, Study? study, UseOfTables use)
     {
-        var errors = tables.Errors.IsEmpty ? "no errors" : Count.Of(tables.Errors, "error");
-        var closing = $"{errors}, {Count.Of(tables.Tables.Sum(table => table.Doubts.Length), "doubt")} in {Count.Of(tables.Tables.Length, "table")}";
+        var doubts = $"{Count.Of(tables.Tables.Sum(table => table.Doubts.Length), "doubt")} in {Count.Of(tables.Tables.Length, "table")}";
+        var closing = tables.Errors.IsEmpty ? $"no errors, {doubts}"
+            : $"{Count.Of(tables.Errors, "error")} in {Count.Of(tables.Errors.Select(e => e.File).Distinct().Count(), "file")}; "
+                + (tables.Tables.IsEmpty ? "nothing checked" : $"{doubts} without errors");
         var left = new List<string>();
         if (study is { Rejected: { IsEmpty: false } rejected })
             left.Add($"{Count.Of(rejected.Length, "case")} with errors");

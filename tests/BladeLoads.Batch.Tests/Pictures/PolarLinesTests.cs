@@ -88,11 +88,22 @@ public sealed class PolarLinesTests
     public void A_table_that_needed_no_extension_has_no_line_of_one()
         => Assert.Empty(ExtendedLines.Of(Sections.Round(), Sections.Round()));
 
+    [Theory]
+    [InlineData(0, "0")]
+    [InlineData(1.2e-17, "0")]
+    [InlineData(0.0001, "0.0001")]
+    [InlineData(0.00005, "5e-5")]
+    [InlineData(-0.25, "-0.25")]
+    [InlineData(190000, "190000")]
+    [InlineData(-1.5e7, "-1.5e7")]
+    public void Numbers_beside_an_axis_take_no_more_room_than_there_is(double value, string text)
+        => Assert.Equal(text, PanelAxis.NumberText(value));
+
     [Fact]
-    public void Corrected_lines_of_one_label_stand_in_the_legend_once_and_look_alike()
+    public void Augmented_lines_of_one_label_stand_in_the_legend_once_and_look_alike()
     {
         var lines = new[] { ("at a", 1.2), ("at b", 1.3), ("at a", 1.4) }
-            .Select(l => new PolarLine(Sections.Lifting(1e6, l.Item2), LineKind.Corrected, l.Item1)).ToImmutableArray();
+            .Select(l => new PolarLine(Sections.Lifting(1e6, l.Item2), LineKind.Augmented, l.Item1)).ToImmutableArray();
         var picture = Picture(Sections.Of(1e6)).With(lines);
         Assert.Single(new DrawnPage(PictureFile.Svg(picture)).Words, w => w == "at a");
         var looks = PolarLines.Of(picture).All.Skip(1).Select(l => l.Look).ToList();

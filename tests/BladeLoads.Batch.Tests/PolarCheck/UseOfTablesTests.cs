@@ -43,7 +43,8 @@ public sealed class UseOfTablesTests
     private static readonly RotorCase Rotor = FellRotor.Rotor(elements: 4) with
     {
         Blade = Blade.FromStations([new(1, 1, 0, "root"), new(3, 1, 0, "root"), new(7, 1, 0, "tip"), new(9, 1, 0, "tip")]),
-        Sections = SectionSet.Of([Section.FromPolars("root", RootTable.Table.Section.Polars), Section.FromPolars("tip", TipTable.Table.Section.Polars)]),
+        Sections = SectionSet.Of(
+            [Section.FromPolars("root", RootTable.Table.Section.Polars), Section.FromPolars("tip", TipTable.Table.Section.Polars)]),
     };
 
     [Fact]
@@ -105,13 +106,16 @@ public sealed class UseOfTablesTests
         PowerCurve Solve(RotorCase rotor, CancellationToken cancellation)
         {
             var random = new Random((int)rotor.Air.Density);
-            return Curve(rotor, [.. Enumerable.Range(0, 4).Select(_ => (1.0, (random.NextDouble() * 400) - 200, Math.Pow(10, 4 + (3 * random.NextDouble()))))]);
+            var elements = Enumerable.Range(0, 4)
+                .Select(_ => (1.0, (random.NextDouble() * 400) - 200, Math.Pow(10, 4 + (3 * random.NextDouble()))));
+            return Curve(rotor, [.. elements]);
         }
 
         string? first = null;
         foreach (var workers in (int[])[1, 2, 3, 16])
         {
-            var use = UseOfTables.Of(cases, [RootTable, TipTable], Solve, workers, new RunProgress(60, 1, TimeProvider.System), CancellationToken.None);
+            var use = UseOfTables.Of(
+                cases, [RootTable, TipTable], Solve, workers, new RunProgress(60, 1, TimeProvider.System), CancellationToken.None);
             var report = new PolarReport(new CheckedTables([RootTable, TipTable], []), use.ByFile);
             var text = string.Concat(report.Files().Select(file => Encoding.UTF8.GetString(file.Bytes.Span)));
             Assert.Equal(first ??= text, text);
@@ -146,7 +150,9 @@ public sealed class UseOfTablesTests
         {
             Blade = Blade.FromStations([BladeStation.OfThickness(1, 1, 0, 0.5), BladeStation.OfThickness(9, 1, 0, 0.2)]),
             Sections = SectionSet.Of(SectionFamily.Of(
-                [new FamilyMember(0.2, Section.FromPolars("tip", TipTable.Table.Section.Polars)), new FamilyMember(0.4, Section.FromPolars("root", TipTable.Table.Section.Polars))])),
+                [
+                    new FamilyMember(0.2, Section.FromPolars("tip", TipTable.Table.Section.Polars)),
+                    new FamilyMember(0.4, Section.FromPolars("root", TipTable.Table.Section.Polars))])),
         };
         // In the middle of the blade 0.35: three quarters of the way to 0.4.
         var use = UseOfTables.Of(
@@ -172,6 +178,26 @@ public sealed class UseOfTablesTests
             first.Select(p => FormattableString.Invariant($"{p.Share:0.00} {p.File} {p.Kind} {p.Most?.Finding.Line} of {p.Doubts}")));
     }
 
+    [Fact]
+    public void A_table_of_one_Reynolds_number_is_to_be_looked_at_where_its_use_is_far_from_it()
+    {
+        var one = Table(Tip, "reynolds,alpha_deg,cl,cd\n1e6,-5,-0.3,0.01\n1e6,0,0.3,0.01\n1e6,8,1.2,0.02\n1e6,15,0.8,0.1\n");
+        // Of the tip's length at work, 0.25 + 0.75 + 1 of 4 elements, the last is alone beyond twice a million.
+        Assert.Equal(
+            ["0.25 polars/clean/tip.csv used far from its one Reynolds number, 1e6, from 6.0e5 to 3.0e6"],
+            Far((1, 3, 6.05e5), (1, 3, 6.05e5), (1, 3, 6.05e5), (1, 3, 3e6)));
+        Assert.Empty(Far((1, 3, 5.2e5), (1, 3, 5.2e5), (1, 3, 1.9e6), (1, 3, 1.9e6)));
+
+        IEnumerable<string> Far(params (double, double, double)[] elements)
+        {
+            var use = UseOfTables.Of(
+                [Case("case-0")], [one], (rotor, _) => Curve(rotor, elements), 1, new RunProgress(1, 1, TimeProvider.System), CancellationToken.None);
+            return FirstToLookAt.Of([one], use.ByFile.SetItem(Root, Use((rotor, _) => Curve(rotor, elements)).ByFile[Root]))
+                .Where(p => p.Kind.StartsWith("used", StringComparison.Ordinal))
+                .Select(p => FormattableString.Invariant($"{p.Share:0.00} {p.File} {p.Kind}"));
+        }
+    }
+
     private static (double RotorSpeed, double AngleDeg, double Reynolds)[] All(double angleDeg) => [.. Enumerable.Repeat((1.0, angleDeg, 1.01e6), 4)];
 
     private static UseOfTables Use(SolveCase solve) => UseOfTables.Of(
@@ -183,7 +209,11 @@ public sealed class UseOfTablesTests
         var number = double.Parse(name["case-".Length..], System.Globalization.CultureInfo.InvariantCulture);
         return FellRotor.Case(name, (rotor ?? Rotor) with { Air = new AirProperties(1 + number, 1.789e-5, 340.29) }) with
         {
-            Tables = [new CanonicalTable("blade", "", "blades/fell.csv", () => []), new CanonicalTable("section.root", "", Root, () => []), new CanonicalTable("section.tip", "", Tip, () => [])],
+            Tables =
+            [
+                new CanonicalTable("blade", "", "blades/fell.csv", () => []), new CanonicalTable("section.root", "", Root, () => []),
+                new CanonicalTable("section.tip", "", Tip, () => []),
+            ],
         };
     }
 

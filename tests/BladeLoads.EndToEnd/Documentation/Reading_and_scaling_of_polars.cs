@@ -34,7 +34,8 @@ public sealed partial class Reading_and_scaling_of_polars : IDisposable
     public void The_page_names_every_option_of_the_command_and_no_other(string command)
     {
         var help = Started.Run(_folder.Path, "polar", command, "--help").Out;
-        var options = Option().Matches(help[..help.IndexOf("Examples:", StringComparison.Ordinal)]).Select(match => match.Value).Except(["--help"]).Order(StringComparer.Ordinal).Distinct();
+        var options = Option().Matches(help[..help.IndexOf("Examples:", StringComparison.Ordinal)])
+            .Select(match => match.Value).Except(["--help"]).Order(StringComparer.Ordinal).Distinct();
 
         var page = string.Join("\n", Repository.Lines("docs/formats.md"));
         var heading = command switch { "check" => "Report on polar tables", "draw" => "Pictures", _ => $"polar {command}" };
@@ -42,6 +43,21 @@ public sealed partial class Reading_and_scaling_of_polars : IDisposable
         section = section[..section.IndexOf("\n##", 4, StringComparison.Ordinal)];
 
         Assert.Equal(options, Option().Matches(section).Select(match => match.Value).Order(StringComparer.Ordinal).Distinct());
+    }
+
+    [Fact]
+    public void The_readme_names_every_command_that_takes_a_folder_of_results()
+    {
+        string[] commands =
+        [
+            "check", "plan", "run", "compare", "keep", "verify", "tidy", "polar read", "polar extend", "polar augment", "polar scale", "polar check",
+            "polar draw",
+        ];
+        var row = Repository.Lines("README.md").Single(line => line.StartsWith("| `--results <folder>` |", StringComparison.Ordinal));
+        Assert.Equal(
+            commands.Where(
+                command => Started.Run(_folder.Path, [.. command.Split(' '), "--help"]).Out.Contains("--results <folder>", StringComparison.Ordinal)),
+            row.Split(" | ")[1].Split(", "));
     }
 
     [GeneratedRegex("--[a-z]+(?:-[a-z]+)*")]

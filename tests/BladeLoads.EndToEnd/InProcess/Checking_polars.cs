@@ -50,9 +50,12 @@ public sealed class Checking_polars : IDisposable
         var set = _studies.PathOf("example/polars/clean");
         var (code, text, error) = Run("polar", "check", set, "--out", Path.Join(_folder.Path, "report"));
         Assert.Equal((0, ""), (code, error));
-        Assert.EndsWith($"\nround           -          -            -           -       -           -       -    0.6000     0.0               -          -  bluff\n"
+        Assert.EndsWith(
+            "\nround           -          -            -           -       -           -       -    0.6000     0.0               -          -  bluff\n"
             + $"\nno errors, 30 doubts in 2 tables\nreport: {Path.Join(_folder.Path, "report")}\n", text, StringComparison.Ordinal);
-        Assert.Equal(["polar-doubts.csv", "polar-figures.csv"], FilesIn(Path.Join(_folder.Path, "report")).Where(f => f.EndsWith(".csv", StringComparison.Ordinal)));
+        Assert.Equal(
+            ["polar-doubts.csv", "polar-figures.csv"],
+            FilesIn(Path.Join(_folder.Path, "report")).Where(f => f.EndsWith(".csv", StringComparison.Ordinal)));
     }
 
     [Fact]
@@ -62,7 +65,8 @@ public sealed class Checking_polars : IDisposable
         Assert.Equal(0, code);
         Assert.StartsWith("solving 1 case with 1 worker\n", error, StringComparison.Ordinal);
         Assert.StartsWith("polars/clean/fell-21.csv:", text, StringComparison.Ordinal);
-        Assert.Contains("\nwhere the blades work, from 5 to 95 % of their length (1 case, every operating point alike):\n", text, StringComparison.Ordinal);
+        Assert.Contains(
+            "\nwhere the blades work, from 5 to 95 % of their length (1 case, every operating point alike):\n", text, StringComparison.Ordinal);
         Assert.Contains("\nlook first at, with the share of all blades at work there:\n", text, StringComparison.Ordinal);
         Assert.EndsWith($"\nno errors, 30 doubts in 2 tables\nreport: {Path.Join(Results, "example", "polars")}\n", text, StringComparison.Ordinal);
         Assert.Equal(
@@ -73,8 +77,8 @@ public sealed class Checking_polars : IDisposable
     }
 
     /// <summary>
-    /// Counted a second time, from spanwise.csv and power-curve.csv of a run and the blade tables alone: the weights of blended sections by the radius
-    /// between the rows of the blade.
+    /// Counted a second time, from spanwise.csv and power-curve.csv of a run and the blade tables alone: the weights of blended sections by
+    /// the radius between the rows of the blade.
     /// </summary>
     [Fact]
     public void The_histograms_are_those_of_the_spanwise_tables_of_a_run()
@@ -85,7 +89,9 @@ public sealed class Checking_polars : IDisposable
 
         var counted = new SortedDictionary<string, double>(StringComparer.Ordinal);
         foreach (var (name, blade, set) in ((string, string, string)[])
-            [("two-bladed", "tarn-38-two", "clean"), ("stall-10m~pitch_deg--2", "tarn-5", "small"), ("stall-10m~pitch_deg-0", "tarn-5", "small"), ("stall-10m~pitch_deg-2", "tarn-5", "small")])
+            [
+                ("two-bladed", "tarn-38-two", "clean"), ("stall-10m~pitch_deg--2", "tarn-5", "small"), ("stall-10m~pitch_deg-0", "tarn-5", "small"),
+                ("stall-10m~pitch_deg-2", "tarn-5", "small")])
             Count(counted, Path.Join(Results, "tarn-valley", name), Rows(Path.Join(Demo, "blades", blade + ".csv")), set);
         var whole = counted.GroupBy(c => KeyOfTable(c.Key)).ToDictionary(g => g.Key, g => g.Sum(c => c.Value));
 
@@ -137,8 +143,9 @@ public sealed class Checking_polars : IDisposable
         _studies.Write("example/polars/clean/spare.csv", "alpha_deg,cl,cd\n-10,0,0.1\n0,0,-0.1\n10,0,0.1\n");
         var (code, text, _) = Run("polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed");
         Assert.Equal(1, code);
-        Assert.StartsWith("polars/clean/spare.csv:3:5: cd is -0.1; drag coefficients must be >= 0\npolars/clean/fell-21.csv:", text, StringComparison.Ordinal);
-        Assert.Contains("\n1 error, 30 doubts in 2 tables\n", text, StringComparison.Ordinal);
+        Assert.StartsWith(
+            "polars/clean/spare.csv:3:5: cd is -0.1; drag coefficients must be >= 0\npolars/clean/fell-21.csv:", text, StringComparison.Ordinal);
+        Assert.Contains("\n1 error in 1 file; 30 doubts in 2 tables without errors\n", text, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -146,7 +153,9 @@ public sealed class Checking_polars : IDisposable
     {
         _studies.Write("example/polars/clean/spare.csv", "alpha_deg,cl,cd\n-180,0,0.6\n0,0,0.6\n180,0,0.6\n");
         var text = Run("polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed").Out;
-        Assert.Contains("\nspare          -                    -  -180 to 180          -            -                -           -          -  not used\n", text, StringComparison.Ordinal);
+        Assert.Contains(
+            "\nspare          -                    -  -180 to 180          -            -                -           -          -  not used\n", text,
+            StringComparison.Ordinal);
     }
 
     [Fact]
@@ -169,11 +178,13 @@ public sealed class Checking_polars : IDisposable
         var (code, text, error) = Run("polar", "check", set, "--only", "ro*");
         Assert.Equal((0, ""), (code, error));
         Assert.DoesNotContain("fell-21", text, StringComparison.Ordinal);
-        Assert.EndsWith("\nno errors, no doubts in 1 table\n", text.Replace("0 doubts", "no doubts", StringComparison.Ordinal), StringComparison.Ordinal);
+        Assert.EndsWith(
+            "\nno errors, no doubts in 1 table\n", text.Replace("0 doubts", "no doubts", StringComparison.Ordinal), StringComparison.Ordinal);
         (code, text, _) = Run("polar", "check", set, "--only", "sp*", "--only", "ro*");
         Assert.Equal(1, code);
-        Assert.EndsWith("\n1 error, 0 doubts in 1 table\n", text, StringComparison.Ordinal);
-        Assert.Equal((2, "", "no section matches 'x*', 'y'; there are fell-21, round, spare\n"), Run("polar", "check", set, "--only", "x*", "--only", "y"));
+        Assert.EndsWith("\n1 error in 1 file; 0 doubts in 1 table without errors\n", text, StringComparison.Ordinal);
+        Assert.Equal(
+            (2, "", "no section matches 'x*', 'y'; there are fell-21, round, spare\n"), Run("polar", "check", set, "--only", "x*", "--only", "y"));
         Assert.Equal((2, "", "no section matches 'x*'; there are round\n"), Run("polar", "check", Path.Join(set, "round.csv"), "--only", "x*"));
         Assert.Equal(0, Run("polar", "check", Path.Join(set, "round.csv"), "--only", "round").Code);
     }
@@ -186,7 +197,7 @@ public sealed class Checking_polars : IDisposable
         Alone("cases/wrong.toml", "colour = 3\n");
         var (code, text, _) = Run("polar", "check", Path.Join(_folder.Path, "alone"), "--results", Results);
         Assert.Equal(1, code);
-        Assert.Contains("\n1 error, 4 doubts in 1 table; left out: 1 case with errors\n", text, StringComparison.Ordinal);
+        Assert.Contains("\n1 error in 1 file; 4 doubts in 1 table without errors; left out: 1 case with errors\n", text, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -211,10 +222,12 @@ public sealed class Checking_polars : IDisposable
     public void Names_that_lead_nowhere_are_told()
     {
         Told("no case matches 'x*'; the cases are air-and-pitch~", "polar", "check", _studies.PathOf("example"), "--only", "x*");
-        Told("no study folder or case file ", "polar", "check", Path.Join(_folder.Path, "nothing"));
+        Told("no study, set or table ", "polar", "check", Path.Join(_folder.Path, "nothing"));
         Told("--out is empty; give a folder", "polar", "check", _studies.PathOf("example/polars/clean"), "--out", "");
         File.WriteAllText(Path.Join(_folder.Path, "file"), "");
-        Told($"'{Path.Join(_folder.Path, "file")}' is a file; give a folder", "polar", "check", _studies.PathOf("example/polars/clean"), "--out", Path.Join(_folder.Path, "file"));
+        Told(
+            $"'{Path.Join(_folder.Path, "file")}' is a file; give a folder", "polar", "check", _studies.PathOf("example/polars/clean"), "--out",
+            Path.Join(_folder.Path, "file"));
 
         void Told(string beginning, params string[] arguments)
         {
@@ -222,6 +235,71 @@ public sealed class Checking_polars : IDisposable
             Assert.Equal((2, ""), (code, text));
             Assert.StartsWith(beginning, error, StringComparison.Ordinal);
         }
+    }
+
+    [Fact]
+    public void Written_where_asked_a_report_of_ours_gives_way_and_no_other_file_does()
+    {
+        var table = _studies.PathOf("example/polars/clean/round.csv");
+        var report = Path.Join(_folder.Path, "report");
+        Directory.CreateDirectory(report);
+        foreach (var (name, what) in new[] { ("round.svg", "picture"), ("polar-figures.csv", "report") })
+        {
+            var file = Path.Join(report, name);
+            File.WriteAllText(file, "mine");
+            Assert.Equal(
+                (2, "", $"'{file}' is there and is no {what} of ours; give another folder with --out\n"),
+                Run("polar", "check", table, "--out", report));
+            Assert.Equal("mine", File.ReadAllText(file));
+            Assert.Equal([name], FilesIn(report));
+            File.Delete(file);
+        }
+        Assert.Equal(0, Run("polar", "check", table, "--out", report).Code);
+        Assert.Equal(0, Run("polar", "check", table, "--out", report).Code);
+        Assert.Equal(["polar-doubts.csv", "polar-figures.csv", "round.svg"], FilesIn(report));
+    }
+
+    [Fact]
+    public void No_report_goes_among_polar_tables()
+    {
+        var (study, set) = (_studies.PathOf("example"), _studies.PathOf("example/polars/clean"));
+        var before = FilesIn(set);
+        foreach (var (source, folder) in new[]
+            { (set, set), (Path.Join(set, "round.csv"), set), (study, set), (study, _studies.PathOf("example/polars")) })
+            Assert.Equal(
+                (2, "", $"'{folder}' holds the polars that are checked; give another folder with --out\n"),
+                Run("polar", "check", source, "--out", folder));
+        var other = _studies.PathOf("example/polars/laboratory");
+        Assert.Equal(
+            (2, "", $"'{other}' holds a polar table, fell-21.csv, and the report would be read as more of them; give another folder with --out\n"),
+            Run("polar", "check", set, "--out", other));
+        // Where the study lies in the folder that is named for results, the place of the report is that of its sets.
+        Assert.Equal(
+            (2, "", $"'{_studies.PathOf("example/polars")}' holds the polars that are checked; give another folder for results with --results\n"),
+            Run("polar", "check", study, "--results", Path.GetDirectoryName(study)!));
+        Assert.Equal(before, FilesIn(set));
+    }
+
+    [Fact]
+    public void A_page_has_a_name_that_a_terminal_shows()
+    {
+        if (OperatingSystem.IsWindows())
+            return;
+        Directory.CreateDirectory(Path.Join(_folder.Path, "set"));
+        File.WriteAllText(Path.Join(_folder.Path, "set", "new\nline.csv"), "alpha_deg,cl,cd\n-180,0,0.6\n0,0,0.6\n180,0,0.6\n");
+        Assert.Equal(0, Run("polar", "check", Path.Join(_folder.Path, "set"), "--out", Path.Join(_folder.Path, "report")).Code);
+        Assert.Equal(["new_u000aline.svg", "polar-doubts.csv", "polar-figures.csv"], FilesIn(Path.Join(_folder.Path, "report")));
+    }
+
+    [Fact]
+    public void No_line_is_told_twice_for_one_kind_of_doubt()
+    {
+        var table = Path.Join(_folder.Path, "huge.csv");
+        File.WriteAllText(table, "alpha_deg,cl,cd\n-4,-19,0.0105\n-2,0.1,19\n0,0.32,0.0091\n2,19,0.0093\n4,0.76,15\n6,0.86,0.0121\n8,1.04,0.0165\n");
+        Assert.Contains(
+            $"\n{table}:5:3: doubt: the largest lift is 19, at 2 deg; slender sections reach 0.7 to 2.2: is it in another unit, or of "
+            + "a section with a flap?\n",
+            Run("polar", "check", table).Out, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -240,7 +318,9 @@ public sealed class Checking_polars : IDisposable
         var calls = 0;
         var (code, text, error) = Run(
             ["polar", "check", _studies.PathOf("example"), "--results", Results, "--only", "fixed-speed", "--only", "scheduled", "--workers", "1"],
-            solve: (rotor, cancellation) => calls++ == 0 ? throw new InvalidOperationException("loss factor 1.0003") : CaseSolver.Solve(rotor, cancellation));
+            solve: (rotor, cancellation) => calls++ == 0
+                ? throw new InvalidOperationException("loss factor 1.0003")
+                : CaseSolver.Solve(rotor, cancellation));
         Assert.Equal(1, code);
         Assert.Contains("Case scheduled failed: fault in BladeLoads, please report: loss factor 1.0003\n", error, StringComparison.Ordinal);
         Assert.Contains("(1 case, every operating point alike)", text, StringComparison.Ordinal);
@@ -277,7 +357,8 @@ public sealed class Checking_polars : IDisposable
 
     private static void Count(SortedDictionary<string, double> counted, string result, List<Dictionary<string, string>> blade, string set)
     {
-        var atRest = Rows(Path.Join(result, "power-curve.csv")).Where(r => Number(r["rotor_speed_rpm"]) == 0).Select(r => r["wind_speed_m_s"]).ToHashSet();
+        var atRest = Rows(Path.Join(result, "power-curve.csv"))
+            .Where(r => Number(r["rotor_speed_rpm"]) == 0).Select(r => r["wind_speed_m_s"]).ToHashSet();
         foreach (var row in Rows(Path.Join(result, "spanwise.csv")).Where(r => !atRest.Contains(r["wind_speed_m_s"])))
         {
             var radius = Number(row["radius_m"]);
@@ -305,7 +386,8 @@ public sealed class Checking_polars : IDisposable
 
     private static string KeyOfTable(string key) => key[..key.LastIndexOf(' ')];
 
-    private static string[] FilesIn(string folder) => [.. Directory.EnumerateFiles(folder).Select(f => Path.GetFileName(f)!).Order(StringComparer.Ordinal)];
+    private static string[] FilesIn(string folder)
+        => [.. Directory.EnumerateFiles(folder).Select(f => Path.GetFileName(f)!).Order(StringComparer.Ordinal)];
 
     private static List<Dictionary<string, string>> Rows(string file)
     {

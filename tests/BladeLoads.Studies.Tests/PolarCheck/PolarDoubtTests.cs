@@ -75,6 +75,35 @@ public sealed class PolarDoubtTests
     }
 
     [Fact]
+    public void The_row_that_sticks_out_is_told_and_not_its_neighbour_which_it_makes_look_so() => Is(
+        ["26:7: cl is 0.84 at 4 deg, 0.082 above the line of its neighbours; compare it with the source, or leave the row out"],
+        Fell.With(4, "0.84", "0.0101").With(6, "0.9", "0.0121").Doubts());
+
+    [Fact]
+    public void A_second_row_that_sticks_out_is_told_in_the_place_of_the_third() => Is(
+        [
+            "3:1: angles reach from -4 to 30 deg; beyond them the end value serves, and each use is marked outside-angles",
+            "4:8: cl is 0.207 at -2 deg, 0.112 above the line of its neighbours; compare it with the source, or leave the row out",
+        ],
+        Fell.Without(a => a is < -4 or > 30).With(-2, "0.207", "0.0095").With(0, "0.3", "0.0091").Doubts());
+
+    [Fact]
+    public void Drag_in_percent_is_doubted_where_lift_is_that_of_a_slender_section()
+    {
+        Is(
+            [
+                "3:1: angles reach from -8 to 18 deg; beyond them the end value serves, and each use is marked outside-angles",
+                "7:13: cd is 0.91 at least, and lift rises by 0.975 of 2 pi to 1.094, as that of slender sections does; they have a tenth of such "
+                + "drag and less: is it in percent?",
+            ],
+            Fell.Without(a => a is < -8 or > 18).Changed(r => (r.Angle, r.Lift, 100 * r.Drag)).Doubts());
+        // Half the slope, or half the lift: as thick sections near the root have them.
+        Assert.DoesNotContain(
+            Fell.Without(a => a is < -8 or > 18).Changed(r => (r.Angle, 0.5 * r.Lift, 100 * r.Drag)).Doubts(),
+            doubt => doubt.Contains("percent", StringComparison.Ordinal));
+    }
+
+    [Fact]
     public void A_table_that_scatters_as_a_whole_is_told_once() => Is(
         ["20:8: cl scatters: 10 of 24 rows from -30 to 30 deg lie off the line of their neighbours; smooth the table"],
         Fell.Changed(r => (r.Angle, r.Lift + (r.Angle % 4 == 0 ? 0.04 : -0.04) * (Math.Abs(r.Angle) < 13 ? 1 : 0), r.Drag)).Doubts());
@@ -82,8 +111,8 @@ public sealed class PolarDoubtTests
     [Fact]
     public void A_slope_far_from_two_pi_is_told() => Is(
         [
-            "23:8: lift rises by 4.29 a radian about -2.99 deg, 0.683 of 2 pi; slender sections have 0.8 to 1.35 of it: is lift there scattered, augmented, "
-            + "or in another unit?",
+            "23:8: lift rises by 4.29 a radian about -2.99 deg, 0.683 of 2 pi; slender sections have 0.8 to 1.35 of it: is lift there scattered, "
+            + "augmented, or in another unit?",
         ],
         Fell.Changed(r => (r.Angle, Math.Round(0.7 * r.Lift, 4), r.Drag)).Doubts());
 
@@ -126,7 +155,8 @@ public sealed class PolarDoubtTests
     {
         Is(
             ["24:13: cd is 0.0024, and a laminar plate has 0.00266 at Reynolds number 1e6; drag of pressure alone, or a slip?"],
-            Fell.With(0, "0.322", "0.0024").With(-2, "0.107", "0.003").With(2, "0.532", "0.003").With(-4, "-0.109", "0.006").With(4, "0.732", "0.006").Doubts());
+            Fell.With(0, "0.322", "0.0024").With(-2, "0.107", "0.003").With(2, "0.532", "0.003")
+                .With(-4, "-0.109", "0.006").With(4, "0.732", "0.006").Doubts());
         Is(
             [
                 "3:8: cd is 0, and a laminar plate has 0.000266 even at Reynolds number 1e8; drag of pressure alone, or a slip?",
@@ -154,8 +184,8 @@ public sealed class PolarDoubtTests
     [Fact]
     public void A_sharp_stall_is_told_once_from_its_first_row_to_its_last_with_its_steepest_fall() => Is(
         [
-            "32:8: cl falls from 1.045 to 0.53 between 12 and 16 deg, by up to 0.135 a degree (row 30 to 32): a sharp stall, in which several balances are "
-            + "likely; expect loads to jump there",
+            "32:8: cl falls from 1.045 to 0.53 between 12 and 16 deg, by up to 0.135 a degree (row 30 to 32): a sharp stall, in which several "
+            + "balances are likely; expect loads to jump there",
         ],
         Fell.With(14, "0.8", "0.0671").With(16, "0.53", "0.0972").With(18, "0.54", "0.1294").With(20, "0.6", "0.1622").Doubts());
 
@@ -183,7 +213,8 @@ public sealed class PolarDoubtTests
             "9:11: cd is 0.78 at -90 deg; a plate across the wind has 1.1 to 2.0, and about 1.3 as long as a blade",
             "40:10: cd is 2.24 at 90 deg; a plate across the wind has 1.1 to 2.0, and about 1.3 as long as a blade",
         ],
-        Fell.Changed(r => (r.Angle, r.Lift, r.Angle is < -40 and > -140 ? 0.6 * r.Drag : r.Angle is > 70 and < 110 ? r.Drag + 0.94 : r.Drag)).Doubts());
+        Fell.Changed(
+            r => (r.Angle, r.Lift, r.Angle is < -40 and > -140 ? 0.6 * r.Drag : r.Angle is > 70 and < 110 ? r.Drag + 0.94 : r.Drag)).Doubts());
 
     [Fact]
     public void Exchanged_columns_are_told_alone() => Is(
@@ -195,7 +226,10 @@ public sealed class PolarDoubtTests
 
     [Fact]
     public void A_head_that_says_augmented_is_told() => Is(
-        ["1: the rows are augmented for rotation, by the head: 'snel-1993, c/r 0.21'; they hold for one rotor and one radius, and are not to be augmented again"],
+        [
+            "1: the rows are augmented for rotation, by the head: 'snel-1993, c/r 0.21'; they hold for one rotor and one radius, and are not to be "
+            + "augmented again",
+        ],
         Fell.WithHead("# Augmented: snel-1993, c/r 0.21").Doubts());
 
     [Fact]
@@ -213,24 +247,42 @@ public sealed class PolarDoubtTests
     [Fact]
     public void Attached_lift_that_differs_between_Reynolds_numbers_is_told() => Is(
         [
-            "70:7: cl at 5 deg is 0.621, and 0.822 at Reynolds number 1e6; attached lift hardly depends on it: are the two of one section and one tunnel?",
+            "70:7: cl at 5 deg is 0.621, and 0.822 at Reynolds number 1e6; attached lift hardly depends on it: are the two of one section "
+            + "and one tunnel?",
         ],
-        Fell.Doubts(Fell.At("3e6").Changed(r => (r.Angle, r.Lift - (r.Angle is > -13 and < 45 ? 0.2 * Math.Min(1, (r.Angle + 13) / 15) : 0), r.Drag))));
+        Fell.Doubts(
+            Fell.At("3e6").Changed(r => (r.Angle, r.Lift - (r.Angle is > -13 and < 45 ? 0.2 * Math.Min(1, (r.Angle + 13) / 15) : 0), r.Drag))));
 
     [Fact]
     public void A_largest_lift_that_jumps_between_Reynolds_numbers_is_told() => Is(
         [
-            "74:8: the largest lift is 1.745, and 1.094 at Reynolds number 1e6; that is a jump: give a Reynolds number between them, or mend the slip",
+            "74:8: the largest lift is 1.745, and 1.094 at Reynolds number 1e6; that is a jump: give a Reynolds number between them, or "
+            + "mend the slip",
         ],
-        Fell.Doubts(Fell.At("2e6").Changed(r => (r.Angle, r.Lift + r.Angle switch { 8 => 0.25, 10 => 0.5, 12 => 0.7, 14 => 0.75, 16 => 0.7, 18 => 0.6, 20 => 0.5, 25 => 0.3, 30 => 0.1, _ => 0 }, r.Drag))));
+        Fell.Doubts(Fell.At("2e6").Changed(r => (
+            r.Angle,
+            r.Lift + r.Angle switch
+            {
+                8 => 0.25,
+                10 => 0.5,
+                12 => 0.7,
+                14 => 0.75,
+                16 => 0.7,
+                18 => 0.6,
+                20 => 0.5,
+                25 => 0.3,
+                30 => 0.1,
+                _ => 0,
+            },
+            r.Drag))));
 
     [Theory]
     [InlineData(1.5, "0.0136")]
     [InlineData(0.35, "0.0032")]
     public void Least_drag_that_jumps_between_Reynolds_numbers_is_told(double factor, string drag) => Is(
         [
-            $"68:13: the least drag is {drag}, and 0.0091 at Reynolds number 1e6; drag falls with it, and no faster than its square root: are the two of one "
-            + "section, equally smooth?",
+            $"68:13: the least drag is {drag}, and 0.0091 at Reynolds number 1e6; drag falls with it, and no faster than its square root: are the two "
+            + "of one section, equally smooth?",
         ],
         Fell.Doubts(Fell.At("2e6").Changed(r => (r.Angle, r.Lift, Math.Abs(r.Angle) < 40 ? Math.Round(factor * r.Drag, 4) : r.Drag))));
 

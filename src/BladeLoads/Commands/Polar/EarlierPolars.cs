@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies;
 using BladeLoads.Studies.Files;
@@ -8,6 +9,8 @@ namespace BladeLoads.Commands.Polar;
 /// <summary>Where the tables before an update are: one for all, a folder of them by section, or an earlier copy of the study.</summary>
 internal sealed class EarlierPolars
 {
+    private const int NamesShown = 4;
+
     private readonly Func<PolarPageAsked, string?> _pathOf;
 
     private EarlierPolars(string path, Func<PolarPageAsked, string?> pathOf) => (Path, _pathOf) = (path, pathOf);
@@ -30,6 +33,23 @@ internal sealed class EarlierPolars
                 : throw new WrongUseException($"--before '{path}' is a study, and what is drawn is none; give a table or the folder of a set"))
             : new EarlierPolars(path, page => System.IO.Path.Join(path, page.Section + ".csv"));
     }
+
+    /// <summary>A table stands for one section: that of its name, or whichever is drawn alone.</summary>
+    /// <param name="isTable">A single table is drawn.</param>
+    /// <exception cref="WrongUseException">It is a table, and others are drawn.</exception>
+    public void Check(ImmutableArray<PolarPageAsked> pages, bool isTable)
+    {
+        var sections = pages.Select(page => page.Section).Distinct().ToList();
+        if (isTable || !File.Exists(Path) || sections.TrueForAll(section => section == SectionOfTable))
+            return;
+        throw new WrongUseException(
+            $"--before '{Path}' is the table of section '{SectionOfTable}' alone, and drawn are {string.Join(", ", sections.Take(NamesShown))}"
+            + (sections.Count > NamesShown ? $" and {sections.Count - NamesShown} more" : "")
+            + "; give the folder of a set or an earlier copy of the study"
+            + (sections.Contains(SectionOfTable) ? $", or draw --only {SectionOfTable}" : ", or draw one table by itself"));
+    }
+
+    private string SectionOfTable => System.IO.Path.GetFileNameWithoutExtension(Path);
 
     /// <summary>The earlier section, and where it was; null where there was none, or it cannot be read, which is reported.</summary>
     public (Section Section, string Name)? Of(PolarPageAsked page, List<InputFinding> errors)

@@ -8,6 +8,16 @@ namespace BladeLoads.Commands.Polar;
 /// <summary>A table, or a folder of them, as a user names it.</summary>
 internal static class GivenTables
 {
+    /// <summary>Those tables that can be read, and what is wrong with the others.</summary>
+    /// <param name="isSet">The path leads to a folder.</param>
+    public static (ImmutableArray<StoredPolars> Tables, ImmutableArray<InputFinding> Errors) ReadSound(string path, bool isSet)
+    {
+        var files = new DiskFiles();
+        if (isSet)
+            return (StoredSet.ReadSound(Path.GetFullPath(path), path, files, out var errors, _ => false).Tables, errors);
+        return (StoredPolars.Read(path, files, out var wrong) is { } table ? [table] : [], wrong);
+    }
+
     /// <summary>Null, with what is wrong, where a table cannot be read.</summary>
     /// <param name="isSet">The path leads to a folder.</param>
     /// <exception cref="WrongUseException">The path leads to nothing that could be a table.</exception>

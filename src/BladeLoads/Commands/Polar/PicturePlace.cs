@@ -1,6 +1,5 @@
 using BladeLoads.Results.Pictures;
 using BladeLoads.Results.Publishing;
-using BladeLoads.Results.Wording;
 using BladeLoads.Studies.Files;
 
 namespace BladeLoads.Commands.Polar;
@@ -19,7 +18,7 @@ internal sealed record PolarPageAsked(
 internal sealed record PicturePlace(string Folder, bool Replace, IDisk Disk)
 {
     public string PathOf(PolarPageAsked page, PictureFormat format)
-        => Path.Join(Folder, Safe(page.Folder), Safe(page.FileName) + (format == PictureFormat.Svg ? ".svg" : ".png"));
+        => Path.Join(Folder, PictureName.Of(page.Folder), PictureName.Of(page.FileName) + (format == PictureFormat.Svg ? ".svg" : ".png"));
 
     /// <summary>Whole or not at all; null when written, else why not.</summary>
     /// <param name="draw">Makes the bytes; asked only where they can go somewhere.</param>
@@ -44,8 +43,4 @@ internal sealed record PicturePlace(string Folder, bool Replace, IDisk Disk)
                 return WholeFile.Write(full, draw(), replace: false, Disk) ? null : "came there just now; draw again";
         }
     }
-
-    // What a terminal could not show becomes its number, and no name becomes a way to another folder.
-    private static string Safe(string name)
-        => Printable.Of(name).Replace('\\', '_').Replace('/', '_') is var safe && safe is "." or ".." ? "_" : safe;
 }

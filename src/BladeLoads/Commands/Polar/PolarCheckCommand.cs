@@ -42,12 +42,18 @@ internal static class PolarCheckCommand
         {
             source, results, folder, only, workers, json,
         };
-        command.SetAction(parsed => Run(
-            new PolarCheckRequest(
-                GivenSource.Of(parsed.GetRequiredValue(source)), parsed.GetRequiredValue(results), parsed.GetValue(folder),
-                [.. parsed.GetValue(only) ?? []], parsed.GetValue(workers), parsed.GetValue(json)),
-            surroundings));
+        command.SetAction(parsed =>
+        {
+            var given = GivenSource.Of(parsed.GetRequiredValue(source));
+            given.RefuseWithoutStudy(parsed, results, "--out says where the report goes");
+            given.RefuseWithoutStudy(parsed, workers, "leave it out");
+            return Run(Request(parsed, given), surroundings);
+        });
         return command;
+
+        PolarCheckRequest Request(ParseResult parsed, GivenSource given) => new(
+            given, parsed.GetRequiredValue(results), parsed.GetValue(folder), [.. parsed.GetValue(only) ?? []], parsed.GetValue(workers),
+            parsed.GetValue(json));
     }
 
     private static int Run(PolarCheckRequest request, Surroundings surroundings)
@@ -55,17 +61,19 @@ internal static class PolarCheckCommand
         var files = new DiskFiles();
         return request.Source switch
         {
-            GivenSource.Table table => Tell(Chosen(CheckedTables.OfTable(table.Path, files), request), UseOfTables.None, null, request, surroundings),
-            GivenSource.Set set => Tell(Chosen(CheckedTables.OfSet(set.Path, files), request), UseOfTables.None, null, request, surroundings),
+            GivenSource.Table table => CheckAlone(CheckedTables.OfTable(table.Path, files), request, surroundings),
+            GivenSource.Set set => CheckAlone(CheckedTables.OfSet(set.Path, files), request, surroundings),
             _ => CheckStudy(request, files, surroundings),
         };
     }
 
-    private static CheckedTables Chosen(CheckedTables tables, PolarCheckRequest request)
+    private static int CheckAlone(CheckedTables all, PolarCheckRequest request, Surroundings surroundings)
     {
         var choice = new NameChoice(request.Only);
-        choice.Check(tables.Sections);
-        return tables.Of(choice.Includes);
+        choice.Check(all.Sections);
+        var tables = all.Of(choice.Includes);
+        CheckPlace(tables, null, request);
+        return Tell(tables, UseOfTables.None, null, request, surroundings);
     }
 
     private static int CheckStudy(PolarCheckRequest request, DiskFiles files, Surroundings surroundings)
@@ -79,6 +87,7 @@ internal static class PolarCheckCommand
             surroundings.Error.WriteLine(FindingLines.Closing(study));
             return ExitCode.NothingCouldRun;
         }
+        CheckPlace(tables, study, request);
         var progress = new RunProgress(study.Cases.Length, study.Cases.Sum(CaseGroups.Estimate), surroundings.Time);
         UseOfTables Solve() => UseOfTables.Of(
             study.Cases, tables.Tables, surroundings.Solve, request.Workers, progress, signals.Stopping);
@@ -109,11 +118,28 @@ internal static class PolarCheckCommand
         return study with { Cases = chosen };
     }
 
+    // Before hours of solving, not after.
+    private static void CheckPlace(CheckedTables tables, Study? study, PolarCheckRequest request)
+    {
+        var sets = tables.Tables.Select(table => table.File).Concat(tables.Errors.Select(error => error.File))
+            .Select(file => Path.GetDirectoryName(Path.GetFullPath(file, study?.Folder ?? Directory.GetCurrentDirectory()))!).Distinct().ToList();
+        if (study is not null)
+            sets = [.. sets, .. sets.Where(set => set != study.Folder).Select(set => Path.GetDirectoryName(set)!)];
+        var names = Names(tables, study, request);
+        if (request.Out is { } folder)
+            ReportPlace.Check(folder, sets, tables.Tables.Select(table => CheckedPicture.FileNameOf(table.File, names)));
+        else if (study is not null)
+            ReportPlace.CheckInputs(new ResultsFolder(request.Results, study.Name).Polars, sets, "folder for results with --results");
+    }
+
+    private static TableNames Names(CheckedTables tables, Study? study, PolarCheckRequest request)
+        => new(tables.Tables.Select(table => table.File).DefaultIfEmpty(""), study?.Name ?? request.Source.FolderName());
+
     /// <param name="study">Null where tables were asked for by themselves.</param>
     private static int Tell(CheckedTables tables, UseOfTables use, Study? study, PolarCheckRequest request, Surroundings surroundings)
     {
         var report = new PolarReport(tables, use.ByFile);
-        var names = new TableNames(tables.Tables.Select(table => table.File).DefaultIfEmpty(""), study?.Name ?? request.Source.FolderName());
+        var names = Names(tables, study, request);
         var folder = tables.Tables.IsEmpty ? null : Report();
         foreach (var (name, reason) in use.Failed)
             surroundings.Error.WriteLine($"Case {name} failed: {reason}");

@@ -6,6 +6,7 @@ using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Wording;
 using BladeLoads.Screen;
 using BladeLoads.Studies;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -55,12 +56,17 @@ internal static class PolarDrawCommand
         {
             source, before, folder, results, format, only, replace,
         };
-        command.SetAction(parsed => Run(
-            new DrawAsked(
-                GivenSource.Of(parsed.GetRequiredValue(source)), parsed.GetValue(before), parsed.GetValue(folder), parsed.GetRequiredValue(results),
-                parsed.GetValue(format) is { IsDefaultOrEmpty: false } formats ? formats : [PictureFormat.Svg],
-                new NameChoice([.. parsed.GetValue(only) ?? []]), parsed.GetValue(replace)),
-            surroundings));
+        command.SetAction(parsed =>
+        {
+            var given = GivenSource.Of(parsed.GetRequiredValue(source));
+            given.RefuseWithoutStudy(parsed, results, "--out says where pictures go");
+            return Run(
+                new DrawAsked(
+                    given, parsed.GetValue(before), parsed.GetValue(folder), parsed.GetRequiredValue(results),
+                    parsed.GetValue(format) is { IsDefaultOrEmpty: false } formats ? formats : [PictureFormat.Svg],
+                    new NameChoice([.. parsed.GetValue(only) ?? []]), parsed.GetValue(replace)),
+                surroundings);
+        });
         return command;
     }
 
@@ -71,7 +77,7 @@ internal static class PolarDrawCommand
         var earlier = asked.Before is null ? null : EarlierPolars.At(asked.Before);
         var (chosen, folder, isWhole) = asked.Source is GivenSource.Study ? OfStudy(asked, surroundings) : OfTables(asked, surroundings);
         if (earlier is not null)
-            chosen = Compared(chosen, earlier, surroundings);
+            chosen = Compared(chosen, earlier, asked, surroundings);
         if (chosen.IsEmpty)
             return ExitCode.NothingCouldRun;
         return Write(chosen, asked.Folder ?? folder, asked, surroundings, isWhole);
@@ -95,23 +101,31 @@ internal static class PolarDrawCommand
     private static (ImmutableArray<PolarPageAsked> Pages, string Folder, bool IsWhole) OfTables(DrawAsked asked, Surroundings surroundings)
     {
         var (path, isSet) = (asked.Source.Path, asked.Source is GivenSource.Set);
-        var set = GivenTables.Read(path, isSet, out var errors);
-        if (set is null)
-        {
-            FindingLines.Write(errors, [], "", surroundings.Error, surroundings.ErrorIsTerminal);
-            surroundings.Error.WriteLine($"{Count.Of(errors, "error")}; nothing drawn");
-            return ([], UsualFolder, false);
-        }
-        asked.Only.Check(set.Tables.Select(table => table.SectionName));
+        var (tables, all) = GivenTables.ReadSound(path, isSet);
+        asked.Only.Check(tables.Select(table => table.SectionName).Concat(all.Select(SectionOf).OfType<string>()));
+        var errors = all.Where(error => SectionOf(error) is not { } section || asked.Only.Includes(section)).ToImmutableArray();
         var name = asked.Source.FolderName();
-        return ([.. set.Tables.Where(table => asked.Only.Includes(table.SectionName)).Select(table => new PolarPageAsked(
-            name, name, table.SectionName, table.SectionName, null,
-            PolarPicture.Of(table.Section, name, isSet ? Path.Join(path, table.SectionName + ".csv") : path)))], UsualFolder, true);
+        ImmutableArray<PolarPageAsked> pages =
+        [
+            .. tables.Where(table => asked.Only.Includes(table.SectionName)).Select(table => new PolarPageAsked(
+                name, name, table.SectionName, table.SectionName, null,
+                PolarPicture.Of(table.Section, name, isSet ? Path.Join(path, table.SectionName + ".csv") : path))),
+        ];
+        FindingLines.Write(errors, [], "", surroundings.Error, surroundings.ErrorIsTerminal);
+        if (!errors.IsEmpty)
+            surroundings.Error.WriteLine(
+                $"{Count.Of(errors, "error")}; {(pages.IsEmpty ? "nothing drawn" : "only tables without errors are drawn")}");
+        return (pages, UsualFolder, errors.IsEmpty);
+
+        // Null for an error about the set itself.
+        static string? SectionOf(InputFinding error)
+            => StoredSet.IsTable(Path.GetFileName(error.File)) ? Path.GetFileNameWithoutExtension(error.File) : null;
     }
 
     private static ImmutableArray<PolarPageAsked> Compared(
-        ImmutableArray<PolarPageAsked> pages, EarlierPolars earlier, Surroundings surroundings)
+        ImmutableArray<PolarPageAsked> pages, EarlierPolars earlier, DrawAsked asked, Surroundings surroundings)
     {
+        earlier.Check(pages, asked.Source is GivenSource.Table);
         var errors = new List<InputFinding>();
         var compared = ImmutableArray.CreateBuilder<PolarPageAsked>();
         foreach (var page in pages)
@@ -136,6 +150,8 @@ internal static class PolarDrawCommand
         ImmutableArray<PolarPageAsked> pages, string folder, DrawAsked asked, Surroundings surroundings, bool isWhole)
     {
         var place = new PicturePlace(folder, asked.Replace, surroundings.Disk);
+        foreach (var page in pages)
+            FileInTheWay.Refuse(Path.GetDirectoryName(place.PathOf(page, PictureFormat.Svg))!, "give a folder with --out");
         var code = isWhole ? ExitCode.Good : ExitCode.SomeNotGood;
         foreach (var page in pages)
             foreach (var format in asked.Formats)

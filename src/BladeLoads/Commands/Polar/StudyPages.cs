@@ -17,7 +17,7 @@ internal sealed record StudyPages(ImmutableArray<PolarPageAsked> Pages, Immutabl
     private const string Treatment = "sections.";
 
     /// <param name="solve">
-    /// Asked for cases that augment a table which is drawn, and for no other: the correction depends on where the rotor works.
+    /// Asked for cases that augment a table which is drawn, and for no other: what rotation does depends on where the rotor works.
     /// </param>
     /// <exception cref="WrongUseException">No section is chosen.</exception>
     public static StudyPages Of(Study study, NameChoice only, SolveCase solve)
@@ -40,7 +40,7 @@ internal sealed record StudyPages(ImmutableArray<PolarPageAsked> Pages, Immutabl
 
     private sealed class Reading(Study study, TableNames names, SolveCase solve)
     {
-        private readonly Dictionary<string, CorrectedLines> _corrections = new(StringComparer.Ordinal);
+        private readonly Dictionary<string, AugmentedLines> _augmentations = new(StringComparer.Ordinal);
 
         public List<InputFinding> Errors { get; } = [];
 
@@ -60,7 +60,7 @@ internal sealed record StudyPages(ImmutableArray<PolarPageAsked> Pages, Immutabl
                 .With(ExtendedLines.Of(tabulated.Section, prepared));
             if (studyCase.Rotor.Augmentation != Augmentation.None)
             {
-                var (lines, note) = Corrections(studyCase).On(section);
+                var (lines, note) = Augmented(studyCase).On(section);
                 picture = picture.With(lines) with { Notes = picture.Notes.Add(note) };
             }
             return Of($"{section}~{studyCase.Name}", picture);
@@ -69,10 +69,10 @@ internal sealed record StudyPages(ImmutableArray<PolarPageAsked> Pages, Immutabl
                 => new(names.SetFolderOf(file), set, section, fileName, file, shown);
         }
 
-        private CorrectedLines Corrections(StudyCase studyCase)
+        private AugmentedLines Augmented(StudyCase studyCase)
         {
-            if (!_corrections.TryGetValue(studyCase.Name, out var lines))
-                _corrections.Add(studyCase.Name, lines = CorrectedLines.Of(studyCase, solve));
+            if (!_augmentations.TryGetValue(studyCase.Name, out var lines))
+                _augmentations.Add(studyCase.Name, lines = AugmentedLines.Of(studyCase, solve));
             return lines;
         }
     }
