@@ -62,7 +62,8 @@ internal static class RunCommand
         var moved = run.NoRoom is null && !changes.IsEmpty ? changes.Compare(run.Outcomes) : [];
         if (run.NoRoom is null && !changes.IsEmpty)
             changes.Publish(moved, run.Outcomes, publisher.Get());
-        if (run.NoRoom is null && run.Faults.IsEmpty)
+        // Who stops a run does not wait for a page; the run that goes on from there writes it.
+        if (run.NoRoom is null && run.Faults.IsEmpty && signals.Code is null)
             StudyReportFile.Publish(rows, study.Whole, results, CommandLine.ToolVersion, !run.Outcomes.IsEmpty, publisher.Get);
         if (run.NoRoom is null && !due.IsEmpty)
             look.LookAfterRun(study.Whole);
