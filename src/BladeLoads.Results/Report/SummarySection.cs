@@ -33,7 +33,7 @@ internal static class SummarySection
                 "flapwise moment, kNm", "m/s", "edgewise moment, kNm", "m/s", .. hasEnergy ? (string[])["net energy, MWh a year", "capacity factor"] : [],
                 "state, marks with their points",
             ],
-            cases.Select(c => (string[])[c.Row.Case, .. Figures(c.Row.Summary, hasEnergy), State(c)]));
+            cases.Select(c => (string[])[c.Row.Case, .. Figures(c.Row.Summary, hasEnergy), State(c)])).Class("figures");
     }
 
     private static string[] Figures(CaseSummary? s, bool hasEnergy) =>
