@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using BladeLoads.Rotor.Sections;
 
 namespace BladeLoads.Rotor.Momentum;
@@ -152,6 +153,7 @@ internal readonly struct Annulus
     }
 
     // (1 - f) of the plain table and f of the augmented one, f from 0 to 1 and free of the angle: so the bounds of both, blended, are bounds.
+    [MethodImpl(MethodImplOptions.NoInlining)]   // else the path without it, which is that of most cases, becomes slower
     private Coefficients Augmented(in Coefficients plain, double angleOfAttack)
     {
         var full = Inner.Augmented.At(angleOfAttack, InnerPlace);
