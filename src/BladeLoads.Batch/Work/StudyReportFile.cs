@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 using System.Security.Cryptography;
-using System.Text;
+using BladeLoads.Batch.Plan;
 using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Receipts;
@@ -13,7 +13,7 @@ namespace BladeLoads.Batch.Work;
 /// <summary>The report of a study, from the results that lie on the disk.</summary>
 public static class StudyReportFile
 {
-    private const int StampReach = 1024;
+    private const long LargestReport = 256 << 20;
 
     /// <summary>Writes <c>report.html</c> where results were just made, or where the one that is there is of another summary.</summary>
     /// <param name="rows">Of the whole study, as its summary has them.</param>
@@ -23,12 +23,12 @@ public static class StudyReportFile
     {
         try
         {
-            var changes = File.Exists(results.Changes) ? File.ReadAllBytes(results.Changes) : [];
-            var stamp = $"{StampOf(rows, study.Baseline)} and changes {Hash(changes)}";
-            if (!hasNewResults && IsOf(results.Report, stamp))
+            var stamp = StampOf(rows, study.Baseline, results);
+            if (!hasNewResults && ReadIfOf(results.Report, stamp) is not null)
                 return;
             var report = new StudyReport(
-                results.StudyName, toolVersion, study.Baseline, Cases(rows, study, results), StoredChanges.Parse(changes));
+                results.StudyName, toolVersion, study.Baseline, Cases(rows, study, results),
+                File.Exists(results.Changes) ? StoredChanges.Parse(File.ReadAllBytes(results.Changes)) : []);
             publisher().PublishFile(results.Report, ReportPage.Write(report, stamp));
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
@@ -37,12 +37,12 @@ public static class StudyReportFile
         }
     }
 
-    /// <summary>The report that lies there; null where there is none of this summary, or it cannot be read.</summary>
+    /// <summary>The report that lies there; null where there is none of this summary, or it was changed, or cannot be read.</summary>
     public static byte[]? Find(ImmutableArray<SummaryRow> rows, string? baseline, ResultsFolder results)
     {
         try
         {
-            return IsOf(results.Report, StampOf(rows, baseline)) ? File.ReadAllBytes(results.Report) : null;
+            return ReadIfOf(results.Report, StampOf(rows, baseline, results));
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
@@ -50,17 +50,14 @@ public static class StudyReportFile
         }
     }
 
-    private static string StampOf(ImmutableArray<SummaryRow> rows, string? baseline) => $"of summary {Hash(SummaryTable.Write(rows, baseline))}";
-
-    private static bool IsOf(string path, string stamp)
+    private static string StampOf(ImmutableArray<SummaryRow> rows, string? baseline, ResultsFolder results)
     {
-        if (!File.Exists(path))
-            return false;
-        using var file = File.OpenRead(path);
-        var beginning = new byte[StampReach];
-        var read = file.ReadAtLeast(beginning, StampReach, throwOnEndOfStream: false);
-        return beginning.AsSpan(0, read).IndexOf(Encoding.ASCII.GetBytes(stamp)) >= 0;
+        var changes = File.Exists(results.Changes) ? File.ReadAllBytes(results.Changes) : [];
+        return $"of summary {Hash(SummaryTable.Write(rows, baseline))} and changes {Hash(changes)}";
     }
+
+    private static byte[]? ReadIfOf(string path, string stamp)
+        => File.Exists(path) && new FileInfo(path).Length <= LargestReport && File.ReadAllBytes(path) is var bytes && ReportPage.IsOf(bytes, stamp) ? bytes : null;
 
     private static ImmutableArray<ReportedCase> Cases(ImmutableArray<SummaryRow> rows, Study study, ResultsFolder results)
     {
@@ -70,9 +67,16 @@ public static class StudyReportFile
             var file = files.GetValueOrDefault(row.Case, "");
             return row.Summary is not null && ReceiptFile.Read(results.Case(row.Case)) is ReceiptReading.Readable { Receipt: var receipt }
                 ? new ReportedCase(row, file, receipt, CurveOf(results.Case(row.Case)))
-                : new ReportedCase(row, file, null, null);
+                : new ReportedCase(row, file, null, null, ReasonOf(row, study, results));
         })];
     }
+
+    private static string ReasonOf(SummaryRow row, Study study, ResultsFolder results) => row.State switch
+    {
+        "failed" => ReceiptFile.ReadFailure(results.Failure(row.Case))?.Reason ?? "",
+        "blocked" => study.Blocking.GetValueOrDefault(row.Case) is { } finding ? new CaseState.Blocked(finding).Reason : "",
+        _ => "",
+    };
 
     private static StoredCurve? CurveOf(string folder)
     {

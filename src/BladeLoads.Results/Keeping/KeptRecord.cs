@@ -1,5 +1,6 @@
 using System.Text.Json;
 using System.Text.Json.Serialization;
+using BladeLoads.Results.Receipts;
 
 namespace BladeLoads.Results.Keeping;
 
@@ -10,8 +11,10 @@ public sealed record KeptCase(string Case, string State, string? Fingerprint, in
 
 /// <summary><c>kept.json</c>: what a kept set holds, and when it was set aside.</summary>
 /// <param name="Format">The version of this file's own form.</param>
+/// <param name="Files">What stands beside the results; null in sets kept before they were told.</param>
 public sealed record KeptRecord(
-    int Format, string Name, string Study, DateTimeOffset KeptAt, string ToolVersion, IReadOnlyList<KeptCase> Cases, string Caution)
+    int Format, string Name, string Study, DateTimeOffset KeptAt, string ToolVersion, IReadOnlyList<KeptCase> Cases, string Caution,
+    IReadOnlyList<ResultFile>? Files = null)
 {
     public const string FileName = "kept.json";
 

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using BladeLoads.Results.Publishing;
+using BladeLoads.Results.Receipts;
 using BladeLoads.Results.Report;
 using BladeLoads.Results.Tables;
 using BladeLoads.Results.Wording;
@@ -91,16 +92,13 @@ public static class KeptSet
             throw new NotKeptException("not kept: results are not what was written; solve them again, or keep them with --as-it-is", [.. flaws]);
         if (kept.All(k => k.Fingerprint is null))
             throw new NotKeptException("not kept: there is no result", []);
-        var record = new KeptRecord(
-            KeptRecord.CurrentFormat, request.Name, results.StudyName, request.At, request.ToolVersion, kept, Caution.Text);
         var report = kept.Exists(k => k.State == Damaged) ? null : request.Report;
-        WriteFolder(
-            hidden,
-            [
-                new ResultContent(SummaryTable.FileName, request.Summary), new ResultContent(KeptRecord.FileName, record.ToBytes()),
-                .. report is null ? (ResultContent[])[] : [new ResultContent(StudyReport.FileName, report)],
-            ],
-            disk);
+        ResultContent[] files =
+            [new(SummaryTable.FileName, request.Summary), .. report is null ? (ResultContent[])[] : [new(StudyReport.FileName, report)]];
+        var record = new KeptRecord(
+            KeptRecord.CurrentFormat, request.Name, results.StudyName, request.At, request.ToolVersion, kept, Caution.Text,
+            [.. files.Select(file => ResultFile.Of(file.Name, file.Bytes.Span))]);
+        WriteFolder(hidden, [.. files, new ResultContent(KeptRecord.FileName, record.ToBytes())], disk);
         return record;
     }
 

@@ -41,6 +41,8 @@ public static class Verification
         [
             .. record.Cases.Where(c => c.Fingerprint is not null || found.Contains(c.Case))
                 .Select(c => new Verified($"{set}/{c.Case}", null, OfKeptCase(Path.Join(folder, c.Case), c))),
+            .. (record.Files ?? []).Select(file => (file.Name, Flaw: ResultCheck.OfFile(folder, file))).Where(file => file.Flaw is not null)
+                .Select(file => new Verified($"{set}/{file.Name}", null, [file.Flaw!])),
             .. found.Where(f => record.Cases.All(c => c.Case != f)).Order(StringComparer.Ordinal)
                 .Select(f => new Verified($"{set}/{f}", null, [new ResultFlaw.Extra(f)])),
         ];

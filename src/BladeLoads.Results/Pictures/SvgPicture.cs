@@ -31,7 +31,7 @@ internal static class SvgPicture
         Renumber(root);
         root.AddFirst(
             new XElement(Svg + "title", title),
-            new XElement(Svg + "desc", $"{string.Join("; ", notes)}; {Mark}"));
+            new XElement(Svg + "desc", string.Join("; ", notes.Append(Mark))));
 
         using var finished = new MemoryStream();
         var settings = new XmlWriterSettings

@@ -16,8 +16,11 @@ internal static class CurveSection
         var groups = report.Cases.Where(c => c.Curve is not null).GroupBy(c => c.File, StringComparer.Ordinal)
             .Select(group => (File: group.Key, Pages: group.Chunk(CurvePicture.MostLines).ToList())).ToList();
         var pages = groups.SelectMany(g => g.Pages.Select((cases, i) => (g.File, Cases: cases, Number: i + 1, Of: g.Pages.Count))).ToList();
+        var flat = report.Cases.Where(c => c.Curve is { } curve && !new CurvePicture("", [new CurveLine(c.Row.Case, curve)]).HasLines).Select(c => c.Row.Case).ToList();
         return pages.Count == 0 ? null : Element(
-            "section", Text("h2", "Curves"), pages.Take(MostPictures).Select(page => Picture(page.File, page.Cases, page.Number, page.Of)),
+            "section", Text("h2", "Curves"),
+            flat.Count == 0 ? null : Text("p", $"Not drawn, with one wind speed only: {string.Join(", ", flat)}."),
+            pages.Take(MostPictures).Select(page => Picture(page.File, page.Cases, page.Number, page.Of)),
             pages.Count > MostPictures
                 ? Text("p", string.Create(CultureInfo.InvariantCulture, $"{pages.Count - MostPictures} more pictures are left out; every curve is in its power-curve.csv."))
                 : null);

@@ -1,4 +1,5 @@
 using System.Globalization;
+using System.Security.Cryptography;
 using System.Text;
 using System.Xml;
 using System.Xml.Linq;
@@ -12,11 +13,28 @@ namespace BladeLoads.Results.Report;
 public static class ReportPage
 {
     private const int MostReceipts = 300;
-    private const int MostChanges = 40;
 
     /// <summary>The page as UTF-8; the same bytes for the same report.</summary>
     /// <param name="stamp">Stands at its beginning, in a comment: what the page was made of. Letters, digits and blanks.</param>
     public static byte[] Write(StudyReport report, string stamp)
+    {
+        var page = PageOf(report);
+        return [.. Encoding.UTF8.GetBytes($"{Beginning(stamp)}{Convert.ToHexStringLower(SHA256.HashData(page))} -->\n"), .. page];
+    }
+
+    /// <summary>Whether these are the bytes of a page that was made of this, and of which nothing was changed since.</summary>
+    public static bool IsOf(ReadOnlySpan<byte> file, string stamp)
+    {
+        var beginning = Encoding.UTF8.GetBytes(Beginning(stamp));
+        var hash = SHA256.HashSizeInBytes * 2;
+        var head = beginning.Length + hash + " -->\n".Length;
+        return file.Length > head && file.StartsWith(beginning)
+            && Encoding.UTF8.GetString(file.Slice(beginning.Length, hash)) == Convert.ToHexStringLower(SHA256.HashData(file[head..]));
+    }
+
+    private static string Beginning(string stamp) => $"<!DOCTYPE html>\n<!-- {stamp}; page ";
+
+    private static byte[] PageOf(StudyReport report)
     {
         var page = Element(
             "html", new XAttribute("lang", "en"),
@@ -25,9 +43,9 @@ public static class ReportPage
                 Policy(), Text("title", $"{report.Study}: rotor aerodynamics"), Element("style", ReportStyle.Text)),
             Element(
                 "body", Text("h1", $"{report.Study}: rotor aerodynamics"), Text("p", Origin(report)).Class("origin"), Cautions(), SignOff(),
-                SummarySection.Of(report), Moved(report), CurveSection.Of(report), Receipts(report), Text("footer", Foot(report))));
+                SummarySection.Of(report), MovedSection.Of(report), CasesSection.Of(report), CurveSection.Of(report), Receipts(report),
+                Text("footer", Foot(report))));
         using var bytes = new MemoryStream();
-        bytes.Write(Encoding.UTF8.GetBytes($"<!DOCTYPE html>\n<!-- {stamp} -->\n"));
         var settings = new XmlWriterSettings
         {
             Encoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false),
@@ -76,18 +94,6 @@ public static class ReportPage
     private static XElement SignOff() => Element(
         "section", Text("h2", "Signatures"),
         Table(^0.., ["", "name", "date", "signature"], [["made by", "", "", ""], ["checked by", "", "", ""], ["approved by", "", "", ""]])).Class("sign");
-
-    private static XElement? Moved(StudyReport report) => report.Moved.IsEmpty ? null : Element(
-        "section", Text("h2", "What the last run moved"),
-        Text("p", report.Moved.Length > MostChanges
-            ? string.Create(CultureInfo.InvariantCulture, $"The {MostChanges} largest of {report.Moved.Length} changes; all of them, and why, in changes.csv.")
-            : "All of it, and why, in changes.csv."),
-        Table(
-            2.., ["case", "figure", "before", "now", "change, %"],
-            report.Moved.Take(MostChanges).Select(c => (string[])
-            [
-                c.Case, c.Unit.Length == 0 ? c.Figure : $"{c.Figure}, {c.Unit}", Figure(c.Old), Figure(c.New), Percent(c.Percent),
-            ])));
 
     private static XElement Receipts(StudyReport report)
     {

@@ -13,6 +13,7 @@ internal static class ReportStyle
         th, td { border: 1px solid #d0d0d0; padding: 2px 6px; text-align: left; vertical-align: top; overflow-wrap: anywhere; }
         th { background: #f1f3f5; font-weight: 600; overflow-wrap: normal; }
         td:first-child { min-width: 16em; }
+        td:first-child, th { hyphens: none; }
         .figures td:last-child { min-width: 9em; }
         .n { text-align: right; font-variant-numeric: tabular-nums; overflow-wrap: normal; }
         .origin, footer { color: #505050; }

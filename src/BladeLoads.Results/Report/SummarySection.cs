@@ -19,34 +19,59 @@ internal static class SummarySection
         return Element(
             "section", Text("h2", "Summary"), Figures(report.Cases),
             Text("p", "Largest values over the rows of the curve and the design points in operation; moments at the blade root. m/s: the wind speed there."),
-            baseline is null ? null : Differences(report, baseline),
+            BestAndEnergy(report.Cases),
+            baseline is not null ? Differences(report, baseline)
+                : report.Baseline is null ? null
+                : Text("p", $"No difference to a baseline is shown: '{report.Baseline}' has no current result."),
             Marks(report.Cases));
     }
 
-    private static XElement Figures(ImmutableArray<ReportedCase> cases)
-    {
-        var hasEnergy = cases.Any(c => c.Row.Summary?.Energy is not null);
-        return Table(
-            1..^1,
-            [
-                "case", "best power coefficient", "at tip-speed ratio", "electrical power, kW", "rated at, m/s", "thrust, kN", "m/s",
-                "flapwise moment, kNm", "m/s", "edgewise moment, kNm", "m/s", .. hasEnergy ? (string[])["net energy, MWh a year", "capacity factor"] : [],
-                "state, marks with their points",
-            ],
-            cases.Select(c => (string[])[c.Row.Case, .. Figures(c.Row.Summary, hasEnergy), State(c)])).Class("figures");
-    }
+    private static XElement Figures(ImmutableArray<ReportedCase> cases) => Table(
+        1..^1,
+        [
+            "case", "best power coefficient", "at tip-speed ratio", "electrical power, kW", "rated at, m/s", "thrust, kN", "m/s",
+            "flapwise moment, kNm", "m/s", "edgewise moment, kNm", "m/s", "state, marks with their points",
+        ],
+        cases.Select(c => (string[])[c.Row.Case, .. Figures(c.Row.Summary), State(c)])).Class("figures");
 
-    private static string[] Figures(CaseSummary? s, bool hasEnergy) =>
+    private static string[] Figures(CaseSummary? s) =>
     [
         s?.BestPowerCoefficient?.Value.ToString("0.0000", CultureInfo.InvariantCulture) ?? None, Figure(s?.BestTipSpeedRatio),
         Figure(s?.LargestElectricalPower?.Value / 1000), Figure(s?.RatedWindSpeed), Figure(s?.LargestThrust?.Value / 1000),
         Figure(s?.LargestThrust?.WindSpeed), Figure(s?.LargestFlapwiseMoment?.Value / 1000), Figure(s?.LargestFlapwiseMoment?.WindSpeed),
         Figure(s?.LargestEdgewiseMoment?.Value / 1000), Figure(s?.LargestEdgewiseMoment?.WindSpeed),
-        .. hasEnergy ? (string[])[Figure(s?.Energy?.AnnualEnergy / JoulesPerMegawattHour), Figure(s?.Energy?.CapacityFactor)] : [],
     ];
 
-    private static string State(ReportedCase c)
-        => string.Join(' ', new[] { c.Row.State == "current" ? "" : c.Row.State, c.Row.Summary?.MarksText ?? "" }.Where(text => text.Length > 0));
+    private static string State(ReportedCase c) => string.Join(
+        ' ',
+        new[] { c.Row.State == "current" ? "" : c.Reason.Length == 0 ? c.Row.State : $"{c.Row.State}: {c.Reason}", c.Row.Summary?.MarksText ?? "" }
+            .Where(text => text.Length > 0));
+
+    // Cases that searched their best point, or have a year; none, none of it.
+    private static object[] BestAndEnergy(ImmutableArray<ReportedCase> cases)
+    {
+        var told = cases.Where(c => c.Row.Summary is { Energy: not null } or { Best.Searched: true }).ToList();
+        return told.Count == 0 ? [] :
+        [
+            Text("h3", "Best point found, year at the site"),
+            Table(
+                1..,
+                [
+                    "case", "tip-speed ratio", "pitch, deg", "net energy, MWh a year", "capacity factor", "with turbulence, MWh a year", "its capacity factor",
+                ],
+                told.Select(c =>
+                {
+                    var best = c.Row.Summary!.Best is { Searched: true } searched ? searched : null;
+                    var energy = c.Row.Summary.Energy;
+                    return (string[])
+                    [
+                        c.Row.Case, Figure(best?.TipSpeedRatio), Figure(best is null ? null : double.RadiansToDegrees(best.FinePitch)),
+                        Figure(energy?.AnnualEnergy / JoulesPerMegawattHour), Figure(energy?.CapacityFactor),
+                        Figure(energy?.TurbulentAnnualEnergy / JoulesPerMegawattHour), Figure(energy?.TurbulentCapacityFactor),
+                    ];
+                })),
+        ];
+    }
 
     private static object[] Differences(StudyReport report, CaseSummary baseline)
     {

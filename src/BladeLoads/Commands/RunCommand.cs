@@ -62,9 +62,6 @@ internal static class RunCommand
         var moved = run.NoRoom is null && !changes.IsEmpty ? changes.Compare(run.Outcomes) : [];
         if (run.NoRoom is null && !changes.IsEmpty)
             changes.Publish(moved, run.Outcomes, publisher.Get());
-        // Who stops a run does not wait for a page; the run that goes on from there writes it.
-        if (run.NoRoom is null && run.Faults.IsEmpty && signals.Code is null)
-            StudyReportFile.Publish(rows, study.Whole, results, CommandLine.ToolVersion, !run.Outcomes.IsEmpty, publisher.Get);
         if (run.NoRoom is null && !due.IsEmpty)
             look.LookAfterRun(study.Whole);
         if (run.SolvedByAnother > 0 && !request.Quiet)
@@ -75,6 +72,9 @@ internal static class RunCommand
             if (moved.Any(c => c is not CaseComparison.NotCompared { Reason: NoComparison.NoEarlierResult }))
                 ChangeLines.Write(moved, ChangesOf(results, surroundings), surroundings.Out);
         }
+        // After all is on the screen: a report that cannot be written hides nothing else.
+        if (run.NoRoom is null && run.Faults.IsEmpty)
+            StudyReportFile.Publish(rows, study.Whole, results, CommandLine.ToolVersion, !run.Outcomes.IsEmpty, publisher.Get);
         return Tell(run, shown, study.Asked, signals, surroundings);
     }
 

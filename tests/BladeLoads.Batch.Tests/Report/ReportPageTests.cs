@@ -44,7 +44,7 @@ public sealed class ReportPageTests : IDisposable
     {
         var page = Page(new StudyReport(
             Hostile, Hostile, Hostile, [Case(Hostile), Case("b") with { File = Hostile }],
-            [new ReportedChange(Hostile, Hostile, Hostile, 1, 2, 100)]));
+            [new MovedCase(Hostile, Hostile, Hostile, [new MovedFigure(Hostile, Hostile, 1, 2, 3, 4, 5, Hostile)])]));
 
         string[] known =
         [
@@ -64,7 +64,7 @@ public sealed class ReportPageTests : IDisposable
         var report = Report(Case("clean"), Case("soiled"));
         var text = Text(report);
         Assert.Equal(text, Text(report));
-        Assert.StartsWith("<!DOCTYPE html>\n<!-- of summary 0 -->\n<html lang=\"en\">", text, StringComparison.Ordinal);
+        Assert.Matches("^<!DOCTYPE html>\n<!-- of summary 0; page [0-9a-f]{64} -->\n<html lang=\"en\">", text);
         // A browser takes <td /> for one that is not closed.
         Assert.Contains("<td></td>", text, StringComparison.Ordinal);
         Assert.Empty(XDocument.Parse(text).Descendants().Where(e => e.IsEmpty).Select(e => e.Name.LocalName).Except(["meta", "img"]));
@@ -86,13 +86,13 @@ public sealed class ReportPageTests : IDisposable
     [Fact]
     public void A_case_without_a_current_result_has_its_state_and_no_figure()
     {
-        var missing = new ReportedCase(new SummaryRow("slow", "Slow", "f", "missing", null), "cases/slow.toml", null, null);
+        var missing = new ReportedCase(new SummaryRow("slow", "Slow", "f", "failed", null), "cases/slow.toml", null, null, "no room");
 
         var page = Page(Report(Case("clean"), missing));
 
         var row = page.Descendants("tr").First(tr => tr.Element("td")?.Value == "slow").Elements("td").Select(td => td.Value).ToList();
         Assert.All(row[1..^1], cell => Assert.Equal("-", cell));
-        Assert.Equal("missing", row[^1]);
+        Assert.Equal("failed: no room", row[^1]);
         Assert.Empty(Page(Report(missing)).Descendants("figure"));
     }
 
@@ -111,17 +111,52 @@ public sealed class ReportPageTests : IDisposable
     }
 
     [Fact]
-    public void What_moved_stands_in_the_order_it_comes_and_the_rest_is_counted()
+    public void What_moved_stands_case_by_case_with_the_reason_and_cases_beyond_forty_are_counted()
     {
         var page = Page(Report(Case("clean")) with
         {
-            Moved = [.. Enumerable.Range(0, 43).Select(i => new ReportedChange("clean", "largest thrust", "kN", 100, 100 - i, -i))],
+            Moved = [.. Enumerable.Range(0, 43).Select(i => new MovedCase(
+                $"c{i}", "blade.csv: 2 rows", "", [new MovedFigure("best power coefficient", "", 0.47, 8, 0.4654, 9, -0.98, "the note")]))],
         });
 
-        var section = page.Descendants("section").Single(s => s.Element("h2")?.Value == "What the last run moved");
-        Assert.Equal("The 40 largest of 43 changes; all of them, and why, in changes.csv.", section.Element("p")!.Value);
+        var section = page.Descendants("section").Single(s => s.Element("h2")?.Value == "What the last run that solved anything moved");
+        Assert.Equal("3 more cases are in changes.csv.", section.Element("p")!.Value);
+        Assert.Equal("c1 (blade.csv: 2 rows)", section.Descendants("h3").ElementAt(1).Value);
         Assert.Equal(
-            ["clean", "largest thrust, kN", "100.0", "99.00", "-1.00"], section.Descendants("tr").ElementAt(2).Elements("td").Select(td => td.Value));
+            ["best power coefficient", "0.4700", "8.000", "0.4654", "9.000", "-0.98", "the note"],
+            section.Descendants("tr").ElementAt(1).Elements("td").Select(td => td.Value));
+    }
+
+    [Fact]
+    public void Each_case_says_by_which_values_it_differs_from_the_baseline()
+    {
+        static IReadOnlyDictionary<string, string> Values(params (string Key, string Value)[] values) => values.ToDictionary(v => v.Key, v => v.Value);
+        ReportedCase With(string name, IReadOnlyDictionary<string, string> values)
+            => Case(name) is var c ? c with { Receipt = c.Receipt! with { Values = values } } : throw new InvalidOperationException();
+
+        var page = Page(Report(
+            With("thin", Values(("air.density_kg_m3", "1.1"), ("blade", new string('b', 64)), ("sections.augment", "snel-1993"))),
+            With("clean", Values(("air.density_kg_m3", "1.225"), ("blade", new string('a', 64)), ("site.k", "2")))));
+
+        var section = page.Descendants("section").Single(s => s.Element("h2")?.Value == "The cases");
+        Assert.Equal(
+            ["thin", "Title of thin", "air.density_kg_m3 1.1; blade: another table; sections.augment snel-1993; no site.k"],
+            section.Descendants("tr").ElementAt(1).Elements("td").Select(td => td.Value));
+        Assert.Equal("", section.Descendants("tr").ElementAt(2).Elements("td").Last().Value);
+        Assert.Equal(
+            ["air.density_kg_m3", "1.225"], section.Elements("table").Last().Descendants("tr").ElementAt(1).Elements("td").Select(td => td.Value));
+    }
+
+    [Fact]
+    public void A_page_that_was_changed_or_is_of_something_else_is_known()
+    {
+        var page = ReportPage.Write(Report(Case("clean")), "of summary 0");
+        Assert.True(ReportPage.IsOf(page, "of summary 0"));
+        Assert.False(ReportPage.IsOf(page, "of summary 1"));
+        Assert.False(ReportPage.IsOf(page.AsSpan()[..^1], "of summary 0"));
+        Assert.False(ReportPage.IsOf([], "of summary 0"));
+        page[^40] ^= 1;
+        Assert.False(ReportPage.IsOf(page, "of summary 0"));
     }
 
     private static StudyReport Report(params ReportedCase[] cases) => new("fell", "1.2.3", "clean", [.. cases], []);

@@ -19,20 +19,20 @@ public sealed class The_report : IDisposable
         var first = File.ReadAllText(Report);
         foreach (var name in new[] { "clean", "slow", "thin-air" })
             Assert.Contains($"<td>{name}</td>", first, StringComparison.Ordinal);
-        Assert.DoesNotContain("What the last run moved", first, StringComparison.Ordinal);
+        Assert.DoesNotContain("What the last run that solved anything moved", first, StringComparison.Ordinal);
 
         var written = File.GetLastWriteTimeUtc(Report);
         Run("run", "beck");
         Assert.Equal((first, written), (File.ReadAllText(Report), File.GetLastWriteTimeUtc(Report)));
 
-        File.WriteAllText(Report, "cut short");
+        File.WriteAllText(Report, first.Replace("<h2>Cautions</h2>", "<h2>Cautious</h2>", StringComparison.Ordinal));
         Run("run", "beck");
         Assert.Equal(first, File.ReadAllText(Report));
 
         BeckStudy.Case(Path.Join(_folder.Path, "beck"), "slow", "title = \"Slow\"\n[control]\nrotor_speed_rpm = 27");
         Run("run", "beck");
         var second = File.ReadAllText(Report);
-        Assert.Contains("<h2>What the last run moved</h2>", second, StringComparison.Ordinal);
+        Assert.Contains("<h2>What the last run that solved anything moved</h2>", second, StringComparison.Ordinal);
         Assert.Contains("<td>largest thrust, kN</td>", second, StringComparison.Ordinal);
     }
 
@@ -46,6 +46,30 @@ public sealed class The_report : IDisposable
         File.WriteAllText(Report, "another one");
         Run("keep", "beck", "later");
         Assert.False(File.Exists(Path.Join(_folder.Path, "results/beck/kept/later/report.html")));
+    }
+
+    [Fact]
+    public void That_is_kept_is_verified_with_the_set()
+    {
+        Run("run", "beck");
+        Run("keep", "beck", "signed");
+        var kept = Path.Join(_folder.Path, "results/beck/kept/signed/report.html");
+        File.WriteAllText(kept, File.ReadAllText(kept).Replace("<h2>Cautions</h2>", "<h2>Cautious</h2>", StringComparison.Ordinal));
+
+        var finished = Started.Run(_folder.Path, "verify", "results/beck/kept/signed");
+
+        Assert.Equal(1, finished.ExitCode);
+        Assert.Contains("signed/report.html: report.html has other bytes than were written\n", finished.All, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void That_cannot_be_written_hides_nothing_else()
+    {
+        Directory.CreateDirectory(Report);
+        var finished = Started.Run(_folder.Path, "run", "beck");
+        Assert.Equal(3, finished.ExitCode);
+        Assert.Contains("\nclean  ", finished.Out, StringComparison.Ordinal);
+        Assert.Contains("a folder stands where", finished.Error, StringComparison.Ordinal);
     }
 
     private void Run(params string[] arguments)
