@@ -15,6 +15,7 @@ internal static class ReportStyle
         td:first-child { min-width: 16em; }
         td:first-child, th { hyphens: none; }
         .figures td:last-child { min-width: 9em; }
+        .cases td:nth-child(2) { min-width: 16em; }
         .n { text-align: right; font-variant-numeric: tabular-nums; overflow-wrap: normal; }
         .origin, footer { color: #505050; }
         .caution { border: 2px solid #b04000; padding: 0 14px 4px; margin-top: 16px; }

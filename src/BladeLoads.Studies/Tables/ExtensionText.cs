@@ -1,7 +1,6 @@
 using System.Globalization;
 using BladeLoads.Rotor.Sections;
 using BladeLoads.Studies.Cases;
-using BladeLoads.Studies.Fingerprints;
 using static BladeLoads.Studies.Tables.RecordText;
 
 namespace BladeLoads.Studies.Tables;
@@ -9,17 +8,7 @@ namespace BladeLoads.Studies.Tables;
 /// <summary>What is told of an extension, wherever it is made.</summary>
 public static class ExtensionText
 {
-    /// <summary>A doubt: the table says that it is augmented.</summary>
-    public const string AugmentedBefore = "the table is augmented for rotation already; extend it as it was before, and augment then";
-
     public const string CompleteAlready = "reaches from -180 to 180 deg already";
-
-    /// <summary>What is doubtful; null where nothing is.</summary>
-    public static string? Doubt(ExtendedPolar extended)
-        => extended.Above is { Kind: ExtensionKind.FromEnd, ShowsStall: false, JoinAngle: var angle }
-            ? $"shows no stall up to the last angle, {CanonicalText.Of(Math.Round(double.RadiansToDegrees(angle), 9))} deg; "
-                + "extended from there, the section stalls at that angle"
-            : null;
 
     /// <param name="origin">Of the aspect ratio: <c> of blade.csv</c>; empty where it was given.</param>
     public static string Method(double aspectRatio, string origin, ExtensionJoin join)

@@ -23,7 +23,7 @@ internal sealed record SectionExtension(double AspectRatio, ExtensionJoin Join)
             var extended = PolarExtension.Extend(section.Polars[i], AspectRatio, Join);
             polars.Add(extended.Polar);
             record.Add(section.Name + ": " + At(section.Polars[i].Reynolds) + ExtensionText.Of(extended));
-            if (ExtensionText.Doubt(extended) is { } text)
+            if (ExtensionDoubts.Of(section.Polars[i], extended).FirstOrDefault() is { } text)
                 doubt ??= new InputFinding(at.File, at.Line, at.Column, text);
         }
         return new ExtendedSection(Section.FromPolars(section.Name, polars), record.ToImmutable(), doubt, null);

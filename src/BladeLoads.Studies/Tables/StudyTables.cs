@@ -80,7 +80,7 @@ internal sealed class StudyTables(StudyFolder folder, Findings findings)
             return ([.. sound.Select(table => table.Section!)], [], []);
         foreach (var table in sound)
             if (table.Augmented is { } note)
-                findings.Doubt(new Place(table.Input.File, note.Line, 1), ExtensionText.AugmentedBefore);
+                findings.Doubt(new Place(table.Input.File, note.Line, 1), ExtensionDoubts.AugmentedBefore);
         var extended = sound.Select(extension.Of).ToList();
         foreach (var section in extended)
             if (section.Doubt is { } doubt)

@@ -86,11 +86,16 @@ public sealed class Extended_and_augmented : IDisposable
     {
         Directory.CreateDirectory(In("lab"));
         File.WriteAllText(In("lab/rising.csv"), "alpha_deg,cl,cd\n-5,-0.5,0.01\n0,0,0.01\n8,0.8,0.01\n");
+        File.WriteAllText(In("lab/falling.csv"), "alpha_deg,cl,cd\n-10,0.8,0.02\n0,0,0.01\n10,-0.8,0.02\n");
+        // Drag at 92.5 deg by hand: B1 sin2 87.5 + B2 cos 87.5 through (14 deg, 1, 0.1), less 2.09; lift -0.7 of the relation, less 0.142.
+        File.WriteAllText(In("lab/late.csv"), "alpha_deg,cl,cd\n-9,-0.8,0.1\n-6,-0.6,0.02\n0,0,0.01\n10,0.9,0.02\n14,1,0.1\n20,0.8,0.3\n89.9,0.142,2.09\n");
         File.WriteAllText(In("lab/turned.csv"), "# here\n# Augmented: by hand\n" + T18);
 
         var finished = Succeed("polar", "extend", "lab", "--out", "whole", "--aspect-ratio", "12");
 
         Assert.Equal("""
+            lab/falling.csv:2: doubt: lift is -0.8 at the last angle, 10 deg; extended from there, the section hardly lifts at all: is the sign of lift or angle turned?
+            lab/late.csv:2: doubt: from the last row that is kept, 89.9 deg, to the next, 92.5 deg, lift goes by -0.182685 and drag by -0.765516: the table and the relation do not meet
             lab/rising.csv:2: doubt: shows no stall up to the last angle, 8 deg; extended from there, the section stalls at that angle
             lab/turned.csv:2: doubt: the table is augmented for rotation already; extend it as it was before, and augment then
 
@@ -104,19 +109,30 @@ public sealed class Extended_and_augmented : IDisposable
     }
 
     [Fact]
+    public void A_dip_that_is_taken_for_stall_is_doubted()
+    {
+        File.WriteAllText(In("dip.csv"), "alpha_deg,cl,cd\n-14.2,-0.84,0.05\n-10,-0.7,0.03\n-8,-0.56,0.03\n-6.1,-0.64,0.02\n0,0,0.01\n10,0.9,0.02\n14,1,0.1\n20,0.8,0.3\n");
+
+        Assert.Equal(
+            "dip.csv:2: doubt: joined at stall, -6.1 deg with lift -0.64, but of the rows that are left out one lifts more: -0.84 at -14.2 deg; "
+                + "if what is between is a dip and no stall, join at the end, or mend the rows\n",
+            Succeed("polar", "extend", "dip.csv", "--out", "new", "--aspect-ratio", "11", "--join", "stall").Error);
+    }
+
+    [Fact]
     public void An_augmented_table_says_for_which_place_and_is_not_augmented_again()
     {
         File.WriteAllText(In("t18.csv"), T18);
 
         var finished = Succeed("polar", "augment", "t18.csv", "--out", "turned", "--method", "snel-1993", "--chord-ratio", "0.4", "--radius-ratio", "0.3");
 
-        // 3 x 0.4^2 = 0.48 (snel1993). Potential lift by the rows within 4 degrees of zero lift: 0.44/4 a degree; at 20 degrees
-        // 0.11 x 180/pi x sin 20 = 2.15559, and 0.8 + 0.48 x (2.15559 - 0.8) = 1.45069.
+        // 3 x 0.4^2 = 0.48 (snel1993). Potential lift by the rows within 4 degrees of zero lift: 0.44/4 a degree; at 30 degrees
+        // 0.11 x 180/pi x sin 30 = 3.15127, and 0.8, the end value, + 0.48 x (3.15127 - 0.8) = 1.92861.
         string[] record =
         [
             "augmented: snel-1993, c/r 0.4, r/R 0.3",
             "lift goes 0.48 of the way to potential lift, drag 0 of the way to that at zero lift; fades from 30 to 50 deg; moments as they were",
-            "at Reynolds number 1e6: lift 0.8 -> 1.45069 at 20 deg, where it moves most; drag as it was; "
+            "at Reynolds number 1e6: lift 0.8 -> 1.92861 at 30 deg, where it moves most; drag as it was; "
                 + "12 rows added up to 50 deg, where the end value fades back",
         ];
         Assert.Equal($"{record[0]}\n{record[1]}\nt18.csv: {record[2]}\nset: turned\n", finished.Out);

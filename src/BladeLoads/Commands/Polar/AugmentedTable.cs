@@ -60,19 +60,22 @@ internal static class AugmentedTable
     {
         if (ReferenceEquals(old, now))
             return $"as it was: {WithoutLift(old)}";
-        var rows = Enumerable.Range(0, old.Angles.Length).ToList();
         var added = now.Angles.Length - old.Angles.Length;
-        return $"{Most("lift", rows.MaxBy(i => Math.Abs(now.Lift[i] - old.Lift[i])), old.Lift, now.Lift, old)}; "
-            + Most("drag", rows.MaxBy(i => Math.Abs(now.Drag[i] - old.Drag[i])), old.Drag, now.Drag, old)
+        return $"{Most("lift", old.Lift, now.Lift, now)}; {Most("drag", old.Drag, now.Drag, now)}"
             + (added == 0
                 ? ""
                 : $"; {Count.Of(added, "row")} added up to 50 deg, where the end value fades back");
     }
 
-    private static string Most(string what, int row, ImmutableArray<double> old, ImmutableArray<double> now, Rotor.Sections.Polar polar)
-        => old[row] == now[row]
+    // In rows that were added, the end value of the old table stood before.
+    private static string Most(string what, ImmutableArray<double> old, ImmutableArray<double> now, Rotor.Sections.Polar polar)
+    {
+        double Before(int row) => old[Math.Min(row, old.Length - 1)];
+        var most = Enumerable.Range(0, now.Length).MaxBy(row => Math.Abs(now[row] - Before(row)));
+        return Before(most) == now[most]
             ? $"{what} as it was"
-            : $"{what} {Brief(old[row])} -> {Brief(now[row])} at {Degrees(polar.Angles[row])} deg, where it moves most";
+            : $"{what} {Brief(Before(most))} -> {Brief(now[most])} at {Degrees(polar.Angles[most])} deg, where it moves most";
+    }
 
     private static string WithoutLift(Rotor.Sections.Polar polar)
         => polar.IsRound ? "no lift to augment" : "lift does not rise through 0 within 20 deg of 0";

@@ -31,9 +31,8 @@ internal static class ExtendedTable
             "extended", How(table, asked),
             [.. table.Polars.Zip(extended, (rows, e) => At(rows.Reynolds) + ExtensionText.Of(e))])
         {
-            Doubts = [.. table.Augmented is var (line, _) ? [new InputFinding(file, line, 0, ExtensionText.AugmentedBefore)] : (InputFinding[])[],
-                .. extended.Select((e, i) => (Text: ExtensionText.Doubt(e), Line: table.RowLines[i][0]))
-                .Where(doubt => doubt.Text is not null).Select(doubt => new InputFinding(file, doubt.Line, 0, doubt.Text!))],
+            Doubts = [.. table.Augmented is var (line, _) ? [new InputFinding(file, line, 0, ExtensionDoubts.AugmentedBefore)] : (InputFinding[])[],
+                .. extended.SelectMany((e, i) => ExtensionDoubts.Of(polars[i], e).Select(text => new InputFinding(file, table.RowLines[i][0], 0, text)))],
         };
     }
 
