@@ -57,16 +57,18 @@ public static class StudyReportFile
     }
 
     private static byte[]? ReadIfOf(string path, string stamp)
-        => File.Exists(path) && new FileInfo(path).Length <= LargestReport && File.ReadAllBytes(path) is var bytes && ReportPage.IsOf(bytes, stamp) ? bytes : null;
+        => File.Exists(path) && new FileInfo(path).Length <= LargestReport && File.ReadAllBytes(path) is var bytes && ReportPage.IsOf(bytes, stamp)
+            ? bytes : null;
 
     private static ImmutableArray<ReportedCase> Cases(ImmutableArray<SummaryRow> rows, Study study, ResultsFolder results)
     {
         var files = study.Cases.ToDictionary(c => c.Name, c => c.File, StringComparer.Ordinal);
+        var curves = 0;
         return [.. rows.Select(row =>
         {
             var file = files.GetValueOrDefault(row.Case, "");
             return row.Summary is not null && ReceiptFile.Read(results.Case(row.Case)) is ReceiptReading.Readable { Receipt: var receipt }
-                ? new ReportedCase(row, file, receipt, CurveOf(results.Case(row.Case)))
+                ? new ReportedCase(row, file, receipt, curves++ < StudyReport.MostCurves ? CurveOf(results.Case(row.Case)) : null)
                 : new ReportedCase(row, file, null, null, ReasonOf(row, study, results));
         })];
     }

@@ -23,7 +23,9 @@ internal static class CasesSection
             Table(
                 ^0.., ["case", "title", $"differs from {reference.Row.Case} in"],
                 solved.Take(MostCases).Select(c => (string[])[c.Row.Case, c.Row.Title, Differences(c.Receipt!, reference.Receipt!)])).Class("cases"),
-            solved.Count > MostCases ? Text("p", string.Create(CultureInfo.InvariantCulture, $"{solved.Count - MostCases} more cases are in summary.csv.")) : null,
+            solved.Count > MostCases
+                ? Text("p", string.Create(CultureInfo.InvariantCulture, $"{solved.Count - MostCases} more cases are in summary.csv."))
+                : null,
             Text("h3", $"Values of {reference.Row.Case}"),
             Text("p", "Keys as in case files, with what was left out filled in; of tables the SHA-256 of their values."),
             Table(^0.., ["key", "value"], reference.Receipt!.Values.OrderBy(v => v.Key, StringComparer.Ordinal).Select(v => (string[])[v.Key, v.Value])));

@@ -8,7 +8,8 @@ internal static class MarkText
     public static string Of(PointMarks mark) => mark switch
     {
         PointMarks.Unbalanced => "no inflow angle balances blade force and momentum at an element; the figures of the point are blank",
-        PointMarks.SeveralBalances => "more than one inflow angle balances, as in a sharp stall; the one with attached flow was taken: power and loads about there are uncertain",
+        PointMarks.SeveralBalances => "more than one inflow angle balances, as in a sharp stall; the one with attached flow was taken: power and loads about there "
+            + "are uncertain",
         PointMarks.OutsideAngles => "an angle of attack is outside its table; the end value of the table served",
         PointMarks.OutsideReynolds => "a Reynolds number is outside its tables; the nearest table served",
         PointMarks.ExceedsRated => "electrical power is above rated and nothing holds it",

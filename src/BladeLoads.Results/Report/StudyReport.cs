@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using BladeLoads.Results.Comparison;
+using BladeLoads.Results.Pictures;
 using BladeLoads.Results.Receipts;
 using BladeLoads.Results.Tables;
 
@@ -12,6 +13,9 @@ namespace BladeLoads.Results.Report;
 public sealed record StudyReport(
     string Study, string ToolVersion, string? Baseline, ImmutableArray<ReportedCase> Cases, ImmutableArray<MovedCase> Moved)
 {
+    /// <summary>More curves need not be given: they would not be drawn.</summary>
+    public const int MostCurves = CurveSection.MostPictures * CurvePicture.MostLines;
+
     /// <summary>Name of the file.</summary>
     public const string FileName = "report.html";
 }

@@ -79,6 +79,10 @@ public sealed class ReportPageTests : IDisposable
 
         Assert.Equal(
             ["cases/sweep.toml (1 of 2)", "cases/sweep.toml (2 of 2)", "cases/alone.toml"], page.Descendants("figcaption").Select(f => f.Value));
+        Assert.DoesNotContain(page.Descendants("p"), p => p.Value.Contains("not drawn", StringComparison.Ordinal));
+        Assert.Contains(
+            Page(Report([.. cases, Case("further") with { Curve = null }])).Descendants("p"),
+            p => p.Value == "1 more case is not drawn; every curve is in its power-curve.csv.");
         var svg = Encoding.UTF8.GetString(Convert.FromBase64String(page.Descendants("img").ElementAt(1).Attribute("src")!.Value.Split(',')[1]));
         Assert.Equal(["sweep~12", "sweep~13"], XDocument.Parse(svg).Descendants().Where(e => e.Name.LocalName == "text" && e.Value.StartsWith("sweep~", StringComparison.Ordinal)).Select(e => e.Value));
     }
