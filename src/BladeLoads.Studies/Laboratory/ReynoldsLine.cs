@@ -105,10 +105,11 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     [GeneratedRegex(
         """
         (?<![\p{L}\p{N}_])
-        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))? 
-              (?:,?\s+(?:(?:based\s+)?on\s+)?(?:the\s+)?(?:mean\s+|section\s+|aerofoil\s+)?chord(?:\s+length)?(?![\p{L}\p{N}_]))?
+        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))?
+              (?:,?\s+(?:(?:based\s+)?on\s+)?(?:the\s+)?(?:mean\s+)?(?:aerodynamic\s+|section\s+|aerofoil\s+)?chord(?:\s+length)?(?![\p{L}\p{N}_]))?
               (?:,?\s+re(?![\p{L}\p{N}_]))?)
-          | re(?:_(?<suffix>c|chord|nom|mean|max|min|crit|unit))? | rec(?=\s*=) | rn ) (?![\p{L}\p{N}_])
+          | (?:re[-\s]+(?:numbers?|no\.?|nr\.?) | reyn?\.? | re\.)(?=\s*[=:]) | rec(?=\s*=)
+          | re(?:_(?<suffix>c|chord|nom|mean|max|min|crit|unit))? | rn ) (?![\p{L}\p{N}_])
         \s*
         (?<remark> [(\[{<][^)\]}>]*[)\]}>] | [x×*·/]\s*(?:10\s*\^?\s*[-−]?\s*[0-9⁰¹²³⁴⁵⁶⁷⁸⁹]+ | 1e[-+]?[0-9]+) )?
         (?:

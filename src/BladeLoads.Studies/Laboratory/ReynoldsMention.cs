@@ -20,7 +20,7 @@ internal static partial class ReynoldsMention
         (?: reynolds(?![\p{L}\p{N}]) (?:
               [^;|]*? (?<!\bin\s+|[(\[{]\s*) \b(?:millions?|thousands?|hundreds?|mio|mln|millionen|tausend)\b
             | [^;|=:]* [=:] \s* (?:(?:about|approx\.?|ca\.?)\s+)? (?:one|two|three|four|five|six|seven|eight|nine|ten|twelve|twenty|half|a\shalf)\b )
-          | (?: re(?:_\w+|c)? | rn ) (?![\p{L}\p{N}_]) (?:
+          | (?: re(?:_\w+|c|yn?)?\.? (?:[-\s]+(?:numbers?|no\.?|nr\.?))? | rn ) (?![\p{L}\p{N}_]) (?:
               \s* [=≈] [^,;|=]*? (?: [0-9] | \b(?:one|two|three|four|five|six|seven|eight|nine|ten|twelve|twenty|half|millions?|thousands?|hundred)\b )
             | (?:\s*:)? (?:\s+\p{L}+\.?){0,4} \s+ (?:million|thousand|mio|mln|tausend)\b
             | (?:\s*:)? (?:\s+\p{L}+\.?){0,2} \s* [:~≈+−–—-]? \s* [0-9][0-9.,]*
