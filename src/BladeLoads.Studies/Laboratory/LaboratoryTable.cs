@@ -100,24 +100,27 @@ public sealed record LaboratoryTable(
         SortedDictionary<double, List<LaboratoryRow>> blocks, ReadingRequest request, ReadingRecord record, string file, TableErrors errors)
     {
         var polars = ImmutableArray.CreateBuilder<PolarRows>();
+        // Found by Reynolds number and angle, told by line: those told by their number alone are the last ones.
+        var wrong = new List<(int Line, int Column, string Text)>();
         foreach (var (reynolds, rows) in blocks)
         {
-            var order = new SweepOrder(
-                request.Sweep, (line, column, text) => errors.Add("", new Place(file, line, column), text), record.LeaveOut);
+            var order = new SweepOrder(request.Sweep, (line, column, text) => wrong.Add((line, column, text)), record.LeaveOut);
             var sorted = rows.Count == 0 ? [] : order.Sort(rows);
             if (sorted is null)
                 continue;
             var at = double.IsNaN(reynolds) ? "" : $" at Reynolds number {CanonicalText.Of(reynolds)}";
             if (sorted.Count < PolarLimits.FewestRows)
-                errors.Add("", new Place(file, sorted.Count == 0 ? 0 : sorted[0].Line, 0), string.Create(CultureInfo.InvariantCulture,
+                wrong.Add((sorted.Count == 0 ? 0 : sorted[0].Line, 0, string.Create(CultureInfo.InvariantCulture,
                     $"has {sorted.Count} row{(sorted.Count == 1 ? "" : "s")}{at}; a polar needs three or more")
                     + (blocks.Count > PolarLimits.FewestRows
                         ? "; where each row has a measured Reynolds number of its own, say --columns reynolds=none and --reynolds"
-                        : ""));
+                        : "")));
             if (order.Done is { } done)
                 record.Order(done + at);
             polars.Add(new PolarRows(reynolds, [.. sorted.Select(row => row.Values)]));
         }
+        foreach (var (line, column, text) in wrong.OrderBy(one => one.Line).ThenBy(one => one.Column))
+            errors.Add("", new Place(file, line, column), text);
         return polars.ToImmutable();
     }
 

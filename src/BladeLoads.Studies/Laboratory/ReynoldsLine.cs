@@ -24,7 +24,7 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     {
         var text = whole.Length <= LongestLook ? whole : whole[..LongestLook];
         // Most lines of a file are asked, and patterns are slow.
-        if (text.AsSpan().IndexOfAnyInRange('0', '9') < 0 || text.AsSpan().IndexOfAny('r', 'R') < 0)
+        if (text.AsSpan().IndexOfAny('r', 'R') < 0)
             return null;
         var values = new HashSet<double>();
         string? problem = null;
@@ -36,7 +36,7 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
                 || ReynoldsSurroundings.Compares(match.Groups["remark"].Value + text[(match.Index + match.Length)..]))
                 problem ??= NotUnderstood;
         }
-        problem ??= values.Count > 1 ? Several : null;
+        problem ??= values.Count > 1 ? Several : values.Count == 0 && ReynoldsMention.IsIn(text) ? NotUnderstood : null;
         return problem is not null ? new ReynoldsLine(line, whole.Trim(), double.NaN, problem)
             : values.Count == 1 ? new ReynoldsLine(line, whole.Trim(), values.First(), "")
             : null;
@@ -105,15 +105,18 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     [GeneratedRegex(
         """
         (?<![\p{L}\p{N}_])
-        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))? (?:,?\s+re(?![\p{L}\p{N}_]))?)
+        (?: (?<whole>reynolds (?:[-\s]*(?:numbers?|no\.?|nr\.?|zahl))?
+              (?:,?\s+(?:(?:based\s+)?on\s+)?(?:the\s+)?(?:mean\s+)?(?:aerodynamic\s+|section\s+|aerofoil\s+)?chord(?:\s+length)?(?![\p{L}\p{N}_]))?
+              (?:,?\s+re(?![\p{L}\p{N}_]))?)
+          | (?:re[-\s]+(?:numbers?|no\.?|nr\.?) | reyn?\.? | re\.)(?=\s*[=:]) | rec(?=\s*=)
           | re(?:_(?<suffix>c|chord|nom|mean|max|min|crit|unit))? | rn ) (?![\p{L}\p{N}_])
         \s*
         (?<remark> [(\[{<][^)\]}>]*[)\]}>] | [x×*·/]\s*(?:10\s*\^?\s*[-−]?\s*[0-9⁰¹²³⁴⁵⁶⁷⁸⁹]+ | 1e[-+]?[0-9]+) )?
         (?:
           [\s:=;,|"~≈]* (?:(?:is|of|about)\s+)?
-          (?<number> (?:[0-9][0-9.,'’\u00A0\u2009\u202F\x20]* | [.,][0-9]+) (?:(?<=[0-9.])[ed][-+]?[0-9]+)? )
+          (?<number> (?:[0-9](?:[0-9.,'’\u00A0\u2009\u202F\x20] | _(?=[0-9]{3}(?![0-9])))* | [.,][0-9]+) (?:(?<=[0-9.])[ed][-+]?[0-9]+)? )
           (?: \s*[x×*·]\s*10\s*(?:\^|\*\*)?\s*(?<times>[0-9⁰¹²³⁴⁵⁶⁷⁸⁹]{1,2})(?![0-9])
-            | \s*(?<million>millions?|mill?\b\.?|mio\b\.?|(?-i:M)(?![\p{L}\p{N}]))
+            | \s*(?<million>millions?|mill?\b\.?|mio\b\.?|mln\b\.?|(?-i:M)(?![\p{L}\p{N}]))
             | \s*(?<thousand>thousand|tsd\b\.?|k(?![\p{L}\p{N}])) )?
         )?
         """,
@@ -137,7 +140,7 @@ internal readonly partial record struct ReynoldsLine(int Line, string Text, doub
     private static partial Regex NumbersInARow();
 
     [GeneratedRegex(
-        @"million|\bmio\b|10\s*\^?\s*[-−]?\s*[6⁶](?![0-9])|\be[-+]?0?6\b|1e[-+]?0?6\b",
+        @"million|\bmio\b|\bmln\b|10\s*\^?\s*[-−]?\s*[6⁶](?![0-9])|\be[-+]?0?6\b|1e[-+]?0?6\b",
         RegexOptions.IgnoreCase | RegexOptions.CultureInvariant)]
     private static partial Regex Millions();
 

@@ -18,7 +18,7 @@ internal static partial class ReynoldsSurroundings
     private static readonly HashSet<string> Harmless = Words(
         "the a an is chord stream freestream free nominal nom mean average test tested measured run polar polars section profile aerofoil data same "
         + "clean soiled rough fouled eroded smooth tripped fixed forced natural transition approx approximately based number reynolds "
-        + "millions million thousand thousands mio c re");
+        + "millions million thousand thousands mio mln c re");
 
     // What follows one of these is said of something else.
     private static readonly HashSet<string> Prepositions = Words("at for with by in and of on bei mit und");
@@ -111,7 +111,7 @@ internal static partial class ReynoldsSurroundings
     [GeneratedRegex(
         """
         (?=[0-9]) (?<![\p{L}\p{N}_.,^]) (?<!\b\p{L}{1,2}\s*=\s*)
-        [0-9][0-9.,]* (?: [ed]\+?0?[4-8](?![0-9]) | \s*[x×*·]\s*10\s*(?:\^|\*\*)?\s*[4-8⁴⁵⁶⁷⁸](?![0-9]) | \s*(?:millions?|mio)\b )
+        [0-9][0-9.,]* (?: [ed]\+?0?[4-8](?![0-9]) | \s*[x×*·]\s*10\s*(?:\^|\*\*)?\s*[4-8⁴⁵⁶⁷⁸](?![0-9]) | \s*(?:millions?|mio|mln)\b )
         """,
         RegexOptions.IgnoreCase | RegexOptions.IgnorePatternWhitespace | RegexOptions.CultureInvariant)]
     private static partial Regex WithAPower();
@@ -120,7 +120,7 @@ internal static partial class ReynoldsSurroundings
     [GeneratedRegex(
         """
         (?=[0-9]) (?<![\p{L}\p{N}_.,^/-]) (?<!\b\p{L}{1,2}\s*=\s*)
-        (?: (?!(?:19|20)[0-9]{6}(?![0-9])) [0-9]{5,9} | [0-9]{1,3}(?:[ ',.][0-9]{3}){2} ) (?![\p{L}\p{N}_/-]|[.,][0-9])
+        (?: (?!(?:19|20)[0-9]{6}(?![0-9])) [0-9]{5,9} | [0-9]{1,3}(?:[ ',._][0-9]{3}){2} ) (?![\p{L}\p{N}_/-]|[.,][0-9])
         """,
         RegexOptions.IgnorePatternWhitespace | RegexOptions.CultureInvariant)]
     private static partial Regex WithoutAPower();

@@ -7,7 +7,7 @@ namespace BladeLoads.Studies.Laboratory;
 /// <summary>Reynolds numbers as people write them: with thousands set apart, in millions, with either decimal sign.</summary>
 internal static class ReynoldsText
 {
-    private const string Groupers = " '\u2019\u00A0\u2009\u202F";
+    private const string Groupers = " '_\u2019\u00A0\u2009\u202F";
 
     /// <summary>The plausible numbers that the text can mean, the smallest first, whatever its decimal sign is.</summary>
     /// <param name="power">Of ten, that the number is to be multiplied by.</param>

@@ -175,6 +175,46 @@ public sealed class Clean_against_soiled : IDisposable
     }
 
     [Fact]
+    public void A_place_that_is_no_folder_of_another_set_is_refused_with_one_that_would_do()
+    {
+        File.Copy(In("beck/polars/clean/beck-18.csv"), In("alone.csv"));
+        Directory.CreateDirectory(In("beck/polars/aged"));
+
+        string[] set = ["polar", "scale", "beck/polars/clean", "--drag-floor", "2", "--out"];
+        string[] table = ["polar", "scale", "beck/polars/clean/beck-18.csv", "--drag-floor", "2", "--out"];
+        string[] alone = ["polar", "scale", "alone.csv", "--drag-floor", "2", "--out"];
+        const string within = "stands within the set that is read, and a set holds no other";
+        const string file = "ends as a table does, and --out takes the folder of a set";
+        Assert.Equal(
+            [
+                "'/' is the topmost folder of all and cannot be a set; give the folder of one\n",
+                "'/' is the topmost folder of all and cannot be a set; give the folder of one\n",
+                $"'beck/polars/clean/sub' {within}; 'beck/polars/sub', beside it, would do\n",
+                $"'beck/polars/clean/sub/x.csv' {within}; 'beck/polars/x', beside it, would do\n",
+                $"'beck/polars/clean/aged' {within}; give a folder outside it\n",
+                $"'{In("beck/polars/clean/sub")}' {within}; '{In("beck/polars/sub")}', beside it, would do\n",
+                $"'soiled/x.csv' {file}; 'soiled/x' would do\n",
+                $"'soiled/x.csv' {file}; 'soiled' would do, and the table goes there as beck-18.csv\n",
+                $"'soiled/x.CSV/' {file}; 'soiled' would do, and the table goes there as alone.csv\n",
+                $"'x.csv' {file}; 'x' would do\n",
+                $"'{In("soiled/x.csv")}' {file}; '{In("soiled")}' would do, and the table goes there as alone.csv\n",
+            ],
+            new string[][]
+            {
+                [.. set, "/"], [.. alone, "/"],
+                [.. set, "beck/polars/clean/sub"], [.. table, "beck/polars/clean/sub/x.csv"], [.. table, "beck/polars/clean/aged"],
+                [.. table, In("beck/polars/clean/sub")],
+                [.. set, "soiled/x.csv"], [.. table, "soiled/x.csv"], [.. alone, "soiled/x.CSV/"], [.. alone, "x.csv"], [.. alone, In("soiled/x.csv")],
+            }.Select(Refuse));
+        Assert.Equal(["alone.csv", "beck"], Names(""));
+        Succeed([.. alone, "soiled"]);
+        Assert.Equal(["alone.csv"], Names("soiled"));
+        File.WriteAllText(In("set.toml"), "");
+        Assert.Equal(
+            $"'again' {within}; '{Path.Join("..", "again")}', beside it, would do\n", Refuse([.. alone, "again"]));
+    }
+
+    [Fact]
     public void Every_error_of_a_set_is_told_at_once_and_nothing_is_written()
     {
         Set("a", "alpha_deg,cl,cd\n0,x,0.01\n");

@@ -125,6 +125,24 @@ internal static partial class TablesThatAreRefused
             lab.txt:5:1: alpha 14 has cl 1.2 cd 0.05 here and cl 1.3 cd 0.05 in line 4; which is meant cannot be told, keep one
             lab.txt:6:1: alpha 14 has cl 1.1 cd 0.05 here and cl 1.2 cd 0.05 in line 5; which is meant cannot be told, keep one
             """),
+        new("two sweeps of other values, taken together", "--sweep all", """
+            alpha cl cd
+            0 0.1 0.009
+            2 0.3 0.01
+            4 0.5 0.011
+            6 0.7 0.012
+            8 0.8 0.02
+            6 0.6 0.013
+            4 0.4 0.012
+            2 0.2 0.011
+            0 0 0.01
+
+            """, """
+            lab.txt:7:1: alpha 6 has cl 0.6 cd 0.013 here and cl 0.7 cd 0.012 in line 5; which is meant cannot be told, keep one
+            lab.txt:8:1: alpha 4 has cl 0.4 cd 0.012 here and cl 0.5 cd 0.011 in line 4; which is meant cannot be told, keep one
+            lab.txt:9:1: alpha 2 has cl 0.2 cd 0.011 here and cl 0.3 cd 0.01 in line 3; which is meant cannot be told, keep one
+            lab.txt:10:1: and 1 more like it
+            """),
         new("words between rows", "", """
             alpha cl cd
             0 0.1 0.009

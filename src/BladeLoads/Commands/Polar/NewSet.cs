@@ -76,7 +76,12 @@ internal sealed class NewSetOptions(string verb)
 {
     public Argument<string> Source { get; } = new("table or set") { Description = "a polar table, or the folder of a set of them" };
 
-    public Option<string> Folder { get; } = new("--out") { Description = "the folder of the set that is made", HelpName = "folder", Required = true };
+    public Option<string> Folder { get; } = new("--out")
+    {
+        Description = "the folder of the set that is made, or of the one that gets the table; the folder it stands in must be there",
+        HelpName = "folder",
+        Required = true,
+    };
 
     public Option<string[]> Only { get; } = new("--only")
     {

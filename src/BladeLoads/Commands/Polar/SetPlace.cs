@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using BladeLoads.Results.Publishing;
 using BladeLoads.Results.Wording;
+using BladeLoads.Studies.Tables;
 
 namespace BladeLoads.Commands.Polar;
 
@@ -12,6 +13,7 @@ namespace BladeLoads.Commands.Polar;
 internal sealed record SetPlace(string Folder, string Source, bool IsWholeSet, bool Replace)
 {
     private const int NamesShown = 4;
+    private const string TableEnding = ".csv";
 
     /// <param name="names">Of the files that are to be written.</param>
     /// <exception cref="WrongUseException">Nothing can be written there: the message says why, and what would do.</exception>
@@ -20,14 +22,19 @@ internal sealed record SetPlace(string Folder, string Source, bool IsWholeSet, b
         if (Folder.Length == 0)
             throw new WrongUseException("--out is empty; give the folder of the set that is to be made");
         var folder = Path.TrimEndingDirectorySeparator(Path.GetFullPath(Folder));
+        if (Path.GetDirectoryName(folder) is not { } above)
+            throw new WrongUseException($"'{Folder}' is the topmost folder of all and cannot be a set; give the folder of one");
         var source = Path.TrimEndingDirectorySeparator(Path.GetFullPath(IsWholeSet ? Source : Path.GetDirectoryName(Path.GetFullPath(Source))!));
         if (Real(folder) == Real(source))
             throw new WrongUseException($"'{Folder}' holds what is read, which stays as it is; give the folder of another set");
+        CheckIsOutside(folder, source);
+        if (folder.EndsWith(TableEnding, StringComparison.OrdinalIgnoreCase))
+            throw new WrongUseException($"'{Folder}' ends as a table does, and --out takes the folder of a set; {FolderInstead(folder, source, names[0])}");
         if (new FileInfo(folder).LinkTarget is not null)
             throw new WrongUseException($"'{Folder}' is a link; give the folder itself");
         if (File.Exists(folder))
             throw new WrongUseException($"'{Folder}' is a file; give a folder");
-        if (Path.GetDirectoryName(folder) is not { } above || !Directory.Exists(above))
+        if (!Directory.Exists(above))
             throw new WrongUseException($"there is no folder for '{Folder}' to stand in; make it first");
         if (!Directory.Exists(folder))
             return;
@@ -65,6 +72,34 @@ internal sealed record SetPlace(string Folder, string Source, bool IsWholeSet, b
         disk.CreateFolder(Folder);
         return WholeFile.Write(Path.Join(Folder, file.Name), file.Bytes.Span, Replace, disk);
     }
+
+    private void CheckIsOutside(string folder, string source)
+    {
+        // A table beside which the user works is no set by that alone, and a folder there is the usual place for another.
+        if (!IsWholeSet && source == Directory.GetCurrentDirectory() && !File.Exists(Path.Join(source, StoredSet.SetFileName)))
+            return;
+        if (Path.GetDirectoryName(source) is not { } above || !Real(folder).StartsWith(Real(source) + Path.DirectorySeparatorChar, StringComparison.Ordinal))
+            return;
+        var beside = WithoutEnding(Path.Join(above, Path.GetFileName(folder)));
+        throw new WrongUseException($"'{Folder}' stands within the set that is read, and a set holds no other; "
+            + (Path.Exists(beside) ? "give a folder outside it" : $"'{AsWritten(beside)}', beside it, would do"));
+    }
+
+    private string FolderInstead(string folder, string source, string table)
+    {
+        var above = Path.GetDirectoryName(folder)!;
+        return IsWholeSet || Real(above) == Real(source) || Path.GetDirectoryName(above) is null
+            ? $"'{AsWritten(WithoutEnding(folder))}' would do"
+            : $"'{AsWritten(above)}' would do, and the table goes there as {table}";
+    }
+
+    private static string WithoutEnding(string folder)
+        => folder.EndsWith(TableEnding, StringComparison.OrdinalIgnoreCase) && Path.GetFileName(folder).Length > TableEnding.Length
+            ? folder[..^TableEnding.Length]
+            : folder;
+
+    // From the root only where the user wrote it so.
+    private string AsWritten(string path) => Path.IsPathRooted(Folder) ? path : Path.GetRelativePath(Directory.GetCurrentDirectory(), path);
 
     private void CheckTable(string path)
     {
