@@ -19,7 +19,8 @@ internal static partial class ReynoldsMention
         (?<![\p{L}\p{N}_])
         (?: reynolds(?![\p{L}\p{N}]) (?:
               [^;|]*? (?<!\bin\s+|[(\[{]\s*) \b(?:millions?|thousands?|hundreds?|mio|mln|millionen|tausend)\b
-            | [^;|=:]* [=:] \s* (?:(?:about|approx\.?|ca\.?)\s+)? (?:one|two|three|four|five|six|seven|eight|nine|ten|twelve|twenty|half|a\shalf)\b )
+            | [^;|=:]* [=:] \s* (?:(?:about|approx\.?|ca\.?)\s+)?
+              (?:one|two|three|four|five|six|seven|eight|nine|ten|twelve|twenty|half|a\shalf)\b )
           | (?: re(?:_\w+|c|yn?)?\.? (?:[-\s]+(?:numbers?|no\.?|nr\.?))? | rn ) (?![\p{L}\p{N}_]) (?:
               \s* [=≈] [^,;|=]*? (?: [0-9] | \b(?:one|two|three|four|five|six|seven|eight|nine|ten|twelve|twenty|half|millions?|thousands?|hundred)\b )
             | (?:\s*:)? (?:\s+\p{L}+\.?){0,4} \s+ (?:million|thousand|mio|mln|tausend)\b

@@ -29,7 +29,8 @@ internal sealed record SetPlace(string Folder, string Source, bool IsWholeSet, b
             throw new WrongUseException($"'{Folder}' holds what is read, which stays as it is; give the folder of another set");
         CheckIsOutside(folder, source);
         if (folder.EndsWith(TableEnding, StringComparison.OrdinalIgnoreCase))
-            throw new WrongUseException($"'{Folder}' ends as a table does, and --out takes the folder of a set; {FolderInstead(folder, source, names[0])}");
+            throw new WrongUseException(
+                $"'{Folder}' ends as a table does, and --out takes the folder of a set; {FolderInstead(folder, source, names[0])}");
         if (new FileInfo(folder).LinkTarget is not null)
             throw new WrongUseException($"'{Folder}' is a link; give the folder itself");
         if (File.Exists(folder))
@@ -78,7 +79,8 @@ internal sealed record SetPlace(string Folder, string Source, bool IsWholeSet, b
         // A table beside which the user works is no set by that alone, and a folder there is the usual place for another.
         if (!IsWholeSet && source == Directory.GetCurrentDirectory() && !File.Exists(Path.Join(source, StoredSet.SetFileName)))
             return;
-        if (Path.GetDirectoryName(source) is not { } above || !Real(folder).StartsWith(Real(source) + Path.DirectorySeparatorChar, StringComparison.Ordinal))
+        if (Path.GetDirectoryName(source) is not { } above
+            || !Real(folder).StartsWith(Real(source) + Path.DirectorySeparatorChar, StringComparison.Ordinal))
             return;
         var beside = WithoutEnding(Path.Join(above, Path.GetFileName(folder)));
         throw new WrongUseException($"'{Folder}' stands within the set that is read, and a set holds no other; "
