@@ -17,13 +17,14 @@ public static class StudyReportFile
 
     /// <summary>Writes <c>report.html</c> where results were just made, or where the one that is there is of another summary.</summary>
     /// <param name="rows">Of the whole study, as its summary has them.</param>
+    /// <param name="summary">The bytes of <c>summary.csv</c>.</param>
     /// <exception cref="NoRoomForResultsException">It cannot be written.</exception>
     public static void Publish(
-        ImmutableArray<SummaryRow> rows, Study study, ResultsFolder results, string toolVersion, bool hasNewResults, Func<Publisher> publisher)
+        ImmutableArray<SummaryRow> rows, byte[] summary, Study study, ResultsFolder results, string toolVersion, bool hasNewResults, Func<Publisher> publisher)
     {
         try
         {
-            var stamp = StampOf(rows, study.Baseline, results);
+            var stamp = StampOf(summary, results);
             if (!hasNewResults && ReadIfOf(results.Report, stamp) is not null)
                 return;
             var report = new StudyReport(
@@ -38,11 +39,11 @@ public static class StudyReportFile
     }
 
     /// <summary>The report that lies there; null where there is none of this summary, or it was changed, or cannot be read.</summary>
-    public static byte[]? Find(ImmutableArray<SummaryRow> rows, string? baseline, ResultsFolder results)
+    public static byte[]? Find(byte[] summary, ResultsFolder results)
     {
         try
         {
-            return ReadIfOf(results.Report, StampOf(rows, baseline, results));
+            return ReadIfOf(results.Report, StampOf(summary, results));
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
@@ -50,10 +51,10 @@ public static class StudyReportFile
         }
     }
 
-    private static string StampOf(ImmutableArray<SummaryRow> rows, string? baseline, ResultsFolder results)
+    private static string StampOf(byte[] summary, ResultsFolder results)
     {
         var changes = File.Exists(results.Changes) ? File.ReadAllBytes(results.Changes) : [];
-        return $"of summary {Hash(SummaryTable.Write(rows, baseline))} and changes {Hash(changes)}";
+        return $"of summary {Hash(summary)} and changes {Hash(changes)}";
     }
 
     private static byte[]? ReadIfOf(string path, string stamp)

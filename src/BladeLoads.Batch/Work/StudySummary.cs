@@ -17,10 +17,10 @@ public static class StudySummary
     ];
 
     /// <summary>Writes <c>summary.csv</c> where it is not there with these very bytes already.</summary>
+    /// <param name="bytes">As <see cref="SummaryTable.Write"/> makes them.</param>
     /// <exception cref="NoRoomForResultsException">It cannot be written.</exception>
-    public static void Publish(ImmutableArray<SummaryRow> rows, string? baseline, ResultsFolder results, Func<Publisher> publisher)
+    public static void Publish(byte[] bytes, ResultsFolder results, Func<Publisher> publisher)
     {
-        var bytes = SummaryTable.Write(rows, baseline);
         try
         {
             if (File.Exists(results.Summary) && File.ReadAllBytes(results.Summary).AsSpan().SequenceEqual(bytes))

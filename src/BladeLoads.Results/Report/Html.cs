@@ -1,4 +1,3 @@
-using System.Globalization;
 using System.Xml.Linq;
 using BladeLoads.Results.Wording;
 
@@ -7,9 +6,6 @@ namespace BladeLoads.Results.Report;
 /// <summary>Pieces of a page. Whatever stands in a text is shown as text: elements are never made of strings.</summary>
 internal static class Html
 {
-    /// <summary>Shown for a number that there is not.</summary>
-    public const string None = "-";
-
     // An empty element would be written as <td />, which a browser takes for an element that is not closed.
     public static XElement Element(string name, params object?[] content)
     {
@@ -44,11 +40,4 @@ internal static class Html
             }))),
             Element("tbody", rows.Select(row => Element("tr", row.Select((text, i) => Cell("td", text, i))))));
     }
-
-    /// <summary>Four digits, as many as a reader compares.</summary>
-    public static string Figure(double? value) => value is not { } number
-        ? None
-        : number.ToString(Math.Abs(number) switch { >= 1000 => "0", >= 100 => "0.0", >= 10 => "0.00", _ => "0.000" }, CultureInfo.InvariantCulture);
-
-    public static string Percent(double? value) => value?.ToString("+0.00;-0.00;0.00", CultureInfo.InvariantCulture) ?? None;
 }

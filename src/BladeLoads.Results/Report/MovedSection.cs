@@ -1,6 +1,7 @@
 using System.Globalization;
 using System.Xml.Linq;
 using static BladeLoads.Results.Report.Html;
+using static BladeLoads.Results.Wording.FigureText;
 
 namespace BladeLoads.Results.Report;
 
@@ -29,7 +30,7 @@ internal static class MovedSection
 
     private static string Value(MovedFigure figure, double? value) => figure.Unit switch
     {
-        "" => value?.ToString("0.0000", CultureInfo.InvariantCulture) ?? None,
+        "" => Coefficient(value),
         "points" => value?.ToString("0", CultureInfo.InvariantCulture) ?? None,
         _ => Figure(value),
     };

@@ -1,18 +1,17 @@
 using System.Collections.Immutable;
-using System.Globalization;
 using System.Xml.Linq;
 using BladeLoads.Results.Comparison;
 using BladeLoads.Results.Receipts;
 using BladeLoads.Results.Wording;
 using static BladeLoads.Results.Report.Html;
+using static BladeLoads.Results.Tables.FileUnits;
+using static BladeLoads.Results.Wording.FigureText;
 
 namespace BladeLoads.Results.Report;
 
 /// <summary>The figures of all cases, their difference to the baseline, and the marks they carry.</summary>
 internal static class SummarySection
 {
-    private const double JoulesPerMegawattHour = 3.6e9;
-
     public static XElement Of(StudyReport report)
     {
         var baseline = report.Cases.FirstOrDefault(c => c.Row.Case == report.Baseline)?.Row.Summary;
@@ -36,11 +35,15 @@ internal static class SummarySection
 
     private static string[] Figures(CaseSummary? s) =>
     [
-        s?.BestPowerCoefficient?.Value.ToString("0.0000", CultureInfo.InvariantCulture) ?? None, Figure(s?.BestTipSpeedRatio),
-        Figure(s?.LargestElectricalPower?.Value / 1000), Figure(s?.RatedWindSpeed), Figure(s?.LargestThrust?.Value / 1000),
-        Figure(s?.LargestThrust?.WindSpeed), Figure(s?.LargestFlapwiseMoment?.Value / 1000), Figure(s?.LargestFlapwiseMoment?.WindSpeed),
-        Figure(s?.LargestEdgewiseMoment?.Value / 1000), Figure(s?.LargestEdgewiseMoment?.WindSpeed),
+        Coefficient(s?.BestPowerCoefficient?.Value), Figure(s?.BestTipSpeedRatio),
+        InKilo(s?.LargestElectricalPower), Figure(s?.RatedWindSpeed), InKilo(s?.LargestThrust),
+        Figure(s?.LargestThrust?.WindSpeed), InKilo(s?.LargestFlapwiseMoment), Figure(s?.LargestFlapwiseMoment?.WindSpeed),
+        InKilo(s?.LargestEdgewiseMoment), Figure(s?.LargestEdgewiseMoment?.WindSpeed),
     ];
+
+    private static string InKilo(Extreme? extreme) => Figure(extreme is null ? null : Kilo(extreme.Value));
+
+    private static string InMegawattHours(double? energy) => Figure(energy is { } joules ? MegawattHours(joules) : null);
 
     private static string State(ReportedCase c) => string.Join(
         ' ',
@@ -65,9 +68,9 @@ internal static class SummarySection
                     var energy = c.Row.Summary.Energy;
                     return (string[])
                     [
-                        c.Row.Case, Figure(best?.TipSpeedRatio), Figure(best is null ? null : double.RadiansToDegrees(best.FinePitch)),
-                        Figure(energy?.AnnualEnergy / JoulesPerMegawattHour), Figure(energy?.CapacityFactor),
-                        Figure(energy?.TurbulentAnnualEnergy / JoulesPerMegawattHour), Figure(energy?.TurbulentCapacityFactor),
+                        c.Row.Case, Figure(best?.TipSpeedRatio), Figure(best is null ? null : Deg(best.FinePitch)),
+                        InMegawattHours(energy?.AnnualEnergy), Figure(energy?.CapacityFactor),
+                        InMegawattHours(energy?.TurbulentAnnualEnergy), Figure(energy?.TurbulentCapacityFactor),
                     ];
                 })),
         ];

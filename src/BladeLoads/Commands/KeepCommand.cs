@@ -73,11 +73,12 @@ internal static class KeepCommand
     private static int Keep(KeptAsked asked, AskedStudy study, StudyPlan plan, ResultsFolder results, Surroundings surroundings)
     {
         var rows = StudySummary.Rows(plan, ImmutableSortedDictionary<string, CaseOutcome>.Empty);
+        var summary = SummaryTable.Write(rows, study.Whole.Baseline);
         var (folder, record) = KeptSet.Keep(
             results,
             new KeepRequest(
                 asked.Name, [.. plan.Cases.Select(c => (c.Case.Name, c.State.Word)), .. plan.Rejected.Select(r => (r, "rejected"))],
-                SummaryTable.Write(rows, study.Whole.Baseline), StudyReportFile.Find(rows, study.Whole.Baseline, results), asked.Replace, asked.AsItIs, surroundings.Time.GetUtcNow(),
+                summary, StudyReportFile.Find(summary, results), asked.Replace, asked.AsItIs, surroundings.Time.GetUtcNow(),
                 CommandLine.ToolVersion),
             surroundings.Disk);
         var kept = record.Cases.Count(c => c.Fingerprint is not null);

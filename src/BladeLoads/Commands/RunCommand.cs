@@ -57,8 +57,9 @@ internal static class RunCommand
         var othersAreDue = !due.IsEmpty && wholePlan.Cases.Any(c => c.IsDue && !run.Outcomes.ContainsKey(c.Case.Name));
         var rows = StudySummary.Rows(othersAreDue ? study.Plan(look, request.Only).Whole : wholePlan, run.Outcomes);
         var shown = RowsOf(plan, rows);
+        var summary = SummaryTable.Write(rows, study.Whole.Baseline);
         if (run.NoRoom is null)
-            StudySummary.Publish(rows, study.Whole.Baseline, results, publisher.Get);
+            StudySummary.Publish(summary, results, publisher.Get);
         var moved = run.NoRoom is null && !changes.IsEmpty ? changes.Compare(run.Outcomes) : [];
         if (run.NoRoom is null && !changes.IsEmpty)
             changes.Publish(moved, run.Outcomes, publisher.Get());
@@ -74,7 +75,7 @@ internal static class RunCommand
         }
         // After all is on the screen: a report that cannot be written hides nothing else.
         if (run.NoRoom is null && run.Faults.IsEmpty)
-            StudyReportFile.Publish(rows, study.Whole, results, CommandLine.ToolVersion, !run.Outcomes.IsEmpty, publisher.Get);
+            StudyReportFile.Publish(rows, summary, study.Whole, results, CommandLine.ToolVersion, !run.Outcomes.IsEmpty, publisher.Get);
         return Tell(run, shown, study.Asked, signals, surroundings);
     }
 

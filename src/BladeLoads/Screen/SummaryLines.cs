@@ -4,6 +4,7 @@ using BladeLoads.Results.Receipts;
 using BladeLoads.Results.Report;
 using BladeLoads.Results.Tables;
 using BladeLoads.Results.Wording;
+using static BladeLoads.Results.Wording.FigureText;
 
 namespace BladeLoads.Screen;
 
@@ -98,7 +99,7 @@ internal static class SummaryLines
             return $"{name.PadRight(width)}  {row.State}";
         var figures = Row(
             name, width,
-            (summary.BestPowerCoefficient is { } best ? best.Value.ToString("0.0000", CultureInfo.InvariantCulture) : "-", 7),
+            (Coefficient(summary.BestPowerCoefficient?.Value), 7),
             (Figure(summary.BestTipSpeedRatio), 7),
             (Figure(summary.LargestElectricalPower?.Value / 1000), 9),
             (Figure(summary.RatedWindSpeed), 10),
@@ -121,10 +122,4 @@ internal static class SummaryLines
             row += "  " + text.PadLeft(cellWidth - 1);
         return row;
     }
-
-    private static string Figure(double? value) => value is not { } number
-        ? "-"
-        : number.ToString(Math.Abs(number) switch { >= 1000 => "0", >= 100 => "0.0", >= 10 => "0.00", _ => "0.000" }, CultureInfo.InvariantCulture);
-
-    private static string Percent(double? value) => value?.ToString("+0.00;-0.00;0.00", CultureInfo.InvariantCulture) ?? "-";
 }
